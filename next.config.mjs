@@ -1,5 +1,7 @@
 /** @type {import('next').NextConfig} */
 const nextConfig = {
+  // A second server beside the first one (tests, a contributor's own port) must not share its build folder.
+  distDir: process.env.NEXT_DIST_DIR ?? '.next',
   poweredByHeader: false,
   reactStrictMode: true,
   allowedDevOrigins: ['127.0.0.1'],
