@@ -1,0 +1,15 @@
+import type { ReactNode } from 'react';
+
+/**
+ * Nothing here, and what to do about it.
+ * @example <EmptyState title="No open case" action={<ButtonLink href="/cases/new">Open a case</ButtonLink>}>Cases that wait for you stand here.</EmptyState>
+ */
+export function EmptyState({ title, children, action }: { title: ReactNode; children?: ReactNode; action?: ReactNode }) {
+  return (
+    <div className="border-y border-rule py-10">
+      <p className="heading text-2xl">{title}</p>
+      {children && <div className="mt-2 max-w-prose text-ink-soft">{children}</div>}
+      {action && <div className="mt-5 flex flex-wrap gap-3">{action}</div>}
+    </div>
+  );
+}

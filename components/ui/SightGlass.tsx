@@ -1,0 +1,51 @@
+import type { CSSProperties } from 'react';
+import { classes } from './classes';
+
+interface Props {
+  /** Whose level it is: the cause or the station. Becomes the accessible name. */
+  label: string;
+  /** From 0 to 1. */
+  value: number;
+  /** The level before the last finding: drawn as a dashed line, and said in words. */
+  previous?: number;
+  size?: 'small' | 'medium' | 'large';
+  className?: string;
+}
+
+const glasses = { small: 'h-9 w-4', medium: 'h-14 w-6', large: 'h-24 w-9' } as const;
+const figures = { small: 'text-base', medium: 'text-xl', large: 'text-3xl' } as const;
+
+/** A share as people read it: whole percent, but neither a false 0 nor a false 100. */
+export function percent(value: number): string {
+  const share = Math.min(Math.max(value, 0), 1);
+  if (share > 0 && share < 0.01) return '<1 %';
+  if (share < 1 && share > 0.99) return '>99 %';
+  return `${Math.round(share * 100)} %`;
+}
+
+/**
+ * A probability as an upright glass filled to its level, with the number printed beside it.
+ * @example <SightGlass label="Drain choked by sealant" value={0.42} previous={0.17} />
+ */
+export function SightGlass({ label, value, previous, size = 'medium', className }: Props) {
+  const level = Math.min(Math.max(value, 0), 1);
+  const moved = previous !== undefined && Math.round(previous * 100) !== Math.round(value * 100);
+  return (
+    <span className={classes('inline-flex items-center gap-2.5', className)}>
+      <span
+        role="meter"
+        aria-label={label}
+        aria-valuemin={0}
+        aria-valuemax={100}
+        aria-valuenow={Math.round(level * 100)}
+        aria-valuetext={moved ? `${percent(value)}, was ${percent(previous)}` : percent(value)}
+        className={classes('sight-glass', glasses[size])}
+      >
+        <span className="sight-glass-oil" style={{ '--level': level } as CSSProperties} />
+        <span className="sight-glass-ticks" />
+        {moved && <span className="sight-glass-was" style={{ '--was': previous } as CSSProperties} />}
+      </span>
+      <span aria-hidden="true" className={classes('figure font-bold whitespace-nowrap', figures[size])}>{percent(value)}</span>
+    </span>
+  );
+}
