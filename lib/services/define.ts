@@ -1,0 +1,73 @@
+import type { z } from 'zod';
+import { asTenant, type Transaction } from '@/db/connect';
+import { insertAudit } from '@/db/queries/audit';
+import { hasAnyRole, type Role } from '@/lib/auth/roles';
+import { forbidden, invalid } from '@/lib/errors';
+import type { Ctx } from './context';
+import { fieldErrors } from './field-errors';
+
+export interface Work<Input> {
+  tx: Transaction;
+  ctx: Ctx;
+  input: Input;
+  /** Notes what was written; the row goes in with the write or not at all. */
+  audit: (row: { entity: string; entityId: string; changed: Record<string, unknown> }) => void;
+  /** Says that nothing was written after all: a repeated request whose first copy had arrived. */
+  unchanged: () => void;
+}
+
+interface Definition<Schema extends z.ZodType, Result> {
+  /** "open.case": verb and entity; the audit's action. */
+  name: string;
+  /** "open a case": completes "Your role does not allow you to …". */
+  doing: string;
+  roles: readonly Role[];
+  input: Schema;
+  run: (work: Work<z.output<Schema>>) => Promise<Result>;
+}
+
+export interface Service<Schema extends z.ZodType, Result> {
+  readonly action: string;
+  readonly roles: readonly Role[];
+  readonly input: Schema;
+  (args: { ctx: Ctx; input: z.input<Schema> }): Promise<Result>;
+}
+
+/**
+ * A write: role, parse, transaction, work, audit row in the same transaction, in this order and for every one of
+ * them. A write that notes nothing in the audit is a mistake of ours and is rolled back.
+ */
+export const defineWrite = <Schema extends z.ZodType, Result>(definition: Definition<Schema, Result>) =>
+  define(definition, true);
+
+/** A read: role, parse, transaction with the organisation set. */
+export const defineRead = <Schema extends z.ZodType, Result>(definition: Definition<Schema, Result>) =>
+  define(definition, false);
+
+function define<Schema extends z.ZodType, Result>(
+  { name, doing, roles, input: schema, run }: Definition<Schema, Result>,
+  writes: boolean,
+): Service<Schema, Result> {
+  const service = async ({ ctx, input }: { ctx: Ctx; input: z.input<Schema> }) => {
+    if (!hasAnyRole(ctx.roles, roles)) throw forbidden(doing);
+    const parsed = schema.safeParse(input);
+    if (!parsed.success) throw invalid(fieldErrors(parsed.error));
+
+    return asTenant(ctx.db, { organisationId: ctx.organisation.id, personId: ctx.person.id }, async (tx) => {
+      const noted: Parameters<Work<unknown>['audit']>[0][] = [];
+      let isUnchanged = false;
+      const result = await run({
+        tx,
+        ctx,
+        input: parsed.data,
+        audit: (row) => noted.push(row),
+        unchanged: () => (isUnchanged = true),
+      });
+      if (writes && noted.length === 0 && !isUnchanged) throw new Error(`${name} wrote without an audit row`);
+      await insertAudit(tx, noted.map((row) => ({ ...row, organisationId: ctx.organisation.id, personId: ctx.person.id, action: name, at: ctx.now() })));
+      return result;
+    });
+  };
+  // A function's own name can't be assigned to, so that the service's is `action`.
+  return Object.assign(service, { action: name, roles, input: schema });
+}
