@@ -1,0 +1,87 @@
+/**
+ * Who may import whom, as lint rules: the table of DEVELOPERS.md, enforced. Each row names a folder and what it must
+ * not reach; types are allowed where a row says so, since they leave no code behind.
+ */
+const DATABASE = ['@/db', '@/db/**', 'drizzle-orm', 'drizzle-orm/*', 'pg'];
+const FRAMEWORK = ['react', 'react-dom', 'react/*', 'next', 'next/*', 'next-auth', 'next-auth/*', 'server-only'];
+const NODE = ['node:*', 'fs', 'fs/*', 'path', 'crypto'];
+const APPLICATION = ['@/app/*', '@/components/*', '@/worker/*', '@/scripts/*', '@/tests/*'];
+const OTHER_LIBRARIES = (...own) => [
+  ...['auth', 'services', 'mail', 'storage', 'jobs', 'query', 'schemas', 'errors', 'env', 'ids', 'diagnose', 'units']
+    .filter((name) => !own.includes(name))
+    .flatMap((name) => [`@/lib/${name}`, `@/lib/${name}/*`]),
+];
+
+/** @type {{ folder: string, except?: string[], never: string[], typesAllowed?: boolean, because: string }[]} */
+const ROWS = [
+  { folder: 'app/**', never: DATABASE, because: 'Routes reach the database through a service.' },
+  {
+    folder: 'components/**',
+    never: [...DATABASE, '@/lib/services', '@/lib/services/**', '@/lib/auth', '@/lib/auth/**'],
+    because: 'Components get their data as properties.',
+    typesAllowed: true,
+  },
+  {
+    folder: 'db/**',
+    except: ['db/seed/**'],
+    never: [...FRAMEWORK.filter((name) => name !== 'server-only'), ...APPLICATION, ...OTHER_LIBRARIES('errors', 'ids', 'env')],
+    because: 'The database layer knows nothing of what is built on it.',
+    typesAllowed: true,
+  },
+  {
+    folder: 'lib/diagnose/**',
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES('diagnose'), 'pino'],
+    because: 'The ranking core is pure: its inputs are its parameters.',
+  },
+  {
+    folder: 'lib/diagnose/**',
+    except: ['lib/diagnose/record-run.ts', 'lib/diagnose/engine/**'],
+    never: ['json-rules-engine'],
+    because: 'The compiled half runs in a browser without the engine.',
+    adds: true,
+  },
+  {
+    folder: 'lib/units/**',
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES('units')],
+    because: 'Units are pure arithmetic on text.',
+  },
+  {
+    folder: 'lib/schemas/**',
+    never: [...FRAMEWORK, ...DATABASE, ...APPLICATION, '@/lib/services', '@/lib/services/**', '@/lib/auth/session'],
+    because: 'Schemas are shared by form, action, route and service.',
+  },
+  {
+    folder: 'lib/services/**',
+    never: [...FRAMEWORK, ...APPLICATION, '@/db', '@/lib/auth/session', '@/lib/auth/action', '@/lib/auth/route', '@/lib/auth/page'],
+    because: 'A service is handed its context; it knows no framework.',
+  },
+  { folder: 'worker/**', never: [...FRAMEWORK, '@/app/*', '@/components/*'], because: 'A job calls a service.' },
+  { folder: 'tests/**', except: ['tests/e2e/**'], never: ['@/db', '@/db/index'], because: 'Tests open their own connection.' },
+];
+
+/** "a" means exactly a, "a/*" all below it: the lint rule's own globs would take "a" for both. */
+const regex = (names) => `^(?:${names.map((name) => name.replace(/[.$]/g, '\\$&').replace(/([:/])\*+$/, '$1.+')).join('|')})$`;
+
+const patternsFor = (row) => [{ regex: regex(row.never), message: row.because, allowTypeImports: row.typesAllowed ?? false }];
+
+// A later block replaces a rule's options, so that a row that adds to another's carries both.
+const joined = ROWS.filter((row) => !row.adds).map((row) => ({
+  files: [`${row.folder}/*.{ts,tsx}`, `${row.folder.replace('/**', '')}/*.{ts,tsx}`],
+  ignores: row.except ?? [],
+  rules: {
+    '@typescript-eslint/no-restricted-imports': ['error', { patterns: patternsFor(row) }],
+  },
+}));
+
+const withAdditions = ROWS.filter((row) => row.adds).map((row) => {
+  const base = ROWS.find((other) => other.folder === row.folder && !other.adds);
+  return {
+    files: [`${row.folder}/*.ts`, `${row.folder.replace('/**', '')}/*.ts`],
+    ignores: row.except ?? [],
+    rules: {
+      '@typescript-eslint/no-restricted-imports': ['error', { patterns: [...patternsFor(base), ...patternsFor(row)] }],
+    },
+  };
+});
+
+export const boundaries = [...joined, ...withAdditions];
