@@ -12,9 +12,10 @@ export const NORMAL_CARRYOVER = 'normal-carryover';
 /** Where a statement comes from. A judgement says so; a regulation names its paragraph in `source`. */
 export type Basis = 'regulation' | 'common practice' | 'judgement';
 
+/** A quantity of lib/units, by its id there: the core takes SI and only passes the name on. */
 export type Quantity =
   | 'pressure' | 'pressureRate' | 'vacuum' | 'length' | 'volume' | 'temperature' | 'temperatureDifference'
-  | 'duration' | 'distance' | 'volumeRate' | 'ratio' | 'count' | 'countRate';
+  | 'duration' | 'distance' | 'oilRate' | 'ratio' | 'count' | 'cycleRate';
 
 // ---------------------------------------------------------------- rulebook
 
