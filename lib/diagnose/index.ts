@@ -1,0 +1,12 @@
+/** The ranking core that runs anywhere, browser included. The run of record is in `record-run.ts`. */
+export * from './types';
+export * from './stations';
+export { RulebookError, FindingError, lineOf, type Problem, type FindingErrorCode } from './errors';
+export { RANKER_VERSION } from './ranker-version';
+export { natsOf, decibansOf } from './decibans';
+export { compileRulebook } from './compile-rulebook';
+export type { CompiledRulebook, CompiledCheck, CompiledRule, CompiledGroup } from './compiled';
+export { sharesOf } from './shares';
+export { priorsFor } from './priors';
+export { rank, type RankOptions } from './rank';
+export { createWhatIf, type WhatIf } from './what-if';
