@@ -2,6 +2,8 @@
 const nextConfig = {
   // A second server beside the first one (tests, a contributor's own port) must not share its build folder.
   distDir: process.env.NEXT_DIST_DIR ?? '.next',
+  // Extending another file stops Next from writing each build folder's types into tsconfig.json.
+  typescript: { tsconfigPath: 'tsconfig.build.json' },
   poweredByHeader: false,
   reactStrictMode: true,
   allowedDevOrigins: ['127.0.0.1'],

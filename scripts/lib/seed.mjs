@@ -1,0 +1,22 @@
+import { existsSync } from 'node:fs';
+import { inProject, root } from './paths.mjs';
+import { readIfThere } from './files.mjs';
+import { withClient } from './roles.mjs';
+
+/** Whether the database holds no organisation yet; asked as superuser, whom row-level security doesn't blind. @param {string} url */
+export const isEmpty = (url) => withClient(url, async (client) => (await client.query('select from organisation limit 1')).rowCount === 0);
+
+/**
+ * Puts the demo organisation in, in one transaction of the seed's own: a killed one leaves the database empty.
+ * @param {import('./processes.mjs').ProcessKeeper} processes
+ * @param {string} ownerUrl
+ * @param {Record<string, string>} env
+ */
+export async function seed(processes, ownerUrl, env) {
+  const script = inProject('db', 'seed', 'index.ts');
+  if (!existsSync(script)) return;
+  await processes.run('seed', process.execPath, ['--import', 'tsx', script], { cwd: root, env: { ...env, DATABASE_OWNER_URL: ownerUrl } });
+}
+
+/** @returns {{ role: string, email: string, password: string }[]} */
+export const demoSignIns = () => JSON.parse(readIfThere(inProject('db', 'seed', 'sign-ins.json')) ?? '[]');
