@@ -31,18 +31,19 @@ CREATE TABLE "attempt" (
 CREATE TABLE "invitation" (
 	"organisation_id" uuid NOT NULL,
 	"id" uuid NOT NULL,
-	"email" text NOT NULL,
-	"name" text NOT NULL,
+	"email" text,
 	"roles" text[] NOT NULL,
 	"site_id" uuid,
-	"token_hash" text NOT NULL,
+	"token_hash" text,
 	"expires_at" timestamp with time zone NOT NULL,
 	"accepted_at" timestamp with time zone,
+	"accepted_by" uuid,
 	"withdrawn_at" timestamp with time zone,
 	"invited_by" uuid NOT NULL,
 	"created_at" timestamp with time zone DEFAULT now() NOT NULL,
 	CONSTRAINT "invitation_organisation_id_id_pk" PRIMARY KEY("organisation_id","id"),
-	CONSTRAINT "invitation_token" UNIQUE("token_hash")
+	CONSTRAINT "invitation_token" UNIQUE("token_hash"),
+	CONSTRAINT "invitation_roles" CHECK (cardinality(roles) > 0 and roles <@ array['technician', 'engineer', 'manager', 'trainer', 'administrator'])
 );
 --> statement-breakpoint
 ALTER TABLE "invitation" ENABLE ROW LEVEL SECURITY;--> statement-breakpoint
@@ -55,7 +56,9 @@ CREATE TABLE "membership" (
 	"release_basis" text,
 	"ended_at" timestamp with time zone,
 	"created_at" timestamp with time zone DEFAULT now() NOT NULL,
-	CONSTRAINT "membership_organisation_id_person_id_pk" PRIMARY KEY("organisation_id","person_id")
+	CONSTRAINT "membership_organisation_id_person_id_pk" PRIMARY KEY("organisation_id","person_id"),
+	CONSTRAINT "membership_roles" CHECK (cardinality(roles) > 0 and roles <@ array['technician', 'engineer', 'manager', 'trainer', 'administrator']),
+	CONSTRAINT "membership_release_has_basis" CHECK (not may_release or release_basis is not null)
 );
 --> statement-breakpoint
 ALTER TABLE "membership" ENABLE ROW LEVEL SECURITY;--> statement-breakpoint
@@ -377,6 +380,7 @@ CREATE TABLE "removal" (
 ALTER TABLE "removal" ENABLE ROW LEVEL SECURITY;--> statement-breakpoint
 ALTER TABLE "site" ADD CONSTRAINT "site_organisation_id_organisation_id_fk" FOREIGN KEY ("organisation_id") REFERENCES "public"."organisation"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "invitation" ADD CONSTRAINT "invitation_organisation_id_organisation_id_fk" FOREIGN KEY ("organisation_id") REFERENCES "public"."organisation"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
+ALTER TABLE "invitation" ADD CONSTRAINT "invitation_accepted_by_person_id_fk" FOREIGN KEY ("accepted_by") REFERENCES "public"."person"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "invitation" ADD CONSTRAINT "invitation_invited_by_person_id_fk" FOREIGN KEY ("invited_by") REFERENCES "public"."person"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "invitation" ADD CONSTRAINT "invitation_organisation_id_site_id_site_organisation_id_id_fk" FOREIGN KEY ("organisation_id","site_id") REFERENCES "public"."site"("organisation_id","id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "membership" ADD CONSTRAINT "membership_organisation_id_organisation_id_fk" FOREIGN KEY ("organisation_id") REFERENCES "public"."organisation"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
@@ -409,6 +413,7 @@ ALTER TABLE "finding" ADD CONSTRAINT "finding_organisation_id_case_id_case_organ
 ALTER TABLE "finding_note" ADD CONSTRAINT "finding_note_person_id_person_id_fk" FOREIGN KEY ("person_id") REFERENCES "public"."person"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "finding_note" ADD CONSTRAINT "finding_note_organisation_id_finding_id_finding_organisation_id_id_fk" FOREIGN KEY ("organisation_id","finding_id") REFERENCES "public"."finding"("organisation_id","id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "run" ADD CONSTRAINT "run_organisation_id_case_id_case_organisation_id_id_fk" FOREIGN KEY ("organisation_id","case_id") REFERENCES "public"."case"("organisation_id","id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
+ALTER TABLE "run" ADD CONSTRAINT "run_organisation_id_edition_id_edition_organisation_id_id_fk" FOREIGN KEY ("organisation_id","edition_id") REFERENCES "public"."edition"("organisation_id","id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "attachment" ADD CONSTRAINT "attachment_organisation_id_organisation_id_fk" FOREIGN KEY ("organisation_id") REFERENCES "public"."organisation"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "audit" ADD CONSTRAINT "audit_organisation_id_organisation_id_fk" FOREIGN KEY ("organisation_id") REFERENCES "public"."organisation"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "removal" ADD CONSTRAINT "removal_organisation_id_organisation_id_fk" FOREIGN KEY ("organisation_id") REFERENCES "public"."organisation"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
@@ -433,8 +438,9 @@ CREATE POLICY "itself" ON "organisation" AS PERMISSIVE FOR ALL TO public USING (
 CREATE POLICY "of_this_organisation" ON "site" AS PERMISSIVE FOR ALL TO public USING (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid) WITH CHECK (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid);--> statement-breakpoint
 CREATE POLICY "of_this_organisation" ON "invitation" AS PERMISSIVE FOR ALL TO public USING (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid) WITH CHECK (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid);--> statement-breakpoint
 CREATE POLICY "of_this_organisation_or_ones_own" ON "membership" AS PERMISSIVE FOR SELECT TO public USING (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid or person_id = nullif(current_setting('app.person_id', true), '')::uuid);--> statement-breakpoint
-CREATE POLICY "written_in_this_organisation" ON "membership" AS PERMISSIVE FOR ALL TO public USING (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid) WITH CHECK (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid);--> statement-breakpoint
-CREATE POLICY "oneself_or_colleague" ON "person" AS PERMISSIVE FOR ALL TO public USING (id = nullif(current_setting('app.person_id', true), '')::uuid or exists (select 1 from membership m where m.person_id = person.id and m.organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid)) WITH CHECK (true);--> statement-breakpoint
+CREATE POLICY "changed_in_this_organisation" ON "membership" AS PERMISSIVE FOR UPDATE TO public USING (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid) WITH CHECK (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid);--> statement-breakpoint
+CREATE POLICY "oneself_or_colleague" ON "person" AS PERMISSIVE FOR SELECT TO public USING (id = nullif(current_setting('app.person_id', true), '')::uuid or exists (select 1 from membership m where m.person_id = person.id and m.organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid));--> statement-breakpoint
+CREATE POLICY "changed_by_oneself" ON "person" AS PERMISSIVE FOR UPDATE TO public USING (id = nullif(current_setting('app.person_id', true), '')::uuid) WITH CHECK (id = nullif(current_setting('app.person_id', true), '')::uuid);--> statement-breakpoint
 CREATE POLICY "of_this_organisation" ON "compressor_model" AS PERMISSIVE FOR ALL TO public USING (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid) WITH CHECK (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid);--> statement-breakpoint
 CREATE POLICY "of_this_organisation" ON "unit" AS PERMISSIVE FOR ALL TO public USING (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid) WITH CHECK (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid);--> statement-breakpoint
 CREATE POLICY "of_this_organisation" ON "unit_reading" AS PERMISSIVE FOR ALL TO public USING (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid) WITH CHECK (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid);--> statement-breakpoint

@@ -1,14 +1,18 @@
 import { sql } from 'drizzle-orm';
-import { boolean, foreignKey, index, integer, jsonb, pgPolicy, pgTable, primaryKey, text, unique, uuid } from 'drizzle-orm/pg-core';
+import { boolean, check, foreignKey, index, integer, jsonb, pgPolicy, pgTable, primaryKey, text, unique, uuid } from 'drizzle-orm/pg-core';
 import { createdAt, id, instant, ofThisOrganisation, organisationId, organisationPolicy } from './columns';
 import { organisation, site } from './organisation';
+
+/** At least one, and each of those in lib/auth/roles.ts. */
+const ROLES_KNOWN = sql`cardinality(roles) > 0 and roles <@ array['technician', 'engineer', 'manager', 'trainer', 'administrator']`;
 
 const signedIn = sql`nullif(current_setting('app.person_id', true), '')::uuid`;
 
 /**
  * Somebody with a sign-in: one address, any number of organisations. The only place where names stand, so that
- * erasing a person is one update. Visible: oneself, and whoever shares the organisation set. Signing in reads it
- * through a function of the owner's, since nobody is signed in yet.
+ * erasing a person is one update. Visible: oneself, and whoever is or was in the organisation set (cases name
+ * them). The application's role changes only the person signed in, never reads a password hash and adds nobody:
+ * what happens before somebody is signed in goes through functions of the owner's (drizzle/0002_before_sign_in.sql).
  */
 export const person = pgTable(
   'person',
@@ -28,10 +32,10 @@ export const person = pgTable(
   },
   () => [
     pgPolicy('oneself_or_colleague', {
-      for: 'all',
+      for: 'select',
       using: sql`id = ${signedIn} or exists (select 1 from membership m where m.person_id = person.id and m.organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid)`,
-      withCheck: sql`true`,
     }),
+    pgPolicy('changed_by_oneself', { for: 'update', using: sql`id = ${signedIn}`, withCheck: sql`id = ${signedIn}` }),
   ],
 ).enableRLS();
 
@@ -59,23 +63,30 @@ export const membership = pgTable(
       for: 'select',
       using: sql`${ofThisOrganisation} or person_id = ${signedIn}`,
     }),
-    pgPolicy('written_in_this_organisation', { for: 'all', using: ofThisOrganisation, withCheck: ofThisOrganisation }),
+    pgPolicy('changed_in_this_organisation', { for: 'update', using: ofThisOrganisation, withCheck: ofThisOrganisation }),
+    check('membership_roles', ROLES_KNOWN),
+    check('membership_release_has_basis', sql`not may_release or release_basis is not null`),
   ],
 ).enableRLS();
 
-/** A mailed link that makes a membership. Single use; only the hash of its token is kept. */
+/**
+ * A mailed link that makes a membership. Single use. The token is made when the mail is sent and only its hash is
+ * kept, so that no link can be read out of the database or the job queue; sending again makes a new one.
+ */
 export const invitation = pgTable(
   'invitation',
   {
     organisationId: organisationId().references(() => organisation.id),
     id: id(),
-    email: text().notNull(),
-    name: text().notNull(),
+    /** Null once it is accepted or withdrawn: an address then stands with the person, or nowhere. */
+    email: text(),
     roles: text().array().notNull(),
     siteId: uuid(),
-    tokenHash: text().notNull().unique('invitation_token'),
+    /** Null until the mail is on its way. */
+    tokenHash: text().unique('invitation_token'),
     expiresAt: instant().notNull(),
     acceptedAt: instant(),
+    acceptedBy: uuid().references(() => person.id),
     withdrawnAt: instant(),
     invitedBy: uuid().notNull().references(() => person.id),
     createdAt: createdAt(),
@@ -83,6 +94,7 @@ export const invitation = pgTable(
   (t) => [
     primaryKey({ columns: [t.organisationId, t.id] }),
     foreignKey({ columns: [t.organisationId, t.siteId], foreignColumns: [site.organisationId, site.id] }),
+    check('invitation_roles', ROLES_KNOWN),
     organisationPolicy(),
   ],
 ).enableRLS();

@@ -2,6 +2,7 @@ import { boolean, foreignKey, index, jsonb, pgTable, primaryKey, text, uuid } fr
 import type { Finding, Ranking, RecordFacts } from '@/lib/diagnose/types';
 import { cases } from './case';
 import { createdAt, id, instant, organisationId, organisationPolicy, si } from './columns';
+import { edition } from './edition';
 
 /** What a run of record needs to be made again, bit for bit, with its edition. */
 export interface RunInputs {
@@ -44,6 +45,7 @@ export const run = pgTable(
   (t) => [
     primaryKey({ columns: [t.organisationId, t.id] }),
     foreignKey({ columns: [t.organisationId, t.caseId], foreignColumns: [cases.organisationId, cases.id] }),
+    foreignKey({ columns: [t.organisationId, t.editionId], foreignColumns: [edition.organisationId, edition.id] }),
     index('run_case').on(t.organisationId, t.caseId, t.at),
     organisationPolicy(),
   ],
