@@ -61,7 +61,7 @@ export const rotationalSpeed = {
   called: 'a rotational speed',
   siUnit: '1/s',
   units: {
-    rpm: unit('rpm', 'revolutions per minute', 1 / MINUTE, { spellings: ['r/min', 'rev/min', 'revs/min', 'revs', 'rpms', '1/min'] }),
+    rpm: unit('rpm', 'revolutions per minute', 1 / MINUTE, { spellings: ['r/min', 'rev/min', 'revs/min', 'revs', 'rpms'] }),
     'r/s': unit('r/s', 'revolutions per second', 1, { digits: 2, spellings: ['rps', 'rev/s', 'rev/sec'] }),
   },
   examples: ['1,000 rpm', '600 rpm'],
