@@ -7,7 +7,8 @@ import plugin from 'tailwindcss/plugin';
  *
  * - paper, sheet, sunk: grounds (the page; fields and raised parts; a band that lies lower)
  * - ink, inkSoft: text; edge: borders of controls; rule: hairlines that only decorate
- * - oil: fills and lines that mean evidence or level; oilInk: the same meaning as text
+ * - oil: lines that mean evidence or level; oilFill: the oil itself, always inside a line of ink;
+ *   oilInk: the same meaning as text, and the surface of the oil
  * - danger, dangerGround: danger to people, and what was refused in a form
  */
 export const palette = {
@@ -20,6 +21,7 @@ export const palette = {
     rule: '#c8bda3',
     edge: '#6b7f7d',
     oil: '#b56a00',
+    oilFill: '#e2a02c',
     oilInk: '#7d4a00',
     danger: '#a8201a',
     dangerGround: '#fae3dc',
@@ -33,6 +35,7 @@ export const palette = {
     rule: '#30474b',
     edge: '#7d9490',
     oil: '#eca32a',
+    oilFill: '#d9921c',
     oilInk: '#f3b554',
     danger: '#ff8f80',
     dangerGround: '#3a1714',

@@ -14,9 +14,9 @@ interface Look {
 }
 
 const variants: Record<ButtonVariant, string> = {
-  primary: 'bg-ink text-paper border-ink hover:bg-ink-soft hover:border-ink-soft disabled:bg-ink-soft',
-  quiet: 'bg-transparent text-ink border-edge hover:border-ink hover:bg-sunk disabled:text-ink-soft disabled:border-dashed',
-  danger: 'bg-transparent text-danger border-danger hover:bg-danger hover:text-paper disabled:border-dashed',
+  primary: 'bg-ink text-paper border-ink hover:bg-ink-soft hover:border-ink-soft disabled:border-edge disabled:border-dashed disabled:bg-transparent disabled:text-ink-soft',
+  quiet: 'bg-transparent text-ink border-edge hover:border-ink hover:bg-sunk disabled:border-dashed disabled:border-edge disabled:bg-transparent disabled:text-ink-soft',
+  danger: 'bg-transparent text-danger border-danger hover:bg-danger hover:text-paper disabled:border-dashed disabled:border-edge disabled:bg-transparent disabled:text-ink-soft',
 };
 const sizes: Record<ButtonSize, string> = {
   touch: 'min-h-touch px-5 py-2.5 text-[1.0625rem]',

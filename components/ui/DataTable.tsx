@@ -45,7 +45,7 @@ export function DataTable<Row>({ caption, captionHidden, columns, rows, rowKey, 
   return (
     <div role="region" aria-labelledby={captionId} tabIndex={0} className="overflow-x-auto">
       <table className="ledger">
-        <caption id={captionId} className={captionHidden ? 'sr-only' : 'label pb-3 text-left text-ink-soft'}>{caption}</caption>
+        <caption id={captionId} className={captionHidden ? 'sr-only' : 'label text-left text-ink-soft'}>{caption}</caption>
         <thead>
           <tr>
             {columns.map((column) => (

@@ -16,7 +16,7 @@ interface Props {
  */
 export function FilterBar({ action, label, children, resetHref }: Props) {
   return (
-    <form method="get" action={action} role="search" aria-label={label} className="filters flex flex-wrap items-end gap-4 border-y border-rule py-4">
+    <form method="get" action={action} role="search" aria-label={label} className="filters flex flex-wrap items-end gap-4 border-b border-rule pb-5">
       {children}
       <Button type="submit" variant="quiet">Show</Button>
       {resetHref && <ButtonLink variant="quiet" className="border-transparent" href={resetHref}>Clear</ButtonLink>}

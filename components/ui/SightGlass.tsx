@@ -6,21 +6,21 @@ interface Props {
   label: string;
   /** From 0 to 1. */
   value: number;
-  /** The level before the last finding: drawn as a dashed line, and said in words. */
+  /** The level before the last finding: a pointer at the scale, and said in words. */
   previous?: number;
   size?: 'small' | 'medium' | 'large';
   className?: string;
 }
 
-const glasses = { small: 'h-9 w-4', medium: 'h-14 w-6', large: 'h-24 w-9' } as const;
+const glasses = { small: 'h-8 w-5', medium: 'h-14 w-8', large: 'h-24 w-11' } as const;
 const figures = { small: 'text-base', medium: 'text-xl', large: 'text-3xl' } as const;
 
 /** A share as people read it: whole percent, but neither a false 0 nor a false 100. */
 export function percent(value: number): string {
   const share = Math.min(Math.max(value, 0), 1);
-  if (share > 0 && share < 0.01) return '<1 %';
-  if (share < 1 && share > 0.99) return '>99 %';
-  return `${Math.round(share * 100)} %`;
+  if (share > 0 && share < 0.01) return '<1%';
+  if (share < 1 && share > 0.99) return '>99%';
+  return `${Math.round(share * 100)}%`;
 }
 
 /**
@@ -41,9 +41,12 @@ export function SightGlass({ label, value, previous, size = 'medium', className 
         aria-valuetext={moved ? `${percent(value)}, was ${percent(previous)}` : percent(value)}
         className={classes('sight-glass', glasses[size])}
       >
-        <span className="sight-glass-oil" style={{ '--level': level } as CSSProperties} />
-        <span className="sight-glass-ticks" />
-        {moved && <span className="sight-glass-was" style={{ '--was': previous } as CSSProperties} />}
+        <span className="sight-glass-tube">
+          <span className="sight-glass-oil" style={{ '--level': level } as CSSProperties} />
+        </span>
+        <span className="sight-glass-scale">
+          {moved && <span className="sight-glass-was" style={{ '--was': previous } as CSSProperties} />}
+        </span>
       </span>
       <span aria-hidden="true" className={classes('figure font-bold whitespace-nowrap', figures[size])}>{percent(value)}</span>
     </span>

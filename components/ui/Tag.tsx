@@ -15,5 +15,5 @@ const tones: Record<TagTone, string> = {
  * @example <Tag tone="danger">Do not release</Tag>
  */
 export function Tag({ tone = 'plain', children }: { tone?: TagTone; children: ReactNode }) {
-  return <span className={classes('label inline-block rounded border px-1.5 py-px text-[0.8125rem] whitespace-nowrap', tones[tone])}>{children}</span>;
+  return <span className={classes('label inline-block justify-self-start rounded border px-1.5 py-px text-[0.8125rem] whitespace-nowrap', tones[tone])}>{children}</span>;
 }

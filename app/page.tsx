@@ -1,3 +1,0 @@
-export default function Home() {
-  return <main>Carryover</main>;
-}
