@@ -16,3 +16,10 @@ export const local = {
   s3: inProject('.local', 's3'),
   secrets: inProject('.local', 'secrets.json'),
 };
+
+/** What a test run keeps; git ignores it too. */
+export const test = {
+  run: inProject('.test', 'run'),
+  log: inProject('.test', 'log'),
+  results: inProject('.test', 'results'),
+};
