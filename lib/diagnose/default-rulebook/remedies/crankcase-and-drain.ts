@@ -13,7 +13,6 @@ export const remedies: Remedy[] = [
       { name: 'Mounting gasket', cost: 15 },
       { name: 'Spray adhesive or thin sealant', cost: 10 },
     ],
-    // The flood begins within minutes, so that a run in the bay shows whether it has stopped.
     seenInBay: true,
     steps: [
       ...makeSafeAndDrain,
@@ -81,7 +80,7 @@ export const remedies: Remedy[] = [
     look: { minutes: 30 },
     fix: { minutes: 45 },
     parts: [{ name: 'Breather element and hose', cost: 60 }],
-    seenInBay: false,
+    seenInBay: true,
     steps: [
       ...makeSafe,
       'Take the breather and its hose off. Look for sludge, ice, a kink or an element past its interval, and renew what is plugged.',
@@ -110,7 +109,7 @@ export const remedies: Remedy[] = [
     look: { minutes: 10 },
     fix: { minutes: 20 },
     parts: [],
-    seenInBay: false,
+    seenInBay: true,
     steps: [
       ...makeSafe,
       'Stand level with the engine off for as long as the maker says, then read the dipstick and note the litres above full.',

@@ -75,7 +75,7 @@ export const remedies: Remedy[] = [
       { name: 'Ring set, bore work and gaskets', cost: 320 },
       { name: 'Dryer cartridge', cost: 80 },
     ],
-    seenInBay: false,
+    seenInBay: true,
     steps: [
       ...makeSafeAndDrain,
       'Ask first whether the maker allows this compressor to be opened and sells the parts. If not, it is replaced as a whole.',
@@ -143,7 +143,6 @@ export const remedies: Remedy[] = [
     look: { minutes: 60 },
     fix: { minutes: 60 },
     parts: [{ name: 'Head or valve kit with gaskets', cost: 240 }],
-    // Build-up and head temperature fall back to the baseline at once.
     seenInBay: true,
     steps: [
       ...makeSafeAndDrain,

@@ -14,7 +14,6 @@ export const remedies: Remedy[] = [
       { name: 'Discharge line and fittings', cost: 140 },
       { name: 'Dryer cartridge', cost: 80 },
     ],
-    // Build-up time and head temperature come back at once.
     seenInBay: true,
     steps: [
       ...makeSafeAndDrain,

@@ -1,7 +1,13 @@
 import type { Remedy } from '../../types';
-import { breakInRun, gasketAtTheMount, makeSafeAndDrain, proveTheAirSide } from './common-steps';
+import {
+  breakInRun,
+  cleanDownstream,
+  gasketAtTheMount,
+  makeSafeAndDrain,
+  proveTheAirSide,
+  startTheWatch,
+} from './common-steps';
 
-/** A failed crank or bearing has no remedy of its own: `replace-compressor` covers it. */
 export const remedies: Remedy[] = [
   {
     id: 'replace-drive-gear',
@@ -38,5 +44,53 @@ export const remedies: Remedy[] = [
     ],
     basis: 'common practice',
     source: 'Steps: common practice, no source. Minutes and costs: judgement.',
+  },
+  {
+    id: 'replace-failed-compressor',
+    station: 'drive',
+    name: 'Replace the seized or broken compressor, and cure what broke it',
+    causes: ['crank-or-bearing-failed'],
+    look: { minutes: 60 },
+    fix: { minutes: 240 },
+    parts: [
+      { name: 'Compressor, exchange', cost: 1100 },
+      { name: 'Discharge line and fittings', cost: 140 },
+      { name: 'Governor', cost: 60 },
+      { name: 'Oil feed line and seals', cost: 60 },
+      { name: 'Mounting and intake gaskets', cost: 30 },
+      { name: 'Dryer cartridge', cost: 80 },
+    ],
+    seenInBay: true,
+    steps: [
+      ...makeSafeAndDrain,
+      'Take the feed line off and see whether clean oil comes through it and whether metal lies in its screen or port.',
+      'Support the compressor and take it off. Turn its crank by hand and feel for play: free and tight bearings mean that this wasn’t the cause.',
+      'Find out what broke it before you fit another: a starved feed, bad oil, a drain that flooded it, a narrowed line or a governor that let the pressure rise. Cure that first.',
+      'Metal has gone back to the engine: ask engine diagnosis before it runs again, change oil and filter, and clear the feed passage.',
+      'Inspect the drive gear: steel with every tooth sound may be reused; a fibre gear never.',
+      ...gasketAtTheMount,
+      'Change the discharge line, the governor and the oil feed line. Prime the compressor with clean oil.',
+      'Fit the intake with a new gasket on a clean face, a clean box and a sound hose. Fill and bleed the coolant.',
+      ...cleanDownstream,
+      'Measure oil pressure at the feed at hot idle: about 15 psi (1 bar) or more, or the maker’s figure.',
+      ...breakInRun,
+      ...proveTheAirSide,
+      startTheWatch,
+    ],
+    cautions: [
+      'vehicle-rolls',
+      'exhaust-fumes',
+      'pressure-falls-suspension-brakes',
+      'stored-air',
+      'hot-parts',
+      'scalding-coolant',
+      'heavy-part',
+      'belts-fan-gears',
+      'oil-mist-and-noise',
+      'carbon-fire',
+      'oil-in-brake-system',
+    ],
+    basis: 'common practice',
+    source: 'Steps: common practice, no source; 15 psi at idle from memory. Minutes and costs: judgement.',
   },
 ];

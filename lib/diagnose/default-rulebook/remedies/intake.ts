@@ -10,7 +10,7 @@ export const remedies: Remedy[] = [
     look: { minutes: 10 },
     fix: { minutes: 10 },
     parts: [{ name: 'Intake filter', cost: 45 }],
-    seenInBay: false,
+    seenInBay: true,
     steps: [
       ...makeSafe,
       'Measure the intake vacuum with the old filter in place, so that you can show what the new one changes.',
@@ -43,7 +43,7 @@ export const remedies: Remedy[] = [
       { name: 'Intake hose and clamps', cost: 40 },
       { name: 'Intake gasket', cost: 15 },
     ],
-    seenInBay: false,
+    seenInBay: true,
     steps: [
       ...makeSafe,
       'Squeeze the hose along its whole length and look through it. Soft, swollen, flattened or with a loose inner layer: it goes.',
@@ -77,7 +77,7 @@ export const remedies: Remedy[] = [
       { name: 'Compressor, exchange', cost: 1100 },
       { name: 'Discharge line, governor, oil feed line and mounting gasket', cost: 275 },
     ],
-    seenInBay: false,
+    seenInBay: true,
     steps: [
       ...makeSafeAndDrain,
       'Wipe inside the intake after the filter with a clean white cloth. Dust there proves the leak: photograph it.',
@@ -114,7 +114,7 @@ export const remedies: Remedy[] = [
     look: { minutes: 40 },
     fix: { minutes: 120 },
     parts: [{ name: 'Breather hose, separator or turbocharger seal, whichever is found (between them)', cost: 350 }],
-    seenInBay: false,
+    seenInBay: true,
     steps: [
       ...makeSafe,
       'Wipe the intake dry from the filter to the compressor, run it loaded for half an hour, and find the first place that is wet again.',

@@ -10,7 +10,6 @@ export const remedies: Remedy[] = [
     look: { minutes: 20 },
     fix: { minutes: 40 },
     parts: [{ name: 'Oil feed line and seals', cost: 60 }],
-    // Pressure at the feed tells at once.
     seenInBay: true,
     steps: [
       ...makeSafeAndDrain,
@@ -44,7 +43,7 @@ export const remedies: Remedy[] = [
       { name: 'Engine oil', cost: 180 },
       { name: 'Oil filter', cost: 40 },
     ],
-    seenInBay: false,
+    seenInBay: true,
     steps: [
       ...makeSafe,
       'Draw a sample before you drain: smell it for fuel, look for soot and water, and send it for analysis where your workshop does that.',

@@ -10,8 +10,7 @@ export const remedies: Remedy[] = [
     look: { minutes: 40 },
     fix: { minutes: 60 },
     parts: [{ name: 'Fittings, hoses and seals, as found', cost: 60 }],
-    // Leak-down shows at once, oil does not.
-    seenInBay: false,
+    seenInBay: true,
     steps: [
       ...makeSafe,
       'With the engine off and the system full, let it settle, then measure the leak-down with brakes released and with the pedal held.',
@@ -47,7 +46,7 @@ export const remedies: Remedy[] = [
     look: { minutes: 45 },
     fix: { minutes: 180 },
     parts: [{ name: 'Larger compressor or separate air source (share of its cost)', cost: 700 }],
-    seenInBay: false,
+    seenInBay: true,
     steps: [
       ...makeSafe,
       'Cure leaks first: they look the same as demand. Leak-down must be within its limit.',

@@ -72,8 +72,9 @@ describe('remedies of the default rulebook', () => {
     for (const id of aboutOil) expect(has(byId.get(id)!, common.cleanDownstream), id).toBe(true);
   });
 
-  it('start a watch wherever success is not seen in the bay', () => {
-    for (const remedy of remedies) if (!remedy.seenInBay) expect(has(remedy, common.startTheWatch), remedy.id).toBe(true);
+  it('start a watch wherever it is about oil, or the bay can’t tell', () => {
+    for (const remedy of remedies)
+      if (!remedy.seenInBay || has(remedy, common.cleanDownstream)) expect(has(remedy, common.startTheWatch), remedy.id).toBe(true);
   });
 
   it('change line and governor, spare the drain, run in and prove with every compressor', () => {
@@ -90,7 +91,7 @@ describe('remedies of the default rulebook', () => {
   });
 
   it('make a compressor the dearest single repair but for those that contain one', () => {
-    const containsOne = ['replace-compressor', 'seal-intake-and-renew-compressor', 'match-demand'];
+    const containsOne = ['replace-compressor', 'replace-failed-compressor', 'seal-intake-and-renew-compressor', 'match-demand'];
     const compressor = wholeCost(byId.get('replace-compressor')!);
     for (const remedy of remedies)
       if (!containsOne.includes(remedy.id)) expect(wholeCost(remedy), remedy.id).toBeLessThan(compressor);
@@ -106,9 +107,9 @@ describe('the order of repairs over the default remedies', () => {
   };
 
   it.each(causes.map(({ id }) => id).filter((id) => !(id in causesWithoutRemedy) && id !== NORMAL_CARRYOVER))(
-    'begins, when nearly sure of %s, with a remedy that removes it',
+    'begins, when fairly sure of %s, with a remedy that removes it',
     (id) => {
-      expect(repairOrder(problem, withLeader(id, 0.9)).steps[0]?.causeIds).toContain(id);
+      expect(repairOrder(problem, withLeader(id, 0.8)).steps[0]?.causeIds).toContain(id);
     },
   );
 
