@@ -1,7 +1,7 @@
 import { Problem } from './problem.mjs';
 
 /** What points Carryover at real services; a production start needs every one of them. */
-const SERVICES = ['DATABASE_URL', 'DATABASE_OWNER_URL', 'SMTP_URL', 'MAIL_FROM', 'S3_ENDPOINT', 'S3_BUCKET', 'S3_ACCESS_KEY', 'S3_SECRET_KEY', 'NEXTAUTH_URL', 'NEXTAUTH_SECRET'];
+export const SERVICES = ['DATABASE_URL', 'DATABASE_OWNER_URL', 'SMTP_URL', 'MAIL_FROM', 'S3_ENDPOINT', 'S3_BUCKET', 'S3_ACCESS_KEY', 'S3_SECRET_KEY', 'NEXTAUTH_URL', 'NEXTAUTH_SECRET'];
 
 /**
  * What is set from outside, and therefore what has to be started here.

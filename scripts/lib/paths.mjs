@@ -14,12 +14,13 @@ export const local = {
   log: inProject('.local', 'log'),
   mail: inProject('.local', 'mail'),
   s3: inProject('.local', 's3'),
+  lock: inProject('.local', 'start.lock'),
+  installLock: inProject('.local', 'install.lock'),
   secrets: inProject('.local', 'secrets.json'),
 };
 
 /** What a test run keeps; git ignores it too. */
 export const test = {
   run: inProject('.test', 'run'),
-  log: inProject('.test', 'log'),
   results: inProject('.test', 'results'),
 };

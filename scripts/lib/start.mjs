@@ -3,6 +3,7 @@ import { build, isBuilt } from './build.mjs';
 import { runCommand } from './command.mjs';
 import { withDotenv } from './dotenv.mjs';
 import { appEnvironment, readPlan } from './environment.mjs';
+import { takeStartLock } from './lock-file.mjs';
 import { inProject, local, root } from './paths.mjs';
 import { webPort } from './ports.mjs';
 import { prepare } from './prepare.mjs';
@@ -13,7 +14,6 @@ import { keptSecrets } from './secrets.mjs';
 import { demoSignIns, isEmpty, seed } from './seed.mjs';
 import { hasWorker, startWeb, startWorker } from './services.mjs';
 import { startMail, startStorage } from './stand-ins.mjs';
-import { takeStartLock } from './start-lock.mjs';
 import { migrate } from '../migrate.mjs';
 
 const DIST_DIR = process.env.NEXT_DIST_DIR ?? '.next';
@@ -59,10 +59,10 @@ export function start({ development }) {
     local.run,
     async (run) => {
       const { processes, steps, untilStopped } = run;
-      unlock = takeStartLock(local.run);
+      unlock = takeStartLock(local.lock);
       const given = withDotenv(inProject('.env'), process.env);
       const plan = readPlan(given);
-      await prepare(run, { runFolder: local.run, logFolder: local.log });
+      await prepare(run);
       const port = await webPort(given.PORT);
       const secrets = keptSecrets(local.secrets);
 

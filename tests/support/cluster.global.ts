@@ -18,7 +18,7 @@ export default async function setUp(project: TestProject) {
   const processes = processKeeper(test.run);
   const run = { processes, steps: stepPrinter() };
   const given = process.env.CARRYOVER_TEST_CLUSTER;
-  if (!given) await prepare(run, { runFolder: test.run, logFolder: test.log });
+  if (!given) await prepare(run);
   const cluster = given ? (JSON.parse(given) as TestCluster) : await startThrowAwayCluster(run);
   project.provide('testCluster', cluster);
   project.provide('migratedTemplate', await makeTemplate(cluster));
