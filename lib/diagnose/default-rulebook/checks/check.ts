@@ -1,0 +1,16 @@
+import type { Check, CheckState } from '../../types';
+
+type Optional = 'kind' | 'tools' | 'setUp' | 'spoils' | 'cautions';
+
+/** A check; what is left out is a choice, needs no tool and no set-up, spoils nothing and endangers nobody. */
+export function check(given: Omit<Check, Optional> & Partial<Pick<Check, Optional>>): Check {
+  return { kind: 'choice', tools: [], setUp: {}, spoils: [], cautions: [], ...given };
+}
+
+/** The answers of a yes/no check; `background` is the share of yes. */
+export function yesNo(background: number): CheckState[] {
+  return [
+    { id: 'no', label: 'No', background: 1 - background },
+    { id: 'yes', label: 'Yes', background },
+  ];
+}
