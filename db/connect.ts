@@ -26,7 +26,7 @@ export function connect(url: string, { max = 10 }: { max?: number } = {}): Conne
  * The setting is local to the transaction, so that a pooled connection never carries it to the next request.
  */
 export function asTenant<T>(
-  db: Database,
+  db: Executor,
   { organisationId, personId }: { organisationId: string; personId?: string },
   work: (tx: Transaction) => Promise<T>,
 ): Promise<T> {

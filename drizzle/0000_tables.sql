@@ -43,6 +43,7 @@ CREATE TABLE "invitation" (
 	"created_at" timestamp with time zone DEFAULT now() NOT NULL,
 	CONSTRAINT "invitation_organisation_id_id_pk" PRIMARY KEY("organisation_id","id"),
 	CONSTRAINT "invitation_token" UNIQUE("token_hash"),
+	CONSTRAINT "invitation_email" UNIQUE("organisation_id","email"),
 	CONSTRAINT "invitation_roles" CHECK (cardinality(roles) > 0 and roles <@ array['technician', 'engineer', 'manager', 'trainer', 'administrator'])
 );
 --> statement-breakpoint

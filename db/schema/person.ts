@@ -94,6 +94,8 @@ export const invitation = pgTable(
   (t) => [
     primaryKey({ columns: [t.organisationId, t.id] }),
     foreignKey({ columns: [t.organisationId, t.siteId], foreignColumns: [site.organisationId, site.id] }),
+    // One open invitation for an address: the others have none any more.
+    unique('invitation_email').on(t.organisationId, t.email),
     check('invitation_roles', ROLES_KNOWN),
     organisationPolicy(),
   ],

@@ -1,15 +1,26 @@
 import type { Database } from '@/db/connect';
 import type { Role } from '@/lib/auth/roles';
 import type { JobQueue } from '@/lib/jobs';
+import type { UnitPreferences } from '@/lib/units';
 
 /** Who asks, for which organisation, and with what: everything that a service may lean on. */
 export interface Ctx {
   db: Database;
   organisation: { id: string; name: string; country: string; currency: string };
-  person: { id: string; name: string; email: string };
+  /** `units` is what to show quantities in; `siteId` the site that he or she works at, if one is set. */
+  person: { id: string; name: string; email: string; units: UnitPreferences; siteId: string | null };
   roles: readonly Role[];
   mayRelease: boolean;
   /** The clock, so that a test can set it. */
+  now: () => Date;
+  jobs: JobQueue;
+}
+
+/** Somebody who isn't signed in: all that is known is where the request came from. */
+export interface Visitor {
+  db: Database;
+  /** Network address, to slow guessing. */
+  network: string;
   now: () => Date;
   jobs: JobQueue;
 }

@@ -1,0 +1,28 @@
+import type { Database } from '@/db/connect';
+import { findStanding } from '@/db/queries/sign-in';
+import { isRole } from '@/lib/auth/roles';
+import { METRIC_UNITS, US_UNITS, withUnits } from '@/lib/units';
+import type { Ctx } from '../context';
+
+export type Standing = Omit<Ctx, 'db' | 'now' | 'jobs'>;
+
+/** What a signed-in request stands on, read anew at each; undefined when the person is no member or was signed out. */
+export async function standingOf(
+  db: Database,
+  { personId, organisationId, sessionVersion }: { personId: string; organisationId: string; sessionVersion: number },
+): Promise<Standing | undefined> {
+  const row = await findStanding(db, { personId, organisationId });
+  if (!row || row.sessionVersion !== sessionVersion) return undefined;
+  return {
+    organisation: { id: organisationId, name: row.organisationName, country: row.country, currency: row.currency },
+    person: {
+      id: personId,
+      name: row.name,
+      email: row.email,
+      units: withUnits(row.country === 'US' ? US_UNITS : METRIC_UNITS, row.unitPreferences ?? {}),
+      siteId: row.siteId,
+    },
+    roles: row.roles.filter(isRole),
+    mayRelease: row.mayRelease,
+  };
+}
