@@ -3,8 +3,8 @@ import type { Forecast } from './information';
 import { planCosts, type RepairProblem } from './repair-order-costs';
 import { findOrder } from './repair-order-search';
 
-/** Total variation under which an answer is taken not to change the plan. */
-const HARDLY_MOVES = 0.02;
+/** Total variation of p under which an answer is taken not to change the plan. */
+const HARDLY_MOVES = 0.05;
 /** At the answers the search tries all sets only up to this many actions: there are hundreds of answers. */
 const TRY_ALL_AT_ANSWERS_UP_TO = 6;
 
@@ -16,7 +16,7 @@ function moved(p: ArrayLike<number>, posterior: ArrayLike<number>): number {
 
 /**
  * Plans worth comparing: nothing at all, the best at p, and what the search finds after every answer that moves p by
- * 0.02 or more (total variation). Equal plans are kept once. Whatever is missing makes `expectedSaving` smaller,
+ * 0.05 or more (total variation). Equal plans are kept once. Whatever is missing makes `expectedSaving` smaller,
  * never negative.
  *
  * @param problem remedies as money

@@ -88,7 +88,8 @@ export function nextChecks(open: OpenChecks, { vehicle = AS_PARKED, money = {} }
   const rate = money.labourRatePerHour ?? compiled.settings.labourRatePerHour;
   const candidates = [...singles(open, vehicle), ...betterPairs(open, vehicle)];
   const problem = repairProblemOf(compiled, money);
-  const plans = repairPlans(problem, posterior, candidates.map(({ forecast }) => forecast));
+  // Pairs have many answers, most of them like one of a single check: they are priced by the plans of those.
+  const plans = repairPlans(problem, posterior, [...open.checks.values()].map(({ forecast }) => forecast));
   const entropyLeft = entropyBits(posterior);
 
   const judged = candidates.map((candidate) => ({

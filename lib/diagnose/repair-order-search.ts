@@ -1,21 +1,17 @@
 /**
- * Finds which actions are worth doing, and in which order. Two cases:
+ * Finds which actions are worth doing, and in which order.
  *
- * *No cause has two actions.* In any set the order by p_i / Co_i, descending, is best (Kadane and Simon 1977), which
- * leaves the set. With that order the cost of a set is
- *     f(S) = const + sum_{i in S} a_i - sum_{i in S} Co_i sum_{j in S, before i} p_j,   a_i = Co_i + p_i Cr_i - p_i left_i,
- * whose pair terms are all negative: f is submodular, an action pays the more the more others are done. So one that
- * doesn't pay even beside all that may still be done is in no best set, and one that pays beside only those that are
- * surely done is in every best set. Repeating both settles almost every action, exactly; what is left is tried in
- * full up to twelve actions.
+ * *No cause has two actions.* The order is by p_i / Co_i and the best set is found as in `repair-order-set.ts`.
  *
  * *Some cause has two actions.* What an action removes then depends on what came before, but only on which actions,
  * not on their order. So the best order is found over sets of actions already done (Held and Karp), 2^n steps
  * instead of n!: exact up to twelve actions. Actions that provably can't pay are left out first.
  *
- * Beyond twelve, greedy: by chance per money, then dropping from the back whatever costs more than it saves.
+ * Beyond twelve, greedy: actions are taken by chance per money, each counting only causes that no earlier one has
+ * removed; so divided, the best set is exact; what it leaves out is taken away, and the causes are divided anew.
  */
-import { expectedRepairCost, type RepairProblem } from './repair-order-costs';
+import type { RepairProblem } from './repair-order-costs';
+import { bestSet, type Row } from './repair-order-set';
 
 /** How an order was found: the best of all sets, the best of all sets in all orders, or a good one. */
 export type SearchMethod = 'every-set' | 'every-order' | 'greedy';
@@ -29,88 +25,90 @@ export interface FoundOrder {
 /** Actions up to which every set is tried. */
 export const TRY_ALL_UP_TO = 12;
 
-const massOf = (problem: RepairProblem, p: ArrayLike<number>, action: number): number =>
-  problem.actions[action]!.removes.reduce((mass, c) => mass + p[c]!, 0);
-
-/** True where no cause is removed by two of these actions. */
-function disjoint(problem: RepairProblem, actions: readonly number[]): boolean {
-  const seen = new Set<number>();
-  return actions.every((a) => problem.actions[a]!.removes.every((c) => !seen.has(c) && seen.add(c)));
-}
-
 /**
  * The order of repairs of least expected cost.
  *
  * @param problem actions and costs, from `repairProblem`
  * @param p causes' probabilities, summing to 1
- * @param tryAllUpTo actions up to which every set is tried; fewer is quicker, and greedy sooner
+ * @param tryAllUpTo actions up to which every set is tried, at most 20; fewer is quicker, and greedy sooner
  * @returns indices of actions (empty: nothing is worth doing) and how they were found
  * @see Kadane and Simon (1977), Optimal strategies for a class of constrained sequential problems; Held and Karp (1962)
  * @example findOrder(problem, posterior).order;
  */
 export function findOrder(problem: RepairProblem, p: ArrayLike<number>, tryAllUpTo = TRY_ALL_UP_TO): FoundOrder {
-  const all = problem.actions.map((_, a) => a);
-  if (disjoint(problem, all)) return bestSet(problem, p, all, tryAllUpTo);
-  const promising = withoutHopeless(problem, p, all);
-  if (disjoint(problem, promising)) return bestSet(problem, p, promising, tryAllUpTo);
+  const all = [...problem.actions.keys()];
+  const promising = overlaps(problem, all) ? withoutHopeless(problem, p, all) : all;
+  if (!overlaps(problem, promising)) {
+    const { order, proved } = bestAsDivided(problem, p, promising, tryAllUpTo);
+    return { order, method: proved ? 'every-set' : 'greedy' };
+  }
   return promising.length <= tryAllUpTo
     ? { order: bestOverSets(problem, p, promising), method: 'every-order' }
-    : { order: greedy(problem, p, promising), method: 'greedy' };
+    : { order: greedy(problem, p, promising, tryAllUpTo), method: 'greedy' };
 }
 
-/** p_a / Co_a descending, without dividing by a Co of 0. */
-function byChancePerMoney(problem: RepairProblem, mass: ReadonlyMap<number, number>) {
-  return (a: number, b: number): number => {
-    const ahead = mass.get(b)! * problem.actions[a]!.onReaching - mass.get(a)! * problem.actions[b]!.onReaching;
-    return ahead || a - b;
-  };
+/** True where some cause is removed by two of these actions. */
+function overlaps(problem: RepairProblem, actions: readonly number[]): boolean {
+  const removed = new Uint8Array(problem.left.length);
+  for (const a of actions) {
+    for (const c of problem.actions[a]!.removes) {
+      if (removed[c] === 1) return true;
+      removed[c] = 1;
+    }
+  }
+  return false;
 }
 
-function bestSet(problem: RepairProblem, p: ArrayLike<number>, candidates: readonly number[], tryAllUpTo: number): FoundOrder {
-  const mass = new Map(candidates.map((a) => [a, massOf(problem, p, a)]));
-  const sorted = [...candidates].sort(byChancePerMoney(problem, mass));
-  const chance = sorted.map((a) => mass.get(a)!);
-  const reaching = sorted.map((a) => problem.actions[a]!.onReaching);
-  const alone = sorted.map((a, i) => {
-    const { removes, onRemoving } = problem.actions[a]!;
-    return reaching[i]! + chance[i]! * onRemoving - removes.reduce((sum, c) => sum + p[c]! * problem.left[c]!, 0);
-  });
-  /** What adding sorted action i changes, beside the others that `beside` names. */
-  const change = (i: number, beside: (k: number) => boolean): number => {
-    let before = 0;
-    let after = 0;
-    for (let k = 0; k < sorted.length; k += 1) {
-      if (k === i || !beside(k)) continue;
-      if (k < i) before += chance[k]!;
-      else after += reaching[k]!;
-    }
-    return alone[i]! - reaching[i]! * before - chance[i]! * after;
+/** Sorts actions by p / Co, each with the causes that none before it removes, and keeps the best set of them. */
+function bestAsDivided(problem: RepairProblem, p: ArrayLike<number>, candidates: readonly number[], tryAllUpTo: number) {
+  const open = new Float64Array(p);
+  const waiting = [...candidates];
+  const sorted: number[] = [];
+  const row: Row = {
+    chance: new Float64Array(candidates.length),
+    reaching: new Float64Array(candidates.length),
+    alone: new Float64Array(candidates.length),
   };
-
-  const verdict: ('in' | 'out' | 'open')[] = sorted.map(() => 'open');
-  for (let settled = false; !settled; ) {
-    settled = true;
-    for (let i = 0; i < sorted.length; i += 1) {
-      if (verdict[i] !== 'open') continue;
-      if (change(i, (k) => verdict[k] !== 'out') >= 0) verdict[i] = 'out';
-      else if (change(i, (k) => verdict[k] === 'in') < 0) verdict[i] = 'in';
-      if (verdict[i] !== 'open') settled = false;
+  while (waiting.length > 0) {
+    const { at, mass } = mostChancePerMoney(problem, open, waiting);
+    const a = waiting[at]!;
+    const { removes, onReaching, onRemoving } = problem.actions[a]!;
+    let saved = 0;
+    for (const c of removes) {
+      saved += open[c]! * problem.left[c]!;
+      open[c] = 0;
     }
+    row.chance[sorted.length] = mass;
+    row.reaching[sorted.length] = onReaching;
+    row.alone[sorted.length] = onReaching + mass * onRemoving - saved;
+    sorted.push(a);
+    waiting.splice(at, 1);
   }
+  const { inSet, proved } = bestSet(row, tryAllUpTo);
+  return { order: sorted.filter((_, i) => inSet[i]), proved };
+}
 
-  const open = sorted.flatMap((_, i) => (verdict[i] === 'open' ? [i] : []));
-  const orderWith = (chosen: (i: number) => boolean): number[] =>
-    sorted.filter((_, i) => verdict[i] === 'in' || (verdict[i] === 'open' && chosen(i)));
-  if (open.length > tryAllUpTo) return { order: dropFromTheBack(problem, p, orderWith(() => true)), method: 'greedy' };
-  const place = new Map(open.map((i, bit) => [i, bit]));
-  let best = orderWith(() => false);
-  let least = expectedRepairCost(problem, p, best);
-  for (let set = 1; set < 1 << open.length; set += 1) {
-    const order = orderWith((i) => ((set >> place.get(i)!) & 1) === 1);
-    const cost = expectedRepairCost(problem, p, order);
-    if (cost < least) [best, least] = [order, cost];
+/** Compares p_a / Co_a without dividing: a Co of 0 comes first. Equal ones stay in the order given. */
+function mostChancePerMoney(problem: RepairProblem, open: Float64Array, waiting: readonly number[]) {
+  let at = 0;
+  let mass = -1;
+  let money = 0;
+  for (let i = 0; i < waiting.length; i += 1) {
+    const { removes, onReaching } = problem.actions[waiting[i]!]!;
+    let own = 0;
+    for (let k = 0; k < removes.length; k += 1) own += open[removes[k]!]!;
+    if (mass < 0 || own * money > mass * onReaching) [at, mass, money] = [i, own, onReaching];
   }
-  return { order: best, method: 'every-set' };
+  return { at, mass };
+}
+
+function greedy(problem: RepairProblem, p: ArrayLike<number>, candidates: readonly number[], tryAllUpTo: number): number[] {
+  let kept = candidates;
+  for (;;) {
+    const { order } = bestAsDivided(problem, p, kept, tryAllUpTo);
+    if (order.length === kept.length) return order;
+    kept = order;
+  }
 }
 
 /**
@@ -188,37 +186,4 @@ function bestOverSets(problem: RepairProblem, p: ArrayLike<number>, candidates: 
   const order: number[] = [];
   for (let done = 0; next[done]! >= 0; done |= 1 << next[done]!) order.push(candidates[next[done]!]!);
   return order;
-}
-
-function greedy(problem: RepairProblem, p: ArrayLike<number>, candidates: readonly number[]): number[] {
-  const open = new Float64Array(p);
-  const waiting = new Set(candidates);
-  const order: number[] = [];
-  while (waiting.size > 0) {
-    const mass = new Map([...waiting].map((a) => [a, massOf(problem, open, a)]));
-    const better = byChancePerMoney(problem, mass);
-    const best = [...waiting].reduce((a, b) => (better(a, b) <= 0 ? a : b));
-    waiting.delete(best);
-    if (mass.get(best) === 0) continue;
-    order.push(best);
-    for (const c of problem.actions[best]!.removes) open[c] = 0;
-  }
-  return dropFromTheBack(problem, p, order);
-}
-
-/** Drops, the least promising first, what costs more than it saves, until nothing more does. */
-function dropFromTheBack(problem: RepairProblem, p: ArrayLike<number>, order: readonly number[]): number[] {
-  let best = [...order];
-  let least = expectedRepairCost(problem, p, best);
-  for (let dropped = true; dropped; ) {
-    dropped = false;
-    for (let i = best.length - 1; i >= 0; i -= 1) {
-      const without = best.filter((_, k) => k !== i);
-      const cost = expectedRepairCost(problem, p, without);
-      if (cost <= least) {
-        [best, least, dropped] = [without, cost, true];
-      }
-    }
-  }
-  return best;
 }
