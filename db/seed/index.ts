@@ -1,0 +1,23 @@
+import { connect } from '@/db/connect';
+import { whyNotSeed } from './local-only';
+import { seedMinimal } from './minimal';
+
+const url = process.env.DATABASE_OWNER_URL;
+const refusal = url ? whyNotSeed(url, process.env.CARRYOVER_ENV) : 'DATABASE_OWNER_URL is not set.';
+if (!url || refusal) {
+  console.error(refusal);
+  process.exit(1);
+}
+
+// The default rulebook is being written: until it is whole, the demo has none.
+const rulebook = await import('@/lib/diagnose/default-rulebook').then(({ defaultRulebook }) => defaultRulebook, () => undefined);
+
+const { db, close } = connect(url, { max: 1 });
+try {
+  // All of it or nothing: a killed seeding leaves the database empty, and the next start seeds it.
+  await db.transaction(async (tx) => {
+    await seedMinimal(tx, rulebook);
+  });
+} finally {
+  await close();
+}
