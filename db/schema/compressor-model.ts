@@ -18,7 +18,7 @@ export const compressorModel = pgTable(
     cylinders: integer(),
     /** Compressor turns for one of the engine. */
     driveRatio: si(),
-    /** air, coolant, coolant-head-air-block */
+    /** What cools the head: coolant, air */
     cooling: text(),
     /** head-unloader, inlet-unloader, discharge-unloader, clutch */
     unloading: text(),
@@ -26,7 +26,7 @@ export const compressorModel = pgTable(
     intakeType: text(),
     /** large-cavity, small-hole */
     drainOpening: text(),
-    /** rear, side, through-crank-and-drive */
+    /** rear, side, through-drive */
     oilFeedPlace: text(),
     /** steel, fibre */
     driveGear: text(),

@@ -31,6 +31,7 @@ export const fit = pgTable(
     feedLine: text(),
     intakeHose: text(),
     dryerCartridge: text(),
+    driveGear: text(),
     /** yes, no */
     systemCleaned: text(),
     breakInRun: text(),

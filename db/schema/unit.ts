@@ -21,6 +21,8 @@ export const unit = pgTable(
     reservoirM3: si(),
     requiredReservoirM3: si(),
     reservoirCount: integer(),
+    /** The last time by itself; a change with a compressor stands with the fit. */
+    dryerCartridgeChangedOn: date({ mode: 'string' }),
     asTyped: jsonb().$type<Record<string, string>>().notNull().default({}),
     note: text(),
     createdAt: createdAt(),

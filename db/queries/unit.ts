@@ -1,0 +1,77 @@
+import { and, asc, eq, ilike, isNull, sql } from 'drizzle-orm';
+import type { Executor } from '@/db/connect';
+import { site, unit } from '@/db/schema';
+import { containing } from './like';
+
+interface Of {
+  organisationId: string;
+  unitId: string;
+}
+
+const atItsSite = and(eq(site.organisationId, unit.organisationId), eq(site.id, unit.siteId));
+
+const WHOLE = {
+  id: unit.id,
+  siteId: unit.siteId,
+  siteName: site.name,
+  timeZone: site.timeZone,
+  fleetNumber: unit.fleetNumber,
+  vocation: unit.vocation,
+  country: unit.country,
+  vehicleKind: unit.vehicleKind,
+  builtOn: unit.builtOn,
+  engineFamily: unit.engineFamily,
+  reservoirM3: unit.reservoirM3,
+  requiredReservoirM3: unit.requiredReservoirM3,
+  reservoirCount: unit.reservoirCount,
+  dryerCartridgeChangedOn: unit.dryerCartridgeChangedOn,
+  asTyped: unit.asTyped,
+  note: unit.note,
+  createdAt: unit.createdAt,
+  updatedAt: unit.updatedAt,
+  hiddenAt: unit.hiddenAt,
+};
+
+/** A unit with its site; hidden ones too, because cases cite them. */
+export async function selectUnit(db: Executor, { organisationId, unitId }: Of) {
+  const [row] = await db
+    .select(WHOLE)
+    .from(unit)
+    .innerJoin(site, atItsSite)
+    .where(and(eq(unit.organisationId, organisationId), eq(unit.id, unitId)));
+  return row;
+}
+
+export type UnitRow = NonNullable<Awaited<ReturnType<typeof selectUnit>>>;
+
+/** By its number, however it is capitalised: two units "k-104" and "K-104" would be one on the yard. */
+export async function selectUnitByNumber(db: Executor, { organisationId, fleetNumber }: { organisationId: string; fleetNumber: string }) {
+  const [row] = await db
+    .select({ id: unit.id, fleetNumber: unit.fleetNumber, hiddenAt: unit.hiddenAt })
+    .from(unit)
+    .where(and(eq(unit.organisationId, organisationId), sql`lower(${unit.fleetNumber}) = lower(${fleetNumber})`))
+    .limit(1);
+  return row;
+}
+
+/** Units whose number contains the text; the exact number first, then those that begin with it. */
+export async function searchUnits(db: Executor, { organisationId, text, limit }: { organisationId: string; text: string; limit: number }) {
+  return db
+    .select({ id: unit.id, fleetNumber: unit.fleetNumber, vehicleKind: unit.vehicleKind, siteId: unit.siteId, siteName: site.name })
+    .from(unit)
+    .innerJoin(site, atItsSite)
+    .where(and(eq(unit.organisationId, organisationId), isNull(unit.hiddenAt), ilike(unit.fleetNumber, containing(text))))
+    .orderBy(sql`case when lower(${unit.fleetNumber}) = lower(${text}) then 0 when ${unit.fleetNumber} ilike ${containing(text).slice(1)} then 1 else 2 end`, asc(unit.fleetNumber))
+    .limit(limit);
+}
+
+/** The id of the new row; undefined when its id or its number is taken. */
+export async function insertUnit(db: Executor, row: typeof unit.$inferInsert) {
+  const [inserted] = await db.insert(unit).values(row).onConflictDoNothing().returning({ id: unit.id });
+  return inserted;
+}
+
+/** The sites that a unit can stand at. */
+export async function selectUnitSites(db: Executor, organisationId: string) {
+  return db.select({ id: site.id, name: site.name, timeZone: site.timeZone }).from(site).where(eq(site.organisationId, organisationId)).orderBy(asc(site.name));
+}
