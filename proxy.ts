@@ -41,6 +41,8 @@ export function proxy(request: NextRequest): NextResponse {
 
   const headers = new Headers(request.headers);
   headers.set('x-nonce', nonce);
+  // Where to come back to after signing in; a layout can't know its address.
+  headers.set('x-path', request.nextUrl.pathname + request.nextUrl.search);
   headers.set('Content-Security-Policy', policy);
 
   const response = NextResponse.next({ request: { headers } });

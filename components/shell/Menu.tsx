@@ -23,7 +23,7 @@ export function Menu({ summary, children, className, panelClassName }: Props) {
     <details
       key={pathname}
       ref={menu}
-      className={classes('group', className)}
+      className={classes('group print:hidden', className)}
       onKeyDown={(event) => {
         if (event.key !== 'Escape' || !menu.current?.open) return;
         close();

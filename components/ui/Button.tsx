@@ -25,7 +25,7 @@ const sizes: Record<ButtonSize, string> = {
 
 export function buttonClass({ variant = 'primary', size = 'touch', wide = false }: Look = {}): string {
   return classes(
-    'inline-flex items-center justify-center gap-2 rounded border font-heading font-semibold font-stretch-[80%] leading-tight no-underline text-center',
+    'inline-flex print:hidden items-center justify-center gap-2 rounded border font-heading font-semibold font-stretch-[80%] leading-tight no-underline text-center',
     variants[variant],
     sizes[size],
     wide && 'w-full sm:w-auto',

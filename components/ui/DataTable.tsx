@@ -6,6 +6,8 @@ import { EmptyState } from './EmptyState';
 export interface Column<Row> {
   key: string;
   header: ReactNode;
+  /** Unit of the figures in it, printed after the header in its own case. */
+  unit?: string;
   cell: (row: Row) => ReactNode;
   /** Right-aligned, in the face of measured figures. */
   numeric?: boolean;
@@ -43,7 +45,7 @@ export function DataTable<Row>({ caption, captionHidden, columns, rows, rowKey, 
   const captionId = useId();
   if (rows.length === 0) return empty ?? <EmptyState title="Nothing here yet" />;
   return (
-    <div role="region" aria-labelledby={captionId} tabIndex={0} className="overflow-x-auto">
+    <div role="region" aria-labelledby={captionId} tabIndex={0} className="scroll-x">
       <table className="ledger">
         <caption id={captionId} className={captionHidden ? 'sr-only' : 'label text-left text-ink-soft'}>{caption}</caption>
         <thead>
@@ -74,6 +76,7 @@ export function DataTable<Row>({ caption, captionHidden, columns, rows, rowKey, 
 
 function HeadCell<Row>({ column, sort, sortHref }: { column: Column<Row> } & Pick<Props<Row>, 'sort' | 'sortHref'>) {
   const sorted = sort?.key === column.key ? sort.direction : undefined;
+  const words = column.unit ? <span>{column.header} <span className="unit">{column.unit}</span></span> : column.header;
   const next: Sort = { key: column.key, direction: sorted === 'asc' ? 'desc' : 'asc' };
   return (
     <th
@@ -83,11 +86,11 @@ function HeadCell<Row>({ column, sort, sortHref }: { column: Column<Row> } & Pic
     >
       {column.sortable && sortHref ? (
         <Link href={sortHref(next)} scroll={false} className="inline-flex min-h-8 items-end gap-1.5 underline decoration-edge decoration-dotted underline-offset-4 hover:decoration-solid">
-          {column.header}
+          {words}
           <SortMark direction={sorted} />
         </Link>
       ) : (
-        column.header
+        words
       )}
     </th>
   );

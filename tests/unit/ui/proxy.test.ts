@@ -34,6 +34,11 @@ describe('proxy', () => {
     expect(answer().headers.get('x-middleware-request-x-nonce')).not.toBe(nonce);
   });
 
+  test('says which page was asked for, whatever the browser claims', () => {
+    const request = new NextRequest('http://127.0.0.1:3000/units?site=a', { headers: { 'x-path': '//elsewhere' } });
+    expect(proxy(request).headers.get('x-middleware-request-x-path')).toBe('/units?site=a');
+  });
+
   test('sets the security headers', () => {
     const { headers } = answer();
     expect(headers.get('x-content-type-options')).toBe('nosniff');
