@@ -21,7 +21,9 @@ export const evidenceGroups: EvidenceGroup[] = [
   { id: 'heat', name: 'Heat' },
   { id: 'coolant', name: 'Coolant' },
   { id: 'restriction', name: 'Restriction after the head' },
-  { id: 'dryer', name: 'Dryer' },
+  { id: 'dryer', name: 'Dryer cartridge' },
+  { id: 'dryer-air', name: 'Air at the dryer’s purge' },
   { id: 'duty', name: 'Leaks and duty' },
+  { id: 'duty-of-vehicle', name: 'What the work asks for' },
   { id: 'governor', name: 'Governor and unloader' },
 ];
