@@ -1,0 +1,137 @@
+import { judgement } from '../basis';
+import type { Rule } from '../../types';
+import { answer, others } from './rule';
+
+export const rules: Rule[] = [
+  {
+    name: 'crank-turns: stands-still',
+    conditions: answer('crank-turns', 'stands-still'),
+    weights: {
+      ...others(-6.5), 'drive-gear-failed': 17, 'crank-or-bearing-failed': 12.5, 'oil-feed-restricted': 4.5,
+      'normal-carryover': -15.5,
+    },
+    group: 'drive',
+    note: 'The crank stands still while the engine turns: drive or crank has failed.',
+    ...judgement,
+  },
+  {
+    name: 'noise: ordinary',
+    conditions: answer('noise', 'ordinary'),
+    weights: { 'rings-not-seated': 0.6, 'drive-gear-failed': -5.5, 'crank-or-bearing-failed': -7 },
+    group: 'feed-and-bearings',
+    note: 'It runs without unusual noise.',
+    ...judgement,
+  },
+  {
+    name: 'noise: knock',
+    conditions: answer('noise', 'knock'),
+    weights: {
+      ...others(-2.5, { except: ['drive-gear-failed'] }), 'crank-or-bearing-failed': 11.5,
+      'oil-feed-restricted': 10.5, 'valve-leaking': 3.5, 'rings-worn': 1.5, 'unloader-stuck': 0.5,
+      'governor-faulty': -0.5, 'head-gasket-failed': -2, 'rings-not-seated': -3.7, 'dryer-overdue': -6.5,
+      'purge-or-check-valve-leaking': -6.5, 'system-leaks': -6.5, 'normal-carryover': -9.5,
+    },
+    group: 'feed-and-bearings',
+    note: 'A knock: a bearing or rod that has starved or worn.',
+    ...judgement,
+  },
+  {
+    name: 'noise: gear-noise',
+    conditions: answer('noise', 'gear-noise'),
+    weights: {
+      ...others(-1, { except: ['rings-not-seated'] }), 'drive-gear-failed': 13, 'crank-or-bearing-failed': 6.5,
+      'rings-worn': 2, 'oil-feed-restricted': 1, 'valve-leaking': -2, 'head-gasket-failed': -2,
+      'governor-faulty': -2, 'unloader-stuck': -2, 'dryer-overdue': -5, 'purge-or-check-valve-leaking': -5,
+      'system-leaks': -5, 'normal-carryover': -8,
+    },
+    group: 'feed-and-bearings',
+    note: 'A whine or rattle at the drive: the gear.',
+    ...judgement,
+  },
+  {
+    name: 'noise: hiss',
+    conditions: answer('noise', 'hiss'),
+    weights: {
+      ...others(-2, { except: ['crank-or-bearing-failed'] }), 'purge-or-check-valve-leaking': 5.5,
+      'valve-leaking': 4.5, 'unloader-stuck': 4.5, 'system-leaks': 4.5, 'head-gasket-failed': 3.5,
+      'governor-faulty': 2, 'rings-worn': -1.5, 'dryer-overdue': -3.5, 'oil-feed-restricted': -4.5,
+      'normal-carryover': -5.5, 'rings-not-seated': -7.5, 'drive-gear-failed': -7.5,
+    },
+    group: 'feed-and-bearings',
+    note: 'A hiss or blow: air goes where it shouldn’t.',
+    ...judgement,
+  },
+  {
+    name: 'drive-gear-kind: fibre',
+    conditions: answer('drive-gear-kind', 'fibre'),
+    weights: { 'drive-gear-failed': 5 },
+    group: 'drive',
+    note: 'The rim of a fibre gear can let go of its hub.',
+    ...judgement,
+  },
+  {
+    name: 'drive-gear-reused: no',
+    conditions: answer('drive-gear-reused', 'no'),
+    weights: { 'drive-gear-failed': -4.5 },
+    group: 'drive',
+    note: 'The gear is as new as the compressor.',
+    ...judgement,
+  },
+  {
+    name: 'drive-gear-state: sound',
+    conditions: answer('drive-gear-state', 'sound'),
+    weights: { 'drive-gear-failed': -15 },
+    group: 'drive',
+    note: 'The gear is sound.',
+    ...judgement,
+  },
+  {
+    name: 'drive-gear-state: worn-or-chipped',
+    conditions: answer('drive-gear-state', 'worn-or-chipped'),
+    weights: { 'crank-or-bearing-failed': 6, 'oil-feed-restricted': 3, 'normal-carryover': -3 },
+    group: 'drive',
+    note: 'Teeth are worn or chipped.',
+    ...judgement,
+  },
+  {
+    name: 'drive-gear-state: rim-loose',
+    conditions: answer('drive-gear-state', 'rim-loose'),
+    weights: {
+      ...others(-2.5), 'drive-gear-failed': 16, 'crank-or-bearing-failed': 6.5, 'oil-feed-restricted': 2,
+      'normal-carryover': -8,
+    },
+    group: 'drive',
+    note: 'The rim has let go of its hub: the crank is no longer driven.',
+    ...judgement,
+  },
+  {
+    name: 'bearing-state: sound',
+    conditions: answer('bearing-state', 'sound'),
+    weights: { 'oil-feed-restricted': -10.5, 'crank-or-bearing-failed': -14.5 },
+    group: 'feed-and-bearings',
+    note: 'Crank, rod and bearings are sound: they have had their oil.',
+    ...judgement,
+  },
+  {
+    name: 'bearing-state: wiped',
+    conditions: answer('bearing-state', 'wiped'),
+    weights: {
+      ...others(-1.5, { except: ['oil-feed-restricted', 'crank-or-bearing-failed'] }), 'oil-degraded': 5,
+      'rings-worn': 2, 'normal-carryover': -4.5,
+    },
+    group: 'feed-and-bearings',
+    note: 'Dry or wiped bearings: oil has been starved or thin.',
+    ...judgement,
+  },
+  {
+    name: 'bearing-state: broken-or-seized',
+    conditions: answer('bearing-state', 'broken-or-seized'),
+    weights: {
+      ...others(-3.5), 'crank-or-bearing-failed': 15, 'oil-feed-restricted': 10.5, 'oil-degraded': 1,
+      'rings-worn': -3.5, 'normal-carryover': -13.5,
+    },
+    group: 'feed-and-bearings',
+    note: 'Crank, rod or bearing has broken or seized.',
+    ...judgement,
+  },
+];
