@@ -44,15 +44,13 @@ function tryLock(lock) {
 /**
  * Makes sure that one command at a time works on this folder's cluster and build.
  * @param {string} lock
+ * @param {string} wayOut what to do when another one is at it
  * @returns {() => void} gives the lock back
  */
-export function takeStartLock(lock) {
+export function takeStartLock(lock, wayOut) {
   const answer = tryLock(lock);
   if ('release' in answer) return answer.release;
-  throw new Problem(
-    `Carryover already runs from this folder (process ${answer.heldBy}).`,
-    'Use that one, or stop it with Ctrl-C first; a second copy needs a folder of its own.',
-  );
+  throw new Problem(`Carryover already runs from this folder (process ${answer.heldBy}).`, wayOut);
 }
 
 /**

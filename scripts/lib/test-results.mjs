@@ -38,8 +38,8 @@ export function readVitestReport(project, path, { exitedWell, output }) {
     const explained = assertionResults.some((test) => test.status !== 'passed');
     if (status === 'failed' && !explained) failures.push({ title: file, text: message });
   }
-  if (passed + failures.length === 0) failures.push({ title: project, text: `There is no test in the project "${project}".` });
-  if (!exitedWell && failures.length === 0) failures.push({ title: project, text: output });
+  const noTest = `There is no test in the project "${project}".`;
+  if (failures.length === 0 && (passed === 0 || !exitedWell)) failures.push({ title: project, text: passed === 0 ? `${noTest}\n${output}` : output });
   return { passed, failed: failures.length, failures };
 }
 
