@@ -1,0 +1,51 @@
+'use client';
+
+import { useState } from 'react';
+import { Button } from '@/components/ui/Button';
+import type { AnswerInput } from '@/lib/schemas/case';
+import type { CheckView } from '@/lib/schemas/case-view';
+
+type Sureness = 'sure' | 'think-so';
+
+interface Props {
+  check: CheckView;
+  pending: boolean;
+  onAnswer: (answer: AnswerInput) => void;
+}
+
+/** The answers of a check, each a large button that saves at once. */
+export function ChoiceAnswers({ check, pending, onAnswer }: Props) {
+  const [sureness, setSureness] = useState<Sureness>('sure');
+  return (
+    <div className="grid gap-4">
+      <SurenessChoice name={`sureness-${check.id}`} value={sureness} onChange={setSureness} />
+      <div role="group" aria-label={`Answers: ${check.prompt}`} className="grid gap-2 sm:grid-cols-2">
+        {check.answers.map(({ id, label }) => (
+          <Button
+            key={id}
+            className="min-h-14! justify-start! text-left!"
+            aria-disabled={pending || undefined}
+            onClick={() => !pending && onAnswer({ kind: 'state', state: id, sureness })}
+          >
+            {label}
+          </Button>
+        ))}
+      </div>
+    </div>
+  );
+}
+
+/** Sure, or only think so: said before the answer, since the answer is saved as it is tapped. */
+export function SurenessChoice({ name, value, onChange }: { name: string; value: Sureness; onChange: (value: Sureness) => void }) {
+  return (
+    <fieldset className="flex flex-wrap items-center gap-x-6">
+      <legend className="label float-left mr-6">How sure are you?</legend>
+      {(['sure', 'think-so'] as const).map((choice) => (
+        <label key={choice} className="flex min-h-touch cursor-pointer items-center gap-2">
+          <input type="radio" className="size-6" name={name} checked={value === choice} onChange={() => onChange(choice)} />
+          {choice === 'sure' ? 'Sure' : 'I think so'}
+        </label>
+      ))}
+    </fieldset>
+  );
+}

@@ -1,0 +1,76 @@
+'use client';
+
+import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
+import { useState } from 'react';
+import type { Danger } from '@/lib/diagnose/cautions';
+import { newId } from '@/lib/ids';
+import { api } from '@/lib/query/problem';
+import { queryKeys } from '@/lib/query/keys';
+import type { AnswerInput } from '@/lib/schemas/case';
+import type { CaseState, CaseView } from '@/lib/schemas/case-view';
+
+/** A clock off by less than this is as good as ours: the answer's way to us takes as long. */
+const CLOCK_TOLERANCE_MS = 5_000;
+
+export interface AnswerGiven {
+  checkId: string;
+  answer: AnswerInput;
+  askedBecause: 'suggested' | 'choice' | 'panel';
+}
+
+/** The state of a case as the server last told it, and what can be done to it. */
+export function useCase({ state, now }: CaseView) {
+  const { caseId } = state;
+  const client = useQueryClient();
+  const key = queryKeys.caseState(caseId);
+  const path = `/api/v1/cases/${caseId}`;
+  const [clockOffsetMs] = useState(() => {
+    const offset = Date.parse(now) - Date.now();
+    return Math.abs(offset) < CLOCK_TOLERANCE_MS ? 0 : offset;
+  });
+
+  const query = useQuery({
+    queryKey: key,
+    queryFn: () => api<CaseState>(path),
+    initialData: state,
+    enabled: state.at === null,
+    // The server's older copy must never replace what an answer has just brought.
+    structuralSharing: (held, fresh) => ((held as CaseState | undefined)?.version ?? 0) > (fresh as CaseState).version ? held : fresh,
+  });
+  const keep = (fresh: CaseState) => client.setQueryData<CaseState>(key, fresh);
+
+  const answer = useMutation({
+    mutationFn: ({ checkId, answer, askedBecause }: AnswerGiven) =>
+      api<CaseState>(`${path}/findings`, {
+        method: 'POST',
+        body: { id: newId(), checkId, answer, askedBecause, deviceAt: new Date().toISOString(), clockOffsetMs },
+      }),
+    onSuccess: keep,
+  });
+
+  const acknowledge = useMutation({
+    mutationFn: ({ checkId, cautionIds }: { checkId: string; cautionIds: string[] }) =>
+      api<{ cautionId: string; dangers: Danger[] }[]>(`${path}/acknowledgements`, {
+        method: 'POST',
+        body: { checkId, cautions: cautionIds.map((cautionId) => ({ id: newId(), cautionId })) },
+      }),
+    onSuccess: (read) => client.setQueryData<CaseState>(key, (held) => held && { ...held, acknowledged: [...held.acknowledged, ...read] }),
+  });
+
+  const note = useMutation({
+    mutationFn: ({ findingId, text }: { findingId: string; text: string }) =>
+      api<{ id: string; findingId: string; text: string; person: string; at: string }>(`${path}/findings/${findingId}/notes`, {
+        method: 'POST',
+        body: { id: newId(), text },
+      }),
+    onSuccess: ({ findingId, ...written }) =>
+      client.setQueryData<CaseState>(key, (held) => held && {
+        ...held,
+        findings: held.findings.map((finding) => (finding.id === findingId ? { ...finding, notes: [...finding.notes, written] } : finding)),
+      }),
+  });
+
+  return { state: query.data, answer, acknowledge, note };
+}
+
+export type CaseHandle = ReturnType<typeof useCase>;

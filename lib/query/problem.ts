@@ -1,0 +1,40 @@
+/** What the API answered instead of a result: problem+json (RFC 9457), or no answer at all. */
+export class ApiProblem extends Error {
+  constructor(
+    message: string,
+    readonly status: number,
+    /** Message by field. */
+    readonly fields: Readonly<Record<string, string>> = {},
+  ) {
+    super(message);
+    this.name = 'ApiProblem';
+  }
+}
+
+const OFFLINE = 'No connection to Carryover. What you entered is still here; try again in a moment.';
+
+/** Reads or writes JSON; throws ApiProblem with words that can be shown. */
+export async function api<Result>(path: string, { method = 'GET', body }: { method?: string; body?: unknown } = {}): Promise<Result> {
+  let response: Response;
+  try {
+    response = await fetch(path, {
+      method,
+      headers: body === undefined ? {} : { 'content-type': 'application/json' },
+      body: body === undefined ? undefined : JSON.stringify(body),
+    });
+  } catch {
+    throw new ApiProblem(OFFLINE, 0);
+  }
+  if (response.ok) return (await response.json()) as Result;
+  throw await problemOf(response);
+}
+
+async function problemOf(response: Response): Promise<ApiProblem> {
+  const unknown = `Carryover could not do that (${response.status}). What you entered is still here.`;
+  try {
+    const { detail, title, errors } = (await response.json()) as { detail?: string; title?: string; errors?: Record<string, string> };
+    return new ApiProblem(detail ?? title ?? unknown, response.status, errors);
+  } catch {
+    return new ApiProblem(unknown, response.status);
+  }
+}

@@ -1,0 +1,180 @@
+import type { Basis, Check, Ranking, SetUp, Stage, StateShare, StationId } from '@/lib/diagnose/types';
+
+/**
+ * What the case page and the API show of a case. `CaseHead` and `RulebookView` stay as they are while answers come
+ * in; `CaseState` is what each answer changes, and what the answer's request returns.
+ */
+export interface CaseHead {
+  id: string;
+  number: number;
+  unit: { id: string; fleetNumber: string; vehicleKind: string };
+  siteName: string;
+  timeZone: string;
+  fit: { modelName: string; installedOn: string } | null;
+  complaintWords: string | null;
+  odometer: string | null;
+  openedBy: string;
+  openedAt: string;
+  editionNumber: number;
+}
+
+/** A check as the page needs it: everything but its rates. */
+export interface CheckView
+  extends Pick<Check, 'id' | 'station' | 'kind' | 'prompt' | 'why' | 'steps' | 'tools' | 'minutes' | 'setUp' | 'cautions' | 'basis' | 'source'> {
+  answers: { id: string; label: string }[];
+  /** Symbols of the units that a value and its error are in when none is typed: as the person set them. */
+  unitSymbol: string | null;
+  errorSymbol: string | null;
+  /** Usual error of the instrument in that unit, as text for the field. */
+  usualError: string | null;
+  /** Prompts of the checks that this one spoils. */
+  spoils: { id: string; prompt: string }[];
+}
+
+export interface RulebookView {
+  checks: Record<string, CheckView>;
+  panels: { id: string; station: StationId; title: string; prompt: string; checks: string[] }[];
+  causes: Record<string, { name: string; sentence: string; station: StationId | null }>;
+  cautions: Record<string, { text: string; worseWhen: string[] }>;
+}
+
+export type Direction = 'for' | 'against';
+
+/** What one finding counted for or against a cause, and what the ranking would be without it. */
+export interface ReasonView {
+  findingIds: string[];
+  /** "Sealant at the gasket: heavy bead" */
+  finding: string;
+  direction: Direction;
+  strength: string;
+  decibans: number;
+  note: string;
+  basis: Basis | null;
+  source: string | null;
+  /** p of this cause without this finding. */
+  without: number;
+}
+
+export interface CauseView {
+  causeId: string;
+  p: number;
+  /** p less that of the run before; null in the first. */
+  change: number | null;
+  prior: number;
+  reasons: ReasonView[];
+}
+
+export interface FindingView {
+  id: string;
+  checkId: string;
+  stage: Stage;
+  source: string;
+  kind: string;
+  /** "48 s ± 1 s", "Heavy bead", "Can't tell" */
+  answer: string;
+  shares: StateShare[];
+  thinkSo: boolean;
+  person: string;
+  /** By the device's corrected clock. */
+  at: string;
+  receivedAt: string;
+  late: boolean;
+  current: boolean;
+  notes: { id: string; text: string; person: string; at: string }[];
+}
+
+export interface SuggestionView {
+  checkIds: string[];
+  panelId: string | null;
+  word: string;
+  bits: number;
+  minutes: number;
+  setUpMinutes: number;
+  /** Why it stands where it does, in a sentence; null for a plain suggestion. */
+  because: string | null;
+}
+
+export interface NextView {
+  suggestions: SuggestionView[];
+  /** "Enough is known; repair": no check is worth its time any more. */
+  stop: boolean;
+  stopReason: string | null;
+  /** Checks that can't tell any more because another one spoiled what they would have seen. */
+  spoiled: { checkId: string; by: string }[];
+}
+
+export interface SettleView {
+  checkId: string;
+  /** The answer that would move the leader most. */
+  answer: string;
+  causeId: string;
+  from: number;
+  to: number;
+}
+
+export interface RepairView {
+  remedyId: string;
+  name: string;
+  causeIds: string[];
+  p: number;
+  lookMinutes: number;
+  fixMinutes: number;
+}
+
+export interface CallView {
+  id: string;
+  mainCause: string;
+  contributingCauses: string[];
+  sureness: string;
+  proof: string;
+  whyNotLeading: string | null;
+  unlistedCause: string | null;
+  person: string;
+  at: string;
+  /** The one that stands: not superseded, the case not reopened since. */
+  standing: boolean;
+}
+
+export interface CaseEventView {
+  id: string;
+  kind: string;
+  reason: string | null;
+  person: string;
+  at: string;
+}
+
+export interface CaseState {
+  caseId: string;
+  version: number;
+  status: 'open' | 'called' | 'closed';
+  runId: string | null;
+  /** The instant that is shown, when it is not now. */
+  at: string | null;
+  /** The run can't be made again from what it kept, or the engine and the compiled rules differed. */
+  differs: boolean;
+  vehicleState: SetUp;
+  causes: CauseView[];
+  fit: Ranking['fit'];
+  suspicion: Ranking['suspicion'];
+  /** What moved the ranking last, in words. */
+  because: string | null;
+  findings: FindingView[];
+  next: NextView;
+  settle: SettleView[];
+  pair: { causeIds: [string, string]; leadDecibans: number } | null;
+  repairs: RepairView[];
+  acknowledged: { cautionId: string; dangers: string[] }[];
+}
+
+/** Everything that the page is made of at first. */
+export interface CaseView {
+  /** Our clock when this was made: what a device's clock is corrected by. */
+  now: string;
+  head: CaseHead;
+  rulebook: RulebookView;
+  state: CaseState;
+  calls: CallView[];
+  events: CaseEventView[];
+  /** Instants at which something happened, oldest first: where the past can be shown. */
+  moments: { at: string; what: string }[];
+}

@@ -1,0 +1,27 @@
+import { insertCaseEvent, lockCase, updateCase } from '@/db/queries/case';
+import { findMember } from '@/db/queries/membership';
+import { PERMITTED } from '@/lib/auth/permissions';
+import { invalid, notFound } from '@/lib/errors';
+import { newId } from '@/lib/ids';
+import { assignCaseInput } from '@/lib/schemas/case';
+import { defineWrite } from '../define';
+
+/** Gives a case to somebody of the organisation, or to nobody. */
+export const assignCase = defineWrite({
+  name: 'assign.case',
+  doing: 'assign cases',
+  roles: PERMITTED['case.work'],
+  input: assignCaseInput,
+  run: async ({ tx, ctx, input, audit }) => {
+    const of = { organisationId: ctx.organisation.id, caseId: input.caseId };
+    if (!(await lockCase(tx, of))) throw notFound('case');
+    if (input.personId && !(await findMember(tx, { ...of, personId: input.personId }))) {
+      throw invalid({ personId: 'Choose somebody of your organisation.' });
+    }
+    const at = ctx.now();
+    await updateCase(tx, of, { assignedTo: input.personId });
+    await insertCaseEvent(tx, { ...of, id: newId(at.getTime()), kind: 'assigned', personId: ctx.person.id, at });
+    audit({ entity: 'case', entityId: of.caseId, changed: { assignedTo: input.personId } });
+    return { id: of.caseId };
+  },
+});

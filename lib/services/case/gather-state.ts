@@ -1,0 +1,41 @@
+import type { Transaction } from '@/db/connect';
+import { selectCaseHead } from '@/db/queries/case';
+import { selectAcknowledgements, selectFindingNotes, selectFindings } from '@/db/queries/finding';
+import { selectLastRuns } from '@/db/queries/run';
+import { notFound } from '@/lib/errors';
+import type { Ctx } from '../context';
+import { compiledEdition } from '../edition/compiled';
+import type { StateParts } from './build-state';
+import { siteDay } from './site-day';
+
+type Head = NonNullable<Awaited<ReturnType<typeof selectCaseHead>>>;
+
+/**
+ * Reads what a case's state is made of: now, or as it was at an instant, by what had been received until then.
+ *
+ * @throws AppError "not-found" for a case that isn't there, or that wasn't there yet
+ */
+export async function gatherState(tx: Transaction, ctx: Ctx, { caseId, at = null }: { caseId: string; at?: Date | null }): Promise<StateParts & { caseHead: Head }> {
+  const of = { organisationId: ctx.organisation.id, caseId };
+  const head = await selectCaseHead(tx, of);
+  if (!head) throw notFound('case');
+  const until = at ?? undefined;
+  const compiled = await compiledEdition(tx, { ...of, editionId: head.editionId });
+  const rows = await selectFindings(tx, { ...of, receivedBy: until });
+  const notes = await selectFindingNotes(tx, { ...of, by: until });
+  const [run, previous] = await selectLastRuns(tx, { ...of, by: until });
+  if (!run) throw notFound('state of the case');
+  const acknowledged = await selectAcknowledgements(tx, { ...of, personId: ctx.person.id, onDay: siteDay(ctx.now(), head.timeZone) });
+  return {
+    caseHead: head,
+    compiled,
+    head,
+    rows,
+    notes,
+    run: { ...run, recordFacts: run.inputs.recordFacts },
+    previous: previous?.result ?? null,
+    acknowledged,
+    units: ctx.person.units,
+    at,
+  };
+}

@@ -1,0 +1,80 @@
+import type { z } from 'zod';
+import { FindingError, sharesOf, type CompiledCheck, type StateShare } from '@/lib/diagnose';
+import { invalid } from '@/lib/errors';
+import type { answerInput } from '@/lib/schemas/case';
+import { formatQuantity, parseQuantity, type DecimalMark, type UnitPreferences } from '@/lib/units';
+import { measureOf, type Measure } from './view/measure';
+
+/** The columns of a finding that an answer fills. */
+export interface AnswerColumns {
+  kind: 'state' | 'measured' | 'cannot-tell' | 'skip' | 'undo';
+  shares: StateShare[];
+  reliability: number;
+  valueTyped: string | null;
+  errorTyped: string | null;
+  unit: string | null;
+  valueSi: number | null;
+  errorSi: number | null;
+}
+
+/** How the person writes measures. */
+export interface Writing {
+  units: UnitPreferences;
+  decimal?: DecimalMark;
+}
+
+const NOT_MEASURED = { valueTyped: null, errorTyped: null, unit: null, valueSi: null, errorSi: null };
+
+type ParsedAnswer = z.output<typeof answerInput>;
+
+/**
+ * Understands an answer to a check: a state as it is, a measured value from what was typed.
+ *
+ * @throws AppError "invalid" with the message beside `value`, `error` or `state`
+ */
+export function readAnswer(check: CompiledCheck, answer: ParsedAnswer, writing: Writing): AnswerColumns {
+  if (answer.kind === 'measured') return readMeasured(check, answer, writing);
+  if (answer.kind !== 'state') return { kind: answer.kind, shares: [], reliability: 1, ...NOT_MEASURED };
+  if (check.check.kind === 'measured') throw invalid({ value: 'This check is measured: enter the value.' });
+  if (!check.stateIndex.has(answer.state)) throw invalid({ state: 'This check has no such answer.' });
+  return { kind: 'state', ...sharesOf(check, answer), ...NOT_MEASURED };
+}
+
+function readMeasured(check: CompiledCheck, answer: Extract<ParsedAnswer, { kind: 'measured' }>, { units, decimal }: Writing): AnswerColumns {
+  const measure = measureOf(check.check, units);
+  if (!measure) throw invalid({ state: 'This check is not measured: choose an answer.' });
+  const value = parseQuantity(answer.value, { quantity: measure.quantity, defaultUnit: measure.unit, decimal });
+  if (!value.ok) throw invalid({ value: value.message });
+  refuseOutOfRange(check, answer.value, value.si, measure);
+  const error = answer.error ? readError(answer.error, measure, decimal) : (check.check.usualError ?? 0);
+  try {
+    const { shares, reliability } = sharesOf(check, { kind: 'measured', value: value.si, error, sureness: answer.sureness });
+    return {
+      kind: 'measured',
+      shares,
+      reliability,
+      valueTyped: answer.value,
+      errorTyped: answer.error ?? null,
+      unit: value.unit,
+      valueSi: value.si,
+      errorSi: error,
+    };
+  } catch (cause) {
+    if (cause instanceof FindingError) throw invalid({ value: 'This value does not fit the check.' });
+    throw cause;
+  }
+}
+
+function refuseOutOfRange({ check }: CompiledCheck, typed: string, si: number, { quantity, unit }: Measure): void {
+  const { min, max } = check.range ?? { min: -Infinity, max: Infinity };
+  if (si >= min && si <= max) return;
+  const shown = (limit: number) => formatQuantity(limit, { quantity, unit });
+  throw invalid({ value: `${typed} can't be right here: between ${shown(min)} and ${shown(max)} is possible.` });
+}
+
+function readError(typed: string, { difference, differenceUnit }: Measure, decimal?: DecimalMark): number {
+  const error = parseQuantity(typed.replace(/^\s*(±|\+\s*\/?\s*[-−])/, ''), { quantity: difference, defaultUnit: differenceUnit, decimal });
+  if (!error.ok) throw invalid({ error: error.message });
+  if (error.si < 0) throw invalid({ error: 'An error is 0 or more.' });
+  return error.si;
+}

@@ -1,0 +1,65 @@
+import { selectCalls, selectCaseEvents } from '@/db/queries/case';
+import { PERMITTED } from '@/lib/auth/permissions';
+import { readCaseInput } from '@/lib/schemas/case';
+import type { CallView, CaseState, CaseView } from '@/lib/schemas/case-view';
+import { defineRead } from '../define';
+import { buildState } from './build-state';
+import { gatherState } from './gather-state';
+import { headView } from './view/head';
+import { momentsOf } from './view/moments';
+import { rulebookView } from './view/rulebook';
+
+/** What changes of a case: its ranking, findings and next checks, now or as they were. */
+export const readCaseState = defineRead({
+  name: 'read.case',
+  doing: 'see cases',
+  roles: PERMITTED['case.see'],
+  input: readCaseInput,
+  run: async ({ tx, ctx, input }): Promise<CaseState> =>
+    buildState(await gatherState(tx, ctx, { caseId: input.caseId, at: input.at ? new Date(input.at) : null })),
+});
+
+/** Everything that the page of a case shows, now or as it was. */
+export const readCase = defineRead({
+  name: 'read.case',
+  doing: 'see cases',
+  roles: PERMITTED['case.see'],
+  input: readCaseInput,
+  run: async ({ tx, ctx, input }): Promise<CaseView> => {
+    const of = { organisationId: ctx.organisation.id, caseId: input.caseId };
+    const at = input.at ? new Date(input.at) : null;
+    const { caseHead, ...parts } = await gatherState(tx, ctx, { caseId: input.caseId, at });
+    const rulebook = rulebookView(parts.compiled, ctx.person.units);
+    const allEvents = await selectCaseEvents(tx, of);
+    const events = allEvents.filter((event) => !at || event.at <= at);
+    const calls = (await selectCalls(tx, of)).filter((call) => !at || call.at <= at);
+    const state = buildState(parts);
+    const everything = at ? buildState((await gatherState(tx, ctx, { caseId: input.caseId }))).findings : state.findings;
+    return {
+      now: ctx.now().toISOString(),
+      head: headView(caseHead, ctx.person.units),
+      rulebook,
+      state: at ? { ...state, status: statusAt(events) } : state,
+      calls: callViews(calls, events),
+      events: events.map(({ at: when, ...event }) => ({ ...event, at: when.toISOString() })),
+      moments: momentsOf(rulebook, everything, allEvents),
+    };
+  },
+});
+
+type Events = Awaited<ReturnType<typeof selectCaseEvents>>;
+
+function statusAt(events: Events): CaseState['status'] {
+  const last = events.filter(({ kind }) => kind !== 'assigned').at(-1)?.kind;
+  return last === 'called' || last === 'closed' ? last : 'open';
+}
+
+/** A call stands when it is the last and the case was not reopened after it. */
+function callViews(calls: Awaited<ReturnType<typeof selectCalls>>, events: Events): CallView[] {
+  const reopenedAt = events.filter(({ kind }) => kind === 'reopened').at(-1)?.at;
+  return calls.map(({ at, runId: _, ...call }, i) => ({
+    ...call,
+    at: at.toISOString(),
+    standing: i === calls.length - 1 && (!reopenedAt || reopenedAt < at),
+  }));
+}

@@ -1,0 +1,132 @@
+import type { Transaction } from '@/db/connect';
+import { lockCase, updateCase } from '@/db/queries/case';
+import { insertFinding, selectAcknowledgements, selectFindingCase, selectFindingNotes, selectFindings } from '@/db/queries/finding';
+import { selectLatestRun } from '@/db/queries/run';
+import { PERMITTED } from '@/lib/auth/permissions';
+import type { CompiledRulebook } from '@/lib/diagnose';
+import { cautionsToRead } from '@/lib/diagnose/cautions';
+import { stateAfter } from '@/lib/diagnose/set-up';
+import type { Check, SetUp } from '@/lib/diagnose/types';
+import { conflict, invalid, notFound } from '@/lib/errors';
+import { recordFindingInput } from '@/lib/schemas/case';
+import type { CaseState } from '@/lib/schemas/case-view';
+import type { Ctx } from '../context';
+import { defineWrite } from '../define';
+import { compiledEdition } from '../edition/compiled';
+import { buildState } from './build-state';
+import { currentFindings, isNewer, slotOf } from './current-findings';
+import { findingsForRanking } from './findings-for-ranking';
+import { gatherState } from './gather-state';
+import { readAnswer } from './read-answer';
+import { makeRun } from './run-of-record';
+import { siteDay } from './site-day';
+import { writingOf } from './writing';
+
+/**
+ * Writes the answer to a check and ranks anew. The id is the client's: the same request sent twice writes once and
+ * is answered alike. An answer older than the one that stands is kept, but isn't current.
+ */
+export const recordFinding = defineWrite({
+  name: 'record.finding',
+  doing: 'answer checks',
+  roles: PERMITTED['case.work'],
+  input: recordFindingInput,
+  run: async ({ tx, ctx, input, audit, unchanged }): Promise<CaseState> => {
+    const of = { organisationId: ctx.organisation.id, caseId: input.caseId };
+    const head = await lockCase(tx, of);
+    if (!head) throw notFound('case');
+    const compiled = await compiledEdition(tx, { ...of, editionId: head.editionId });
+
+    const held = await selectFindingCase(tx, { organisationId: of.organisationId, findingId: input.id });
+    if (held) {
+      if (held.caseId !== input.caseId || held.checkId !== input.checkId) throw conflict('This id belongs to another finding.');
+      unchanged();
+      return buildState(await gatherState(tx, ctx, { caseId: of.caseId }));
+    }
+    if (head.status !== 'open') throw conflict('This case has been called. Reopen it to go on.');
+
+    const check = compiled.checks.get(input.checkId);
+    if (!check) throw invalid({ checkId: "This check is not in the case's rulebook." });
+    const answer = readAnswer(check, input.answer, writingOf(ctx));
+    const acknowledged = await acknowledgedToday(tx, ctx, head);
+    const says = answer.shares.length > 0;
+    if (says) refuseUnreadCautions(compiled, check.check, acknowledged);
+
+    const receivedAt = ctx.now();
+    const rows = await selectFindings(tx, of);
+    const dated = {
+      id: input.id,
+      checkId: input.checkId,
+      stage: input.stage,
+      correctedAt: correctedTime(new Date(input.deviceAt), input.clockOffsetMs, receivedAt),
+      receivedAt,
+    };
+    const standing = currentFindings(rows).find((other) => slotOf(other) === slotOf(dated));
+    const late = standing !== undefined && !isNewer(dated, standing);
+    const finding = { ...answer, ...dated, source: 'asked', askedBecause: input.askedBecause, late };
+    await insertFinding(tx, {
+      ...finding,
+      ...of,
+      personId: ctx.person.id,
+      deviceAt: new Date(input.deviceAt),
+      clockOffsetMs: input.clockOffsetMs,
+      supersedes: late ? null : (standing?.id ?? null),
+    });
+    const vehicleState = says ? after(head.vehicleState, check.check.setUp) : head.vehicleState;
+    await updateCase(tx, of, { vehicleState });
+
+    const rowsNow = [...rows, { ...finding, person: ctx.person.name }];
+    const previous = await selectLatestRun(tx, of);
+    const run = await makeRun(tx, {
+      ...of,
+      editionId: head.editionId,
+      compiled,
+      findings: findingsForRanking(rowsNow),
+      recordFacts: previous?.inputs.recordFacts ?? {},
+      becauseOf: input.id,
+      at: receivedAt,
+    });
+    audit({
+      entity: 'finding',
+      entityId: input.id,
+      changed: { caseId: of.caseId, checkId: input.checkId, kind: answer.kind, shares: answer.shares, valueTyped: answer.valueTyped },
+    });
+    return buildState({
+      compiled,
+      head: { ...head, version: head.version + 1, vehicleState },
+      rows: rowsNow,
+      notes: await selectFindingNotes(tx, of),
+      run,
+      previous: previous?.result ?? null,
+      acknowledged,
+      units: ctx.person.units,
+      at: null,
+    });
+  },
+});
+
+function acknowledgedToday(tx: Transaction, ctx: Ctx, { id, timeZone }: { id: string; timeZone: string }) {
+  return selectAcknowledgements(tx, {
+    organisationId: ctx.organisation.id,
+    caseId: id,
+    personId: ctx.person.id,
+    onDay: siteDay(ctx.now(), timeZone),
+  });
+}
+
+function refuseUnreadCautions({ rulebook }: CompiledRulebook, check: Check, acknowledged: CaseState['acknowledged']): void {
+  const worseWhen = (id: string) => rulebook.cautions.find((caution) => caution.id === id)?.worseWhen ?? [];
+  const unread = cautionsToRead(check, worseWhen, acknowledged);
+  if (unread.length > 0) throw conflict('Read and acknowledge the cautions of this check first.', { cautions: unread.join(' ') });
+}
+
+/** A device may be wrong about the time, but nothing is answered in the future. */
+function correctedTime(deviceAt: Date, offsetMs: number, receivedAt: Date): Date {
+  return new Date(Math.min(deviceAt.getTime() + offsetMs, receivedAt.getTime()));
+}
+
+/** Where the vehicle stands once the check was made. */
+function after(state: SetUp, setUp: SetUp): SetUp {
+  const { access, ...rest } = stateAfter({ ...state, access: state.access ?? [] }, setUp);
+  return { ...rest, access: [...access] };
+}

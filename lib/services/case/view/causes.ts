@@ -1,0 +1,50 @@
+import type { RunResult } from '@/db/schema';
+import type { CompiledRulebook } from '@/lib/diagnose';
+import type { ExplainedCause, Explanation, Reason } from '@/lib/diagnose/explain';
+import type { CauseView, FindingView, ReasonView } from '@/lib/schemas/case-view';
+
+/** Every cause with its level, how it moved since the run before, and the reasons that counted, most telling first. */
+export function causeViews(
+  compiled: CompiledRulebook,
+  { causes }: Explanation,
+  previous: RunResult | null,
+  shown: readonly FindingView[],
+): CauseView[] {
+  const before = new Map(previous?.causes.map(({ causeId, p }) => [causeId, p]));
+  const answers = new Map(shown.map((finding) => [finding.id, finding]));
+  return causes.map((cause) => ({
+    causeId: cause.causeId,
+    p: cause.p,
+    prior: cause.prior,
+    change: before.has(cause.causeId) ? cause.p - (before.get(cause.causeId) ?? 0) : null,
+    reasons: cause.reasons.flatMap((reason) => reasonView(compiled, cause, reason, answers)),
+  }));
+}
+
+function reasonView(
+  compiled: CompiledRulebook,
+  cause: ExplainedCause,
+  reason: Reason,
+  answers: ReadonlyMap<string, FindingView>,
+): ReasonView[] {
+  if (!reason.strength) return [];
+  const [rule] = reason.rules;
+  return [
+    {
+      findingIds: reason.findingIds,
+      finding: reason.findingIds
+        .map((id, index) => `${compiled.checks.get(reason.checkIds[index] ?? '')?.check.prompt ?? ''} ${answers.get(id)?.answer ?? ''}`.trim())
+        .join(' and '),
+      direction: reason.strength.direction,
+      strength: reason.strength.word,
+      decibans: reason.countedDecibans,
+      note: rule?.note ?? FILLED_IN,
+      basis: rule?.basis ?? null,
+      source: rule?.source ?? null,
+      without: cause.p - (cause.withoutFinding.find(({ findingId }) => reason.findingIds.includes(findingId))?.changeInP ?? 0),
+    },
+  ];
+}
+
+/** A weight that the compiler filled in: the answer is the rarer or the commoner for it. */
+const FILLED_IN = 'Another answer would have told more of this cause; this one is what the others leave.';

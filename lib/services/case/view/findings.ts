@@ -1,0 +1,42 @@
+import type { FindingRow } from '@/db/queries/finding';
+import type { CompiledRulebook } from '@/lib/diagnose';
+import type { FindingView } from '@/lib/schemas/case-view';
+import type { UnitPreferences } from '@/lib/units';
+import { standingFindings } from '../current-findings';
+import { answerText } from './answer-text';
+
+export interface NoteRow {
+  id: string;
+  findingId: string;
+  text: string;
+  person: string;
+  at: Date;
+}
+
+/** All findings of a case, newest first; those that were replaced, taken back or late say so. */
+export function findingViews(
+  compiled: CompiledRulebook,
+  rows: readonly FindingRow[],
+  notes: readonly NoteRow[],
+  units: UnitPreferences,
+): FindingView[] {
+  const current = new Set(standingFindings(rows).map((row) => row.id));
+  return rows
+    .map((row): FindingView => ({
+      id: row.id,
+      checkId: row.checkId,
+      stage: row.stage,
+      source: row.source,
+      kind: row.kind,
+      answer: answerText(compiled.checks.get(row.checkId)?.check, row, units),
+      shares: row.shares,
+      thinkSo: row.reliability < 1,
+      person: row.person,
+      at: row.correctedAt.toISOString(),
+      receivedAt: row.receivedAt.toISOString(),
+      late: row.late,
+      current: current.has(row.id),
+      notes: notes.filter((note) => note.findingId === row.id).map(({ id, text, person, at }) => ({ id, text, person, at: at.toISOString() })),
+    }))
+    .reverse();
+}

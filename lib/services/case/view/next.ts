@@ -1,0 +1,80 @@
+import {
+  createWhatIf,
+  type CompiledRulebook,
+  type Finding,
+  type RecordFacts,
+} from '@/lib/diagnose';
+import { nextChecks, type NextChecks, type Suggestion } from '@/lib/diagnose/next-checks';
+import { openChecks } from '@/lib/diagnose/next-checks-open';
+import { whatWouldSettle } from '@/lib/diagnose/next-checks-settle';
+import type { SetUp } from '@/lib/diagnose/types';
+import type { NextView, RepairView, SettleView } from '@/lib/schemas/case-view';
+
+interface Asked {
+  compiled: CompiledRulebook;
+  findings: readonly Finding[];
+  recordFacts: RecordFacts;
+  vehicleState: SetUp;
+  labourRatePerHour: number | null;
+}
+
+/** More than this is a list to read, not a suggestion to take. */
+const MOST_SUGGESTIONS = 8;
+const MOST_SETTLING = 3;
+
+/** What to check next, what would settle it, and what would be repaired as things stand. */
+export function whatNext({ compiled, findings, recordFacts, vehicleState, labourRatePerHour }: Asked): {
+  next: NextView;
+  settle: SettleView[];
+  repairs: RepairView[];
+} {
+  const open = openChecks(createWhatIf(compiled, findings, { facts: recordFacts }), findings);
+  const chosen = nextChecks(open, {
+    vehicle: { ...vehicleState, access: vehicleState.access ?? [] },
+    money: labourRatePerHour === null ? {} : { labourRatePerHour },
+  });
+  const labelOf = (checkId: string, state: string) =>
+    compiled.checks.get(checkId)?.check.states.find(({ id }) => id === state)?.label ?? state;
+  const settle = whatWouldSettle(open)
+    .causes.slice(0, MOST_SETTLING)
+    .flatMap(({ causeId, p, up, down }) => {
+      const telling = up && (!down || up.then - p >= p - down.then) ? up : down;
+      return telling ? [{ checkId: telling.checkId, answer: labelOf(telling.checkId, telling.state), causeId, from: p, to: telling.then }] : [];
+    });
+  return { next: nextView(compiled, chosen), settle, repairs: repairViews(compiled, chosen) };
+}
+
+function nextView(compiled: CompiledRulebook, chosen: NextChecks): NextView {
+  return {
+    suggestions: chosen.suggestions.slice(0, MOST_SUGGESTIONS).map((suggestion) => ({
+      checkIds: [...suggestion.checkIds],
+      panelId: suggestion.panelId ?? null,
+      word: suggestion.word,
+      bits: suggestion.bits,
+      minutes: suggestion.minutes,
+      setUpMinutes: suggestion.setUpMinutes,
+      because: becauseOf(compiled, suggestion),
+    })),
+    stop: chosen.enoughIsKnown,
+    stopReason: chosen.enoughIsKnown
+      ? 'Enough is known; repair. No check that is still open would save more than the time it takes.'
+      : null,
+    spoiled: chosen.spoiled,
+  };
+}
+
+function becauseOf(compiled: CompiledRulebook, { why, checkIds }: Suggestion): string | null {
+  if (why.kind === 'chosen') return checkIds.length > 1 ? 'These two tell more together than one by one.' : null;
+  const prompts = why.checkIds.map((id) => `“${compiled.checks.get(id)?.check.prompt ?? id}”`);
+  return `Waits: it would spoil ${prompts.join(' and ')}.`;
+}
+
+function repairViews(compiled: CompiledRulebook, { repair }: NextChecks): RepairView[] {
+  const remedies = new Map(compiled.rulebook.remedies.map((remedy) => [remedy.id, remedy]));
+  return repair.steps.flatMap((step) => {
+    const remedy = remedies.get(step.remedyId);
+    return remedy
+      ? [{ remedyId: remedy.id, name: remedy.name, causeIds: step.causeIds, p: step.p, lookMinutes: remedy.look.minutes, fixMinutes: remedy.fix.minutes }]
+      : [];
+  });
+}
