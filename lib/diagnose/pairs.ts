@@ -93,7 +93,7 @@ function signOf(item: EvidenceItem, byCheck: ReadonlyMap<string, UsedFinding>) {
   const shares = states.map(({ share }) => share);
   return (a: number, b: number): number => {
     const both = noisyOr(leak, [inhibition(given(a), leak), inhibition(given(b), leak)]);
-    const nats = states.map(({ index }) => Math.log(index === present ? both / leak : (1 - both) / (1 - leak)));
+    const nats = states.map(({ index }) => Math.log(index === present ? both / leak : Math.max(Number.MIN_VALUE, 1 - both) / (1 - leak)));
     return evidenceNats(nats, shares, finding.reliability);
   };
 }
