@@ -6,24 +6,28 @@ import { forbidden, invalid } from '@/lib/errors';
 import type { Ctx } from './context';
 import { fieldErrors } from './field-errors';
 
-export interface Work<Input> {
+export interface Work<Input, Prepared = undefined> {
   tx: Transaction;
   ctx: Ctx;
   input: Input;
+  /** What `prepare` came to. */
+  prepared: Prepared;
   /** Notes what was written; the row goes in with the write or not at all. */
   audit: (row: { entity: string; entityId: string; changed: Record<string, unknown> }) => void;
   /** Says that nothing was written after all: a repeated request whose first copy had arrived. */
   unchanged: () => void;
 }
 
-interface Definition<Schema extends z.ZodType, Result> {
+interface Definition<Schema extends z.ZodType, Result, Prepared> {
   /** "open.case": verb and entity; the audit's action. */
   name: string;
   /** "open a case": completes "Your role does not allow you to …". */
   doing: string;
   roles: readonly Role[];
   input: Schema;
-  run: (work: Work<z.output<Schema>>) => Promise<Result>;
+  /** Before the transaction: what is slow and needs none, or must stay when the transaction doesn't. */
+  prepare?: (work: { ctx: Ctx; input: z.output<Schema> }) => Promise<Prepared>;
+  run: (work: Work<z.output<Schema>, Prepared>) => Promise<Result>;
 }
 
 export interface Service<Schema extends z.ZodType, Result> {
@@ -37,21 +41,23 @@ export interface Service<Schema extends z.ZodType, Result> {
  * A write: role, parse, transaction, work, audit row in the same transaction, in this order and for every one of
  * them. A write that notes nothing in the audit is a mistake of ours and is rolled back.
  */
-export const defineWrite = <Schema extends z.ZodType, Result>(definition: Definition<Schema, Result>) =>
+export const defineWrite = <Schema extends z.ZodType, Result, Prepared = undefined>(definition: Definition<Schema, Result, Prepared>) =>
   define(definition, true);
 
 /** A read: role, parse, transaction with the organisation set. */
-export const defineRead = <Schema extends z.ZodType, Result>(definition: Definition<Schema, Result>) =>
+export const defineRead = <Schema extends z.ZodType, Result, Prepared = undefined>(definition: Definition<Schema, Result, Prepared>) =>
   define(definition, false);
 
-function define<Schema extends z.ZodType, Result>(
-  { name, doing, roles, input: schema, run }: Definition<Schema, Result>,
+function define<Schema extends z.ZodType, Result, Prepared>(
+  { name, doing, roles, input: schema, prepare, run }: Definition<Schema, Result, Prepared>,
   writes: boolean,
 ): Service<Schema, Result> {
   const service = async ({ ctx, input }: { ctx: Ctx; input: z.input<Schema> }) => {
     if (!hasAnyRole(ctx.roles, roles)) throw forbidden(doing);
     const parsed = schema.safeParse(input);
     if (!parsed.success) throw invalid(fieldErrors(parsed.error));
+    // Without a `prepare` nothing is prepared, and its type is undefined.
+    const prepared = (await prepare?.({ ctx, input: parsed.data })) as Prepared;
 
     return asTenant(ctx.db, { organisationId: ctx.organisation.id, personId: ctx.person.id }, async (tx) => {
       const noted: Parameters<Work<unknown>['audit']>[0][] = [];
@@ -60,6 +66,7 @@ function define<Schema extends z.ZodType, Result>(
         tx,
         ctx,
         input: parsed.data,
+        prepared,
         audit: (row) => noted.push(row),
         unchanged: () => (isUnchanged = true),
       });

@@ -1,0 +1,30 @@
+import PgBoss from 'pg-boss';
+import { connect } from '@/db/connect';
+import { env } from '@/lib/env';
+import { JOB_SCHEMA } from '@/lib/jobs';
+import { log } from '@/lib/log';
+import { createMailer } from '@/lib/mail';
+import { handlers } from './handlers';
+import { startWork } from './start-work';
+
+const { DATABASE_URL, SMTP_URL, MAIL_FROM, NEXTAUTH_URL } = env();
+const { db, close } = connect(DATABASE_URL, { max: 4 });
+const mailer = createMailer(SMTP_URL, MAIL_FROM);
+const boss = new PgBoss({ connectionString: DATABASE_URL, schema: JOB_SCHEMA, migrate: false, max: 4 });
+boss.on('error', (error) => log.error({ err: error }, 'job queue'));
+
+await startWork(boss, handlers({ db, mailer, now: () => new Date(), baseUrl: NEXTAUTH_URL }));
+log.info('worker ready');
+
+let stopping = false;
+async function stop() {
+  if (stopping) return;
+  stopping = true;
+  // Jobs at hand are finished; others wait for the next worker.
+  await boss.stop({ graceful: true, timeout: 5_000 });
+  mailer.close();
+  await close();
+  process.exit(0);
+}
+process.on('SIGTERM', () => void stop());
+process.on('SIGINT', () => void stop());
