@@ -1,6 +1,6 @@
-import { and, asc, desc, eq, isNull } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray, isNull } from 'drizzle-orm';
 import type { Executor } from '@/db/connect';
-import { compressorModel, fit } from '@/db/schema';
+import { compressorModel, fit, site, unit } from '@/db/schema';
 
 interface Of {
   organisationId: string;
@@ -58,13 +58,26 @@ export async function selectFitsOfUnit(db: Executor, { organisationId, unitId }:
 
 export type FitRow = Awaited<ReturnType<typeof selectFitsOfUnit>>[number];
 
-/** The compressors of a model that are on a unit now. */
-export async function selectFitsOfModel(db: Executor, { organisationId, modelId }: { organisationId: string; modelId: string }) {
+/** What is on each unit now, for lists. */
+export async function selectCurrentFits(db: Executor, { organisationId, unitIds }: { organisationId: string; unitIds: string[] }) {
+  if (unitIds.length === 0) return [];
   return db
-    .select({ id: fit.id, unitId: fit.unitId, installedOn: fit.installedOn, removedOn: fit.removedOn })
+    .selectDistinctOn([fit.unitId], { unitId: fit.unitId, modelName: compressorModel.name, installedOn: fit.installedOn })
     .from(fit)
-    .where(and(eq(fit.organisationId, organisationId), eq(fit.modelId, modelId), isNull(fit.hiddenAt)))
-    .orderBy(asc(fit.installedOn));
+    .innerJoin(compressorModel, ofItsModel)
+    .where(and(eq(fit.organisationId, organisationId), inArray(fit.unitId, unitIds), isNull(fit.removedOn), isNull(fit.hiddenAt)))
+    .orderBy(fit.unitId, desc(fit.installedOn), desc(fit.id));
+}
+
+/** Units that a compressor of the model is on now. */
+export async function selectUnitsWithModel(db: Executor, { organisationId, modelId }: { organisationId: string; modelId: string }) {
+  return db
+    .select({ fitId: fit.id, unitId: fit.unitId, fleetNumber: unit.fleetNumber, siteName: site.name, condition: fit.condition, installedOn: fit.installedOn })
+    .from(fit)
+    .innerJoin(unit, and(eq(unit.organisationId, fit.organisationId), eq(unit.id, fit.unitId)))
+    .innerJoin(site, and(eq(site.organisationId, unit.organisationId), eq(site.id, unit.siteId)))
+    .where(and(eq(fit.organisationId, organisationId), eq(fit.modelId, modelId), isNull(fit.removedOn), isNull(fit.hiddenAt), isNull(unit.hiddenAt)))
+    .orderBy(asc(unit.fleetNumber));
 }
 
 export async function insertFit(db: Executor, row: typeof fit.$inferInsert) {

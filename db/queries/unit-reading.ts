@@ -1,4 +1,4 @@
-import { and, asc, eq, notExists, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray, isNotNull, notExists, sql } from 'drizzle-orm';
 import type { Executor } from '@/db/connect';
 import { person, removal, unitReading } from '@/db/schema';
 
@@ -42,3 +42,15 @@ export async function selectReadings(db: Executor, { organisationId, unitId }: O
 }
 
 export type ReadingRow = Awaited<ReturnType<typeof selectReadings>>[number];
+
+/** The last odometer of each unit, for lists. */
+export async function selectLatestOdometers(db: Executor, { organisationId, unitIds }: { organisationId: string; unitIds: string[] }) {
+  if (unitIds.length === 0) return [];
+  return db
+    .selectDistinctOn([unitReading.unitId], { unitId: unitReading.unitId, readOn: unitReading.readOn, odometerM: unitReading.odometerM })
+    .from(unitReading)
+    .where(
+      and(eq(unitReading.organisationId, organisationId), inArray(unitReading.unitId, unitIds), isNotNull(unitReading.odometerM), notStruckOut(db)),
+    )
+    .orderBy(unitReading.unitId, desc(unitReading.readOn), desc(unitReading.createdAt), desc(unitReading.id));
+}

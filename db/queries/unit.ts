@@ -1,4 +1,4 @@
-import { and, asc, eq, ilike, isNull, sql } from 'drizzle-orm';
+import { and, asc, count, desc, eq, ilike, isNotNull, isNull, sql, type SQL } from 'drizzle-orm';
 import type { Executor } from '@/db/connect';
 import { site, unit } from '@/db/schema';
 import { containing } from './like';
@@ -69,6 +69,67 @@ export async function searchUnits(db: Executor, { organisationId, text, limit }:
 export async function insertUnit(db: Executor, row: typeof unit.$inferInsert) {
   const [inserted] = await db.insert(unit).values(row).onConflictDoNothing().returning({ id: unit.id });
   return inserted;
+}
+
+export async function updateUnit(db: Executor, { organisationId, unitId }: Of, change: Partial<typeof unit.$inferInsert>): Promise<void> {
+  await db.update(unit).set(change).where(and(eq(unit.organisationId, organisationId), eq(unit.id, unitId)));
+}
+
+/** Makes whoever else writes readings or fits of the unit wait until this transaction ends. */
+export async function lockUnit(db: Executor, { organisationId, unitId }: Of): Promise<boolean> {
+  const rows = await db
+    .select({ id: unit.id })
+    .from(unit)
+    .where(and(eq(unit.organisationId, organisationId), eq(unit.id, unitId)))
+    .for('update');
+  return rows.length > 0;
+}
+
+export interface UnitFilter {
+  organisationId: string;
+  /** Part of a fleet number. */
+  text?: string;
+  siteId?: string;
+  vocation?: string;
+  vehicleKind?: string;
+  hidden: boolean;
+  sort: keyof typeof SORTED_BY;
+  direction: 'asc' | 'desc';
+  limit: number;
+  offset: number;
+}
+
+const SORTED_BY = { number: unit.fleetNumber, site: site.name, kind: unit.vehicleKind, vocation: unit.vocation, built: unit.builtOn } as const;
+
+export async function selectUnits(db: Executor, filter: UnitFilter) {
+  const where = and(
+    eq(unit.organisationId, filter.organisationId),
+    filter.hidden ? isNotNull(unit.hiddenAt) : isNull(unit.hiddenAt),
+    ...[
+      filter.text && ilike(unit.fleetNumber, containing(filter.text)),
+      filter.siteId && eq(unit.siteId, filter.siteId),
+      filter.vocation && eq(unit.vocation, filter.vocation),
+      filter.vehicleKind && eq(unit.vehicleKind, filter.vehicleKind),
+    ].filter((condition): condition is SQL => Boolean(condition)),
+  );
+  const inDirection = filter.direction === 'asc' ? asc : desc;
+  const rows = await db
+    .select({
+      id: unit.id,
+      fleetNumber: unit.fleetNumber,
+      vehicleKind: unit.vehicleKind,
+      vocation: unit.vocation,
+      builtOn: unit.builtOn,
+      siteName: site.name,
+    })
+    .from(unit)
+    .innerJoin(site, atItsSite)
+    .where(where)
+    .orderBy(inDirection(SORTED_BY[filter.sort]), asc(unit.fleetNumber), asc(unit.id))
+    .limit(filter.limit)
+    .offset(filter.offset);
+  const [total] = await db.select({ count: count() }).from(unit).where(where);
+  return { rows, total: total?.count ?? 0 };
 }
 
 /** The sites that a unit can stand at. */

@@ -45,6 +45,8 @@ export const unitIdInput = z.strictObject({ unitId: rowId });
 
 export const hideUnitInput = z.strictObject({ unitId: rowId, reason });
 
+export const showUnitInput = z.strictObject({ unitId: rowId, reason: optionalLine(500) });
+
 export const addReadingInput = z.strictObject({ unitId: rowId, readOn: day('the day of the reading'), ...readings, note: optionalLine(500) });
 
 export const strikeReadingInput = z.strictObject({ unitId: rowId, readingId: rowId, reason });

@@ -1,5 +1,6 @@
+import { lockUnit } from '@/db/queries/unit';
 import { insertReading, selectReadings } from '@/db/queries/unit-reading';
-import { invalid } from '@/lib/errors';
+import { invalid, notFound } from '@/lib/errors';
 import { newId } from '@/lib/ids';
 import { formatQuantity, unitFor } from '@/lib/units';
 import type { Work } from '../define';
@@ -54,11 +55,17 @@ export async function noteReading(
   if (given.length === 0) return null;
 
   const organisationId = ctx.organisation.id;
+  if (!(await lockUnit(tx, { organisationId, unitId }))) throw notFound('unit');
   const earlier = await selectReadings(tx, { organisationId, unitId });
   const problems: Record<string, string> = {};
   for (const field of given) {
     const { quantity, column, replaced, called } = INSTRUMENTS[field];
-    const { si, asTyped } = readMeasure(ctx, { text: reading[field] ?? '', field: fields[field], quantity });
+    const read = readMeasure(ctx, reading[field] ?? '', { quantity });
+    if (!read.ok) {
+      problems[fields[field]] = read.message;
+      continue;
+    }
+    const { si, asTyped } = read;
     const series = earlier.map((row) => ({ readOn: row.readOn, value: row[column], replaced: row[replaced] }));
     const contradicted = findContradiction(series, { readOn, value: si, replaced: reading[replaced] ?? false });
     if (contradicted) {

@@ -4,7 +4,7 @@ import type { ReadingRow } from '@/db/queries/unit-reading';
 import type { UnitRow } from '@/db/queries/unit';
 import type { RecordFacts } from '@/lib/diagnose';
 import type { KnownRecordFacts } from '@/lib/diagnose/default-rulebook/record-facts';
-import { daysBetween, yearsBefore } from './days';
+import { daysBetween, yearsBefore } from '../days';
 import { runSince } from './run-since';
 
 const DAY_S = 86_400;

@@ -1,0 +1,84 @@
+import { selectCasesOfUnit } from '@/db/queries/case-of-unit';
+import { selectFitsOfUnit } from '@/db/queries/fit';
+import { selectLastRemoval } from '@/db/queries/removal';
+import { selectUnit, selectUnitSites } from '@/db/queries/unit';
+import { selectReadings } from '@/db/queries/unit-reading';
+import type { Transaction } from '@/db/connect';
+import { may, PERMITTED } from '@/lib/auth/permissions';
+import { notFound } from '@/lib/errors';
+import { nothing } from '@/lib/schemas/record';
+import { unitIdInput } from '@/lib/schemas/unit';
+import { siteDay } from '../case/site-day';
+import type { Ctx } from '../context';
+import { defineRead } from '../define';
+import { versionOf } from '../editing';
+import { compiledEdition } from '../edition/compiled';
+import { textsOf } from '../form-value';
+import { unitFormValues } from './form-values';
+import { currentFitOn } from './record-facts';
+
+/** A unit with all that happened to it: fits, readings and, for those who see cases, its cases. */
+export const readUnit = defineRead({
+  name: 'read.unit',
+  doing: 'see units',
+  roles: PERMITTED['unit.see'],
+  input: unitIdInput,
+  run: async ({ tx, ctx, input }) => {
+    const of = { organisationId: ctx.organisation.id, unitId: input.unitId };
+    const unit = await selectUnit(tx, of);
+    if (!unit) throw notFound('unit');
+    const today = siteDay(ctx.now(), unit.timeZone);
+    const fits = await selectFitsOfUnit(tx, of);
+    return {
+      unit,
+      today,
+      fits,
+      currentFit: currentFitOn(fits, today) ?? null,
+      readings: await selectReadings(tx, of),
+      cases: may(ctx.roles, 'case.see') ? await casesOf(tx, ctx, { unitId: of.unitId, timeZone: unit.timeZone }) : [],
+      hidden: unit.hiddenAt ? await selectLastRemoval(tx, { ...of, entity: 'unit', entityId: of.unitId }) : undefined,
+    };
+  },
+});
+export type UnitPage = Awaited<ReturnType<typeof readUnit>>;
+
+/** The cases with their complaints and cause in the words of their edition. */
+async function casesOf(tx: Transaction, ctx: Ctx, { unitId, timeZone }: { unitId: string; timeZone: string }) {
+  const organisationId = ctx.organisation.id;
+  const rows = await selectCasesOfUnit(tx, { organisationId, unitId });
+  return Promise.all(
+    rows.map(async ({ editionId, complaints, mainCause, openedAt, closedAt, ...row }) => {
+      const { rulebook, checks } = await compiledEdition(tx, { organisationId, editionId });
+      return {
+        ...row,
+        openedOn: siteDay(openedAt, timeZone),
+        closedOn: closedAt && siteDay(closedAt, timeZone),
+        complaints: complaints.map((id) => checks.get(id)?.check.prompt ?? id),
+        cause: mainCause && (rulebook.causes.find((cause) => cause.id === mainCause)?.name ?? mainCause),
+      };
+    }),
+  );
+}
+
+/** What the form of a unit is opened with. */
+export const readUnitForm = defineRead({
+  name: 'read.unit-form',
+  doing: 'change units',
+  roles: PERMITTED['unit.edit'],
+  input: unitIdInput,
+  run: async ({ tx, ctx, input }) => {
+    const organisationId = ctx.organisation.id;
+    const unit = await selectUnit(tx, { organisationId, unitId: input.unitId });
+    if (!unit) throw notFound('unit');
+    return { fleetNumber: unit.fleetNumber, version: versionOf(unit), values: textsOf(unitFormValues(unit, ctx.person.units)), sites: await selectUnitSites(tx, organisationId) };
+  },
+});
+
+/** What the form of a new unit is opened with. */
+export const readNewUnitForm = defineRead({
+  name: 'read.new-unit-form',
+  doing: 'add units',
+  roles: PERMITTED['unit.edit'],
+  input: nothing,
+  run: async ({ tx, ctx }) => ({ sites: await selectUnitSites(tx, ctx.organisation.id) }),
+});
