@@ -18,7 +18,7 @@ export function Instructions({ check, setUpMinutes }: { check: CheckView; setUpM
       </dl>
       {check.spoils.length > 0 && (
         <p>
-          <strong>This spoils:</strong> {check.spoils.map(({ prompt }) => prompt).join(' · ')}
+          <strong>This spoils:</strong> {check.spoils.map(({ name }) => name).join(' · ')}
         </p>
       )}
       {check.steps.length > 0 && (

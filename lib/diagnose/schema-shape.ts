@@ -101,6 +101,7 @@ const checkSchema = z.strictObject({
   unit: nameSchema.optional(),
   usualError: z.number().min(0).optional(),
   range: z.strictObject({ min: z.number(), max: z.number() }).optional(),
+  name: textSchema,
   prompt: textSchema,
   why: textSchema,
   steps: textsSchema,

@@ -116,6 +116,8 @@ export interface Check {
   usualError?: number;
   /** Measured checks only: what can be read at all, SI, inclusive; outside it the entry is refused. */
   range?: { min: number; max: number };
+  /** What it is about, as a heading over its answer: "Discharge line bore". */
+  name: string;
   /** In the second person. */
   prompt: string;
   why: string;

@@ -1,4 +1,5 @@
-import type { Basis, Check, Ranking, SetUp, Stage, StateShare, StationId } from '@/lib/diagnose/types';
+import type { StationId } from '@/lib/diagnose/stations';
+import type { Basis, Check, Ranking, SetUp, Stage, StateShare } from '@/lib/diagnose/types';
 
 /**
  * What the case page and the API show of a case. `CaseHead` and `RulebookView` stay as they are while answers come
@@ -20,15 +21,15 @@ export interface CaseHead {
 
 /** A check as the page needs it: everything but its rates. */
 export interface CheckView
-  extends Pick<Check, 'id' | 'station' | 'kind' | 'prompt' | 'why' | 'steps' | 'tools' | 'minutes' | 'setUp' | 'cautions' | 'basis' | 'source'> {
+  extends Pick<Check, 'id' | 'station' | 'kind' | 'name' | 'prompt' | 'why' | 'steps' | 'tools' | 'minutes' | 'setUp' | 'cautions' | 'basis' | 'source'> {
   answers: { id: string; label: string }[];
   /** Symbols of the units that a value and its error are in when none is typed: as the person set them. */
   unitSymbol: string | null;
   errorSymbol: string | null;
   /** Usual error of the instrument in that unit, as text for the field. */
   usualError: string | null;
-  /** Prompts of the checks that this one spoils. */
-  spoils: { id: string; prompt: string }[];
+  /** Checks that this one spoils. */
+  spoils: { id: string; name: string }[];
 }
 
 export interface RulebookView {
@@ -43,7 +44,7 @@ export type Direction = 'for' | 'against';
 /** What one finding counted for or against a cause, and what the ranking would be without it. */
 export interface ReasonView {
   findingIds: string[];
-  /** "Sealant at the gasket: heavy bead" */
+  /** "Sealant at the mounting gasket: heavy bead" */
   finding: string;
   direction: Direction;
   strength: string;

@@ -43,7 +43,7 @@ export function buildState({ compiled, head, rows, notes, run, previous, acknowl
     causes: causeViews(compiled, explanation, previous, shown),
     fit: ranking.fit,
     suspicion: ranking.suspicion,
-    because: because ? `${compiled.checks.get(because.checkId)?.check.prompt ?? ''} ${because.answer}`.trim() : null,
+    because: because ? `${compiled.checks.get(because.checkId)?.check.name ?? ''}: ${because.answer}` : null,
     findings: shown,
     ...whatNext({ compiled, findings, recordFacts: facts, vehicleState: head.vehicleState, labourRatePerHour: head.labourRatePerHour }),
     pair: pairView(compiled, findings, facts),

@@ -34,7 +34,7 @@ export const listCases = defineRead({
         return {
           ...row,
           openedAt: openedAt.toISOString(),
-          complaints: complaints.map((id) => checks.get(id)?.check.prompt ?? id),
+          complaints: complaints.map((id) => checks.get(id)?.check.name ?? id),
           leader: leader ? { name: rulebook.causes.find((cause) => cause.id === leader.causeId)?.name ?? leader.causeId, p: leader.p } : null,
         };
       }),

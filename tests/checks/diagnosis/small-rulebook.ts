@@ -56,7 +56,7 @@ export function checkOf(id: string, states: Check['states'], measured = false): 
   return {
     id, station: 'vehicle-and-history', kind: measured ? 'measured' : 'choice',
     ...(measured ? { quantity: 'ratio', unit: 'of its own', range: { min: 0, max: 1000 }, usualError: 0 } : {}),
-    prompt: 'What do you see?', why: 'A textbook asks.', steps: [], tools: [], minutes: 1, setUp: {}, spoils: [], cautions: [],
+    name: 'Sight', prompt: 'What do you see?', why: 'A textbook asks.', steps: [], tools: [], minutes: 1, setUp: {}, spoils: [], cautions: [],
     states, cannotTell: 0, basis: 'judgement',
   };
 }

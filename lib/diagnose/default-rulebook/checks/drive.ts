@@ -5,6 +5,7 @@ import { check } from './check';
 export const checks: Check[] = [
   check({
     id: 'crank-turns',
+    name: 'Compressor crank turns',
     station: 'drive',
     prompt: 'Does the compressor’s crank turn with the engine?',
     why: 'No air and a crank that stands still is a drive or a crank that has failed, whatever else is seen.',
@@ -22,6 +23,7 @@ export const checks: Check[] = [
   }),
   check({
     id: 'noise',
+    name: 'Noise at the compressor',
     station: 'drive',
     prompt: 'What do you hear at the compressor?',
     why: 'A knock is a bearing or a rod, a whine or rattle the gear, a hiss air where it shouldn’t go.',
@@ -31,16 +33,17 @@ export const checks: Check[] = [
     setUp: { engine: 'idle' },
     cautions: ['belts-fan-gears', 'hot-parts', 'vehicle-rolls'],
     states: [
-      { id: 'ordinary', label: 'Nothing unusual', background: 0.81 },
-      { id: 'knock', label: 'A knock', background: 0.047 },
-      { id: 'gear-noise', label: 'A whine or rattle at the drive', background: 0.031 },
-      { id: 'hiss', label: 'A hiss or blow of air', background: 0.112 },
+      { id: 'ordinary', label: 'Nothing unusual', background: 0.829 },
+      { id: 'knock', label: 'A knock', background: 0.043 },
+      { id: 'gear-noise', label: 'A whine or rattle at the drive', background: 0.025 },
+      { id: 'hiss', label: 'A hiss or blow of air', background: 0.103 },
     ],
     cannotTell: 0.05,
     ...commonPractice,
   }),
   check({
     id: 'drive-gear-kind',
+    name: 'Drive gear material',
     station: 'drive',
     prompt: 'What is the drive gear made of?',
     why: 'The rim of a fibre gear can let go of its hub; a steel gear chips or wears.',
@@ -56,6 +59,7 @@ export const checks: Check[] = [
   }),
   check({
     id: 'drive-gear-reused',
+    name: 'Drive gear used again',
     station: 'drive',
     prompt: 'Was the drive gear of the compressor before used again?',
     why: 'A fibre gear is never used again; a steel one only when its teeth are sound.',
@@ -71,6 +75,7 @@ export const checks: Check[] = [
   }),
   check({
     id: 'drive-gear-state',
+    name: 'Drive gear',
     station: 'drive',
     prompt: 'With the compressor off, what state is its drive gear in?',
     why: 'Chipped or worn teeth, or a rim that turns on its hub, end delivery, and the chips go into the engine.',
@@ -79,7 +84,7 @@ export const checks: Check[] = [
     minutes: 5,
     setUp: { engine: 'off', air: 'empty', access: ['compressor-off'] },
     spoils: ['flange-leak', 'drain-flow', 'noise', 'crank-turns', 'head-temperature', 'build-up-time'],
-    cautions: ['stored-air', 'belts-fan-gears', 'hot-parts', 'heavy-part'],
+    cautions: ['stored-air', 'belts-fan-gears', 'hot-parts', 'heavy-part', 'vehicle-rolls', 'pressure-falls-suspension-brakes', 'scalding-coolant'],
     states: [
       { id: 'sound', label: 'Sound', background: 0.929 },
       { id: 'worn-or-chipped', label: 'Teeth worn or chipped', background: 0.058 },
@@ -90,6 +95,7 @@ export const checks: Check[] = [
   }),
   check({
     id: 'bearing-state',
+    name: 'Crank, rod and bearings',
     station: 'drive',
     prompt: 'With the compressor off, what state are crank, rod and bearings in?',
     why: 'Dry or wiped bearings say that oil was starved; a broken or seized crank ends delivery.',
@@ -98,7 +104,7 @@ export const checks: Check[] = [
     minutes: 25,
     setUp: { engine: 'off', air: 'empty', access: ['compressor-off'] },
     spoils: ['flange-leak', 'drain-flow', 'noise', 'crank-turns', 'oil-pressure-at-feed', 'crankcase-flooded'],
-    cautions: ['stored-air', 'belts-fan-gears', 'hot-parts', 'heavy-part'],
+    cautions: ['stored-air', 'belts-fan-gears', 'hot-parts', 'heavy-part', 'vehicle-rolls', 'pressure-falls-suspension-brakes', 'scalding-coolant'],
     states: [
       { id: 'sound', label: 'Sound', background: 0.894 },
       { id: 'wiped', label: 'Dry, blue or wiped', background: 0.083 },

@@ -10,6 +10,7 @@ const READ_THE_LAST_FIT = ['Read the work order of the last fit.', 'Look: a chan
 const complaints: Check[] = [
   check({
     id: 'complaint-oil',
+    name: 'Oil in the air system',
     station: 'vehicle-and-history',
     prompt: 'Were you told of oil in the air system?',
     why: 'Some causes send oil down the line, others only lose air or make heat.',
@@ -21,17 +22,19 @@ const complaints: Check[] = [
   }),
   check({
     id: 'complaint-slow-air',
+    name: 'Air builds up slowly',
     station: 'vehicle-and-history',
     prompt: 'Were you told that air builds up slowly?',
     why: 'Slow air points to the cylinder, the intake or a restriction, not to the way the oil drains.',
     steps: ASK_FOR_COMPLAINT,
     minutes: 0.5,
-    states: yesNo(0.265),
+    states: yesNo(0.259),
     cannotTell: 0.05,
     ...judgement,
   }),
   check({
     id: 'complaint-no-air',
+    name: 'No air at all',
     station: 'vehicle-and-history',
     prompt: 'Were you told that it builds no air at all?',
     why: 'Few causes stop delivery altogether: drive, crank, unloader or a closed line.',
@@ -43,6 +46,7 @@ const complaints: Check[] = [
   }),
   check({
     id: 'complaint-cycling',
+    name: 'Pumps all the time, or cuts in and out too often',
     station: 'vehicle-and-history',
     prompt: 'Were you told that it pumps all the time, or cuts in and out too often?',
     why: 'Leaks, demand, governor and unloader show as a compressor that never rests.',
@@ -54,6 +58,7 @@ const complaints: Check[] = [
   }),
   check({
     id: 'complaint-noise',
+    name: 'Knock or other noise',
     station: 'vehicle-and-history',
     prompt: 'Were you told of a knock or another noise?',
     why: 'Starved bearings and failing gears are heard before they are seen.',
@@ -65,6 +70,7 @@ const complaints: Check[] = [
   }),
   check({
     id: 'complaint-heat',
+    name: 'Heat, burnt smell or safety valve lifted',
     station: 'vehicle-and-history',
     prompt: 'Were you told of heat, a burnt smell or a safety valve that lifted?',
     why: 'Heat and head pressure mean that the air can’t leave, or that the head isn’t cooled.',
@@ -76,6 +82,7 @@ const complaints: Check[] = [
   }),
   check({
     id: 'complaint-engine-oil-use',
+    name: 'Engine uses oil',
     station: 'vehicle-and-history',
     prompt: 'Were you told that the engine uses oil?',
     why: 'A compressor that floods, or blow-by, takes oil from the sump that somebody has to top up.',
@@ -90,22 +97,24 @@ const complaints: Check[] = [
 const course: Check[] = [
   check({
     id: 'onset',
+    name: 'When it began',
     station: 'vehicle-and-history',
     prompt: 'When did the trouble begin?',
     why: 'Sealant and unseated rings show at once after a fit, an overfull sump after a service, wear over months.',
     steps: ['Ask the driver.', 'Compare the date of the complaint with the dates of the last fit and the last service.'],
     minutes: 1,
     states: [
-      { id: 'after-fitting', label: 'At once after this compressor was fitted', background: 0.18 },
-      { id: 'after-engine-work', label: 'At once after a service or other work on the engine', background: 0.067 },
-      { id: 'suddenly', label: 'Suddenly, with no work before it', background: 0.216 },
-      { id: 'gradually', label: 'Gradually, over weeks or months', background: 0.537 },
+      { id: 'after-fitting', label: 'At once after this compressor was fitted', background: 0.185 },
+      { id: 'after-engine-work', label: 'At once after a service or other work on the engine', background: 0.07 },
+      { id: 'suddenly', label: 'Suddenly, with no work before it', background: 0.228 },
+      { id: 'gradually', label: 'Gradually, over weeks or months', background: 0.517 },
     ],
     cannotTell: 0.2,
     ...judgement,
   }),
   check({
     id: 'oil-pattern',
+    name: 'When the oil comes',
     station: 'vehicle-and-history',
     prompt: 'When does the oil come?',
     why: 'A hose that closes under load passes oil after hard pulls only; a flooded crankcase passes it always.',
@@ -122,6 +131,7 @@ const course: Check[] = [
   }),
   check({
     id: 'duty',
+    name: 'Duty of the vehicle',
     station: 'vehicle-and-history',
     prompt: 'What work does the vehicle do?',
     why: 'Stop-start work and unloading by air ask for several times the air that long haul does.',
@@ -139,6 +149,7 @@ const course: Check[] = [
   }),
   check({
     id: 'outside-temperature',
+    name: 'Outside temperature',
     station: 'vehicle-and-history',
     kind: 'measured',
     quantity: 'temperature',
@@ -162,6 +173,7 @@ const course: Check[] = [
 const theFit: Check[] = [
   check({
     id: 'miles-since-fit',
+    name: 'Distance since the fit',
     station: 'vehicle-and-history',
     kind: 'measured',
     quantity: 'distance',
@@ -186,6 +198,7 @@ const theFit: Check[] = [
   }),
   check({
     id: 'hours-since-fit',
+    name: 'Engine hours since the fit',
     station: 'vehicle-and-history',
     kind: 'measured',
     quantity: 'duration',
@@ -210,6 +223,7 @@ const theFit: Check[] = [
   }),
   check({
     id: 'new-or-rebuilt',
+    name: 'New or rebuilt',
     station: 'vehicle-and-history',
     prompt: 'Was this compressor new or rebuilt when it was fitted?',
     why: 'Rings, valves and bearings of a rebuilt one are only as good as the rebuild.',
@@ -225,6 +239,7 @@ const theFit: Check[] = [
   }),
   check({
     id: 'break-in-run',
+    name: 'Break-in run',
     station: 'vehicle-and-history',
     prompt: 'Was it run in under load when it was fitted?',
     why: 'Rings seat in the first half hour of steady load; without it they may never seal.',
@@ -240,6 +255,7 @@ const theFit: Check[] = [
   }),
   check({
     id: 'previous-fits',
+    name: 'Compressors before this one',
     station: 'vehicle-and-history',
     kind: 'measured',
     quantity: 'count',
@@ -261,6 +277,7 @@ const theFit: Check[] = [
   }),
   check({
     id: 'previous-fit-came-out',
+    name: 'Why the one before came out',
     station: 'vehicle-and-history',
     prompt: 'Why did the compressor before this one come out?',
     why: 'If nothing was wrong with the last one, whatever made it pass oil is still on the vehicle.',
@@ -281,6 +298,7 @@ const theFit: Check[] = [
 const changedWithIt: Check[] = [
   check({
     id: 'discharge-line-changed',
+    name: 'Discharge line changed',
     station: 'vehicle-and-history',
     prompt: 'Was the discharge line changed with this compressor?',
     why: 'The old line keeps its carbon, and cooks the new compressor as it cooked the last.',
@@ -293,6 +311,7 @@ const changedWithIt: Check[] = [
   }),
   check({
     id: 'governor-changed',
+    name: 'Governor changed',
     station: 'vehicle-and-history',
     prompt: 'Was the governor changed with this compressor?',
     why: 'Change it with every compressor: oil and carbon have been in the old one.',
@@ -305,6 +324,7 @@ const changedWithIt: Check[] = [
   }),
   check({
     id: 'feed-line-changed',
+    name: 'Oil feed line changed',
     station: 'vehicle-and-history',
     prompt: 'Was the oil feed line changed with this compressor?',
     why: 'A sludged or kinked feed line starves the new bearings too: change or inspect it with every compressor.',
@@ -317,6 +337,7 @@ const changedWithIt: Check[] = [
   }),
   check({
     id: 'intake-hose-changed',
+    name: 'Intake hose changed',
     station: 'vehicle-and-history',
     prompt: 'Was the intake hose changed with this compressor?',
     why: 'A hose that has soaked in oil for years goes soft and closes.',
@@ -329,6 +350,7 @@ const changedWithIt: Check[] = [
   }),
   check({
     id: 'dryer-cartridge-changed',
+    name: 'Dryer cartridge changed',
     station: 'vehicle-and-history',
     prompt: 'Was the dryer cartridge changed with this compressor?',
     why: 'An old cartridge still gives off the oil of the compressor before.',
@@ -341,6 +363,7 @@ const changedWithIt: Check[] = [
   }),
   check({
     id: 'system-cleaned',
+    name: 'System cleaned of old oil',
     station: 'vehicle-and-history',
     prompt: 'Was old oil cleaned out of line, dryer and tanks at that fit?',
     why: 'Oil that was left behind goes on appearing for weeks after its cause is gone.',
@@ -357,6 +380,7 @@ const changedWithIt: Check[] = [
 const workBefore: Check[] = [
   check({
     id: 'work-oil-service',
+    name: 'Oil service shortly before',
     station: 'vehicle-and-history',
     prompt: 'Was the engine oil changed or topped up in the days before?',
     why: 'An overfilled sump drowns the drain from the first run.',
@@ -368,6 +392,7 @@ const workBefore: Check[] = [
   }),
   check({
     id: 'work-turbo-breather-intake',
+    name: 'Turbocharger, breather or intake work before',
     station: 'vehicle-and-history',
     prompt: 'Was there work on turbocharger, breather or intake in the days before?',
     why: 'A seal, a breather led elsewhere or a clamp left loose lets oil or dirt in.',
@@ -379,6 +404,7 @@ const workBefore: Check[] = [
   }),
   check({
     id: 'work-cooling',
+    name: 'Cooling work before',
     station: 'vehicle-and-history',
     prompt: 'Was there work on the cooling system in the days before?',
     why: 'Air left in the coolant, or a hose connected wrongly, starves the head.',

@@ -33,7 +33,7 @@ function reasonView(
     {
       findingIds: reason.findingIds,
       finding: reason.findingIds
-        .map((id, index) => `${compiled.checks.get(reason.checkIds[index] ?? '')?.check.prompt ?? ''} ${answers.get(id)?.answer ?? ''}`.trim())
+        .map((id, index) => `${compiled.checks.get(reason.checkIds[index] ?? '')?.check.name ?? ''}: ${answers.get(id)?.answer ?? ''}`)
         .join(' and '),
       direction: reason.strength.direction,
       strength: reason.strength.word,

@@ -65,8 +65,8 @@ function nextView(compiled: CompiledRulebook, chosen: NextChecks): NextView {
 
 function becauseOf(compiled: CompiledRulebook, { why, checkIds }: Suggestion): string | null {
   if (why.kind === 'chosen') return checkIds.length > 1 ? 'These two tell more together than one by one.' : null;
-  const prompts = why.checkIds.map((id) => `“${compiled.checks.get(id)?.check.prompt ?? id}”`);
-  return `Waits: it would spoil ${prompts.join(' and ')}.`;
+  const names = why.checkIds.map((id) => `“${compiled.checks.get(id)?.check.name ?? id}”`);
+  return `Waits: it would spoil ${names.join(' and ')}.`;
 }
 
 function repairViews(compiled: CompiledRulebook, { repair }: NextChecks): RepairView[] {

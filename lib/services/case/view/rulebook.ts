@@ -6,26 +6,26 @@ import { measureOf } from './measure';
 
 /** An edition as the case page needs it: what is asked and said, without the rules; measures in the person's units. */
 export function rulebookView({ rulebook }: CompiledRulebook, units: UnitPreferences): RulebookView {
-  const prompts = new Map(rulebook.checks.map((check) => [check.id, check.prompt]));
+  const names = new Map(rulebook.checks.map((check) => [check.id, check.name]));
   return {
-    checks: Object.fromEntries(rulebook.checks.map((check) => [check.id, checkView(check, prompts, units)])),
+    checks: Object.fromEntries(rulebook.checks.map((check) => [check.id, checkView(check, names, units)])),
     panels: rulebook.panels,
     causes: Object.fromEntries(rulebook.causes.map(({ id, name, sentence, station }) => [id, { name, sentence, station }])),
     cautions: Object.fromEntries(rulebook.cautions.map(({ id, text, worseWhen }) => [id, { text, worseWhen }])),
   };
 }
 
-function checkView(check: Check, prompts: ReadonlyMap<string, string>, units: UnitPreferences): CheckView {
-  const { id, station, kind, prompt, why, steps, tools, minutes, setUp, cautions, basis, source, usualError } = check;
+function checkView(check: Check, names: ReadonlyMap<string, string>, units: UnitPreferences): CheckView {
+  const { id, station, kind, name, prompt, why, steps, tools, minutes, setUp, cautions, basis, source, usualError } = check;
   const measure = measureOf(check, units);
   return {
-    id, station, kind, prompt, why, steps, tools, minutes, setUp, cautions, basis, source,
+    id, station, kind, name, prompt, why, steps, tools, minutes, setUp, cautions, basis, source,
     answers: check.states.map((state) => ({ id: state.id, label: state.label })),
     unitSymbol: measure ? unitDefinition(measure.quantity, measure.unit).symbol : null,
     errorSymbol: measure ? unitDefinition(measure.difference, measure.differenceUnit).symbol : null,
     usualError: measure && usualError !== undefined
       ? formatValue(usualError, { quantity: measure.difference, unit: measure.differenceUnit })
       : null,
-    spoils: check.spoils.map((spoiled) => ({ id: spoiled, prompt: prompts.get(spoiled) ?? spoiled })),
+    spoils: check.spoils.map((spoiled) => ({ id: spoiled, name: names.get(spoiled) ?? spoiled })),
   };
 }
