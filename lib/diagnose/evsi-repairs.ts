@@ -1,41 +1,30 @@
-/** The pool of repair plans over which every V of one case is taken. */
+/** The repair plans over which what an answer saves is reckoned. */
+import { costOf, expectedSaving, type PlanCosts } from './evsi';
 import type { Forecast } from './information';
 import { planCosts, type RepairProblem } from './repair-order-costs';
 import { findOrder } from './repair-order-search';
 
-/** Total variation of p under which an answer is taken not to change the plan. */
-const HARDLY_MOVES = 0.05;
 /** At the answers the search tries all sets only up to this many actions: there are hundreds of answers. */
 const TRY_ALL_AT_ANSWERS_UP_TO = 6;
 
-function moved(p: ArrayLike<number>, posterior: ArrayLike<number>): number {
-  let distance = 0;
-  for (let c = 0; c < p.length; c += 1) distance += Math.abs(p[c]! - posterior[c]!);
-  return distance / 2;
-}
-
 /**
- * Plans worth comparing: nothing at all, the best at p, and what the search finds after every answer that moves p by
- * 0.05 or more (total variation). Equal plans are kept once. Whatever is missing makes `expectedSaving` smaller,
- * never negative.
+ * What each of many questions would save. A plan is searched at p, and after every answer. The plans compared everywhere are: do nothing, the one found at p, and of all that were found
+ * after answers the one that is best at p, in case the search at p missed it.
  *
  * @param problem remedies as money
  * @param p causes' probabilities now
- * @param forecasts what could be asked, all with the same p
- * @returns cost of each plan by cause
- * @example expectedSaving(p, asked, repairPlans(problem, p, [asked]));
+ * @param asked what could be asked, all with the same p
+ * @returns EVSI of each, in the order given; money, 0 or more
+ * @example expectedSavings(problem, p, [asked])[0];
  */
-export function repairPlans(problem: RepairProblem, p: ArrayLike<number>, forecasts: readonly Forecast[]): Float64Array[] {
-  const orders = new Map<string, readonly number[]>();
-  const keep = (order: readonly number[]): void => void orders.set(order.join(), order);
-  keep([]);
-  keep(findOrder(problem, p).order);
-  for (const { chances, posteriors } of forecasts) {
-    posteriors.forEach((posterior, v) => {
-      if (chances[v]! > 0 && moved(p, posterior) >= HARDLY_MOVES) {
-        keep(findOrder(problem, posterior, TRY_ALL_AT_ANSWERS_UP_TO).order);
-      }
-    });
-  }
-  return [...orders.values()].map((order) => planCosts(problem, order));
+export function expectedSavings(problem: RepairProblem, p: ArrayLike<number>, asked: readonly Forecast[]): number[] {
+  const after = asked.map(({ chances, posteriors }) => posteriors.map((posterior, v): PlanCosts | undefined =>
+    chances[v]! > 0
+      ? planCosts(problem, findOrder(problem, posterior, TRY_ALL_AT_ANSWERS_UP_TO).order)
+      : undefined));
+  const here = planCosts(problem, findOrder(problem, p).order);
+  let best: PlanCosts = here;
+  for (const plan of after.flat()) if (plan && costOf(plan, p) < costOf(best, p)) best = plan;
+  const everywhere = [planCosts(problem, []), here, best];
+  return asked.map((forecast, i) => expectedSaving(p, forecast, everywhere, after[i]));
 }

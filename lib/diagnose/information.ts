@@ -103,12 +103,12 @@ export type Settles = 'settles most' | 'settles some' | 'settles little';
 
 /** Shares of what is left to know at which the word changes; and the bits under which nothing much is left. */
 export const SETTLES_MOST = 0.5;
-export const SETTLES_SOME = 0.1;
+export const SETTLES_SOME = 0.05;
 export const NOTHING_MUCH_LEFT_BITS = 0.5;
 
 /**
  * The word for an expected gain, measured against what is left to know: 0.5 bit settles little of a case that is wide
- * open at 4.5 bits and most of one that stands between two causes. Half or more of what is left is "most", a tenth
+ * open at 4.5 bits and most of one that stands between two causes. Half or more of what is left is "most", a twentieth
  * or more is "some". What is left counts as half a bit at least, so that a case as good as settled (one cause at
  * 0.9) doesn't call its last crumbs "most". The thresholds are judgement.
  *

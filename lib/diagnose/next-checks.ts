@@ -1,7 +1,6 @@
 /** Which check tells most for the time it takes, and when enough is known to repair. */
 import type { CompiledRulebook } from './compiled';
-import { expectedSaving } from './evsi';
-import { repairPlans } from './evsi-repairs';
+import { expectedSavings } from './evsi-repairs';
 import { entropyBits, settles, type Forecast, type Settles } from './information';
 import { openPairs, type OpenChecks } from './next-checks-open';
 import { placeCandidates, type Candidate } from './next-checks-order';
@@ -88,14 +87,13 @@ export function nextChecks(open: OpenChecks, { vehicle = AS_PARKED, money = {} }
   const rate = money.labourRatePerHour ?? compiled.settings.labourRatePerHour;
   const candidates = [...singles(open, vehicle), ...betterPairs(open, vehicle)];
   const problem = repairProblemOf(compiled, money);
-  // Pairs have many answers, most of them like one of a single check: they are priced by the plans of those.
-  const plans = repairPlans(problem, posterior, [...open.checks.values()].map(({ forecast }) => forecast));
+  const savings = expectedSavings(problem, posterior, candidates.map(({ forecast }) => forecast));
   const entropyLeft = entropyBits(posterior);
 
-  const judged = candidates.map((candidate) => ({
+  const judged = candidates.map((candidate, i) => ({
     ...candidate,
     word: settles(candidate.forecast.bits, entropyLeft),
-    saving: (1 - candidate.cannotTell) * expectedSaving(posterior, candidate.forecast, plans),
+    saving: (1 - candidate.cannotTell) * (savings[i] ?? 0),
     cost: labourCost(Math.max(LEAST_MINUTES, candidate.minutes), rate),
   }));
   const valuable = judged.filter(({ word, saving, cost }) => word !== 'settles little' || saving > cost);
