@@ -1,4 +1,5 @@
 import { connect } from '@/db/connect';
+import { defaultRulebook } from '@/lib/diagnose/default-rulebook';
 import { whyNotSeed } from './local-only';
 import { seedMinimal } from './minimal';
 
@@ -9,14 +10,11 @@ if (!url || refusal) {
   process.exit(1);
 }
 
-// The default rulebook is being written: until it is whole, the demo has none.
-const rulebook = await import('@/lib/diagnose/default-rulebook').then(({ defaultRulebook }) => defaultRulebook, () => undefined);
-
 const { db, close } = connect(url, { max: 1 });
 try {
   // All of it or nothing: a killed seeding leaves the database empty, and the next start seeds it.
   await db.transaction(async (tx) => {
-    await seedMinimal(tx, rulebook);
+    await seedMinimal(tx, defaultRulebook);
   });
 } finally {
   await close();

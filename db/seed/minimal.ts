@@ -22,7 +22,7 @@ export interface SeededOrganisation {
  * One organisation with one site, somebody of each role who can sign in, and the rulebook as its edition 1.
  * Runs as the owner; what comes after it in the same transaction sees this organisation's rows.
  */
-export async function seedMinimal(tx: Transaction, rulebook: Rulebook | undefined): Promise<SeededOrganisation> {
+export async function seedMinimal(tx: Transaction, rulebook: Rulebook): Promise<SeededOrganisation> {
   const organisationId = seededId('organisation');
   const siteId = seededId('site: Quillmere yard');
   const editionId = seededId('edition 1');
@@ -54,10 +54,8 @@ export async function seedMinimal(tx: Transaction, rulebook: Rulebook | undefine
     });
   }
 
-  if (rulebook) {
-    const upstreamNumber = await publishUpstream(tx, rulebook);
-    await publishFirstEdition(tx, { organisationId, id: editionId, rulebook, upstreamNumber, at: BEGAN });
-  }
+  const upstreamNumber = await publishUpstream(tx, rulebook);
+  await publishFirstEdition(tx, { organisationId, id: editionId, rulebook, upstreamNumber, at: BEGAN });
 
   const personOf = (role: Role) => seededId(`person: ${role}`);
   return {

@@ -25,6 +25,11 @@ export async function jsonBody(request: Request): Promise<unknown> {
   if (!/^application\/([a-z.]+\+)?json\b/i.test(request.headers.get('content-type') ?? '')) {
     throw invalid({}, 'Send the body as JSON, with the content type application/json.');
   }
+  return parsedJson(text);
+}
+
+/** @throws MalformedBody */
+export function parsedJson(text: string): unknown {
   try {
     return JSON.parse(text);
   } catch (error) {

@@ -1,7 +1,10 @@
 import { AppError, type FieldErrors } from '@/lib/errors';
 
+/** The text fields of a form; a name that occurs more than once has a list. */
+export type FormFields = Record<string, string | string[]>;
+
 /** What was typed, to be put back into the form: React empties it once an action has run. */
-export type FormValues = Record<string, string | string[]>;
+export type FormValues = FormFields;
 
 /** State of a form that an action answers; null before the first time. */
 export type ActionState<Result = void> =
@@ -16,14 +19,14 @@ const MOST_CHARACTERS = 256 * 1024;
 const isSecret = (name: string) => /password|current|token/i.test(name);
 
 /**
- * The text fields of a form by name; a name that occurs more than once gives a list. Files and React's own fields are
+ * Reads the text fields of a form. Files and React's own fields are
  * left out.
  *
  * @throws AppError "invalid" when it is no form, "too-large" when it is too long
  */
-export function formObject(form: unknown): Record<string, string | string[]> {
+export function formObject(form: unknown): FormFields {
   if (!(form instanceof FormData)) throw new AppError('invalid', 'This is not what the form sends. Load the page again.');
-  const object: Record<string, string | string[]> = Object.create(null);
+  const object: FormFields = Object.create(null);
   let length = 0;
   for (const [name, value] of form) {
     if (typeof value !== 'string' || name.startsWith('$ACTION')) continue;
@@ -35,5 +38,5 @@ export function formObject(form: unknown): Record<string, string | string[]> {
   return object;
 }
 
-export const valuesOf = (object: Record<string, string | string[]>): FormValues =>
+export const valuesOf = (object: FormFields): FormValues =>
   Object.fromEntries(Object.entries(object).filter(([name]) => !isSecret(name)));

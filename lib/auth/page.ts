@@ -26,3 +26,13 @@ export async function orNotFound<T>(work: Promise<T>): Promise<T> {
     throw error;
   }
 }
+
+/** For the page of a mailed link: what it opens, or the sentence that says why it leads nowhere. */
+export async function unlessDead<T>(work: Promise<T>): Promise<{ ok: true; result: T } | { ok: false; message: string }> {
+  try {
+    return { ok: true, result: await work };
+  } catch (error) {
+    if (!(error instanceof AppError)) throw error;
+    return { ok: false, message: error.fields.token ?? error.message };
+  }
+}

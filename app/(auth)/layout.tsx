@@ -1,0 +1,2 @@
+/** The pages before signing in look like the other public ones. */
+export { default } from '../(public)/layout';

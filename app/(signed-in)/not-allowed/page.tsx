@@ -1,0 +1,21 @@
+import type { Metadata } from 'next';
+import { ButtonLink } from '@/components/ui/Button';
+import { EmptyState } from '@/components/ui/EmptyState';
+import { PageHeader } from '@/components/ui/PageHeader';
+import { homeFor } from '@/lib/auth/navigation';
+import { pageContext } from '@/lib/auth/page';
+
+export const metadata: Metadata = { title: 'Not for your role' };
+
+/** Where a page sends somebody whose role it is not for. */
+export default async function NotAllowedPage() {
+  const { roles } = await pageContext();
+  return (
+    <>
+      <PageHeader title="Not for your role" />
+      <EmptyState title="This page is for another role" action={<ButtonLink href={homeFor(roles)}>To your pages</ButtonLink>}>
+        You are signed in as {new Intl.ListFormat('en').format(roles)}. An administrator of your organisation can give you more.
+      </EmptyState>
+    </>
+  );
+}
