@@ -31,6 +31,8 @@ export const modelIdInput = z.strictObject({ modelId: rowId });
 
 export const hideModelInput = z.strictObject({ modelId: rowId, reason });
 
+export const showModelInput = z.strictObject({ modelId: rowId, reason: optionalLine(500) });
+
 export const MODEL_SORTS = ['name', 'displacement', 'on-units'] as const;
 
 export const listModelsInput = z.object({

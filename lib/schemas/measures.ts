@@ -28,6 +28,11 @@ export const MODEL_MEASURES = [
   { field: 'lineSize', column: 'lineSizeM', quantity: 'length', like: 'in' },
 ] as const satisfies readonly MeasureField[];
 
+export const READING_MEASURES = [
+  { field: 'odometer', column: 'odometerM', quantity: 'distance' },
+  { field: 'engineHours', column: 'engineS', quantity: 'engineHours' },
+] as const satisfies readonly MeasureField[];
+
 /** Readings at the day on which a compressor went on, and came off. */
 export const INSTALLED_MEASURES = [
   { field: 'installedOdometer', column: 'installedOdometerM', quantity: 'distance' },
