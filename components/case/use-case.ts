@@ -18,25 +18,31 @@ export interface AnswerGiven {
   askedBecause: 'suggested' | 'choice' | 'panel';
 }
 
-/** The state of a case as the server last told it, and what can be done to it. */
-export function useCase({ state, now }: CaseView) {
-  const { caseId } = state;
+/** The state of a case as the server last told it; every part of the page that asks shares one copy. */
+export function useCaseState(initial: CaseState): CaseState {
+  const { data } = useQuery({
+    queryKey: [...queryKeys.caseState(initial.caseId), initial.at],
+    queryFn: () => api<CaseState>(`/api/v1/cases/${initial.caseId}`),
+    initialData: initial,
+    enabled: initial.at === null,
+    // The server's older copy must never replace what an answer has just brought.
+    structuralSharing: (held, fresh) => ((held as CaseState | undefined)?.version ?? 0) > (fresh as CaseState).version ? held : fresh,
+  });
+  return data;
+}
+
+/** The same, with what can be done to it. */
+export function useCase({ state: initial, now }: CaseView) {
+  const { caseId } = initial;
+  const state = useCaseState(initial);
   const client = useQueryClient();
-  const key = queryKeys.caseState(caseId);
+  const key = [...queryKeys.caseState(caseId), initial.at];
   const path = `/api/v1/cases/${caseId}`;
   const [clockOffsetMs] = useState(() => {
     const offset = Date.parse(now) - Date.now();
     return Math.abs(offset) < CLOCK_TOLERANCE_MS ? 0 : offset;
   });
 
-  const query = useQuery({
-    queryKey: key,
-    queryFn: () => api<CaseState>(path),
-    initialData: state,
-    enabled: state.at === null,
-    // The server's older copy must never replace what an answer has just brought.
-    structuralSharing: (held, fresh) => ((held as CaseState | undefined)?.version ?? 0) > (fresh as CaseState).version ? held : fresh,
-  });
   const keep = (fresh: CaseState) => client.setQueryData<CaseState>(key, fresh);
 
   const answer = useMutation({
@@ -70,7 +76,7 @@ export function useCase({ state, now }: CaseView) {
       }),
   });
 
-  return { state: query.data, answer, acknowledge, note };
+  return { state, answer, acknowledge, note };
 }
 
 export type CaseHandle = ReturnType<typeof useCase>;

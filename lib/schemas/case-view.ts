@@ -174,6 +174,7 @@ export interface CaseView {
   head: CaseHead;
   rulebook: RulebookView;
   state: CaseState;
+  assignedTo: string | null;
   calls: CallView[];
   events: CaseEventView[];
   /** Instants at which something happened, oldest first: where the past can be shown. */

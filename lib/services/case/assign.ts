@@ -1,6 +1,7 @@
 import { insertCaseEvent, lockCase, updateCase } from '@/db/queries/case';
 import { findMember } from '@/db/queries/membership';
 import { PERMITTED } from '@/lib/auth/permissions';
+import { hasAnyRole, isRole } from '@/lib/auth/roles';
 import { invalid, notFound } from '@/lib/errors';
 import { newId } from '@/lib/ids';
 import { assignCaseInput } from '@/lib/schemas/case';
@@ -15,8 +16,10 @@ export const assignCase = defineWrite({
   run: async ({ tx, ctx, input, audit }) => {
     const of = { organisationId: ctx.organisation.id, caseId: input.caseId };
     if (!(await lockCase(tx, of))) throw notFound('case');
-    if (input.personId && !(await findMember(tx, { ...of, personId: input.personId }))) {
-      throw invalid({ personId: 'Choose somebody of your organisation.' });
+    if (input.personId) {
+      const member = await findMember(tx, { ...of, personId: input.personId });
+      const canWork = member && !member.endedAt && hasAnyRole(member.roles.filter(isRole), PERMITTED['case.work']);
+      if (!canWork) throw invalid({ personId: 'Choose somebody of your organisation who works on cases.' });
     }
     const at = ctx.now();
     await updateCase(tx, of, { assignedTo: input.personId });

@@ -40,6 +40,7 @@ export const readCase = defineRead({
       head: headView(caseHead, ctx.person.units),
       rulebook,
       state: at ? { ...state, status: statusAt(events) } : state,
+      assignedTo: caseHead.assignedTo,
       calls: callViews(calls, events),
       events: events.map(({ at: when, ...event }) => ({ ...event, at: when.toISOString() })),
       moments: momentsOf(rulebook, everything, allEvents),

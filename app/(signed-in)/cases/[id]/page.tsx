@@ -1,0 +1,87 @@
+import type { Metadata } from 'next';
+import Link from 'next/link';
+import { AssignForm } from '@/components/case/AssignForm';
+import { CallForm } from '@/components/case/CallForm';
+import { Calls } from '@/components/case/Calls';
+import { CaseDesk } from '@/components/case/CaseDesk';
+import { Moments } from '@/components/case/Moments';
+import { ReopenForm } from '@/components/case/ReopenForm';
+import { timeText } from '@/components/case/words';
+import { Notice } from '@/components/ui/Notice';
+import { PageHeader } from '@/components/ui/PageHeader';
+import { Tag } from '@/components/ui/Tag';
+import { orNotFound, pageContext } from '@/lib/auth/page';
+import { may, PERMITTED } from '@/lib/auth/permissions';
+import { newId } from '@/lib/ids';
+import { QueryProvider } from '@/lib/query/provider';
+import type { CaseView } from '@/lib/schemas/case-view';
+import { listAssignable } from '@/lib/services/case/assignable';
+import { readCase } from '@/lib/services/case/read';
+import { assignFromForm, callFromForm, reopenFromForm } from './actions';
+
+export const metadata: Metadata = { title: 'Case' };
+
+interface Props {
+  params: Promise<{ id: string }>;
+  searchParams: Promise<Record<string, string | string[] | undefined>>;
+}
+
+const STATUS = { open: 'Open', called: 'Called', closed: 'Closed' } as const;
+
+export default async function CasePage({ params, searchParams }: Props) {
+  const { id } = await params;
+  const { at } = await searchParams;
+  const ctx = await pageContext(PERMITTED['case.see']);
+  const view = await orNotFound(readCase({ ctx, input: { caseId: id, at: typeof at === 'string' ? at : undefined } }));
+  const people = await listAssignable({ ctx, input: {} });
+  const { head, state, rulebook } = view;
+  const works = may(ctx.roles, 'case.work') && state.at === null;
+
+  return (
+    <QueryProvider>
+      <PageHeader
+        title={`Case ${head.number}: ${head.unit.fleetNumber}`}
+        breadcrumbs={[{ label: 'Cases', href: '/cases' }]}
+        tags={<Tag>{STATUS[state.status]}</Tag>}
+        lead={<Lead view={view} />}
+      />
+      {state.at && (
+        <div className="mb-6">
+          <Notice title={`As it was on ${timeText(state.at, head.timeZone)}`}>
+            Nothing can be answered here. <Link className="underline" href={`/cases/${head.id}`}>Go back to now.</Link>
+          </Notice>
+        </div>
+      )}
+      <CaseDesk key={`${state.at}/${state.status}`} view={view} />
+      <section aria-labelledby="call" className="mt-12 grid gap-4 border-t-2 border-ink pt-6">
+        <h2 id="call">The call</h2>
+        {view.calls.length > 0 && <Calls calls={view.calls} rulebook={rulebook} timeZone={head.timeZone} />}
+        {works && state.status === 'open' && <CallForm action={callFromForm} callId={newId()} initial={state} rulebook={rulebook} />}
+        {works && state.status !== 'open' && <ReopenForm action={reopenFromForm} eventId={newId()} caseId={head.id} />}
+        {!works && view.calls.length === 0 && <p>Not called.</p>}
+      </section>
+      <section aria-labelledby="history" className="mt-12 grid gap-4 border-t-2 border-ink pt-6">
+        <h2 id="history">History</h2>
+        <Moments key={state.version} view={view} timeZone={head.timeZone} />
+        {works && <AssignForm action={assignFromForm} caseId={head.id} people={people} assignedTo={view.assignedTo} />}
+        <ul className="grid gap-1 text-ink-soft">
+          {view.events.map((event) => (
+            <li key={event.id}>{timeText(event.at, head.timeZone)}: {event.kind} by {event.person}{event.reason ? `, “${event.reason}”` : ''}</li>
+          ))}
+        </ul>
+      </section>
+    </QueryProvider>
+  );
+}
+
+function Lead({ view: { head } }: { view: CaseView }) {
+  return (
+    <>
+      <Link className="underline underline-offset-4" href={`/units/${head.unit.id}`}>{head.unit.fleetNumber}</Link>, {head.siteName}.{' '}
+      {head.fit ? <>{head.fit.modelName}, fitted {head.fit.installedOn}. </> : <>No fit on record. </>}
+      {head.odometer && <span className="figure">{head.odometer}. </span>}
+      Opened by {head.openedBy}, {timeText(head.openedAt, head.timeZone)}. Rulebook edition <span className="figure">{head.editionNumber}</span>.
+      {head.complaintWords && <> “{head.complaintWords}”</>}
+    </>
+  );
+}

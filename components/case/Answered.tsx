@@ -1,0 +1,120 @@
+'use client';
+
+import { useState } from 'react';
+import { Button } from '@/components/ui/Button';
+import { TextareaField } from '@/components/ui/TextareaField';
+import type { FindingView, RulebookView } from '@/lib/schemas/case-view';
+import type { Picked } from './at-hand';
+import type { CaseHandle } from './use-case';
+import { timeText } from './words';
+
+interface Props {
+  handle: CaseHandle;
+  rulebook: RulebookView;
+  timeZone: string;
+  /** The case takes no answers: it was called, or the past is shown. */
+  readOnly: boolean;
+  onPick: (picked: Picked) => void;
+}
+
+const SOURCES: Record<string, string> = { record: 'from the record', sum: 'from a sum', remedy: 'seen at the repair' };
+
+/** What was answered, newest first: each can be changed, taken back, and written about. */
+export function Answered({ handle, rulebook, timeZone, readOnly, onPick }: Props) {
+  const { state, answer } = handle;
+  const current = state.findings.filter((finding) => finding.current);
+  const replaced = state.findings.filter((finding) => !finding.current);
+  const last = current.find((finding) => finding.source === 'asked');
+  return (
+    <section aria-labelledby="answered" className="grid gap-3">
+      <div className="flex flex-wrap items-center justify-between gap-3">
+        <h2 id="answered">Answered so far</h2>
+        {last && !readOnly && (
+          <Button
+            variant="quiet"
+            onClick={() => answer.mutate({ checkId: last.checkId, answer: { kind: 'undo' }, askedBecause: 'choice' })}
+          >
+            Undo the last answer
+          </Button>
+        )}
+      </div>
+      <ul className="border-t border-ink">
+        {current.map((finding) => (
+          <Finding key={finding.id} {...{ finding, handle, rulebook, timeZone, readOnly, onPick }} />
+        ))}
+      </ul>
+      {replaced.length > 0 && (
+        <details className="disclosure">
+          <summary className="min-h-touch py-2 font-bold">{replaced.length} earlier {replaced.length === 1 ? 'answer' : 'answers'}</summary>
+          <ul className="border-t border-rule">
+            {replaced.map((finding) => (
+              <li key={finding.id} className="border-b border-rule py-2">
+                {rulebook.checks[finding.checkId]?.name}: <s>{finding.answer}</s>{' '}
+                <span className="text-ink-soft">
+                  {finding.late ? 'came late, under a newer answer; ' : ''}{finding.person}, {timeText(finding.at, timeZone)}
+                </span>
+              </li>
+            ))}
+          </ul>
+        </details>
+      )}
+    </section>
+  );
+}
+
+function Finding({ finding, handle, rulebook, timeZone, readOnly, onPick }: Props & { finding: FindingView }) {
+  const check = rulebook.checks[finding.checkId];
+  return (
+    <li className="grid gap-1 border-b border-rule py-3">
+      <p>
+        {check?.name ?? finding.checkId}: <strong className={check?.kind === 'measured' ? 'figure' : undefined}>{finding.answer}</strong>
+        {finding.thinkSo && ' (think so)'}
+      </p>
+      <p className="text-[0.9375rem] text-ink-soft">
+        {SOURCES[finding.source] ? `${SOURCES[finding.source]}, ` : ''}{finding.person}, {timeText(finding.at, timeZone)}
+      </p>
+      {finding.notes.map((note) => (
+        <p key={note.id} className="border-l-4 border-rule pl-3">
+          {note.text} <span className="text-[0.9375rem] text-ink-soft">{note.person}</span>
+        </p>
+      ))}
+      <div className="flex flex-wrap gap-x-2">
+        {!readOnly && (
+          <Button variant="quiet" className="border-transparent! px-2!" onClick={() => onPick({ kind: 'check', checkId: finding.checkId })}>
+            Change<span className="sr-only">: {check?.name}</span>
+          </Button>
+        )}
+        {handle.state.at === null && <NoteForm finding={finding} handle={handle} about={check?.name ?? ''} />}
+      </div>
+    </li>
+  );
+}
+
+function NoteForm({ finding, handle, about }: { finding: FindingView; handle: CaseHandle; about: string }) {
+  const [open, setOpen] = useState(false);
+  const { note } = handle;
+  if (!open) {
+    return (
+      <Button variant="quiet" className="border-transparent! px-2!" onClick={() => setOpen(true)}>
+        Add a note<span className="sr-only">: {about}</span>
+      </Button>
+    );
+  }
+  return (
+    <form
+      method="post"
+      className="grid w-full gap-2"
+      onSubmit={(event) => {
+        event.preventDefault();
+        const text = String(new FormData(event.currentTarget).get('text') ?? '').trim();
+        if (text) note.mutate({ findingId: finding.id, text }, { onSuccess: () => setOpen(false) });
+      }}
+    >
+      <TextareaField label="Note" name="text" id={`note-${finding.id}`} error={note.error?.message} autoFocus />
+      <div className="flex gap-3">
+        <Button type="submit">{note.isPending ? 'Saving…' : 'Save the note'}</Button>
+        <Button variant="quiet" onClick={() => setOpen(false)}>Cancel</Button>
+      </div>
+    </form>
+  );
+}

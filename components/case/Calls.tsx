@@ -1,0 +1,34 @@
+import { Tag } from '@/components/ui/Tag';
+import type { CallView, RulebookView } from '@/lib/schemas/case-view';
+import { timeText } from './words';
+
+const SURENESS: Record<string, string> = { sure: 'sure', 'fairly-sure': 'fairly sure', guess: 'a guess' };
+const PROOF: Record<string, string> = {
+  none: 'not proved yet',
+  seen: 'seen',
+  isolated: 'isolated: one remedy alone, and it held',
+  'held-with-others': 'held with others',
+};
+
+/** Every call of a case, the standing one marked. */
+export function Calls({ calls, rulebook, timeZone }: { calls: CallView[]; rulebook: RulebookView; timeZone: string }) {
+  const nameOf = (id: string) => rulebook.causes[id]?.name ?? id;
+  return (
+    <ul className="border-t border-ink">
+      {calls.map((call) => (
+        <li key={call.id} className="grid gap-1 border-b border-rule py-3">
+          <p className="flex flex-wrap items-center gap-3">
+            <strong className={call.standing ? undefined : 'line-through'}>{nameOf(call.mainCause)}</strong>
+            <Tag tone={call.standing ? 'strong' : 'plain'}>{call.standing ? 'stands' : 'taken back'}</Tag>
+          </p>
+          {call.unlistedCause && <p>{call.unlistedCause}</p>}
+          {call.contributingCauses.length > 0 && <p>With: {call.contributingCauses.map(nameOf).join(', ')}</p>}
+          {call.whyNotLeading && <p>Why not the leading cause: {call.whyNotLeading}</p>}
+          <p className="text-[0.9375rem] text-ink-soft">
+            {SURENESS[call.sureness] ?? call.sureness}; {PROOF[call.proof] ?? call.proof}. {call.person}, {timeText(call.at, timeZone)}
+          </p>
+        </li>
+      ))}
+    </ul>
+  );
+}

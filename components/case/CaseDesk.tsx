@@ -1,0 +1,117 @@
+'use client';
+
+import { useState } from 'react';
+import { Button } from '@/components/ui/Button';
+import { LiveRegion } from '@/components/ui/LiveRegion';
+import { Notice } from '@/components/ui/Notice';
+import { percent } from '@/components/ui/SightGlass';
+import { STATIONS, type StationId } from '@/lib/diagnose/stations';
+import type { CaseState, CaseView, RulebookView } from '@/lib/schemas/case-view';
+import { Answered } from './Answered';
+import { atHand, ofSuggestion, type Picked } from './at-hand';
+import { Causes } from './Causes';
+import { CheckAtHand } from './CheckAtHand';
+import { PanelAtHand } from './PanelAtHand';
+import { StationChecks } from './StationChecks';
+import { Stations } from './Stations';
+import { useCase, type CaseHandle } from './use-case';
+import { WhatNext } from './WhatNext';
+import { changeText } from './words';
+
+const stationName = (id: StationId) => STATIONS.find((station) => station.id === id)?.name ?? id;
+
+/** Where a case is diagnosed: the check at hand, the ranked causes, the oil path, and what was answered. */
+export function CaseDesk({ view }: { view: CaseView }) {
+  const { rulebook } = view;
+  const handle = useCase(view);
+  const { state } = handle;
+  const [picked, setPicked] = useState<Picked>(null);
+  const [station, setStation] = useState<StationId | null>(null);
+  const readOnly = state.at !== null || state.status !== 'open';
+  const pick = (next: Picked) => {
+    setStation(null);
+    setPicked(next);
+    requestAnimationFrame(() => document.getElementById('check-at-hand')?.focus());
+  };
+
+  return (
+    <div className="grid gap-8 lg:grid-cols-[13rem_minmax(0,1fr)_minmax(0,26rem)]">
+      <div className="order-3 lg:order-1"><Stations state={state} rulebook={rulebook} picked={station} onPick={setStation} /></div>
+      <div className="order-1 grid min-w-0 content-start gap-8 lg:order-2">
+        {station ? (
+          <StationChecks station={station} name={stationName(station)} state={state} rulebook={rulebook} onPick={pick} />
+        ) : (
+          !readOnly && <AtHandView {...{ handle, rulebook, picked, onPick: setPicked }} />
+        )}
+        <Answered handle={handle} rulebook={rulebook} timeZone={view.head.timeZone} readOnly={readOnly} onPick={pick} />
+      </div>
+      <div className="order-2 grid min-w-0 content-start gap-8 lg:order-3">
+        <Causes state={state} rulebook={rulebook} />
+        {!readOnly && <WhatNext state={state} rulebook={rulebook} readOnly={readOnly} onPick={pick} />}
+      </div>
+      <LiveRegion>{spoken(state, rulebook)}</LiveRegion>
+    </div>
+  );
+}
+
+interface AtHandProps {
+  handle: CaseHandle;
+  rulebook: RulebookView;
+  picked: Picked;
+  onPick: (picked: Picked) => void;
+}
+
+function AtHandView({ handle, rulebook, picked, onPick }: AtHandProps) {
+  const { state } = handle;
+  const asked = atHand(state, rulebook, picked);
+  if (!asked) return <Enough {...{ state, rulebook, onPick }} />;
+  if (asked.kind === 'panel') {
+    const panel = rulebook.panels.find(({ id }) => id === asked.panelId);
+    // Kept at hand while its items are answered, though the suggestion moves on.
+    const keep = () => picked?.kind === 'panel' || onPick({ kind: 'panel', panelId: asked.panelId });
+    return panel ? (
+      <div onClickCapture={keep}>
+        <PanelAtHand panel={panel} rulebook={rulebook} handle={handle} stationName={stationName(panel.station)} onDone={() => onPick(null)} />
+      </div>
+    ) : null;
+  }
+  const check = rulebook.checks[asked.checkId];
+  if (!check) return null;
+  return (
+    <CheckAtHand
+      check={check}
+      rulebook={rulebook}
+      handle={handle}
+      suggestion={picked ? null : (state.next.suggestions[0] ?? null)}
+      then={asked.then ? (rulebook.checks[asked.then] ?? null) : null}
+      stationName={stationName(check.station)}
+      onAnswered={() => onPick(null)}
+    />
+  );
+}
+
+/** No check is worth its time: say so, and leave the way open to go on. */
+function Enough({ state, rulebook, onPick }: { state: CaseState; rulebook: RulebookView; onPick: (picked: Picked) => void }) {
+  const [best] = state.next.suggestions;
+  const next = best ? ofSuggestion(best, rulebook) : null;
+  return (
+    <section aria-labelledby="check-at-hand">
+      <h2 id="check-at-hand" tabIndex={-1} className="text-[1.75rem]">Enough is known; repair</h2>
+      <Notice
+        title="No open check is worth its time"
+        actions={next && <Button variant="quiet" onClick={() => onPick(next.kind === 'check' ? { kind: 'check', checkId: next.checkId } : next)}>Check further all the same</Button>}
+      >
+        {state.next.stopReason} Call the cause below, or look further if something doesn’t fit what you see.
+      </Notice>
+    </section>
+  );
+}
+
+/** What a screen reader hears when the ranking has moved. */
+function spoken({ causes, because }: CaseState, rulebook: RulebookView): string {
+  const [leader] = causes;
+  if (!leader) return '';
+  const name = rulebook.causes[leader.causeId]?.name ?? leader.causeId;
+  const change = changeText(leader.change);
+  return `${because ? `Saved: ${because}. ` : ''}${name} leads with ${percent(leader.p)}${change ? `, ${change}` : ''}.`;
+}

@@ -1,0 +1,80 @@
+'use client';
+
+import { useEffect, useRef } from 'react';
+import { Button } from '@/components/ui/Button';
+import { Notice } from '@/components/ui/Notice';
+import { ApiProblem } from '@/lib/query/problem';
+import type { AnswerInput } from '@/lib/schemas/case';
+import type { CheckView, RulebookView, SuggestionView } from '@/lib/schemas/case-view';
+import { Cautions, unread } from './Cautions';
+import { ChoiceAnswers } from './ChoiceAnswers';
+import { Instructions } from './Instructions';
+import { MeasuredAnswer } from './MeasuredAnswer';
+import type { CaseHandle } from './use-case';
+
+interface Props {
+  check: CheckView;
+  rulebook: RulebookView;
+  handle: CaseHandle;
+  /** The suggestion that put it here; null when somebody picked it. */
+  suggestion: SuggestionView | null;
+  then: CheckView | null;
+  stationName: string;
+  onAnswered: () => void;
+}
+
+/** One check, large: its cautions, how to do it, and its answers; "can't tell" and "skip" are always there. */
+export function CheckAtHand({ check, rulebook, handle, suggestion, then, stationName, onAnswered }: Props) {
+  const { state, answer, acknowledge } = handle;
+  const heading = useRef<HTMLHeadingElement>(null);
+  const shown = useRef(check.id);
+  useEffect(() => {
+    // The page itself has the focus at first; after an answer it goes to the next question.
+    if (shown.current !== check.id) heading.current?.focus();
+    shown.current = check.id;
+  }, [check.id]);
+
+  const problem = answer.error instanceof ApiProblem && answer.variables?.checkId === check.id ? answer.error : null;
+  const toRead = unread(check, rulebook, state);
+  const give = (given: AnswerInput) =>
+    answer.mutate(
+      { checkId: check.id, answer: given, askedBecause: suggestion ? 'suggested' : 'choice' },
+      { onSuccess: onAnswered },
+    );
+
+  return (
+    <section aria-labelledby="check-at-hand" className="grid gap-4">
+      <header>
+        <p className="label text-ink-soft">
+          {stationName} · {suggestion ? suggestion.word : 'your choice'}
+        </p>
+        <h2 id="check-at-hand" ref={heading} tabIndex={-1} className="mt-1 text-[1.75rem]">{check.prompt}</h2>
+        {suggestion?.because && <p className="mt-1">{suggestion.because}</p>}
+        {then && <p className="mt-1 text-ink-soft">Then: {then.prompt}</p>}
+      </header>
+      {problem && (
+        <Notice kind="danger" title="Not saved">
+          {problem.message} {Object.values(problem.fields).filter((text) => text.includes(' ')).join(' ')}
+        </Notice>
+      )}
+      <Cautions
+        check={check}
+        rulebook={rulebook}
+        toRead={toRead}
+        pending={acknowledge.isPending}
+        onRead={() => acknowledge.mutate({ checkId: check.id, cautionIds: toRead })}
+      />
+      <Instructions check={check} setUpMinutes={suggestion?.setUpMinutes} />
+      {toRead.length === 0 &&
+        (check.kind === 'measured' ? (
+          <MeasuredAnswer key={check.id} check={check} pending={answer.isPending} errors={problem?.fields ?? {}} onAnswer={give} />
+        ) : (
+          <ChoiceAnswers key={check.id} check={check} pending={answer.isPending} onAnswer={give} />
+        ))}
+      <div className="flex flex-wrap gap-3 border-t border-rule pt-4">
+        <Button variant="quiet" onClick={() => give({ kind: 'cannot-tell' })}>Can’t tell</Button>
+        <Button variant="quiet" onClick={() => give({ kind: 'skip' })}>Skip</Button>
+      </div>
+    </section>
+  );
+}

@@ -1,0 +1,60 @@
+'use client';
+
+import { Button } from '@/components/ui/Button';
+import { Notice } from '@/components/ui/Notice';
+import { ApiProblem } from '@/lib/query/problem';
+import type { RulebookView } from '@/lib/schemas/case-view';
+import { Cautions, unread } from './Cautions';
+import { Instructions } from './Instructions';
+import { PanelAnswers } from './PanelAnswers';
+import type { CaseHandle } from './use-case';
+import { minutesText } from './words';
+
+interface Props {
+  panel: RulebookView['panels'][number];
+  rulebook: RulebookView;
+  handle: CaseHandle;
+  stationName: string;
+  onDone: () => void;
+}
+
+/** Yes/no checks that are looked at together, as one screen. */
+export function PanelAtHand({ panel, rulebook, handle, stationName, onDone }: Props) {
+  const { state, answer, acknowledge } = handle;
+  const checks = panel.checks.flatMap((id) => rulebook.checks[id] ?? []);
+  const careful = checks.find((check) => unread(check, rulebook, state).length > 0) ?? checks.find(({ cautions }) => cautions.length > 0);
+  const toRead = careful ? unread(careful, rulebook, state) : [];
+  const problem = answer.error instanceof ApiProblem ? answer.error : null;
+  const [first] = checks;
+  return (
+    <section aria-labelledby="check-at-hand" className="grid gap-4">
+      <header>
+        <p className="label text-ink-soft">{stationName} · {checks.length} checks on one screen</p>
+        <h2 id="check-at-hand" tabIndex={-1} className="mt-1 text-[1.75rem]">{panel.prompt}</h2>
+        <p className="mt-1 text-ink-soft">
+          About <span className="figure">{minutesText(checks.reduce((sum, { minutes }) => sum + minutes, 0))}</span> for all of them. Answer those that you can; each is saved as you tap it.
+        </p>
+      </header>
+      {problem && <Notice kind="danger" title="Not saved">{problem.message}</Notice>}
+      {careful && (
+        <Cautions
+          check={careful}
+          rulebook={rulebook}
+          toRead={toRead}
+          pending={acknowledge.isPending}
+          onRead={() => acknowledge.mutate({ checkId: careful.id, cautionIds: toRead })}
+        />
+      )}
+      {first && checks.length === 1 && <Instructions check={first} />}
+      {toRead.length === 0 && (
+        <PanelAnswers
+          checks={checks}
+          state={state}
+          pending={answer.isPending}
+          onAnswer={(checkId, given) => answer.mutate({ checkId, answer: given, askedBecause: 'panel' })}
+        />
+      )}
+      <div><Button onClick={onDone}>Go on to the next check</Button></div>
+    </section>
+  );
+}

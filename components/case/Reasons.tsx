@@ -1,0 +1,49 @@
+import { percent } from '@/components/ui/SightGlass';
+import type { CauseView, Direction, ReasonView } from '@/lib/schemas/case-view';
+import { decibanText } from './words';
+
+const HEADS: Record<Direction, string> = { for: 'Points to it', against: 'Counts against it' };
+
+/** What counted for and against a cause, the most telling first, each with what the level would be without it. */
+export function Reasons({ cause, decibans }: { cause: CauseView; decibans: boolean }) {
+  if (cause.reasons.length === 0) {
+    return <p className="text-ink-soft">Nothing that was answered tells anything of it. It stands where it stands in all cases: <span className="figure">{percent(cause.prior)}</span>.</p>;
+  }
+  return (
+    <>
+      {(['for', 'against'] as const).map((direction) => {
+        const reasons = cause.reasons.filter((reason) => reason.direction === direction);
+        return reasons.length > 0 && (
+          <div key={direction}>
+            <h3 className="label">{HEADS[direction]}</h3>
+            <ul className="grid gap-2 border-t border-rule pt-2">
+              {reasons.map((reason) => <Reason key={reason.findingIds.join()} reason={reason} decibans={decibans} />)}
+            </ul>
+          </div>
+        );
+      })}
+      <p className="text-[0.9375rem] text-ink-soft">Before any answer: <span className="figure">{percent(cause.prior)}</span> of all cases.</p>
+    </>
+  );
+}
+
+function Reason({ reason, decibans }: { reason: ReasonView; decibans: boolean }) {
+  return (
+    <li>
+      <p>
+        <strong>{reason.finding}</strong>: {words(reason)}
+        {decibans && <> <span className="figure">({decibanText(reason.decibans)})</span></>}
+      </p>
+      <p className="text-[0.9375rem]">
+        {reason.note} <span className="text-ink-soft">({reason.basis ?? 'worked out from the other answers'}{reason.source ? `: ${reason.source}` : ''})</span>
+      </p>
+      <p className="text-[0.9375rem] text-ink-soft">Without this: <span className="figure">{percent(reason.without)}</span></p>
+    </li>
+  );
+}
+
+/** "points clearly to it", "counts a little against it" */
+function words({ direction, strength }: ReasonView): string {
+  if (direction === 'against') return `counts ${strength} against it`;
+  return strength === 'almost by itself' ? 'settles it almost by itself' : `points ${strength} to it`;
+}

@@ -1,0 +1,80 @@
+'use client';
+
+import { Button } from '@/components/ui/Button';
+import { percent } from '@/components/ui/SightGlass';
+import type { CaseState, RulebookView } from '@/lib/schemas/case-view';
+import type { Picked } from './at-hand';
+import { minutesText } from './words';
+
+interface Props {
+  state: CaseState;
+  rulebook: RulebookView;
+  readOnly: boolean;
+  onPick: (picked: Picked) => void;
+}
+
+/** Other checks worth their time, what would settle it, and what would be repaired first as things stand. */
+export function WhatNext({ state, rulebook, readOnly, onPick }: Props) {
+  const { suggestions, spoiled } = state.next;
+  const name = (id: string) => rulebook.checks[id]?.name ?? id;
+  return (
+    <div className="grid gap-6">
+      {suggestions.length > 0 && (
+        <section aria-labelledby="next-checks">
+          <h2 id="next-checks">Checks that tell most for their time</h2>
+          <ol className="mt-2 border-t border-ink">
+            {suggestions.map(({ checkIds, panelId, word, minutes, because }) => {
+              const [checkId] = checkIds;
+              const title = panelId ? (rulebook.panels.find(({ id }) => id === panelId)?.title ?? panelId) : checkIds.map(name).join(' and ');
+              return (
+                <li key={checkIds.join()} className="border-b border-rule py-1">
+                  <Button
+                    variant="quiet"
+                    className="w-full justify-between! border-transparent! text-left!"
+                    aria-disabled={readOnly || undefined}
+                    onClick={() => !readOnly && checkId && onPick(panelId ? { kind: 'panel', panelId } : { kind: 'check', checkId })}
+                  >
+                    <span>{title}</span>
+                    <span className="shrink-0 text-right font-normal text-ink-soft">{word}, <span className="figure">{minutesText(minutes)}</span></span>
+                  </Button>
+                  {because && <p className="px-5 pb-2 text-[0.9375rem]">{because}</p>}
+                </li>
+              );
+            })}
+          </ol>
+          {spoiled.length > 0 && (
+            <p className="mt-2 text-[0.9375rem] text-ink-soft">
+              Can’t tell any more: {spoiled.map(({ checkId, by }) => `${name(checkId)} (spoiled by: ${name(by)})`).join(' · ')}
+            </p>
+          )}
+        </section>
+      )}
+      {state.settle.length > 0 && (
+        <section aria-labelledby="settle">
+          <h2 id="settle">What would settle it</h2>
+          <ul className="mt-2 grid gap-1">
+            {state.settle.map(({ checkId, answer, causeId, from, to }) => (
+              <li key={causeId}>
+                {name(checkId)}: <strong>{answer}</strong> would take {rulebook.causes[causeId]?.name ?? causeId} from{' '}
+                <span className="figure">{percent(from)}</span> to <span className="figure">{percent(to)}</span>.
+              </li>
+            ))}
+          </ul>
+        </section>
+      )}
+      {state.repairs.length > 0 && (
+        <section aria-labelledby="repairs">
+          <h2 id="repairs">If you repaired now, in this order</h2>
+          <ol className="mt-2 ml-5 grid list-decimal gap-1">
+            {state.repairs.map(({ remedyId, name: remedy, p, lookMinutes, fixMinutes }) => (
+              <li key={remedyId}>
+                {remedy}: <span className="figure">{percent(p)}</span> likely, <span className="figure">{minutesText(lookMinutes)}</span> to look
+                {fixMinutes > 0 && <>, <span className="figure">{minutesText(fixMinutes)}</span> to put right</>}
+              </li>
+            ))}
+          </ol>
+        </section>
+      )}
+    </div>
+  );
+}
