@@ -131,8 +131,3 @@ export async function selectUnits(db: Executor, filter: UnitFilter) {
   const [total] = await db.select({ count: count() }).from(unit).where(where);
   return { rows, total: total?.count ?? 0 };
 }
-
-/** The sites that a unit can stand at. */
-export async function selectUnitSites(db: Executor, organisationId: string) {
-  return db.select({ id: site.id, name: site.name, timeZone: site.timeZone }).from(site).where(eq(site.organisationId, organisationId)).orderBy(asc(site.name));
-}

@@ -29,6 +29,3 @@ export const optionalCount = (most: number) =>
 export const versionText = z.string().max(40);
 
 export const reason = z.string('Say why.').trim().min(1, 'Say why.').max(500, 'Keep it under 500 characters.');
-
-/** For what is read without being asked for anything. */
-export const nothing = z.strictObject({});

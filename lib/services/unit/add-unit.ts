@@ -1,4 +1,5 @@
-import { insertUnit, selectUnit, selectUnitByNumber, selectUnitSites } from '@/db/queries/unit';
+import { findSite } from '@/db/queries/site';
+import { insertUnit, selectUnit, selectUnitByNumber } from '@/db/queries/unit';
 import { conflict, invalid } from '@/lib/errors';
 import type { Work } from '../define';
 
@@ -28,8 +29,7 @@ export async function addUnit({ tx, ctx, audit, unchanged }: Work<unknown>, { id
     unchanged();
     return { id };
   }
-  const sites = await selectUnitSites(tx, organisationId);
-  if (!sites.some((site) => site.id === siteId)) throw invalid({ siteId: 'This site does not exist. Choose another.' });
+  await refuseUnknownSite({ tx, ctx }, siteId);
   await refuseTakenNumber({ tx, ctx }, { fleetNumber, unitId: id });
 
   const row = { fleetNumber, siteId, vehicleKind, country: country || ctx.organisation.country, ...optional };
@@ -37,6 +37,11 @@ export async function addUnit({ tx, ctx, audit, unchanged }: Work<unknown>, { id
   if (!(await insertUnit(tx, { ...row, organisationId, id, createdBy: ctx.person.id }))) throw taken(fleetNumber);
   audit({ entity: 'unit', entityId: id, changed: row });
   return { id };
+}
+
+/** @throws AppError "invalid" beside `siteId` */
+export async function refuseUnknownSite({ tx, ctx }: Pick<Work<unknown>, 'tx' | 'ctx'>, siteId: string): Promise<void> {
+  if (!(await findSite(tx, { organisationId: ctx.organisation.id, siteId }))) throw invalid({ siteId: 'This site does not exist. Choose another.' });
 }
 
 /** @throws AppError "conflict" beside `fleetNumber` when another unit has the number */

@@ -1,10 +1,10 @@
-import { lockUnit, selectUnit, selectUnitSites, updateUnit } from '@/db/queries/unit';
+import { lockUnit, selectUnit, updateUnit } from '@/db/queries/unit';
 import { PERMITTED } from '@/lib/auth/permissions';
-import { invalid, notFound } from '@/lib/errors';
+import { notFound } from '@/lib/errors';
 import { changeUnitInput } from '@/lib/schemas/unit';
 import { defineWrite } from '../define';
 import { changedFields, refuseStale } from '../editing';
-import { refuseTakenNumber } from './add-unit';
+import { refuseTakenNumber, refuseUnknownSite } from './add-unit';
 import { unitFormValues } from './form-values';
 import { unitColumns } from './unit-columns';
 
@@ -28,10 +28,7 @@ export const changeUnit = defineWrite({
       unchanged();
       return { id: unitId };
     }
-    if (changed.siteId) {
-      const sites = await selectUnitSites(tx, of.organisationId);
-      if (!sites.some((site) => site.id === next.siteId)) throw invalid({ siteId: 'This site does not exist. Choose another.' });
-    }
+    if (changed.siteId) await refuseUnknownSite({ tx, ctx }, next.siteId);
     await refuseTakenNumber({ tx, ctx }, { fleetNumber: next.fleetNumber, unitId });
     await updateUnit(tx, of, { ...changed, updatedAt: ctx.now() });
     audit({ entity: 'unit', entityId: unitId, changed });

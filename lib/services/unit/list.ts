@@ -1,5 +1,5 @@
 import { selectCurrentFits } from '@/db/queries/fit';
-import { selectUnits, selectUnitSites } from '@/db/queries/unit';
+import { selectUnits } from '@/db/queries/unit';
 import { selectLatestOdometers } from '@/db/queries/unit-reading';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { ROWS_A_PAGE } from '@/lib/schemas/list';
@@ -37,7 +37,6 @@ export const listUnits = defineRead({
         odometerM: odometers.get(row.id)?.odometerM ?? null,
         readOn: odometers.get(row.id)?.readOn ?? null,
       })),
-      sites: (await selectUnitSites(tx, organisationId)).map(({ id, name }) => ({ id, name })),
       query: input,
       total,
       pages: Math.max(1, Math.ceil(total / ROWS_A_PAGE)),

@@ -1,12 +1,11 @@
 import { selectCasesOfUnit } from '@/db/queries/case-of-unit';
 import { selectFitsOfUnit } from '@/db/queries/fit';
 import { selectLastRemoval } from '@/db/queries/removal';
-import { selectUnit, selectUnitSites } from '@/db/queries/unit';
+import { selectUnit } from '@/db/queries/unit';
 import { selectReadings } from '@/db/queries/unit-reading';
 import type { Transaction } from '@/db/connect';
 import { may, PERMITTED } from '@/lib/auth/permissions';
 import { notFound } from '@/lib/errors';
-import { nothing } from '@/lib/schemas/record';
 import { unitIdInput } from '@/lib/schemas/unit';
 import { siteDay } from '../case/site-day';
 import type { Ctx } from '../context';
@@ -53,7 +52,7 @@ async function casesOf(tx: Transaction, ctx: Ctx, { unitId, timeZone }: { unitId
         ...row,
         openedOn: siteDay(openedAt, timeZone),
         closedOn: closedAt && siteDay(closedAt, timeZone),
-        complaints: complaints.map((id) => checks.get(id)?.check.prompt ?? id),
+        complaints: complaints.map((id) => checks.get(id)?.check.name ?? id),
         cause: mainCause && (rulebook.causes.find((cause) => cause.id === mainCause)?.name ?? mainCause),
       };
     }),
@@ -67,18 +66,8 @@ export const readUnitForm = defineRead({
   roles: PERMITTED['unit.edit'],
   input: unitIdInput,
   run: async ({ tx, ctx, input }) => {
-    const organisationId = ctx.organisation.id;
-    const unit = await selectUnit(tx, { organisationId, unitId: input.unitId });
+    const unit = await selectUnit(tx, { organisationId: ctx.organisation.id, unitId: input.unitId });
     if (!unit) throw notFound('unit');
-    return { fleetNumber: unit.fleetNumber, version: versionOf(unit), values: textsOf(unitFormValues(unit, ctx.person.units)), sites: await selectUnitSites(tx, organisationId) };
+    return { fleetNumber: unit.fleetNumber, version: versionOf(unit), values: textsOf(unitFormValues(unit, ctx.person.units)) };
   },
-});
-
-/** What the form of a new unit is opened with. */
-export const readNewUnitForm = defineRead({
-  name: 'read.new-unit-form',
-  doing: 'add units',
-  roles: PERMITTED['unit.edit'],
-  input: nothing,
-  run: async ({ tx, ctx }) => ({ sites: await selectUnitSites(tx, ctx.organisation.id) }),
 });
