@@ -23,7 +23,8 @@ export const evidenceGroups: EvidenceGroup[] = [
   { id: 'restriction', name: 'Restriction after the head' },
   { id: 'dryer', name: 'Dryer cartridge' },
   { id: 'dryer-air', name: 'Air at the dryer’s purge' },
-  { id: 'duty', name: 'Leaks and duty' },
+  { id: 'leaks', name: 'Leaks' },
+  { id: 'duty', name: 'How much it works' },
   { id: 'duty-of-vehicle', name: 'What the work asks for' },
   { id: 'governor', name: 'Governor and unloader' },
 ];

@@ -14,3 +14,13 @@ export function yesNo(background: number): CheckState[] {
     { id: 'yes', label: 'Yes', background },
   ];
 }
+
+/** The hazards of a check that needs the compressor off. */
+export const WITH_THE_COMPRESSOR_OFF = [
+  'vehicle-rolls', 'pressure-falls-suspension-brakes', 'stored-air', 'scalding-coolant', 'hot-parts', 'heavy-part', 'belts-fan-gears',
+];
+
+/** The hazards of a check that needs the head off. */
+export const WITH_THE_HEAD_OFF = [
+  'vehicle-rolls', 'pressure-falls-suspension-brakes', 'stored-air', 'scalding-coolant', 'hot-parts', 'carbon-fire',
+];

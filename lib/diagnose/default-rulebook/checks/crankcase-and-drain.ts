@@ -1,7 +1,7 @@
 import { commonPractice, judgement } from '../basis';
 import { inH2O, millilitres } from '../si';
 import type { Check } from '../../types';
-import { check, yesNo } from './check';
+import { check, yesNo, WITH_THE_COMPRESSOR_OFF } from './check';
 
 export const checks: Check[] = [
   check({
@@ -185,7 +185,7 @@ export const checks: Check[] = [
     minutes: 6,
     setUp: { engine: 'off', air: 'empty', access: ['compressor-off'] },
     spoils: ['flange-leak', 'drain-flow', 'sealant-at-gasket', 'noise', 'head-temperature', 'build-up-time'],
-    cautions: ['stored-air', 'hot-parts', 'belts-fan-gears', 'heavy-part', 'vehicle-rolls', 'pressure-falls-suspension-brakes', 'scalding-coolant'],
+    cautions: WITH_THE_COMPRESSOR_OFF,
     states: [
       { id: 'clear', label: 'Clear', background: 0.861 },
       { id: 'narrowed', label: 'Partly closed', background: 0.081 },
@@ -205,7 +205,7 @@ export const checks: Check[] = [
     minutes: 5,
     setUp: { engine: 'off', air: 'empty', access: ['compressor-off'] },
     spoils: ['flange-leak', 'drain-flow', 'sealant-at-gasket', 'noise', 'head-temperature', 'build-up-time'],
-    cautions: ['stored-air', 'hot-parts', 'belts-fan-gears', 'heavy-part', 'vehicle-rolls', 'pressure-falls-suspension-brakes', 'scalding-coolant'],
+    cautions: WITH_THE_COMPRESSOR_OFF,
     states: yesNo(0.077),
     cannotTell: 0.02,
     ...commonPractice,

@@ -1,7 +1,7 @@
 import { commonPractice, judgement } from '../basis';
 import { kelvins, seconds } from '../si';
 import type { Check } from '../../types';
-import { check, yesNo } from './check';
+import { check, yesNo, WITH_THE_HEAD_OFF } from './check';
 
 /** What can't be measured any more once the head is off. */
 const SPOILED_BY_LIFTING_THE_HEAD = ['head-temperature', 'build-up-time', 'blow-back-at-intake', 'coolant-bubbles', 'coolant-rise'];
@@ -214,7 +214,7 @@ const headOff: Check[] = [
     minutes: 20,
     setUp: { engine: 'off', air: 'empty', access: ['head-off'] },
     spoils: SPOILED_BY_LIFTING_THE_HEAD,
-    cautions: ['stored-air', 'scalding-coolant', 'hot-parts', 'carbon-fire', 'vehicle-rolls', 'pressure-falls-suspension-brakes'],
+    cautions: WITH_THE_HEAD_OFF,
     states: [
       { id: 'sound', label: 'Sound', background: 0.597 },
       { id: 'worn', label: 'Worn smooth, ridge or wide gap', background: 0.3 },
@@ -235,7 +235,7 @@ const headOff: Check[] = [
     minutes: 15,
     setUp: { engine: 'off', air: 'empty', access: ['head-off'] },
     spoils: SPOILED_BY_LIFTING_THE_HEAD,
-    cautions: ['stored-air', 'scalding-coolant', 'hot-parts', 'carbon-fire', 'vehicle-rolls', 'pressure-falls-suspension-brakes'],
+    cautions: WITH_THE_HEAD_OFF,
     states: [
       { id: 'sound', label: 'Sound', background: 0.699 },
       { id: 'carboned', label: 'Carboned', background: 0.235 },
@@ -255,7 +255,7 @@ const headOff: Check[] = [
     minutes: 5,
     setUp: { engine: 'off', air: 'empty', access: ['head-off'] },
     spoils: SPOILED_BY_LIFTING_THE_HEAD,
-    cautions: ['stored-air', 'scalding-coolant', 'hot-parts', 'carbon-fire', 'vehicle-rolls', 'pressure-falls-suspension-brakes'],
+    cautions: WITH_THE_HEAD_OFF,
     states: [
       { id: 'film', label: 'A film at most', background: 0.498 },
       { id: 'soft', label: 'Soft soot', background: 0.304 },
@@ -275,7 +275,7 @@ const headOff: Check[] = [
     minutes: 10,
     setUp: { engine: 'off', air: 'empty', access: ['head-off'] },
     spoils: SPOILED_BY_LIFTING_THE_HEAD,
-    cautions: ['stored-air', 'scalding-coolant', 'hot-parts', 'vehicle-rolls', 'pressure-falls-suspension-brakes'],
+    cautions: WITH_THE_HEAD_OFF,
     states: yesNo(0.063),
     cannotTell: 0.05,
     ...commonPractice,

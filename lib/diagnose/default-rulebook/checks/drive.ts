@@ -1,6 +1,6 @@
 import { commonPractice } from '../basis';
 import type { Check } from '../../types';
-import { check } from './check';
+import { check, WITH_THE_COMPRESSOR_OFF } from './check';
 
 export const checks: Check[] = [
   check({
@@ -84,7 +84,7 @@ export const checks: Check[] = [
     minutes: 5,
     setUp: { engine: 'off', air: 'empty', access: ['compressor-off'] },
     spoils: ['flange-leak', 'drain-flow', 'noise', 'crank-turns', 'head-temperature', 'build-up-time'],
-    cautions: ['stored-air', 'belts-fan-gears', 'hot-parts', 'heavy-part', 'vehicle-rolls', 'pressure-falls-suspension-brakes', 'scalding-coolant'],
+    cautions: WITH_THE_COMPRESSOR_OFF,
     states: [
       { id: 'sound', label: 'Sound', background: 0.929 },
       { id: 'worn-or-chipped', label: 'Teeth worn or chipped', background: 0.058 },
@@ -104,7 +104,7 @@ export const checks: Check[] = [
     minutes: 25,
     setUp: { engine: 'off', air: 'empty', access: ['compressor-off'] },
     spoils: ['flange-leak', 'drain-flow', 'noise', 'crank-turns', 'oil-pressure-at-feed', 'crankcase-flooded'],
-    cautions: ['stored-air', 'belts-fan-gears', 'hot-parts', 'heavy-part', 'vehicle-rolls', 'pressure-falls-suspension-brakes', 'scalding-coolant'],
+    cautions: WITH_THE_COMPRESSOR_OFF,
     states: [
       { id: 'sound', label: 'Sound', background: 0.894 },
       { id: 'wiped', label: 'Dry, blue or wiped', background: 0.083 },

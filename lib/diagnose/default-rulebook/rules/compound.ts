@@ -39,8 +39,8 @@ export const rules: Rule[] = [
   {
     name: 'Crept up over a long life',
     conditions: together(band('miles-since-fit', { from: miles(300_000) }), answer('onset', 'gradually')),
-    weights: { 'rings-worn': 2 },
-    note: 'Oil that creeps up on a compressor of many miles is how worn rings show.',
+    weights: { 'rings-worn': 3, 'normal-carryover': -2 },
+    note: 'Oil that creeps up on a compressor of many miles is how worn rings show; what is ordinary doesn’t grow.',
     ...judgement,
   },
   {
