@@ -8,8 +8,9 @@ import { findOrder } from './repair-order-search';
 const TRY_ALL_AT_ANSWERS_UP_TO = 6;
 
 /**
- * What each of many questions would save. A plan is searched at p, and after every answer. The plans compared everywhere are: do nothing, the one found at p, and of all that were found
- * after answers the one that is best at p, in case the search at p missed it.
+ * What each of many questions would save. A plan is searched at p, and after every answer. The plans compared everywhere
+ * are: do nothing, the one found at p, and of all that were found after answers the one that is best at p, in case the
+ * search at p missed it.
  *
  * @param problem remedies as money
  * @param p causes' probabilities now
