@@ -29,7 +29,7 @@ export function compareCauses(ranking: Ranking, causeA: string, causeB: string):
   const groupIds = [...new Set([...a.terms, ...b.terms].map((term) => term.group))];
   const groups = groupIds.map((group) => ({
     group,
-    nats: sumOf(a.terms, group) - sumOf(b.terms, group),
+    nats: countedIn(a.terms, group) - countedIn(b.terms, group),
     findingIds: [...new Set([...a.terms, ...b.terms].filter((term) => term.group === group).flatMap((term) => term.findingIds))].sort(byCodeUnits),
   }));
   return {
@@ -47,6 +47,6 @@ function find(ranking: Ranking, causeId: string): RankedCause {
   return found;
 }
 
-function sumOf(terms: readonly EvidenceTerm[], group: string): number {
+function countedIn(terms: readonly EvidenceTerm[], group: string): number {
   return terms.filter((term) => term.group === group).reduce((sum, term) => sum + term.countedNats, 0);
 }

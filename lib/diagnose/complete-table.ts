@@ -1,3 +1,5 @@
+import { sumOf } from './sum';
+
 /** A cause's row in the table of one check, completed so that its answers' chances sum to one. */
 export type CompletedRow =
   | {
@@ -27,25 +29,21 @@ export const NORMALISED_WITHIN = 0.01;
  * @example completeRow([0.2, 0.8], [Math.LN2, undefined]) // { coherent: true, excess: 0, fill: ln(0.6 / 0.8) }
  */
 export function completeRow(backgrounds: readonly number[], given: readonly (number | undefined)[]): CompletedRow {
-  let total = 0;
-  let missing = 0;
-  let missingBackground = 0;
+  const told: number[] = [];
+  const untold: number[] = [];
   given.forEach((nats, state) => {
     const background = backgrounds[state] ?? 0;
-    if (nats === undefined) {
-      missing += 1;
-      missingBackground += background;
-    } else {
-      total += background * Math.exp(nats);
-    }
+    if (nats === undefined) untold.push(background);
+    else told.push(background * Math.exp(nats));
   });
-  if (missing === given.length) return { coherent: true, excess: 0, fill: 0 };
-  if (missing === 0) {
+  if (told.length === 0) return { coherent: true, excess: 0, fill: 0 };
+  const total = sumOf(told);
+  if (untold.length === 0) {
     return Math.abs(total - 1) < NORMALISED_WITHIN
       ? { coherent: true, excess: Math.log(total), fill: 0 }
       : { coherent: false, total };
   }
   return total < 1
-    ? { coherent: true, excess: 0, fill: Math.log((1 - total) / missingBackground) }
+    ? { coherent: true, excess: 0, fill: Math.log((1 - total) / sumOf(untold)) }
     : { coherent: false, total };
 }

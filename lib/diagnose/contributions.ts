@@ -1,3 +1,5 @@
+import { sumOf } from './sum';
+
 /**
  * The weight of evidence of one finding for one cause, when the finding is not one sure state: it is split over the
  * bands of a measured value, or only thought so, or both.
@@ -20,9 +22,7 @@ export function evidenceNats(nats: readonly number[], shares: readonly number[],
   if (reliability === 1 && nats.length === 1) return first;
   if (nats.every((weight) => weight === 0)) return 0;
   const top = Math.max(...nats, reliability < 1 ? 0 : -Infinity);
-  let sum = (1 - reliability) * Math.exp(-top);
-  nats.forEach((weight, state) => {
-    sum += reliability * (shares[state] ?? 0) * Math.exp(weight - top);
-  });
-  return top + Math.log(sum);
+  const parts = nats.map((weight, state) => reliability * (shares[state] ?? 0) * Math.exp(weight - top));
+  if (reliability < 1) parts.push((1 - reliability) * Math.exp(-top));
+  return top + Math.log(sumOf(parts));
 }

@@ -1,4 +1,3 @@
-import type { Problem } from './errors';
 import { LIMITS } from './schema-limits';
 import { shown } from './schema-messages';
 import type { CheckState, FactCondition, RootCondition } from './types';

@@ -84,7 +84,7 @@ function dangling(book: ShapedRulebook): Problem[] {
       ...(rule === undefined ? {} : { rule }),
       path: pathText(path),
       message: `there is no ${kind} "${id}"`,
-      instead: `write the id of a ${kind} of this rulebook`,
+      instead: `write the id of ${kind === 'evidence group' ? 'an' : 'a'} ${kind} of this rulebook`,
     });
   };
   const needAll = (kind: keyof typeof known, ids: readonly string[], path: Path) =>
