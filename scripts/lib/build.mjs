@@ -44,7 +44,7 @@ export async function build(processes, distDir, env) {
   rmSync(stampPath(distDir), { force: true });
   await processes.run('build', process.execPath, [inProject('node_modules', 'next', 'dist', 'bin', 'next'), 'build'], {
     cwd: root,
-    env: { ...env, NEXT_DIST_DIR: distDir, NODE_ENV: 'production' },
+    env: { ...env, NEXT_DIST_DIR: distDir, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' },
   });
   writeWhole(stampPath(distDir), `${hash}\n`);
 }

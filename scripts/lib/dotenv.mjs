@@ -22,7 +22,7 @@ export function parseDotenv(text) {
 /**
  * The environment with the file's values under it: what is set outside wins. An empty value counts as not set.
  * @param {string} path
- * @param {NodeJS.ProcessEnv} environment
+ * @param {Record<string, string | undefined>} environment
  * @returns {Record<string, string>}
  */
 export function withDotenv(path, environment) {

@@ -20,7 +20,7 @@ export function readPlan(given) {
     const [set, unset] = given.DATABASE_URL ? ['DATABASE_URL', 'DATABASE_OWNER_URL'] : ['DATABASE_OWNER_URL', 'DATABASE_URL'];
     throw new Problem(`${set} is set and ${unset} isn't: the app and the migrations reach a database as different roles.`, 'Set both to use a database of your own, or neither to use the private one.');
   }
-  return { isProduction, ownDatabase: !given.DATABASE_URL, ownMail: !given.SMTP_URL, ownStorage: !given.S3_ENDPOINT };
+  return { anythingSet: missing.length < SERVICES.length, ownDatabase: !given.DATABASE_URL, ownMail: !given.SMTP_URL, ownStorage: !given.S3_ENDPOINT };
 }
 
 /**

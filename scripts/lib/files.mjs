@@ -24,3 +24,6 @@ export function readIfThere(path) {
     throw error;
   }
 }
+
+/** The end of a log, to show beside what went wrong. @param {string} path */
+export const lastLines = (path) => (readIfThere(path) ?? '').trim().split('\n').slice(-12).join('\n');

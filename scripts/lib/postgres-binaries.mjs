@@ -27,7 +27,7 @@ function packagedFolders() {
 /**
  * Finds server binaries: PG_BIN alone when it is set, otherwise the newest (or the major asked for, because a cluster
  * can only be run by the version that made it).
- * @param {NodeJS.ProcessEnv} environment
+ * @param {Record<string, string | undefined>} environment
  * @param {number} [wantedMajor]
  * @returns {PostgresBinaries | undefined}
  */

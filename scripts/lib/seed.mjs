@@ -1,6 +1,5 @@
-import { existsSync } from 'node:fs';
+import { readFileSync } from 'node:fs';
 import { inProject, root } from './paths.mjs';
-import { readIfThere } from './files.mjs';
 import { withClient } from './roles.mjs';
 
 /** Whether the database holds no organisation yet; asked as superuser, whom row-level security doesn't blind. @param {string} url */
@@ -13,10 +12,8 @@ export const isEmpty = (url) => withClient(url, async (client) => (await client.
  * @param {Record<string, string>} env
  */
 export async function seed(processes, ownerUrl, env) {
-  const script = inProject('db', 'seed', 'index.ts');
-  if (!existsSync(script)) return;
-  await processes.run('seed', process.execPath, ['--import', 'tsx', script], { cwd: root, env: { ...env, DATABASE_OWNER_URL: ownerUrl } });
+  await processes.run('seed', process.execPath, ['--import', 'tsx', inProject('db', 'seed', 'index.ts')], { cwd: root, env: { ...env, DATABASE_OWNER_URL: ownerUrl } });
 }
 
-/** @returns {{ role: string, email: string, password: string }[]} */
-export const demoSignIns = () => JSON.parse(readIfThere(inProject('db', 'seed', 'sign-ins.json')) ?? '[]');
+/** @returns {{ role: string, name: string, email: string, password: string }[]} */
+export const demoSignIns = () => JSON.parse(readFileSync(inProject('db', 'seed', 'sign-ins.json'), 'utf8'));

@@ -1,4 +1,4 @@
-import { existsSync } from 'node:fs';
+import { lastLines } from './files.mjs';
 import { setTimeout as sleep } from 'node:timers/promises';
 import { inProject, root } from './paths.mjs';
 import { LOOPBACK, untilAccepting } from './ports.mjs';
@@ -14,7 +14,7 @@ export async function startWeb(processes, { command, port, env, log }) {
   const args = [inProject('node_modules', 'next', 'dist', 'bin', 'next'), command, '--hostname', LOOPBACK, '--port', String(port)];
   const child = processes.start('web', process.execPath, args, { cwd: root, env, log, show: log === undefined });
   const answered = (await untilAccepting(port, child)) && (await firstAnswer(port, child));
-  if (!answered) throw new Problem('The web server did not start.', log ? `Its log is ${log}.` : 'What it printed above says why.');
+  if (!answered) throw new Problem('The web server did not start.', log ? `The end of its log, ${log}:\n${lastLines(log)}` : 'What it printed above says why.');
   return child;
 }
 
@@ -27,8 +27,6 @@ async function firstAnswer(port, child) {
   }
   return false;
 }
-
-export const hasWorker = () => existsSync(inProject('worker', 'index.ts'));
 
 /**
  * Starts the job worker.

@@ -1,3 +1,4 @@
+import { lastLines } from './files.mjs';
 import { inProject } from './paths.mjs';
 import { freePort, LOOPBACK, untilAccepting } from './ports.mjs';
 import { Problem } from './problem.mjs';
@@ -12,7 +13,7 @@ const BUCKET = 'carryover';
  */
 async function startScript(processes, { name, script, args, port, log, env }) {
   const child = processes.start(name, process.execPath, [inProject('scripts', 'local', script), ...args], { log, env });
-  if (!(await untilAccepting(port, child))) throw new Problem(`The local ${name} service did not start.`, `Its log is ${log}.`);
+  if (!(await untilAccepting(port, child))) throw new Problem(`The local ${name} service did not start.`, `The end of its log, ${log}:\n${lastLines(log)}`);
   return child;
 }
 

@@ -3,6 +3,7 @@ import { build, isBuilt } from './build.mjs';
 import { runCommand } from './command.mjs';
 import { withDotenv } from './dotenv.mjs';
 import { appEnvironment, readPlan } from './environment.mjs';
+import { lastLines } from './files.mjs';
 import { takeStartLock } from './lock-file.mjs';
 import { inProject, local, root } from './paths.mjs';
 import { webPort } from './ports.mjs';
@@ -12,7 +13,7 @@ import { Problem } from './problem.mjs';
 import { CommandFailed } from './processes.mjs';
 import { keptSecrets } from './secrets.mjs';
 import { demoSignIns, isEmpty, seed } from './seed.mjs';
-import { hasWorker, startWeb, startWorker } from './services.mjs';
+import { startWeb, startWorker } from './services.mjs';
 import { startMail, startStorage } from './stand-ins.mjs';
 import { migrate } from '../migrate.mjs';
 
@@ -37,14 +38,31 @@ async function checkEnvironment(processes, env) {
   }
 }
 
+/**
+ * Starts the stand-ins that nothing outside takes the place of.
+ * @param {import('./private-database.mjs').Run} run
+ * @param {{ plan: ReturnType<typeof readPlan>, given: Record<string, string>, port: number }} wanted
+ */
+async function startStandIns({ processes, steps }, { plan, given, port }) {
+  if (!plan.ownMail && !plan.ownStorage) return {};
+  const names = [plan.ownMail && 'mail', plan.ownStorage && 'files'].filter(Boolean).join(' and ');
+  return steps.step(`starting the local stand-ins for ${names}`, async () => {
+    const [mail, storage] = await Promise.all([
+      plan.ownMail ? startMail(processes, { folder: local.mail, log: logFile('mail'), env: given, preferredPagePort: port + MAIL_PAGE_OFFSET }) : undefined,
+      plan.ownStorage ? startStorage(processes, { folder: local.s3, log: logFile('storage'), env: given }) : undefined,
+    ]);
+    return { mail, storage };
+  });
+}
+
 /** @param {{ port: number, mailPage?: string, showDemo: boolean }} up */
 function summary({ port, mailPage, showDemo }) {
   const lines = ['', `Carryover is at http://127.0.0.1:${port}`];
   if (mailPage) lines.push(`Mail that it sends: ${mailPage}`);
-  const signIns = showDemo ? demoSignIns() : [];
-  if (signIns.length > 0) {
-    const [roles, emails] = [signIns.map(({ role }) => role.length), signIns.map(({ email }) => email.length)].map((lengths) => Math.max(...lengths));
-    lines.push('', 'Sign in as', ...signIns.map(({ role, email, password }) => `  ${role.padEnd(roles)}   ${email.padEnd(emails)}   ${password}`));
+  if (showDemo) {
+    const people = demoSignIns();
+    const [roles, emails] = [people.map(({ role }) => role.length), people.map(({ email }) => email.length)].map((lengths) => Math.max(...lengths));
+    lines.push('', 'Sign in as', ...people.map(({ role, email, password }) => `  ${role.padEnd(roles)}   ${email.padEnd(emails)}   ${password}`));
   }
   return [...lines, '', `Logs are in ${local.log}. Ctrl-C stops everything.`];
 }
@@ -66,23 +84,8 @@ export function start({ development }) {
       const port = await webPort(given.PORT);
       const secrets = keptSecrets(local.secrets);
 
-      const database = plan.ownDatabase
-        ? await startPrivateDatabase(run, secrets)
-        : { ownerUrl: given.DATABASE_OWNER_URL, appUrl: given.DATABASE_URL };
-      const mail = plan.ownMail
-        ? await steps.step('starting the local mail service', async (say) => {
-            const started = await startMail(processes, { folder: local.mail, log: logFile('mail'), env: given, preferredPagePort: port + MAIL_PAGE_OFFSET });
-            say(started.page);
-            return started;
-          })
-        : undefined;
-      const storage = plan.ownStorage
-        ? await steps.step('starting the local file storage', async (say) => {
-            const started = await startStorage(processes, { folder: local.s3, log: logFile('storage'), env: given });
-            say(started.settings.S3_ENDPOINT);
-            return started;
-          })
-        : undefined;
+      const database = plan.ownDatabase ? await startPrivateDatabase(run, secrets) : { ownerUrl: given.DATABASE_OWNER_URL, appUrl: given.DATABASE_URL };
+      const { mail, storage } = await startStandIns(run, { plan, given, port });
       const env = appEnvironment(given, {
         mode: development ? 'development' : 'production',
         port,
@@ -91,7 +94,7 @@ export function start({ development }) {
         smtpUrl: mail?.smtpUrl,
         storage: storage?.settings,
       });
-      await steps.step('checking the environment', () => checkEnvironment(processes, env));
+      if (plan.anythingSet) await steps.step('checking the environment', () => checkEnvironment(processes, env));
       await steps.step('bringing the database up to date', () => migrate(database.ownerUrl));
       if (database.superuserUrl && (await isEmpty(database.superuserUrl))) {
         await steps.step('filling in the demo organisation', () => seed(processes, database.ownerUrl, env));
@@ -99,13 +102,15 @@ export function start({ development }) {
       if (!development && !isBuilt(DIST_DIR)) await steps.step('building the app', () => build(processes, DIST_DIR, env));
 
       const shown = (/** @type {string} */ name) => (development ? undefined : logFile(name));
-      const web = await steps.step(development ? 'starting the development server' : 'starting the web server', () =>
-        startWeb(processes, { command: development ? 'dev' : 'start', port, env, log: shown('web') }),
+      const [web, worker] = await steps.step(development ? 'starting the development server and the worker' : 'starting the web server and the worker', () =>
+        Promise.all([
+          startWeb(processes, { command: development ? 'dev' : 'start', port, env, log: shown('web') }),
+          startWorker(processes, { env, log: shown('worker') }),
+        ]),
       );
-      const worker = hasWorker() ? await steps.step('starting the worker', () => startWorker(processes, { env, log: shown('worker') })) : undefined;
       for (const line of summary({ port, mailPage: mail?.page, showDemo: plan.ownDatabase })) steps.line(line);
 
-      const services = { 'web server': web, worker, 'database server': database.child, 'mail service': mail?.child, 'file storage': storage?.child };
+      const services = { web, worker, postgres: database.child, mail: mail?.child, storage: storage?.child };
       return Promise.race([untilStopped(), firstToEnd(services, processes)]);
     },
     () => unlock(),
@@ -114,14 +119,14 @@ export function start({ development }) {
 
 /**
  * Fails as soon as one of the services ends by itself: half of Carryover helps nobody.
- * @param {Record<string, import('node:child_process').ChildProcess | undefined>} services
+ * @param {Record<string, import('node:child_process').ChildProcess | undefined>} services by the name of their log
  * @param {import('./processes.mjs').ProcessKeeper} processes
  * @returns {Promise<never>}
  */
 const firstToEnd = (services, processes) =>
   new Promise((_resolve, reject) => {
     for (const [name, child] of Object.entries(services)) {
-      const ended = () => processes.stopping || reject(new Problem(`The ${name} ended by itself.`, `Its log is in ${local.log}; start again with the same command.`));
+      const ended = () => processes.stopping || reject(new Problem(`The ${name} process ended by itself. Its log, ${logFile(name)}, ends:\n${lastLines(logFile(name))}`, 'Start again with the same command.'));
       if (child?.exitCode === null && child.signalCode === null) child.once('exit', ended);
       else if (child) ended();
     }

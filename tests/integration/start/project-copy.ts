@@ -21,9 +21,9 @@ export function copyProject() {
   return { folder, remove: () => rmSync(folder, { recursive: true, force: true }) };
 }
 
-const environment = (port: number) => {
+const environment = (port: number): NodeJS.ProcessEnv => {
   const own = Object.fromEntries(Object.entries(process.env).filter(([name]) => ![...SERVICES, 'CARRYOVER_ENV', 'NEXT_DIST_DIR', 'NODE_ENV'].includes(name)));
-  return { ...own, PORT: String(port) } as NodeJS.ProcessEnv;
+  return { NODE_ENV: undefined, ...own, PORT: String(port) };
 };
 
 export interface RunningStart {
