@@ -67,7 +67,7 @@ export function UnitPicker({ unit, sites, errors, values }: Props) {
           />
         </div>
       )}
-      {chosen === NEW && !exact && (
+      {wanted !== '' && chosen === NEW && !exact && (
         <div className="grid gap-4 border-l-4 border-rule pl-4 sm:grid-cols-2">
           <SelectField label="Site" name="siteId" options={sites.map(({ id, name }) => ({ value: id, label: name }))} defaultValue={values.siteId} error={errors['unit.siteId'] ?? errors.siteId} />
           <RadioGroup

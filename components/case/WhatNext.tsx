@@ -13,6 +13,9 @@ interface Props {
   onPick: (picked: Picked) => void;
 }
 
+/** A plan longer than this says that too little is known, not what to do. */
+const MOST_REPAIRS = 4;
+
 /** Other checks worth their time, what would settle it, and what would be repaired first as things stand. */
 export function WhatNext({ state, rulebook, readOnly, onPick }: Props) {
   const { suggestions, spoiled } = state.next;
@@ -66,13 +69,16 @@ export function WhatNext({ state, rulebook, readOnly, onPick }: Props) {
         <section aria-labelledby="repairs">
           <h2 id="repairs">If you repaired now, in this order</h2>
           <ol className="mt-2 ml-5 grid list-decimal gap-1">
-            {state.repairs.map(({ remedyId, name: remedy, p, lookMinutes, fixMinutes }) => (
+            {state.repairs.slice(0, MOST_REPAIRS).map(({ remedyId, name: remedy, p, lookMinutes, fixMinutes }) => (
               <li key={remedyId}>
                 {remedy}: <span className="figure">{percent(p)}</span> likely, <span className="figure">{minutesText(lookMinutes)}</span> to look
                 {fixMinutes > 0 && <>, <span className="figure">{minutesText(fixMinutes)}</span> to put right</>}
               </li>
             ))}
           </ol>
+          {state.repairs.length > MOST_REPAIRS && (
+            <p className="mt-1 text-[0.9375rem] text-ink-soft">Then {state.repairs.length - MOST_REPAIRS} more, each less likely for its cost. Another check may spare most of them.</p>
+          )}
         </section>
       )}
     </div>

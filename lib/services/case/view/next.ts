@@ -19,7 +19,7 @@ interface Asked {
 }
 
 /** More than this is a list to read, not a suggestion to take. */
-const MOST_SUGGESTIONS = 8;
+const MOST_SUGGESTIONS = 6;
 const MOST_SETTLING = 3;
 
 /** What to check next, what would settle it, and what would be repaired as things stand. */
