@@ -1,0 +1,34 @@
+/**
+ * `npm run bench`: how fast things are beside each other. Each line holds when the better end of the interval meets
+ * the limit. The exit code says whether all hold; times are for reading only.
+ */
+import { answers } from './answers';
+import { compare, type Ratio } from './compare';
+import { whatIfs } from './what-ifs';
+
+const shown = ({ median, low, high }: Ratio) => `${median.toFixed(2)} (${low.toFixed(2)} to ${high.toFixed(2)})`;
+const ms = ({ p50, p95 }: { p50: number; p95: number }) => `p50 ${p50.toFixed(2)} ms, p95 ${p95.toFixed(2)} ms`;
+
+let allHold = true;
+function report(name: string, ratio: Ratio, holds: boolean, limit: string) {
+  allHold &&= holds;
+  console.log(`${holds ? 'holds ' : 'FAILS '} ${name}: ${shown(ratio)}, ${limit}`);
+}
+
+{
+  const { a, b, about } = await whatIfs();
+  const measured = await compare({ a, b }, { pairs: 30, warmUp: 3 });
+  console.log(`\nWhat-ifs: ${about}\n  by the engine    ${ms(measured.a)}\n  by predicates    ${ms(measured.b)}`);
+  report('engine / predicates', measured.ratio, measured.ratio.high >= 50, 'at least 50');
+}
+
+{
+  const { a, b, about, close } = await answers();
+  const measured = await compare({ a, b }, { pairs: 60, warmUp: 10 });
+  await close();
+  console.log(`\nAn answer: ${about}\n  with its ranking ${ms(measured.a)}\n  insert and audit ${ms(measured.b)}`);
+  report('p50', measured.ratio, measured.ratio.low <= 4, 'at most 4');
+  report('p95', measured.ratioP95, measured.ratioP95.low <= 4, 'at most 4');
+}
+
+process.exit(allHold ? 0 : 1);
