@@ -63,9 +63,10 @@ export function divergenceBits(p: ArrayLike<number>, q: ArrayLike<number>): numb
 export function likelihoods(background: readonly number[], logWeights: readonly ArrayLike<number>[]): Float64Array[] {
   const causes = logWeights[0]?.length ?? 0;
   const table = background.map(() => new Float64Array(causes));
+  const logBackground = background.map(Math.log);
   const column = new Float64Array(background.length);
   for (let c = 0; c < causes; c += 1) {
-    for (let v = 0; v < column.length; v += 1) column[v] = Math.log(background[v]!) + logWeights[v]![c]!;
+    for (let v = 0; v < column.length; v += 1) column[v] = logBackground[v]! + logWeights[v]![c]!;
     const total = logSumExp(column);
     for (let v = 0; v < column.length; v += 1) table[v]![c] = Math.exp(column[v]! - total);
   }

@@ -85,7 +85,8 @@ export function repairProblemOf(compiled: CompiledRulebook, money: Partial<Repai
 export function nextChecks(open: OpenChecks, { vehicle = AS_PARKED, money = {} }: NextChecksOptions = {}): NextChecks {
   const { compiled, posterior } = open.whatIf;
   const rate = money.labourRatePerHour ?? compiled.settings.labourRatePerHour;
-  const candidates = [...singles(open, vehicle), ...betterPairs(open, vehicle)];
+  const alone = singles(open, vehicle);
+  const candidates = [...alone, ...betterPairs(open, vehicle, alone)];
   const problem = repairProblemOf(compiled, money);
   const savings = expectedSavings(problem, posterior, candidates.map(({ forecast }) => forecast));
   const entropyLeft = entropyBits(posterior);
@@ -97,8 +98,8 @@ export function nextChecks(open: OpenChecks, { vehicle = AS_PARKED, money = {} }
     cost: labourCost(Math.max(LEAST_MINUTES, candidate.minutes), rate),
   }));
   const valuable = judged.filter(({ word, saving, cost }) => word !== 'settles little' || saving > cost);
-  const alone = valuable.filter(({ checkIds }) => checkIds.length === 1).flatMap(({ checkIds }) => checkIds);
-  const suggestions = placeCandidates(judged, new Set(alone)).map(({ candidate, waitsFor }): Suggestion => ({
+  const worthWaitingFor = valuable.filter(({ checkIds }) => checkIds.length === 1).flatMap(({ checkIds }) => checkIds);
+  const suggestions = placeCandidates(judged, new Set(worthWaitingFor)).map(({ candidate, waitsFor }): Suggestion => ({
     checkIds: candidate.checkIds,
     ...panelOf(compiled, candidate.checkIds),
     bits: candidate.forecast.bits,
@@ -130,10 +131,10 @@ function singles({ whatIf, checks }: OpenChecks, vehicle: VehicleState): Priced[
 }
 
 /** Pairs that tell more per minute together than each of their checks alone; the others would only repeat those. */
-function betterPairs(open: OpenChecks, vehicle: VehicleState): Priced[] {
+function betterPairs(open: OpenChecks, vehicle: VehicleState, alone: readonly Priced[]): Priced[] {
   const { whatIf, checks } = open;
   const { setUpMinutes: table } = whatIf.compiled.settings;
-  const alone = new Map(singles(open, vehicle).map((single) => [single.checkIds[0], single.bitsPerMinute]));
+  const worth = new Map(alone.map(({ checkIds, bitsPerMinute }) => [checkIds[0], bitsPerMinute]));
   return openPairs(open).flatMap(({ checkIds: [a, b], forecast }) => {
     const [first, second] = [checks.get(a)?.check, checks.get(b)?.check];
     if (!first || !second) return [];
@@ -147,7 +148,7 @@ function betterPairs(open: OpenChecks, vehicle: VehicleState): Priced[] {
       .sort((x, y) => x.setUp - y.setUp);
     if (!best) return [];
     const pair = priced(best.both, forecast, best.setUp, checks);
-    return pair.bitsPerMinute > Math.max(alone.get(a) ?? 0, alone.get(b) ?? 0) ? [pair] : [];
+    return pair.bitsPerMinute > Math.max(worth.get(a) ?? 0, worth.get(b) ?? 0) ? [pair] : [];
   });
 }
 
