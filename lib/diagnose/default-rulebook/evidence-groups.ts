@@ -2,7 +2,7 @@ import type { EvidenceGroup } from '../types';
 
 /** Findings that tell the same story count less and less beside each other; a lower rho where they say the very same. */
 export const evidenceGroups: EvidenceGroup[] = [
-  { id: 'time-since-fit', name: 'Time since the fit', rho: 0.3 },
+  { id: 'time-since-fit', name: 'Time since the fit', rho: 0.1 },
   { id: 'onset', name: 'How it began' },
   { id: 'past-fits', name: 'Earlier compressors' },
   { id: 'practice', name: 'How it was fitted' },

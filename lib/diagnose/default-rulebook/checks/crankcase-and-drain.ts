@@ -3,6 +3,9 @@ import { inH2O, millilitres } from '../si';
 import type { Check } from '../../types';
 import { check, yesNo, WITH_THE_COMPRESSOR_OFF } from './check';
 
+/** What can't be seen or measured any more once the compressor and its gasket are off. */
+const SPOILED_BY_LIFTING_THE_COMPRESSOR = ['flange-leak', 'drain-flow', 'noise', 'head-temperature', 'build-up-time'];
+
 export const checks: Check[] = [
   check({
     id: 'sealant-at-gasket',
@@ -184,7 +187,7 @@ export const checks: Check[] = [
     tools: ['lamp or borescope', 'socket set'],
     minutes: 6,
     setUp: { engine: 'off', air: 'empty', access: ['compressor-off'] },
-    spoils: ['flange-leak', 'drain-flow', 'sealant-at-gasket', 'noise', 'head-temperature', 'build-up-time'],
+    spoils: SPOILED_BY_LIFTING_THE_COMPRESSOR,
     cautions: WITH_THE_COMPRESSOR_OFF,
     states: [
       { id: 'clear', label: 'Clear', background: 0.861 },
@@ -204,7 +207,7 @@ export const checks: Check[] = [
     tools: ['lamp', 'pick'],
     minutes: 5,
     setUp: { engine: 'off', air: 'empty', access: ['compressor-off'] },
-    spoils: ['flange-leak', 'drain-flow', 'sealant-at-gasket', 'noise', 'head-temperature', 'build-up-time'],
+    spoils: SPOILED_BY_LIFTING_THE_COMPRESSOR,
     cautions: WITH_THE_COMPRESSOR_OFF,
     states: yesNo(0.077),
     cannotTell: 0.02,
@@ -220,7 +223,6 @@ export const checks: Check[] = [
     tools: ['drip tray', 'measuring jug', 'socket set'],
     minutes: 8,
     setUp: { engine: 'off', access: ['panels-off'] },
-    spoils: ['drain-flow'],
     cautions: ['hot-parts', 'belts-fan-gears'],
     states: yesNo(0.148),
     cannotTell: 0.2,

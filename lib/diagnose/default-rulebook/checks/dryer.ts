@@ -67,7 +67,6 @@ export const checks: Check[] = [
     steps: ['Judge what one purge and one tank drain bring, against the reference pictures.'],
     tools: ['white card', 'clear jar'],
     minutes: 2,
-    setUp: { air: 'full' },
     cautions: ['oil-mist-and-noise', 'vehicle-rolls'],
     states: [
       { id: 'film', label: 'None, or a film or a few drops', background: 0.32 },
@@ -87,7 +86,6 @@ export const checks: Check[] = [
     steps: ['Collect a spoonful in a clear jar and hold it to the light.', 'Rub it, smell it, compare it with the reference pictures.'],
     tools: ['clear jar', 'lamp'],
     minutes: 2,
-    setUp: { air: 'full' },
     cautions: ['oil-mist-and-noise', 'vehicle-rolls'],
     states: [
       { id: 'clean', label: 'Like the oil in the engine', background: 0.448 },
@@ -227,7 +225,7 @@ export const checks: Check[] = [
     tools: ['strap wrench', 'lamp'],
     minutes: 10,
     setUp: { engine: 'off', air: 'empty' },
-    spoils: ['oil-caught', 'oil-at-purge', 'dryer-pressure-drop', 'purge-at-cut-out'],
+    spoils: ['oil-caught', 'dryer-pressure-drop', 'purge-at-cut-out'],
     cautions: ['stored-air', 'pressure-falls-suspension-brakes', 'vehicle-rolls'],
     states: [
       { id: 'dry', label: 'Dry, or a trace of oil', background: 0.332 },

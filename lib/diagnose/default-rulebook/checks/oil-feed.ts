@@ -17,7 +17,6 @@ export const checks: Check[] = [
     tools: ['line wrenches', 'lamp', 'drip tray'],
     minutes: 8,
     setUp: { engine: 'off' },
-    spoils: ['oil-pressure-at-feed'],
     cautions: ['hot-parts', 'belts-fan-gears'],
     states: [
       { id: 'open', label: 'Open and sound', background: 0.933 },

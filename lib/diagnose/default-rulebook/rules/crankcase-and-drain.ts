@@ -1,4 +1,4 @@
-import { judgement } from '../basis';
+import { judgement, weighedPractice } from '../basis';
 import { inH2O, millilitres } from '../si';
 import type { Rule } from '../../types';
 import { answer, band, others } from './rule';
@@ -10,7 +10,7 @@ export const rules: Rule[] = [
     weights: { 'oil-feed-restricted': -1, 'drain-choked-by-sealant': -11 },
     group: 'drain',
     note: 'No sealant went on the gasket.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'sealant-at-gasket: thin-film',
@@ -18,7 +18,7 @@ export const rules: Rule[] = [
     weights: { 'rings-not-seated': 1, 'oil-feed-restricted': -1 },
     group: 'drain',
     note: 'A thin film has nothing to squeeze into the drain.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'sealant-at-gasket: spray-adhesive',
@@ -28,7 +28,7 @@ export const rules: Rule[] = [
     },
     group: 'drain',
     note: 'Spray adhesive can’t close a drain.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'sealant-at-gasket: heavy-bead',
@@ -39,7 +39,7 @@ export const rules: Rule[] = [
     },
     group: 'drain',
     note: 'A heavy bead squeezes into the drain, and oil can’t leave.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'drain-opening: small-hole',
@@ -47,7 +47,7 @@ export const rules: Rule[] = [
     weights: { 'drain-choked-by-sealant': 3.5, 'drain-restricted': 1.5 },
     group: 'drain',
     note: 'A small drain hole closes with a little sealant.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'external-drain: falls-freely',

@@ -1,4 +1,4 @@
-import { judgement } from '../basis';
+import { judgement, weighedBuildUp, weighedPractice } from '../basis';
 import { kelvins, seconds } from '../si';
 import type { Rule } from '../../types';
 import { answer, band, others } from './rule';
@@ -58,7 +58,7 @@ export const rules: Rule[] = [
     },
     group: 'complaint-of-air',
     note: 'Build-up is within its limit: nothing much is lost, held back or starved.',
-    ...judgement,
+    ...weighedBuildUp,
   },
   {
     name: 'build-up-time: slow',
@@ -71,7 +71,7 @@ export const rules: Rule[] = [
     },
     group: 'complaint-of-air',
     note: 'Build-up is over 25 s: air is lost, held back or never drawn in.',
-    ...judgement,
+    ...weighedBuildUp,
   },
   {
     name: 'build-up-time: very-slow',
@@ -87,7 +87,7 @@ export const rules: Rule[] = [
     },
     group: 'complaint-of-air',
     note: 'Build-up is far over its limit: air is lost, held back or never drawn in.',
-    ...judgement,
+    ...weighedBuildUp,
   },
   {
     name: 'blow-back-at-intake: yes',
@@ -153,7 +153,7 @@ export const rules: Rule[] = [
     },
     group: 'restriction',
     note: 'The safety valve at the head has lifted: the air couldn’t leave.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'coolant-in-wet-tank: yes',

@@ -1,4 +1,4 @@
-import { judgement } from '../basis';
+import { judgement, weighedPractice } from '../basis';
 import { mm, psi } from '../si';
 import type { Rule } from '../../types';
 import { answer, band, others } from './rule';
@@ -103,7 +103,7 @@ export const rules: Rule[] = [
     },
     group: 'restriction',
     note: 'The line is clean inside.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'carbon-in-line: soft',
@@ -115,7 +115,7 @@ export const rules: Rule[] = [
     },
     group: 'restriction',
     note: 'Soft soot in the line: oil has come this way.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'carbon-in-line: hard-layers',
@@ -128,7 +128,7 @@ export const rules: Rule[] = [
     },
     group: 'restriction',
     note: 'Layers of baked oil have closed the line.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'line-bore: under-6',
@@ -140,7 +140,7 @@ export const rules: Rule[] = [
     },
     group: 'restriction',
     note: 'The line is down to a fraction of its bore: it passes air at idle, and holds it back at delivery.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'line-bore: 6-to-10',
@@ -152,7 +152,7 @@ export const rules: Rule[] = [
     },
     group: 'restriction',
     note: 'The line has lost much of its bore.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'line-bore: 10-to-13',
@@ -163,7 +163,7 @@ export const rules: Rule[] = [
     },
     group: 'restriction',
     note: 'The line has lost a little of its bore.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'line-bore: open',
@@ -171,6 +171,6 @@ export const rules: Rule[] = [
     weights: { 'dryer-overdue': 0.6, 'discharge-line-carboned': -14 },
     group: 'restriction',
     note: 'The line has its bore.',
-    ...judgement,
+    ...weighedPractice,
   },
 ];

@@ -1,4 +1,4 @@
-import { judgement } from '../basis';
+import { judgement, weighedPractice } from '../basis';
 import type { Rule } from '../../types';
 import { answer, others } from './rule';
 
@@ -59,7 +59,7 @@ export const rules: Rule[] = [
     weights: { 'drive-gear-failed': 5 },
     group: 'drive',
     note: 'The rim of a fibre gear can let go of its hub.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'drive-gear-reused: yes',
@@ -67,7 +67,7 @@ export const rules: Rule[] = [
     weights: { 'drive-gear-failed': 2.5 },
     group: 'drive',
     note: 'The gear of the compressor before was used again.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'drive-gear-state: worn-or-chipped',

@@ -1,4 +1,4 @@
-import { judgement } from '../basis';
+import { judgement, weighedMemory, weighedPractice } from '../basis';
 import { inH2O, miles } from '../si';
 import type { Rule } from '../../types';
 import { answer, band, others } from './rule';
@@ -26,7 +26,7 @@ export const rules: Rule[] = [
     },
     group: 'intake',
     note: 'The filter is nearly new.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'intake-filter-age: 10000-to-20000',
@@ -34,7 +34,7 @@ export const rules: Rule[] = [
     weights: { 'intake-filter-clogged': -7.5 },
     group: 'intake',
     note: 'The filter is within its 20,000 miles.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'intake-filter-age: 20000-to-40000',
@@ -42,7 +42,7 @@ export const rules: Rule[] = [
     weights: { 'intake-dirt-ingested': 1, 'oil-in-intake-air': -1, 'normal-carryover': -1 },
     group: 'intake',
     note: 'The filter is past its 20,000 miles.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'intake-filter-age: over-40000',
@@ -53,7 +53,7 @@ export const rules: Rule[] = [
     },
     group: 'intake',
     note: 'The filter has run more than twice its 20,000 miles.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'intake-filter-state: clean',
@@ -96,7 +96,7 @@ export const rules: Rule[] = [
     },
     group: 'intake',
     note: 'The filter is wet with oil: oil reaches the compressor with its air.',
-    ...judgement,
+    ...weighedMemory,
   },
   {
     name: 'intake-vacuum: open',
@@ -104,7 +104,7 @@ export const rules: Rule[] = [
     weights: { 'intake-filter-clogged': -13.2 },
     group: 'intake',
     note: 'The intake breathes freely: no vacuum draws oil up.',
-    ...judgement,
+    ...weighedMemory,
   },
   {
     name: 'intake-vacuum: raised',
@@ -115,7 +115,7 @@ export const rules: Rule[] = [
     },
     group: 'intake',
     note: 'The intake vacuum is higher than it should be.',
-    ...judgement,
+    ...weighedMemory,
   },
   {
     name: 'intake-vacuum: restricted',
@@ -127,7 +127,7 @@ export const rules: Rule[] = [
     },
     group: 'intake',
     note: 'The intake pulls a vacuum that draws oil up past the rings.',
-    ...judgement,
+    ...weighedMemory,
   },
   {
     name: 'intake-hose-state: sound',

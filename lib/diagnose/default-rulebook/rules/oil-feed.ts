@@ -1,4 +1,4 @@
-import { judgement } from '../basis';
+import { judgement, weighedMemory } from '../basis';
 import { miles, psi } from '../si';
 import type { Rule } from '../../types';
 import { answer, band, others } from './rule';
@@ -35,7 +35,7 @@ export const rules: Rule[] = [
     },
     group: 'feed-and-bearings',
     note: 'Hardly any oil pressure reaches the bearings at idle.',
-    ...judgement,
+    ...weighedMemory,
   },
   {
     name: 'oil-pressure-at-feed: low',
@@ -46,7 +46,7 @@ export const rules: Rule[] = [
     },
     group: 'feed-and-bearings',
     note: 'Oil pressure at the feed is under the 15 psi that bearings need.',
-    ...judgement,
+    ...weighedMemory,
   },
   {
     name: 'oil-pressure-at-feed: enough',
@@ -54,7 +54,7 @@ export const rules: Rule[] = [
     weights: { 'oil-feed-restricted': -11 },
     group: 'feed-and-bearings',
     note: 'The bearings get their oil pressure.',
-    ...judgement,
+    ...weighedMemory,
   },
   {
     name: 'oil-service-age: under-15000',

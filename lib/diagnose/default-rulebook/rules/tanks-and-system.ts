@@ -1,4 +1,4 @@
-import { judgement } from '../basis';
+import { judgement, weighedManual, weighedMemory } from '../basis';
 import { perHour, percent, psiPerMinute } from '../si';
 import type { Rule } from '../../types';
 import { answer, band, others } from './rule';
@@ -67,7 +67,7 @@ export const rules: Rule[] = [
     weights: { 'rings-worn': 0.5, 'system-leaks': -15.5 },
     group: 'leaks',
     note: 'The leak-down is within its limit: leaks don’t keep it loaded.',
-    ...judgement,
+    ...weighedManual,
   },
   {
     name: 'leak-down-released: 2-to-3',
@@ -75,7 +75,7 @@ export const rules: Rule[] = [
     weights: { 'purge-or-check-valve-leaking': 2.5, 'demand-too-high': -0.5, 'normal-carryover': -1 },
     group: 'leaks',
     note: 'The leak-down is over the limit for a single vehicle, within it for a combination.',
-    ...judgement,
+    ...weighedManual,
   },
   {
     name: 'leak-down-released: 3-to-6',
@@ -86,7 +86,7 @@ export const rules: Rule[] = [
     },
     group: 'leaks',
     note: 'The leak-down is over its limit: what is lost must be pumped again.',
-    ...judgement,
+    ...weighedManual,
   },
   {
     name: 'leak-down-released: over-6',
@@ -97,7 +97,7 @@ export const rules: Rule[] = [
     },
     group: 'leaks',
     note: 'The leak-down is far over its limit: the compressor never rests.',
-    ...judgement,
+    ...weighedManual,
   },
   {
     name: 'leak-down-applied: 3-to-4',
@@ -105,7 +105,7 @@ export const rules: Rule[] = [
     weights: { 'purge-or-check-valve-leaking': 2.5, 'system-leaks': 2, 'rings-worn': -1, 'normal-carryover': -1 },
     group: 'leaks',
     note: 'The leak-down with brakes applied is over the limit for a single vehicle, within it for a combination.',
-    ...judgement,
+    ...weighedManual,
   },
   {
     name: 'leak-down-applied: 4-to-7',
@@ -116,7 +116,7 @@ export const rules: Rule[] = [
     },
     group: 'leaks',
     note: 'Air leaks while the brakes are applied.',
-    ...judgement,
+    ...weighedManual,
   },
   {
     name: 'leak-down-applied: over-7',
@@ -127,7 +127,7 @@ export const rules: Rule[] = [
     },
     group: 'leaks',
     note: 'Much air leaks while the brakes are applied.',
-    ...judgement,
+    ...weighedManual,
   },
   {
     name: 'audible-leak: yes',
@@ -153,7 +153,7 @@ export const rules: Rule[] = [
     },
     group: 'duty',
     note: 'It rests three quarters of the time.',
-    ...judgement,
+    ...weighedMemory,
   },
   {
     name: 'share-loaded: 25-to-50',
@@ -164,7 +164,7 @@ export const rules: Rule[] = [
     },
     group: 'duty',
     note: 'It is loaded more than a quarter of the time.',
-    ...judgement,
+    ...weighedMemory,
   },
   {
     name: 'share-loaded: 50-to-75',
@@ -180,7 +180,7 @@ export const rules: Rule[] = [
     },
     group: 'duty',
     note: 'It is loaded more than half of the time: leaks, demand or a fault that never lets it rest.',
-    ...judgement,
+    ...weighedMemory,
   },
   {
     name: 'share-loaded: over-75',
@@ -196,7 +196,7 @@ export const rules: Rule[] = [
     },
     group: 'duty',
     note: 'It hardly ever rests: leaks, demand, governor or unloader.',
-    ...judgement,
+    ...weighedMemory,
   },
   {
     name: 'cycles-parked: under-6',

@@ -1,4 +1,4 @@
-import { judgement } from '../basis';
+import { judgement, weighedCutIn, weighedManual, weighedPractice } from '../basis';
 import { psi } from '../si';
 import type { Rule } from '../../types';
 import { answer, band, others } from './rule';
@@ -15,7 +15,7 @@ export const rules: Rule[] = [
     },
     group: 'governor',
     note: 'It cuts out too early, or never gets that far.',
-    ...judgement,
+    ...weighedManual,
   },
   {
     name: 'cut-out-pressure: high',
@@ -28,7 +28,7 @@ export const rules: Rule[] = [
     },
     group: 'governor',
     note: 'It cuts out too late: the compressor works against more than it should.',
-    ...judgement,
+    ...weighedManual,
   },
   {
     name: 'cut-in-pressure: under-85',
@@ -39,7 +39,7 @@ export const rules: Rule[] = [
     },
     group: 'governor',
     note: 'It cuts in far too late, or the governor sticks.',
-    ...judgement,
+    ...weighedCutIn,
   },
   {
     name: 'cut-in-pressure: 85-to-100',
@@ -47,7 +47,7 @@ export const rules: Rule[] = [
     weights: { 'governor-faulty': 3.5, 'unloader-stuck': 1, 'rings-worn': -1, 'normal-carryover': -1.5 },
     group: 'governor',
     note: 'It cuts in below 100 psi: late for a truck, in order for a bus.',
-    ...judgement,
+    ...weighedCutIn,
   },
   {
     name: 'governor-span: narrow',
@@ -58,7 +58,7 @@ export const rules: Rule[] = [
     },
     group: 'governor',
     note: 'Cut-in and cut-out lie too close: it loads and unloads all day.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'governor-span: wide',
@@ -69,7 +69,7 @@ export const rules: Rule[] = [
     },
     group: 'governor',
     note: 'Cut-in and cut-out lie too far apart: the governor sticks.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'unloads-at-cut-out: keeps-pumping',
@@ -112,7 +112,7 @@ export const rules: Rule[] = [
     weights: { ...others(-4.5), 'governor-faulty': 10.5, 'unloader-stuck': 10, 'normal-carryover': -9 },
     group: 'governor',
     note: 'The wet tank’s safety valve has lifted: nothing stopped the compressor in time.',
-    ...judgement,
+    ...weighedManual,
   },
   {
     name: 'unloader-o-rings: worn',

@@ -1,4 +1,4 @@
-import { judgement } from '../basis';
+import { judgement, weighedPractice } from '../basis';
 import { celsius, hours, miles } from '../si';
 import type { Rule } from '../../types';
 import { answer, band, others } from './rule';
@@ -451,7 +451,7 @@ export const rules: Rule[] = [
     weights: { 'rings-not-seated': -8.5 },
     group: 'practice',
     note: 'It was run in under load: its rings had their chance to seat.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'break-in-run: not-done',
@@ -459,7 +459,7 @@ export const rules: Rule[] = [
     weights: { 'drain-choked-by-sealant': 1, 'crank-or-bearing-failed': 0.5 },
     group: 'practice',
     note: 'It was never run in under load: its rings may never have seated.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'previous-fits: none',
@@ -544,7 +544,7 @@ export const rules: Rule[] = [
     weights: { 'rings-not-seated': 1, 'discharge-line-carboned': -7 },
     group: 'practice',
     note: 'The line is as new as the compressor: it hasn’t had time to close.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'governor-changed: no',
@@ -552,7 +552,7 @@ export const rules: Rule[] = [
     weights: { 'unloader-stuck': 0.5 },
     group: 'practice',
     note: 'The old governor was kept.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'governor-changed: yes',
@@ -560,7 +560,7 @@ export const rules: Rule[] = [
     weights: { 'governor-faulty': -5.5 },
     group: 'practice',
     note: 'The governor is as new as the compressor.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'feed-line-changed: yes',
@@ -568,7 +568,7 @@ export const rules: Rule[] = [
     weights: { 'crank-or-bearing-failed': -2, 'oil-feed-restricted': -5 },
     group: 'practice',
     note: 'The feed line is as new as the compressor.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'intake-hose-changed: yes',
@@ -592,7 +592,7 @@ export const rules: Rule[] = [
     weights: { 'normal-carryover': -1.5, 'dryer-overdue': -2 },
     group: 'practice',
     note: 'Old oil was cleaned out: what appears now is new.',
-    ...judgement,
+    ...weighedPractice,
   },
   {
     name: 'work-oil-service: yes',
