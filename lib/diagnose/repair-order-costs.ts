@@ -101,7 +101,8 @@ export function planCosts({ actions, left }: RepairProblem, order: readonly numb
     spent += action.onReaching;
     for (const c of action.removes) if (Number.isNaN(costs[c])) costs[c] = spent + action.onRemoving;
   }
-  return costs.map((cost, c) => (Number.isNaN(cost) ? spent + left[c]! : cost));
+  for (let c = 0; c < costs.length; c += 1) if (Number.isNaN(costs[c])) costs[c] = spent + left[c]!;
+  return costs;
 }
 
 /**

@@ -34,7 +34,8 @@ const OUT = 2;
  */
 export function bestSet(row: Row, tryAllUpTo: number): { inSet: boolean[]; proved: boolean } {
   const verdict = settleByMargins(row);
-  const open = [...verdict.keys()].filter((i) => verdict[i] === OPEN);
+  const open: number[] = [];
+  verdict.forEach((v, i) => v === OPEN && open.push(i));
   const setWith = (chosen: (bit: number) => boolean): boolean[] => {
     const inSet = Array.from(verdict, (v) => v === IN);
     open.forEach((i, bit) => (inSet[i] = chosen(bit)));
