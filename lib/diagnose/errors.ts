@@ -26,6 +26,7 @@ export type FindingErrorCode =
   | 'unknown-check'
   | 'unknown-state'
   | 'out-of-range'
+  | 'bad-error'
   | 'wrong-kind'
   | 'bad-shares'
   | 'bad-reliability'

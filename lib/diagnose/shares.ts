@@ -34,7 +34,7 @@ function bandShares({ id, check }: CompiledCheck, value: number, error: number):
     throw new FindingError('out-of-range', id, `${value} is out of the range of "${id}", ${min} to ${max}`);
   }
   if (!Number.isFinite(error) || error < 0) {
-    throw new FindingError('out-of-range', id, `the error of "${id}" is ${error}; it must be 0 or more`);
+    throw new FindingError('bad-error', id, `the error of "${id}" is ${error}; it must be 0 or more`);
   }
   const overlaps = check.states.map(({ id: state, low = -Infinity, high = Infinity }) => ({
     state,
