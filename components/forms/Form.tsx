@@ -21,7 +21,7 @@ interface Props {
 /** The frame of a form: what stopped it at its head, then its fields. */
 export function Form({ form, children, saved, errorTitle, label, className }: Props) {
   return (
-    <form action={form.submit} noValidate aria-label={label} className={classes('grid max-w-prose gap-6', className)}>
+    <form action={form.submit} noValidate aria-label={label} className={classes('grid max-w-prose gap-6 sm:[&>button]:justify-self-start', className)}>
       <FormErrorSummary errors={form.errors} formError={form.message} title={errorTitle} />
       {form.saved && saved && <Notice kind="saved">{saved}</Notice>}
       <Fragment key={form.attempt}>{children}</Fragment>

@@ -17,12 +17,15 @@ interface Props {
   searchParams: Promise<Record<string, string | string[] | undefined>>;
 }
 
-const instant = new Intl.DateTimeFormat('en', { dateStyle: 'medium', timeStyle: 'medium', timeZone: 'UTC' });
+const instant = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium', timeStyle: 'medium', timeZone: 'UTC' });
 
-/** "roles: technician, engineer" and so on: what a row was changed to. */
-const inWords = (changed: Record<string, unknown>) =>
+const inWords = (value: unknown): string =>
+  typeof value === 'string' ? value : Array.isArray(value) && value.every((item) => typeof item === 'string') ? value.join(', ') : JSON.stringify(value);
+
+/** "roles: technician, engineer; siteId: …": what a row was changed to. */
+const changesInWords = (changed: Record<string, unknown>) =>
   Object.entries(changed)
-    .map(([field, value]) => `${field}: ${typeof value === 'string' ? value : JSON.stringify(value)}`)
+    .map(([field, value]) => `${field}: ${inWords(value)}`)
     .join('; ');
 
 export default async function AuditPage({ searchParams }: Props) {
@@ -54,7 +57,7 @@ export default async function AuditPage({ searchParams }: Props) {
             { key: 'who', header: 'Who', cell: ({ personName }) => personName ?? 'Carryover itself' },
             { key: 'action', header: 'Did', cell: ({ action }) => action, rowHeader: true },
             { key: 'what', header: 'To what', cell: ({ entity, entityId }) => <>{entity} <span className="figure text-sm text-ink-soft">{entityId}</span></> },
-            { key: 'changed', header: 'Changed', cell: ({ changed }) => <span className="text-[0.9375rem] wrap-anywhere">{inWords(changed)}</span> },
+            { key: 'changed', header: 'Changed', cell: ({ changed }) => <span className="text-[0.9375rem] wrap-anywhere">{changesInWords(changed)}</span> },
           ]}
         />
         <Pager label="Pages of the audit" page={page} pageCount={pageCount} total={total} hrefFor={hrefFor} />

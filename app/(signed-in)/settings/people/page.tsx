@@ -14,7 +14,7 @@ import { sendInvitationAgain, takeInvitationBack } from './actions';
 export const metadata: Metadata = { title: 'People' };
 
 const list = new Intl.ListFormat('en', { type: 'unit' });
-const day = new Intl.DateTimeFormat('en', { dateStyle: 'medium' });
+const day = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium' });
 
 export default async function PeoplePage() {
   const ctx = await pageContext(PERMITTED['people.manage']);

@@ -1,0 +1,35 @@
+import * as schema from '@/db/schema';
+import type { Transaction } from '@/db/connect';
+import type { Rulebook } from '@/lib/diagnose/types';
+import { newId } from '@/lib/ids';
+
+const AT = new Date('2026-03-02T09:00:00Z');
+/** Whatever it says: nothing reads it here. */
+const NO_RULEBOOK = {} as Rulebook;
+
+/** One row in every table that belongs to an organisation; organisation, site, person and membership are there. */
+export async function insertOneRowEach(tx: Transaction, { organisationId, siteId, personId }: { organisationId: string; siteId: string; personId: string }) {
+  const [unitId, modelId, fitId, editionId, caseId, findingId] = [newId(), newId(), newId(), newId(), newId(), newId()];
+  const of = { organisationId };
+  await tx.insert(schema.invitation).values({ ...of, id: newId(), roles: ['technician'], expiresAt: AT, invitedBy: personId });
+  await tx.insert(schema.compressorModel).values({ ...of, id: modelId, name: 'Model' });
+  await tx.insert(schema.unit).values({ ...of, id: unitId, siteId, fleetNumber: '1', country: 'US', vehicleKind: 'truck' });
+  await tx.insert(schema.unitReading).values({ ...of, id: newId(), unitId, readOn: '2026-03-02', source: 'unit' });
+  await tx.insert(schema.fit).values({ ...of, id: fitId, unitId, modelId, condition: 'new', installedOn: '2026-01-02' });
+  await tx.insert(schema.edition).values({ ...of, id: editionId, number: 1, rulebook: NO_RULEBOOK, reason: 'Test', publishedAt: AT });
+  await tx.insert(schema.cases).values({ ...of, id: caseId, number: 1, unitId, siteId, fitId, editionId, complaints: ['oil'], openedBy: personId, openedAt: AT });
+  await tx.insert(schema.caseEvent).values({ ...of, id: newId(), caseId, kind: 'opened', personId, at: AT });
+  await tx.insert(schema.call).values({ ...of, id: newId(), caseId, mainCause: 'cause', contributingCauses: [], sureness: 'sure', personId, at: AT });
+  await tx.insert(schema.finding).values({
+    ...of, id: findingId, caseId, checkId: 'check', stage: { kind: 'diagnosis' }, source: 'asked', askedBecause: 'choice', kind: 'skip',
+    shares: [], reliability: 1, personId, deviceAt: AT, clockOffsetMs: 0, correctedAt: AT, receivedAt: AT,
+  });
+  await tx.insert(schema.findingNote).values({ ...of, id: newId(), findingId, caseId, text: 'Words', personId });
+  await tx.insert(schema.cautionAcknowledgement).values({ ...of, id: newId(), caseId, cautionId: 'caution', personId, onDay: '2026-03-02', dangers: [], at: AT });
+  await tx.insert(schema.run).values({
+    ...of, id: newId(), caseId, editionId, rankerVersion: '1', inputs: {} as never, result: {} as never, agreed: true, durationMs: 1, at: AT,
+  });
+  await tx.insert(schema.attachment).values({ ...of, id: newId(), ownerKind: 'case', ownerId: caseId, objectKey: 'key', mediaType: 'image/jpeg', bytes: 1, personId });
+  await tx.insert(schema.removal).values({ ...of, id: newId(), entity: 'unit', entityId: unitId, kind: 'hide', reason: 'Test', personId, at: AT });
+  await tx.insert(schema.audit).values({ ...of, id: newId(), action: 'test', entity: 'unit', entityId: unitId, changed: {} });
+}

@@ -1,0 +1,35 @@
+import { Browser } from './next-request';
+import { openTestDatabases, type TestDatabases } from './context';
+
+/** Points the application at this file's own database, as its environment would. Before anything of it runs. */
+export async function openApplication({ url = 'http://carryover.test' } = {}): Promise<TestDatabases> {
+  const databases = await openTestDatabases();
+  Object.assign(process.env, {
+    DATABASE_URL: databases.appUrl,
+    NEXTAUTH_URL: url,
+    NEXTAUTH_SECRET: 'a secret for tests alone, of no use anywhere',
+    SMTP_URL: 'smtp://127.0.0.1:9',
+    MAIL_FROM: 'Carryover <carryover@carryover.test>',
+    S3_ENDPOINT: 'http://127.0.0.1:9',
+    S3_BUCKET: 'carryover',
+    S3_ACCESS_KEY: 'tests',
+    S3_SECRET_KEY: 'tests',
+    LOG_LEVEL: 'silent',
+  });
+  return {
+    ...databases,
+    async close() {
+      await globalThis.carryoverConnection?.close();
+      await databases.close();
+    },
+  };
+}
+
+/** Signs in through the form's own action. */
+export async function signInAs(email: string, password: string): Promise<Browser> {
+  const browser = new Browser();
+  const { enter } = await import('@/lib/auth/enter');
+  const { getVisitor } = await import('@/lib/auth/visitor');
+  await browser.act('/sign-in', async () => enter({ visitor: await getVisitor(), input: { email, password } }));
+  return browser;
+}
