@@ -31,11 +31,11 @@ export async function runCommand(runFolder, work, afterwards = () => undefined) 
   };
   const failed = (/** @type {unknown} */ error) => {
     if (processes.stopping) return STOPPED_EARLY;
-    steps.line();
+    steps.breakOff();
     console.error(explain(error, root));
     return 1;
   };
-  const code = await Promise.race([work({ processes, steps, untilStopped }).catch(failed), stopped]);
+  const code = await Promise.race([work({ processes, steps, untilStopped }).catch(failed), stopped.finally(() => steps.line('Stopping.'))]);
   await processes.stopAll();
   afterwards();
   process.exit(code);

@@ -29,10 +29,15 @@ export function stepPrinter(out = process.stdout) {
       open = false;
       return result;
     },
+    /** Ends the line of a step that didn't come to its end. */
+    breakOff() {
+      if (open) out.write('\n');
+      open = false;
+    },
     /** @param {string} [text] */
     line(text = '') {
-      out.write(`${open ? '\n' : ''}${text}\n`);
-      open = false;
+      this.breakOff();
+      out.write(`${text}\n`);
     },
   };
 }

@@ -23,7 +23,8 @@ export function copyProject() {
 
 const environment = (port: number): NodeJS.ProcessEnv => {
   const own = Object.fromEntries(Object.entries(process.env).filter(([name]) => ![...SERVICES, 'CARRYOVER_ENV', 'NEXT_DIST_DIR', 'NODE_ENV'].includes(name)));
-  return { NODE_ENV: undefined, ...own, PORT: String(port) };
+  // Development packages are installed all the same.
+  return { ...own, NODE_ENV: 'production', PORT: String(port) };
 };
 
 export interface RunningStart {
