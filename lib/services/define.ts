@@ -5,6 +5,7 @@ import { hasAnyRole, type Role } from '@/lib/auth/roles';
 import { forbidden, invalid } from '@/lib/errors';
 import type { Ctx } from './context';
 import { fieldErrors } from './field-errors';
+import { refuseUnkeepable } from './unkeepable';
 
 export interface Work<Input, Prepared = undefined> {
   tx: Transaction;
@@ -54,6 +55,7 @@ function define<Schema extends z.ZodType, Result, Prepared>(
 ): Service<Schema, Result> {
   const service = async ({ ctx, input }: { ctx: Ctx; input: z.input<Schema> }) => {
     if (!hasAnyRole(ctx.roles, roles)) throw forbidden(doing);
+    refuseUnkeepable(input);
     const parsed = schema.safeParse(input);
     if (!parsed.success) throw invalid(fieldErrors(parsed.error));
     // Without a `prepare` nothing is prepared, and its type is undefined.

@@ -6,7 +6,7 @@ import { PageHeader } from '@/components/ui/PageHeader';
 import { Pager } from '@/components/ui/Pager';
 import { SelectField } from '@/components/ui/SelectField';
 import { TextField } from '@/components/ui/TextField';
-import { pageContext } from '@/lib/auth/page';
+import { orNotFound, pageContext } from '@/lib/auth/page';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { auditQuery } from '@/lib/schemas/person';
 import { listAudit } from '@/lib/services/audit/list';
@@ -33,7 +33,7 @@ export default async function AuditPage({ searchParams }: Props) {
   const query = await searchParams;
   const asked = { ...query, page: query.page };
   const { page: _page, ...filter } = auditQuery.parse(asked);
-  const { rows, total, page, pageCount, people, entities } = await listAudit({ ctx, input: asked });
+  const { rows, total, page, pageCount, people, entities } = await orNotFound(listAudit({ ctx, input: asked }));
   const set = Object.entries(filter).filter((entry): entry is [string, string] => entry[1] !== null);
   const hrefFor = (to: number) => `/settings/audit?${new URLSearchParams([...set, ['page', String(to)]])}`;
   return (
