@@ -1,11 +1,21 @@
 import { rank, type CompiledCheck, type Finding } from '@/lib/diagnose';
-import { pickIndex, sample, seededRandom } from '../support/prng';
+import { seededRandom, type Random } from '../support/random';
 import { compiled } from './findings';
 
 const allChecks: readonly CompiledCheck[] = [...compiled.checks.values()];
 
+/** An index with the chances given, which sum to 1. */
+function pickIndex(random: Random, chances: readonly number[]): number {
+  let left = random.unit();
+  const index = chances.findIndex((chance) => {
+    left -= chance;
+    return left < 0;
+  });
+  return index < 0 ? chances.length - 1 : index;
+}
+
 /** A case drawn from a cause's own tables: each check answered, by itself, with chance b_v e^{w_cv} for answer v. */
-function drawn(random: () => number, cause: number, checks: readonly CompiledCheck[]): Finding[] {
+function drawn(random: Random, cause: number, checks: readonly CompiledCheck[]): Finding[] {
   return checks.map((check) => {
     const chances = check.backgrounds.map((background, state) => background * Math.exp(check.table[state]?.[cause] ?? 0));
     const state = check.stateIds[pickIndex(random, chances)] ?? '';
@@ -32,7 +42,7 @@ export function drawAndRank(draws: number, checksAnswered = allChecks.length): D
     let first = 0;
     let firstThree = 0;
     for (let draw = 0; draw < draws; draw += 1) {
-      const checks = checksAnswered < allChecks.length ? sample(random, allChecks, checksAnswered) : allChecks;
+      const checks = checksAnswered < allChecks.length ? random.shuffle(allChecks).slice(0, checksAnswered) : allChecks;
       const place = rank(compiled, drawn(random, index, checks)).causes.findIndex(({ causeId }) => causeId === cause);
       if (place === 0) first += 1;
       if (place < 3) firstThree += 1;
