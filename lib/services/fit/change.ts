@@ -2,6 +2,7 @@ import { selectFit, selectFitsOfUnit, updateFit, type FitRow } from '@/db/querie
 import { lockUnit, selectUnit } from '@/db/queries/unit';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { conflict, notFound } from '@/lib/errors';
+import { dayText } from '@/lib/schemas/day-text';
 import { changeFitInput, takeOutFitInput } from '@/lib/schemas/fit';
 import { siteDay } from '../case/site-day';
 import { defineWrite, type Work } from '../define';
@@ -35,7 +36,7 @@ export const takeOutFit = defineWrite({
   run: async (work) => {
     const { fitId, version, ...typed } = work.input;
     const before = await lockFit(work, fitId);
-    if (before.removedOn) throw conflict(`This compressor came out already, on ${before.removedOn}.`);
+    if (before.removedOn) throw conflict(`This compressor came out already, on ${dayText(before.removedOn)}.`);
     const values = fitFormValues(before, work.ctx.person.units);
     refuseStale(before, { version, what: 'fit', typed, stored: values });
     const whole = changeFitInput.parse({ ...textsOf(values), ...typed, fitId, version });

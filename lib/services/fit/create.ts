@@ -3,6 +3,7 @@ import { insertFit, selectFit, selectFitsOfUnit, updateFit, type FitRow } from '
 import { lockUnit, selectUnit } from '@/db/queries/unit';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { conflict, invalid, notFound } from '@/lib/errors';
+import { dayText } from '@/lib/schemas/day-text';
 import { createFitInput } from '@/lib/schemas/fit';
 import { siteDay } from '../case/site-day';
 import { defineWrite, type Work } from '../define';
@@ -37,7 +38,7 @@ export const createFit = defineWrite({
     const standing = fits.find((fit) => fit.removedOn === null && fit.installedOn <= columns.installedOn);
     if (standing && previousWhyOut) await takeOutFor(work, standing, { ...columns, whyOut: previousWhyOut });
     else if (standing && overlaps(standing, columns)) {
-      throw invalid({ previousWhyOut: `The ${standing.modelName} fitted on ${standing.installedOn} is still on the unit. Say why it comes out.` });
+      throw invalid({ previousWhyOut: `The ${standing.modelName} fitted on ${dayText(standing.installedOn)} is still on the unit. Say why it comes out.` });
     }
     refuseOverlap(fits.filter((fit) => fit !== standing), columns);
 
@@ -71,7 +72,7 @@ async function takeOutFor(
 export function refuseOverlap(others: readonly FitRow[], span: { installedOn: string; removedOn: string | null }): void {
   const other = others.find((fit) => overlaps(fit, span));
   if (!other) return;
-  const until = other.removedOn ? `from ${other.installedOn} to ${other.removedOn}` : `since ${other.installedOn}`;
+  const until = other.removedOn ? `from ${dayText(other.installedOn)} to ${dayText(other.removedOn)}` : `since ${dayText(other.installedOn)}`;
   const field = other.installedOn > span.installedOn ? 'removedOn' : 'installedOn';
   throw invalid({ [field]: `A ${other.modelName} was on the unit ${until}. Two can’t be on it at once.` });
 }

@@ -1,6 +1,7 @@
 import type { z } from 'zod';
 import type { FitRow } from '@/db/queries/fit';
 import { invalid, type FieldErrors } from '@/lib/errors';
+import { dayText } from '@/lib/schemas/day-text';
 import type { changeFitInput } from '@/lib/schemas/fit';
 import { INSTALLED_MEASURES, REMOVED_MEASURES } from '@/lib/schemas/measures';
 import type { Ctx } from '../context';
@@ -29,6 +30,6 @@ function refuseHalfTold({ installedOn, removedOn, whyOut, hasReadings }: { insta
   const problems: FieldErrors = {};
   if (!removedOn && (whyOut || hasReadings)) problems.removedOn = 'Give the day on which it came out, or leave all of its coming out empty.';
   if (removedOn && !whyOut) problems.whyOut = 'Say why it came out.';
-  if (removedOn && removedOn < installedOn) problems.removedOn = `It can’t come out before it was fitted, on ${installedOn}.`;
+  if (removedOn && removedOn < installedOn) problems.removedOn = `It can’t come out before it was fitted, on ${dayText(installedOn)}.`;
   if (Object.keys(problems).length > 0) throw invalid(problems);
 }

@@ -1,8 +1,8 @@
 import { selectCasesOfUnit } from '@/db/queries/case-of-unit';
-import { selectFitsOfUnit } from '@/db/queries/fit';
+import { selectFitsOfUnit, type FitRow } from '@/db/queries/fit';
 import { selectLastRemoval } from '@/db/queries/removal';
 import { selectUnit } from '@/db/queries/unit';
-import { selectReadings } from '@/db/queries/unit-reading';
+import { selectReadings, type ReadingRow } from '@/db/queries/unit-reading';
 import type { Transaction } from '@/db/connect';
 import { may, PERMITTED } from '@/lib/auth/permissions';
 import { notFound } from '@/lib/errors';
@@ -15,6 +15,7 @@ import { compiledEdition } from '../edition/compiled';
 import { textsOf } from '../form-value';
 import { unitFormValues } from './form-values';
 import { currentFitOn } from './record-facts';
+import { runSince } from './run-since';
 
 /** A unit with all that happened to it: fits, readings and, for those who see cases, its cases. */
 export const readUnit = defineRead({
@@ -28,18 +29,27 @@ export const readUnit = defineRead({
     if (!unit) throw notFound('unit');
     const today = siteDay(ctx.now(), unit.timeZone);
     const fits = await selectFitsOfUnit(tx, of);
+    const readings = await selectReadings(tx, of);
     return {
       unit,
       today,
-      fits,
+      fits: fits.map((fit) => ({ ...fit, ranM: ranSince(fit, readings, today) })),
       currentFit: currentFitOn(fits, today) ?? null,
-      readings: await selectReadings(tx, of),
+      readings,
       cases: may(ctx.roles, 'case.see') ? await casesOf(tx, ctx, { unitId: of.unitId, timeZone: unit.timeZone }) : [],
       hidden: unit.hiddenAt ? await selectLastRemoval(tx, { ...of, entity: 'unit', entityId: of.unitId }) : undefined,
     };
   },
 });
 export type UnitPage = Awaited<ReturnType<typeof readUnit>>;
+
+/** How far a compressor ran, up to its coming out or the last reading; null when the record can't tell. */
+function ranSince({ installedOn, installedOdometerM, removedOn }: FitRow, readings: readonly ReadingRow[], today: string): number | null {
+  if (installedOdometerM === null) return null;
+  const series = readings.map(({ readOn, odometerM, odometerReplaced }) => ({ readOn, value: odometerM, replaced: odometerReplaced }));
+  const { sum, lastReadOn } = runSince({ readOn: installedOn, value: installedOdometerM }, series, removedOn ?? today);
+  return lastReadOn > installedOn ? sum : null;
+}
 
 /** The cases with their complaints and cause in the words of their edition. */
 async function casesOf(tx: Transaction, ctx: Ctx, { unitId, timeZone }: { unitId: string; timeZone: string }) {

@@ -2,6 +2,7 @@ import { lockUnit } from '@/db/queries/unit';
 import { insertReading, selectReadings } from '@/db/queries/unit-reading';
 import { invalid, notFound, type FieldErrors } from '@/lib/errors';
 import { newId } from '@/lib/ids';
+import { dayText } from '@/lib/schemas/day-text';
 import { measureUnit } from '@/lib/schemas/measures';
 import { formatQuantity, type Quantity } from '@/lib/units';
 import type { Work } from '../define';
@@ -55,8 +56,8 @@ export async function writeReading({ tx, ctx, audit }: Work<unknown>, reading: M
     const shown = formatQuantity<Quantity>(contradicted.value ?? 0, { quantity, unit: measureUnit(ctx.person.units, { quantity }) });
     problems[fields[field]] =
       contradicted.readOn <= reading.readOn
-        ? `The record has ${shown} on ${contradicted.readOn}. If the ${called} was replaced since, say so.`
-        : `The record has only ${shown} later, on ${contradicted.readOn}. Check the day and the figure.`;
+        ? `The record has ${shown} on ${dayText(contradicted.readOn)}. If the ${called} was replaced since, say so.`
+        : `The record has only ${shown} later, on ${dayText(contradicted.readOn)}. Check the day and the figure.`;
   }
   if (Object.keys(problems).length > 0) throw invalid(problems);
 

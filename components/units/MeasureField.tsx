@@ -1,0 +1,20 @@
+import type { ComponentProps } from 'react';
+import { NumberWithUnitField } from '@/components/ui/NumberWithUnitField';
+import { measureUnit, type MeasureField as Measure } from '@/lib/schemas/measures';
+import { formatQuantity, unitDefinition, type Quantity, type UnitPreferences } from '@/lib/units';
+
+type Props = Pick<ComponentProps<typeof NumberWithUnitField>, 'label' | 'hint' | 'error' | 'required' | 'className'> & {
+  name: string;
+  defaultValue: string;
+  measure: Pick<Measure, 'quantity' | 'like'>;
+  units: UnitPreferences;
+};
+
+/** A measured figure in the person's unit; a figure with a unit of its own is read as well. */
+export function MeasureField({ measure, units, ...field }: Props) {
+  return <NumberWithUnitField {...field} unit={unitDefinition<Quantity>(measure.quantity, measureUnit(units, measure)).symbol} />;
+}
+
+/** A stored measure as the person reads it; nothing where there is none. */
+export const measureText = (si: number | null, measure: Pick<Measure, 'quantity' | 'like'>, units: UnitPreferences): string | null =>
+  si === null ? null : formatQuantity<Quantity>(si, { quantity: measure.quantity, unit: measureUnit(units, measure) });
