@@ -12,6 +12,7 @@
  */
 export function attenuationFactors(weights: readonly number[], rho: number): number[] {
   const factors = weights.map(() => 1);
+  if (weights.length < 2) return factors;
   for (const sign of [1, -1]) {
     const ranked = weights
       .map((weight, index) => ({ size: sign * weight, index }))

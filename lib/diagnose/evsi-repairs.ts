@@ -8,24 +8,24 @@ import { findOrder } from './repair-order-search';
 const TRY_ALL_AT_ANSWERS_UP_TO = 6;
 
 /**
- * What each of many questions would save. A plan is searched at p, and after every answer. The plans compared everywhere
- * are: do nothing, the one found at p, and of all that were found after answers the one that is best at p, in case the
- * search at p missed it.
+ * What questions would save, one at a time: there are hundreds of answers, and for most decisions a few questions are
+ * enough to look at. A plan is searched at p once, and after every answer of a question that is priced. The plans
+ * compared on both sides are: do nothing, the one found at p, and of those found after the answers the one that is best
+ * at p, in case the search at p missed it.
  *
  * @param problem remedies as money
  * @param p causes' probabilities now
- * @param asked what could be asked, all with the same p
- * @returns EVSI of each, in the order given; money, 0 or more
- * @example expectedSavings(problem, p, [asked])[0];
+ * @returns EVSI of a question asked at that p; money, 0 or more
+ * @example pricer(problem, p)(forecast);
  */
-export function expectedSavings(problem: RepairProblem, p: ArrayLike<number>, asked: readonly Forecast[]): number[] {
-  const after = asked.map(({ chances, posteriors }) => posteriors.map((posterior, v): PlanCosts | undefined =>
-    chances[v]! > 0
-      ? planCosts(problem, findOrder(problem, posterior, TRY_ALL_AT_ANSWERS_UP_TO).order)
-      : undefined));
+export function pricer(problem: RepairProblem, p: ArrayLike<number>): (asked: Forecast) => number {
+  const nothing = planCosts(problem, []);
   const here = planCosts(problem, findOrder(problem, p).order);
-  let best: PlanCosts = here;
-  for (const plan of after.flat()) if (plan && costOf(plan, p) < costOf(best, p)) best = plan;
-  const everywhere = [planCosts(problem, []), here, best];
-  return asked.map((forecast, i) => expectedSaving(p, forecast, everywhere, after[i]));
+  return (asked) => {
+    const after = asked.posteriors.map((posterior, v): PlanCosts | undefined =>
+      asked.chances[v]! > 0 ? planCosts(problem, findOrder(problem, posterior, TRY_ALL_AT_ANSWERS_UP_TO).order) : undefined);
+    let best: PlanCosts = here;
+    for (const plan of after) if (plan && costOf(plan, p) < costOf(best, p)) best = plan;
+    return expectedSaving(p, asked, [nothing, here, best], after);
+  };
 }

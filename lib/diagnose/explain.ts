@@ -1,5 +1,6 @@
 import type { CompiledRulebook } from './compiled';
 import { decibansOf } from './decibans';
+import { leaveOneOut } from './leave-one-out';
 import { byCodeUnits } from './order';
 import { rank, type RankOptions } from './rank';
 import { strengthOf, type Strength } from './strength';
@@ -59,11 +60,8 @@ export interface Explanation {
  */
 export function explain(compiled: CompiledRulebook, findings: readonly Finding[], options: RankOptions = {}): Explanation {
   const ranking = rank(compiled, findings, options);
-  const used = usedFindings(compiled, findings, options.stages).map(({ finding }) => finding);
-  const without = used.map((finding) => {
-    const others = used.filter((other) => other !== finding);
-    return { finding, p: new Map(rank(compiled, others, options).causes.map(({ causeId, p }) => [causeId, p])) };
-  });
+  const used = usedFindings(compiled, findings, options.stages);
+  const without = leaveOneOut(compiled, used, options.facts);
   return {
     ranking,
     causes: ranking.causes.map(({ causeId, p, prior, terms }) => ({
@@ -73,11 +71,11 @@ export function explain(compiled: CompiledRulebook, findings: readonly Finding[]
       reasons: terms
         .map((term) => reasonOf(compiled, term))
         .sort((a, b) => Math.abs(b.countedDecibans) - Math.abs(a.countedDecibans)),
-      withoutFinding: without
-        .map(({ finding, p: others }) => ({
+      withoutFinding: used
+        .map(({ finding }) => ({
           findingId: finding.id,
           checkId: finding.checkId,
-          changeInP: p - (others.get(causeId) ?? 0),
+          changeInP: p - (without.get(finding.id)?.[compiled.causeIndex.get(causeId) ?? -1] ?? 0),
         }))
         .sort((a, b) => Math.abs(b.changeInP) - Math.abs(a.changeInP) || byCodeUnits(a.checkId, b.checkId)),
     })),

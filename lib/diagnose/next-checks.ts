@@ -1,6 +1,6 @@
 /** Which check tells most for the time it takes, and when enough is known to repair. */
 import type { CompiledRulebook } from './compiled';
-import { expectedSavings } from './evsi-repairs';
+import { pricer } from './evsi-repairs';
 import { entropyBits, settles, type Forecast, type Settles } from './information';
 import { openPairs, type OpenChecks } from './next-checks-open';
 import { placeCandidates, type Candidate } from './next-checks-order';
@@ -27,8 +27,8 @@ export interface Suggestion {
   cannotTell: number;
   /** (1 - u) I / max(0.25, minutes): what it is ordered by. */
   bitsPerMinute: number;
-  /** (1 - u) EVSI, money: how much cheaper the repair is expected to become. */
-  saving: number;
+  /** (1 - u) EVSI, money: how much cheaper the repair is expected to become. Left out where nothing hung on it. */
+  saving?: number;
   /** Its minutes in money. */
   cost: number;
   why: { kind: 'chosen' } | { kind: 'waits-for'; checkIds: string[] };
@@ -62,6 +62,12 @@ interface Priced extends Candidate {
   cannotTell: number;
 }
 
+interface Judged extends Priced {
+  word: Settles;
+  cost: number;
+  saving?: number;
+}
+
 /** The repair problem of a rulebook, with its causes in the ranking's order. */
 export function repairProblemOf(compiled: CompiledRulebook, money: Partial<RepairMoney> = {}): RepairProblem {
   const byId = new Map(compiled.rulebook.causes.map((cause) => [cause.id, cause]));
@@ -88,17 +94,27 @@ export function nextChecks(open: OpenChecks, { vehicle = AS_PARKED, money = {} }
   const alone = singles(open, vehicle);
   const candidates = [...alone, ...betterPairs(open, vehicle, alone)];
   const problem = repairProblemOf(compiled, money);
-  const savings = expectedSavings(problem, posterior, candidates.map(({ forecast }) => forecast));
   const entropyLeft = entropyBits(posterior);
+  const price = pricer(problem, posterior);
 
-  const judged = candidates.map((candidate, i) => ({
-    ...candidate,
-    word: settles(candidate.forecast.bits, entropyLeft),
-    saving: (1 - candidate.cannotTell) * (savings[i] ?? 0),
-    cost: labourCost(Math.max(LEAST_MINUTES, candidate.minutes), rate),
-  }));
-  const valuable = judged.filter(({ word, saving, cost }) => word !== 'settles little' || saving > cost);
-  const worthWaitingFor = valuable.filter(({ checkIds }) => checkIds.length === 1).flatMap(({ checkIds }) => checkIds);
+  const judged = candidates
+    .map((candidate): Judged => ({
+      ...candidate,
+      word: settles(candidate.forecast.bits, entropyLeft),
+      cost: labourCost(Math.max(LEAST_MINUTES, candidate.minutes), rate),
+    }))
+    .sort((x, y) => y.bitsPerMinute - x.bitsPerMinute);
+  // Pricing searches a plan after every answer, so that only what something hangs on is priced.
+  const pays = (candidate: Judged): boolean => {
+    candidate.saving ??= (1 - candidate.cannotTell) * price(candidate.forecast);
+    return candidate.saving > candidate.cost;
+  };
+  const enoughIsKnown = !judged.some(pays);
+  const atRisk = new Set(judged.flatMap(({ spoils }) => spoils));
+  const worthWaitingFor = judged
+    .filter((candidate) => candidate.checkIds.length === 1 && candidate.checkIds.some((id) => atRisk.has(id)))
+    .filter((candidate) => candidate.word !== 'settles little' || pays(candidate))
+    .flatMap(({ checkIds }) => checkIds);
   const suggestions = placeCandidates(judged, new Set(worthWaitingFor)).map(({ candidate, waitsFor }): Suggestion => ({
     checkIds: candidate.checkIds,
     ...panelOf(compiled, candidate.checkIds),
@@ -108,7 +124,7 @@ export function nextChecks(open: OpenChecks, { vehicle = AS_PARKED, money = {} }
     setUpMinutes: candidate.setUpMinutes,
     cannotTell: candidate.cannotTell,
     bitsPerMinute: candidate.bitsPerMinute,
-    saving: candidate.saving,
+    ...(candidate.saving === undefined ? {} : { saving: candidate.saving }),
     cost: candidate.cost,
     why: waitsFor.length > 0 ? { kind: 'waits-for', checkIds: waitsFor } : { kind: 'chosen' },
     spoils: candidate.spoils,
@@ -117,7 +133,7 @@ export function nextChecks(open: OpenChecks, { vehicle = AS_PARKED, money = {} }
     suggestions: oncePerPanel(suggestions),
     spoiled: open.spoiled,
     entropyLeft,
-    enoughIsKnown: judged.every(({ saving, cost }) => saving <= cost),
+    enoughIsKnown,
     repair: repairOrder(problem, posterior),
   };
 }

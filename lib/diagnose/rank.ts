@@ -71,11 +71,15 @@ export function rankingOf(
 /** The terms of one cause: each item that says anything of it, with what is left of it in its group. */
 function termsOf(items: readonly EvidenceItem[], cause: number, beta: number): EvidenceTerm[] {
   const telling = items.filter((item) => item.nats[cause] !== 0);
+  const groups = new Map<string, EvidenceItem[]>();
+  for (const item of telling) {
+    const held = groups.get(item.group.id);
+    if (held) held.push(item);
+    else groups.set(item.group.id, [item]);
+  }
   const factors = new Map<EvidenceItem, number>();
-  for (const groupId of new Set(telling.map((item) => item.group.id))) {
-    const members = telling.filter((item) => item.group.id === groupId);
-    const weights = members.map((item) => item.nats[cause] ?? 0);
-    const counted = attenuationFactors(weights, members[0]?.group.rho ?? 1);
+  for (const members of groups.values()) {
+    const counted = attenuationFactors(members.map((item) => item.nats[cause] ?? 0), members[0]?.group.rho ?? 1);
     members.forEach((item, index) => factors.set(item, counted[index] ?? 1));
   }
   return telling.map((item) => {
