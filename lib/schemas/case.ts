@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { filterId, filterOf, filterText, ordered } from './list';
 
 /** A client-made uuid: the id of the row to be, and the key by which a repeated request is known. */
 const rowId = z.uuid('This id is not a uuid.');
@@ -105,12 +106,11 @@ export const readCaseInput = z.strictObject({ caseId, at: instant.optional() });
 export const CASE_STATUSES = ['open', 'called', 'closed'] as const;
 
 export const listCasesInput = z.object({
-  q: words(60).optional().catch(undefined),
+  q: filterText,
   status: z.enum([...CASE_STATUSES, 'all']).catch('open').default('open'),
-  site: z.uuid().optional().catch(undefined),
-  mine: z.enum(['yes']).optional().catch(undefined),
-  sort: z.enum(['opened', 'number', 'unit']).catch('opened').default('opened'),
+  site: filterId,
+  mine: filterOf(['yes']),
+  ...ordered(['opened', 'number', 'unit']),
   direction: z.enum(['asc', 'desc']).catch('desc').default('desc'),
-  page: z.coerce.number().int().min(1).max(10_000).catch(1).default(1),
 });
 export type ListCasesInput = z.input<typeof listCasesInput>;

@@ -13,6 +13,7 @@ import { TextField } from '@/components/ui/TextField';
 import { pageContext } from '@/lib/auth/page';
 import { may, PERMITTED } from '@/lib/auth/permissions';
 import { listCasesInput } from '@/lib/schemas/case';
+import { firstOfEach, listHref } from '@/lib/schemas/list';
 import { listCases } from '@/lib/services/case/list';
 import { listSites } from '@/lib/services/site/list';
 
@@ -37,16 +38,11 @@ const COLUMNS: readonly Column<Row>[] = [
 
 export default async function CasesPage({ searchParams }: { searchParams: Promise<Query> }) {
   const ctx = await pageContext(PERMITTED['case.see']);
-  const query = await searchParams;
-  const filter = listCasesInput.parse(query);
+  const filter = listCasesInput.parse(firstOfEach(await searchParams));
   const [{ cases, total, page, pages }, sites] = await Promise.all([
     listCases({ ctx, input: filter }),
     listSites({ ctx, input: {} }),
   ]);
-  const hrefWith = (change: Record<string, string | number>) => {
-    const kept = Object.entries({ ...filter, ...change }).filter(([, value]) => value !== undefined && value !== '');
-    return `/cases?${new URLSearchParams(kept.map(([key, value]) => [key, String(value)]))}`;
-  };
   const isFiltered = Boolean(filter.q || filter.site || filter.mine || filter.status !== 'open');
 
   return (
@@ -70,14 +66,14 @@ export default async function CasesPage({ searchParams }: { searchParams: Promis
           rows={cases}
           rowKey={(row) => row.id}
           sort={{ key: filter.sort, direction: filter.direction }}
-          sortHref={({ key, direction }) => hrefWith({ sort: key, direction, page: 1 })}
+          sortHref={({ key, direction }) => listHref('/cases', filter, { sort: key, direction, page: 1 })}
           empty={
             <EmptyState title={isFiltered ? 'No case matches' : 'No open case'} action={<ButtonLink href={isFiltered ? '/cases' : '/cases/new'}>{isFiltered ? 'Clear the filter' : 'Open a case'}</ButtonLink>}>
               {isFiltered ? 'Take a filter away, or look for part of the unit’s number.' : 'Open one when a vehicle comes in with oil in its air, slow air or a noise.'}
             </EmptyState>
           }
         />
-        <Pager label="Pages of cases" page={page} pageCount={pages} total={total} hrefFor={(to) => hrefWith({ page: to })} />
+        <Pager label="Pages of cases" page={page} pageCount={pages} total={total} hrefFor={(to) => listHref('/cases', filter, { page: to })} />
       </div>
     </>
   );

@@ -1,4 +1,5 @@
 import type { Feature } from './row';
+import { cases } from './rows/cases';
 import { settings } from './rows/settings';
 import { signingIn } from './rows/signing-in';
 
@@ -7,4 +8,4 @@ import { signingIn } from './rows/signing-in';
  * `app` is not here, and tries wrong roles, another organisation, malformed and oversized input on each. A feature adds
  * its file of rows to `rows/` and its name here.
  */
-export const FEATURES: readonly Feature[] = [signingIn, settings];
+export const FEATURES: readonly Feature[] = [signingIn, cases, settings];

@@ -11,10 +11,13 @@ import { openCaseFromForm } from '../actions';
 
 export const metadata: Metadata = { title: 'Open a case' };
 
+/** An address with nonsense in it opens the form without a unit. */
+const idFrom = (value: string | string[] | undefined) => (typeof value === 'string' && /^[0-9a-f-]{36}$/.test(value) ? value : undefined);
+
 export default async function NewCasePage({ searchParams }: { searchParams: Promise<Record<string, string | string[] | undefined>> }) {
   const ctx = await pageContext(PERMITTED['case.work']);
   const { unit } = await searchParams;
-  const opening = await readOpening({ ctx, input: { unitId: typeof unit === 'string' ? unit : undefined } });
+  const opening = await readOpening({ ctx, input: { unitId: idFrom(unit) } });
   return (
     <QueryProvider>
       <PageHeader
