@@ -20,7 +20,7 @@ export async function forAllCases(
       seen.push(featuresOf(each));
       await holds(each, seed);
     }),
-    { numRuns: runs, seed: 20_260 },
+    { numRuns: Math.min(runs, fc.readConfigureGlobal().numRuns ?? runs), seed: 20_260 },
   );
   for (const feature of ['compoundRules', 'threeStates', 'groupOfThree', 'splitAnswers'] as const) {
     if (except.includes(feature)) continue;
