@@ -46,10 +46,14 @@ describe('npm start', () => {
 
   it.each(moments)('goes on after being killed %s', async (_moment, reached) => {
     const start = runStart(copy.folder, port);
-    await reached(start);
-    expect(start.child.kill('SIGKILL')).toBe(true);
+    try {
+      await reached(start);
+    } finally {
+      start.child.kill('SIGKILL');
+    }
+    // No exit code: it was the signal that ended it, at the moment meant.
     expect(await start.ended).toBe(null);
-  }, 5 * MINUTES);
+  }, 10 * MINUTES);
 
   it('is up at last, answers, and stops everything on Ctrl-C', async () => {
     const start = runStart(copy.folder, port);
@@ -59,7 +63,7 @@ describe('npm start', () => {
     start.child.kill('SIGINT');
     expect(await start.ended).toBe(0);
     expect(processesOf(copy.folder)).toEqual([]);
-  }, 3 * MINUTES);
+  }, 5 * MINUTES);
 
   it('skips what is done, also past the stale lock of a crashed cluster', async () => {
     writeFileSync(inCopy('.local', 'postgres', 'postmaster.pid'), `${process.pid}\n${inCopy('.local', 'postgres')}\n`);
@@ -74,7 +78,7 @@ describe('npm start', () => {
     start.child.kill('SIGTERM');
     await start.ended;
     expect(processesOf(copy.folder)).toEqual([]);
-  }, 2 * MINUTES);
+  }, 5 * MINUTES);
 
   it('names a taken port and the way out', async () => {
     const squatter = createServer().listen(port, '127.0.0.1');

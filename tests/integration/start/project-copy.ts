@@ -1,10 +1,13 @@
 import { spawn, spawnSync, type ChildProcess } from 'node:child_process';
-import { chmodSync, cpSync, existsSync, mkdirSync, mkdtempSync, readdirSync, readFileSync, rmSync } from 'node:fs';
+import { chmodSync, cpSync, existsSync, mkdirSync, mkdtempSync, readdirSync, readFileSync, readlinkSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { dirname, join } from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
 import { SERVICES } from '@/scripts/lib/environment.mjs';
 import { root } from '@/scripts/lib/paths.mjs';
+import { stopOrphans } from '@/scripts/lib/processes.mjs';
+
+const started: ChildProcess[] = [];
 
 /** A clone as somebody else would have it: the project's own files and nothing that was installed or built. */
 export function copyProject() {
@@ -18,7 +21,15 @@ export function copyProject() {
     mkdirSync(dirname(join(folder, file)), { recursive: true });
     cpSync(join(root, file), join(folder, file));
   }
-  return { folder, remove: () => rmSync(folder, { recursive: true, force: true }) };
+  return {
+    folder,
+    /** Ends what a failed test left running, then removes the folder. */
+    async remove() {
+      for (const child of started) child.kill('SIGKILL');
+      await stopOrphans(join(folder, '.local', 'run'));
+      rmSync(folder, { recursive: true, force: true, maxRetries: 5 });
+    },
+  };
 }
 
 const environment = (port: number): NodeJS.ProcessEnv => {
@@ -38,6 +49,7 @@ export interface RunningStart {
 /** Runs what `npm start` runs. */
 export function runStart(folder: string, port: number): RunningStart {
   const child = spawn(process.execPath, ['scripts/start.mjs'], { cwd: folder, env: environment(port), stdio: ['ignore', 'pipe', 'pipe'] });
+  started.push(child);
   let output = '';
   child.stdout.on('data', (chunk) => (output += chunk));
   child.stderr.on('data', (chunk) => (output += chunk));
@@ -57,17 +69,18 @@ export function runStart(folder: string, port: number): RunningStart {
   };
 }
 
-/** The command lines of everything that runs out of the folder. */
+/** The command lines of everything that works in the folder or runs a program or a cluster out of it. */
 export function processesOf(folder: string): string[] {
   return readdirSync('/proc')
     .filter((entry) => /^\d+$/.test(entry))
-    .map((pid) => {
+    .flatMap((pid) => {
       try {
-        const isZombie = / Z /.test(readFileSync(`/proc/${pid}/stat`, 'utf8').replace(/\(.*\)/, ''));
-        return isZombie ? '' : readFileSync(`/proc/${pid}/cmdline`, 'utf8').replaceAll('\0', ' ');
+        const command = readFileSync(`/proc/${pid}/cmdline`, 'utf8').replaceAll('\0', ' ');
+        const worksIn = readlinkSync(`/proc/${pid}/cwd`);
+        return command.includes(folder) || worksIn.startsWith(folder) ? [command] : [];
       } catch {
-        return '';
+        // It ended while we looked, or it is a zombie: both are gone.
+        return [];
       }
-    })
-    .filter((command) => command.includes(folder));
+    });
 }

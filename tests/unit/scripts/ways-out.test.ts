@@ -1,7 +1,7 @@
 import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { requireRoom } from '@/scripts/lib/disk.mjs';
 import { parseDotenv, withDotenv } from '@/scripts/lib/dotenv.mjs';
 import { appEnvironment, readPlan, SERVICES } from '@/scripts/lib/environment.mjs';
@@ -67,8 +67,13 @@ describe('what is started here and what is pointed at', () => {
 });
 
 describe('the count of npm test', () => {
+  let folder: string;
+  beforeAll(() => {
+    folder = mkdtempSync(join(tmpdir(), 'carryover-report-'));
+  });
+  afterAll(() => rmSync(folder, { recursive: true }));
   const report = (testResults: unknown[]) => {
-    const path = join(mkdtempSync(join(tmpdir(), 'carryover-report-')), 'report.json');
+    const path = join(folder, 'report.json');
     writeFileSync(path, JSON.stringify({ testResults }));
     return path;
   };
