@@ -12,7 +12,7 @@ type Action<Result = void> = (previous: ActionState<Result>, form: FormData) => 
 export function RenameForm({ action, name }: { action: Action; name: string }) {
   const form = useForm(action);
   return (
-    <Form form={form} label="Name" saved="Your name is changed.">
+    <Form form={form} label="Change your name" saved="Your name is changed.">
       <TextField label="Name" autoComplete="name" required {...form.field('name', name)} />
       <SubmitButton>Save the name</SubmitButton>
     </Form>
@@ -22,7 +22,7 @@ export function RenameForm({ action, name }: { action: Action; name: string }) {
 export function PasswordForm({ action, email }: { action: Action<{ email: string }>; email: string }) {
   const form = useForm(action);
   return (
-    <Form form={form} label="Password" saved="Your password is changed. You are signed out on every other device.">
+    <Form form={form} label="Change your password" saved="Your password is changed. You are signed out on every other device.">
       {/* For password keepers, which want to know whose password it is. */}
       <input type="hidden" name="username" autoComplete="username" value={email} readOnly />
       <TextField label="Present password" type="password" autoComplete="current-password" required {...form.field('current')} />

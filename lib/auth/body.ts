@@ -22,7 +22,7 @@ export async function limitedText(request: Request, most = MOST_BYTES): Promise<
 export async function jsonBody(request: Request): Promise<unknown> {
   const text = await limitedText(request);
   if (text === '') return {};
-  if (!/^application\/([a-z.]+\+)?json\b/i.test(request.headers.get('content-type') ?? '')) {
+  if (!/^application\/([\w.-]+\+)?json\b/i.test(request.headers.get('content-type') ?? '')) {
     throw invalid({}, 'Send the body as JSON, with the content type application/json.');
   }
   return parsedJson(text);

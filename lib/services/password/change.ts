@@ -25,7 +25,7 @@ export const changePassword = defineWrite({
   run: async ({ tx, ctx, prepared, audit }) => {
     await updatePerson(tx, { personId: ctx.person.id }, prepared);
     await raiseSessionVersion(tx, ctx.person.id);
-    audit({ entity: 'person', entityId: ctx.person.id, changed: { password: true } });
+    audit({ entity: 'person', entityId: ctx.person.id, changed: { password: 'changed' } });
     return { email: ctx.person.email };
   },
 });

@@ -37,7 +37,7 @@ export const resetPassword = defineVisit({
       for (const { id: organisationId } of await organisationsOf(tx, used.personId)) {
         await asTenant(tx, { organisationId, personId: used.personId }, (inside) =>
           insertAudit(inside, [
-            { organisationId, personId: used.personId, action: 'reset-password.person', entity: 'person', entityId: used.personId, changed: { password: true }, at: link.now },
+            { organisationId, personId: used.personId, action: 'reset-password.person', entity: 'person', entityId: used.personId, changed: { password: 'changed' }, at: link.now },
           ]),
         );
       }

@@ -11,6 +11,6 @@ export const rename = defineWrite({
   input: renameInput,
   run: async ({ tx, ctx, input: { name }, audit }) => {
     await updatePerson(tx, { personId: ctx.person.id }, { name });
-    audit({ entity: 'person', entityId: ctx.person.id, changed: { name: true } });
+    audit({ entity: 'person', entityId: ctx.person.id, changed: { name: 'changed' } });
   },
 });

@@ -30,18 +30,22 @@ export function malformed(row: Row, made: Made): Record<string, Change> {
     };
   }
   const params = row.params?.(made);
-  const noId = params && !row.route.includes('[...') ? { 'an id that is none': { params: everyValue(params, 'not-an-id') } } : {};
+  const noId: Record<string, Change> = params && !row.route.includes('[...') ? { 'an id that is none': { params: everyValue(params, 'not-an-id') } } : {};
   if (row.method === 'GET') return { ...noId, 'a query of nonsense': { query: everyValue({ ...row.query?.(made), q: '', page: '', cursor: '' }, NONSENSE) } };
+  const fields = row.body?.(made);
+  const wrongBodies: Record<string, Change> = fields
+    ? {
+        'a list for an object': { body: '[1, 2]' },
+        'null for an object': { body: 'null' },
+        'nonsense in each field': { body: JSON.stringify(everyValue(fields, NONSENSE)) },
+        'a number in each field': { body: JSON.stringify(everyValue(fields, -1e308)) },
+        'a body deep in itself': { body: '['.repeat(20_000) + ']'.repeat(20_000) },
+      }
+    : {};
   return {
     ...noId,
+    ...wrongBodies,
     'half a body': { body: '{"a":' },
-    ...(row.body && {
-      'a list for an object': { body: '[1, 2]' },
-      'null for an object': { body: 'null' },
-      'nonsense in each field': { body: JSON.stringify(everyValue(row.body(made), NONSENSE)) },
-      'a number in each field': { body: JSON.stringify(everyValue(row.body(made), -1e308)) },
-      'a body deep in itself': { body: '['.repeat(20_000) + ']'.repeat(20_000) },
-    }),
     'a body that is no JSON': { headers: { 'content-type': 'text/plain' }, body: 'a=b' },
   };
 }

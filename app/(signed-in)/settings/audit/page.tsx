@@ -19,8 +19,11 @@ interface Props {
 
 const instant = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium', timeStyle: 'medium', timeZone: 'UTC' });
 
-const inWords = (value: unknown): string =>
-  typeof value === 'string' ? value : Array.isArray(value) && value.every((item) => typeof item === 'string') ? value.join(', ') : JSON.stringify(value);
+function inWords(value: unknown): string {
+  if (Array.isArray(value)) return value.map(inWords).join(', ');
+  if (typeof value === 'object' && value !== null) return Object.entries(value).map(([name, inner]) => `${name} ${inWords(inner)}`).join(', ');
+  return value === null ? 'none' : String(value);
+}
 
 /** "roles: technician, engineer; siteId: …": what a row was changed to. */
 const changesInWords = (changed: Record<string, unknown>) =>

@@ -16,7 +16,7 @@ export default async function UnitsPage() {
     quantity,
     label: QUANTITIES[quantity].noun,
     unit: person.units[quantity],
-    units: Object.entries(QUANTITIES[quantity].units).map(([value, { symbol, name }]) => ({ value, label: symbol ? `${symbol}: ${name}` : name })),
+    units: Object.entries(QUANTITIES[quantity].units).map(([value, { symbol, name }]) => ({ value, label: symbol && symbol !== name ? `${symbol}: ${name}` : name })),
   }));
   return (
     <>
