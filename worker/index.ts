@@ -10,7 +10,8 @@ import { startWork } from './start-work';
 const { DATABASE_URL, SMTP_URL, MAIL_FROM, NEXTAUTH_URL } = env();
 const { db, close } = connect(DATABASE_URL, { max: 4 });
 const mailer = createMailer(SMTP_URL, MAIL_FROM);
-const boss = new PgBoss({ connectionString: DATABASE_URL, schema: JOB_SCHEMA, migrate: false, max: 4 });
+// Finished jobs are of no use for long, and one may hold an address that somebody typed.
+const boss = new PgBoss({ connectionString: DATABASE_URL, schema: JOB_SCHEMA, migrate: false, max: 4, archiveCompletedAfterSeconds: 3600, deleteAfterDays: 1 });
 boss.on('error', (error) => log.error({ err: error }, 'job queue'));
 
 await startWork(boss, handlers({ db, mailer, now: () => new Date(), baseUrl: NEXTAUTH_URL }));

@@ -12,7 +12,9 @@ import { visitorFrom } from './visitor';
 
 declare module 'next-auth' {
   interface Session {
-    standing: Standing;
+    standing?: Standing;
+    /** It could not be looked up: that is no sign-out. */
+    failure?: Error;
   }
   interface User {
     sessionVersion: number;
@@ -30,9 +32,18 @@ declare module 'next-auth/jwt' {
 const A_WEEK_S = 7 * 24 * 3600;
 
 /** What the jwt callback read from the database, for the session callback of the same request. Never in the cookie. */
-const standings = new WeakMap<JWT, Standing>();
+const lookedUp = new WeakMap<JWT, Standing | Error>();
 
 class SignedOut extends Error {}
+
+/** next-auth takes anything thrown for a sign-out, so that a database out of reach has to be handed on instead. */
+async function lookUp(...given: Parameters<typeof standingOf>): Promise<Standing | Error | undefined> {
+  try {
+    return await standingOf(...given);
+  } catch (error) {
+    return error instanceof Error ? error : new Error(String(error));
+  }
+}
 
 /** The organisation to go on in, when a signed-in person asks for another; his membership is checked like any. */
 const organisationAsked = (session: unknown): string | undefined => {
@@ -74,17 +85,16 @@ export const authOptions = (): NextAuthOptions => ({
     async jwt({ token, user, trigger, session }) {
       if (user) return { sub: user.id, organisationId: user.organisationId, sessionVersion: user.sessionVersion };
       const organisationId = (trigger === 'update' && organisationAsked(session)) || token.organisationId;
-      const standing = token.sub && (await standingOf(database(), { personId: token.sub, organisationId, sessionVersion: token.sessionVersion }));
+      const found = token.sub && (await lookUp(database(), { personId: token.sub, organisationId, sessionVersion: token.sessionVersion }));
       // Thrown, not returned: next-auth then clears the cookie.
-      if (!standing) throw new SignedOut();
+      if (!found) throw new SignedOut();
       const next = { ...token, organisationId };
-      standings.set(next, standing);
+      lookedUp.set(next, found);
       return next;
     },
     session({ session, token }): Session {
-      const standing = standings.get(token);
-      if (!standing) throw new SignedOut();
-      return { expires: session.expires, standing };
+      const found = lookedUp.get(token);
+      return { expires: session.expires, ...(found instanceof Error ? { failure: found } : { standing: found }) };
     },
   },
 });

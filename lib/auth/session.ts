@@ -12,7 +12,8 @@ import { returnPath } from './return-path';
 /** Who is signed in, checked against the database once a request; null when nobody is. */
 export const getContext = cache(async (): Promise<Ctx | null> => {
   const session = await getServerSession(authOptions());
-  return session && { ...session.standing, db: database(), now: () => new Date(), jobs };
+  if (session?.failure) throw session.failure;
+  return session?.standing ? { ...session.standing, db: database(), now: () => new Date(), jobs } : null;
 });
 
 /**

@@ -1,3 +1,4 @@
+import { sql } from 'drizzle-orm';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { membership } from '@/db/schema';
 import { changeMember } from '@/lib/services/membership/change';
@@ -85,6 +86,15 @@ describe('a session', () => {
     const left = await refusalOf(signInAs(leaver.person.email, PASSWORD));
     const unknown = await refusalOf(signInAs('nobody@people.test', PASSWORD));
     expect(left.message).toBe(unknown.message);
+  });
+
+  test('is an error, and no sign-out, while the database cannot be asked', async () => {
+    const { ctx } = await makeTenant(databases, { password: PASSWORD });
+    const browser = await signInAs(ctx.person.email, PASSWORD);
+    await databases.owner.execute(sql`revoke execute on function standing(uuid, uuid) from carryover_app`);
+    await expect(contextIn(browser)).rejects.toThrow(/standing/);
+    await databases.owner.execute(sql`grant execute on function standing(uuid, uuid) to carryover_app`);
+    expect(await isSignedIn(browser)).toBe(true);
   });
 
   test('sees a new name at the next request', async () => {
