@@ -10,6 +10,9 @@ import { onePass, oneFailure, readCountLine, readVitestReport } from './test-res
 /** A build folder of the tests' own: a Carryover that runs from this folder keeps its build. */
 export const TEST_DIST_DIR = '.next-test';
 
+/** Of what a failed check printed, so that a broken import doesn't bury everything else. */
+const MOST_LINES = 60;
+
 /** @typedef {{ name: string, run: () => Promise<import('./test-results.mjs').PartResult> }} Part */
 
 /**
@@ -26,14 +29,19 @@ export function testParts({ processes }, env) {
   const check = (name, work) => ({
     name,
     run: async () => {
-      await work();
-      return onePass;
+      try {
+        await work();
+        return onePass;
+      } catch (error) {
+        if (!(error instanceof CommandFailed)) throw error;
+        return oneFailure(name, error.output.trim().split('\n').slice(-MOST_LINES).join('\n'));
+      }
     },
   });
 
-  /** @param {string} project @returns {Part} */
-  const vitest = (project) => ({
-    name: `${project} tests`,
+  /** @param {string} name @param {string} project @returns {Part} */
+  const vitest = (name, project) => ({
+    name,
     run: async () => {
       const report = join(test.results, `${project}.json`);
       mkdirSync(test.results, { recursive: true });
@@ -68,7 +76,7 @@ export function testParts({ processes }, env) {
     name: 'end-to-end tests',
     run: async () => {
       if (!findChromium()) await aptInstall(processes, chromiumWanted);
-      return vitest('e2e').run();
+      return vitest('end-to-end tests', 'e2e').run();
     },
   };
 
@@ -78,14 +86,14 @@ export function testParts({ processes }, env) {
       await node('tsc', 'typescript/bin/tsc', ['--noEmit', '--project', 'tsconfig.test.json']);
     }),
     check('lint', () => node('eslint', 'eslint/bin/eslint.js', ['--max-warnings', '0', '.'])),
-    vitest('unit'),
-    vitest('golden'),
-    vitest('checks'),
+    vitest('unit tests', 'unit'),
+    vitest('golden cases', 'golden'),
+    vitest('outside values', 'checks'),
     faults,
     check('production build', async () => {
       if (!isBuilt(TEST_DIST_DIR)) await build(processes, TEST_DIST_DIR, env);
     }),
-    vitest('integration'),
+    vitest('integration tests', 'integration'),
     endToEnd,
   ];
 }
