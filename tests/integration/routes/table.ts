@@ -1,11 +1,13 @@
 import type { Feature } from './row';
 import { cases } from './rows/cases';
+import { models } from './rows/models';
 import { settings } from './rows/settings';
 import { signingIn } from './rows/signing-in';
+import { units } from './rows/units';
 
 /**
  * Every page, server action and route handler there is, with who may use it and how. `routes.test.ts` fails when one in
  * `app` is not here, and tries wrong roles, another organisation, malformed and oversized input on each. A feature adds
  * its file of rows to `rows/` and its name here.
  */
-export const FEATURES: readonly Feature[] = [signingIn, cases, settings];
+export const FEATURES: readonly Feature[] = [signingIn, cases, units, models, settings];
