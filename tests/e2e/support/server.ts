@@ -1,4 +1,4 @@
-import { mkdtempSync } from 'node:fs';
+import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { inject } from 'vitest';
@@ -51,8 +51,6 @@ export async function startServer() {
   return {
     url: `http://127.0.0.1:${port}`,
     database,
-    /** Where the logs of every process are. */
-    folder,
     /** What was sent so far, the newest first. */
     async letters(): Promise<Letter[]> {
       return (await (await fetch(`${mail.page}/letters.json`)).json()) as Letter[];
@@ -60,6 +58,7 @@ export async function startServer() {
     async stop() {
       await processes.stopAll();
       await database.drop();
+      rmSync(folder, { recursive: true, force: true });
     },
   };
 }

@@ -21,8 +21,8 @@ describe('npm start', () => {
   beforeAll(async () => {
     copy = copyProject();
     port = await freePort();
-  });
-  afterAll(() => copy.remove());
+  }, MINUTES);
+  afterAll(() => copy.remove(), 5 * MINUTES);
 
   async function exists(start: RunningStart, path: string) {
     while (!existsSync(path)) {
