@@ -13,7 +13,8 @@ import { Problem } from './problem.mjs';
 export async function startWeb(processes, { command, port, env, log }) {
   const args = [inProject('node_modules', 'next', 'dist', 'bin', 'next'), command, '--hostname', LOOPBACK, '--port', String(port)];
   const child = processes.start('web', process.execPath, args, { cwd: root, env, log, show: log === undefined });
-  const answered = (await untilAccepting(port, child)) && (await firstAnswer(port, child));
+  // The development server would compile a page for this answer, which may be another one than is wanted.
+  const answered = (await untilAccepting(port, child)) && (command === 'dev' || (await firstAnswer(port, child)));
   if (!answered) throw new Problem('The web server did not start.', log ? `The end of its log, ${log}:\n${lastLines(log)}` : 'What it printed above says why.');
   return child;
 }

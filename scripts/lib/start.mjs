@@ -102,12 +102,14 @@ export function start({ development }) {
       if (!development && !isBuilt(DIST_DIR)) await steps.step('building the app', () => build(processes, DIST_DIR, env));
 
       const shown = (/** @type {string} */ name) => (development ? undefined : logFile(name));
-      const [web, worker] = await steps.step(development ? 'starting the development server and the worker' : 'starting the web server and the worker', () =>
+      const startServices = () =>
         Promise.all([
           startWeb(processes, { command: development ? 'dev' : 'start', port, env, log: shown('web') }),
           startWorker(processes, { env, log: shown('worker') }),
-        ]),
-      );
+        ]);
+      // In development both print to this terminal themselves, which a line that waits for its end would be torn by.
+      if (development) steps.line('  starting the development server and the worker');
+      const [web, worker] = development ? await startServices() : await steps.step('starting the web server and the worker', startServices);
       for (const line of summary({ port, mailPage: mail?.page, showDemo: plan.ownDatabase })) steps.line(line);
 
       const services = { web, worker, postgres: database.child, mail: mail?.child, storage: storage?.child };
