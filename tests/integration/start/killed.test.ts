@@ -39,7 +39,7 @@ describe('npm start', () => {
     ['while mail and storage start', (start) => start.until(/starting the local stand-ins/).then(() => sleep(200))],
     ['when mail and storage run', (start) => start.until(/bringing the database up to date/)],
     ['while the schema is migrated', (start) => start.until(/bringing the database up to date/).then(() => sleep(80))],
-    ['while the demo is filled in', (start) => start.until(/filling in the demo/).then(() => sleep(700))],
+    ['while the demo is filled in', (start) => start.until(/filling in the demo/).then(() => sleep(2_000))],
     ['while the app is built', (start) => start.until(/building the app/).then(() => sleep(3_000))],
     ['while the web server starts', (start) => start.until(/starting the web server/).then(() => sleep(300))],
   ];
@@ -74,9 +74,20 @@ describe('npm start', () => {
     const second = runStart(copy.folder, port);
     expect(await second.ended).toBe(1);
     expect(second.output()).toMatch(/already runs from this folder \(process \d+\)\.\nUse that one/);
+    const reset = runStart(copy.folder, port, 'reset-demo.mjs');
+    expect(await reset.ended).toBe(1);
+    expect(reset.output()).toMatch(/already runs.*\nStop it with Ctrl-C/);
 
     start.child.kill('SIGTERM');
     await start.ended;
+    expect(processesOf(copy.folder)).toEqual([]);
+  }, 5 * MINUTES);
+
+  it('has its demo put back, mail and all', async () => {
+    const letter = inCopy('.local', 'mail', '1-0001.eml');
+    writeFileSync(letter, 'Subject: old\n\n');
+    const reset = runStart(copy.folder, port, 'reset-demo.mjs');
+    expect([await reset.ended, existsSync(letter)], reset.output()).toEqual([0, false]);
     expect(processesOf(copy.folder)).toEqual([]);
   }, 5 * MINUTES);
 

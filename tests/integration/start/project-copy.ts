@@ -46,9 +46,9 @@ export interface RunningStart {
   ended: Promise<number | null>;
 }
 
-/** Runs what `npm start` runs. */
-export function runStart(folder: string, port: number): RunningStart {
-  const child = spawn(process.execPath, ['scripts/start.mjs'], { cwd: folder, env: environment(port), stdio: ['ignore', 'pipe', 'pipe'] });
+/** Runs what `npm start` runs, or another of the commands. */
+export function runStart(folder: string, port: number, script = 'start.mjs'): RunningStart {
+  const child = spawn(process.execPath, [join('scripts', script)], { cwd: folder, env: environment(port), stdio: ['ignore', 'pipe', 'pipe'] });
   started.push(child);
   let output = '';
   child.stdout.on('data', (chunk) => (output += chunk));
