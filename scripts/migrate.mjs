@@ -1,5 +1,6 @@
 import { pathToFileURL } from 'node:url';
 import { inProject } from './lib/paths.mjs';
+import { Problem } from './lib/problem.mjs';
 
 /** Any number will do as long as every migrator asks for the same one. */
 const LOCK = 728_101;
@@ -16,7 +17,10 @@ export async function migrate(ownerUrl) {
     import('drizzle-orm/node-postgres/migrator'),
   ]);
   const client = new pg.Client({ connectionString: ownerUrl });
-  await client.connect();
+  await client.connect().catch((error) => {
+    const { hostname, port } = new URL(ownerUrl);
+    throw new Problem(`The database at ${hostname}:${port || 5432} can't be opened as its owner: ${error.message}.`, 'Check that its server runs and that DATABASE_OWNER_URL is right, then run the command again.');
+  });
   try {
     // Notices ("schema already exists, skipping") are no news.
     await client.query('set client_min_messages = warning');

@@ -103,6 +103,8 @@ export function processKeeper(folder) {
    * @param {SpawnOptions} [options]
    */
   function start(name, command, args, options = {}) {
+    // Work that hasn't noticed yet must not start what nobody would stop.
+    if (stopping) throw new Error(`${name} is not started any more: everything is being stopped.`);
     const { log, show = false, manner = ORDINARY, removes, cwd, env, uid, gid } = options;
     const sink = log === undefined ? undefined : openSync(log, 'a');
     const output = sink ?? (show ? 'inherit' : 'pipe');
