@@ -139,7 +139,7 @@ function look(desk: CaseDesk, technician: Technician, causes: readonly TrueCause
   const [cause] = causes;
   if (again && cause && random.chance(0.7)) suspects.unshift(idOf(cause));
   for (const suspect of suspects) {
-    if (!random.chance(again ? 0.85 : 0.6)) return null;
+    if (!random.chance(again ? 0.85 : 0.65)) return null;
     if (suspect !== SOMETHING_ELSE && technician.lookFor(suspect)) return suspect;
   }
   return null;
@@ -151,7 +151,7 @@ function judge(desk: CaseDesk, causes: readonly TrueCause[], random: Random, aga
   const [cause] = causes;
   if (cause && 'unlisted' in cause && random.chance(again ? 0.9 : 0.55)) return SOMETHING_ELSE;
   const truth = cause ? idOf(cause) : '';
-  if (truth !== SOMETHING_ELSE && ranked.slice(0, 4).includes(truth) && random.chance(0.4)) return truth;
+  if (truth !== SOMETHING_ELSE && ranked.slice(0, 6).includes(truth) && random.chance(0.55)) return truth;
   return ranked.find((id) => id !== SOMETHING_ELSE) ?? SOMETHING_ELSE;
 }
 

@@ -5,7 +5,7 @@ import type { Practice } from './practice';
 import type { Vehicle } from './vehicles';
 
 /** Cases a year of an ordinary unit, before what early fates and comebacks add. */
-const CASES_A_YEAR = 0.98;
+const CASES_A_YEAR = 1.1;
 /** Share of cases that no listed cause explains. */
 export const UNLISTED_SHARE = 0.06;
 /** A campaign in the last weeks looks at every air system, so that more is found. */
@@ -35,7 +35,7 @@ const TIMES: Record<string, (c: Condition) => number> = {
   // What these two have more of comes soon after a fit (see practice.ts).
   'drain-choked-by-sealant': () => 0.03,
   'rings-not-seated': () => 0.05,
-  'discharge-line-carboned': ({ lineMiles, practice }) => (practice.dischargeLine === 'kept' ? 0.5 : 0.2) + lineMiles / 700_000,
+  'discharge-line-carboned': ({ lineMiles, practice }) => (practice.dischargeLine === 'kept' ? 0.4 : 0.1) + lineMiles / 1_000_000,
   'dryer-overdue': ({ cartridgeYears }) => 0.2 + 0.5 * Math.min(4, cartridgeYears),
   [NORMAL_CARRYOVER]: ({ cartridgeYears }) => 0.5 + 0.3 * Math.min(4, cartridgeYears),
   'system-leaks': ({ vehicle }) => ({ 'long-haul': 0.5, regional: 0.8, 'stop-start': 2, 'air-for-unloading': 1.6 })[vehicle.vocation],
@@ -45,7 +45,7 @@ const TIMES: Record<string, (c: Condition) => number> = {
   'intake-filter-clogged': ({ model }) => (model.intakeType === 'naturally-aspirated' ? 2 : 0.1),
   'oil-in-intake-air': ({ model }) => (model.intakeType === 'boosted' ? 1.5 : 0.3),
   'oil-feed-restricted': ({ practice, model }) => (practice.feedLine === 'changed' ? 0.5 : 1.3) * (model.oilFeedPlace === 'through-drive' ? 0.4 : 1.2),
-  'drive-gear-failed': ({ practice, model }) => (model.driveGear === 'steel' ? 0.5 : practice.driveGear === 'kept' ? 12 : 2),
+  'drive-gear-failed': ({ practice, model }) => (model.driveGear === 'steel' ? 0.5 : practice.driveGear === 'kept' ? 8 : 2),
   'coolant-starved': ({ model }) => (model.cooling === 'coolant' ? 1.1 : 0.2),
   'discharge-line-kinked-or-frozen': ({ month }) => (month <= 1 || month === 11 ? 3 : 0.3),
 };

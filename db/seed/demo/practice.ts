@@ -76,7 +76,7 @@ export const CHOKES = {
 /** Chance that the rings don't seat, by whether it was run in. */
 export const DOES_NOT_SEAT = { yes: 0.015, no: 0.16 };
 /** Chance that a line which was kept closes within some months; it grows with the miles that the line has on it. */
-export const KEPT_LINE_CLOSES = { atLeast: 0.16, more: 0.24, overMiles: 300_000 };
+export const KEPT_LINE_CLOSES = { atLeast: 0.3, more: 0.3, overMiles: 300_000 };
 
 /** What the way it was fitted brings on early. */
 export function earlyFates(practice: Practice, model: DemoModel, lineMiles: number, random: Random): Fate[] {

@@ -31,6 +31,8 @@ const REPLACES: Record<string, number> = {
   [SOMETHING_ELSE]: 0.2,
 };
 const REPLACES_ANYWAY = 0.06;
+const CURED_AS_MEANT = 0.96;
+const CURED_BY_LUCK = 0.25;
 
 export interface Repair {
   replaced: boolean;
@@ -46,7 +48,7 @@ export function repair(named: readonly string[], trueCauses: readonly string[], 
   const replaced = random.chance(REPLACES[main] ?? REPLACES_ANYWAY);
   const failed = trueCauses.some((id) => IN_THE_COMPRESSOR.has(id));
   const isCured = (id: string) =>
-    id === NORMAL_CARRYOVER || (replaced && IN_THE_COMPRESSOR.has(id)) || (named.includes(id) ? random.chance(0.96) : random.chance(0.15));
+    id === NORMAL_CARRYOVER || (replaced && IN_THE_COMPRESSOR.has(id)) || (named.includes(id) ? random.chance(CURED_AS_MEANT) : random.chance(CURED_BY_LUCK));
   return {
     replaced,
     whyOut: random.weighted(

@@ -8,6 +8,9 @@ import type { TrueCause, Truth } from './truth';
  */
 export const STORY_UNTOLD = 0.1;
 
+const NO_AIR = 'complaint-no-air';
+const AIR_AFTER_ALL = ['complaint-slow-air', 'complaint-cycling'];
+
 /** What is so in a case, whether anybody looks or not. */
 export class Scene {
   private readonly untold = new Map<string, boolean>();
@@ -73,6 +76,11 @@ export class Scene {
   complaints(ids: readonly string[]): string[] {
     const checks = ids.flatMap((id) => this.compiled.checks.get(id) ?? []);
     const so = checks.filter((check) => this.answer(check) === 'yes').map(({ id }) => id);
+    // What builds slowly or never rests does build air.
+    if (so.includes(NO_AIR) && so.some((id) => AIR_AFTER_ALL.includes(id))) {
+      this.drawn.set(NO_AIR, 'no');
+      return so.filter((id) => id !== NO_AIR);
+    }
     if (so.length > 0) return so;
     const [cause] = this.causes;
     const likely = (check: CompiledCheck) => (cause ? (this.truth.chances(check, cause)[check.stateIndex.get('yes') ?? 0] ?? 0) : 0);

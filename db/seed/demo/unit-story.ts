@@ -15,9 +15,11 @@ import type { Vehicle } from './vehicles';
 
 /** Share of cases with two causes at once. */
 export const TWO_CAUSES_SHARE = 0.08;
+/** Share of cases that could have two: not those that come back, nor those with nothing to repair or nothing listed. */
+const MAY_HAVE_TWO = 0.6;
 /** Compressors changed with no case at all, a year: engine overhauls, mostly. */
 const CHANGED_WITHOUT_A_CASE = 0.05;
-const COMES_BACK = 0.85;
+const COMES_BACK = 0.75;
 const COMES_BACK_AFTER_DAYS = 32;
 const OTHER_MODEL = 0.12;
 /** Wear and seasons move slowly; a new compressor changes the rates at once. */
@@ -120,7 +122,7 @@ export class UnitStory {
   }
 
   private secondCause(first: string, rates: Float64Array): TrueCause[] {
-    if (first === NORMAL_CARRYOVER || !this.random.chance(TWO_CAUSES_SHARE * 1.25)) return [];
+    if (first === NORMAL_CARRYOVER || !this.random.chance(TWO_CAUSES_SHARE / MAY_HAVE_TWO)) return [];
     const { causes } = this.world.compiled.rulebook;
     const never = new Set([first, NORMAL_CARRYOVER, SOMETHING_ELSE]);
     const second = causes[this.random.index(rates.map((rate, c) => (never.has(causes[c]?.id ?? '') ? 0 : rate)))];
