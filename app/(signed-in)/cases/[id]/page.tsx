@@ -47,8 +47,8 @@ export default async function CasePage({ params, searchParams }: Props) {
       />
       {state.at && (
         <div className="mb-6">
-          <Notice title={`As it was on ${timeText(state.at, head.timeZone)}`}>
-            Nothing can be answered here. <Link className="underline" href={`/cases/${head.id}`}>Go back to now.</Link>
+          <Notice>
+            <strong>As it was on {timeText(state.at, head.timeZone)}.</strong> Nothing can be answered here. <Link className="underline" href={`/cases/${head.id}`}>Go back to now.</Link>
           </Notice>
         </div>
       )}
