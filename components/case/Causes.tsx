@@ -70,7 +70,7 @@ function Cause({ cause, rulebook, decibans }: { cause: CauseView; rulebook: Rule
             {change && <span className="figure block text-[0.875rem]">{change} with the last answer</span>}
           </span>
         </summary>
-        <div className="grid gap-3 pb-4 pl-2">
+        <div className="grid gap-3 pt-2 pb-4 pl-2">
           <p>{sentence}</p>
           <Reasons cause={cause} decibans={decibans} />
         </div>

@@ -38,7 +38,7 @@ function reasonView(
       direction: reason.strength.direction,
       strength: reason.strength.word,
       decibans: reason.countedDecibans,
-      note: rule?.note ?? FILLED_IN,
+      note: rule?.note ?? FILLED_IN[reason.strength.direction],
       basis: rule?.basis ?? null,
       source: rule?.source ?? null,
       without: cause.p - (cause.withoutFinding.find(({ findingId }) => reason.findingIds.includes(findingId))?.changeInP ?? 0),
@@ -46,5 +46,8 @@ function reasonView(
   ];
 }
 
-/** A weight that the compiler filled in: the answer is the rarer or the commoner for it. */
-const FILLED_IN = 'Another answer would have told more of this cause; this one is what the others leave.';
+/** A weight that the compiler filled in, so that a table adds up: what it says follows from the answers that were written. */
+const FILLED_IN = {
+  for: 'The other answers would count against this cause; this is the one they leave.',
+  against: 'Another answer would have pointed to this cause; this one does not.',
+};
