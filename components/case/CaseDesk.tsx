@@ -35,20 +35,22 @@ export function CaseDesk({ view }: { view: CaseView }) {
   };
 
   return (
-    <div className="grid gap-8 lg:grid-cols-[13rem_minmax(0,1fr)_minmax(0,26rem)]">
-      <div className="order-3 lg:order-1"><Stations state={state} rulebook={rulebook} picked={station} onPick={setStation} /></div>
-      <div className="order-1 grid min-w-0 content-start gap-8 lg:order-2">
+    <div className="grid gap-8 lg:grid-cols-[13rem_minmax(0,1fr)_minmax(0,26rem)] lg:grid-rows-[auto_1fr]">
+      <div className="min-w-0 lg:col-start-2 lg:row-start-1">
         {station ? (
           <StationChecks station={station} name={stationName(station)} state={state} rulebook={rulebook} onPick={pick} />
         ) : (
           !readOnly && <AtHandView {...{ handle, rulebook, picked, onPick: setPicked }} />
         )}
-        <Answered handle={handle} rulebook={rulebook} timeZone={view.head.timeZone} readOnly={readOnly} onPick={pick} />
       </div>
-      <div className="order-2 grid min-w-0 content-start gap-8 lg:order-3">
+      <div className="grid min-w-0 content-start gap-8 lg:col-start-3 lg:row-span-2 lg:row-start-1">
         <Causes state={state} rulebook={rulebook} />
         {!readOnly && <WhatNext state={state} rulebook={rulebook} readOnly={readOnly} onPick={pick} />}
       </div>
+      <div className="min-w-0 lg:col-start-2 lg:row-start-2">
+        <Answered handle={handle} rulebook={rulebook} timeZone={view.head.timeZone} readOnly={readOnly} onPick={pick} />
+      </div>
+      <div className="lg:col-start-1 lg:row-span-2 lg:row-start-1"><Stations state={state} rulebook={rulebook} picked={station} onPick={setStation} /></div>
       <LiveRegion>{spoken(state, rulebook)}</LiveRegion>
     </div>
   );
