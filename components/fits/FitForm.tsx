@@ -12,7 +12,6 @@ import { TextField } from '@/components/ui/TextField';
 import { TextareaField } from '@/components/ui/TextareaField';
 import { FormSection } from '@/components/units/FormSection';
 import { ReadingFields } from '@/components/units/ReadingFields';
-import { RecordVersion } from '@/components/units/RecordVersion';
 import { dayText } from '@/lib/schemas/day-text';
 import { PARTS_WITH_IT } from '@/lib/schemas/fit';
 import { termOptions } from '@/lib/schemas/terms';
@@ -31,6 +30,8 @@ interface Props {
 }
 
 const NOT_KNOWN = 'Nobody knows';
+
+const OUT = ['removedOn', 'whyOut', 'removedOdometer', 'removedEngineHours'];
 
 /** A compressor on a unit: which, when, how it was fitted, and how it came out if it has. */
 export function FitForm({ action, models, units, today, stored, fit }: Props) {
@@ -55,11 +56,11 @@ export function FitForm({ action, models, units, today, stored, fit }: Props) {
       ) : (
         <>
           <input type="hidden" name="fitId" value={fit.fitId} readOnly />
-          <RecordVersion form={form} version={fit.version} />
+          <input type="hidden" name="version" value={fit.version} readOnly />
         </>
       )}
       {isNew && fit.standing && (
-        <FormSection title="The one that comes out" hint={`A ${fit.standing.modelName} has been on the unit since ${dayText(fit.standing.installedOn)}. It comes out on the day, and at the readings, at which this one goes on.`}>
+        <FormSection title="The one that comes out" hint={`The ${fit.standing.modelName} has been on the unit since ${dayText(fit.standing.installedOn)}. It comes out on the day, and at the readings, at which this one goes on.`}>
           <SelectField label="Why it comes out" placeholder="Choose why" options={termOptions('whyOut')} {...field('previousWhyOut')} />
         </FormSection>
       )}
@@ -70,7 +71,7 @@ export function FitForm({ action, models, units, today, stored, fit }: Props) {
         <ReadingFields form={form} units={units} names={{ odometer: 'installedOdometer', engineHours: 'installedEngineHours' }} stored={stored} />
       </FormSection>
       <HowItWasFitted field={field} />
-      <Folded folded={isNew} open={form.message !== undefined || Boolean(stored.removedOn)} title={isNew ? 'It has come out already' : 'How it came out'}>
+      <Folded folded={isNew} open={OUT.some((name) => field(name).error !== undefined || field(name).defaultValue !== '')} title={isNew ? 'It has come out already' : 'How it came out'}>
         {out}
       </Folded>
       <TextareaField label="Note" required={false} {...field('note')} />

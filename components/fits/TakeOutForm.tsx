@@ -7,7 +7,6 @@ import { RadioGroup } from '@/components/ui/RadioGroup';
 import { SubmitButton } from '@/components/ui/SubmitButton';
 import { TextField } from '@/components/ui/TextField';
 import { ReadingFields } from '@/components/units/ReadingFields';
-import { RecordVersion } from '@/components/units/RecordVersion';
 import { termOptions } from '@/lib/schemas/terms';
 import type { UnitPreferences } from '@/lib/units';
 
@@ -28,7 +27,7 @@ export function TakeOutForm({ action, fitId, version, today, units }: Props) {
   return (
     <Form form={form}>
       <input type="hidden" name="fitId" value={fitId} readOnly />
-      <RecordVersion form={form} version={version} />
+      <input type="hidden" name="version" value={version} readOnly />
       <TextField label="Came out on" type="date" max={today} required {...form.field('removedOn', today)} />
       <ReadingFields form={form} units={units} names={{ odometer: 'removedOdometer', engineHours: 'removedEngineHours' }} />
       <RadioGroup label="Why it came out" choices={termOptions('whyOut')} required name="whyOut" error={why.error} defaultValue={why.defaultValue} />

@@ -9,7 +9,6 @@ import { TextField } from '@/components/ui/TextField';
 import { TextareaField } from '@/components/ui/TextareaField';
 import { FormSection } from '@/components/units/FormSection';
 import { MeasureField } from '@/components/units/MeasureField';
-import { RecordVersion } from '@/components/units/RecordVersion';
 import { termOptions } from '@/lib/schemas/terms';
 import type { UnitPreferences } from '@/lib/units';
 import { MODEL_MEASURE_FIELDS } from './model-measures';
@@ -34,7 +33,7 @@ export function ModelForm({ action, units, stored, model }: Props) {
       ) : (
         <>
           <input type="hidden" name="modelId" value={model.modelId} readOnly />
-          <RecordVersion form={form} version={model.version} />
+          <input type="hidden" name="version" value={model.version} readOnly />
         </>
       )}
       <TextField label="Name" hint="As your workshop calls it" autoComplete="off" required className="max-w-md" {...field('name')} />

@@ -1,5 +1,6 @@
 import type { ComponentProps } from 'react';
 import { NumberWithUnitField } from '@/components/ui/NumberWithUnitField';
+import { TextField } from '@/components/ui/TextField';
 import { measureUnit, type MeasureField as Measure } from '@/lib/schemas/measures';
 import { formatQuantity, unitDefinition, type Quantity, type UnitPreferences } from '@/lib/units';
 
@@ -12,7 +13,8 @@ type Props = Pick<ComponentProps<typeof NumberWithUnitField>, 'label' | 'hint' |
 
 /** A measured figure in the person's unit; a figure with a unit of its own is read as well. */
 export function MeasureField({ measure, units, ...field }: Props) {
-  return <NumberWithUnitField {...field} unit={unitDefinition<Quantity>(measure.quantity, measureUnit(units, measure)).symbol} />;
+  const { symbol } = unitDefinition<Quantity>(measure.quantity, measureUnit(units, measure));
+  return symbol === '' ? <TextField inputMode="decimal" autoComplete="off" {...field} /> : <NumberWithUnitField {...field} unit={symbol} />;
 }
 
 /** A stored measure as the person reads it; nothing where there is none. */

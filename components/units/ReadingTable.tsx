@@ -8,7 +8,7 @@ import { measureText } from './MeasureField';
 
 export type Reading = UnitPage['readings'][number];
 
-const ENTERED_WITH: Record<string, string> = { unit: 'the unit', fit: 'a fit', case: 'a case' };
+const ENTERED_WITH: Record<string, string> = { unit: 'With the unit', fit: 'With a fit', case: 'With a case' };
 
 /** Odometer and engine hours by day, the latest first. */
 export function ReadingTable({ readings, units }: { readings: readonly Reading[]; units: UnitPreferences }) {
@@ -21,23 +21,40 @@ export function ReadingTable({ readings, units }: { readings: readonly Reading[]
       empty={<EmptyState title="No reading yet">The first comes with the next case, or enter one.</EmptyState>}
       columns={[
         { key: 'day', header: 'Read on', rowHeader: true, cell: (row) => dayText(row.readOn) },
-        { key: 'odometer', header: 'Odometer', numeric: true, cell: (row) => measureText(row.odometerM, { quantity: 'distance' }, units) },
-        { key: 'hours', header: 'Engine hours', numeric: true, cell: (row) => measureText(row.engineS, { quantity: 'engineHours' }, units) },
         {
-          key: 'replaced',
-          header: 'Replaced',
+          key: 'odometer',
+          header: 'Odometer',
+          numeric: true,
+          cell: (row) => <Figure text={measureText(row.odometerM, { quantity: 'distance' }, units)} replaced={row.odometerReplaced && 'new odometer'} />,
+        },
+        {
+          key: 'hours',
+          header: 'Engine hours',
+          numeric: true,
+          cell: (row) => <Figure text={measureText(row.engineS, { quantity: 'engineHours' }, units)} replaced={row.engineHoursReplaced && 'new hour meter'} />,
+        },
+        {
+          key: 'entered',
+          header: 'Entered',
           cell: (row) => (
-            <span className="flex flex-wrap gap-1">
-              {row.odometerReplaced && <Tag>new odometer</Tag>}
-              {row.engineHoursReplaced && <Tag>new hour meter</Tag>}
-            </span>
+            <>
+              {ENTERED_WITH[row.source] ?? row.source}
+              {row.by && `, by ${row.by}`}
+              {row.note && <p className="text-ink-soft">{row.note}</p>}
+            </>
           ),
         },
-        { key: 'with', header: 'Entered with', cell: (row) => ENTERED_WITH[row.source] ?? row.source },
-        { key: 'by', header: 'By', cell: (row) => row.by },
-        { key: 'note', header: 'Note', cell: (row) => row.note },
       ]}
     />
+  );
+}
+
+function Figure({ text, replaced }: { text: string | null; replaced: string | false }) {
+  return (
+    <>
+      {replaced && <span className="mr-2"><Tag>{replaced}</Tag></span>}
+      {text}
+    </>
   );
 }
 

@@ -59,7 +59,7 @@ export function StrikeReadingForm<Result>({ action, unitId, readings }: { action
         <input type="hidden" name="unitId" value={unitId} readOnly />
         <p>It stays in the audit, and nothing counts with it any more. Then enter the right one.</p>
         <SelectField label="Reading" placeholder="Choose the reading" required options={readings} {...form.field('readingId')} />
-        <TextField label="Why" autoComplete="off" required {...form.field('reason')} />
+        <TextField label="What is wrong with it" autoComplete="off" required {...form.field('whyWrong')} />
         <div>
           <SubmitButton variant="danger" pendingLabel="Striking out…">Strike it out</SubmitButton>
         </div>

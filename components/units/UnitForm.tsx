@@ -14,7 +14,6 @@ import type { UnitPreferences } from '@/lib/units';
 import { FormSection } from './FormSection';
 import { MeasureField } from './MeasureField';
 import { ReadingFields } from './ReadingFields';
-import { RecordVersion } from './RecordVersion';
 
 interface Props {
   action: (previous: ActionState<{ id: string }>, form: FormData) => Promise<ActionState<{ id: string }>>;
@@ -39,7 +38,7 @@ export function UnitForm({ action, sites, units, stored, unit }: Props) {
       ) : (
         <>
           <input type="hidden" name="unitId" value={unit.unitId} readOnly />
-          <RecordVersion form={form} version={unit.version} />
+          <input type="hidden" name="version" value={unit.version} readOnly />
         </>
       )}
       <FormSection title="Which unit">

@@ -5,7 +5,10 @@ import { pageNumber } from './common';
 
 export const ROWS_A_PAGE = 50;
 
-export const filterText = z.string().trim().max(60).optional().catch(undefined);
+/** Part of a name or number that is looked for. No database holds a control character in one, and PostgreSQL refuses to compare with NUL. */
+export const searchText = z.string().trim().max(60, 'That is longer than anything here is called.').regex(/^\P{Cc}*$/u, 'There is a character in it that can’t be typed.');
+
+export const filterText = searchText.optional().catch(undefined);
 
 export const filterId = z.uuid().optional().catch(undefined);
 

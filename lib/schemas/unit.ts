@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { checkbox, line, optionalLine, rowId } from './common';
-import { filterId, filterOf, filterText, ordered } from './list';
+import { filterId, filterOf, filterText, ordered, searchText } from './list';
 import { day, measureText, optionalCount, optionalDay, reason, versionText } from './record';
 import { optionalTerm, term } from './terms';
 
@@ -49,7 +49,8 @@ export const showUnitInput = z.strictObject({ unitId: rowId, reason: optionalLin
 
 export const addReadingInput = z.strictObject({ unitId: rowId, readOn: day('the day of the reading'), ...readings, note: optionalLine(500) });
 
-export const strikeReadingInput = z.strictObject({ unitId: rowId, readingId: rowId, reason });
+/** Not `reason`: its form stands on one page with that of hiding the unit, and a field's name is its id. */
+export const strikeReadingInput = z.strictObject({ unitId: rowId, readingId: rowId, whyWrong: reason });
 
 export const UNIT_SORTS = ['number', 'site', 'kind', 'vocation', 'built'] as const;
 
@@ -63,6 +64,6 @@ export const listUnitsInput = z.object({
 });
 
 export const searchUnitsInput = z.object({
-  q: z.string().trim().max(60, 'A fleet number is shorter than that.').default(''),
+  q: searchText.default(''),
   limit: z.coerce.number().int().min(1).max(50).default(10),
 });

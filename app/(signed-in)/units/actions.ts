@@ -11,13 +11,16 @@ import { changeUnit as change } from '@/lib/services/unit/change';
 import { createUnit as add } from '@/lib/services/unit/create';
 import { hideUnit as hide, showUnit as show } from '@/lib/services/unit/hide';
 import { strikeReading as strikeOut } from '@/lib/services/unit/strike-reading';
+import { editing } from '../editing';
+
+const PAGES = '/units';
 
 const toUnit = ({ id }: { id: string }) => redirect(`/units/${id}`);
 const toItsUnit = ({ unitId }: { unitId: string }) => redirect(`/units/${unitId}`);
-const readAnew = () => revalidatePath('/units', 'layout');
+const readAnew = () => revalidatePath(PAGES, 'layout');
 
 export const addUnit = action(add, { after: toUnit });
-export const changeUnit = action(change, { after: toUnit });
+export const changeUnit = editing(action(change, { after: toUnit }), PAGES);
 export const hideUnit = action(hide, { after: readAnew });
 export const showUnit = action(show, { after: readAnew });
 
@@ -25,6 +28,6 @@ export const addReading = action(noteDown, { after: toItsUnit });
 export const strikeReading = action(strikeOut, { after: readAnew });
 
 export const addFit = action(create, { after: toItsUnit });
-export const changeFit = action(correct, { after: toItsUnit });
-export const takeOutFit = action(takeOut, { after: toItsUnit });
+export const changeFit = editing(action(correct, { after: toItsUnit }), PAGES);
+export const takeOutFit = editing(action(takeOut, { after: toItsUnit }), PAGES);
 export const strikeFit = action(strike, { after: toItsUnit });

@@ -36,6 +36,7 @@ export const createFit = defineWrite({
 
     const fits = await selectFitsOfUnit(tx, { organisationId, unitId });
     const standing = fits.find((fit) => fit.removedOn === null && fit.installedOn <= columns.installedOn);
+    if (previousWhyOut && !standing) throw invalid({ previousWhyOut: 'No compressor was on the unit on that day that could come out. Leave this open.' });
     if (standing && previousWhyOut) await takeOutFor(work, standing, { ...columns, whyOut: previousWhyOut });
     else if (standing && overlaps(standing, columns)) {
       throw invalid({ previousWhyOut: `The ${standing.modelName} fitted on ${dayText(standing.installedOn)} is still on the unit. Say why it comes out.` });
@@ -74,7 +75,7 @@ export function refuseOverlap(others: readonly FitRow[], span: { installedOn: st
   if (!other) return;
   const until = other.removedOn ? `from ${dayText(other.installedOn)} to ${dayText(other.removedOn)}` : `since ${dayText(other.installedOn)}`;
   const field = other.installedOn > span.installedOn ? 'removedOn' : 'installedOn';
-  throw invalid({ [field]: `A ${other.modelName} was on the unit ${until}. Two can’t be on it at once.` });
+  throw invalid({ [field]: `The ${other.modelName} was on the unit ${until}. Two can’t be on it at once.` });
 }
 
 /** @throws AppError "invalid" beside `modelId` */

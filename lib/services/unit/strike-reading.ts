@@ -14,12 +14,12 @@ export const strikeReading = defineWrite({
   roles: PERMITTED['unit.edit'],
   input: strikeReadingInput,
   run: async (work) => {
-    const { unitId, readingId, reason } = work.input;
+    const { unitId, readingId, whyWrong } = work.input;
     const of = { organisationId: work.ctx.organisation.id, unitId };
     await lockUnit(work.tx, of);
     const readings = await selectReadings(work.tx, of);
     if (!readings.some((reading) => reading.id === readingId)) throw notFound('reading');
-    await strikeOut(work, { readingId, reason });
+    await strikeOut(work, { readingId, reason: whyWrong });
     return { unitId };
   },
 });

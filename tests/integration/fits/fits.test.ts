@@ -194,6 +194,11 @@ describe('correcting a fit', () => {
   });
 });
 
+test('why the one before came out is refused where none was on the unit', async () => {
+  const { fit } = await unitToFit();
+  await expect(fit({ previousWhyOut: 'unknown' })).rejects.toMatchObject({ fields: { previousWhyOut: expect.stringContaining('No compressor') } });
+});
+
 test('a fit struck out by mistake takes its readings with it', async () => {
   const { ctx, fit, unitNow } = await unitToFit();
   const fitId = await fit({ installedOdometer: '200,000', removedOn: '2024-09-01', removedOdometer: '210,000', whyOut: 'unknown' });

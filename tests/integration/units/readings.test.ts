@@ -82,7 +82,7 @@ describe('a wrong reading', () => {
     await add('2025-04-01', '1,200,000');
     await expect(add('2025-05-01', '121,000')).rejects.toMatchObject({ code: 'invalid' });
     const wrong = (await read()).at(-1);
-    await strikeReading({ ctx, input: { unitId, readingId: wrong?.id ?? '', reason: 'A nought too many' } });
+    await strikeReading({ ctx, input: { unitId, readingId: wrong?.id ?? '', whyWrong: 'A nought too many' } });
     await add('2025-05-01', '121,000');
     expect((await read()).map((row) => row.readOn)).toEqual(['2025-01-10', '2025-03-10', '2025-05-01']);
     expect((await listUnits({ ctx, input: {} })).units[0]?.readOn).toBe('2025-05-01');
@@ -92,7 +92,7 @@ describe('a wrong reading', () => {
     const one = await unitWithReadings();
     const [reading] = await one.read();
     const other = await unitWithReadings();
-    await expect(strikeReading({ ctx: other.ctx, input: { unitId: other.unitId, readingId: reading?.id ?? '', reason: 'x' } })).rejects.toMatchObject({ code: 'not-found' });
+    await expect(strikeReading({ ctx: other.ctx, input: { unitId: other.unitId, readingId: reading?.id ?? '', whyWrong: 'x' } })).rejects.toMatchObject({ code: 'not-found' });
   });
 });
 

@@ -4,7 +4,6 @@ import { MODEL_MEASURE_FIELDS } from '@/components/models/model-measures';
 import { ButtonLink } from '@/components/ui/Button';
 import { DataTable } from '@/components/ui/DataTable';
 import { DefinitionList } from '@/components/ui/DefinitionList';
-import { EmptyState } from '@/components/ui/EmptyState';
 import { Notice } from '@/components/ui/Notice';
 import { PageHeader } from '@/components/ui/PageHeader';
 import { Tag } from '@/components/ui/Tag';
@@ -63,22 +62,23 @@ export default async function ModelPage({ params }: { params: Promise<{ id: stri
           />
         </section>
       </div>
-      <section aria-labelledby="on-units" className="mt-12 grid gap-4">
-        <h2 id="on-units">On these units now</h2>
-        <DataTable
-          caption="Units with this compressor"
-          captionHidden
-          rows={units}
-          rowKey={(row) => row.fitId}
-          empty={<EmptyState title="On no unit now">Record a fit on a unit’s page.</EmptyState>}
-          columns={[
-            { key: 'unit', header: 'Unit', rowHeader: true, cell: (row) => <Link className="inline-flex min-h-touch items-center underline underline-offset-4" href={`/units/${row.unitId}`}>{row.fleetNumber}</Link> },
-            { key: 'site', header: 'Site', cell: (row) => row.siteName },
-            { key: 'condition', header: 'New or rebuilt', cell: (row) => termLabel('condition', row.condition) },
-            { key: 'since', header: 'Fitted', cell: (row) => <Link href={`/units/${row.unitId}/fits/${row.fitId}`}>{dayText(row.installedOn)}</Link> },
-          ]}
-        />
-      </section>
+      {units.length > 0 && (
+        <section aria-labelledby="on-units" className="mt-12 grid gap-4">
+          <h2 id="on-units">On these units now</h2>
+          <DataTable
+            caption="Units with this compressor"
+            captionHidden
+            rows={units}
+            rowKey={(row) => row.fitId}
+            columns={[
+              { key: 'unit', header: 'Unit', rowHeader: true, cell: (row) => <Link className="inline-flex min-h-touch items-center underline underline-offset-4" href={`/units/${row.unitId}`}>{row.fleetNumber}</Link> },
+              { key: 'site', header: 'Site', cell: (row) => row.siteName },
+              { key: 'condition', header: 'New or rebuilt', cell: (row) => termLabel('condition', row.condition) },
+              { key: 'since', header: 'Fitted', cell: (row) => <Link href={`/units/${row.unitId}/fits/${row.fitId}`}>{dayText(row.installedOn)}</Link> },
+            ]}
+          />
+        </section>
+      )}
       {mayEdit && !model.hiddenAt && (
         <div className="mt-10">
           <HideForm action={hideModel} id={{ name: 'modelId', value: id }} title="Hide this model" explains="For a model that is out of use or was entered twice. It can’t be chosen for new fits then; it can be shown again." />

@@ -52,10 +52,16 @@ export default async function UnitPage({ params }: { params: Promise<{ id: strin
         </Notice>
       )}
       <div className="grid gap-x-14 gap-y-12 lg:grid-cols-[3fr_2fr]">
-        <section aria-labelledby="history" className="min-w-0">
-          <h2 id="history" className="mb-4">History</h2>
-          <History unitId={id} fits={fits} cases={cases} today={today} units={units} />
-        </section>
+        <div className="grid min-w-0 content-start gap-12">
+          <section aria-labelledby="history" className="min-w-0">
+            <h2 id="history" className="mb-4">History</h2>
+            <History unitId={id} fits={fits} cases={cases} today={today} units={units} />
+          </section>
+          <section aria-labelledby="readings" className="grid min-w-0 gap-4">
+            <h2 id="readings">Odometer and engine hours</h2>
+            <ReadingTable readings={readings} units={units} />
+          </section>
+        </div>
         <div className="grid content-start gap-12">
           <section aria-labelledby="facts">
             <h2 id="facts" className="mb-4">The unit</h2>
@@ -70,10 +76,6 @@ export default async function UnitPage({ params }: { params: Promise<{ id: strin
           )}
         </div>
       </div>
-      <section aria-labelledby="readings" className="mt-12 grid gap-4">
-        <h2 id="readings">Odometer and engine hours</h2>
-        <ReadingTable readings={readings} units={units} />
-      </section>
       {mayEdit && (
         <div className="mt-10 grid gap-2">
           {readings.length > 0 && (
