@@ -3,7 +3,7 @@ import { complaintIds } from '@/lib/services/case/complaints';
 import { DAYS_OF_RECORD, WorkClock } from './calendar';
 import { CaseDesk } from './case-desk';
 import type { Mileage } from './mileage';
-import { DEMO_ENGINEER, DEMO_MANAGER, techniciansAt } from './organisation';
+import { DEMO_ENGINEER, DEMO_MANAGER, techniciansAt, type DemoPerson } from './organisation';
 import type { Random } from './random';
 import { Scene } from './scene';
 import { Technician, type Pace, type Shop } from './technician';
@@ -68,7 +68,7 @@ export function tellCase(world: World, shop: Shop, trouble: Trouble, random: Ran
   const staysOpen = random.chance(chanceToBeOpen(DAYS_OF_RECORD - day));
   technician.diagnose(staysOpen ? unfinished(day, random) : finished(day, random));
   const outcome: Outcome = { complaints, called: null };
-  if (!staysOpen && !clock.isOver) outcome.called = conclude(desk, technician, scene, causes, self, random);
+  if (!staysOpen && !clock.isOver) outcome.called = conclude({ desk, technician, causes, self, random });
   desk.finish();
   world.truths.set(desk.id, causes);
   return outcome;
@@ -89,51 +89,60 @@ const finished = (day: number, random: Random): Pace => ({
   restsUntilDay: random.chance(0.2) ? day + random.whole(1, 5) : null,
 });
 
-function conclude(desk: CaseDesk, technician: Technician, scene: Scene, causes: readonly TrueCause[], self: Parameters<CaseDesk['call']>[1], random: Random): Outcome['called'] {
+interface Working {
+  desk: CaseDesk;
+  technician: Technician;
+  causes: readonly TrueCause[];
+  self: DemoPerson;
+  random: Random;
+}
+
+/** Looks, names a cause, and what the weeks after make of it: closed, still watched, or found out and named anew. */
+function conclude(working: Working, isSecondTry = false): Outcome['called'] {
+  const { desk, causes, self, random } = working;
   const { clock } = desk;
-  for (let round = 0; ; round += 1) {
-    const seen = look(desk, technician, causes, random, round > 0);
-    clock.advance(random.between(3, 90));
-    if (clock.isOver) return null;
-    const main = seen ?? judge(desk, causes, random, round > 0);
-    const right = causes.some((cause) => idOf(cause) === main);
-    const watchedDays = random.whole(14, 45);
-    const isOver = clock.day + watchedDays < DAYS_OF_RECORD;
-    const isFoundOut = !right && round === 0 && random.chance(FOUND_OUT);
-    const contributing = others(desk, causes, main, random);
-    desk.call(
-      {
-        mainCause: main,
-        contributingCauses: contributing,
-        ...wordsFor(desk, causes, main, seen !== null, random),
-        sureness: surenessOf(desk, main, seen !== null),
-        proof: seen === null ? proofLater(right, isOver && !isFoundOut, random) : 'seen',
-      },
-      random.chance(0.15) ? DEMO_ENGINEER : self,
-    );
-    const called = { main, named: [main, ...contributing], right, day: clock.day };
-    if (isFoundOut) {
-      const days = random.whole(4, 24);
-      if (clock.day + days < DAYS_OF_RECORD - 1) {
-        clock.goTo(clock.day + days, 7 * 60 + random.whole(10, 300));
-        if (!clock.isOver) {
-          desk.reopen(random.pick(REOPENED).replace('{days}', String(days)), self);
-          clock.advance(random.between(4, 30));
-          technician.diagnose({ answers: random.whole(2, 6), sureAt: 0.98, restsUntilDay: null });
-          continue;
-        }
-      }
-    }
-    if (isOver && !random.chance(0.03)) {
-      clock.goTo(clock.day + watchedDays, 8 * 60 + random.whole(0, 400));
-      if (!clock.isOver) desk.close(random.pick(CLOSED).replace('{days}', String(watchedDays)), random.chance(0.3) ? DEMO_MANAGER : self);
-    }
-    return called;
+  const seen = look(working, isSecondTry);
+  clock.advance(random.between(3, 90));
+  if (clock.isOver) return null;
+  const main = seen ?? judge(working, isSecondTry);
+  const right = causes.some((cause) => idOf(cause) === main);
+  const watchedDays = random.whole(14, 45);
+  const isWatched = clock.day + watchedDays < DAYS_OF_RECORD;
+  const backAfter = !right && !isSecondTry && random.chance(FOUND_OUT) ? random.whole(4, 24) : Infinity;
+  const isFoundOut = clock.day + backAfter < DAYS_OF_RECORD - 1;
+  const contributing = others(working, main);
+  desk.call(
+    {
+      mainCause: main,
+      contributingCauses: contributing,
+      ...wordsFor(working, main, seen !== null),
+      sureness: surenessOf(desk, main, seen !== null),
+      proof: seen === null ? proofLater(right, isWatched && !isFoundOut, random) : 'seen',
+    },
+    random.chance(0.15) ? DEMO_ENGINEER : self,
+  );
+  const called = { main, named: [main, ...contributing], right, day: clock.day };
+  if (isFoundOut) return takeBack(working, backAfter);
+  if (isWatched && !random.chance(0.03)) {
+    clock.goTo(clock.day + watchedDays, 8 * 60 + random.whole(0, 400));
+    if (!clock.isOver) desk.close(random.pick(CLOSED).replace('{days}', String(watchedDays)), random.chance(0.3) ? DEMO_MANAGER : self);
   }
+  return called;
+}
+
+/** The trouble is back while the case is still at hand: it is reopened, and goes on from there. */
+function takeBack(working: Working, days: number): Outcome['called'] {
+  const { desk, technician, self, random } = working;
+  desk.clock.goTo(desk.clock.day + days, 7 * 60 + random.whole(10, 300));
+  if (desk.clock.isOver) return null;
+  desk.reopen(random.pick(REOPENED).replace('{days}', String(days)), self);
+  desk.clock.advance(random.between(4, 30));
+  technician.diagnose({ answers: random.whole(2, 6), sureAt: 0.98, restsUntilDay: null });
+  return conclude(working, true);
 }
 
 /** Opens what would show the leading causes, one after the other; the cause that was seen, if one was. */
-function look(desk: CaseDesk, technician: Technician, causes: readonly TrueCause[], random: Random, again: boolean): string | null {
+function look({ desk, technician, causes, random }: Working, again: boolean): string | null {
   // Whoever sees it come back looks where it really is more often than not.
   const suspects = desk.ranking.causes.slice(0, 3).map(({ causeId }) => causeId);
   const [cause] = causes;
@@ -146,7 +155,7 @@ function look(desk: CaseDesk, technician: Technician, causes: readonly TrueCause
 }
 
 /** What somebody names who has not seen it: mostly what leads. */
-function judge(desk: CaseDesk, causes: readonly TrueCause[], random: Random, again: boolean): string {
+function judge({ desk, causes, random }: Working, again: boolean): string {
   const ranked = desk.ranking.causes.map(({ causeId }) => causeId);
   const [cause] = causes;
   if (cause && 'unlisted' in cause && random.chance(again ? 0.9 : 0.55)) return SOMETHING_ELSE;
@@ -155,14 +164,14 @@ function judge(desk: CaseDesk, causes: readonly TrueCause[], random: Random, aga
   return ranked.find((id) => id !== SOMETHING_ELSE) ?? SOMETHING_ELSE;
 }
 
-function others(desk: CaseDesk, causes: readonly TrueCause[], main: string, random: Random): string[] {
+function others({ desk, causes, random }: Working, main: string): string[] {
   const second = causes.map(idOf).find((id) => id !== main && id !== SOMETHING_ELSE);
   if (causes.length > 1 && second && random.chance(0.6)) return [second];
   const runnerUp = desk.ranking.causes.find(({ causeId }) => causeId !== main && causeId !== SOMETHING_ELSE);
   return runnerUp && runnerUp.p > 0.1 && random.chance(0.07) ? [runnerUp.causeId] : [];
 }
 
-function wordsFor(desk: CaseDesk, causes: readonly TrueCause[], main: string, wasSeen: boolean, random: Random) {
+function wordsFor({ desk, causes, random }: Working, main: string, wasSeen: boolean) {
   const leads = desk.ranking.causes[0]?.causeId === main;
   const unlisted = causes.map((cause) => ('unlisted' in cause ? UNLISTED[cause.unlisted] : undefined)).find(Boolean);
   return {
