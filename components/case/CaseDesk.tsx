@@ -14,7 +14,7 @@ import { CheckAtHand } from './CheckAtHand';
 import { PanelAtHand } from './PanelAtHand';
 import { StationChecks } from './StationChecks';
 import { Stations } from './Stations';
-import { useCase, type CaseHandle } from './use-case';
+import { useCase, useCaseReasons, type CaseHandle } from './use-case';
 import { WhatNext } from './WhatNext';
 import { changeText } from './words';
 
@@ -25,6 +25,7 @@ export function CaseDesk({ view }: { view: CaseView }) {
   const { rulebook } = view;
   const handle = useCase(view);
   const { state } = handle;
+  const reasons = useCaseReasons(state, view.reasons);
   const [picked, setPicked] = useState<Picked>(null);
   const [station, setStation] = useState<StationId | null>(null);
   const readOnly = state.at !== null || state.status !== 'open';
@@ -44,8 +45,8 @@ export function CaseDesk({ view }: { view: CaseView }) {
         )}
       </div>
       <div className="grid min-w-0 content-start gap-8 lg:col-start-3 lg:row-span-2 lg:row-start-1">
-        <Causes state={state} rulebook={rulebook} />
-        {!readOnly && <WhatNext state={state} rulebook={rulebook} readOnly={readOnly} onPick={pick} />}
+        <Causes state={state} reasons={reasons} rulebook={rulebook} />
+        {!readOnly && <WhatNext state={state} settle={reasons.settle} rulebook={rulebook} readOnly={readOnly} onPick={pick} />}
       </div>
       <div className="min-w-0 lg:col-start-2 lg:row-start-2">
         <Answered handle={handle} rulebook={rulebook} timeZone={view.head.timeZone} readOnly={readOnly} onPick={pick} />

@@ -3,7 +3,7 @@
 import { useState } from 'react';
 import { Notice } from '@/components/ui/Notice';
 import { SightGlass, percent } from '@/components/ui/SightGlass';
-import type { CaseState, CauseView, RulebookView } from '@/lib/schemas/case-view';
+import type { CaseReasons, CaseState, CauseView, ReasonView, RulebookView } from '@/lib/schemas/case-view';
 import { Reasons } from './Reasons';
 import { changeText } from './words';
 
@@ -11,11 +11,11 @@ import { changeText } from './words';
 const SHOWN = 6;
 
 /** The ranked causes, each with its level, how it moved, and its reasons when it is opened. */
-export function Causes({ state, rulebook }: { state: CaseState; rulebook: RulebookView }) {
+export function Causes({ state, reasons, rulebook }: { state: CaseState; reasons: CaseReasons; rulebook: RulebookView }) {
   const [decibans, setDecibans] = useState(false);
   const leading = state.causes.slice(0, SHOWN);
   const rest = state.causes.slice(SHOWN);
-  const row = (cause: CauseView) => <Cause key={cause.causeId} cause={cause} rulebook={rulebook} decibans={decibans} />;
+  const row = (cause: CauseView) => <Cause key={cause.causeId} cause={cause} reasons={reasons.causes[cause.causeId] ?? []} rulebook={rulebook} decibans={decibans} />;
   return (
     <section aria-labelledby="causes" className="grid gap-3">
       <div className="flex flex-wrap items-baseline justify-between gap-x-6">
@@ -42,11 +42,11 @@ export function Causes({ state, rulebook }: { state: CaseState; rulebook: Rulebo
           <ol className="border-t border-rule" start={SHOWN + 1}>{rest.map(row)}</ol>
         </details>
       )}
-      {state.pair && (
+      {reasons.pair && (
         <p className="max-w-prose">
           <strong>Two causes at once</strong> would explain this better than any one:{' '}
-          {state.pair.causeIds.map((id) => rulebook.causes[id]?.name ?? id).join(' with ')}
-          {decibans && <> (<span className="figure">{state.pair.leadDecibans.toFixed(1)} dB</span> ahead)</>}.
+          {reasons.pair.causeIds.map((id) => rulebook.causes[id]?.name ?? id).join(' with ')}
+          {decibans && <> (<span className="figure">{reasons.pair.leadDecibans.toFixed(1)} dB</span> ahead)</>}.
         </p>
       )}
       <p className="text-[0.9375rem] text-ink-soft">
@@ -57,7 +57,7 @@ export function Causes({ state, rulebook }: { state: CaseState; rulebook: Rulebo
   );
 }
 
-function Cause({ cause, rulebook, decibans }: { cause: CauseView; rulebook: RulebookView; decibans: boolean }) {
+function Cause({ cause, reasons, rulebook, decibans }: { cause: CauseView; reasons: ReasonView[]; rulebook: RulebookView; decibans: boolean }) {
   const { name, sentence } = rulebook.causes[cause.causeId] ?? { name: cause.causeId, sentence: '' };
   const change = changeText(cause.change);
   return (
@@ -72,7 +72,7 @@ function Cause({ cause, rulebook, decibans }: { cause: CauseView; rulebook: Rule
         </summary>
         <div className="grid gap-3 pt-2 pb-4 pl-2">
           <p>{sentence}</p>
-          <Reasons cause={cause} decibans={decibans} />
+          <Reasons reasons={reasons} prior={cause.prior} decibans={decibans} />
         </div>
       </details>
     </li>

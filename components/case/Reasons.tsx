@@ -1,28 +1,28 @@
 import { percent } from '@/components/ui/SightGlass';
-import type { CauseView, Direction, ReasonView } from '@/lib/schemas/case-view';
+import type { Direction, ReasonView } from '@/lib/schemas/case-view';
 import { decibanText } from './words';
 
 const HEADS: Record<Direction, string> = { for: 'Points to it', against: 'Counts against it' };
 
 /** What counted for and against a cause, the most telling first, each with what the level would be without it. */
-export function Reasons({ cause, decibans }: { cause: CauseView; decibans: boolean }) {
-  if (cause.reasons.length === 0) {
-    return <p className="text-ink-soft">Nothing that was answered tells anything of it. It stands where it stands in all cases: <span className="figure">{percent(cause.prior)}</span>.</p>;
+export function Reasons({ reasons, prior, decibans }: { reasons: ReasonView[]; prior: number; decibans: boolean }) {
+  if (reasons.length === 0) {
+    return <p className="text-ink-soft">Nothing that was answered tells anything of it. It stands where it stands in all cases: <span className="figure">{percent(prior)}</span>.</p>;
   }
   return (
     <>
       {(['for', 'against'] as const).map((direction) => {
-        const reasons = cause.reasons.filter((reason) => reason.direction === direction);
-        return reasons.length > 0 && (
+        const told = reasons.filter((reason) => reason.direction === direction);
+        return told.length > 0 && (
           <div key={direction}>
             <h3 className="label">{HEADS[direction]}</h3>
             <ul className="grid gap-2 border-t border-rule pt-2">
-              {reasons.map((reason) => <Reason key={reason.findingIds.join()} reason={reason} decibans={decibans} />)}
+              {told.map((reason) => <Reason key={reason.findingIds.join()} reason={reason} decibans={decibans} />)}
             </ul>
           </div>
         );
       })}
-      <p className="text-[0.9375rem] text-ink-soft">Before any answer: <span className="figure">{percent(cause.prior)}</span> of all cases.</p>
+      <p className="text-[0.9375rem] text-ink-soft">Before any answer: <span className="figure">{percent(prior)}</span> of all cases.</p>
     </>
   );
 }

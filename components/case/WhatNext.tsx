@@ -2,12 +2,13 @@
 
 import { Button } from '@/components/ui/Button';
 import { percent } from '@/components/ui/SightGlass';
-import type { CaseState, RulebookView } from '@/lib/schemas/case-view';
+import type { CaseState, RulebookView, SettleView } from '@/lib/schemas/case-view';
 import type { Picked } from './at-hand';
 import { minutesText } from './words';
 
 interface Props {
   state: CaseState;
+  settle: SettleView[];
   rulebook: RulebookView;
   readOnly: boolean;
   onPick: (picked: Picked) => void;
@@ -17,7 +18,7 @@ interface Props {
 const MOST_REPAIRS = 4;
 
 /** Other checks worth their time, what would settle it, and what would be repaired first as things stand. */
-export function WhatNext({ state, rulebook, readOnly, onPick }: Props) {
+export function WhatNext({ state, settle, rulebook, readOnly, onPick }: Props) {
   const { suggestions, spoiled } = state.next;
   const name = (id: string) => rulebook.checks[id]?.name ?? id;
   return (
@@ -52,11 +53,11 @@ export function WhatNext({ state, rulebook, readOnly, onPick }: Props) {
           )}
         </section>
       )}
-      {state.settle.length > 0 && (
+      {settle.length > 0 && (
         <section aria-labelledby="settle">
           <h2 id="settle">What would settle it</h2>
           <ul className="mt-2 grid gap-1">
-            {state.settle.map(({ checkId, answer, causeId, from, to }) => (
+            {settle.map(({ checkId, answer, causeId, from, to }) => (
               <li key={causeId}>
                 {name(checkId)}: <strong>{answer}</strong> would take {rulebook.causes[causeId]?.name ?? causeId} from{' '}
                 <span className="figure">{percent(from)}</span> to <span className="figure">{percent(to)}</span>.

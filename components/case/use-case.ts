@@ -7,7 +7,7 @@ import { newId } from '@/lib/ids';
 import { api } from '@/lib/query/problem';
 import { queryKeys } from '@/lib/query/keys';
 import type { AnswerInput } from '@/lib/schemas/case';
-import type { CaseState, CaseView } from '@/lib/schemas/case-view';
+import type { CaseReasons, CaseState, CaseView } from '@/lib/schemas/case-view';
 
 /** A clock off by less than this is as good as ours: the answer's way to us takes as long. */
 const CLOCK_TOLERANCE_MS = 5_000;
@@ -31,7 +31,19 @@ export function useCaseState(initial: CaseState): CaseState {
   return data;
 }
 
-/** The same, with what can be done to it. */
+/** Why the causes stand where they stand; the older reasons stay until those of the newest answer are here. */
+export function useCaseReasons({ caseId, at, version }: CaseState, initial: CaseReasons): CaseReasons {
+  const { data } = useQuery({
+    queryKey: [...queryKeys.caseReasons(caseId, version), at],
+    queryFn: () => api<CaseReasons>(`/api/v1/cases/${caseId}/reasons`),
+    initialData: version === initial.version ? initial : undefined,
+    enabled: at === null && version !== initial.version,
+    placeholderData: (held) => held ?? initial,
+  });
+  return data ?? initial;
+}
+
+/** The state of a case, with what can be done to it. */
 export function useCase({ state: initial, now }: CaseView) {
   const { caseId } = initial;
   const state = useCaseState(initial);

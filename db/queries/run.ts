@@ -1,6 +1,6 @@
 import { and, desc, eq, inArray, lte, sql } from 'drizzle-orm';
 import type { Executor } from '@/db/connect';
-import { run } from '@/db/schema';
+import { run, type RunInputs } from '@/db/schema';
 
 interface Of {
   organisationId: string;
@@ -23,8 +23,15 @@ export async function selectLastRuns(db: Executor, { by, ...of }: Of & { by?: Da
     .limit(2);
 }
 
+/** What an answer needs of the run before it. */
 export async function selectLatestRun(db: Executor, of: Of) {
-  return (await selectLastRuns(db, of))[0];
+  const [row] = await db
+    .select({ id: run.id, recordFacts: sql<RunInputs['recordFacts']>`${run.inputs} -> 'recordFacts'`, result: run.result })
+    .from(run)
+    .where(ofCase(of))
+    .orderBy(desc(run.at), desc(run.id))
+    .limit(1);
+  return row;
 }
 
 /** Everything that a run of record kept, to make it again. */

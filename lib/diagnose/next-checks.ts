@@ -80,7 +80,7 @@ export function repairProblemOf(compiled: CompiledRulebook, money: Partial<Repai
  *
  * A check pays when its expected saving, times the chance that it can be answered, exceeds its minutes (a quarter at
  * least) at the labour rate. When none pays, enough is known. A check that spoils a valuable one waits for it;
- * valuable is what pays, or settles at least some of what is left.
+ * valuable is what settles at least some of what is left.
  *
  * @param open from `openChecks`
  * @param options where the vehicle stands, and the organisation's money
@@ -112,8 +112,7 @@ export function nextChecks(open: OpenChecks, { vehicle = AS_PARKED, money = {} }
   const enoughIsKnown = !judged.some(pays);
   const atRisk = new Set(judged.flatMap(({ spoils }) => spoils));
   const worthWaitingFor = judged
-    .filter((candidate) => candidate.checkIds.length === 1 && candidate.checkIds.some((id) => atRisk.has(id)))
-    .filter((candidate) => candidate.word !== 'settles little' || pays(candidate))
+    .filter(({ checkIds, word }) => checkIds.length === 1 && word !== 'settles little' && checkIds.some((id) => atRisk.has(id)))
     .flatMap(({ checkIds }) => checkIds);
   const suggestions = placeCandidates(judged, new Set(worthWaitingFor)).map(({ candidate, waitsFor }): Suggestion => ({
     checkIds: candidate.checkIds,

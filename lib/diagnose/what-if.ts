@@ -91,12 +91,27 @@ export function createWhatIf(compiled: CompiledRulebook, findings: readonly Find
     ];
     const change = new Float64Array(compiled.causeIds.length);
     additions.forEach(({ group, nats }, index) => {
-      const earlier = additions.slice(0, index).filter((other) => other.group.id === group.id);
-      const state = earlier.length === 0 ? groups.get(group.id) : withMore(groups.get(group.id), earlier);
-      addGains(change, state, nats, group.rho);
+      const earlier = additions.slice(0, index).flatMap((other) => (other.group.id === group.id ? [other.nats] : []));
+      addGains(change, groups.get(group.id), earlier, nats, group.rho);
     });
     const { beta } = compiled.settings;
     return change.map((nats) => beta * nats);
+  }
+
+  const singles = new Map<string, Float64Array>();
+  function single(answer: { check: CompiledCheck; index: number }): Float64Array {
+    const key = `${answer.check.id} ${answer.index}`;
+    const known = singles.get(key);
+    if (known) return known;
+    const change = changes([answer]);
+    singles.set(key, change);
+    return change;
+  }
+
+  /** Whether two answers say together anything but the sum of what each says: a shared group, or a rule of both. */
+  function joined(a: { check: CompiledCheck; index: number }, b: { check: CompiledCheck; index: number }): boolean {
+    if (a.check.group.id === b.check.group.id) return true;
+    return completed([a, b]).length > 0;
   }
 
   return {
@@ -104,13 +119,16 @@ export function createWhatIf(compiled: CompiledRulebook, findings: readonly Find
     posterior: Float64Array.from(compiled.causeIds, (id) => byId.get(id)?.p ?? 0),
     scores: Float64Array.from(compiled.causeIds, (id) => byId.get(id)?.scoreNats ?? -Infinity),
     answered: new Set(facts.keys()),
-    logWeights: (checkId, state) => changes([lookUp(checkId, state)]),
+    logWeights: (checkId, state) => single(lookUp(checkId, state)).slice(),
     logWeightsPair: (checkA, stateA, checkB, stateB) => {
       if (checkA === checkB) throw new FindingError('answered-twice', checkA, `"${checkA}" stands on both sides of a pair`);
-      return changes([lookUp(checkA, stateA), lookUp(checkB, stateB)]);
+      const [a, b] = [lookUp(checkA, stateA), lookUp(checkB, stateB)];
+      return joined(a, b) ? changes([a, b]) : sumOfBoth(single(a), single(b));
     },
   };
 }
+
+const sumOfBoth = (a: Float64Array, b: Float64Array): Float64Array => a.map((nats, cause) => nats + (b[cause] ?? 0));
 
 function emptyGroup(causes: number): GroupState {
   return { for: Array.from({ length: causes }, () => []), against: Array.from({ length: causes }, () => []) };
@@ -125,23 +143,17 @@ function addTo(group: GroupState, nats: Float64Array): void {
   });
 }
 
-/** A copy of a group's state with more weights in it; what-ifs must leave the prepared state alone. */
-function withMore(group: GroupState | undefined, more: readonly { nats: Float64Array }[]): GroupState {
-  const causes = more[0]?.nats.length ?? 0;
-  const copy = emptyGroup(causes);
-  for (let cause = 0; cause < causes; cause += 1) {
-    copy.for[cause]?.push(...(group?.for[cause] ?? NO_SIZES));
-    copy.against[cause]?.push(...(group?.against[cause] ?? NO_SIZES));
-  }
-  for (const { nats } of more) addTo(copy, nats);
-  return copy;
-}
-
-function addGains(change: Float64Array, group: GroupState | undefined, nats: Float64Array, rho: number): void {
+/** Adds what one more item brings to a group that holds `group` already, and `earlier` of the same answers before it. */
+function addGains(change: Float64Array, group: GroupState | undefined, earlier: readonly Float64Array[], nats: Float64Array, rho: number): void {
   for (let cause = 0; cause < nats.length; cause += 1) {
     const weight = nats[cause] ?? 0;
     if (weight === 0) continue;
-    const sizes = (weight > 0 ? group?.for : group?.against)?.[cause] ?? NO_SIZES;
+    let sizes = (weight > 0 ? group?.for : group?.against)?.[cause] ?? NO_SIZES;
+    for (const other of earlier) {
+      const before = other[cause] ?? 0;
+      // What-ifs must leave the prepared state alone.
+      if (before * weight > 0) sizes = [...sizes, Math.abs(before)].sort((x, y) => y - x);
+    }
     const gain = attenuatedGain(sizes, Math.abs(weight), rho);
     change[cause] = (change[cause] ?? 0) + (weight > 0 ? gain : -gain);
   }

@@ -1,5 +1,6 @@
 /** Keys of everything that the browser keeps, in one place, so that what is written can say what it makes stale. */
 export const queryKeys = {
   caseState: (caseId: string) => ['case', caseId, 'state'] as const,
+  caseReasons: (caseId: string, version: number) => ['case', caseId, 'reasons', version] as const,
   unitSearch: (text: string) => ['units', 'search', text] as const,
 };

@@ -3,7 +3,7 @@ import type { Basis, Check, Ranking, SetUp, Stage, StateShare } from '@/lib/diag
 
 /**
  * What the case page and the API show of a case. `CaseHead` and `RulebookView` stay as they are while answers come
- * in; `CaseState` is what each answer changes, and what the answer's request returns.
+ * in; `CaseState` is what each answer changes, and what the answer's request returns; `CaseReasons` explain it.
  */
 export interface CaseHead {
   id: string;
@@ -62,7 +62,6 @@ export interface CauseView {
   /** p less that of the run before; null in the first. */
   change: number | null;
   prior: number;
-  reasons: ReasonView[];
 }
 
 export interface FindingView {
@@ -161,10 +160,21 @@ export interface CaseState {
   because: string | null;
   findings: FindingView[];
   next: NextView;
-  settle: SettleView[];
-  pair: { causeIds: [string, string]; leadDecibans: number } | null;
   repairs: RepairView[];
   acknowledged: { cautionId: string; dangers: string[] }[];
+}
+
+/**
+ * Why the causes stand where they stand, and what would change that. Asked for after the state has come, so that an
+ * answer is saved and ranked without waiting for words that are read later, if at all.
+ */
+export interface CaseReasons {
+  /** Of the case when they were worked out: those of an older version are about an older ranking. */
+  version: number;
+  /** By cause, most telling first. */
+  causes: Record<string, ReasonView[]>;
+  settle: SettleView[];
+  pair: { causeIds: [string, string]; leadDecibans: number } | null;
 }
 
 /** Everything that the page is made of at first. */
@@ -174,6 +184,7 @@ export interface CaseView {
   head: CaseHead;
   rulebook: RulebookView;
   state: CaseState;
+  reasons: CaseReasons;
   assignedTo: string | null;
   calls: CallView[];
   events: CaseEventView[];

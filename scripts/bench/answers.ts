@@ -8,7 +8,7 @@ import { eq } from 'drizzle-orm';
 import { connect, type Database } from '@/db/connect';
 import { lockCase } from '@/db/queries/case';
 import { insertFinding } from '@/db/queries/finding';
-import { person } from '@/db/schema';
+import { finding, person } from '@/db/schema';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { compileRulebook } from '@/lib/diagnose';
 import { defaultRulebook } from '@/lib/diagnose/default-rulebook';
@@ -38,6 +38,8 @@ const checkIds = [...compiled.checks.values()]
   .filter(({ check }) => check.kind === 'choice' && check.cautions.length === 0 && !check.id.startsWith('complaint-'))
   .map(({ id }) => id);
 
+const NEXT_CHECK = checkIds[ALREADY] ?? '';
+
 /** The baseline: what recordFinding does without ranking. */
 const insertOnly = defineWrite({
   name: 'record.finding',
@@ -60,46 +62,59 @@ const insertOnly = defineWrite({
   },
 });
 
-export async function answers() {
+export async function answers(most: number) {
   const processes = processKeeper(test.run);
   const cluster = await startThrowAwayCluster({ processes, steps: stepPrinter() });
   const database = await copyTemplate(cluster, await makeTemplate(cluster));
   const [app, owner] = [connect(database.appUrl), connect(database.ownerUrl)];
   const tenant = await makeTenant({ app: app.db, owner: owner.db, appUrl: database.appUrl, ownerUrl: database.ownerUrl, close: async () => undefined }, { rulebook: defaultRulebook });
   const cookie = await cookieOf(tenant);
-  const caseA = await openedCase(tenant);
-  const caseB = await openedCase(tenant);
+  const template = await answeredCase(tenant);
+  const copies = async () => Promise.all(Array.from({ length: most }, () => copyOf(template, tenant)));
+  const [casesA, casesB] = [await copies(), await copies()];
 
-  // Each answer changes an answer that is there, so that every request finds the same number of findings standing.
-  let turn = 0;
-  const request = async (service: typeof recordFinding | typeof insertOnly, caseId: string) => {
-    const body = JSON.stringify({ id: newId(), checkId: checkIds[turn++ % ALREADY], answer: stateAt(turn), askedBecause: 'suggested', deviceAt: new Date().toISOString() });
+  /** One answer more in a case that has twenty. */
+  const request = async (service: typeof recordFinding | typeof insertOnly, caseId: string | undefined) => {
+    const state = compiled.checks.get(NEXT_CHECK)?.stateIds[0];
+    const body = JSON.stringify({ id: newId(), checkId: NEXT_CHECK, answer: { kind: 'state', state, sureness: 'sure' }, askedBecause: 'suggested', deviceAt: new Date().toISOString() });
     const ctx = await sessionOf(app.db, cookie);
     JSON.stringify(await service({ ctx, input: { ...JSON.parse(body), caseId } }));
   };
   return {
-    a: () => request(recordFinding, caseA),
-    b: () => request(insertOnly, caseB),
+    a: () => request(recordFinding, casesA.pop()),
+    b: () => request(insertOnly, casesB.pop()),
     about: `default rulebook (${compiled.rules.size} rules, ${compiled.checks.size} checks), ${ALREADY} findings there`,
     close: async () => {
       await Promise.all([app.close(), owner.close()]);
       await processes.stopAll();
     },
   };
+}
 
-  function stateAt(n: number) {
-    const states = compiled.checks.get(checkIds[(n - 1) % ALREADY] ?? '')?.stateIds ?? [];
-    return { kind: 'state', state: states[n % states.length], sureness: 'sure' };
+/** A case with twenty answers, each given as a technician gives it. */
+async function answeredCase(tenant: Tenant): Promise<string> {
+  const id = await openedCase(tenant);
+  for (const checkId of checkIds.slice(0, ALREADY)) {
+    const state = compiled.checks.get(checkId)?.stateIds[0] ?? '';
+    await recordFinding({ ctx: tenant.ctx, input: { id: newId(), caseId: id, checkId, answer: { kind: 'state', state, sureness: 'sure' }, deviceAt: new Date().toISOString() } });
   }
+  return id;
+}
+
+/** A case with the same answers: copied, because giving them again a hundred times would take minutes. */
+async function copyOf(template: string, tenant: Tenant): Promise<string> {
+  const id = await openedCase(tenant);
+  await tenant.asOwner(async (tx) => {
+    const rows = await tx.select().from(finding).where(eq(finding.caseId, template));
+    const answers = rows.filter(({ checkId }) => !checkId.startsWith('complaint-'));
+    await tx.insert(finding).values(answers.map((row) => ({ ...row, id: newId(), caseId: id, supersedes: null })));
+  });
+  return id;
 }
 
 async function openedCase({ ctx, siteId }: Tenant): Promise<string> {
   const id = newId();
-  await openCase({ ctx, input: { id, unit: { kind: 'new', id: newId(), fleetNumber: id.slice(-6), siteId, vehicleKind: 'truck' }, complaints: ['complaint-oil'] } });
-  for (const checkId of checkIds.slice(0, ALREADY)) {
-    const state = compiled.checks.get(checkId)?.stateIds[0] ?? '';
-    await recordFinding({ ctx, input: { id: newId(), caseId: id, checkId, answer: { kind: 'state', state, sureness: 'sure' }, deviceAt: new Date().toISOString() } });
-  }
+  await openCase({ ctx, input: { id, unit: { kind: 'new', id: newId(), fleetNumber: id, siteId, vehicleKind: 'truck' }, complaints: ['complaint-oil'] } });
   return id;
 }
 

@@ -23,8 +23,9 @@ function report(name: string, ratio: Ratio, holds: boolean, limit: string) {
 }
 
 {
-  const { a, b, about, close } = await answers();
-  const measured = await compare({ a, b }, { pairs: 60, warmUp: 10 });
+  const turns = { pairs: 60, warmUp: 60 };
+  const { a, b, about, close } = await answers(turns.pairs + turns.warmUp);
+  const measured = await compare({ a, b }, turns);
   await close();
   console.log(`\nAn answer: ${about}\n  with its ranking ${ms(measured.a)}\n  insert and audit ${ms(measured.b)}`);
   report('p50', measured.ratio, measured.ratio.low <= 4, 'at most 4');

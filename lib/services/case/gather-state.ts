@@ -2,10 +2,13 @@ import type { Transaction } from '@/db/connect';
 import { selectCaseHead } from '@/db/queries/case';
 import { selectAcknowledgements, selectFindingNotes, selectFindings } from '@/db/queries/finding';
 import { selectLastRuns } from '@/db/queries/run';
+import type { RunResult } from '@/db/schema';
+import { rank, type Ranking } from '@/lib/diagnose';
 import { notFound } from '@/lib/errors';
 import type { Ctx } from '../context';
 import { compiledEdition } from '../edition/compiled';
 import type { StateParts } from './build-state';
+import { findingsForRanking } from './findings-for-ranking';
 import { siteDay } from './site-day';
 
 type Head = NonNullable<Awaited<ReturnType<typeof selectCaseHead>>>;
@@ -25,6 +28,8 @@ export async function gatherState(tx: Transaction, ctx: Ctx, { caseId, at = null
   const notes = await selectFindingNotes(tx, { ...of, by: until });
   const [run, previous] = await selectLastRuns(tx, { ...of, by: until });
   if (!run) throw notFound('state of the case');
+  const { recordFacts } = run.inputs;
+  const ranking = rank(compiled, findingsForRanking(rows), { facts: recordFacts });
   const acknowledged = await selectAcknowledgements(tx, { ...of, personId: ctx.person.id, onDay: siteDay(ctx.now(), head.timeZone) });
   return {
     caseHead: head,
@@ -32,10 +37,15 @@ export async function gatherState(tx: Transaction, ctx: Ctx, { caseId, at = null
     head,
     rows,
     notes,
-    run: { ...run, recordFacts: run.inputs.recordFacts },
+    run: { id: run.id, becauseOf: run.becauseOf, recordFacts, ranking, differs: !run.agreed || !isSame(ranking, run.result) },
     previous: previous?.result ?? null,
     acknowledged,
     units: ctx.person.units,
     at,
   };
+}
+
+/** A run of record comes out the same when it is made again, to the last bit, or something is wrong. */
+function isSame({ causes }: Ranking, kept: RunResult): boolean {
+  return causes.length === kept.causes.length && causes.every(({ causeId, p }, i) => kept.causes[i]?.causeId === causeId && kept.causes[i]?.p === p);
 }

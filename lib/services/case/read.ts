@@ -1,8 +1,9 @@
 import { selectCalls, selectCaseEvents } from '@/db/queries/case';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { readCaseInput } from '@/lib/schemas/case';
-import type { CallView, CaseState, CaseView } from '@/lib/schemas/case-view';
+import type { CallView, CaseReasons, CaseState, CaseView } from '@/lib/schemas/case-view';
 import { defineRead } from '../define';
+import { buildReasons } from './build-reasons';
 import { buildState } from './build-state';
 import { gatherState } from './gather-state';
 import { headView } from './view/head';
@@ -17,6 +18,16 @@ export const readCaseState = defineRead({
   input: readCaseInput,
   run: async ({ tx, ctx, input }): Promise<CaseState> =>
     buildState(await gatherState(tx, ctx, { caseId: input.caseId, at: input.at ? new Date(input.at) : null })),
+});
+
+/** Why its causes stand where they stand, now or as they did. */
+export const readCaseReasons = defineRead({
+  name: 'read.case',
+  doing: 'see cases',
+  roles: PERMITTED['case.see'],
+  input: readCaseInput,
+  run: async ({ tx, ctx, input }): Promise<CaseReasons> =>
+    buildReasons(await gatherState(tx, ctx, { caseId: input.caseId, at: input.at ? new Date(input.at) : null })),
 });
 
 /** Everything that the page of a case shows, now or as it was. */
@@ -40,6 +51,7 @@ export const readCase = defineRead({
       head: headView(caseHead, ctx.person.units),
       rulebook,
       state: at ? { ...state, status: statusAt(events) } : state,
+      reasons: buildReasons(parts),
       assignedTo: caseHead.assignedTo,
       calls: callViews(calls, events),
       events: events.map(({ at: when, ...event }) => ({ ...event, at: when.toISOString() })),

@@ -1,6 +1,6 @@
 import type { Transaction } from '@/db/connect';
 import { lockCase, updateCase } from '@/db/queries/case';
-import { insertFinding, selectAcknowledgements, selectFindingCase, selectFindingNotes, selectFindings } from '@/db/queries/finding';
+import { insertFinding, selectAcknowledgements, selectFindingNotes, selectFindings } from '@/db/queries/finding';
 import { selectLatestRun } from '@/db/queries/run';
 import { PERMITTED } from '@/lib/auth/permissions';
 import type { CompiledRulebook } from '@/lib/diagnose';
@@ -37,9 +37,10 @@ export const recordFinding = defineWrite({
     if (!head) throw notFound('case');
     const compiled = await compiledEdition(tx, { ...of, editionId: head.editionId });
 
-    const held = await selectFindingCase(tx, { organisationId: of.organisationId, findingId: input.id });
+    const rows = await selectFindings(tx, of);
+    const held = rows.find((row) => row.id === input.id);
     if (held) {
-      if (held.caseId !== input.caseId || held.checkId !== input.checkId) throw conflict('This id belongs to another finding.');
+      if (held.checkId !== input.checkId) throw takenId();
       unchanged();
       return buildState(await gatherState(tx, ctx, { caseId: of.caseId }));
     }
@@ -53,7 +54,6 @@ export const recordFinding = defineWrite({
     if (says) refuseUnreadCautions(compiled, check.check, acknowledged);
 
     const receivedAt = ctx.now();
-    const rows = await selectFindings(tx, of);
     const dated = {
       id: input.id,
       checkId: input.checkId,
@@ -64,7 +64,7 @@ export const recordFinding = defineWrite({
     const standing = currentFindings(rows).find((other) => slotOf(other) === slotOf(dated));
     const late = standing !== undefined && !isNewer(dated, standing);
     const finding = { ...answer, ...dated, source: 'asked', askedBecause: input.askedBecause, late };
-    await insertFinding(tx, {
+    const written = await insertFinding(tx, {
       ...finding,
       ...of,
       personId: ctx.person.id,
@@ -72,6 +72,7 @@ export const recordFinding = defineWrite({
       clockOffsetMs: input.clockOffsetMs,
       supersedes: late ? null : (standing?.id ?? null),
     });
+    if (!written) throw takenId();
     const vehicleState = says ? after(head.vehicleState, check.check.setUp) : head.vehicleState;
     await updateCase(tx, of, { vehicleState });
 
@@ -82,7 +83,7 @@ export const recordFinding = defineWrite({
       editionId: head.editionId,
       compiled,
       findings: findingsForRanking(rowsNow),
-      recordFacts: previous?.inputs.recordFacts ?? {},
+      recordFacts: previous?.recordFacts ?? {},
       becauseOf: input.id,
       at: receivedAt,
     });
@@ -104,6 +105,8 @@ export const recordFinding = defineWrite({
     });
   },
 });
+
+const takenId = () => conflict('This id belongs to another finding.');
 
 function acknowledgedToday(tx: Transaction, ctx: Ctx, { id, timeZone }: { id: string; timeZone: string }) {
   return selectAcknowledgements(tx, {

@@ -19,10 +19,10 @@ interface Asked {
 
 export interface MadeRun {
   id: string;
-  result: RunResult;
+  ranking: Ranking;
   recordFacts: RecordFacts;
   becauseOf: string | null;
-  agreed: boolean;
+  differs: boolean;
 }
 
 /** Ranks by the rule engine and keeps the run, with all that it takes to make it again. */
@@ -31,7 +31,6 @@ export async function makeRun(tx: Transaction, asked: Asked): Promise<MadeRun> {
   const started = performance.now();
   const { ranking, agreed, difference } = await runOfRecord(compiled, findings, { facts: recordFacts });
   const id = newId(asked.at.getTime());
-  const result = resultOf(ranking);
   await insertRun(tx, {
     organisationId: asked.organisationId,
     id,
@@ -39,14 +38,14 @@ export async function makeRun(tx: Transaction, asked: Asked): Promise<MadeRun> {
     editionId: asked.editionId,
     rankerVersion: ranking.rankerVersion,
     inputs: inputsOf(compiled, findings, recordFacts),
-    result,
+    result: resultOf(ranking),
     becauseOf: asked.becauseOf,
     agreed,
     difference: difference ?? null,
     durationMs: performance.now() - started,
     at: asked.at,
   });
-  return { id, result, recordFacts, becauseOf: asked.becauseOf, agreed };
+  return { id, ranking, recordFacts, becauseOf: asked.becauseOf, differs: !agreed };
 }
 
 function inputsOf(compiled: CompiledRulebook, findings: Finding[], recordFacts: RecordFacts): RunInputs {

@@ -1,24 +1,23 @@
 import type { RunResult } from '@/db/schema';
-import type { CompiledRulebook } from '@/lib/diagnose';
+import type { CompiledRulebook, RankedCause } from '@/lib/diagnose';
 import type { ExplainedCause, Explanation, Reason } from '@/lib/diagnose/explain';
-import type { CauseView, FindingView, ReasonView } from '@/lib/schemas/case-view';
+import type { CaseReasons, CauseView, FindingView, ReasonView } from '@/lib/schemas/case-view';
 
-/** Every cause with its level, how it moved since the run before, and the reasons that counted, most telling first. */
-export function causeViews(
-  compiled: CompiledRulebook,
-  { causes }: Explanation,
-  previous: RunResult | null,
-  shown: readonly FindingView[],
-): CauseView[] {
+/** Every cause with its level and how it moved since the run before, highest first. */
+export function causeViews(causes: readonly RankedCause[], previous: RunResult | null): CauseView[] {
   const before = new Map(previous?.causes.map(({ causeId, p }) => [causeId, p]));
-  const answers = new Map(shown.map((finding) => [finding.id, finding]));
-  return causes.map((cause) => ({
-    causeId: cause.causeId,
-    p: cause.p,
-    prior: cause.prior,
-    change: before.has(cause.causeId) ? cause.p - (before.get(cause.causeId) ?? 0) : null,
-    reasons: cause.reasons.flatMap((reason) => reasonView(compiled, cause, reason, answers)),
+  return causes.map(({ causeId, p, prior }) => ({
+    causeId,
+    p,
+    prior,
+    change: before.has(causeId) ? p - (before.get(causeId) ?? 0) : null,
   }));
+}
+
+/** The reasons of every cause that counted, most telling first. */
+export function reasonViews(compiled: CompiledRulebook, { causes }: Explanation, shown: readonly FindingView[]): CaseReasons['causes'] {
+  const answers = new Map(shown.map((finding) => [finding.id, finding]));
+  return Object.fromEntries(causes.map((cause) => [cause.causeId, cause.reasons.flatMap((reason) => reasonView(compiled, cause, reason, answers))]));
 }
 
 function reasonView(

@@ -6,9 +6,8 @@ import {
 } from '@/lib/diagnose';
 import { nextChecks, type NextChecks, type Suggestion } from '@/lib/diagnose/next-checks';
 import { openChecks } from '@/lib/diagnose/next-checks-open';
-import { whatWouldSettle } from '@/lib/diagnose/next-checks-settle';
 import type { SetUp } from '@/lib/diagnose/types';
-import type { NextView, RepairView, SettleView } from '@/lib/schemas/case-view';
+import type { NextView, RepairView } from '@/lib/schemas/case-view';
 
 interface Asked {
   compiled: CompiledRulebook;
@@ -20,12 +19,10 @@ interface Asked {
 
 /** More than this is a list to read, not a suggestion to take. */
 const MOST_SUGGESTIONS = 6;
-const MOST_SETTLING = 3;
 
-/** What to check next, what would settle it, and what would be repaired as things stand. */
+/** What to check next, and what would be repaired as things stand. */
 export function whatNext({ compiled, findings, recordFacts, vehicleState, labourRatePerHour }: Asked): {
   next: NextView;
-  settle: SettleView[];
   repairs: RepairView[];
 } {
   const open = openChecks(createWhatIf(compiled, findings, { facts: recordFacts }), findings);
@@ -33,15 +30,7 @@ export function whatNext({ compiled, findings, recordFacts, vehicleState, labour
     vehicle: { ...vehicleState, access: vehicleState.access ?? [] },
     money: labourRatePerHour === null ? {} : { labourRatePerHour },
   });
-  const labelOf = (checkId: string, state: string) =>
-    compiled.checks.get(checkId)?.check.states.find(({ id }) => id === state)?.label ?? state;
-  const settle = whatWouldSettle(open)
-    .causes.slice(0, MOST_SETTLING)
-    .flatMap(({ causeId, p, up, down }) => {
-      const telling = up && (!down || up.then - p >= p - down.then) ? up : down;
-      return telling ? [{ checkId: telling.checkId, answer: labelOf(telling.checkId, telling.state), causeId, from: p, to: telling.then }] : [];
-    });
-  return { next: nextView(compiled, chosen), settle, repairs: repairViews(compiled, chosen) };
+  return { next: nextView(compiled, chosen), repairs: repairViews(compiled, chosen) };
 }
 
 function nextView(compiled: CompiledRulebook, chosen: NextChecks): NextView {

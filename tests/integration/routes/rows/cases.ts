@@ -44,6 +44,7 @@ export const cases = feature({
     { route: API, method: 'GET', roles: SEE, query: () => ({ q: '1', status: 'all', page: '1' }) },
     { route: API, method: 'POST', roles: WORK, body: ({ unitId }) => ({ id: newId(), unit: { kind: 'known', unitId }, complaints: ['complaint-oil'] }) },
     { route: `${API}/[id]`, method: 'GET', roles: SEE, params: ({ caseId }) => ({ id: caseId }) },
+    { route: `${API}/[id]/reasons`, method: 'GET', roles: SEE, params: ({ caseId }) => ({ id: caseId }) },
     {
       route: `${API}/[id]/findings`,
       method: 'POST',

@@ -1,0 +1,27 @@
+import type { CompiledRulebook, Finding, RecordFacts } from '@/lib/diagnose';
+import { explain } from '@/lib/diagnose/explain';
+import { rankPairs } from '@/lib/diagnose/pairs';
+import type { CaseReasons } from '@/lib/schemas/case-view';
+import type { StateParts } from './build-state';
+import { findingsForRanking } from './findings-for-ranking';
+import { reasonViews } from './view/causes';
+import { findingViews } from './view/findings';
+import { whatSettles } from './view/settle';
+
+/** Why the causes of a case stand where they stand: pure, and of the same parts as its state. */
+export function buildReasons({ compiled, head, rows, notes, run, units }: StateParts): CaseReasons {
+  const findings = findingsForRanking(rows);
+  const { recordFacts } = run;
+  return {
+    version: head.version,
+    causes: reasonViews(compiled, explain(compiled, findings, { facts: recordFacts }), findingViews(compiled, rows, notes, units)),
+    settle: whatSettles(compiled, findings, recordFacts),
+    pair: pairView(compiled, findings, recordFacts),
+  };
+}
+
+function pairView(compiled: CompiledRulebook, findings: Finding[], facts: RecordFacts): CaseReasons['pair'] {
+  const { offered, pairs } = rankPairs(compiled, findings, { facts });
+  const [best] = pairs;
+  return offered && best ? { causeIds: [...best.causeIds], leadDecibans: best.aheadDecibans } : null;
+}
