@@ -19,10 +19,11 @@ interface Props {
 
 const SOURCES: Record<string, string> = { record: 'from the record', sum: 'from a sum', remedy: 'seen at the repair' };
 
-/** What was answered, newest first: each can be changed, taken back, and written about. */
+/** What was answered, newest first, then what the record knows: each can be changed, taken back, and written about. */
 export function Answered({ handle, rulebook, timeZone, readOnly, onPick }: Props) {
   const { state, answer } = handle;
-  const current = state.findings.filter((finding) => finding.current);
+  const current = state.findings.filter((finding) => finding.current && finding.source !== 'record');
+  const recorded = state.findings.filter((finding) => finding.current && finding.source === 'record');
   const replaced = state.findings.filter((finding) => !finding.current);
   const last = current.find((finding) => finding.source === 'asked');
   return (
@@ -43,6 +44,16 @@ export function Answered({ handle, rulebook, timeZone, readOnly, onPick }: Props
           <Finding key={finding.id} {...{ finding, handle, rulebook, timeZone, readOnly, onPick }} />
         ))}
       </ul>
+      {recorded.length > 0 && (
+        <details className="disclosure">
+          <summary className="min-h-touch py-2 font-bold">{recorded.length} known from the record of unit, model and fit</summary>
+          <ul className="border-t border-rule">
+            {recorded.map((finding) => (
+              <Finding key={finding.id} {...{ finding, handle, rulebook, timeZone, readOnly, onPick }} />
+            ))}
+          </ul>
+        </details>
+      )}
       {replaced.length > 0 && (
         <details className="disclosure">
           <summary className="min-h-touch py-2 font-bold">{replaced.length} earlier {replaced.length === 1 ? 'answer' : 'answers'}</summary>

@@ -27,7 +27,7 @@ const dayText = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium' });
 
 const COLUMNS: readonly Column<Row>[] = [
   { key: 'number', header: 'Case', sortable: true, rowHeader: true, cell: (row) => <Link className="inline-flex min-h-touch items-center underline underline-offset-4" href={`/cases/${row.id}`}>{row.number}</Link> },
-  { key: 'unit', header: 'Unit', sortable: true, cell: (row) => <Link href={`/units/${row.unitId}`}>{row.fleetNumber}</Link> },
+  { key: 'unit', header: 'Unit', sortable: true, cell: (row) => <Link className="inline-flex min-h-touch items-center whitespace-nowrap underline underline-offset-4" href={`/units/${row.unitId}`}>{row.fleetNumber}</Link> },
   { key: 'complaints', header: 'Complaint', cell: (row) => row.complaints.join(', ') },
   { key: 'leader', header: 'Leads', cell: (row) => row.leader && <>{row.leader.name} <span className="figure">{percent(row.leader.p)}</span></> },
   { key: 'site', header: 'Site', cell: (row) => row.siteName },
