@@ -81,3 +81,23 @@ export function groupIsRunning(group) {
     return stat?.group === group && stat.state !== 'Z' && stat.state !== 'X';
   });
 }
+
+/**
+ * The processes whose environment holds the variable, each with its value and its process group. Empty on a system that
+ * doesn't show environments; a process of another user's is passed over.
+ * @param {string} variable
+ * @returns {{ group: number, value: string }[]}
+ */
+export function processesMarked(variable) {
+  if (!hasProc) return [];
+  return readdirSync('/proc').flatMap((entry) => {
+    const stat = /^\d+$/.test(entry) ? procStat(entry) : undefined;
+    if (stat === undefined) return [];
+    try {
+      const mark = readFileSync(`/proc/${entry}/environ`, 'utf8').split('\0').find((pair) => pair.startsWith(`${variable}=`));
+      return mark === undefined ? [] : [{ group: stat.group, value: mark.slice(variable.length + 1) }];
+    } catch {
+      return [];
+    }
+  });
+}

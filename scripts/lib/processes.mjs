@@ -2,7 +2,7 @@ import { spawn } from 'node:child_process';
 import { closeSync, mkdirSync, openSync, readFileSync, readdirSync, renameSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
-import { groupIsRunning, identityOf, isRunning } from './process-identity.mjs';
+import { groupIsRunning, identityOf, isRunning, processesMarked } from './process-identity.mjs';
 
 /**
  * How a process is asked to stop. PostgreSQL's server stops its own children; everything else is asked as a group.
@@ -16,6 +16,8 @@ import { groupIsRunning, identityOf, isRunning } from './process-identity.mjs';
 /** @type {StopManner} */
 const ORDINARY = { signal: 'SIGTERM', group: true };
 const GRACE_MS = 8_000;
+/** In the environment of everything that is started: where its record is kept and who started it. */
+const MARK = 'CARRYOVER_STARTED_BY';
 
 /** A command that ended badly, with the end of what it printed. */
 export class CommandFailed extends Error {
@@ -63,6 +65,24 @@ function readRecords(folder) {
     });
 }
 
+/** @param {string} folder @param {import('./process-identity.mjs').ProcessIdentity} owner */
+const markOf = (folder, owner) => [folder, owner.pid, owner.began].join('|');
+
+/**
+ * The process groups of killed runs that have no record: a run can be killed between starting a process and writing its
+ * record, and that happens.
+ * @param {string} folder
+ */
+const unrecordedGroups = (folder) =>
+  new Set(
+    processesMarked(MARK)
+      .filter(({ value }) => {
+        const [place, pid, began] = value.split('|');
+        return place === folder && !isRunning({ pid: Number(pid), began });
+      })
+      .map(({ group }) => group),
+  );
+
 /**
  * Stops whatever a killed run left behind. A record whose leader has another beginning belongs to a stranger that got
  * the same process id, and is left alone.
@@ -80,6 +100,10 @@ export async function stopOrphans(folder) {
     }
     if (record?.removes) rmSync(record.removes, { recursive: true, force: true });
     rmSync(path, { force: true });
+  }
+  for (const group of unrecordedGroups(folder)) {
+    await stopTree({ pid: group, manner: ORDINARY });
+    stopped.push('a process without a record');
   }
   return stopped;
 }
@@ -108,7 +132,8 @@ export function processKeeper(folder) {
     const { log, show = false, manner = ORDINARY, removes, cwd, env, uid, gid } = options;
     const sink = log === undefined ? undefined : openSync(log, 'a');
     const output = sink ?? (show ? 'inherit' : 'pipe');
-    const child = spawn(command, args, { cwd, env, uid, gid, detached: true, stdio: [options.input === undefined ? 'ignore' : 'pipe', output, output] });
+    const marked = { ...(env ?? process.env), [MARK]: markOf(folder, owner) };
+    const child = spawn(command, args, { cwd, env: marked, uid, gid, detached: true, stdio: [options.input === undefined ? 'ignore' : 'pipe', output, output] });
     if (sink !== undefined) closeSync(sink);
     const { pid } = child;
     if (pid !== undefined) {

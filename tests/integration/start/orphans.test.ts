@@ -15,8 +15,8 @@ beforeEach(() => {
 afterEach(() => rmSync(folder, { recursive: true, force: true }));
 
 const gone = { pid: 1, began: 'another boot/1' };
-function sleeper() {
-  const { pid } = spawn('sh', ['-c', 'sleep 60 & sleep 60'], { detached: true, stdio: 'ignore' });
+function sleeper(marks: Record<string, string> = {}) {
+  const { pid } = spawn('sh', ['-c', 'sleep 60 & sleep 60'], { detached: true, stdio: 'ignore', env: { ...process.env, ...marks } });
   if (pid === undefined) throw new Error('sh did not start.');
   return identityOf(pid);
 }
@@ -52,6 +52,14 @@ describe('what a killed run left behind', () => {
     expect(await stopOrphans(folder)).toEqual([]);
     expect(isRunning(identity) && existsSync(path)).toBe(true);
     process.kill(-identity.pid, 'SIGKILL');
+  });
+
+  it('is found by its environment when the run was killed before it could write a record', async () => {
+    const mark = (owner: { pid: number; began: string }) => ({ CARRYOVER_STARTED_BY: `${folder}|${owner.pid}|${owner.began}` });
+    const [orphan, inUse] = [sleeper(mark(gone)), sleeper(mark(identityOf(process.pid)))];
+    expect(await stopOrphans(folder)).toEqual(['a process without a record']);
+    expect([orphan, inUse].map(isRunning)).toEqual([false, true]);
+    process.kill(-inUse.pid, 'SIGKILL');
   });
 
   it('may be half a record', async () => {
