@@ -1,3 +1,4 @@
+import { whenLauncherEnds } from './launcher.mjs';
 import { root } from './paths.mjs';
 import { explain } from './problem.mjs';
 import { processKeeper } from './processes.mjs';
@@ -22,6 +23,7 @@ export async function runCommand(runFolder, work, afterwards = () => undefined) 
   const stopped = new Promise((resolve) => (stop = resolve));
   let isUp = false;
   for (const signal of SIGNALS) process.on(signal, () => stop(isUp ? 0 : STOPPED_EARLY));
+  whenLauncherEnds(() => stop(STOPPED_EARLY));
   // The reader of our output went away (npm start | head): there is nobody to serve any more.
   process.stdout.on('error', () => stop(STOPPED_EARLY));
 

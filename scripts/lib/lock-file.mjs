@@ -2,10 +2,14 @@ import { linkSync, mkdirSync, renameSync, rmSync, writeFileSync } from 'node:fs'
 import { dirname } from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
 import { readIfThere } from './files.mjs';
+import { findLauncher } from './launcher.mjs';
 import { identityOf, isRunning } from './process-identity.mjs';
 import { Problem } from './problem.mjs';
 
-/** @typedef {{ release: () => void } | { heldBy: number }} LockAnswer */
+/**
+ * A holder whose npm was killed is about to stop.
+ * @typedef {{ release: () => void } | { heldBy: number, isStopping: boolean }} LockAnswer
+ */
 
 /**
  * Takes a lock for this process. One whose holder is gone is taken over. The file appears with its content in one step
@@ -16,7 +20,7 @@ import { Problem } from './problem.mjs';
 function tryLock(lock) {
   mkdirSync(dirname(lock), { recursive: true });
   const mine = `${lock}.${process.pid}`;
-  writeFileSync(mine, JSON.stringify(identityOf(process.pid)));
+  writeFileSync(mine, JSON.stringify({ ...identityOf(process.pid), launcher: findLauncher() }));
   try {
     for (;;) {
       try {
@@ -27,7 +31,7 @@ function tryLock(lock) {
       }
       const text = readIfThere(lock);
       const holder = text === undefined ? undefined : JSON.parse(text);
-      if (holder && isRunning(holder)) return { heldBy: holder.pid };
+      if (holder && isRunning(holder)) return { heldBy: holder.pid, isStopping: holder.launcher !== undefined && !isRunning(holder.launcher) };
       // Renaming takes away one stale file exactly; another process that does the same finds nothing and tries again.
       try {
         renameSync(lock, `${mine}.stale`);
@@ -45,12 +49,15 @@ function tryLock(lock) {
  * Makes sure that one command at a time works on this folder's cluster and build.
  * @param {string} lock
  * @param {string} wayOut what to do when another one is at it
- * @returns {() => void} gives the lock back
+ * @returns {Promise<() => void>} gives the lock back
  */
-export function takeStartLock(lock, wayOut) {
-  const answer = tryLock(lock);
-  if ('release' in answer) return answer.release;
-  throw new Problem(`Carryover already runs from this folder (process ${answer.heldBy}).`, wayOut);
+export async function takeStartLock(lock, wayOut) {
+  for (;;) {
+    const answer = tryLock(lock);
+    if ('release' in answer) return answer.release;
+    if (!answer.isStopping) throw new Problem(`Carryover already runs from this folder (process ${answer.heldBy}).`, `${wayOut} (From elsewhere: kill ${answer.heldBy})`);
+    await sleep(200);
+  }
 }
 
 /**

@@ -11,14 +11,14 @@ const hasProc = existsSync('/proc/self/stat');
 
 /**
  * @param {number | string} pid
- * @returns {{ state: string, group: number, ticks: string } | undefined}
+ * @returns {{ state: string, parent: number, group: number, ticks: string } | undefined}
  */
 function procStat(pid) {
   try {
     // The command's name stands in brackets and may hold anything, so count fields from the last bracket.
     const text = readFileSync(`/proc/${pid}/stat`, 'utf8');
     const fields = text.slice(text.lastIndexOf(')') + 2).split(' ');
-    return { state: fields[0] ?? '', group: Number(fields[2]), ticks: fields[19] ?? '' };
+    return { state: fields[0] ?? '', parent: Number(fields[1]), group: Number(fields[2]), ticks: fields[19] ?? '' };
   } catch {
     return undefined;
   }
@@ -48,6 +48,9 @@ export const identityOf = (pid) => ({ pid, began: beganAt(pid) ?? '' });
 
 /** @param {ProcessIdentity} identity */
 export const isRunning = ({ pid, began }) => began !== '' && beganAt(pid) === began;
+
+/** @param {number} pid @returns {number} */
+export const parentOf = (pid) => (hasProc ? procStat(pid)?.parent : Number(ps(['ppid'], pid))) || 1;
 
 /**
  * The command line of a running process, or nothing when it can't be read.

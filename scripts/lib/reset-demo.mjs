@@ -21,7 +21,7 @@ export function resetDemo() {
   return runCommand(
     local.run,
     async (run) => {
-      unlock = takeStartLock(local.lock, 'Stop it with Ctrl-C, then run npm run reset-demo again.');
+      unlock = await takeStartLock(local.lock, 'Stop it with Ctrl-C, then run npm run reset-demo again.');
       const given = withDotenv(inProject('.env'), process.env);
       if (!readPlan(given).ownDatabase) {
         throw new Problem('DATABASE_URL points at a database of your own, and the demo is only ever put into the private one.', 'Leave DATABASE_URL and DATABASE_OWNER_URL out to reset the private one.');

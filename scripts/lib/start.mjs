@@ -77,7 +77,7 @@ export function start({ development }) {
     local.run,
     async (run) => {
       const { processes, steps, untilStopped } = run;
-      unlock = takeStartLock(local.lock, 'Use that one, or stop it with Ctrl-C first; a second copy needs a folder of its own.');
+      unlock = await takeStartLock(local.lock, 'Use that one, or stop it with Ctrl-C first; a second copy needs a folder of its own.');
       const given = withDotenv(inProject('.env'), process.env);
       const plan = readPlan(given);
       await prepare(run);

@@ -74,7 +74,7 @@ describe('npm start', () => {
     const second = runStart(copy.folder, port);
     expect(await second.ended).toBe(1);
     expect(second.output()).toMatch(/already runs from this folder \(process \d+\)\.\nUse that one/);
-    const reset = runStart(copy.folder, port, 'reset-demo.mjs');
+    const reset = runStart(copy.folder, port, 'node scripts/reset-demo.mjs');
     expect(await reset.ended).toBe(1);
     expect(reset.output()).toMatch(/already runs.*\nStop it with Ctrl-C/);
 
@@ -83,10 +83,20 @@ describe('npm start', () => {
     expect(processesOf(copy.folder)).toEqual([]);
   }, 5 * MINUTES);
 
+  it('stops when npm is ended, which tells it nothing, and lets the next one in', async () => {
+    const killed = runStart(copy.folder, port, 'npm start');
+    await killed.until(/Carryover is at/);
+    killed.child.kill('SIGKILL');
+    const ended = runStart(copy.folder, port, 'npm start');
+    await ended.until(/Carryover is at/);
+    ended.child.kill('SIGTERM');
+    await expect.poll(() => processesOf(copy.folder), { timeout: MINUTES }).toEqual([]);
+  }, 5 * MINUTES);
+
   it('has its demo put back, mail and all', async () => {
     const letter = inCopy('.local', 'mail', '1-0001.eml');
     writeFileSync(letter, 'Subject: old\n\n');
-    const reset = runStart(copy.folder, port, 'reset-demo.mjs');
+    const reset = runStart(copy.folder, port, 'node scripts/reset-demo.mjs');
     expect([await reset.ended, existsSync(letter)], reset.output()).toEqual([0, false]);
     expect(processesOf(copy.folder)).toEqual([]);
   }, 5 * MINUTES);

@@ -70,13 +70,13 @@ describe('what a killed run left behind', () => {
 });
 
 describe('the lock on a folder', () => {
-  it('refuses a second holder, and is taken over from one that is gone', () => {
+  it('refuses a second holder, and is taken over from one that is gone', async () => {
     const lock = join(folder, 'start.lock');
     writeFileSync(lock, JSON.stringify(gone));
-    const release = takeStartLock(lock, 'Stop it.');
-    expect(() => takeStartLock(lock, 'Stop it.')).toThrow(`Carryover already runs from this folder (process ${process.pid}). Stop it.`);
+    const release = await takeStartLock(lock, 'Stop it.');
+    await expect(takeStartLock(lock, 'Stop it.')).rejects.toThrow(`Carryover already runs from this folder (process ${process.pid}). Stop it. (From elsewhere: kill ${process.pid})`);
     release();
-    takeStartLock(lock, 'Stop it.')();
+    (await takeStartLock(lock, 'Stop it.'))();
     expect(readdirSync(folder)).toEqual([]);
   });
 

@@ -46,9 +46,10 @@ export interface RunningStart {
   ended: Promise<number | null>;
 }
 
-/** Runs what `npm start` runs, or another of the commands. */
-export function runStart(folder: string, port: number, script = 'start.mjs'): RunningStart {
-  const child = spawn(process.execPath, [join('scripts', script)], { cwd: folder, env: environment(port), stdio: ['ignore', 'pipe', 'pipe'] });
+/** Runs what `npm start` runs, so that a signal reaches it itself; or another command. */
+export function runStart(folder: string, port: number, command = 'node scripts/start.mjs'): RunningStart {
+  const [program = '', ...args] = command.split(' ');
+  const child = spawn(program, args, { cwd: folder, env: environment(port), stdio: ['ignore', 'pipe', 'pipe'] });
   started.push(child);
   let output = '';
   child.stdout.on('data', (chunk) => (output += chunk));
