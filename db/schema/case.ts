@@ -28,6 +28,8 @@ export const cases = pgTable(
     odometerM: si(),
     engineS: si(),
     asTyped: jsonb().$type<Record<string, string>>().notNull().default({}),
+    /** Checks whose standing answer forbids the unit's release; empty: none known. Kept here so that lists need not rank. */
+    releaseHolds: text().array().notNull().default([]),
     /** How the vehicle stands now: what the next check needs not be set up again. */
     vehicleState: jsonb().$type<SetUp>().notNull().default({}),
     assignedTo: uuid().references(() => person.id),

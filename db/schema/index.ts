@@ -8,3 +8,5 @@ export * from './case';
 export * from './finding';
 export * from './run';
 export * from './record-keeping';
+export * from './api';
+export * from './saved-view';

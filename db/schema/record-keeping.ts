@@ -2,7 +2,15 @@ import { index, integer, jsonb, pgTable, primaryKey, text, uuid } from 'drizzle-
 import { createdAt, id, instant, organisationId, organisationPolicy } from './columns';
 import { organisation } from './organisation';
 
-/** A file of any owner (case, finding, fit, unit): the object lies in S3-compatible storage. */
+/** A line drawn on a photo: points in fractions of its width and height, so that any size of it can carry them. */
+export interface Stroke {
+  points: [x: number, y: number][];
+}
+
+/**
+ * A photo of any owner (case, finding, fit, unit): the object lies in S3-compatible storage. The row is made before
+ * the upload; what arrived is looked at before it counts. Marks stay apart from the picture, which is never changed.
+ */
 export const attachment = pgTable(
   'attachment',
   {
@@ -10,16 +18,31 @@ export const attachment = pgTable(
     id: id(),
     ownerKind: text().notNull(),
     ownerId: uuid().notNull(),
+    /** The case that shows it, if any, and the check that it was taken for. */
+    caseId: uuid(),
+    checkId: text(),
     objectKey: text().notNull(),
     mediaType: text().notNull(),
     bytes: integer().notNull(),
+    /** awaited: not uploaded yet; stored: arrived and is a picture; refused: arrived and isn't, with why */
+    state: text().notNull().default('awaited'),
+    refusal: text(),
+    /** In pixels, once it has been looked at. */
+    width: integer(),
+    height: integer(),
+    /** Made by the worker; null until then. */
+    thumbnailKey: text(),
     description: text(),
+    strokes: jsonb().$type<Stroke[]>().notNull().default([]),
+    /** By the device's corrected clock. */
+    takenAt: instant(),
     personId: uuid().notNull(),
     createdAt: createdAt(),
   },
   (t) => [
     primaryKey({ columns: [t.organisationId, t.id] }),
     index('attachment_owner').on(t.organisationId, t.ownerKind, t.ownerId),
+    index('attachment_case').on(t.organisationId, t.caseId),
     organisationPolicy(),
   ],
 ).enableRLS();

@@ -46,7 +46,7 @@ describe('row-level security', () => {
   });
 
   test('holds for the owner too, except where its functions look people up before they are signed in', () => {
-    expect(tables.filter(({ secured, forced }) => secured && !forced).map(({ name }) => name)).toEqual(['invitation', 'membership', 'organisation', 'password_reset', 'person']);
+    expect(tables.filter(({ secured, forced }) => secured && !forced).map(({ name }) => name)).toEqual(['api_token', 'idempotent_answer', 'invitation', 'membership', 'organisation', 'password_reset', 'person']);
   });
 
   test('gives the application a role that can neither bypass it nor switch it off', async () => {
@@ -130,13 +130,13 @@ describe('rights of the application', () => {
     return (rows as { name: string }[]).map(({ name }) => name);
   };
 
-  test('let it delete counts of tries and nothing else', async () => {
-    expect(await rightsOn('DELETE')).toEqual(['attempt']);
+  test('let it delete counts of tries and one’s own bookmarks, and nothing else', async () => {
+    expect(await rightsOn('DELETE')).toEqual(['attempt', 'saved_view']);
     expect(await rightsOn('TRUNCATE')).toEqual([]);
   });
 
   test('let it change what has a present state, and no record', async () => {
-    expect(await rightsOn('UPDATE')).toEqual(['attempt', 'case', 'compressor_model', 'fit', 'invitation', 'membership', 'organisation', 'person', 'site', 'unit']);
+    expect(await rightsOn('UPDATE')).toEqual(['api_token', 'attachment', 'attempt', 'case', 'compressor_model', 'fit', 'invitation', 'membership', 'organisation', 'person', 'saved_view', 'site', 'unit']);
   });
 
   test('let it add no organisation, person or membership, and not touch password links', async () => {
