@@ -41,6 +41,12 @@ const ROWS = [
     adds: true,
   },
   {
+    folder: 'lib/case/**',
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, '@/lib/diagnose', '@/lib/diagnose/record-run', '@/lib/services/**', '@/lib/auth/**'],
+    because: 'What a case looks like is worked out on the server and on the device alike.',
+    typesAllowed: true,
+  },
+  {
     folder: 'lib/units/**',
     never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES('units')],
     because: 'Units are pure arithmetic on text.',

@@ -17,7 +17,7 @@ import { newId } from '@/lib/ids';
 import { jobs } from '@/lib/jobs';
 import { recordFindingInput } from '@/lib/schemas/case';
 import { openCase } from '@/lib/services/case/open';
-import { readAnswer } from '@/lib/services/case/read-answer';
+import { readAnswer } from '@/lib/case/read-answer';
 import { recordFinding } from '@/lib/services/case/record-finding';
 import { writingOf } from '@/lib/services/case/writing';
 import { defineWrite } from '@/lib/services/define';

@@ -4,9 +4,9 @@ import { AS_PARKED, stateAfter, type VehicleState } from '@/lib/diagnose/set-up'
 import { newId } from '@/lib/ids';
 import type { answerInput } from '@/lib/schemas/case';
 import { complaintFindings } from '@/lib/services/case/complaints';
-import { currentFindings, slotOf } from '@/lib/services/case/current-findings';
-import { findingsForRanking } from '@/lib/services/case/findings-for-ranking';
-import { readAnswer } from '@/lib/services/case/read-answer';
+import { currentFindings, slotOf } from '@/lib/case/current-findings';
+import { findingsForRanking } from '@/lib/case/findings-for-ranking';
+import { readAnswer } from '@/lib/case/read-answer';
 import type { z } from 'zod';
 import { audited, type AuditEntry } from './audit-row';
 import type { WorkClock } from './calendar';

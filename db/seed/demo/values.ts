@@ -1,5 +1,5 @@
 import type { CompiledCheck } from '@/lib/diagnose';
-import { measureOf } from '@/lib/services/case/view/measure';
+import { measureOf } from '@/lib/case/view/measure';
 import { formatQuantity, formatValue, type UnitId } from '@/lib/units';
 import { WRITING } from './organisation';
 import type { Random } from './random';

@@ -6,7 +6,7 @@ import { invalid, notFound } from '@/lib/errors';
 import { acknowledgeCautionsInput } from '@/lib/schemas/case';
 import { defineWrite } from '../define';
 import { compiledEdition } from '../edition/compiled';
-import { siteDay } from './site-day';
+import { siteDay } from '@/lib/case/site-day';
 
 /** Notes that a person read cautions today, in the danger of the check at hand. */
 export const acknowledgeCautions = defineWrite({

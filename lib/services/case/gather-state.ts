@@ -7,9 +7,9 @@ import { rank, type Ranking } from '@/lib/diagnose';
 import { notFound } from '@/lib/errors';
 import type { Ctx } from '../context';
 import { compiledEdition } from '../edition/compiled';
-import type { StateParts } from './build-state';
-import { findingsForRanking } from './findings-for-ranking';
-import { siteDay } from './site-day';
+import type { StateParts } from '@/lib/case/build-state';
+import { findingsForRanking } from '@/lib/case/findings-for-ranking';
+import { siteDay } from '@/lib/case/site-day';
 
 type Head = NonNullable<Awaited<ReturnType<typeof selectCaseHead>>>;
 

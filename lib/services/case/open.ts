@@ -15,9 +15,9 @@ import { addUnit } from '../unit/add-unit';
 import { noteReading } from '../unit/note-reading';
 import { unitRecord } from '../unit/unit-record';
 import { complaintFindings, complaintIds } from './complaints';
-import { findingsForRanking } from './findings-for-ranking';
+import { findingsForRanking } from '@/lib/case/findings-for-ranking';
 import { makeRun } from './run-of-record';
-import { siteDay } from './site-day';
+import { siteDay } from '@/lib/case/site-day';
 
 /**
  * Opens a case on a unit, known or made on the spot: complaints and what the record knows become its first findings,

@@ -3,12 +3,12 @@ import { PERMITTED } from '@/lib/auth/permissions';
 import { readCaseInput } from '@/lib/schemas/case';
 import type { CallView, CaseReasons, CaseState, CaseView } from '@/lib/schemas/case-view';
 import { defineRead } from '../define';
-import { buildReasons } from './build-reasons';
-import { buildState } from './build-state';
+import { buildReasons } from '@/lib/case/build-reasons';
+import { buildState } from '@/lib/case/build-state';
 import { gatherState } from './gather-state';
-import { headView } from './view/head';
-import { momentsOf } from './view/moments';
-import { rulebookView } from './view/rulebook';
+import { headView } from '@/lib/case/view/head';
+import { momentsOf } from '@/lib/case/view/moments';
+import { rulebookView } from '@/lib/case/view/rulebook';
 
 /** What changes of a case: its ranking, findings and next checks, now or as they were. */
 export const readCaseState = defineRead({

@@ -13,13 +13,13 @@ import type { CaseState } from '@/lib/schemas/case-view';
 import type { Ctx } from '../context';
 import { defineWrite } from '../define';
 import { compiledEdition } from '../edition/compiled';
-import { buildState } from './build-state';
-import { currentFindings, isNewer, slotOf } from './current-findings';
-import { findingsForRanking } from './findings-for-ranking';
+import { buildState } from '@/lib/case/build-state';
+import { currentFindings, isNewer, slotOf } from '@/lib/case/current-findings';
+import { findingsForRanking } from '@/lib/case/findings-for-ranking';
 import { gatherState } from './gather-state';
-import { readAnswer } from './read-answer';
+import { readAnswer } from '@/lib/case/read-answer';
 import { makeRun } from './run-of-record';
-import { siteDay } from './site-day';
+import { siteDay } from '@/lib/case/site-day';
 import { writingOf } from './writing';
 
 /**

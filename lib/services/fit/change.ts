@@ -4,7 +4,7 @@ import { PERMITTED } from '@/lib/auth/permissions';
 import { conflict, notFound } from '@/lib/errors';
 import { dayText } from '@/lib/schemas/day-text';
 import { changeFitInput, takeOutFitInput } from '@/lib/schemas/fit';
-import { siteDay } from '../case/site-day';
+import { siteDay } from '@/lib/case/site-day';
 import { defineWrite, type Work } from '../define';
 import { changedFields, refuseStale } from '../editing';
 import { textsOf } from '../form-value';

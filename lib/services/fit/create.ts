@@ -5,7 +5,7 @@ import { PERMITTED } from '@/lib/auth/permissions';
 import { conflict, invalid, notFound } from '@/lib/errors';
 import { dayText } from '@/lib/schemas/day-text';
 import { createFitInput } from '@/lib/schemas/fit';
-import { siteDay } from '../case/site-day';
+import { siteDay } from '@/lib/case/site-day';
 import { defineWrite, type Work } from '../define';
 import { fitColumns } from './fit-columns';
 import { writeFitReading } from './fit-readings';

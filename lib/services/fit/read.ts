@@ -5,7 +5,7 @@ import { PERMITTED } from '@/lib/auth/permissions';
 import { notFound } from '@/lib/errors';
 import { fitIdInput } from '@/lib/schemas/fit';
 import { unitIdInput } from '@/lib/schemas/unit';
-import { siteDay } from '../case/site-day';
+import { siteDay } from '@/lib/case/site-day';
 import { defineRead } from '../define';
 import { versionOf } from '../editing';
 import { textsOf } from '../form-value';

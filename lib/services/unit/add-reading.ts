@@ -2,7 +2,7 @@ import { selectUnit } from '@/db/queries/unit';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { invalid, notFound } from '@/lib/errors';
 import { addReadingInput } from '@/lib/schemas/unit';
-import { siteDay } from '../case/site-day';
+import { siteDay } from '@/lib/case/site-day';
 import { refuseFutureDay } from '../days';
 import { defineWrite } from '../define';
 import { noteReading } from './note-reading';

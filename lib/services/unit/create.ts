@@ -1,7 +1,7 @@
 import { selectUnit } from '@/db/queries/unit';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { createUnitInput } from '@/lib/schemas/unit';
-import { siteDay } from '../case/site-day';
+import { siteDay } from '@/lib/case/site-day';
 import { refuseFutureDay } from '../days';
 import { defineWrite } from '../define';
 import { addUnit } from './add-unit';

@@ -7,7 +7,7 @@ import type { Transaction } from '@/db/connect';
 import { may, PERMITTED } from '@/lib/auth/permissions';
 import { notFound } from '@/lib/errors';
 import { unitIdInput } from '@/lib/schemas/unit';
-import { siteDay } from '../case/site-day';
+import { siteDay } from '@/lib/case/site-day';
 import type { Ctx } from '../context';
 import { defineRead } from '../define';
 import { versionOf } from '../editing';

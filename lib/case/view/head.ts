@@ -1,8 +1,22 @@
-import type { selectCaseHead } from '@/db/queries/case';
 import type { CaseHead } from '@/lib/schemas/case-view';
 import { formatQuantity, type UnitPreferences } from '@/lib/units';
 
-type Row = NonNullable<Awaited<ReturnType<typeof selectCaseHead>>>;
+interface Row {
+  id: string;
+  number: number;
+  unitId: string;
+  fleetNumber: string;
+  vehicleKind: string;
+  siteName: string;
+  timeZone: string;
+  modelName: string | null;
+  installedOn: string | null;
+  complaintWords: string | null;
+  odometerM: number | null;
+  openedBy: string;
+  openedAt: Date;
+  editionNumber: number;
+}
 
 /** The head of the case page: what doesn't change with the answers. */
 export function headView(row: Row, units: UnitPreferences): CaseHead {

@@ -1,17 +1,9 @@
-import type { FindingRow } from '@/db/queries/finding';
-import type { CompiledRulebook } from '@/lib/diagnose';
+import type { CompiledRulebook } from '@/lib/diagnose/compiled';
 import type { FindingView } from '@/lib/schemas/case-view';
 import type { UnitPreferences } from '@/lib/units';
 import { standingFindings } from '../current-findings';
+import type { FindingRow, NoteRow } from '../rows';
 import { answerText } from './answer-text';
-
-export interface NoteRow {
-  id: string;
-  findingId: string;
-  text: string;
-  person: string;
-  at: Date;
-}
 
 /** All findings of a case, newest first; those that were replaced, taken back or late say so. */
 export function findingViews(

@@ -1,10 +1,11 @@
-import type { RunResult } from '@/db/schema';
-import type { CompiledRulebook, RankedCause } from '@/lib/diagnose';
+import type { CompiledRulebook } from '@/lib/diagnose/compiled';
+import type { RankedCause } from '@/lib/diagnose/types';
 import type { ExplainedCause, Explanation, Reason } from '@/lib/diagnose/explain';
 import type { CaseReasons, CauseView, FindingView, ReasonView } from '@/lib/schemas/case-view';
+import type { KeptRun } from '../rows';
 
 /** Every cause with its level and how it moved since the run before, highest first. */
-export function causeViews(causes: readonly RankedCause[], previous: RunResult | null): CauseView[] {
+export function causeViews(causes: readonly RankedCause[], previous: KeptRun | null): CauseView[] {
   const before = new Map(previous?.causes.map(({ causeId, p }) => [causeId, p]));
   return causes.map(({ causeId, p, prior }) => ({
     causeId,

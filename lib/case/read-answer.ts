@@ -1,5 +1,8 @@
 import type { z } from 'zod';
-import { FindingError, sharesOf, type CompiledCheck, type StateShare } from '@/lib/diagnose';
+import type { CompiledCheck } from '@/lib/diagnose/compiled';
+import { FindingError } from '@/lib/diagnose/errors';
+import { sharesOf } from '@/lib/diagnose/shares';
+import type { StateShare } from '@/lib/diagnose/types';
 import { invalid } from '@/lib/errors';
 import type { answerInput } from '@/lib/schemas/case';
 import { formatQuantity, parseQuantity, type DecimalMark, type UnitPreferences } from '@/lib/units';

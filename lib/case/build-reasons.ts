@@ -1,4 +1,5 @@
-import type { CompiledRulebook, Finding, RecordFacts } from '@/lib/diagnose';
+import type { CompiledRulebook } from '@/lib/diagnose/compiled';
+import type { Finding, RecordFacts } from '@/lib/diagnose/types';
 import { explain } from '@/lib/diagnose/explain';
 import { rankPairs } from '@/lib/diagnose/pairs';
 import type { CaseReasons } from '@/lib/schemas/case-view';

@@ -1,6 +1,8 @@
-import { createWhatIf, type CompiledRulebook, type Finding, type RecordFacts } from '@/lib/diagnose';
+import type { CompiledRulebook } from '@/lib/diagnose/compiled';
 import { openChecks } from '@/lib/diagnose/next-checks-open';
 import { whatWouldSettle } from '@/lib/diagnose/next-checks-settle';
+import type { Finding, RecordFacts } from '@/lib/diagnose/types';
+import { createWhatIf } from '@/lib/diagnose/what-if';
 import type { SettleView } from '@/lib/schemas/case-view';
 
 /** Of this many leading causes it is said what would settle them. */

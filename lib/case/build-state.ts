@@ -1,11 +1,11 @@
-import type { FindingRow } from '@/db/queries/finding';
-import type { RunResult } from '@/db/schema';
-import type { CompiledRulebook, Ranking, RecordFacts, SetUp } from '@/lib/diagnose';
+import type { CompiledRulebook } from '@/lib/diagnose/compiled';
+import type { SetUp } from '@/lib/diagnose/types';
 import type { CaseState } from '@/lib/schemas/case-view';
 import type { UnitPreferences } from '@/lib/units';
 import { findingsForRanking } from './findings-for-ranking';
 import { causeViews } from './view/causes';
-import { findingViews, type NoteRow } from './view/findings';
+import type { FindingRow, KeptRun, NoteRow, ShownRun } from './rows';
+import { findingViews } from './view/findings';
 import { whatNext } from './view/next';
 
 export interface StateParts {
@@ -13,10 +13,9 @@ export interface StateParts {
   head: { id: string; version: number; status: string; vehicleState: SetUp; labourRatePerHour: number | null };
   rows: readonly FindingRow[];
   notes: readonly NoteRow[];
-  /** `differs`: it doesn't come out the same when it is made again, or engine and compiled rules disagreed. */
-  run: { id: string; ranking: Ranking; recordFacts: RecordFacts; becauseOf: string | null; differs: boolean };
+  run: ShownRun;
   /** What the run before this one gave; null in the first. */
-  previous: RunResult | null;
+  previous: KeptRun | null;
   acknowledged: CaseState['acknowledged'];
   units: UnitPreferences;
   /** The past instant that is shown; null: now. */

@@ -1,6 +1,6 @@
-import type { FindingRow } from '@/db/queries/finding';
 import type { Finding } from '@/lib/diagnose/types';
 import { standingFindings } from './current-findings';
+import type { FindingRow } from './rows';
 
 type Row = Pick<FindingRow, 'id' | 'checkId' | 'stage' | 'source' | 'shares' | 'reliability' | 'kind' | 'correctedAt' | 'receivedAt'>;
 

@@ -1,12 +1,8 @@
-import {
-  createWhatIf,
-  type CompiledRulebook,
-  type Finding,
-  type RecordFacts,
-} from '@/lib/diagnose';
+import type { CompiledRulebook } from '@/lib/diagnose/compiled';
 import { nextChecks, type NextChecks, type Suggestion } from '@/lib/diagnose/next-checks';
 import { openChecks } from '@/lib/diagnose/next-checks-open';
-import type { SetUp } from '@/lib/diagnose/types';
+import type { Finding, RecordFacts, SetUp } from '@/lib/diagnose/types';
+import { createWhatIf } from '@/lib/diagnose/what-if';
 import type { NextView, RepairView } from '@/lib/schemas/case-view';
 
 interface Asked {

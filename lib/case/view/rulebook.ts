@@ -1,4 +1,4 @@
-import type { CompiledRulebook } from '@/lib/diagnose';
+import type { CompiledRulebook } from '@/lib/diagnose/compiled';
 import type { Check } from '@/lib/diagnose/types';
 import type { CheckView, RulebookView } from '@/lib/schemas/case-view';
 import { formatValue, unitDefinition, type UnitPreferences } from '@/lib/units';
