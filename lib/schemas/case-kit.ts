@@ -1,0 +1,29 @@
+import type { FindingRow, NoteRow } from '@/lib/case/rows';
+import type { RecordFacts, SetUp } from '@/lib/diagnose/types';
+import type { DecimalMark, UnitPreferences } from '@/lib/units';
+import type { CaseView } from './case-view';
+
+type Dated<Row, Key extends keyof Row> = Omit<Row, Key> & Record<Key, string>;
+
+/**
+ * Everything that a device needs to go on with a case when the connection is gone: with the edition's rulebook it gives
+ * the same state as the server would.
+ */
+export interface CaseKit {
+  caseId: string;
+  editionId: string;
+  organisationId: string;
+  personId: string;
+  version: number;
+  status: string;
+  vehicleState: SetUp;
+  labourRatePerHour: number | null;
+  timeZone: string;
+  rows: Dated<FindingRow, 'correctedAt' | 'receivedAt'>[];
+  notes: Dated<NoteRow, 'at'>[];
+  run: { id: string; recordFacts: RecordFacts; becauseOf: string | null };
+  /** Levels of the run before the shown one. */
+  previous: { causeId: string; p: number }[] | null;
+  acknowledged: CaseView['state']['acknowledged'];
+  person: { name: string; units: UnitPreferences; decimal?: DecimalMark };
+}
