@@ -2,7 +2,7 @@ import { openDB, type DBSchema, type IDBPDatabase } from 'idb';
 import type { Stroke } from '@/lib/schemas/photo';
 import type { Rulebook } from '@/lib/diagnose/types';
 import type { CaseKit } from '@/lib/schemas/case-kit';
-import type { Waiting } from './waiting';
+import type { Waiting } from '@/lib/schemas/waiting';
 
 /** A photo on this device: until it is stored, the only copy there is. */
 export interface DevicePhoto {

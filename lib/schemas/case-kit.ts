@@ -24,6 +24,8 @@ export interface CaseKit {
   run: { id: string; recordFacts: RecordFacts; becauseOf: string | null };
   /** Levels of the run before the shown one. */
   previous: { causeId: string; p: number }[] | null;
+  /** What this person read, on which day of the site: it holds for that day. */
   acknowledged: CaseView['state']['acknowledged'];
+  acknowledgedOn: string;
   person: { name: string; units: UnitPreferences; decimal?: DecimalMark };
 }

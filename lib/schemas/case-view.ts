@@ -80,7 +80,9 @@ export interface FindingView {
   receivedAt: string;
   late: boolean;
   current: boolean;
-  notes: { id: string; text: string; person: string; at: string }[];
+  notes: { id: string; text: string; person: string; at: string; waits?: boolean }[];
+  /** It is on this device and not yet on the server. */
+  waits?: boolean;
 }
 
 export interface SuggestionView {

@@ -77,6 +77,9 @@ export const acknowledgeCautionsInput = z.strictObject({
   caseId,
   checkId: rulebookId,
   cautions: z.array(z.strictObject({ id: rowId, cautionId: rulebookId })).min(1).max(20),
+  /** When they were read, if that was before now; and what to add to the device's clock to get ours. */
+  deviceAt: instant.optional(),
+  clockOffsetMs: z.number().min(-1e11).max(1e11).default(0),
 });
 
 export const SURENESS_OF_CALL = ['sure', 'fairly-sure', 'guess'] as const;

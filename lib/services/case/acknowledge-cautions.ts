@@ -6,6 +6,7 @@ import { invalid, notFound } from '@/lib/errors';
 import { acknowledgeCautionsInput } from '@/lib/schemas/case';
 import { defineWrite } from '../define';
 import { compiledEdition } from '../edition/compiled';
+import { correctedTime } from '@/lib/case/corrected-time';
 import { siteDay } from '@/lib/case/site-day';
 
 /** Notes that a person read cautions today, in the danger of the check at hand. */
@@ -25,7 +26,8 @@ export const acknowledgeCautions = defineWrite({
     }
     const at = ctx.now();
     const dangers = dangersOf(check.setUp);
-    const onDay = siteDay(at, row.timeZone);
+    // Read without a connection last night, it was read last night.
+    const onDay = siteDay(input.deviceAt ? correctedTime({ deviceAt: input.deviceAt, clockOffsetMs: input.clockOffsetMs }, at) : at, row.timeZone);
     const written = await insertAcknowledgements(
       tx,
       input.cautions.map(({ id, cautionId }) => ({ ...of, id, cautionId, personId: ctx.person.id, onDay, dangers, at })),

@@ -5,8 +5,7 @@ import { selectLatestRun } from '@/db/queries/run';
 import { PERMITTED } from '@/lib/auth/permissions';
 import type { CompiledRulebook } from '@/lib/diagnose';
 import { cautionsToRead } from '@/lib/diagnose/cautions';
-import { stateAfter } from '@/lib/diagnose/set-up';
-import type { Check, SetUp } from '@/lib/diagnose/types';
+import type { Check } from '@/lib/diagnose/types';
 import { conflict, invalid, notFound } from '@/lib/errors';
 import { recordFindingInput } from '@/lib/schemas/case';
 import type { CaseState } from '@/lib/schemas/case-view';
@@ -14,8 +13,10 @@ import type { Ctx } from '../context';
 import { defineWrite } from '../define';
 import { compiledEdition } from '../edition/compiled';
 import { buildState } from '@/lib/case/build-state';
+import { correctedTime } from '@/lib/case/corrected-time';
 import { currentFindings, isNewer, slotOf } from '@/lib/case/current-findings';
 import { findingsForRanking } from '@/lib/case/findings-for-ranking';
+import { after } from '@/lib/case/provisional';
 import { gatherState } from './gather-state';
 import { readAnswer } from '@/lib/case/read-answer';
 import { makeRun } from './run-of-record';
@@ -49,16 +50,17 @@ export const recordFinding = defineWrite({
     const check = compiled.checks.get(input.checkId);
     if (!check) throw invalid({ checkId: "This check is not in the case's rulebook." });
     const answer = readAnswer(check, input.answer, writingOf(ctx));
-    const acknowledged = await acknowledgedToday(tx, ctx, head);
+    const receivedAt = ctx.now();
+    const correctedAt = correctedTime(input, receivedAt);
+    const acknowledged = await acknowledgedOn(tx, ctx, head, correctedAt);
     const says = answer.shares.length > 0;
     if (says) refuseUnreadCautions(compiled, check.check, acknowledged);
 
-    const receivedAt = ctx.now();
     const dated = {
       id: input.id,
       checkId: input.checkId,
       stage: input.stage,
-      correctedAt: correctedTime(new Date(input.deviceAt), input.clockOffsetMs, receivedAt),
+      correctedAt,
       receivedAt,
     };
     const standing = currentFindings(rows).find((other) => slotOf(other) === slotOf(dated));
@@ -99,7 +101,7 @@ export const recordFinding = defineWrite({
       notes: await selectFindingNotes(tx, of),
       run,
       previous: previous?.result ?? null,
-      acknowledged,
+      acknowledged: await acknowledgedOn(tx, ctx, head, receivedAt),
       units: ctx.person.units,
       at: null,
     });
@@ -108,12 +110,13 @@ export const recordFinding = defineWrite({
 
 const takenId = () => conflict('This id belongs to another finding.');
 
-function acknowledgedToday(tx: Transaction, ctx: Ctx, { id, timeZone }: { id: string; timeZone: string }) {
+/** What this person had read on the day of an answer: one that comes late was given by the cautions of its own day. */
+function acknowledgedOn(tx: Transaction, ctx: Ctx, { id, timeZone }: { id: string; timeZone: string }, at: Date) {
   return selectAcknowledgements(tx, {
     organisationId: ctx.organisation.id,
     caseId: id,
     personId: ctx.person.id,
-    onDay: siteDay(ctx.now(), timeZone),
+    onDay: siteDay(at, timeZone),
   });
 }
 
@@ -121,15 +124,4 @@ function refuseUnreadCautions({ rulebook }: CompiledRulebook, check: Check, ackn
   const worseWhen = (id: string) => rulebook.cautions.find((caution) => caution.id === id)?.worseWhen ?? [];
   const unread = cautionsToRead(check, worseWhen, acknowledged);
   if (unread.length > 0) throw conflict('Read and acknowledge the cautions of this check first.', { cautions: unread.join(' ') });
-}
-
-/** A device may be wrong about the time, but nothing is answered in the future. */
-function correctedTime(deviceAt: Date, offsetMs: number, receivedAt: Date): Date {
-  return new Date(Math.min(deviceAt.getTime() + offsetMs, receivedAt.getTime()));
-}
-
-/** Where the vehicle stands once the check was made. */
-function after(state: SetUp, setUp: SetUp): SetUp {
-  const { access, ...rest } = stateAfter({ ...state, access: state.access ?? [] }, setUp);
-  return { ...rest, access: [...access] };
 }

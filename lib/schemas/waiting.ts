@@ -1,4 +1,4 @@
-import type { RecordFindingInput } from '@/lib/schemas/case';
+import type { RecordFindingInput } from './case';
 
 interface Common {
   /** Order of doing; the database counts it. */
