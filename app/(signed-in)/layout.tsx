@@ -1,9 +1,11 @@
 import type { ReactNode } from 'react';
 import { cookies } from 'next/headers';
+import { DeviceKeeper } from '@/components/device/DeviceKeeper';
+import { SignOutForm } from '@/components/device/SignOutForm';
 import { SignedInShell } from '@/components/shell/SignedInShell';
 import { THEME_COOKIE, themeFrom } from '@/components/shell/theme';
-import { Button } from '@/components/ui/Button';
 import { navigationFor } from '@/lib/auth/navigation';
+import { may } from '@/lib/auth/permissions';
 import { requireContext } from '@/lib/auth/session';
 import { signOut } from './actions';
 
@@ -15,12 +17,9 @@ export default async function SignedInLayout({ children }: { children: ReactNode
       organisation={{ name: organisation.name }}
       items={navigationFor(roles)}
       theme={themeFrom((await cookies()).get(THEME_COOKIE)?.value)}
-      signOut={
-        <form action={signOut}>
-          <Button type="submit" variant="quiet" wide>Sign out</Button>
-        </form>
-      }
+      signOut={<SignOutForm action={signOut} />}
     >
+      <DeviceKeeper personId={person.id} organisationId={organisation.id} keepsCases={may(roles, 'case.see')} />
       {children}
     </SignedInShell>
   );

@@ -14,7 +14,8 @@ import { CheckAtHand } from './CheckAtHand';
 import { PanelAtHand } from './PanelAtHand';
 import { StationChecks } from './StationChecks';
 import { Stations } from './Stations';
-import { useCase, useCaseReasons, type CaseHandle } from './use-case';
+import { SyncStrip } from './SyncStrip';
+import { useCase, type CaseHandle } from './use-case';
 import { WhatNext } from './WhatNext';
 import { changeText } from './words';
 
@@ -24,8 +25,7 @@ const stationName = (id: StationId) => STATIONS.find((station) => station.id ===
 export function CaseDesk({ view }: { view: CaseView }) {
   const { rulebook } = view;
   const handle = useCase(view);
-  const { state } = handle;
-  const reasons = useCaseReasons(state, view.reasons);
+  const { state, reasons } = handle;
   const [picked, setPicked] = useState<Picked>(null);
   const [station, setStation] = useState<StationId | null>(null);
   const readOnly = state.at !== null || state.status !== 'open';
@@ -36,6 +36,8 @@ export function CaseDesk({ view }: { view: CaseView }) {
   };
 
   return (
+    <>
+    <div className="mb-6 empty:hidden"><SyncStrip sync={handle.sync} rulebook={rulebook} /></div>
     <div className="grid gap-8 lg:grid-cols-[13rem_minmax(0,1fr)_minmax(0,26rem)] lg:grid-rows-[auto_1fr]">
       <div className="min-w-0 lg:col-start-2 lg:row-start-1">
         {station ? (
@@ -54,6 +56,7 @@ export function CaseDesk({ view }: { view: CaseView }) {
       <div className="lg:col-start-1 lg:row-span-2 lg:row-start-1"><Stations state={state} rulebook={rulebook} picked={station} onPick={setStation} /></div>
       <LiveRegion>{spoken(state, rulebook)}</LiveRegion>
     </div>
+    </>
   );
 }
 

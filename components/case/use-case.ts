@@ -1,16 +1,24 @@
 'use client';
 
-import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
-import { useState } from 'react';
-import type { Danger } from '@/lib/diagnose/cautions';
+import { useMutation, useQueryClient } from '@tanstack/react-query';
+import { useCallback, useEffect, useRef, useState, useSyncExternalStore } from 'react';
 import { newId } from '@/lib/ids';
-import { api } from '@/lib/query/problem';
+import { listen } from '@/lib/offline/bus';
+import { stamp } from '@/lib/offline/clock';
+import { connectionAtFirst, onConnection, readConnection } from '@/lib/offline/connection';
+import { refreshKit } from '@/lib/offline/refresh-kit';
+import { waitingOf, type Kept } from '@/lib/offline/waiting';
 import { queryKeys } from '@/lib/query/keys';
 import type { AnswerInput } from '@/lib/schemas/case';
 import type { CaseReasons, CaseState, CaseView } from '@/lib/schemas/case-view';
+import { withWaiting } from './data/overlay';
+import { keepAndSend, PATIENCE_MS, refuseUnreadable } from './data/send-answer';
+import { useCaseEvents } from './data/use-case-events';
+import { useProvisional, useWaiting, type Provisional } from './data/use-provisional';
+import { useCaseReasons, useCaseState } from './data/use-server-state';
+import { differenceOf, type Difference } from './data/difference';
 
-/** A clock off by less than this is as good as ours: the answer's way to us takes as long. */
-const CLOCK_TOLERANCE_MS = 5_000;
+export { useCaseState } from './data/use-server-state';
 
 export interface AnswerGiven {
   checkId: string;
@@ -18,77 +26,129 @@ export interface AnswerGiven {
   askedBecause: 'suggested' | 'choice' | 'panel';
 }
 
-/** The state of a case as the server last told it; every part of the page that asks shares one copy. */
-export function useCaseState(initial: CaseState): CaseState {
-  const { data } = useQuery({
-    queryKey: [...queryKeys.caseState(initial.caseId), initial.at],
-    queryFn: () => api<CaseState>(`/api/v1/cases/${initial.caseId}`),
-    initialData: initial,
-    enabled: initial.at === null,
-    // The server's older copy must never replace what an answer has just brought.
-    structuralSharing: (held, fresh) => ((held as CaseState | undefined)?.version ?? 0) > (fresh as CaseState).version ? held : fresh,
-  });
-  return data;
+/** How page and server stand to each other. */
+export interface Sync {
+  reachable: boolean;
+  signedOut: boolean;
+  /** Done here and not yet on the server. */
+  unsent: Kept[];
+  /** The server would not take them: each says why. */
+  refused: Kept[];
+  /** The ranking shown is this device's own. */
+  provisional: boolean;
+  /** The server ranked otherwise than the device had, and how. */
+  difference: Difference | null;
 }
 
-/** Why the causes stand where they stand; the older reasons stay until those of the newest answer are here. */
-export function useCaseReasons({ caseId, at, version }: CaseState, initial: CaseReasons): CaseReasons {
-  const { data } = useQuery({
-    queryKey: [...queryKeys.caseReasons(caseId, version), at],
-    queryFn: () => api<CaseReasons>(`/api/v1/cases/${caseId}/reasons`),
-    initialData: version === initial.version ? initial : undefined,
-    enabled: at === null && version !== initial.version,
-    placeholderData: (held) => held ?? initial,
-  });
-  return data ?? initial;
-}
+/** After the last change, before the device fetches what it needs to go on alone. */
+const KIT_AFTER_MS = 300;
 
-/** The state of a case, with what can be done to it. */
-export function useCase({ state: initial, now }: CaseView) {
+/** A case as it stands, on the server or on this device, with what can be done to it. */
+export function useCase(view: CaseView) {
+  const { state: initial, rulebook, reader } = view;
   const { caseId } = initial;
-  const state = useCaseState(initial);
+  const isNow = initial.at === null;
   const client = useQueryClient();
-  const key = [...queryKeys.caseState(caseId), initial.at];
-  const path = `/api/v1/cases/${caseId}`;
-  const [clockOffsetMs] = useState(() => {
-    const offset = Date.parse(now) - Date.now();
-    return Math.abs(offset) < CLOCK_TOLERANCE_MS ? 0 : offset;
-  });
+  const ask = useCallback(() => void client.invalidateQueries({ queryKey: queryKeys.caseState(caseId) }), [client, caseId]);
+  const mustAsk = useCaseEvents(caseId, isNow, ask);
+  const server = useCaseState(initial, { mustAsk });
+  const serverReasons = useCaseReasons(server, view.reasons);
 
-  const keep = (fresh: CaseState) => client.setQueryData<CaseState>(key, fresh);
+  const connection = useSyncExternalStore(onConnection, readConnection, connectionAtFirst);
+  const waiting = useWaiting(caseId, isNow);
+  const unsent = waiting.filter(({ sentAt, refusal }) => sentAt === undefined && refusal === null);
+  const slow = useAfter(PATIENCE_MS, unsent.length > 0);
+  const provisional = useProvisional(caseId, waiting, isNow && (!connection.reachable || slow));
+  const difference = useDifference(caseId, provisional, server);
+  useKit(caseId, server.version, isNow && connection.reachable);
+
+  const post = (waitingItem: Parameters<typeof keepAndSend>[1], path: string) => keepAndSend(client, waitingItem, `/api/v1/cases/${caseId}/${path}`);
+  const common = { ...reader, caseId, refusal: null };
 
   const answer = useMutation({
-    mutationFn: ({ checkId, answer, askedBecause }: AnswerGiven) =>
-      api<CaseState>(`${path}/findings`, {
-        method: 'POST',
-        body: { id: newId(), checkId, answer, askedBecause, deviceAt: new Date().toISOString(), clockOffsetMs },
-      }),
-    onSuccess: keep,
+    networkMode: 'always',
+    mutationFn: async ({ checkId, answer, askedBecause }: AnswerGiven) => {
+      await refuseUnreadable(caseId, checkId, answer);
+      const id = newId();
+      await post({ ...common, kind: 'finding', id, body: { id, checkId, answer, askedBecause, ...stamp() } }, 'findings');
+    },
   });
 
   const acknowledge = useMutation({
+    networkMode: 'always',
     mutationFn: ({ checkId, cautionIds }: { checkId: string; cautionIds: string[] }) =>
-      api<{ cautionId: string; dangers: Danger[] }[]>(`${path}/acknowledgements`, {
-        method: 'POST',
-        body: { checkId, cautions: cautionIds.map((cautionId) => ({ id: newId(), cautionId })) },
-      }),
-    onSuccess: (read) => client.setQueryData<CaseState>(key, (held) => held && { ...held, acknowledged: [...held.acknowledged, ...read] }),
+      post(
+        { ...common, kind: 'acknowledgement', id: newId(), body: { checkId, cautions: cautionIds.map((cautionId) => ({ id: newId(), cautionId })), ...stamp() } },
+        'acknowledgements',
+      ),
   });
 
   const note = useMutation({
-    mutationFn: ({ findingId, text }: { findingId: string; text: string }) =>
-      api<{ id: string; findingId: string; text: string; person: string; at: string }>(`${path}/findings/${findingId}/notes`, {
-        method: 'POST',
-        body: { id: newId(), text },
-      }),
-    onSuccess: ({ findingId, ...written }) =>
-      client.setQueryData<CaseState>(key, (held) => held && {
-        ...held,
-        findings: held.findings.map((finding) => (finding.id === findingId ? { ...finding, notes: [...finding.notes, written] } : finding)),
-      }),
+    networkMode: 'always',
+    mutationFn: ({ findingId, text }: { findingId: string; text: string }) => {
+      const id = newId();
+      return post({ ...common, kind: 'note', id, findingId, body: { id, text } }, `findings/${findingId}/notes`);
+    },
   });
 
-  return { state, answer, acknowledge, note };
+  const state = withWaiting(provisional?.state ?? server, waiting, rulebook);
+  const reasons: CaseReasons = provisional?.reasons ?? serverReasons;
+  const sync: Sync = {
+    ...connection,
+    unsent,
+    refused: waiting.filter(({ refusal }) => refusal !== null),
+    provisional: provisional !== null && unsent.some(({ kind }) => kind === 'finding'),
+    difference,
+  };
+  return { state, reasons, sync, answer, acknowledge, note };
 }
 
 export type CaseHandle = ReturnType<typeof useCase>;
+
+/** true once `since` has been true for this long. */
+function useAfter(ms: number, since: boolean): boolean {
+  const [late, setLate] = useState(false);
+  useEffect(() => {
+    if (!since) return;
+    const timer = setTimeout(() => setLate(true), ms);
+    return () => {
+      clearTimeout(timer);
+      setLate(false);
+    };
+  }, [ms, since]);
+  return since && late;
+}
+
+/** Keeps on the device what it takes to go on alone, soon after each change. */
+function useKit(caseId: string, version: number, enabled: boolean): void {
+  useEffect(() => {
+    if (!enabled) return;
+    const timer = setTimeout(() => void refreshKit(caseId).catch(() => undefined), KIT_AFTER_MS);
+    return () => clearTimeout(timer);
+  }, [caseId, version, enabled]);
+}
+
+/** Takes the server's word on what was sent, and notes where it differs from what this device had shown. */
+function useDifference(caseId: string, provisional: Provisional | null, server: CaseState): Difference | null {
+  const client = useQueryClient();
+  const [difference, setDifference] = useState<Difference | null>(null);
+  const shown = useRef<Provisional | null>(null);
+  useEffect(() => {
+    if (provisional) shown.current = provisional;
+  }, [provisional]);
+  useEffect(
+    () =>
+      listen((told) => {
+        if (told.kind !== 'sent' || told.caseId !== caseId || !told.state) return;
+        const fresh = told.state;
+        client.setQueryData<CaseState>([...queryKeys.caseState(caseId), null], (held) => (held && held.version > fresh.version ? held : fresh));
+        void waitingOf(caseId).then((items) => {
+          if (items.some(({ sentAt, refusal }) => sentAt === undefined && refusal === null)) return;
+          setDifference(shown.current && differenceOf(shown.current.state, fresh));
+          shown.current = null;
+        });
+      }),
+    [caseId, client],
+  );
+  return difference && server.version >= difference.version ? difference : null;
+}

@@ -28,7 +28,7 @@ export interface Writing {
 
 const NOT_MEASURED = { valueTyped: null, errorTyped: null, unit: null, valueSi: null, errorSi: null };
 
-type ParsedAnswer = z.output<typeof answerInput>;
+export type ParsedAnswer = z.output<typeof answerInput>;
 
 /**
  * Understands an answer to a check: a state as it is, a measured value from what was typed.

@@ -2,5 +2,7 @@
 export const queryKeys = {
   caseState: (caseId: string) => ['case', caseId, 'state'] as const,
   caseReasons: (caseId: string, version: number) => ['case', caseId, 'reasons', version] as const,
+  caseWaiting: (caseId: string) => ['case', caseId, 'waiting'] as const,
+  caseProvisional: (caseId: string) => ['case', caseId, 'provisional'] as const,
   unitSearch: (text: string) => ['units', 'search', text] as const,
 };

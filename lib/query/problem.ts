@@ -1,3 +1,6 @@
+import { heardFrom } from '@/lib/offline/clock';
+import { noteConnection } from '@/lib/offline/connection';
+
 /** What the API answered instead of a result: problem+json (RFC 9457), or no answer at all. */
 export class ApiProblem extends Error {
   constructor(
@@ -16,6 +19,7 @@ const OFFLINE = 'No connection to Carryover. What you entered is still here; try
 /** Reads or writes JSON; throws ApiProblem with words that can be shown. */
 export async function api<Result>(path: string, { method = 'GET', body }: { method?: string; body?: unknown } = {}): Promise<Result> {
   let response: Response;
+  const askedAt = Date.now();
   try {
     response = await fetch(path, {
       method,
@@ -23,8 +27,11 @@ export async function api<Result>(path: string, { method = 'GET', body }: { meth
       body: body === undefined ? undefined : JSON.stringify(body),
     });
   } catch {
+    noteConnection({ reachable: false });
     throw new ApiProblem(OFFLINE, 0);
   }
+  heardFrom(response, askedAt);
+  noteConnection({ reachable: true, signedOut: response.status === 401 });
   if (response.ok) return (await response.json()) as Result;
   throw await problemOf(response);
 }

@@ -181,8 +181,8 @@ export interface CaseReasons {
 
 /** Everything that the page is made of at first. */
 export interface CaseView {
-  /** Our clock when this was made: what a device's clock is corrected by. */
-  now: string;
+  /** Who reads it: what is done on this page waits under that name when it can't be sent. */
+  reader: { personId: string; organisationId: string };
   head: CaseHead;
   rulebook: RulebookView;
   state: CaseState;

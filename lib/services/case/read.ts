@@ -47,7 +47,7 @@ export const readCase = defineRead({
     const state = buildState(parts);
     const everything = at ? buildState((await gatherState(tx, ctx, { caseId: input.caseId }))).findings : state.findings;
     return {
-      now: ctx.now().toISOString(),
+      reader: { personId: ctx.person.id, organisationId: ctx.organisation.id },
       head: headView(caseHead, ctx.person.units),
       rulebook,
       state: at ? { ...state, status: statusAt(events) } : state,

@@ -1,0 +1,56 @@
+'use client';
+
+import { Button } from '@/components/ui/Button';
+import { Notice } from '@/components/ui/Notice';
+import { percent } from '@/components/ui/SightGlass';
+import { discard, tryAgain, type Kept } from '@/lib/offline/waiting';
+import type { RulebookView } from '@/lib/schemas/case-view';
+import type { Sync } from './use-case';
+
+/** How page and server stand to each other; nothing at all while everything is saved. */
+export function SyncStrip({ sync, rulebook }: { sync: Sync; rulebook: RulebookView }) {
+  const { reachable, signedOut, unsent, refused, provisional, difference } = sync;
+  const waits = unsent.length > 0 && `${unsent.length === 1 ? 'One entry waits' : `${unsent.length} entries wait`} on this device and ${unsent.length === 1 ? 'goes' : 'go'} out when the connection is back.`;
+  return (
+    <div className="grid gap-3 empty:hidden" data-testid="sync">
+      {signedOut && (
+        <Notice title="You are signed out">
+          {unsent.length > 0 && 'What you entered is kept on this device and is sent once you are back. '}
+          <a className="underline underline-offset-4" href={`/sign-in?next=${typeof location === 'undefined' ? '' : encodeURIComponent(location.pathname)}`}>Sign in again</a>
+        </Notice>
+      )}
+      {!reachable && (
+        <Notice title="No connection">
+          Go on: each answer is kept on this device. {waits} {provisional && 'The ranking is provisional, worked out on this device.'}
+        </Notice>
+      )}
+      {reachable && !signedOut && provisional && <Notice title="Slow connection">{waits} Until then the ranking is provisional, worked out on this device.</Notice>}
+      {difference && (
+        <Notice title="The server ranks otherwise than this device did">
+          {rulebook.causes[difference.causeId]?.name ?? difference.causeId}: <span className="figure">{percent(difference.is)}</span>, shown here as{' '}
+          <span className="figure">{percent(difference.was)}</span>. {difference.others.length > 0 && `Meanwhile ${difference.others.join(' and ')} answered too.`}
+        </Notice>
+      )}
+      {refused.map((item) => <Refused key={item.order} item={item} rulebook={rulebook} />)}
+    </div>
+  );
+}
+
+function Refused({ item, rulebook }: { item: Kept; rulebook: RulebookView }) {
+  const checkId = item.kind === 'note' ? null : item.body.checkId;
+  return (
+    <Notice
+      kind="danger"
+      title="Not taken by the server, kept here"
+      actions={
+        <>
+          <Button onClick={() => void tryAgain(item)}>Send it again</Button>
+          <Button variant="quiet" onClick={() => void discard(item)}>Throw it away</Button>
+        </>
+      }
+    >
+      {checkId && <>{rulebook.checks[checkId]?.name ?? checkId}: </>}
+      {item.refusal?.message} {Object.values(item.refusal?.fields ?? {}).filter((text) => text.includes(' ')).join(' ')}
+    </Notice>
+  );
+}

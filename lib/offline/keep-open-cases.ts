@@ -1,0 +1,28 @@
+import { api } from '@/lib/query/problem';
+import { offlineDatabase } from './database';
+import { dropOtherPages, keepBuiltFiles, keepPages, keepThumbnails } from './keep-pages';
+import { refreshKit } from './refresh-kit';
+
+interface Listed {
+  cases: { id: string; version: number; thumbnails: string[] }[];
+}
+
+/** Keeps on this device what it takes to go on with the open cases of whoever is signed in. */
+export async function keepOpenCases(): Promise<void> {
+  const { cases } = await api<Listed>('/api/v1/device/cases');
+  const db = await offlineDatabase();
+  const paths = cases.map(({ id }) => `/cases/${id}`);
+  const here = /^\/cases\/[0-9a-f-]{36}$/.test(location.pathname) ? [location.pathname] : [];
+  await keepBuiltFiles();
+  await dropOtherPages([...paths, ...here, '/cases']);
+  for (const { id, version, thumbnails } of cases) {
+    const held = await db.get('kit', id);
+    if (held?.version === version) continue;
+    await refreshKit(id);
+    await keepPages([`/cases/${id}`]);
+    await keepThumbnails(thumbnails);
+  }
+  await keepPages(['/cases', ...here.filter((path) => !paths.includes(path))]);
+  // What those pages brought with them.
+  await keepBuiltFiles();
+}

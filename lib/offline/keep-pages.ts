@@ -1,0 +1,39 @@
+/** Names of the caches that the service worker (public/sw.js) serves from. */
+const CACHES = { static: 'carryover-static', pages: 'carryover-pages', thumbnails: 'carryover-thumbnails' } as const;
+
+/** Puts pages on the device, so that they open without a connection. */
+export async function keepPages(paths: readonly string[]): Promise<void> {
+  const cache = await caches.open(CACHES.pages);
+  for (const path of paths) {
+    const response = await fetch(path, { headers: { accept: 'text/html' } });
+    if (response.ok && !response.redirected) await cache.put(new URL(path, location.origin).href, response);
+  }
+}
+
+/** Puts the built files that this page came with there too: they were loaded before the service worker ruled. */
+export async function keepBuiltFiles(): Promise<void> {
+  const cache = await caches.open(CACHES.static);
+  const urls = performance
+    .getEntriesByType('resource')
+    .map(({ name }) => name)
+    .filter((name) => name.startsWith(`${location.origin}/_next/static/`));
+  for (const url of new Set(urls)) if (!(await cache.match(url))) await cache.add(url).catch(() => undefined);
+}
+
+export async function keepThumbnails(paths: readonly string[]): Promise<void> {
+  const cache = await caches.open(CACHES.thumbnails);
+  for (const path of paths) if (!(await cache.match(path))) await cache.add(path).catch(() => undefined);
+}
+
+/** Keeps only the pages of these paths: a closed case needs no place. */
+export async function dropOtherPages(paths: readonly string[]): Promise<void> {
+  const cache = await caches.open(CACHES.pages);
+  const wanted = new Set(paths.map((path) => new URL(path, location.origin).href));
+  for (const { url } of await cache.keys()) if (!wanted.has(url)) await cache.delete(url);
+}
+
+/** Pages and pictures hold what cases say; built files don't. */
+export async function dropKept(): Promise<void> {
+  if (typeof caches === 'undefined') return;
+  await Promise.all([caches.delete(CACHES.pages), caches.delete(CACHES.thumbnails)]);
+}

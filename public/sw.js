@@ -1,0 +1,64 @@
+/*
+ * Serves Carryover's pages, built files and thumbnails when there is no connection. What people enter never passes
+ * here: answers wait in IndexedDB, and requests to the API go to the network as they are.
+ */
+const STATIC = 'carryover-static';
+const PAGES = 'carryover-pages';
+const THUMBNAILS = 'carryover-thumbnails';
+/** Built files of former builds are of no use; the newest are at the end. */
+const MOST_STATIC = 500;
+
+self.addEventListener('install', () => self.skipWaiting());
+self.addEventListener('activate', (event) => event.waitUntil(self.clients.claim()));
+
+self.addEventListener('fetch', (event) => {
+  const { request } = event;
+  const url = new URL(request.url);
+  if (request.method !== 'GET' || url.origin !== self.location.origin) return;
+  if (url.pathname.startsWith('/_next/static/')) event.respondWith(fromCacheFirst(STATIC, request, trim));
+  else if (/^\/api\/v1\/photos\/[^/]+\/thumbnail$/.test(url.pathname)) event.respondWith(fromCacheFirst(THUMBNAILS, request));
+  else if (request.mode === 'navigate' && isKept(url)) event.respondWith(fromNetworkFirst(request));
+});
+
+/** The list of cases and each case as it is now: what a bay goes on with. */
+const isKept = ({ pathname, search }) => pathname === '/cases' || (/^\/cases\/[0-9a-f-]{36}$/.test(pathname) && search === '');
+
+async function fromCacheFirst(name, request, afterwards) {
+  const cache = await caches.open(name);
+  const held = await cache.match(request);
+  if (held) return held;
+  const response = await fetch(request);
+  if (response.ok) {
+    await cache.put(request, response.clone());
+    afterwards?.(cache);
+  }
+  return response;
+}
+
+async function trim(cache) {
+  const keys = await cache.keys();
+  for (const key of keys.slice(0, Math.max(0, keys.length - MOST_STATIC))) await cache.delete(key);
+}
+
+async function fromNetworkFirst(request) {
+  const cache = await caches.open(PAGES);
+  try {
+    const response = await fetch(request);
+    // A redirect (to the sign-in) is the browser's to follow, and no page of this address.
+    if (response.ok && response.type === 'basic' && !response.redirected) await cache.put(request.url, response.clone());
+    if (response.status < 502) return response;
+    return (await cache.match(request.url)) ?? response;
+  } catch {
+    return (await cache.match(request.url)) ?? noPage();
+  }
+}
+
+function noPage() {
+  const body = `<!doctype html><html lang="en"><meta charset="utf-8"><meta name="viewport" content="width=device-width">
+<title>No connection · Carryover</title>
+<style>body{font:1.0625rem/1.5 system-ui,sans-serif;max-width:38rem;margin:12vh auto;padding:0 1.25rem;background:#f6f1e6;color:#0e2f3a}
+a{color:inherit}@media(prefers-color-scheme:dark){body{background:#10191d;color:#e9e2d3}}</style>
+<h1>No connection</h1><p>This page is not kept on this device. What you entered in a case is: it is sent when the connection is back.</p>
+<p><a href="/cases">Open the cases kept on this device</a></p></html>`;
+  return new Response(body, { status: 503, headers: { 'content-type': 'text/html; charset=utf-8' } });
+}
