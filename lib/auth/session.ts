@@ -7,13 +7,14 @@ import { database } from '@/db';
 import { jobs } from '@/lib/jobs';
 import type { Ctx } from '@/lib/services/context';
 import { authOptions } from './options';
+import { storage } from '@/lib/storage/of-environment';
 import { returnPath } from './return-path';
 
 /** Who is signed in, checked against the database once a request; null when nobody is. */
 export const getContext = cache(async (): Promise<Ctx | null> => {
   const session = await getServerSession(authOptions());
   if (session?.failure) throw session.failure;
-  return session?.standing ? { ...session.standing, db: database(), now: () => new Date(), jobs } : null;
+  return session?.standing ? { ...session.standing, db: database(), now: () => new Date(), jobs, storage: storage() } : null;
 });
 
 /**

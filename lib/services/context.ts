@@ -1,7 +1,9 @@
 import type { Database } from '@/db/connect';
 import type { Role } from '@/lib/auth/roles';
 import type { JobQueue } from '@/lib/jobs';
+import type { Storage } from '@/lib/storage';
 import type { UnitPreferences } from '@/lib/units';
+import type { Repeat } from './repeat';
 
 /** Who asks, for which organisation, and with what: everything that a service may lean on. */
 export interface Ctx {
@@ -14,6 +16,8 @@ export interface Ctx {
   /** The clock, so that a test can set it. */
   now: () => Date;
   jobs: JobQueue;
+  /** Where photos are kept. */
+  storage: Storage;
 }
 
 /** Somebody who isn't signed in: all that is known is where the request came from. */

@@ -19,6 +19,8 @@ export interface StoredObject {
 export interface Storage {
   put(key: string, body: Uint8Array, mediaType: string): Promise<void>;
   get(key: string): Promise<Uint8Array | undefined>;
+  /** The same as it comes, for what is only passed on. */
+  open(key: string): Promise<ReadableStream<Uint8Array> | undefined>;
   /** What arrived. A presigned upload's limits are checked against this as well: not every server keeps them. */
   head(key: string): Promise<StoredObject | undefined>;
   remove(key: string): Promise<void>;
@@ -59,6 +61,11 @@ export function createStorage({ endpoint, region, bucket: Bucket, accessKey, sec
     async get(Key) {
       const found = await orAbsent(client.send(new GetObjectCommand({ Bucket, Key })));
       return found?.Body?.transformToByteArray();
+    },
+    async open(Key) {
+      const found = await orAbsent(client.send(new GetObjectCommand({ Bucket, Key })));
+      // The SDK knows several kinds of stream; in Node it is always this one.
+      return found?.Body?.transformToWebStream() as ReadableStream<Uint8Array> | undefined;
     },
     async head(Key) {
       const found = await orAbsent(client.send(new HeadObjectCommand({ Bucket, Key })));

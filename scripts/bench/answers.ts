@@ -15,6 +15,7 @@ import { defaultRulebook } from '@/lib/diagnose/default-rulebook';
 import { notFound } from '@/lib/errors';
 import { newId } from '@/lib/ids';
 import { jobs } from '@/lib/jobs';
+import { noStorage } from '@/lib/storage/none';
 import { recordFindingInput } from '@/lib/schemas/case';
 import { openCase } from '@/lib/services/case/open';
 import { readAnswer } from '@/lib/case/read-answer';
@@ -128,5 +129,5 @@ async function sessionOf(db: Database, cookie: string): Promise<Ctx> {
   const token = await decode({ secret: SECRET, token: cookie });
   const standing = token?.sub && (await standingOf(db, { personId: token.sub, organisationId: token.organisationId, sessionVersion: token.sessionVersion }));
   if (!standing) throw new Error('not signed in');
-  return { ...standing, db, now: () => new Date(), jobs };
+  return { ...standing, db, now: () => new Date(), jobs, storage: noStorage };
 }

@@ -8,6 +8,8 @@ import type { Rulebook } from '@/lib/diagnose/types';
 import { newId } from '@/lib/ids';
 import { jobs } from '@/lib/jobs';
 import type { Ctx, Visitor } from '@/lib/services/context';
+import type { Storage } from '@/lib/storage';
+import { noStorage } from '@/lib/storage/none';
 import { METRIC_UNITS, US_UNITS } from '@/lib/units';
 import type { TestDatabases } from './context';
 
@@ -23,6 +25,8 @@ interface TenantOptions extends PersonOptions {
   country?: string;
   timeZone?: string;
   now?: () => Date;
+  /** Given where photos are at stake. */
+  storage?: Storage;
   /** Given: it becomes the organisation's edition 1, and upstream's when there is none like it. */
   rulebook?: Rulebook;
 }
@@ -48,7 +52,7 @@ export interface Tenant {
  * const { ctx } = await makeTenant(databases, { roles: ['manager'] });
  */
 export async function makeTenant(databases: TestDatabases, options: TenantOptions = {}): Promise<Tenant> {
-  const { country = 'US', timeZone = 'America/Chicago', now = () => new Date(), rulebook } = options;
+  const { country = 'US', timeZone = 'America/Chicago', now = () => new Date(), storage = noStorage, rulebook } = options;
   const organisationId = newId();
   const siteId = newId();
   const editionId = newId();
@@ -71,6 +75,7 @@ export async function makeTenant(databases: TestDatabases, options: TenantOption
       mayRelease,
       now,
       jobs,
+      storage,
     };
   };
 

@@ -9,6 +9,7 @@ import { compileRulebook } from '@/lib/diagnose';
 import { defaultRulebook } from '@/lib/diagnose/default-rulebook';
 import { runOfRecord } from '@/lib/diagnose/record-run';
 import { jobs } from '@/lib/jobs';
+import { noStorage } from '@/lib/storage/none';
 import { newId } from '@/lib/ids';
 import { callCause } from '@/lib/services/case/call';
 import { listCases } from '@/lib/services/case/list';
@@ -36,6 +37,7 @@ beforeAll(async () => {
     mayRelease: false,
     now: () => NOW,
     jobs,
+    storage: noStorage,
   };
 }, 300_000);
 afterAll(() => databases.close());
