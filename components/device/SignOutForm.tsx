@@ -10,7 +10,6 @@ export function SignOutForm({ action }: { action: () => Promise<void> }) {
   const [wouldLose, setWouldLose] = useState(0);
   return (
     <form
-      method="post"
       className="grid gap-3"
       action={async () => {
         const unsent = await unsentCount();

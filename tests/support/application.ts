@@ -19,6 +19,7 @@ export async function openApplication({ url = 'http://carryover.test' } = {}): P
   return {
     ...databases,
     async close() {
+      await globalThis.carryoverChanges?.close();
       await globalThis.carryoverConnection?.close();
       await databases.close();
     },

@@ -74,6 +74,15 @@ async function tryAction(row: ActionRow<Made>, made: Made, browser: Browser, cha
   }
 }
 
+/** All of an answer; of a stream that goes on, what it says at once. */
+async function textOf(response: Response): Promise<string> {
+  if (!response.headers.get('content-type')?.startsWith('text/event-stream')) return response.text();
+  const reader = response.body?.getReader();
+  const first = await reader?.read();
+  await reader?.cancel();
+  return new TextDecoder().decode(first?.value);
+}
+
 async function tryRoute(row: RouteRow<Made>, made: Made, browser: Browser, change: Change): Promise<Outcome> {
   const handle = (await load(`${row.route}/route.ts`))[row.method] as (request: NextRequest, context: unknown) => Promise<Response>;
   const query = new URLSearchParams(Object.entries({ ...row.query?.(made), ...change.query }).map(([name, value]) => [name, String(value)]));
@@ -88,7 +97,7 @@ async function tryRoute(row: RouteRow<Made>, made: Made, browser: Browser, chang
   const params = Promise.resolve(change.params ?? row.params?.(made) ?? {});
   try {
     const response = await browser.act(path, () => handle(request, { params }), headers);
-    const text = await response.text();
+    const text = await textOf(response);
     const kind = response.status >= 500 ? 'broken' : response.status >= 400 ? 'refused' : 'done';
     return { kind, status: response.status, message: text, text, ...(response.headers.get('location') && { redirect: response.headers.get('location') ?? '' }) };
   } catch (error) {
