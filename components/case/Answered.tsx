@@ -76,7 +76,7 @@ export function Answered({ handle, rulebook, timeZone, readOnly, onPick }: Props
 function Finding({ finding, handle, rulebook, timeZone, readOnly, onPick }: Props & { finding: FindingView }) {
   const check = rulebook.checks[finding.checkId];
   return (
-    <li className="grid gap-1 border-b border-rule py-3">
+    <li data-finding={finding.id} data-waits={finding.waits || undefined} className="grid gap-1 border-b border-rule py-3">
       <p>
         {check?.name ?? finding.checkId}: <strong className={check?.kind === 'measured' ? 'figure' : undefined}>{finding.answer}</strong>
         {finding.thinkSo && ' (think so)'}
