@@ -16,8 +16,10 @@ const STATUS: Record<ErrorCode, number> = {
   forbidden: 403,
   'not-found': 404,
   conflict: 409,
+  stale: 412,
   'too-large': 413,
   invalid: 422,
+  unconditional: 428,
   'too-many': 429,
 };
 

@@ -4,7 +4,18 @@
  */
 export type FieldErrors = Record<string, string>;
 
-export type ErrorCode = 'not-signed-in' | 'forbidden' | 'not-found' | 'invalid' | 'conflict' | 'too-many' | 'too-large';
+export type ErrorCode =
+  | 'not-signed-in'
+  | 'forbidden'
+  | 'not-found'
+  | 'invalid'
+  | 'conflict'
+  /** What somebody changed is not as it was when he or she read it. */
+  | 'stale'
+  /** A change has to say which state it is of. */
+  | 'unconditional'
+  | 'too-many'
+  | 'too-large';
 
 export class AppError extends Error {
   constructor(

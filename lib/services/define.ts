@@ -5,6 +5,7 @@ import { hasAnyRole, type Role } from '@/lib/auth/roles';
 import { forbidden, invalid } from '@/lib/errors';
 import type { Ctx } from './context';
 import { fieldErrors } from './field-errors';
+import { onceForKey } from './repeat';
 import { refuseUnkeepable } from './unkeepable';
 
 export interface Work<Input, Prepared = undefined> {
@@ -62,21 +63,22 @@ function define<Schema extends z.ZodType, Result, Prepared>(
     const prepared = (await prepare?.({ ctx, input: parsed.data })) as Prepared;
 
     return asTenant(ctx.db, { organisationId: ctx.organisation.id, personId: ctx.person.id }, async (tx) => {
-      const noted: Parameters<Work<unknown>['audit']>[0][] = [];
-      let isUnchanged = false;
-      const result = await run({
-        tx,
-        ctx,
-        input: parsed.data,
-        prepared,
-        audit: (row) => noted.push(row),
-        unchanged: () => (isUnchanged = true),
-      });
-      if (writes && noted.length === 0 && !isUnchanged) throw new Error(`${name} wrote without an audit row`);
-      await insertAudit(tx, noted.map((row) => ({ ...row, organisationId: ctx.organisation.id, personId: ctx.person.id, action: name, at: ctx.now() })));
-      return result;
+      const work = () => withAudit(tx, ctx, { name, writes }, (noting) => run({ tx, ctx, input: parsed.data, prepared, ...noting }));
+      return writes ? onceForKey(tx, ctx, { name, input: parsed.data }, work) : work();
     });
   };
   // A function's own name can't be assigned to, so that the service's is `action`.
   return Object.assign(service, { action: name, roles, input: schema });
+}
+
+type Noting = Pick<Work<unknown>, 'audit' | 'unchanged'>;
+
+/** Does the work of a service and puts its audit rows beside it. */
+async function withAudit<Result>(tx: Transaction, ctx: Ctx, { name, writes }: { name: string; writes: boolean }, work: (noting: Noting) => Promise<Result>): Promise<Result> {
+  const noted: Parameters<Noting['audit']>[0][] = [];
+  let isUnchanged = false;
+  const result = await work({ audit: (row) => noted.push(row), unchanged: () => (isUnchanged = true) });
+  if (writes && noted.length === 0 && !isUnchanged) throw new Error(`${name} wrote without an audit row`);
+  await insertAudit(tx, noted.map((row) => ({ ...row, organisationId: ctx.organisation.id, personId: ctx.person.id, action: name, at: ctx.now() })));
+  return result;
 }

@@ -6,13 +6,16 @@ import type { Ctx } from '../context';
 
 export type Standing = Omit<Ctx, 'db' | 'now' | 'jobs' | 'storage'>;
 
-/** What a signed-in request stands on, read anew at each; undefined when the person is no member or was signed out. */
+/**
+ * What a request stands on, read anew at each; undefined when the person is no member, or his sessions were ended since
+ * this one began. A token isn't a session and gives no version.
+ */
 export async function standingOf(
   db: Database,
-  { personId, organisationId, sessionVersion }: { personId: string; organisationId: string; sessionVersion: number },
+  { personId, organisationId, sessionVersion }: { personId: string; organisationId: string; sessionVersion?: number },
 ): Promise<Standing | undefined> {
   const row = await findStanding(db, { personId, organisationId });
-  if (!row || row.sessionVersion !== sessionVersion) return undefined;
+  if (!row || (sessionVersion !== undefined && row.sessionVersion !== sessionVersion)) return undefined;
   return {
     organisation: { id: organisationId, name: row.organisationName, country: row.country, currency: row.currency },
     person: {

@@ -130,7 +130,7 @@ describe('changing a unit', () => {
     const { ctx, unitId, input } = await opened();
     await changeUnit({ ctx, input: { ...input, vocation: 'regional' } });
     const late = { ...input, vocation: 'long-haul' as const };
-    await expect(changeUnit({ ctx, input: late })).rejects.toMatchObject({ code: 'conflict', fields: { vocation: 'Stored now: Regional' } });
+    await expect(changeUnit({ ctx, input: late })).rejects.toMatchObject({ code: 'stale', fields: { vocation: 'Stored now: Regional' } });
     const { version } = await readUnitForm({ ctx, input: { unitId } });
     await changeUnit({ ctx, input: { ...late, version } });
     expect((await readUnit({ ctx, input: { unitId } })).unit.vocation).toBe('long-haul');

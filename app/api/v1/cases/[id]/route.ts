@@ -1,4 +1,4 @@
 import { route } from '@/lib/auth/route';
 import { readCaseState } from '@/lib/services/case/read';
 
-export const GET = route(readCaseState, { input: ({ params, query }) => ({ ...query, caseId: params.id }) });
+export const GET = route(readCaseState, { params: { id: 'caseId' }, scope: 'cases:read', version: ({ version }) => version });

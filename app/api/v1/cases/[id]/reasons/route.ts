@@ -1,4 +1,4 @@
 import { route } from '@/lib/auth/route';
 import { readCaseReasons } from '@/lib/services/case/read';
 
-export const GET = route(readCaseReasons, { input: ({ params, query }) => ({ ...query, caseId: params.id }) });
+export const GET = route(readCaseReasons, { params: { id: 'caseId' }, scope: 'cases:read' });

@@ -1,7 +1,4 @@
 import { route } from '@/lib/auth/route';
 import { noteFinding } from '@/lib/services/case/note-finding';
 
-export const POST = route(noteFinding, {
-  status: 201,
-  input: ({ params, body }) => ({ ...Object(body), caseId: params.id, findingId: params.findingId }),
-});
+export const POST = route(noteFinding, { params: { id: 'caseId' }, scope: 'cases:write', status: 201 });

@@ -1,0 +1,29 @@
+import { may, type Permission } from './permissions';
+import type { Role } from './roles';
+
+/**
+ * What a personal token can be let do: it acts with the roles of its person and within its scopes, so that the smaller
+ * of the two holds. Each scope rests on the permission that its person needs for it.
+ */
+export const SCOPES = {
+  'cases:read': { needs: 'case.see', does: 'See cases, their rankings, photos and the rulebook' },
+  'cases:write': { needs: 'case.work', does: 'Open cases, answer checks, add photos, name causes' },
+  'units:read': { needs: 'unit.see', does: 'See units with their readings and fits' },
+  'units:write': { needs: 'unit.edit', does: 'Add and change units, readings and fits' },
+  'models:read': { needs: 'model.see', does: 'See compressor models' },
+  'models:write': { needs: 'model.edit', does: 'Add and change compressor models' },
+  'sites:read': { needs: 'own-settings', does: 'See sites' },
+  'sites:write': { needs: 'site.manage', does: 'Add and change sites' },
+  'people:read': { needs: 'case.see', does: 'See who can be given a case' },
+  'profile:read': { needs: 'own-settings', does: 'See who you are and your units of measure' },
+  'profile:write': { needs: 'own-settings', does: 'Change your units of measure' },
+} as const satisfies Record<string, { needs: Permission; does: string }>;
+
+export type Scope = keyof typeof SCOPES;
+
+export const SCOPE_IDS = Object.keys(SCOPES) as [Scope, ...Scope[]];
+
+export const isScope = (text: string): text is Scope => text in SCOPES;
+
+/** Those that somebody with these roles can make any use of. */
+export const scopesFor = (roles: readonly Role[]): Scope[] => SCOPE_IDS.filter((scope) => may(roles, SCOPES[scope].needs));
