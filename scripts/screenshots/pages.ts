@@ -1,0 +1,89 @@
+import type { Role } from '@/lib/auth/roles';
+import type { Places } from './places';
+
+/** What the database is like when a picture is made; only a server of our own is ever emptied or broken. */
+export type Stage = 'seeded' | 'emptied' | 'broken';
+
+export interface Shot {
+  /** The folder of its page below `app`; null for an address that no page has. */
+  page: string | null;
+  /** What it shows of that page, in words; also its file's name. */
+  name: string;
+  /** Nobody: not signed in. */
+  as: Role | 'nobody';
+  /** Where it is; undefined when this database has no such thing. */
+  path: (places: Places) => string | undefined;
+  stage?: Stage;
+}
+
+const NOWHERE = '01890a5d-ac96-774b-bcce-b302099a8057';
+const IN = '(signed-in)';
+
+const shot = (page: string | null, name: string, as: Shot['as'], path: string | Shot['path'], stage?: Stage): Shot => ({
+  page,
+  name,
+  as,
+  path: typeof path === 'string' ? () => path : path,
+  stage,
+});
+
+/** Every page in every state it has. `tests/unit/screenshots/pages.test.ts` compares it with the folders of `app`. */
+export const SHOTS: readonly Shot[] = [
+  shot('(public)', 'home', 'nobody', '/'),
+  shot('(auth)/sign-in', 'sign-in', 'nobody', '/sign-in'),
+  shot('(auth)/reset-password', 'reset-password', 'nobody', '/reset-password'),
+  shot('(auth)/reset-password/[token]', 'reset-password-link', 'nobody', ({ reset }) => reset),
+  shot('(auth)/reset-password/[token]', 'reset-password-dead-link', 'nobody', '/reset-password/not-a-link-that-was-sent-by-anybody-here'),
+  shot('(auth)/invite/[token]', 'invite-link', 'nobody', ({ invitation }) => invitation),
+  shot('(auth)/invite/[token]', 'invite-dead-link', 'nobody', '/invite/not-a-link-that-was-sent-by-anybody-here'),
+  shot(null, 'not-found-outside', 'nobody', '/nothing-here'),
+
+  shot(`${IN}/cases`, 'cases', 'technician', '/cases'),
+  shot(`${IN}/cases`, 'cases-all', 'manager', '/cases?status=all'),
+  shot(`${IN}/cases`, 'cases-no-match', 'manager', '/cases?q=zzzz'),
+  shot(`${IN}/cases`, 'cases-empty', 'technician', '/cases', 'emptied'),
+  shot(`${IN}/cases`, 'cases-error', 'technician', '/cases', 'broken'),
+  shot(`${IN}/cases/new`, 'case-new', 'technician', '/cases/new'),
+  shot(`${IN}/cases/new`, 'case-new-on-unit', 'technician', ({ unit }) => unit && `/cases/new?unit=${unit}`),
+  shot(`${IN}/cases/[id]`, 'case', 'technician', ({ openCase }) => openCase && `/cases/${openCase}`),
+  shot(`${IN}/cases/[id]`, 'case-called', 'technician', ({ calledCase }) => calledCase && `/cases/${calledCase}`),
+  shot(`${IN}/cases/[id]`, 'case-past', 'technician', ({ pastMoment }) => pastMoment),
+  shot(`${IN}/cases/[id]`, 'case-not-found', 'technician', `/cases/${NOWHERE}`),
+
+  shot(`${IN}/units`, 'units', 'technician', '/units'),
+  shot(`${IN}/units`, 'units-no-match', 'technician', '/units?q=zzzz'),
+  shot(`${IN}/units`, 'units-empty', 'technician', '/units', 'emptied'),
+  shot(`${IN}/units/new`, 'unit-new', 'technician', '/units/new'),
+  shot(`${IN}/units/new`, 'unit-new-not-allowed', 'trainer', '/units/new'),
+  shot(`${IN}/units/[id]`, 'unit', 'technician', ({ unit }) => unit && `/units/${unit}`),
+  shot(`${IN}/units/[id]`, 'unit-not-found', 'technician', `/units/${NOWHERE}`),
+  shot(`${IN}/units/[id]/edit`, 'unit-edit', 'technician', ({ unit }) => unit && `/units/${unit}/edit`),
+  shot(`${IN}/units/[id]/readings/new`, 'unit-reading', 'technician', ({ unit }) => unit && `/units/${unit}/readings/new`),
+  shot(`${IN}/units/[id]/fits/new`, 'fit-new', 'technician', ({ unit }) => unit && `/units/${unit}/fits/new`),
+  shot(`${IN}/units/[id]/fits/[fitId]`, 'fit', 'technician', ({ fit }) => fit),
+
+  shot(`${IN}/models`, 'models', 'engineer', '/models'),
+  shot(`${IN}/models`, 'models-empty', 'engineer', '/models', 'emptied'),
+  shot(`${IN}/models`, 'models-error', 'engineer', '/models', 'broken'),
+  shot(`${IN}/models/new`, 'model-new', 'engineer', '/models/new'),
+  shot(`${IN}/models/[id]`, 'model', 'engineer', ({ model }) => model && `/models/${model}`),
+  shot(`${IN}/models/[id]`, 'model-not-found', 'engineer', `/models/${NOWHERE}`),
+  shot(`${IN}/models/[id]/edit`, 'model-edit', 'engineer', ({ model }) => model && `/models/${model}/edit`),
+
+  shot(`${IN}/settings/profile`, 'settings-profile', 'technician', '/settings/profile'),
+  shot(`${IN}/settings/units`, 'settings-units', 'technician', '/settings/units'),
+  shot(`${IN}/settings/people`, 'settings-people', 'administrator', '/settings/people'),
+  shot(`${IN}/settings/people/[id]`, 'settings-person', 'administrator', ({ person }) => person && `/settings/people/${person}`),
+  shot(`${IN}/settings/people/[id]`, 'settings-person-not-found', 'administrator', `/settings/people/${NOWHERE}`),
+  shot(`${IN}/settings/people/invite`, 'settings-invite', 'administrator', '/settings/people/invite'),
+  shot(`${IN}/settings/sites`, 'settings-sites', 'administrator', '/settings/sites'),
+  shot(`${IN}/settings/sites/[id]`, 'settings-site', 'administrator', ({ site }) => site && `/settings/sites/${site}`),
+  shot(`${IN}/settings/sites/[id]`, 'settings-site-not-found', 'administrator', `/settings/sites/${NOWHERE}`),
+  shot(`${IN}/settings/sites/new`, 'settings-site-new', 'administrator', '/settings/sites/new'),
+  shot(`${IN}/settings/organisation`, 'settings-organisation', 'administrator', '/settings/organisation'),
+  shot(`${IN}/settings/organisation`, 'settings-organisation-not-allowed', 'technician', '/settings/organisation'),
+  shot(`${IN}/settings/audit`, 'settings-audit', 'administrator', '/settings/audit'),
+];
+
+/** Pages that only lead somewhere else, so that there is nothing to picture. */
+export const ONLY_REDIRECTS: readonly string[] = [`${IN}/settings`];
