@@ -10,7 +10,11 @@ export function demoPerson(role: string) {
 
 /** Signs in through the form, as a person would, and waits until the page behind it is there. */
 export async function signIn(page: Page, baseUrl: string, role: string) {
-  const { email, password } = demoPerson(role);
+  await signInAs(page, baseUrl, demoPerson(role));
+}
+
+/** The same as anybody with an address and a password. */
+export async function signInAs(page: Page, baseUrl: string, { email, password }: { email: string; password: string }) {
   await page.goto(`${baseUrl}/sign-in`);
   await page.getByLabel(/e-?mail/i).fill(email);
   await page.getByLabel(/password/i).fill(password);
