@@ -4,6 +4,7 @@ import { env } from '@/lib/env';
 import { JOB_SCHEMA } from '@/lib/jobs';
 import { log } from '@/lib/log';
 import { createMailer } from '@/lib/mail';
+import { storage } from '@/lib/storage/of-environment';
 import { handlers } from './handlers';
 import { startWork } from './start-work';
 
@@ -14,7 +15,7 @@ const mailer = createMailer(SMTP_URL, MAIL_FROM);
 const boss = new PgBoss({ connectionString: DATABASE_URL, schema: JOB_SCHEMA, migrate: false, max: 4, archiveCompletedAfterSeconds: 3600, deleteAfterDays: 1 });
 boss.on('error', (error) => log.error({ err: error }, 'job queue'));
 
-await startWork(boss, handlers({ db, mailer, now: () => new Date(), baseUrl: NEXTAUTH_URL }));
+await startWork(boss, handlers({ db, mailer, now: () => new Date(), baseUrl: NEXTAUTH_URL, storage: storage() }));
 log.info('worker ready');
 
 let stopping = false;

@@ -7,6 +7,7 @@ export interface JobData {
   'mail-invitation': { organisationId: string; invitationId: string };
   /** The address as typed: whether anybody has it is looked up where nobody can time the answer. */
   'mail-password-reset': { email: string };
+  'make-thumbnail': { organisationId: string; photoId: string };
   sweep: Record<string, never>;
 }
 export type JobName = keyof JobData;

@@ -1,4 +1,84 @@
+import { z } from 'zod';
+
+/** A resized picture is well under it; an original from a phone often is not. */
+export const MOST_PHOTO_BYTES = 4 * 1024 * 1024;
+export const PHOTO_TYPES = ['image/jpeg', 'image/webp', 'image/png'] as const;
+/** The long side of a picture as a device sends it, in pixels. */
+export const LONGEST_SIDE_PX = 2048;
+
+const rowId = z.uuid('This id is not a uuid.');
+const rulebookId = z.string().regex(/^[a-z0-9][a-z0-9-]{0,79}$/, 'This is not an id of the rulebook.');
+const instant = z.iso.datetime({ offset: true, message: 'Give the time as ISO 8601 with its offset.' });
+const description = z.string().trim().max(1000, 'Keep it under 1,000 characters.');
+
+const fraction = z.number().min(0).max(1);
+export const MOST_STROKES = 100;
+/** Of all strokes together: more than a hand draws, and well within a request. */
+export const MOST_POINTS = 6000;
+
 /** A line drawn on a photo: points in fractions of its width and height, so that any size of it can carry them. */
-export interface Stroke {
-  points: [x: number, y: number][];
-}
+export const stroke = z.strictObject({ points: z.array(z.tuple([fraction, fraction])).min(1).max(MOST_POINTS) });
+export type Stroke = z.infer<typeof stroke>;
+
+export const strokes = z
+  .array(stroke)
+  .max(MOST_STROKES, `Keep it to ${MOST_STROKES} lines.`)
+  .refine((lines) => lines.reduce((sum, { points }) => sum + points.length, 0) <= MOST_POINTS, 'These lines are too long to keep. Clear some of them.');
+
+export const addPhotoInput = z.strictObject({
+  /** Client-made uuid v7: the photo's id, and the key by which a repeated request is known. */
+  id: rowId,
+  caseId: rowId,
+  /** The check that it was taken for, if any. */
+  checkId: rulebookId.nullish(),
+  mediaType: z.enum(PHOTO_TYPES, 'A photo is a JPEG, WebP or PNG.'),
+  /** Exact length of what will be uploaded. */
+  bytes: z.int().min(1).max(MOST_PHOTO_BYTES, `A photo may hold ${MOST_PHOTO_BYTES / 1024 / 1024} MB at most. Make it smaller first.`),
+  takenAt: instant,
+  /** Milliseconds to add to the device's clock to get ours. */
+  clockOffsetMs: z.number().min(-1e11).max(1e11).default(0),
+  description: description.default(''),
+});
+
+export const photoInput = z.strictObject({ photoId: rowId });
+export const photosOfCaseInput = z.strictObject({ caseId: rowId });
+export const markPhotoInput = z.strictObject({ photoId: rowId, strokes, description });
+export const hidePhotoInput = z.strictObject({
+  photoId: rowId,
+  hidden: z.boolean(),
+  reason: z.string().trim().min(1, 'Say why.').max(500, 'Keep it under 500 characters.'),
+});
+
+/** Where a photo stands: `upload` is where its bytes go, as fields of a form that ends with `file`; null when none are wanted. */
+export const photoStanding = z.object({
+  id: rowId,
+  state: z.enum(['awaited', 'stored', 'refused']),
+  refusal: z.string().nullable(),
+  upload: z.object({ url: z.url(), fields: z.record(z.string(), z.string()) }).nullable(),
+});
+export type PhotoStanding = z.infer<typeof photoStanding>;
+
+/** A stored photo of a case. Its picture and thumbnail are at `/api/v1/photos/{id}/picture` and `…/thumbnail`. */
+export const photoView = z.object({
+  id: rowId,
+  caseId: rowId,
+  checkId: z.string().nullable(),
+  /** In pixels. */
+  width: z.int(),
+  height: z.int(),
+  takenAt: z.iso.datetime(),
+  person: z.string(),
+  description: z.string(),
+  strokes: z.array(stroke),
+  /** Taken out of sight, and why; null: in sight. */
+  hidden: z.object({ reason: z.string(), person: z.string(), at: z.iso.datetime() }).nullable(),
+});
+export type PhotoView = z.infer<typeof photoView>;
+
+export const photoList = z.object({ photos: z.array(photoView) });
+export type PhotoList = z.infer<typeof photoList>;
+
+export const photoMarks = z.object({ id: rowId, strokes: z.array(stroke), description: z.string() });
+export const photoHidden = z.object({ id: rowId, hidden: z.boolean() });
+/** What an answer holds that is no JSON. */
+export const photoBytes = z.string().meta({ format: 'binary' });

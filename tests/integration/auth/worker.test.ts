@@ -6,6 +6,7 @@ import { JOB_SCHEMA, jobs } from '@/lib/jobs';
 import { createMailer, type Mailer } from '@/lib/mail';
 import { requestPasswordReset } from '@/lib/services/password/request-reset';
 import { resetPassword } from '@/lib/services/password/reset';
+import { noStorage } from '@/lib/storage/none';
 import { openTestDatabases, type TestDatabases } from '@/tests/support/context';
 import { makeTenant, makeVisitor } from '@/tests/support/tenant';
 import { handlers } from '@/worker/handlers';
@@ -44,7 +45,7 @@ beforeAll(async () => {
   mailer = createMailer(`smtp://127.0.0.1:${port}`, 'Carryover <carryover@carryover.test>');
   // As the worker runs: under the application's role, which makes no tables.
   boss = new PgBoss({ connectionString: databases.appUrl, schema: JOB_SCHEMA, migrate: false, max: 2 });
-  await startWork(boss, handlers({ db: databases.app, mailer, now: () => new Date(), baseUrl: 'https://carryover.test' }));
+  await startWork(boss, handlers({ db: databases.app, mailer, now: () => new Date(), baseUrl: 'https://carryover.test', storage: noStorage }));
 });
 afterAll(async () => {
   await boss.stop({ graceful: false, wait: true });
