@@ -5,12 +5,14 @@ import type { ActionState } from '@/lib/auth/form';
 
 type Action<Result> = (previous: ActionState<Result>, form: FormData) => Promise<ActionState<Result>>;
 
-export interface FormHandle {
+export interface FormHandle<Result = unknown> {
   /** For the form's `action`. */
   submit: (form: FormData) => void;
   /** Counts the answers: what is keyed by it is drawn anew with what was typed. */
   attempt: number;
   saved: boolean;
+  /** What the action came to, once it worked. */
+  result?: Result;
   message?: string;
   errors: Record<string, string>;
   /** Name, error and what to begin with: what was typed last, or what is stored. */
@@ -27,7 +29,7 @@ export interface FormHandle {
  * const form = useForm(renamePerson);
  * <Form form={form}><TextField label="Name" {...form.field('name', person.name)} /></Form>
  */
-export function useForm<Result>(action: Action<Result>): FormHandle {
+export function useForm<Result>(action: Action<Result>): FormHandle<Result> {
   const [state, submit] = useActionState(action, null);
   const [answered, setAnswered] = useState({ state, count: 0 });
   if (answered.state !== state) setAnswered({ state, count: answered.count + 1 });
@@ -37,6 +39,7 @@ export function useForm<Result>(action: Action<Result>): FormHandle {
     submit,
     attempt: answered.count,
     saved: state?.ok ?? false,
+    result: state?.ok ? state.result : undefined,
     message: refused?.message,
     errors: refused?.fields ?? {},
     field(name, stored) {

@@ -1,12 +1,10 @@
 import 'server-only';
 import { database } from '@/db';
 import { AppError, notSignedIn, type ErrorCode } from '@/lib/errors';
-import { jobs } from '@/lib/jobs';
 import type { Ctx } from '@/lib/services/context';
 import { standingOfToken, type TokenStanding } from '@/lib/services/token/standing';
 import type { Scope } from './scopes';
-import { getContext } from './session';
-import { storage } from '@/lib/storage/of-environment';
+import { contextOf, getContext } from './session';
 import { holdsPersonalToken } from './token';
 
 /** A refusal that says by RFC 6750 what a token would have to be. */
@@ -47,10 +45,9 @@ export async function callerOf(request: Request): Promise<Caller> {
   }
   const [, token] = /^Bearer +([\w.~+/=-]{1,200})$/i.exec(authorization) ?? [];
   if (token === undefined) throw new TokenRefused('not-signed-in', 'Send the token as “Authorization: Bearer” and the token after it.');
-  const now = () => new Date();
-  const found = await standingOfToken(database(), { token, now: now() });
+  const found = await standingOfToken(database(), { token, now: new Date() });
   if (!found.works) throw new TokenRefused('not-signed-in', WHY_NOT[found.why], { error: 'invalid_token' });
-  return { ctx: { ...found.standing, db: database(), now, jobs, storage: storage() }, token: { scopes: found.scopes } };
+  return { ctx: contextOf(found.standing), token: { scopes: found.scopes } };
 }
 
 /** Addresses end up in logs, histories and on screens. */

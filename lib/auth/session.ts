@@ -6,15 +6,19 @@ import { getServerSession } from 'next-auth/next';
 import { database } from '@/db';
 import { jobs } from '@/lib/jobs';
 import type { Ctx } from '@/lib/services/context';
-import { authOptions } from './options';
+import type { Standing } from '@/lib/services/session/standing';
 import { storage } from '@/lib/storage/of-environment';
+import { authOptions } from './options';
 import { returnPath } from './return-path';
+
+/** What services take, for somebody of whom it is known what he or she stands on. */
+export const contextOf = (standing: Standing): Ctx => ({ ...standing, db: database(), now: () => new Date(), jobs, storage: storage() });
 
 /** Who is signed in, checked against the database once a request; null when nobody is. */
 export const getContext = cache(async (): Promise<Ctx | null> => {
   const session = await getServerSession(authOptions());
   if (session?.failure) throw session.failure;
-  return session?.standing ? { ...session.standing, db: database(), now: () => new Date(), jobs, storage: storage() } : null;
+  return session?.standing ? contextOf(session.standing) : null;
 });
 
 /**

@@ -18,6 +18,8 @@ export interface Ctx {
   jobs: JobQueue;
   /** Where photos are kept. */
   storage: Storage;
+  /** Given when the request may be a repeat of one that was done already. */
+  repeat?: Repeat;
 }
 
 /** Somebody who isn't signed in: all that is known is where the request came from. */

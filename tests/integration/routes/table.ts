@@ -2,8 +2,10 @@ import type { Feature } from './row';
 import { cases } from './rows/cases';
 import { device } from './rows/device';
 import { models } from './rows/models';
+import { photos } from './rows/photos';
 import { settings } from './rows/settings';
 import { signingIn } from './rows/signing-in';
+import { tokens } from './rows/tokens';
 import { units } from './rows/units';
 
 /**
@@ -11,4 +13,4 @@ import { units } from './rows/units';
  * `app` is not here, and tries wrong roles, another organisation, malformed and oversized input on each. A feature adds
  * its file of rows to `rows/` and its name here.
  */
-export const FEATURES: readonly Feature[] = [signingIn, cases, device, units, models, settings];
+export const FEATURES: readonly Feature[] = [signingIn, cases, device, photos, units, models, settings, tokens];
