@@ -3,9 +3,9 @@ import { NextResponse, type NextRequest } from 'next/server';
 /**
  * The content security policy of one response. Scripts and style sheets need this response's nonce;
  * React's `style={}` needs style attributes. The development server evaluates code, opens a socket and
- * injects styles without a nonce.
+ * injects styles without a nonce. Photos go straight to the storage.
  */
-export function contentSecurityPolicy(nonce: string, development: boolean): string {
+export function contentSecurityPolicy(nonce: string, development: boolean, storage = process.env.S3_ENDPOINT): string {
   const directives: Record<string, string> = {
     'default-src': "'self'",
     'script-src': `'self' 'nonce-${nonce}' 'strict-dynamic'${development ? " 'unsafe-eval'" : ''}`,
@@ -13,7 +13,7 @@ export function contentSecurityPolicy(nonce: string, development: boolean): stri
     'style-src-attr': "'unsafe-inline'",
     'img-src': "'self' data: blob:",
     'font-src': "'self'",
-    'connect-src': `'self'${development ? ' ws:' : ''}`,
+    'connect-src': `'self'${storage ? ` ${new URL(storage).origin}` : ''}${development ? ' ws:' : ''}`,
     'worker-src': "'self'",
     'object-src': "'none'",
     'base-uri': "'none'",

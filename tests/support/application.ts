@@ -1,19 +1,20 @@
+import { openTestStorage } from './storage';
 import { Browser } from './next-request';
 import { openTestDatabases, type TestDatabases } from './context';
 
-/** Points the application at this file's own database, as its environment would. Before anything of it runs. */
+/** Points the application at this file's own database and storage, as its environment would. Before anything of it runs. */
 export async function openApplication({ url = 'http://carryover.test' } = {}): Promise<TestDatabases> {
-  const databases = await openTestDatabases();
+  const [databases, stand] = await Promise.all([openTestDatabases(), openTestStorage()]);
   Object.assign(process.env, {
     DATABASE_URL: databases.appUrl,
     NEXTAUTH_URL: url,
     NEXTAUTH_SECRET: 'a secret for tests alone, of no use anywhere',
     SMTP_URL: 'smtp://127.0.0.1:9',
     MAIL_FROM: 'Carryover <carryover@carryover.test>',
-    S3_ENDPOINT: 'http://127.0.0.1:9',
-    S3_BUCKET: 'carryover',
-    S3_ACCESS_KEY: 'tests',
-    S3_SECRET_KEY: 'tests',
+    S3_ENDPOINT: stand.settings.endpoint,
+    S3_BUCKET: stand.settings.bucket,
+    S3_ACCESS_KEY: stand.settings.accessKey,
+    S3_SECRET_KEY: stand.settings.secretKey,
     LOG_LEVEL: 'silent',
   });
   return {
@@ -21,7 +22,7 @@ export async function openApplication({ url = 'http://carryover.test' } = {}): P
     async close() {
       await globalThis.carryoverChanges?.close();
       await globalThis.carryoverConnection?.close();
-      await databases.close();
+      await Promise.all([databases.close(), stand.close()]);
     },
   };
 }

@@ -20,6 +20,10 @@ describe('content security policy', () => {
     expect(directive(policy, 'style-src')).toBe("'self' 'unsafe-inline'");
     expect(directive(policy, 'connect-src')).toContain('ws:');
   });
+
+  test('lets the browser post photos to the storage, and to nobody else', () => {
+    expect(directive(contentSecurityPolicy('N', false, 'https://s3.example.org/under'), 'connect-src')).toBe("'self' https://s3.example.org");
+  });
 });
 
 describe('proxy', () => {
