@@ -12,6 +12,7 @@ import { atHand, ofSuggestion, type Picked } from './at-hand';
 import { Causes } from './Causes';
 import { CheckAtHand } from './CheckAtHand';
 import { PanelAtHand } from './PanelAtHand';
+import { ReleaseHold } from './ReleaseHold';
 import { StationChecks } from './StationChecks';
 import { Stations } from './Stations';
 import { SyncStrip } from './SyncStrip';
@@ -37,6 +38,7 @@ export function CaseDesk({ view }: { view: CaseView }) {
 
   return (
     <>
+    <ReleaseHold checks={state.releaseHolds.map((id) => rulebook.checks[id]?.name ?? id)} others={view.otherHolds} />
     <div className="mb-6 empty:hidden"><SyncStrip sync={handle.sync} rulebook={rulebook} /></div>
     <div className="grid gap-8 lg:grid-cols-[13rem_minmax(0,1fr)_minmax(0,26rem)] lg:grid-rows-[auto_1fr]">
       <div className="min-w-0 lg:col-start-2 lg:row-start-1">
@@ -114,10 +116,11 @@ function Enough({ state, rulebook, onPick }: { state: CaseState; rulebook: Ruleb
 }
 
 /** What a screen reader hears when the ranking has moved. */
-function spoken({ causes, because }: CaseState, rulebook: RulebookView): string {
+function spoken({ causes, because, releaseHolds }: CaseState, rulebook: RulebookView): string {
   const [leader] = causes;
   if (!leader) return '';
   const name = rulebook.causes[leader.causeId]?.name ?? leader.causeId;
   const change = changeText(leader.change);
-  return `${because ? `Saved: ${because}. ` : ''}${name} leads with ${percent(leader.p)}${change ? `, ${change}` : ''}.`;
+  const held = releaseHolds.length > 0 ? 'Do not release this unit. ' : '';
+  return `${held}${because ? `Saved: ${because}. ` : ''}${name} leads with ${percent(leader.p)}${change ? `, ${change}` : ''}.`;
 }

@@ -3,6 +3,7 @@ import type { SetUp } from '@/lib/diagnose/types';
 import type { CaseState } from '@/lib/schemas/case-view';
 import type { UnitPreferences } from '@/lib/units';
 import { findingsForRanking } from './findings-for-ranking';
+import { releaseHolds } from './release-holds';
 import { causeViews } from './view/causes';
 import type { FindingRow, KeptRun, NoteRow, ShownRun } from './rows';
 import { findingViews } from './view/findings';
@@ -44,6 +45,7 @@ export function buildState({ compiled, head, rows, notes, run, previous, acknowl
     findings: shown,
     ...whatNext({ compiled, findings, recordFacts, vehicleState: head.vehicleState, labourRatePerHour: head.labourRatePerHour }),
     acknowledged,
+    releaseHolds: releaseHolds(compiled, rows),
   };
 }
 

@@ -23,6 +23,9 @@ export function checkProblems(book: ShapedRulebook): Problem[] {
     if (Math.abs(sum - 1) > SUM_WITHIN) {
       add(['states'], `the background rates of "${check.id}" sum to ${Number(sum.toFixed(6))}, not to 1`, 'change them so that they sum to 1');
     }
+    if (check.states.every(({ holdsRelease }) => holdsRelease)) {
+      add(['states'], `every answer of "${check.id}" holds the release, so that nothing could ever pass it`, 'leave "holdsRelease" out of the answers that pass');
+    }
     if (check.kind === 'measured') measuredProblems(check, add);
     else choiceProblems(check, add);
     recordProblems(check, add);

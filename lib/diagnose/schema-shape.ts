@@ -86,6 +86,7 @@ const stateSchema = z.strictObject({
   background: shareSchema,
   low: z.number().optional(),
   high: z.number().optional(),
+  holdsRelease: z.literal(true).optional(),
 });
 
 const QUANTITIES = [

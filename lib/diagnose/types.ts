@@ -102,6 +102,8 @@ export interface CheckState {
   /** Measured checks only: half-open band [low, high) in SI; the first band has no low, the last no high. */
   low?: number;
   high?: number;
+  /** The unit is not to be released while this answer stands: true, or left out. */
+  holdsRelease?: true;
 }
 
 export interface Check {

@@ -164,6 +164,16 @@ export interface CaseState {
   next: NextView;
   repairs: RepairView[];
   acknowledged: { cautionId: string; dangers: string[] }[];
+  /** Checks whose answer in this case forbids the unit's release. */
+  releaseHolds: string[];
+}
+
+/** What another case of the same unit found that forbids its release. */
+export interface OtherHoldView {
+  caseId: string;
+  number: number;
+  /** Names of the checks that hold. */
+  checks: string[];
 }
 
 /**
@@ -187,6 +197,8 @@ export interface CaseView {
   rulebook: RulebookView;
   state: CaseState;
   reasons: CaseReasons;
+  /** Other cases of the unit that hold its release, now. */
+  otherHolds: OtherHoldView[];
   assignedTo: string | null;
   calls: CallView[];
   events: CaseEventView[];

@@ -7,6 +7,7 @@ import { complaintFindings } from '@/lib/services/case/complaints';
 import { currentFindings, slotOf } from '@/lib/case/current-findings';
 import { findingsForRanking } from '@/lib/case/findings-for-ranking';
 import { readAnswer } from '@/lib/case/read-answer';
+import { releaseHolds } from '@/lib/case/release-holds';
 import type { z } from 'zod';
 import { audited, type AuditEntry } from './audit-row';
 import type { WorkClock } from './calendar';
@@ -166,6 +167,7 @@ export class CaseDesk {
       engineS,
       asTyped,
       vehicleState: { ...this.vehicleState, access: [...this.vehicleState.access] },
+      releaseHolds: releaseHolds(this.world.compiled, this.findings),
       assignedTo: this.assignedTo,
       openedBy: by.id,
       openedAt: this.openedAt,

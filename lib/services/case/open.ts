@@ -16,6 +16,7 @@ import { noteReading } from '../unit/note-reading';
 import { unitRecord } from '../unit/unit-record';
 import { complaintFindings, complaintIds } from './complaints';
 import { findingsForRanking } from '@/lib/case/findings-for-ranking';
+import { releaseHolds } from '@/lib/case/release-holds';
 import { makeRun } from './run-of-record';
 import { siteDay } from '@/lib/case/site-day';
 
@@ -59,28 +60,6 @@ export const openCase = defineWrite({
     });
     const record = await unitRecord(tx, { organisationId, unitId, on: onDay });
 
-    const number = await takeCaseNumber(tx, organisationId);
-    const inserted = await insertCase(tx, {
-      organisationId,
-      id: input.id,
-      number,
-      unitId,
-      siteId: unit.siteId,
-      fitId: record.fitId,
-      editionId: edition.id,
-      complaints: input.complaints,
-      complaintWords: input.complaintWords || null,
-      odometerM: reading?.odometerM ?? null,
-      engineS: reading?.engineS ?? null,
-      asTyped: reading?.asTyped ?? {},
-      vehicleState: { ...AS_PARKED, access: [] },
-      assignedTo: ctx.person.id,
-      openedBy: ctx.person.id,
-      openedAt: at,
-    });
-    if (!inserted) throw conflict('This case is being opened by another request. Look for it in the list.');
-    await insertCaseEvent(tx, { organisationId, id: newId(at.getTime()), caseId: input.id, kind: 'opened', personId: ctx.person.id, at });
-
     const asFinding = (finding: Omit<Finding, 'id'>, source: 'asked' | 'record') => ({
       ...finding,
       id: newId(at.getTime()),
@@ -99,6 +78,30 @@ export const openCase = defineWrite({
       ...findingsFromRecord(compiled, record.facts).map((finding) => asFinding(finding, 'record')),
       ...complaintFindings(input.complaints).map((finding) => asFinding(finding, 'asked')),
     ];
+
+    const number = await takeCaseNumber(tx, organisationId);
+    const inserted = await insertCase(tx, {
+      organisationId,
+      id: input.id,
+      number,
+      unitId,
+      siteId: unit.siteId,
+      fitId: record.fitId,
+      editionId: edition.id,
+      complaints: input.complaints,
+      complaintWords: input.complaintWords || null,
+      odometerM: reading?.odometerM ?? null,
+      engineS: reading?.engineS ?? null,
+      asTyped: reading?.asTyped ?? {},
+      vehicleState: { ...AS_PARKED, access: [] },
+      releaseHolds: releaseHolds(compiled, rows),
+      assignedTo: ctx.person.id,
+      openedBy: ctx.person.id,
+      openedAt: at,
+    });
+    if (!inserted) throw conflict('This case is being opened by another request. Look for it in the list.');
+    await insertCaseEvent(tx, { organisationId, id: newId(at.getTime()), caseId: input.id, kind: 'opened', personId: ctx.person.id, at });
+
     await insertFindings(tx, rows);
     await makeRun(tx, { organisationId, caseId: input.id, editionId: edition.id, compiled, findings: findingsForRanking([...rows]), recordFacts: record.facts, becauseOf: null, at });
     audit({

@@ -6,6 +6,7 @@ import { defineRead } from '../define';
 import { buildReasons } from '@/lib/case/build-reasons';
 import { buildState } from '@/lib/case/build-state';
 import { gatherState } from './gather-state';
+import { holdsOfUnit } from './holds-of-unit';
 import { headView } from '@/lib/case/view/head';
 import { momentsOf } from '@/lib/case/view/moments';
 import { rulebookView } from '@/lib/case/view/rulebook';
@@ -52,6 +53,7 @@ export const readCase = defineRead({
       rulebook,
       state: at ? { ...state, status: statusAt(events) } : state,
       reasons: buildReasons(parts),
+      otherHolds: (await holdsOfUnit(tx, { ...of, unitId: caseHead.unitId })).filter((other) => other.caseId !== of.caseId),
       assignedTo: caseHead.assignedTo,
       calls: callViews(calls, events),
       events: events.map(({ at: when, ...event }) => ({ ...event, at: when.toISOString() })),

@@ -16,6 +16,7 @@ import { buildState } from '@/lib/case/build-state';
 import { correctedTime } from '@/lib/case/corrected-time';
 import { currentFindings, isNewer, slotOf } from '@/lib/case/current-findings';
 import { findingsForRanking } from '@/lib/case/findings-for-ranking';
+import { releaseHolds } from '@/lib/case/release-holds';
 import { after } from '@/lib/case/provisional';
 import { gatherState } from './gather-state';
 import { readAnswer } from '@/lib/case/read-answer';
@@ -76,9 +77,9 @@ export const recordFinding = defineWrite({
     });
     if (!written) throw takenId();
     const vehicleState = says ? after(head.vehicleState, check.check.setUp) : head.vehicleState;
-    await updateCase(tx, of, { vehicleState });
-
     const rowsNow = [...rows, { ...finding, person: ctx.person.name }];
+    await updateCase(tx, of, { vehicleState, releaseHolds: releaseHolds(compiled, rowsNow) });
+
     const previous = await selectLatestRun(tx, of);
     const run = await makeRun(tx, {
       ...of,

@@ -8,10 +8,10 @@ export function check(given: Omit<Check, Optional> & Partial<Pick<Check, Optiona
 }
 
 /** The answers of a yes/no check; `background` is the share of yes. */
-export function yesNo(background: number): CheckState[] {
+export function yesNo(background: number, { yesHoldsRelease = false } = {}): CheckState[] {
   return [
     { id: 'no', label: 'No', background: 1 - background },
-    { id: 'yes', label: 'Yes', background },
+    { id: 'yes', label: 'Yes', background, ...(yesHoldsRelease && { holdsRelease: true as const }) },
   ];
 }
 

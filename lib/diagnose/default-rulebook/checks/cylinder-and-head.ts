@@ -20,7 +20,7 @@ const atWork: Check[] = [
     states: [
       { id: 'good', label: 'Yes, as it should', background: 0.666 },
       { id: 'slow', label: 'Slowly', background: 0.283 },
-      { id: 'none', label: 'No, or it stops short of cut-out', background: 0.051 },
+      { id: 'none', label: 'No, or it stops short of cut-out', background: 0.051, holdsRelease: true },
     ],
     cannotTell: 0.02,
     ...judgement,
@@ -49,7 +49,7 @@ const atWork: Check[] = [
     states: [
       { id: 'quick', label: '25 s or less', background: 0.568, high: seconds(26) },
       { id: 'slow', label: '26 to 45 s', background: 0.267, low: seconds(26), high: seconds(46) },
-      { id: 'very-slow', label: 'Over 45 s, or it never gets there', background: 0.165, low: seconds(46) },
+      { id: 'very-slow', label: 'Over 45 s, or it never gets there', background: 0.165, low: seconds(46), holdsRelease: true },
     ],
     cannotTell: 0.05,
     basis: 'regulation',

@@ -46,7 +46,7 @@ export const checks: Check[] = [
     setUp: { engine: 'idle', air: 'full' },
     cautions: ['vehicle-rolls', 'pressure-falls-suspension-brakes'],
     states: [
-      { id: 'under-85', label: 'Under 85 psi', background: 0.035, high: psi(85) },
+      { id: 'under-85', label: 'Under 85 psi', background: 0.035, high: psi(85), holdsRelease: true },
       { id: '85-to-100', label: '85 to 100 psi', background: 0.107, low: psi(85), high: psi(100) },
       { id: 'in-range', label: '100 psi or more', background: 0.858, low: psi(100) },
     ],

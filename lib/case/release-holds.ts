@@ -1,0 +1,51 @@
+import type { CompiledCheck, CompiledRulebook } from '@/lib/diagnose/compiled';
+import type { StateShare } from '@/lib/diagnose/types';
+import { isNewer, slotOf, type Dated } from './current-findings';
+
+interface Answer extends Dated {
+  kind: string;
+  shares: readonly StateShare[];
+}
+
+/** A measured value on the edge of a limit counts as over it. */
+const HOLDS_FROM = 0.5;
+
+/**
+ * Checks whose answer forbids the unit's release, in the order of their ids. An answer holds until a later answer of the
+ * same check passes, at whatever stage: "can't tell" and a skipped check pass nothing, and an answer that was taken back
+ * brings back the one before it.
+ *
+ * @param rows every finding of the case, in any order
+ * @returns ids of checks; empty: nothing known forbids it
+ */
+export function releaseHolds({ checks }: Pick<CompiledRulebook, 'checks'>, rows: readonly Answer[]): string[] {
+  const answers = new Map<string, Answer[]>();
+  for (const row of rows) {
+    const check = checks.get(row.checkId);
+    if (check && canHold(check)) answers.set(row.checkId, [...(answers.get(row.checkId) ?? []), row]);
+  }
+  return [...checks.values()]
+    .filter((check) => {
+      const last = standing(answers.get(check.id) ?? []).findLast(({ shares }) => shares.length > 0);
+      return last !== undefined && holding(check, last.shares) >= HOLDS_FROM;
+    })
+    .map(({ id }) => id);
+}
+
+const canHold = ({ check }: CompiledCheck) => check.states.some(({ holdsRelease }) => holdsRelease);
+
+/** The answers in the order they were given, less those that were taken back. */
+function standing(rows: readonly Answer[]): Answer[] {
+  const kept: Answer[] = [];
+  for (const row of [...rows].sort((a, b) => (isNewer(a, b) ? 1 : -1))) {
+    const takenBack = row.kind === 'undo' ? kept.findLastIndex((other) => slotOf(other) === slotOf(row)) : -1;
+    if (takenBack >= 0) kept.splice(takenBack, 1);
+    else kept.push(row);
+  }
+  return kept;
+}
+
+function holding({ check }: CompiledCheck, shares: readonly StateShare[]): number {
+  const holds = new Set(check.states.filter(({ holdsRelease }) => holdsRelease).map(({ id }) => id));
+  return shares.reduce((sum, { state, share }) => sum + (holds.has(state) ? share : 0), 0);
+}
