@@ -69,7 +69,7 @@ describe('an answer between tap and save', () => {
     const title = panel?.prompt ?? '';
     if ((await page.locator('#check-at-hand').textContent().catch(() => '')) === title) return;
     await page.getByRole('button', { name: /^Vehicle and history/ }).first().click();
-    await page.getByRole('button', { name: new RegExp(`^${panel?.title}`) }).click();
+    await page.locator('section[aria-labelledby=station-checks]').getByRole('button', { name: new RegExp(`^${panel?.title}`) }).click();
     await page.getByRole('heading', { name: title }).waitFor();
   }
 
