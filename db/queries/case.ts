@@ -1,7 +1,6 @@
-import { and, asc, count, desc, eq, ilike, inArray, or, sql, type SQL } from 'drizzle-orm';
+import { and, asc, eq, sql } from 'drizzle-orm';
 import type { Executor } from '@/db/connect';
 import { call, caseEvent, cases, compressorModel, edition, fit, organisation, person, site, unit } from '@/db/schema';
-import { containing } from './like';
 
 interface Of {
   organisationId: string;
@@ -136,59 +135,4 @@ export async function selectCalls(db: Executor, { organisationId, caseId }: Of) 
     .innerJoin(person, eq(person.id, call.personId))
     .where(and(eq(call.organisationId, organisationId), eq(call.caseId, caseId)))
     .orderBy(asc(call.at), asc(call.id));
-}
-
-export interface CaseFilter {
-  organisationId: string;
-  /** Part of a fleet number, or a case number. */
-  text?: string;
-  statuses?: string[];
-  siteId?: string;
-  assignedTo?: string;
-  sort: 'opened' | 'number' | 'unit';
-  direction: 'asc' | 'desc';
-  limit: number;
-  offset: number;
-}
-
-const SORTED_BY = { opened: cases.openedAt, number: cases.number, unit: unit.fleetNumber } as const;
-
-export async function selectCases(db: Executor, filter: CaseFilter) {
-  const where = and(
-    eq(cases.organisationId, filter.organisationId),
-    ...[
-      filter.statuses && inArray(cases.status, filter.statuses),
-      filter.siteId && eq(cases.siteId, filter.siteId),
-      filter.assignedTo && eq(cases.assignedTo, filter.assignedTo),
-      filter.text && or(ilike(unit.fleetNumber, containing(filter.text)), sql`${cases.number}::text = ${filter.text.replace(/^#/, '')}`),
-    ].filter((condition): condition is SQL => Boolean(condition)),
-  );
-  const ordered = filter.direction === 'asc' ? asc : desc;
-  const rows = await db
-    .select({
-      id: cases.id,
-      number: cases.number,
-      status: cases.status,
-      complaints: cases.complaints,
-      openedAt: cases.openedAt,
-      fleetNumber: unit.fleetNumber,
-      unitId: cases.unitId,
-      siteName: site.name,
-      assignedTo: person.name,
-      editionId: cases.editionId,
-    })
-    .from(cases)
-    .innerJoin(unit, and(eq(unit.organisationId, cases.organisationId), eq(unit.id, cases.unitId)))
-    .innerJoin(site, and(eq(site.organisationId, cases.organisationId), eq(site.id, cases.siteId)))
-    .leftJoin(person, eq(person.id, cases.assignedTo))
-    .where(where)
-    .orderBy(ordered(SORTED_BY[filter.sort]), desc(cases.id))
-    .limit(filter.limit)
-    .offset(filter.offset);
-  const [total] = await db
-    .select({ count: count() })
-    .from(cases)
-    .innerJoin(unit, and(eq(unit.organisationId, cases.organisationId), eq(unit.id, cases.unitId)))
-    .where(where);
-  return { rows, total: total?.count ?? 0 };
 }

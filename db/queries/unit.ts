@@ -2,6 +2,7 @@ import { and, asc, count, desc, eq, ilike, isNotNull, isNull, sql, type SQL } fr
 import type { Executor } from '@/db/connect';
 import { site, unit } from '@/db/schema';
 import { containing } from './like';
+import { naturally } from './natural';
 
 interface Of {
   organisationId: string;
@@ -54,17 +55,6 @@ export async function selectUnitByNumber(db: Executor, { organisationId, fleetNu
   return row;
 }
 
-/** Units whose number contains the text; the exact number first, then those that begin with it. */
-export async function searchUnits(db: Executor, { organisationId, text, limit }: { organisationId: string; text: string; limit: number }) {
-  return db
-    .select({ id: unit.id, fleetNumber: unit.fleetNumber, vehicleKind: unit.vehicleKind, siteId: unit.siteId, siteName: site.name })
-    .from(unit)
-    .innerJoin(site, atItsSite)
-    .where(and(eq(unit.organisationId, organisationId), isNull(unit.hiddenAt), ilike(unit.fleetNumber, containing(text))))
-    .orderBy(sql`case when lower(${unit.fleetNumber}) = lower(${text}) then 0 when ${unit.fleetNumber} ilike ${containing(text).slice(1)} then 1 else 2 end`, asc(unit.fleetNumber))
-    .limit(limit);
-}
-
 /** The id of the new row; undefined when its id or its number is taken. */
 export async function insertUnit(db: Executor, row: typeof unit.$inferInsert) {
   const [inserted] = await db.insert(unit).values(row).onConflictDoNothing().returning({ id: unit.id });
@@ -99,7 +89,7 @@ export interface UnitFilter {
   offset: number;
 }
 
-const SORTED_BY = { number: unit.fleetNumber, site: site.name, kind: unit.vehicleKind, vocation: unit.vocation, built: unit.builtOn } as const;
+const SORTED_BY = { number: naturally(unit.fleetNumber), site: site.name, kind: unit.vehicleKind, vocation: unit.vocation, built: unit.builtOn } as const;
 
 export async function selectUnits(db: Executor, filter: UnitFilter) {
   const where = and(
@@ -125,7 +115,7 @@ export async function selectUnits(db: Executor, filter: UnitFilter) {
     .from(unit)
     .innerJoin(site, atItsSite)
     .where(where)
-    .orderBy(inDirection(SORTED_BY[filter.sort]), asc(unit.fleetNumber), asc(unit.id))
+    .orderBy(inDirection(SORTED_BY[filter.sort]), asc(naturally(unit.fleetNumber)), asc(unit.id))
     .limit(filter.limit)
     .offset(filter.offset);
   const [total] = await db.select({ count: count() }).from(unit).where(where);

@@ -10,6 +10,9 @@ const rulebookId = z.string().regex(/^[a-z0-9][a-z0-9-]{0,79}$/, 'This is not an
 
 export const caseId = rowId;
 
+/** The state of the case that a write was decided on, for a script that wants it refused on any other. */
+const caseVersion = z.string().max(60).optional();
+
 export const openCaseInput = z.strictObject({
   id: rowId,
   /** A unit that exists, or what is needed to make one on the spot. */
@@ -94,15 +97,17 @@ export const callCauseInput = z.strictObject({
   unlistedCause: words(500).optional(),
   /** The ranking that stood on the screen. */
   runId: rowId.optional(),
+  version: caseVersion,
 });
 
 export const reopenCaseInput = z.strictObject({
   id: rowId,
   caseId,
+  version: caseVersion,
   reason: words(2000).min(1, 'Say why you reopen it.'),
 });
 
-export const assignCaseInput = z.strictObject({ caseId, personId: rowId.nullable() });
+export const assignCaseInput = z.strictObject({ caseId, personId: rowId.nullable(), version: caseVersion });
 
 export const readCaseInput = z.strictObject({ caseId, at: instant.optional() });
 
@@ -110,10 +115,14 @@ export const CASE_STATUSES = ['open', 'called', 'closed'] as const;
 
 export const listCasesInput = z.object({
   q: filterText,
-  status: z.enum([...CASE_STATUSES, 'all']).catch('open').default('open'),
+  /** "standing": open or called, so that the unit still stands somewhere. */
+  status: z.enum(['standing', ...CASE_STATUSES, 'all']).catch('standing').default('standing'),
   site: filterId,
-  mine: filterOf(['yes']),
-  ...ordered(['opened', 'number', 'unit']),
+  /** Whose: the reader's own, nobody's, or somebody's by id. */
+  whose: z.union([z.literal(['me', 'nobody']), z.uuid()]).optional().catch(undefined),
+  complaint: rulebookId.optional().catch(undefined),
+  held: filterOf(['yes']),
+  ...ordered(['opened', 'number', 'unit', 'site', 'active']),
   direction: z.enum(['asc', 'desc']).catch('desc').default('desc'),
 });
 export type ListCasesInput = z.input<typeof listCasesInput>;

@@ -1,8 +1,12 @@
 'use server';
 
+import { revalidatePath } from 'next/cache';
 import { redirect } from 'next/navigation';
 import { action } from '@/lib/auth/action';
 import { openCase } from '@/lib/services/case/open';
+import { removeView } from '@/lib/services/saved-view/remove';
+import { renameView } from '@/lib/services/saved-view/rename';
+import { saveView } from '@/lib/services/saved-view/save';
 
 type Fields = Record<string, string | string[]>;
 
@@ -37,3 +41,9 @@ export const openCaseFromForm = action(openCase, {
   }),
   after: ({ id }) => redirect(`/cases/${id}`),
 });
+
+const listAnew = () => revalidatePath('/cases');
+
+export const saveViewFromForm = action(saveView, { after: listAnew });
+export const renameViewFromForm = action(renameView, { after: listAnew });
+export const removeViewFromForm = action(removeView, { after: listAnew });

@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
 import Link from 'next/link';
+import { HoldMark } from '@/components/cases/HoldMark';
 import { measureText } from '@/components/units/MeasureField';
 import { ButtonLink } from '@/components/ui/Button';
 import { DataTable, type Column } from '@/components/ui/DataTable';
@@ -24,7 +25,7 @@ export const metadata: Metadata = { title: 'Units' };
 type Row = UnitList['units'][number];
 
 const columnsFor = (units: UnitPreferences): Column<Row>[] => [
-  { key: 'number', header: 'Number', sortable: true, rowHeader: true, cell: (row) => <Link className="inline-flex min-h-touch items-center underline underline-offset-4" href={`/units/${row.id}`}>{row.fleetNumber}</Link> },
+  { key: 'number', header: 'Number', sortable: true, rowHeader: true, cell: (row) => <><Link className="inline-flex min-h-touch items-center whitespace-nowrap underline underline-offset-4" href={`/units/${row.id}`}>{row.fleetNumber}</Link><HoldMark checks={row.holds} /></> },
   { key: 'kind', header: 'Kind', sortable: true, cell: (row) => termLabel('vehicleKind', row.vehicleKind) },
   { key: 'vocation', header: 'Work', sortable: true, cell: (row) => termLabel('vocation', row.vocation) },
   { key: 'site', header: 'Site', sortable: true, cell: (row) => row.siteName },

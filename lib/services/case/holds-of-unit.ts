@@ -13,3 +13,14 @@ export async function holdsOfUnit(tx: Transaction, { organisationId, unitId }: {
     }),
   );
 }
+
+/** What forbids the release of each unit, in words, each once. */
+export async function holdsByUnit(tx: Transaction, of: { organisationId: string; unitIds: string[] }): Promise<Map<string, string[]>> {
+  const held = new Map<string, string[]>();
+  for (const { unitId, editionId, releaseHolds } of await selectReleaseHolds(tx, of)) {
+    const { checks } = await compiledEdition(tx, { organisationId: of.organisationId, editionId });
+    const names = releaseHolds.map((id) => checks.get(id)?.check.name ?? id);
+    held.set(unitId, [...new Set([...(held.get(unitId) ?? []), ...names])]);
+  }
+  return held;
+}

@@ -4,6 +4,7 @@ import { selectLatestOdometers } from '@/db/queries/unit-reading';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { ROWS_A_PAGE } from '@/lib/schemas/list';
 import { listUnitsInput } from '@/lib/schemas/unit';
+import { holdsByUnit } from '../case/holds-of-unit';
 import { defineRead } from '../define';
 
 /** Units by filter, each with the compressor that is on it and its last odometer. */
@@ -29,9 +30,12 @@ export const listUnits = defineRead({
     const unitIds = rows.map((row) => row.id);
     const fits = new Map((await selectCurrentFits(tx, { organisationId, unitIds })).map((fit) => [fit.unitId, fit]));
     const odometers = new Map((await selectLatestOdometers(tx, { organisationId, unitIds })).map((reading) => [reading.unitId, reading]));
+    const holds = await holdsByUnit(tx, { organisationId, unitIds });
     return {
       units: rows.map((row) => ({
         ...row,
+        /** Names of the checks that forbid its release. */
+        holds: holds.get(row.id) ?? [],
         modelName: fits.get(row.id)?.modelName ?? null,
         installedOn: fits.get(row.id)?.installedOn ?? null,
         odometerM: odometers.get(row.id)?.odometerM ?? null,

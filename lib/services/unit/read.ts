@@ -8,6 +8,7 @@ import { may, PERMITTED } from '@/lib/auth/permissions';
 import { notFound } from '@/lib/errors';
 import { unitIdInput } from '@/lib/schemas/unit';
 import { siteDay } from '@/lib/case/site-day';
+import { holdsOfUnit } from '../case/holds-of-unit';
 import type { Ctx } from '../context';
 import { defineRead } from '../define';
 import { versionOf } from '../editing';
@@ -35,6 +36,7 @@ export const readUnit = defineRead({
       today,
       fits: fits.map((fit) => ({ ...fit, ranM: ranSince(fit, readings, today) })),
       currentFit: currentFitOn(fits, today) ?? null,
+      holds: await holdsOfUnit(tx, of),
       readings,
       cases: may(ctx.roles, 'case.see') ? await casesOf(tx, ctx, { unitId: of.unitId, timeZone: unit.timeZone }) : [],
       hidden: unit.hiddenAt ? await selectLastRemoval(tx, { ...of, entity: 'unit', entityId: of.unitId }) : undefined,

@@ -152,7 +152,7 @@ describe('a case', () => {
     expect(await numbers({ q: String(opened.number) })).toContain(opened.number);
     expect(await numbers({ q: '%' })).toEqual([]);
     expect(await numbers({ status: 'called' })).toEqual([]);
-    expect(await numbers({ site: mine.siteId, mine: 'yes', sort: 'number', direction: 'asc' })).toEqual([opened.number, opened.number + 1]);
+    expect(await numbers({ site: mine.siteId, whose: 'me', sort: 'number', direction: 'asc' })).toEqual([opened.number, opened.number + 1]);
     expect(await numbers({ q: 'z-7' }, workshop.ctx)).toEqual([]);
   });
 });

@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
 import Link from 'next/link';
+import { ReleaseHold } from '@/components/case/ReleaseHold';
 import { practiceFacts, spanFacts } from '@/components/fits/fit-facts';
 import { ButtonLink } from '@/components/ui/Button';
 import { DefinitionList } from '@/components/ui/DefinitionList';
@@ -51,6 +52,7 @@ export default async function UnitPage({ params }: { params: Promise<{ id: strin
           {hidden.reason}. It stands in no list and no search; its history stays.
         </Notice>
       )}
+      <ReleaseHold checks={[]} others={record.holds} linksToCases={may(ctx.roles, 'case.see')} />
       <div className="grid gap-x-14 gap-y-12 lg:grid-cols-[3fr_2fr]">
         <div className="grid min-w-0 content-start gap-12">
           <section aria-labelledby="history" className="min-w-0">
