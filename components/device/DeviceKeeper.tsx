@@ -2,6 +2,7 @@
 
 import { useEffect } from 'react';
 import { onConnection, readConnection } from '@/lib/offline/connection';
+import { startPhotoSender } from '@/lib/offline/photos-sender';
 import { startSender } from '@/lib/offline/sender';
 import { takeDevice } from '@/lib/offline/wipe';
 
@@ -23,7 +24,7 @@ export function DeviceKeeper({ personId, organisationId, keepsCases }: Props) {
   useEffect(() => {
     if (!('indexedDB' in window) || !navigator.locks) return;
     let stopped = false;
-    let stopSender: () => void = () => undefined;
+    let stopSenders: () => void = () => undefined;
     let timer: ReturnType<typeof setTimeout> | undefined;
 
     async function fill(): Promise<void> {
@@ -43,7 +44,8 @@ export function DeviceKeeper({ personId, organisationId, keepsCases }: Props) {
     void takeDevice({ personId, organisationId })
       .then(() => {
         if (stopped) return;
-        stopSender = startSender({ personId, organisationId }).stop;
+        const senders = [startSender({ personId, organisationId }), startPhotoSender({ personId, organisationId })];
+        stopSenders = () => senders.forEach((sender) => sender.stop());
         fillSoon();
       })
       .catch(() => undefined);
@@ -52,7 +54,7 @@ export function DeviceKeeper({ personId, organisationId, keepsCases }: Props) {
       stopped = true;
       clearTimeout(timer);
       unsubscribe();
-      stopSender();
+      stopSenders();
     };
   }, [personId, organisationId, keepsCases]);
   return null;

@@ -8,6 +8,7 @@ import type { Waiting } from '@/lib/schemas/waiting';
 export interface DevicePhoto {
   id: string;
   personId: string;
+  organisationId: string;
   caseId: string;
   checkId: string | null;
   /** Already turned upright, made smaller and rid of what the camera wrote into it. */

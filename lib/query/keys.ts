@@ -4,5 +4,7 @@ export const queryKeys = {
   caseReasons: (caseId: string, version: number) => ['case', caseId, 'reasons', version] as const,
   caseWaiting: (caseId: string) => ['case', caseId, 'waiting'] as const,
   caseProvisional: (caseId: string) => ['case', caseId, 'provisional'] as const,
+  casePhotos: (caseId: string) => ['case', caseId, 'photos'] as const,
+  casePhotosHere: (caseId: string) => ['case', caseId, 'photos-here'] as const,
   unitSearch: (text: string) => ['units', 'search', text] as const,
 };

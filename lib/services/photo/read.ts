@@ -3,13 +3,11 @@ import { PERMITTED } from '@/lib/auth/permissions';
 import { notFound } from '@/lib/errors';
 import { photoInput } from '@/lib/schemas/photo';
 import { defineRead } from '../define';
-import { THUMBNAIL_TYPE } from './picture';
+import { THUMBNAIL_TYPE, thumbnailOf } from './picture';
 
 export interface PhotoFile {
   mediaType: string;
-  /** It will be the same for good. */
-  final: boolean;
-  open: () => Promise<ReadableStream<Uint8Array> | undefined>;
+  open: () => Promise<ReadableStream<Uint8Array> | Uint8Array | undefined>;
 }
 
 /** The picture of a stored photo, to be passed on as it comes from storage. */
@@ -20,21 +18,23 @@ export const readPicture = defineRead({
   input: photoInput,
   run: async ({ tx, ctx, input }): Promise<PhotoFile> => {
     const { objectKey, mediaType } = await stored(tx, { organisationId: ctx.organisation.id, photoId: input.photoId });
-    return { mediaType, final: true, open: () => ctx.storage.open(objectKey) };
+    return { mediaType, open: () => ctx.storage.open(objectKey) };
   },
 });
 
-/** Its small copy, or the picture itself as long as there is none. */
+/** Its small copy; made on the spot as long as the worker has not, so that a browser may keep what it gets for good. */
 export const readThumbnail = defineRead({
   name: 'read.photo',
   doing: 'see photos',
   roles: PERMITTED['case.see'],
   input: photoInput,
   run: async ({ tx, ctx, input }): Promise<PhotoFile> => {
-    const { objectKey, mediaType, thumbnailKey } = await stored(tx, { organisationId: ctx.organisation.id, photoId: input.photoId });
-    return thumbnailKey
-      ? { mediaType: THUMBNAIL_TYPE, final: true, open: () => ctx.storage.open(thumbnailKey) }
-      : { mediaType, final: false, open: () => ctx.storage.open(objectKey) };
+    const { objectKey, thumbnailKey } = await stored(tx, { organisationId: ctx.organisation.id, photoId: input.photoId });
+    const made = async () => {
+      const picture = await ctx.storage.get(objectKey);
+      return picture && thumbnailOf(picture);
+    };
+    return { mediaType: THUMBNAIL_TYPE, open: thumbnailKey ? () => ctx.storage.open(thumbnailKey) : made };
   },
 });
 
