@@ -1,11 +1,11 @@
 import { ApiProblem, api } from '@/lib/query/problem';
 import type { CaseState } from '@/lib/schemas/case-view';
 import { listen, tell } from './bus';
-import { noteConnection } from './connection';
+import { noteConnection, onConnection, readConnection } from './connection';
 import { markRefused, markSent, unsentOf, type Kept } from './waiting';
 
 const FIRST_PAUSE_MS = 1_000;
-const LONGEST_PAUSE_MS = 15_000;
+const LONGEST_PAUSE_MS = 5_000;
 
 const pathOf = (item: Kept): string => {
   const path = `/api/v1/cases/${item.caseId}`;
@@ -82,6 +82,8 @@ export function startSender({ personId, organisationId }: { personId: string; or
   window.addEventListener('offline', offline);
   document.addEventListener('visibilitychange', shown);
   const unlisten = listen(({ kind }) => kind === 'waiting-changed' && kick());
+  // Somebody else's request may be the first to get through again.
+  const unsubscribe = onConnection(() => readConnection().reachable && online());
   if (!navigator.onLine) offline();
   kick();
 
@@ -91,6 +93,7 @@ export function startSender({ personId, organisationId }: { personId: string; or
       stopped = true;
       clearTimeout(timer);
       unlisten();
+      unsubscribe();
       window.removeEventListener('online', online);
       window.removeEventListener('offline', offline);
       document.removeEventListener('visibilitychange', shown);

@@ -110,21 +110,25 @@ describe('an answer between tap and save', () => {
   const stored = async () => (await tenant.asOwner((tx) => selectFindings(tx, { organisationId: tenant.organisationId, caseId }))).filter(({ askedBecause }) => askedBecause === 'panel');
 
   /** Until nothing waits on the device any more. */
-  const settled = () =>
-    page.waitForFunction(
+  async function settled() {
+    for (const deadline = Date.now() + 60_000; Date.now() < deadline; await sleep(100)) if ((await unsent()) === 0) return;
+    throw new Error(`after a minute ${await unsent()} still wait on the device`);
+  }
+
+  const unsent = () =>
+    page.evaluate(
       () =>
-        new Promise<boolean>((resolve) => {
+        new Promise<number>((resolve, reject) => {
           const request = indexedDB.open('carryover');
+          request.onerror = () => reject(request.error);
           request.onsuccess = () => {
             const all = request.result.transaction('waiting').objectStore('waiting').getAll();
             all.onsuccess = () => {
               request.result.close();
-              resolve((all.result as { sentAt?: number }[]).every(({ sentAt }) => sentAt !== undefined));
+              resolve((all.result as { sentAt?: number }[]).filter(({ sentAt }) => sentAt === undefined).length);
             };
           };
         }),
-      undefined,
-      { timeout: 60_000, polling: 200 },
     );
 
   it(`survives ${MOMENTS} moments at which something is killed: nothing shown is lost, nothing is there twice, the order is kept`, async () => {
