@@ -30,7 +30,7 @@ export function UnitPicker({ unit, sites, errors, values }: Props) {
   const wanted = text.trim();
   const { data, isFetching } = useQuery({
     queryKey: queryKeys.unitSearch(wanted),
-    queryFn: () => api<{ units: FoundUnit[] }>(`/api/v1/units?q=${encodeURIComponent(wanted)}`),
+    queryFn: () => api<{ units: FoundUnit[] }>(`/api/v1/units?limit=10&q=${encodeURIComponent(wanted)}`),
     enabled: wanted.length > 0,
     placeholderData: (held) => held,
   });

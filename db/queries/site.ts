@@ -17,6 +17,12 @@ export async function findSite(db: Executor, { organisationId, siteId }: Key) {
   return row;
 }
 
+/** The same, locked against another change. */
+export async function lockSite(db: Executor, { organisationId, siteId }: Key) {
+  const [row] = await db.select(columns).from(site).where(and(eq(site.organisationId, organisationId), eq(site.id, siteId))).for('update');
+  return row;
+}
+
 export async function insertSite(db: Executor, values: { organisationId: string; id: string; name: string; timeZone: string }): Promise<void> {
   await db.insert(site).values(values);
 }

@@ -8,11 +8,11 @@ const quoted = (version: string) => `"${version}"`;
 /** A state by its content, for what has no version of its own. */
 const digest = (json: string) => createHash('sha256').update(json).digest('base64url').slice(0, 22);
 
-/** @param version what a change would have to name; without one the content is the state */
-export const etagOf = (json: string, version?: string): string => quoted(version ?? digest(json));
-
-/** The same for what has a version, and holds things besides that change without it. */
-export const versionedEtag = (json: string, version: number): string => quoted(`${version}.${digest(json)}`);
+/**
+ * The tag of an answer. One that can be changed has its version before the digest: a change names the whole tag, and is
+ * of that version.
+ */
+export const etagOf = (json: string, version?: string | number): string => quoted(version === undefined ? digest(json) : `${version};${digest(json)}`);
 
 /** Whether the caller has this state already. */
 export function isHeld(request: Request, etag: string): boolean {
@@ -33,8 +33,8 @@ export function versionInIfMatch(request: Request, { needed }: { needed: boolean
     throw new AppError('unconditional', 'Say in If-Match which state you are changing: the ETag that reading it gave, or * for any.');
   }
   if (given === '*') return given;
-  const [, version] = /^"([\x21\x23-\x7e]{1,100})"$/.exec(given) ?? [];
-  // A weak tag, or several, can't be what was given to be changed.
+  const [, version] = /^(?:W\/)?"([^";]{1,60})(?:;[\w-]+)?"$/.exec(given) ?? [];
+  // Proxies that compress make a tag weak on its way; its version is what counts here. Several can’t be meant.
   return version ?? 'none of ours';
 }
 

@@ -3,7 +3,7 @@ import type { z } from 'zod';
 import type { Service } from '@/lib/services/define';
 import { callerOf, refuseMissingScope } from './bearer';
 import { jsonBody } from './body';
-import { etagOf, idempotencyKeyOf, isHeld, versionedEtag, versionInIfMatch } from './conditions';
+import { etagOf, idempotencyKeyOf, isHeld, versionInIfMatch } from './conditions';
 import { problemResponse, refuseForeignOrigin } from './problem';
 import type { Scope } from './scopes';
 
@@ -49,7 +49,7 @@ interface Options<Result, Answer> {
   status?: number;
   /** The version that a change is of is taken from `If-Match` and given to the service as `version`. */
   ifMatch?: 'needed' | 'possible';
-  /** Of what was read: what `If-Match` of a change names. A number goes with what changes without it, too. */
+  /** Of what was read: what `If-Match` of a change names. */
   version?: (result: Result) => string | number;
   /** From the result to what is answered. */
   shape?: (result: Result) => Answer;
@@ -106,8 +106,7 @@ export function route<Schema extends z.ZodType, Result, Answer = Result>(service
       const json = JSON.stringify((shape ? shape(result) : result) ?? {});
       const headers: Record<string, string> = { ...NO_STORE, 'content-type': 'application/json', ...(answered.replayed && { 'idempotency-replayed': 'true' }) };
       if (!isRead(request.method)) return new Response(json, { status: answered.status, headers });
-      const named = version?.(result);
-      const etag = typeof named === 'number' ? versionedEtag(json, named) : etagOf(json, named);
+      const etag = etagOf(json, version?.(result));
       return isHeld(request, etag) ? new Response(null, { status: 304, headers: { ...NO_STORE, etag } }) : new Response(json, { status, headers: { ...headers, etag } });
     } catch (error) {
       return problemResponse(error, service.action);
@@ -121,6 +120,6 @@ const inOneObject =
   (renamed: Readonly<Record<string, string>>) =>
   ({ params, query, body }: Parts) => ({
     ...query,
-    ...(typeof body === 'object' && !Array.isArray(body) ? body : { body }),
+    ...(typeof body === 'object' && body !== null && !Array.isArray(body) ? body : { body }),
     ...Object.fromEntries(Object.entries(params).map(([name, value]) => [renamed[name] ?? name, value])),
   });

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { line, rowId } from './common';
+import { versionText } from './record';
 
 /** Whether the runtime knows it: the list itself differs from one to the next, and a browser may know a newer one. */
 function isTimeZone(name: string): boolean {
@@ -17,7 +18,11 @@ const timeZone = z
   .refine((name) => name.includes('/') && isTimeZone(name), 'This time zone is not known here. Write it as Europe/Lisbon.');
 
 export const addSiteInput = z.object({ name: line('the name of the site', 80), timeZone });
-export const changeSiteInput = addSiteInput.extend({ siteId: rowId });
+export const changeSiteInput = addSiteInput.extend({
+  siteId: rowId,
+  /** Given by a script, which is refused when the site isn't as it was when it was read. */
+  version: versionText.optional(),
+});
 
 const code = (kind: 'region' | 'currency', length: number, message: string) =>
   z

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { checkbox, line, optionalLine, rowId } from './common';
-import { filterId, filterOf, filterText, ordered, searchText } from './list';
+import { filterId, filterOf, filterText, ordered } from './list';
 import { day, measureText, optionalCount, optionalDay, reason, versionText } from './record';
 import { optionalTerm, term } from './terms';
 
@@ -61,9 +61,4 @@ export const listUnitsInput = z.object({
   kind: filterOf(['truck', 'bus']),
   hidden: filterOf(['yes']),
   ...ordered(UNIT_SORTS),
-});
-
-export const searchUnitsInput = z.object({
-  q: searchText.default(''),
-  limit: z.coerce.number().int().min(1).max(50).default(10),
 });

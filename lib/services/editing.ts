@@ -26,6 +26,16 @@ export function refuseStale(
   );
 }
 
+/**
+ * Refuses what was decided on an older state of something that counts its versions.
+ *
+ * @throws AppError "stale"
+ */
+export function refuseOldVersion(version: number, { decidedOn, what }: { decidedOn: string | undefined; what: string }): void {
+  if (decidedOn === undefined || decidedOn === '*' || decidedOn === String(version)) return;
+  throw new AppError('stale', `Something happened to this ${what} since you read it. Look at it again first.`);
+}
+
 /** The fields of `next` that differ from the row: what an audit keeps of a change. */
 export function changedFields<Next extends object>(before: object, next: Next): Partial<Next> {
   const old = before as Record<string, unknown>;

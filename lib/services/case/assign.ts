@@ -6,6 +6,7 @@ import { invalid, notFound } from '@/lib/errors';
 import { newId } from '@/lib/ids';
 import { assignCaseInput } from '@/lib/schemas/case';
 import { defineWrite } from '../define';
+import { refuseOldVersion } from '../editing';
 
 /** Gives a case to somebody of the organisation, or to nobody. */
 export const assignCase = defineWrite({
@@ -15,7 +16,9 @@ export const assignCase = defineWrite({
   input: assignCaseInput,
   run: async ({ tx, ctx, input, audit }) => {
     const of = { organisationId: ctx.organisation.id, caseId: input.caseId };
-    if (!(await lockCase(tx, of))) throw notFound('case');
+    const row = await lockCase(tx, of);
+    if (!row) throw notFound('case');
+    refuseOldVersion(row.version, { decidedOn: input.version, what: 'case' });
     if (input.personId) {
       const member = await findMember(tx, { ...of, personId: input.personId });
       const canWork = member && !member.endedAt && hasAnyRole(member.roles.filter(isRole), PERMITTED['case.work']);

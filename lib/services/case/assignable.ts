@@ -4,6 +4,10 @@ import { PERMITTED } from '@/lib/auth/permissions';
 import { hasAnyRole, isRole } from '@/lib/auth/roles';
 import { defineRead } from '../define';
 
+type Member = Awaited<ReturnType<typeof listMembers>>[number];
+
+export const canBeGiven = ({ endedAt, roles }: Pick<Member, 'endedAt' | 'roles'>) => !endedAt && hasAnyRole(roles.filter(isRole), PERMITTED['case.work']);
+
 /** Those who can be given a case: whoever works on cases and has not left. */
 export const listAssignable = defineRead({
   name: 'list.assignable',
@@ -12,6 +16,6 @@ export const listAssignable = defineRead({
   input: z.object({}),
   run: async ({ tx, ctx }) =>
     (await listMembers(tx, { organisationId: ctx.organisation.id }))
-      .filter((member) => !member.endedAt && hasAnyRole(member.roles.filter(isRole), PERMITTED['case.work']))
+      .filter(canBeGiven)
       .map(({ personId, name }) => ({ id: personId, name })),
 });

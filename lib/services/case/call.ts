@@ -6,6 +6,7 @@ import { conflict, invalid, notFound, type FieldErrors } from '@/lib/errors';
 import { newId } from '@/lib/ids';
 import { callCauseInput } from '@/lib/schemas/case';
 import { defineWrite } from '../define';
+import { refuseOldVersion } from '../editing';
 import { compiledEdition } from '../edition/compiled';
 
 /**
@@ -26,6 +27,7 @@ export const callCause = defineWrite({
       unchanged();
       return { id: input.id };
     }
+    refuseOldVersion(row.version, { decidedOn: input.version, what: 'case' });
     if (row.status !== 'open') throw conflict('This case has been called already. Reopen it to call it anew.');
 
     const compiled = await compiledEdition(tx, { ...of, editionId: row.editionId });

@@ -3,6 +3,7 @@ import { PERMITTED } from '@/lib/auth/permissions';
 import { conflict, notFound } from '@/lib/errors';
 import { reopenCaseInput } from '@/lib/schemas/case';
 import { defineWrite } from '../define';
+import { refuseOldVersion } from '../editing';
 
 /** Takes the call back: the case can be answered again. The call and why it was taken back stay in the history. */
 export const reopenCase = defineWrite({
@@ -14,6 +15,7 @@ export const reopenCase = defineWrite({
     const of = { organisationId: ctx.organisation.id, caseId: input.caseId };
     const row = await lockCase(tx, of);
     if (!row) throw notFound('case');
+    refuseOldVersion(row.version, { decidedOn: input.version, what: 'case' });
     if (row.status === 'open') throw conflict('This case is open.');
     const at = ctx.now();
     const written = await insertCaseEvent(tx, { ...of, id: input.id, kind: 'reopened', reason: input.reason, personId: ctx.person.id, at });

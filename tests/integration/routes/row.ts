@@ -42,6 +42,7 @@ export interface RouteRow<M extends Made> extends Common {
   params?: (made: M) => Record<string, string | string[]>;
   query?: (made: M) => Record<string, string>;
   body?: (made: M) => Record<string, unknown>;
+  headers?: () => Record<string, string>;
 }
 
 export type Row<M extends Made = Made> = PageRow<M> | ActionRow<M> | RouteRow<M>;

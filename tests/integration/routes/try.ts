@@ -88,7 +88,7 @@ async function tryRoute(row: RouteRow<Made>, made: Made, browser: Browser, chang
   const query = new URLSearchParams(Object.entries({ ...row.query?.(made), ...change.query }).map(([name, value]) => [name, String(value)]));
   const isRead = row.method === 'GET';
   const path = `/${row.route}?${query}`;
-  const headers = browser.headers({ origin: 'http://carryover.test', ...(!isRead && { 'content-type': 'application/json' }), ...change.headers });
+  const headers = browser.headers({ origin: 'http://carryover.test', ...(!isRead && { 'content-type': 'application/json' }), ...row.headers?.(), ...change.headers });
   const request = new NextRequest(new URL(path, 'http://carryover.test'), {
     method: row.method,
     headers,

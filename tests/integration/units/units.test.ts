@@ -7,7 +7,7 @@ import { createUnit } from '@/lib/services/unit/create';
 import { hideUnit, showUnit } from '@/lib/services/unit/hide';
 import { listUnits } from '@/lib/services/unit/list';
 import { readUnit, readUnitForm } from '@/lib/services/unit/read';
-import { searchUnits } from '@/lib/services/unit/search';
+import { browseUnits } from '@/lib/services/unit/browse';
 import { openTestDatabases, type TestDatabases } from '@/tests/support/context';
 import { makeTenant } from '@/tests/support/tenant';
 import { sent, unitForm } from './form';
@@ -152,7 +152,7 @@ describe('hiding a unit', () => {
     await createUnit({ ctx, input: form });
     await hideUnit({ ctx, input: { unitId: form.id, reason: 'Sold' } });
     expect((await listUnits({ ctx, input: {} })).total).toBe(0);
-    expect((await searchUnits({ ctx, input: { q: 'K' } })).units).toEqual([]);
+    expect((await browseUnits({ ctx, input: { q: 'K' } })).units).toEqual([]);
     expect((await listUnits({ ctx, input: { hidden: 'yes' } })).units.map((row) => row.fleetNumber)).toEqual(['K-9']);
     expect((await readUnit({ ctx, input: { unitId: form.id } })).hidden).toMatchObject({ kind: 'hide', reason: 'Sold', by: ctx.person.name });
     await expect(createUnit({ ctx, input: unitForm(siteId, { fleetNumber: 'K-9' }) })).rejects.toMatchObject({ fields: { fleetNumber: expect.stringContaining('hidden') } });
@@ -197,7 +197,7 @@ describe('lists', () => {
   test('search puts the exact number first, then those that begin with the text', async () => {
     const { ctx, siteId } = await makeTenant(databases);
     for (const fleetNumber of ['A-12', '12-B', '12', '112']) await createUnit({ ctx, input: unitForm(siteId, { fleetNumber }) });
-    const { units } = await searchUnits({ ctx, input: { q: '12' } });
+    const { units } = await browseUnits({ ctx, input: { q: '12' } });
     expect(units.map((row) => row.fleetNumber)).toEqual(['12', '12-B', '112', 'A-12']);
   });
 });

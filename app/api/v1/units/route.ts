@@ -1,5 +1,9 @@
 import { route } from '@/lib/auth/route';
-import { searchUnits } from '@/lib/services/unit/search';
+import { idAnswer } from '@/lib/openapi/answers/common';
+import { unitList } from '@/lib/openapi/answers/record';
+import { browseUnits } from '@/lib/services/unit/browse';
+import { createUnit } from '@/lib/services/unit/create';
 
-/** Units by part of their number: `?q=K-1&limit=10`. */
-export const GET = route(searchUnits);
+export const GET = route(browseUnits, { scope: 'units:read', doc: { summary: 'List units', description: 'By fleet number, or those that `q` finds.', answers: unitList } });
+
+export const POST = route(createUnit, { scope: 'units:write', status: 201, doc: { summary: 'Add a unit', answers: idAnswer } });

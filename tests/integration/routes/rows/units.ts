@@ -45,7 +45,5 @@ export const units = feature({
     { action: PAGES, name: 'changeFit', roles: EDIT, form: ({ fitId, fitVersion, modelId }) => ({ fitId, version: fitVersion, modelId, condition: 'rebuilt', installedOn: '2024-02-01' }) },
     { action: PAGES, name: 'takeOutFit', roles: EDIT, form: ({ fitId, fitVersion }) => ({ fitId, version: fitVersion, removedOn: '2025-01-01', whyOut: 'precaution' }) },
     { action: PAGES, name: 'strikeFit', roles: EDIT, form: ({ fitId }) => ({ fitId, reason: 'Wrong unit' }) },
-
-    { route: 'api/v1/units', method: 'GET', roles: SEE, query: () => ({ q: '1', limit: '5' }) },
   ],
 });
