@@ -1,11 +1,18 @@
 'use client';
 
 import { ErrorPanel } from '@/components/shell/ErrorPanel';
+import { Wordmark } from '@/components/shell/Wordmark';
 
-export default function PageError({ error, retry }: { error: Error & { digest?: string }; retry: () => void }) {
+/** Where the shell itself could not be drawn. */
+export default function PageError(props: { error: Error & { digest?: string }; retry: () => void }) {
   return (
-    <main className="mx-auto max-w-page px-4 sm:px-6">
-      <ErrorPanel digest={error.digest} retry={retry} homeHref="/" />
-    </main>
+    <>
+      <header className="border-b-2 border-ink">
+        <div className="mx-auto max-w-page px-4 sm:px-6"><Wordmark href="/" /></div>
+      </header>
+      <main className="mx-auto max-w-page px-4 sm:px-6">
+        <ErrorPanel {...props} homeHref="/" />
+      </main>
+    </>
   );
 }

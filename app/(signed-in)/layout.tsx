@@ -1,26 +1,7 @@
 import type { ReactNode } from 'react';
-import { cookies } from 'next/headers';
-import { DeviceKeeper } from '@/components/device/DeviceKeeper';
-import { SignOutForm } from '@/components/device/SignOutForm';
-import { SignedInShell } from '@/components/shell/SignedInShell';
-import { THEME_COOKIE, themeFrom } from '@/components/shell/theme';
-import { navigationFor } from '@/lib/auth/navigation';
-import { may } from '@/lib/auth/permissions';
 import { requireContext } from '@/lib/auth/session';
-import { signOut } from './actions';
+import { SignedInFrame } from '../signed-in-frame';
 
 export default async function SignedInLayout({ children }: { children: ReactNode }) {
-  const { person, organisation, roles } = await requireContext();
-  return (
-    <SignedInShell
-      person={{ name: person.name, email: person.email }}
-      organisation={{ name: organisation.name }}
-      items={navigationFor(roles)}
-      theme={themeFrom((await cookies()).get(THEME_COOKIE)?.value)}
-      signOut={<SignOutForm action={signOut} />}
-    >
-      <DeviceKeeper personId={person.id} organisationId={organisation.id} keepsCases={may(roles, 'case.see')} />
-      {children}
-    </SignedInShell>
-  );
+  return <SignedInFrame ctx={await requireContext()}>{children}</SignedInFrame>;
 }

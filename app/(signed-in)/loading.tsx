@@ -1,8 +1,10 @@
-/** Shown while a page is fetched. Words, no spinner: they appear only when it takes a moment. */
+'use client';
+
+import { usePathname } from 'next/navigation';
+import { pageAt } from '@/components/states/shape';
+import { Skeleton } from '@/components/states/Skeleton';
+
+/** One place for all pages: of nested ones the outermost would show first, which is the wrong outline for those below. */
 export default function Loading() {
-  return (
-    <p role="status" className="appear-late py-10 text-ink-soft">
-      Fetching…
-    </p>
-  );
+  return <Skeleton {...pageAt(usePathname())} />;
 }

@@ -37,6 +37,7 @@ export const SHOTS: readonly Shot[] = [
   shot('(auth)/invite/[token]', 'invite-link', 'nobody', ({ invitation }) => invitation),
   shot('(auth)/invite/[token]', 'invite-dead-link', 'nobody', '/invite/not-a-link-that-was-sent-by-anybody-here'),
   shot(null, 'not-found-outside', 'nobody', '/nothing-here'),
+  shot(null, 'not-found-inside', 'technician', '/nothing-here'),
 
   shot(`${IN}/cases`, 'cases', 'technician', '/cases'),
   shot(`${IN}/cases`, 'cases-all', 'manager', '/cases?status=all'),
@@ -70,8 +71,11 @@ export const SHOTS: readonly Shot[] = [
   shot(`${IN}/models/[id]`, 'model-not-found', 'engineer', `/models/${NOWHERE}`),
   shot(`${IN}/models/[id]/edit`, 'model-edit', 'engineer', ({ model }) => model && `/models/${model}/edit`),
 
+  shot(`${IN}/not-allowed`, 'not-allowed', 'trainer', '/not-allowed'),
+
   shot(`${IN}/settings/profile`, 'settings-profile', 'technician', '/settings/profile'),
   shot(`${IN}/settings/units`, 'settings-units', 'technician', '/settings/units'),
+  shot(`${IN}/settings/tokens`, 'settings-tokens', 'technician', '/settings/tokens'),
   shot(`${IN}/settings/people`, 'settings-people', 'administrator', '/settings/people'),
   shot(`${IN}/settings/people/[id]`, 'settings-person', 'administrator', ({ person }) => person && `/settings/people/${person}`),
   shot(`${IN}/settings/people/[id]`, 'settings-person-not-found', 'administrator', `/settings/people/${NOWHERE}`),

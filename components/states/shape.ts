@@ -1,0 +1,55 @@
+/** What a page is made of, as far as its outline is concerned. */
+export type Shape = 'list' | 'record' | 'form' | 'case' | 'history';
+
+interface Page {
+  /** Its folder below `app/(signed-in)`. */
+  route: string;
+  shape: Shape;
+  /** What is fetched: "the cases". */
+  what: string;
+}
+
+/** The outline of each signed-in page, shown while it is fetched. `tests/unit/ui/states.test.tsx` misses none. */
+export const PAGES: readonly Page[] = [
+  { route: 'cases', shape: 'list', what: 'the cases' },
+  { route: 'cases/new', shape: 'form', what: 'the form' },
+  { route: 'cases/[id]', shape: 'case', what: 'the case' },
+  { route: 'units', shape: 'list', what: 'the units' },
+  { route: 'units/new', shape: 'form', what: 'the form' },
+  { route: 'units/[id]', shape: 'record', what: 'the unit' },
+  { route: 'units/[id]/edit', shape: 'form', what: 'the form' },
+  { route: 'units/[id]/readings/new', shape: 'form', what: 'the form' },
+  { route: 'units/[id]/fits/new', shape: 'form', what: 'the form' },
+  { route: 'units/[id]/fits/[fitId]', shape: 'record', what: 'the fit' },
+  { route: 'models', shape: 'list', what: 'the compressor models' },
+  { route: 'models/new', shape: 'form', what: 'the form' },
+  { route: 'models/[id]', shape: 'record', what: 'the compressor model' },
+  { route: 'models/[id]/edit', shape: 'form', what: 'the form' },
+  { route: 'not-allowed', shape: 'form', what: 'the page' },
+  { route: 'settings', shape: 'form', what: 'your settings' },
+  { route: 'settings/profile', shape: 'form', what: 'your settings' },
+  { route: 'settings/units', shape: 'form', what: 'your units of measure' },
+  { route: 'settings/tokens', shape: 'list', what: 'your tokens' },
+  { route: 'settings/people', shape: 'list', what: 'the people' },
+  { route: 'settings/people/invite', shape: 'form', what: 'the form' },
+  { route: 'settings/people/[id]', shape: 'form', what: 'the person' },
+  { route: 'settings/sites', shape: 'list', what: 'the sites' },
+  { route: 'settings/sites/new', shape: 'form', what: 'the form' },
+  { route: 'settings/sites/[id]', shape: 'form', what: 'the site' },
+  { route: 'settings/organisation', shape: 'form', what: 'the organisation' },
+  { route: 'settings/audit', shape: 'list', what: 'the audit' },
+];
+
+/** The page at an address; a form's outline where no page is known, which is the plainest. */
+export function pageAt(pathname: string): Pick<Page, 'shape' | 'what'> {
+  const parts = pathname.split('/').filter(Boolean);
+  const fits = ({ route }: Page) => {
+    const wanted = route.split('/');
+    return wanted.length === parts.length && wanted.every((part, i) => part.startsWith('[') || part === parts[i]);
+  };
+  // A fixed name is nearer than a placeholder: "cases/new" is no case.
+  const [page] = PAGES.filter(fits).sort((a, b) => placeholders(a) - placeholders(b));
+  return page ?? { shape: 'form', what: 'the page' };
+}
+
+const placeholders = ({ route }: Page) => route.split('[').length;
