@@ -1,6 +1,8 @@
 'use client';
 
-import { useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
+import { OilPath } from '@/components/oil-path/OilPath';
+import { PhotoStrip } from '@/components/photos/PhotoStrip';
 import { Button } from '@/components/ui/Button';
 import { LiveRegion } from '@/components/ui/LiveRegion';
 import { Notice } from '@/components/ui/Notice';
@@ -8,13 +10,16 @@ import { percent } from '@/components/ui/SightGlass';
 import { STATIONS, type StationId } from '@/lib/diagnose/stations';
 import type { CaseState, CaseView, RulebookView } from '@/lib/schemas/case-view';
 import { Answered } from './Answered';
-import { atHand, ofSuggestion, type Picked } from './at-hand';
+import { AnsweredStrip } from './AnsweredStrip';
+import { atHand, ofSuggestion, type AtHand, type Picked } from './at-hand';
 import { Causes } from './Causes';
 import { CheckAtHand } from './CheckAtHand';
+import { keepHand, type Hand } from './hand';
+import { HandSwitch } from './HandSwitch';
+import { openChecks } from './open-checks';
 import { PanelAtHand } from './PanelAtHand';
 import { ReleaseHold } from './ReleaseHold';
 import { StationChecks } from './StationChecks';
-import { Stations } from './Stations';
 import { SyncStrip } from './SyncStrip';
 import { useCase, type CaseHandle } from './use-case';
 import { WhatNext } from './WhatNext';
@@ -22,56 +27,90 @@ import { changeText } from './words';
 
 const stationName = (id: StationId) => STATIONS.find((station) => station.id === id)?.name ?? id;
 
-/** Where a case is diagnosed: the check at hand, the ranked causes, the oil path, and what was answered. */
-export function CaseDesk({ view }: { view: CaseView }) {
+interface Props {
+  view: CaseView;
+  /** As the cookie says, so that the page comes with answers on the right side. */
+  hand: Hand;
+  /** The mark that the organisation writes. */
+  decimalMark: '.' | ',';
+}
+
+/** Where a case is diagnosed: the oil path at its head, the check at hand, the ranked causes, and what was answered. */
+export function CaseDesk({ view, hand: kept, decimalMark }: Props) {
   const { rulebook } = view;
   const handle = useCase(view);
   const { state, reasons } = handle;
   const [picked, setPicked] = useState<Picked>(null);
   const [station, setStation] = useState<StationId | null>(null);
+  const [hand, setHand] = useState(kept);
   const readOnly = state.at !== null || state.status !== 'open';
   const pick = (next: Picked) => {
     setStation(null);
     setPicked(next);
-    requestAnimationFrame(() => document.getElementById('check-at-hand')?.focus());
+    requestAnimationFrame(() => goTo('check-at-hand'));
+  };
+  const pickStation = (next: StationId | null) => {
+    setStation(next);
+    if (next) requestAnimationFrame(() => goTo('station-checks'));
   };
 
   return (
-    <>
-    <ReleaseHold checks={state.releaseHolds.map((id) => rulebook.checks[id]?.name ?? id)} others={view.otherHolds} />
-    <div className="mb-6 empty:hidden"><SyncStrip sync={handle.sync} rulebook={rulebook} /></div>
-    <div className="grid gap-8 lg:grid-cols-[13rem_minmax(0,1fr)_minmax(0,26rem)] lg:grid-rows-[auto_1fr]">
-      <div className="min-w-0 lg:col-start-2 lg:row-start-1">
-        {station ? (
-          <StationChecks station={station} name={stationName(station)} state={state} rulebook={rulebook} onPick={pick} />
-        ) : (
-          !readOnly && <AtHandView {...{ handle, rulebook, picked, onPick: setPicked }} />
-        )}
+    <div data-hand={hand} className="grid gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,1fr)_minmax(0,27rem)]">
+      <div className="grid min-w-0 gap-4 lg:col-span-2">
+        <ReleaseHold checks={state.releaseHolds.map((id) => rulebook.checks[id]?.name ?? id)} others={view.otherHolds} />
+        <OilPath suspicion={state.suspicion} open={openChecks(state, rulebook)} picked={station} onPick={pickStation} />
+        <SyncStrip sync={handle.sync} rulebook={rulebook} />
       </div>
-      <div className="grid min-w-0 content-start gap-8 lg:col-start-3 lg:row-span-2 lg:row-start-1">
+      <div className="grid min-w-0 content-start gap-5 border-t-2 border-ink pt-4 print:hidden lg:col-start-1">
+        {!readOnly && <AnsweredStrip {...{ state, rulebook, onPick: pick }} />}
+        {station ? (
+          <StationChecks station={station} name={stationName(station)} state={state} rulebook={rulebook} onPick={pick} onClose={readOnly ? undefined : () => pick(null)} />
+        ) : readOnly ? (
+          <p className="text-ink-soft">Nothing is asked here. Pick a station to see its checks.</p>
+        ) : (
+          <AtHandView {...{ handle, rulebook, picked, decimalMark, onPick: setPicked }} />
+        )}
+        {!readOnly && <HandSwitch hand={hand} onChange={(next) => { setHand(next); keepHand(next); }} />}
+      </div>
+      <div className="grid min-w-0 content-start gap-8 lg:col-start-2 lg:row-span-2 lg:row-start-2">
         <Causes state={state} reasons={reasons} rulebook={rulebook} />
         {!readOnly && <WhatNext state={state} settle={reasons.settle} rulebook={rulebook} readOnly={readOnly} onPick={pick} />}
       </div>
-      <div className="min-w-0 lg:col-start-2 lg:row-start-2">
+      <div className="min-w-0 lg:col-start-1">
         <Answered handle={handle} rulebook={rulebook} timeZone={view.head.timeZone} readOnly={readOnly} onPick={pick} />
+        <div className="mt-8"><PhotoStrip /></div>
       </div>
-      <div className="lg:col-start-1 lg:row-span-2 lg:row-start-1"><Stations state={state} rulebook={rulebook} picked={station} onPick={setStation} /></div>
       <LiveRegion>{spoken(state, rulebook)}</LiveRegion>
     </div>
-    </>
   );
+}
+
+/** Gives a heading the focus, and brings it to where the eye is only when it stands too low or out of sight. */
+function goTo(id: string): void {
+  const heading = document.getElementById(id);
+  if (!heading) return;
+  heading.focus({ preventScroll: true });
+  const { top } = heading.getBoundingClientRect();
+  if (top < 0 || top > innerHeight / 2) heading.scrollIntoView({ block: 'start' });
 }
 
 interface AtHandProps {
   handle: CaseHandle;
   rulebook: RulebookView;
   picked: Picked;
+  decimalMark: '.' | ',';
   onPick: (picked: Picked) => void;
 }
 
-function AtHandView({ handle, rulebook, picked, onPick }: AtHandProps) {
+function AtHandView({ handle, rulebook, picked, decimalMark, onPick }: AtHandProps) {
   const { state } = handle;
-  const asked = atHand(state, rulebook, picked);
+  const asked = useHeld(atHand(state, rulebook, picked), handle.answer.isPending);
+  const shown = useRef(nameOf(asked));
+  useEffect(() => {
+    // The page itself has the focus at first; after an answer it goes to the next question.
+    if (shown.current !== nameOf(asked)) goTo('check-at-hand');
+    shown.current = nameOf(asked);
+  });
   if (!asked) return <Enough {...{ state, rulebook, onPick }} />;
   if (asked.kind === 'panel') {
     const panel = rulebook.panels.find(({ id }) => id === asked.panelId);
@@ -90,12 +129,22 @@ function AtHandView({ handle, rulebook, picked, onPick }: AtHandProps) {
       check={check}
       rulebook={rulebook}
       handle={handle}
-      suggestion={picked ? null : (state.next.suggestions[0] ?? null)}
+      suggestion={picked ? null : (state.next.suggestions.find(({ checkIds }) => checkIds.includes(check.id)) ?? null)}
       then={asked.then ? (rulebook.checks[asked.then] ?? null) : null}
       stationName={stationName(check.station)}
+      decimalMark={decimalMark}
       onAnswered={() => onPick(null)}
     />
   );
+}
+
+const nameOf = (asked: AtHand | null) => (asked?.kind === 'panel' ? asked.panelId : (asked?.checkId ?? null));
+
+/** What is asked, kept while an answer is on its way: the next question comes once, when it is known. */
+function useHeld(asked: AtHand | null, pending: boolean): AtHand | null {
+  const [held, setHeld] = useState(asked);
+  if (!pending && nameOf(held) !== nameOf(asked)) setHeld(asked);
+  return pending ? held : asked;
 }
 
 /** No check is worth its time: say so, and leave the way open to go on. */

@@ -5,6 +5,7 @@ import { Notice } from '@/components/ui/Notice';
 import { SightGlass, percent } from '@/components/ui/SightGlass';
 import type { CaseReasons, CaseState, CauseView, ReasonView, RulebookView } from '@/lib/schemas/case-view';
 import { Reasons } from './Reasons';
+import { useCalmOrder } from './use-calm-order';
 import { changeText } from './words';
 
 /** Causes under this are in the list, not in the way. */
@@ -13,6 +14,7 @@ const SHOWN = 6;
 /** The ranked causes, each with its level, how it moved, and its reasons when it is opened. */
 export function Causes({ state, reasons, rulebook }: { state: CaseState; reasons: CaseReasons; rulebook: RulebookView }) {
   const [decibans, setDecibans] = useState(false);
+  const list = useCalmOrder(state.causes.map(({ causeId }) => causeId).join());
   const leading = state.causes.slice(0, SHOWN);
   const rest = state.causes.slice(SHOWN);
   const row = (cause: CauseView) => <Cause key={cause.causeId} cause={cause} reasons={reasons.causes[cause.causeId] ?? []} rulebook={rulebook} decibans={decibans} />;
@@ -33,7 +35,10 @@ export function Causes({ state, reasons, rulebook }: { state: CaseState; reasons
           If you find something that isn’t listed, call “something else” and write down what it was.
         </Notice>
       )}
-      <ol className="border-t border-ink">{leading.map(row)}</ol>
+      <p className="min-h-[2.6em] text-[0.9375rem] leading-[1.3]">
+        {state.because ? <>Moved last by <strong>{state.because}</strong></> : <span className="text-ink-soft">As in all cases: nothing has moved it yet.</span>}
+      </p>
+      <ol ref={list} className="border-t border-ink">{leading.map(row)}</ol>
       {rest.length > 0 && (
         <details className="disclosure">
           <summary className="min-h-touch py-2 font-bold">
@@ -59,22 +64,43 @@ export function Causes({ state, reasons, rulebook }: { state: CaseState; reasons
 
 function Cause({ cause, reasons, rulebook, decibans }: { cause: CauseView; reasons: ReasonView[]; rulebook: RulebookView; decibans: boolean }) {
   const { name, sentence } = rulebook.causes[cause.causeId] ?? { name: cause.causeId, sentence: '' };
+  const [left, setLeft] = useState<ReasonView | null>(null);
   const change = changeText(cause.change);
+  const rose = (cause.change ?? 0) > 0;
+  // The reasons may have changed under the one that was left out.
+  const without = left && reasons.find(({ findingIds }) => findingIds.join() === left.findingIds.join());
   return (
-    <li className="border-b border-rule">
+    <li data-cause={cause.causeId} className="border-b border-rule">
       <details className="disclosure" name={undefined}>
-        <summary className="flex min-h-16 items-center gap-3 py-2">
-          <SightGlass label={name} value={cause.p} previous={cause.change === null ? undefined : cause.p - cause.change} />
+        <summary className="flex min-h-18 items-center gap-3 py-2">
+          <SightGlass
+            label={name}
+            value={without ? without.without : cause.p}
+            previous={without ? cause.p : cause.change === null ? undefined : cause.p - cause.change}
+            className="w-26 shrink-0"
+          />
           <span className="min-w-0">
-            <span className="block font-bold">{name}</span>
-            {change && <span className="figure block text-[0.875rem]">{change} with the last answer</span>}
+            <span className="block leading-tight font-bold">{name}</span>
+            {/* Always a line, so that a level that moves moves nothing else. */}
+            <span className="block min-h-[1.3em] text-[0.875rem] leading-[1.3] text-ink-soft">
+              {without ? `without “${without.finding}”` : change && <><Moved rose={rose} /> <span className="figure">{change}</span></>}
+            </span>
           </span>
         </summary>
         <div className="grid gap-3 pt-2 pb-4 pl-2">
           <p>{sentence}</p>
-          <Reasons reasons={reasons} prior={cause.prior} decibans={decibans} />
+          <Reasons reasons={reasons} prior={cause.prior} decibans={decibans} left={without ?? null} onLeave={setLeft} />
         </div>
       </details>
     </li>
+  );
+}
+
+/** An arrow beside the word that says the same. */
+function Moved({ rose }: { rose: boolean }) {
+  return (
+    <svg aria-hidden="true" viewBox="0 0 10 10" className="inline size-2.5 fill-ink">
+      <path d={rose ? 'M5 0 10 9H0Z' : 'M5 10 0 1H10Z'} />
+    </svg>
   );
 }

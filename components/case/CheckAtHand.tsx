@@ -1,13 +1,14 @@
 'use client';
 
-import { useEffect, useRef } from 'react';
-import { Button } from '@/components/ui/Button';
+import { PhotoStrip } from '@/components/photos/PhotoStrip';
 import { Notice } from '@/components/ui/Notice';
 import { ApiProblem } from '@/lib/query/problem';
 import type { AnswerInput } from '@/lib/schemas/case';
 import type { CheckView, RulebookView, SuggestionView } from '@/lib/schemas/case-view';
 import { Cautions, unread } from './Cautions';
+import { lastAsked } from './answered';
 import { ChoiceAnswers } from './ChoiceAnswers';
+import { Dock } from './Dock';
 import { Instructions } from './Instructions';
 import { MeasuredAnswer } from './MeasuredAnswer';
 import type { CaseHandle } from './use-case';
@@ -20,20 +21,13 @@ interface Props {
   suggestion: SuggestionView | null;
   then: CheckView | null;
   stationName: string;
+  decimalMark: '.' | ',';
   onAnswered: () => void;
 }
 
 /** One check, large: its cautions, how to do it, and its answers; "can't tell" and "skip" are always there. */
-export function CheckAtHand({ check, rulebook, handle, suggestion, then, stationName, onAnswered }: Props) {
+export function CheckAtHand({ check, rulebook, handle, suggestion, then, stationName, decimalMark, onAnswered }: Props) {
   const { state, answer, acknowledge } = handle;
-  const heading = useRef<HTMLHeadingElement>(null);
-  const shown = useRef(check.id);
-  useEffect(() => {
-    // The page itself has the focus at first; after an answer it goes to the next question.
-    if (shown.current !== check.id) heading.current?.focus();
-    shown.current = check.id;
-  }, [check.id]);
-
   const problem = answer.error instanceof ApiProblem && answer.variables?.checkId === check.id ? answer.error : null;
   const toRead = unread(check, rulebook, state);
   const give = (given: AnswerInput) =>
@@ -42,13 +36,17 @@ export function CheckAtHand({ check, rulebook, handle, suggestion, then, station
       { onSuccess: onAnswered },
     );
 
+  const last = lastAsked(state);
+  const undo = last && (() => answer.mutate({ checkId: last.checkId, answer: { kind: 'undo' }, askedBecause: 'choice' }));
+  const common = { check, pending: answer.isPending, onAnswer: give, onUndo: undo };
+
   return (
     <section aria-labelledby="check-at-hand" className="grid gap-4">
       <header>
         <p className="label text-ink-soft">
           {stationName} · {suggestion ? suggestion.word : 'your choice'}
         </p>
-        <h2 id="check-at-hand" ref={heading} tabIndex={-1} className="mt-1 text-[1.75rem]">{check.prompt}</h2>
+        <h2 id="check-at-hand" tabIndex={-1} className="mt-1 text-[1.75rem]">{check.prompt}</h2>
         {suggestion?.because && <p className="mt-1">{suggestion.because}</p>}
         {then && <p className="mt-1 text-ink-soft">Then: {then.prompt}</p>}
       </header>
@@ -67,14 +65,12 @@ export function CheckAtHand({ check, rulebook, handle, suggestion, then, station
       <Instructions check={check} setUpMinutes={suggestion?.setUpMinutes} />
       {toRead.length === 0 &&
         (check.kind === 'measured' ? (
-          <MeasuredAnswer key={check.id} check={check} pending={answer.isPending} errors={problem?.fields ?? {}} onAnswer={give} />
+          <MeasuredAnswer key={check.id} {...common} errors={problem?.fields ?? {}} decimalMark={decimalMark} />
         ) : (
-          <ChoiceAnswers key={check.id} check={check} pending={answer.isPending} onAnswer={give} />
+          <ChoiceAnswers key={check.id} {...common} />
         ))}
-      <div className="flex flex-wrap gap-3 border-t border-rule pt-4">
-        <Button variant="quiet" onClick={() => give({ kind: 'cannot-tell' })}>Can’t tell</Button>
-        <Button variant="quiet" onClick={() => give({ kind: 'skip' })}>Skip</Button>
-      </div>
+      {toRead.length > 0 && <Dock onAnswer={give} onUndo={undo} />}
+      <PhotoStrip checkId={check.id} />
     </section>
   );
 }

@@ -21,7 +21,7 @@ export function PanelAnswers({ checks, state, pending, onAnswer }: Props) {
         return (
           <li key={check.id} className="grid gap-2 border-b border-rule py-3 md:grid-cols-[1fr_auto] md:items-center">
             <span id={`panel-${check.id}`} className="text-[1.0625rem]">{check.name}</span>
-            <span role="group" aria-labelledby={`panel-${check.id}`} className="flex flex-wrap gap-2">
+            <span role="group" aria-labelledby={`panel-${check.id}`} className="panel-choices">
               {check.answers.map(({ id, label }) => (
                 <Choice key={id} pressed={chosen === id} pending={pending} onPress={() => onAnswer(check.id, { kind: 'state', state: id, sureness: 'sure' })}>
                   {label}

@@ -4,7 +4,9 @@ import { Button } from '@/components/ui/Button';
 import { Notice } from '@/components/ui/Notice';
 import { ApiProblem } from '@/lib/query/problem';
 import type { RulebookView } from '@/lib/schemas/case-view';
+import { lastAsked } from './answered';
 import { Cautions, unread } from './Cautions';
+import { Undo } from './Dock';
 import { Instructions } from './Instructions';
 import { PanelAnswers } from './PanelAnswers';
 import type { CaseHandle } from './use-case';
@@ -26,6 +28,7 @@ export function PanelAtHand({ panel, rulebook, handle, stationName, onDone }: Pr
   const toRead = careful ? unread(careful, rulebook, state) : [];
   const problem = answer.error instanceof ApiProblem ? answer.error : null;
   const [first] = checks;
+  const last = lastAsked(state);
   return (
     <section aria-labelledby="check-at-hand" className="grid gap-4">
       <header>
@@ -54,7 +57,10 @@ export function PanelAtHand({ panel, rulebook, handle, stationName, onDone }: Pr
           onAnswer={(checkId, given) => answer.mutate({ checkId, answer: given, askedBecause: 'panel' })}
         />
       )}
-      <div><Button onClick={onDone}>Go on to the next check</Button></div>
+      <div className="panel-choices">
+        <Button className="min-h-14!" onClick={onDone}>Go on to the next check</Button>
+        <Undo onUndo={last && (() => answer.mutate({ checkId: last.checkId, answer: { kind: 'undo' }, askedBecause: 'choice' }))} />
+      </div>
     </section>
   );
 }

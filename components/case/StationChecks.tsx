@@ -12,10 +12,12 @@ interface Props {
   state: CaseState;
   rulebook: RulebookView;
   onPick: (picked: Picked) => void;
+  /** Back to the check that tells most; absent where nothing is asked. */
+  onClose?: () => void;
 }
 
 /** Every check of a station, for those who know what they want: panels first, then single ones. */
-export function StationChecks({ station, name, state, rulebook, onPick }: Props) {
+export function StationChecks({ station, name, state, rulebook, onPick, onClose }: Props) {
   const answers = new Map(state.findings.filter(({ current }) => current).map((finding) => [finding.checkId, finding.answer]));
   const spoiled = new Set(state.next.spoiled.map(({ checkId }) => checkId));
   const panels = rulebook.panels.filter((panel) => panel.station === station);
@@ -23,7 +25,10 @@ export function StationChecks({ station, name, state, rulebook, onPick }: Props)
   const single = Object.values(rulebook.checks).filter((check) => check.station === station && !inPanels.has(check.id));
   return (
     <section aria-labelledby="station-checks" className="grid gap-2">
-      <h2 id="station-checks">{name}</h2>
+      <div className="flex flex-wrap items-center justify-between gap-3">
+        <h2 id="station-checks" tabIndex={-1} className="scroll-mt-4">{name}</h2>
+        {onClose && <Button variant="quiet" onClick={onClose}>Back to the check that tells most</Button>}
+      </div>
       <ul className="border-t border-ink">
         {panels.map((panel) => (
           <Row key={panel.id} title={panel.title} detail={`${panel.checks.filter((id) => answers.has(id)).length} of ${panel.checks.length} answered`} onPick={() => onPick({ kind: 'panel', panelId: panel.id })} />

@@ -18,7 +18,7 @@ interface Props {
  */
 export function PageHeader({ title, lead, breadcrumbs, tags, actions }: Props) {
   return (
-    <header className="rule-double mb-8 pb-4">
+    <header className="rule-double mb-6 pb-3">
       {breadcrumbs && <Breadcrumbs items={breadcrumbs} />}
       <div className="flex flex-wrap items-end justify-between gap-x-8 gap-y-4">
         <div className="min-w-0">

@@ -1,11 +1,14 @@
 import type { Metadata } from 'next';
+import { cookies } from 'next/headers';
 import Link from 'next/link';
 import { AssignForm } from '@/components/case/AssignForm';
 import { CallForm } from '@/components/case/CallForm';
 import { Calls } from '@/components/case/Calls';
 import { CaseDesk } from '@/components/case/CaseDesk';
+import { HAND_COOKIE, handFrom } from '@/components/case/hand';
 import { Moments } from '@/components/case/Moments';
 import { ReopenForm } from '@/components/case/ReopenForm';
+import { PhotosOfCase } from '@/components/photos/PhotosOfCase';
 import { timeText } from '@/components/case/words';
 import { Notice } from '@/components/ui/Notice';
 import { PageHeader } from '@/components/ui/PageHeader';
@@ -17,6 +20,8 @@ import { QueryProvider } from '@/lib/query/provider';
 import type { CaseView } from '@/lib/schemas/case-view';
 import { listAssignable } from '@/lib/services/case/assignable';
 import { readCase } from '@/lib/services/case/read';
+import { decimalMarkOf } from '@/lib/services/units-of-measure';
+import { listPhotos } from '@/lib/services/photo/list';
 import { assignFromForm, callFromForm, reopenFromForm } from './actions';
 
 export const metadata: Metadata = { title: 'Case' };
@@ -34,6 +39,7 @@ export default async function CasePage({ params, searchParams }: Props) {
   const ctx = await pageContext(PERMITTED['case.see']);
   const view = await orNotFound(readCase({ ctx, input: { caseId: id, at: typeof at === 'string' ? at : undefined } }));
   const people = await listAssignable({ ctx, input: {} });
+  const photos = await listPhotos({ ctx, input: { caseId: view.head.id } });
   const { head, state, rulebook } = view;
   const works = may(ctx.roles, 'case.work') && state.at === null;
 
@@ -52,7 +58,14 @@ export default async function CasePage({ params, searchParams }: Props) {
           </Notice>
         </div>
       )}
-      <CaseDesk key={`${state.at}/${state.status}`} view={view} />
+      <PhotosOfCase view={view} initial={photos}>
+      <CaseDesk
+        key={`${state.at}/${state.status}`}
+        view={view}
+        hand={handFrom((await cookies()).get(HAND_COOKIE)?.value)}
+        decimalMark={decimalMarkOf(ctx.organisation.country) ?? ','}
+      />
+      </PhotosOfCase>
       <section aria-labelledby="call" className="mt-12 grid gap-4 border-t-2 border-ink pt-6">
         <h2 id="call">The call</h2>
         {view.calls.length > 0 && <Calls calls={view.calls} rulebook={rulebook} timeZone={head.timeZone} />}
