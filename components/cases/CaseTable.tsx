@@ -44,7 +44,7 @@ export function CaseTable({ rows, sort, sortHref, now }: Props) {
     <table role="table" className="ledger max-lg:block">
       <caption className="sr-only">Cases</caption>
       <thead role="rowgroup" className="max-lg:block max-lg:border-b-2 max-lg:border-ink max-lg:pb-1">
-        <tr role="row" className="max-lg:flex max-lg:flex-wrap max-lg:gap-x-5">
+        <tr role="row" className="max-lg:flex max-lg:flex-wrap max-lg:items-center max-lg:gap-x-5 max-lg:before:text-ink-soft max-lg:before:content-['Sort_by']">
           {head('Unit', 'unit')}
           {head('Where', 'site')}
           {head('With')}
@@ -58,8 +58,8 @@ export function CaseTable({ rows, sort, sortHref, now }: Props) {
           <tr key={row.id} role="row" className="group max-lg:relative max-lg:block max-lg:border-b max-lg:border-rule max-lg:py-4 has-[a:focus-visible]:bg-sunk">
             <th role="rowheader" scope="row" className={cell('lg:max-w-64')}>
               <span className="flex flex-wrap items-center gap-x-3 lg:block">
-                <Link data-row href={`/cases/${row.id}`} className="inline-flex min-h-touch items-center gap-2 whitespace-nowrap underline underline-offset-4 max-lg:after:absolute max-lg:after:inset-0">
-                  <span className="heading text-xl">{row.fleetNumber}</span>
+                <Link data-row href={`/cases/${row.id}`} className="inline-flex min-h-touch items-center gap-2 whitespace-nowrap max-lg:after:absolute max-lg:after:inset-0">
+                  <span className="heading text-[1.375rem] underline decoration-2 underline-offset-4">{row.fleetNumber}</span>
                   <span className="text-[0.9375rem] font-normal text-ink-soft">case {row.number}</span>
                 </Link>
                 <span className="ml-auto lg:hidden"><Tag>{STATUS[row.status] ?? row.status}</Tag></span>
@@ -77,7 +77,7 @@ export function CaseTable({ rows, sort, sortHref, now }: Props) {
             <td role="cell" className={cell('lg:whitespace-nowrap')}>
               <span className="text-ink-soft lg:hidden">{row.status === 'closed' ? 'Stood ' : 'Stands '}</span>
               {standsText(row.days)}
-              <Soft>since {dayText(row.openedOn)}</Soft>
+              {row.days > 0 && <Soft>since {dayText(row.openedOn)}</Soft>}
             </td>
             <td role="cell" className={cell('max-lg:mt-2')}>
               <span className="max-lg:block max-lg:text-ink-soft lg:hidden">{row.complaints.join(', ')}</span>
@@ -120,7 +120,7 @@ function HeadCell({ label, sortKey, sort, sortHref }: { label: string; sortKey?:
       className={classes('label max-lg:border-0! max-lg:p-0!', !sortKey && 'max-lg:sr-only')}
     >
       {sortKey ? (
-        <Link href={sortHref({ key: sortKey, direction: sorted === 'asc' ? 'desc' : 'asc' })} scroll={false} className="inline-flex min-h-8 items-center gap-1.5 underline decoration-edge decoration-dotted underline-offset-4 hover:decoration-solid max-lg:min-h-touch">
+        <Link href={sortHref({ key: sortKey, direction: sorted === 'asc' ? 'desc' : 'asc' })} scroll={false} className="inline-flex min-h-8 items-end gap-1 underline decoration-edge decoration-dotted underline-offset-4 hover:decoration-solid max-lg:min-h-touch max-lg:items-center">
           {label}
           <span aria-hidden="true" className="figure w-3">{sorted === 'asc' ? '↑' : sorted === 'desc' ? '↓' : ''}</span>
         </Link>

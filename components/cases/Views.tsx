@@ -16,7 +16,7 @@ export function Views({ path, views, current }: { path: string; views: readonly 
             <Link
               href={`${path}?${query}`}
               aria-current={query === current ? 'page' : undefined}
-              className={classes('label -mb-px flex min-h-touch items-center border-b-4 px-3 hover:bg-sunk', query === current ? 'border-ink' : 'border-transparent')}
+              className={classes('label -mb-px flex min-h-touch items-center border-b-4 px-2 hover:bg-sunk sm:px-3', query === current ? 'border-ink' : 'border-transparent')}
             >
               {name}
             </Link>

@@ -19,7 +19,7 @@ import { firstOfEach, listHref } from '@/lib/schemas/list';
 import { filtersOf } from '@/lib/schemas/saved-view';
 import { listAssignable } from '@/lib/services/case/assignable';
 import { listComplaints } from '@/lib/services/case/list-complaints';
-import { listCases } from '@/lib/services/case/list';
+import { listCases, type CaseList } from '@/lib/services/case/list';
 import { listSavedViews } from '@/lib/services/saved-view/list';
 import { listSites } from '@/lib/services/site/list';
 import { removeViewFromForm, renameViewFromForm, saveViewFromForm } from './actions';
@@ -65,20 +65,9 @@ export default async function CasesPage({ searchParams }: { searchParams: Promis
         actions={may(ctx.roles, 'case.work') && <ButtonLink href="/cases/new">Open a case</ButtonLink>}
       />
       <Views path="/cases" views={[...VIEWS, ...views]} current={current} />
-      <FilterBar action="/cases" label="Filter cases" resetHref={isFiltered ? '/cases' : undefined}>
-        <TextField label="Unit or case number" name="q" defaultValue={filter.q} autoComplete="off" className="w-44 max-sm:w-full" />
-        <SelectField label="State" name="status" defaultValue={filter.status} options={STATUSES} className="w-44 max-sm:w-full" />
-        <SelectField label="Site" name="site" placeholder="Any site" defaultValue={filter.site} options={sites.map(({ id, name }) => ({ value: id, label: name }))} className="w-44 max-sm:w-full" />
-        <SelectField
-          label="With"
-          name="whose"
-          placeholder="Anybody"
-          defaultValue={filter.whose}
-          options={[{ value: 'me', label: 'Me' }, { value: 'nobody', label: 'Nobody' }, ...people.filter(({ id }) => id !== ctx.person.id).map(({ id, name }) => ({ value: id, label: name }))]}
-          className="w-44 max-sm:w-full"
-        />
-        <SelectField label="Complaint" name="complaint" placeholder="Any" defaultValue={filter.complaint} options={complaints.map(({ id, name }) => ({ value: id, label: name }))} className="w-52 max-sm:w-full" />
-        <SelectField label="Release" name="held" placeholder="Any" defaultValue={filter.held} options={[{ value: 'yes', label: 'Do not release' }]} className="w-44 max-sm:w-full" />
+      <FilterBar action="/cases" label="Filter cases" resetHref={isFiltered ? '/cases' : undefined} more={<MoreFilters {...{ filter, people, complaints }} meId={ctx.person.id} />} moreOpen={Boolean(filter.whose || filter.complaint || filter.held || filter.status !== 'standing')}>
+        <TextField label="Unit or case number" name="q" defaultValue={filter.q} autoComplete="off" className="w-52 max-sm:w-full" />
+        <SelectField label="Site" name="site" placeholder="Any site" defaultValue={filter.site} options={sites.map(({ id, name }) => ({ value: id, label: name }))} className="w-52 max-sm:min-w-0 max-sm:flex-1" />
         <input type="hidden" name="sort" value={filter.sort} />
         <input type="hidden" name="direction" value={filter.direction} />
       </FilterBar>
@@ -102,6 +91,26 @@ export default async function CasesPage({ searchParams }: { searchParams: Promis
           <ListKeys searchId="q" />
         </div>
       </div>
+    </>
+  );
+}
+
+interface MoreProps {
+  filter: CaseList['query'];
+  people: readonly { id: string; name: string }[];
+  complaints: readonly { id: string; name: string }[];
+  meId: string;
+}
+
+/** What the views above cover for most people. */
+function MoreFilters({ filter, people, complaints, meId }: MoreProps) {
+  const others = people.filter(({ id }) => id !== meId).map(({ id, name }) => ({ value: id, label: name }));
+  return (
+    <>
+      <SelectField label="State" name="status" defaultValue={filter.status} options={STATUSES} />
+      <SelectField label="With" name="whose" placeholder="Anybody" defaultValue={filter.whose} options={[{ value: 'me', label: 'Me' }, { value: 'nobody', label: 'Nobody' }, ...others]} />
+      <SelectField label="Complaint" name="complaint" placeholder="Any" defaultValue={filter.complaint} options={complaints.map(({ id, name }) => ({ value: id, label: name }))} />
+      <SelectField label="Release" name="held" placeholder="Any" defaultValue={filter.held} options={[{ value: 'yes', label: 'Do not release' }]} />
     </>
   );
 }
