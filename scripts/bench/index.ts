@@ -3,7 +3,8 @@
  * the limit. The exit code says whether all hold; times are for reading only.
  */
 import { answers } from './answers';
-import { compare, type Ratio } from './compare';
+import { casePage } from './case-page';
+import { compare, compareMeasured, type Ratio } from './compare';
 import { whatIfs } from './what-ifs';
 
 const shown = ({ median, low, high }: Ratio) => `${median.toFixed(2)} (${low.toFixed(2)} to ${high.toFixed(2)})`;
@@ -30,6 +31,24 @@ function report(name: string, ratio: Ratio, holds: boolean, limit: string) {
   console.log(`\nAn answer: ${about}\n  with its ranking ${ms(measured.a)}\n  insert and audit ${ms(measured.b)}`);
   report('p50', measured.ratio, measured.ratio.low <= 4, 'at most 4');
   report('p95', measured.ratioP95, measured.ratioP95.low <= 4, 'at most 4');
+}
+
+{
+  const page = await casePage();
+  const { bare, whole, found } = await page.scripts();
+  const kib = (bytes: number) => `${(bytes / 1024).toFixed(1)} KiB`;
+  console.log(`\nThe case page on a phone\n  script until the first answer can be saved ${kib(whole)} gzip, of a bare page ${kib(bare)}`);
+  const ratio = whole / bare;
+  report('script / bare page', { median: ratio, low: ratio, high: ratio }, ratio <= 1.6, 'at most 1.6');
+  if (found.length > 0) report(`first script has the ${found.join(' and the ')}`, { median: 1, low: 1, high: 1 }, false, 'never');
+  const { answer, toggle, shifts, close } = await page.taps();
+  const measured = await compareMeasured({ a: answer, b: toggle }, page.turns);
+  console.log(`  a tap to the next frame, ${page.slower} times slower\n  an answer        ${ms(measured.a)}\n  toggles a class  ${ms(measured.b)}`);
+  report('tap / toggle, p50', measured.ratio, measured.ratio.low <= 5, 'at most 5');
+  const shift = await shifts();
+  report('layout shift', { median: shift, low: shift, high: shift }, shift <= 0.02, 'at most 0.02');
+  await close();
+  await page.close();
 }
 
 process.exit(allHold ? 0 : 1);

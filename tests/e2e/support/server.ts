@@ -51,6 +51,8 @@ export async function startServer() {
   return {
     url: `http://127.0.0.1:${port}`,
     database,
+    /** Where it keeps photos. */
+    storage: storage.settings,
     /** What was sent so far, the newest first. */
     async letters(): Promise<Letter[]> {
       return (await (await fetch(`${mail.page}/letters.json`)).json()) as Letter[];
