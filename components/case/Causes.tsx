@@ -70,7 +70,7 @@ function Cause({ cause, reasons, rulebook, decibans }: { cause: CauseView; reaso
   // The reasons may have changed under the one that was left out.
   const without = left && reasons.find(({ findingIds }) => findingIds.join() === left.findingIds.join());
   return (
-    <li data-cause={cause.causeId} className="border-b border-rule">
+    <li data-cause={cause.causeId} data-p={cause.p} className="border-b border-rule">
       <details className="disclosure" name={undefined}>
         <summary className="flex min-h-18 items-center gap-3 py-2">
           <SightGlass
