@@ -68,12 +68,12 @@ export function TallComposition({ levels }: { levels: Levels }) {
         <g transform="translate(36 120)"><Intake level={levels.intake} /></g>
         <path d="M4 138H24M4 156H24M4 174H24" strokeWidth="2" />
 
-        <OilLine d="M174 624V470Q174 450 194 450H200" />
+        <OilLine d="M182 624V462Q182 448 192 448H200" />
         <OilLine d="M288 466V624" />
         <Arrow x={288} y={592} turn={90} color="var(--paper)" />
         <path d="M112 616H344V676L316 664 284 682 252 664 220 682 188 664 156 682 112 668Z" fill="var(--paper)" strokeWidth="2.4" />
         <text className="label text-[25px]" x="228" y="656" textAnchor="middle" fill="var(--ink-soft)" stroke="none">Engine</text>
-        <g transform="translate(156 518)"><FeedGlass level={levels['oil-feed']} standing /></g>
+        <g transform="translate(164 518)"><FeedGlass level={levels['oil-feed']} standing /></g>
 
         <path d="M64 399H288" strokeWidth="1.8" strokeDasharray="16 5 3 5" />
         <g transform="translate(96 399)"><Gear level={levels.drive} /></g>
@@ -89,8 +89,8 @@ export function TallComposition({ levels }: { levels: Levels }) {
         <g transform="translate(524 212)"><Dryer level={levels.dryer} /></g>
         <g transform="translate(388 444)"><Tanks level={levels['tanks-and-system']} /></g>
 
-        <path d="M344 636C364 636 364 664 362 690" strokeWidth="1.8" />
-        <g transform="translate(362 690) scale(0.76)">
+        <path d="M344 636C362 636 362 664 358 690" strokeWidth="1.8" />
+        <g transform="translate(358 690) scale(0.74)">
           <Tag level={levels['vehicle-and-history']}><path d="M-44 34H44M-44 52H44M-44 70H14" strokeWidth="2" /></Tag>
         </g>
       </g>

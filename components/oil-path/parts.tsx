@@ -42,7 +42,7 @@ function Oil({ level, box: [x, y, width, height], within, pipe }: PartProps & { 
         </mask>
       )}
       <g {...(within !== undefined ? { clipPath: `url(#${id})` } : { mask: `url(#${id})` })}>
-        <rect className="oil-level" style={{ '--level': level } as CSSProperties} x={x - 4} y={y} width={width + 8} height={height} fill="var(--oil-fill)" stroke="var(--oil-ink)" strokeWidth="3" />
+        <rect className="oil-level" style={{ '--level': level } as CSSProperties} x={x - 4} y={y} width={width + 8} height={height} fill="var(--oil-fill)" stroke={level > 0 ? 'var(--oil-ink)' : 'none'} strokeWidth="3" />
       </g>
     </>
   );

@@ -33,7 +33,7 @@ export const WIDE: Composition = {
     'oil-feed': { box: [124, 294, 220, 108], label: [130, 298, 200, 54], align: 'left', lean: 'end' },
     'crankcase-and-drain': { box: [386, 336, 232, 170], label: [386, 450, 232, 56], align: 'center', lean: 'start' },
     drive: { box: [614, 330, 214, 94], label: [710, 346, 118, 62], align: 'left', lean: 'center' },
-    'unloader-and-governor': { box: [462, 16, 228, 80], label: [542, 16, 148, 80], align: 'left', lean: 'center' },
+    'unloader-and-governor': { box: [462, 16, 240, 80], label: [542, 16, 172, 80], align: 'left', lean: 'center' },
     'vehicle-and-history': { box: [136, 184, 268, 108], label: [266, 194, 138, 90], align: 'left', lean: 'center' },
   },
 };
@@ -48,11 +48,11 @@ export const TALL: Composition = {
     'discharge-line': { box: [190, 18, 98, 82], label: [190, 20, 98, 36], align: 'center', lean: 'end' },
     dryer: { box: [204, 102, 84, 114], label: [205, 181, 83, 34], align: 'center', lean: 'start' },
     'tanks-and-system': { box: [192, 218, 96, 112], label: [192, 285, 96, 44], align: 'center', lean: 'start' },
-    'oil-feed': { box: [0, 260, 100, 50], label: [0, 264, 76, 42], align: 'left', lean: 'center' },
-    'crankcase-and-drain': { box: [98, 178, 93, 106], label: [98, 236, 93, 46], align: 'center', lean: 'start' },
+    'oil-feed': { box: [0, 258, 102, 50], label: [0, 262, 78, 42], align: 'left', lean: 'center' },
+    'crankcase-and-drain': { box: [98, 178, 93, 106], label: [105, 236, 86, 46], align: 'center', lean: 'start' },
     drive: { box: [4, 176, 80, 82], label: [4, 222, 78, 34], align: 'center', lean: 'start' },
-    'unloader-and-governor': { box: [97, 0, 92, 64], label: [97, 0, 92, 44], align: 'center', lean: 'end' },
-    'vehicle-and-history': { box: [150, 334, 138, 54], label: [208, 338, 80, 46], align: 'left', lean: 'center' },
+    'unloader-and-governor': { box: [97, -6, 92, 70], label: [97, -6, 92, 46], align: 'center', lean: 'end' },
+    'vehicle-and-history': { box: [150, 334, 138, 54], label: [211, 338, 77, 46], align: 'left', lean: 'center' },
   },
 };
 
