@@ -4,6 +4,7 @@ import { fileURLToPath } from 'node:url';
 // Before anything of Next's.
 import { Browser } from './next-request';
 import { NextRequest } from 'next/server';
+import { DescribedAnswers } from './described';
 
 const HOST = 'http://carryover.test';
 const app = fileURLToPath(new URL('../../app', import.meta.url));
@@ -24,6 +25,8 @@ function routeOf(path: string): { folder: string; params: Record<string, string>
   throw new Error(`No route answers ${path}`);
 }
 
+let described: Promise<DescribedAnswers> | undefined;
+
 export interface ApiCall {
   method?: 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE';
   /** "/api/v1/units?limit=2" */
@@ -43,7 +46,7 @@ export interface ApiAnswer {
   json: Record<string, unknown> & { detail?: string; errors?: Record<string, string> };
 }
 
-/** Sends a request to the route that answers its path, in Next's own request scope. */
+/** Sends a request to the route that answers its path, in Next's own request scope, and holds the answer to the document. */
 export async function callApi({ method = 'GET', path, body, token, browser = new Browser(), headers: more = {} }: ApiCall): Promise<ApiAnswer> {
   const url = new URL(path, HOST);
   const { folder, params } = routeOf(url.pathname);
@@ -58,5 +61,13 @@ export async function callApi({ method = 'GET', path, body, token, browser = new
   const request = new NextRequest(url, { method, headers, ...(body !== undefined && { body: JSON.stringify(body) }) });
   const response = await browser.act(path, () => handle(request, { params: Promise.resolve(params) }), headers);
   const text = await response.text();
+  const problem = (await (described ??= DescribedAnswers.fromRoute())).problemWith({
+    method,
+    path: folder.slice('api/v1'.length).replaceAll('[', '{').replaceAll(']', '}'),
+    status: response.status,
+    contentType: response.headers.get('content-type'),
+    text,
+  });
+  if (problem) throw new Error(problem);
   return { status: response.status, headers: response.headers, json: text === '' ? {} : (JSON.parse(text) as ApiAnswer['json']) };
 }

@@ -1,4 +1,5 @@
 import { NextRequest } from 'next/server';
+import { DescribedAnswers } from '@/tests/support/described';
 import type { Browser } from '@/tests/support/next-request';
 import { load } from './find-routes';
 import type { ActionRow, FormFields, Made, PageRow, Query, RouteRow, Row } from './row';
@@ -83,6 +84,15 @@ async function textOf(response: Response): Promise<string> {
   return new TextDecoder().decode(first?.value);
 }
 
+let described: Promise<DescribedAnswers> | undefined;
+
+/** Every answer of the API, refusals included, is as its own document says. */
+async function problemWithAnswer({ route, method }: RouteRow<Made>, response: Response, text: string): Promise<string | undefined> {
+  if (!route.startsWith('api/v1/') || route.endsWith('openapi.json')) return undefined;
+  const path = route.slice('api/v1'.length).replaceAll('[', '{').replaceAll(']', '}');
+  return (await (described ??= DescribedAnswers.fromRoute())).problemWith({ method, path, status: response.status, contentType: response.headers.get('content-type'), text });
+}
+
 async function tryRoute(row: RouteRow<Made>, made: Made, browser: Browser, change: Change): Promise<Outcome> {
   const handle = (await load(`${row.route}/route.ts`))[row.method] as (request: NextRequest, context: unknown) => Promise<Response>;
   const query = new URLSearchParams(Object.entries({ ...row.query?.(made), ...change.query }).map(([name, value]) => [name, String(value)]));
@@ -98,6 +108,8 @@ async function tryRoute(row: RouteRow<Made>, made: Made, browser: Browser, chang
   try {
     const response = await browser.act(path, () => handle(request, { params }), headers);
     const text = await textOf(response);
+    const notAsDescribed = await problemWithAnswer(row, response, text);
+    if (notAsDescribed) return { kind: 'broken', status: response.status, message: notAsDescribed, text };
     const kind = response.status >= 500 ? 'broken' : response.status >= 400 ? 'refused' : 'done';
     return { kind, status: response.status, message: text, text, ...(response.headers.get('location') && { redirect: response.headers.get('location') ?? '' }) };
   } catch (error) {

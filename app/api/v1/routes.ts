@@ -1,0 +1,86 @@
+import * as cases from './cases/route';
+import * as casesId from './cases/[id]/route';
+import * as casesIdAcknowledgements from './cases/[id]/acknowledgements/route';
+import * as casesIdAssign from './cases/[id]/assign/route';
+import * as casesIdCall from './cases/[id]/call/route';
+import * as casesIdEvents from './cases/[id]/events/route';
+import * as casesIdFindings from './cases/[id]/findings/route';
+import * as casesIdFindingsFindingIdNotes from './cases/[id]/findings/[findingId]/notes/route';
+import * as casesIdKit from './cases/[id]/kit/route';
+import * as casesIdPhotos from './cases/[id]/photos/route';
+import * as casesIdReasons from './cases/[id]/reasons/route';
+import * as casesIdRecord from './cases/[id]/record/route';
+import * as casesIdReopen from './cases/[id]/reopen/route';
+import * as casesIdRulebook from './cases/[id]/rulebook/route';
+import * as deviceCases from './device/cases/route';
+import * as editionsId from './editions/[id]/route';
+import * as fitsId from './fits/[id]/route';
+import * as fitsIdStrike from './fits/[id]/strike/route';
+import * as fitsIdTakeOut from './fits/[id]/take-out/route';
+import * as models from './models/route';
+import * as modelsId from './models/[id]/route';
+import * as modelsIdHide from './models/[id]/hide/route';
+import * as modelsIdShow from './models/[id]/show/route';
+import * as people from './people/route';
+import * as photosIdArrived from './photos/[id]/arrived/route';
+import * as photosIdHidden from './photos/[id]/hidden/route';
+import * as photosIdMarks from './photos/[id]/marks/route';
+import * as photosIdPicture from './photos/[id]/picture/route';
+import * as photosIdThumbnail from './photos/[id]/thumbnail/route';
+import * as profile from './profile/route';
+import * as profileUnits from './profile/units/route';
+import * as rulebook from './rulebook/route';
+import * as sites from './sites/route';
+import * as sitesId from './sites/[id]/route';
+import * as units from './units/route';
+import * as unitsId from './units/[id]/route';
+import * as unitsIdFits from './units/[id]/fits/route';
+import * as unitsIdHide from './units/[id]/hide/route';
+import * as unitsIdReadings from './units/[id]/readings/route';
+import * as unitsIdReadingsReadingIdStrike from './units/[id]/readings/[readingId]/strike/route';
+import * as unitsIdShow from './units/[id]/show/route';
+
+/** Every route of the API by its path; a test holds this to the folders. */
+export const ROUTES = {
+  '/cases': cases,
+  '/cases/{id}': casesId,
+  '/cases/{id}/acknowledgements': casesIdAcknowledgements,
+  '/cases/{id}/assign': casesIdAssign,
+  '/cases/{id}/call': casesIdCall,
+  '/cases/{id}/events': casesIdEvents,
+  '/cases/{id}/findings': casesIdFindings,
+  '/cases/{id}/findings/{findingId}/notes': casesIdFindingsFindingIdNotes,
+  '/cases/{id}/kit': casesIdKit,
+  '/cases/{id}/photos': casesIdPhotos,
+  '/cases/{id}/reasons': casesIdReasons,
+  '/cases/{id}/record': casesIdRecord,
+  '/cases/{id}/reopen': casesIdReopen,
+  '/cases/{id}/rulebook': casesIdRulebook,
+  '/device/cases': deviceCases,
+  '/editions/{id}': editionsId,
+  '/fits/{id}': fitsId,
+  '/fits/{id}/strike': fitsIdStrike,
+  '/fits/{id}/take-out': fitsIdTakeOut,
+  '/models': models,
+  '/models/{id}': modelsId,
+  '/models/{id}/hide': modelsIdHide,
+  '/models/{id}/show': modelsIdShow,
+  '/people': people,
+  '/photos/{id}/arrived': photosIdArrived,
+  '/photos/{id}/hidden': photosIdHidden,
+  '/photos/{id}/marks': photosIdMarks,
+  '/photos/{id}/picture': photosIdPicture,
+  '/photos/{id}/thumbnail': photosIdThumbnail,
+  '/profile': profile,
+  '/profile/units': profileUnits,
+  '/rulebook': rulebook,
+  '/sites': sites,
+  '/sites/{id}': sitesId,
+  '/units': units,
+  '/units/{id}': unitsId,
+  '/units/{id}/fits': unitsIdFits,
+  '/units/{id}/hide': unitsIdHide,
+  '/units/{id}/readings': unitsIdReadings,
+  '/units/{id}/readings/{readingId}/strike': unitsIdReadingsReadingIdStrike,
+  '/units/{id}/show': unitsIdShow,
+};

@@ -1,0 +1,53 @@
+import { z } from 'zod';
+import { rulebookShape } from '@/lib/diagnose/schema-shape';
+import { setUp, stage } from './case-state';
+import { count, day, id, instant, probability } from './common';
+
+/** What a device asks for, to go on without a connection. */
+
+const row = z.object({
+  id,
+  checkId: z.string(),
+  stage,
+  source: z.string(),
+  askedBecause: z.string(),
+  kind: z.string(),
+  shares: z.array(z.object({ state: z.string(), share: probability })),
+  reliability: z.number(),
+  valueTyped: z.string().nullable(),
+  errorTyped: z.string().nullable(),
+  unit: z.string().nullable(),
+  valueSi: z.number().nullable(),
+  errorSi: z.number().nullable(),
+  person: z.string(),
+  correctedAt: instant,
+  receivedAt: instant,
+  late: z.boolean(),
+});
+
+export const caseKit = z
+  .object({
+    caseId: id,
+    editionId: id,
+    organisationId: id,
+    personId: id,
+    version: count,
+    status: z.string(),
+    vehicleState: setUp,
+    labourRatePerHour: z.number().nullable(),
+    timeZone: z.string(),
+    rows: z.array(row),
+    notes: z.array(z.object({ id, findingId: id, text: z.string(), person: z.string(), at: instant })),
+    run: z.object({ id, recordFacts: z.record(z.string(), z.union([z.string(), z.number()])), becauseOf: z.string().nullable() }),
+    previous: z.array(z.object({ causeId: z.string(), p: probability })).nullable(),
+    acknowledged: z.array(z.object({ cautionId: z.string(), dangers: z.array(z.string()) })),
+    acknowledgedOn: day,
+    person: z.object({ name: z.string(), units: z.record(z.string(), z.string()), decimal: z.enum(['.', ',']).optional() }),
+  })
+  .meta({ id: 'CaseKit' });
+
+export const editionAnswer = z.object({ id, rulebook: rulebookShape }).meta({ id: 'Edition' });
+
+export const casesToKeepAnswer = z.object({ cases: z.array(z.object({ id, version: count, thumbnails: z.array(z.string()) })) }).meta({ id: 'CasesToKeep' });
+
+export const events = z.string().meta({ description: '“changed” whenever the case may have been written to; nothing of the case itself.' });
