@@ -49,6 +49,8 @@ export const SHOTS: readonly Shot[] = [
   shot(`${IN}/cases/[id]`, 'case', 'technician', ({ openCase }) => openCase && `/cases/${openCase}`),
   shot(`${IN}/cases/[id]`, 'case-called', 'technician', ({ calledCase }) => calledCase && `/cases/${calledCase}`),
   shot(`${IN}/cases/[id]`, 'case-past', 'technician', ({ pastMoment }) => pastMoment),
+  shot(`${IN}/cases/[id]/history`, 'case-history', 'technician', ({ openCase }) => openCase && `/cases/${openCase}/history`),
+  shot(`${IN}/cases/[id]/history`, 'case-history-compared', 'technician', ({ pastMoment }) => pastMoment && `${pastMoment.replace('?', '/history?')}&with=2000-01-01`),
   shot(`${IN}/cases/[id]`, 'case-not-found', 'technician', `/cases/${NOWHERE}`),
 
   shot(`${IN}/units`, 'units', 'technician', '/units'),

@@ -53,7 +53,7 @@ export const readCase = defineRead({
       rulebook,
       state: at ? { ...state, status: statusAt(events) } : state,
       reasons: buildReasons(parts),
-      otherHolds: (await holdsOfUnit(tx, { ...of, unitId: caseHead.unitId })).filter((other) => other.caseId !== of.caseId),
+      otherHolds: at ? [] : (await holdsOfUnit(tx, { ...of, unitId: caseHead.unitId })).filter((other) => other.caseId !== of.caseId),
       assignedTo: caseHead.assignedTo,
       calls: callViews(calls, events),
       events: events.map(({ at: when, ...event }) => ({ ...event, at: when.toISOString() })),

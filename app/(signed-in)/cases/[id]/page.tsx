@@ -6,10 +6,10 @@ import { CallForm } from '@/components/case/CallForm';
 import { Calls } from '@/components/case/Calls';
 import { CaseDesk } from '@/components/case/CaseDesk';
 import { HAND_COOKIE, handFrom } from '@/components/case/hand';
-import { Moments } from '@/components/case/Moments';
 import { ReopenForm } from '@/components/case/ReopenForm';
 import { PhotosOfCase } from '@/components/photos/PhotosOfCase';
 import { timeText } from '@/components/case/words';
+import { ButtonLink } from '@/components/ui/Button';
 import { Notice } from '@/components/ui/Notice';
 import { PageHeader } from '@/components/ui/PageHeader';
 import { Tag } from '@/components/ui/Tag';
@@ -75,7 +75,7 @@ export default async function CasePage({ params, searchParams }: Props) {
       </section>
       <section aria-labelledby="history" className="mt-12 grid gap-4 border-t-2 border-ink pt-6">
         <h2 id="history">History</h2>
-        <Moments key={state.version} view={view} timeZone={head.timeZone} />
+        <p><ButtonLink variant="quiet" href={`/cases/${head.id}/history`}>Slide back through this case</ButtonLink></p>
         {works && <AssignForm action={assignFromForm} caseId={head.id} people={people} assignedTo={view.assignedTo} />}
         <ul className="grid gap-1 text-ink-soft">
           {view.events.map((event) => (
