@@ -45,8 +45,7 @@ export default function PhotoDialog({ photo, onClose }: { photo: ShownPhoto; onC
     setSaving(true);
     setProblem(null);
     try {
-      await saveMarks(photo, { strokes, description: description.trim() });
-      await refresh();
+      if (await saveMarks(photo, { strokes, description: description.trim() })) await refresh();
       dialog.current?.close();
     } catch (error) {
       setProblem(error instanceof Error ? error.message : 'It could not be saved. Try again.');

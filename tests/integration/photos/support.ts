@@ -12,9 +12,9 @@ export const noise = (width: number, height: number) => sharp({ create: { width,
 export const smallJpeg = (width = 400, height = 300) => noise(width, height).jpeg({ quality: 60 }).toBuffer();
 
 /** As a phone makes it: lying on its side, with the place and the camera in it. */
-export const jpegWithPlace = (width = 400, height = 300) =>
+export const jpegWithPlace = (width = 400, height = 300, quality = 60) =>
   noise(width, height)
-    .jpeg({ quality: 60 })
+    .jpeg({ quality })
     .withMetadata({ orientation: 6 })
     .withExifMerge({
       IFD0: { Make: 'Camera' },
