@@ -46,7 +46,7 @@ else await runCommand(test.run, async (run) => {
       return page;
     };
 
-    const places = { ...(await findPlaces(go)), ...(own && (await mailedLinks(go, await as('nobody'), base, own.mailPage))) };
+    const places = { ...(await findPlaces(go)), ...(own && (await mailedLinks(go, await as('nobody'), base, own.letters))) };
     if (!values.only) rmSync(FOLDER, { recursive: true, force: true });
     mkdirSync(FOLDER, { recursive: true });
     const wanted = SHOTS.filter(({ name }) => name.startsWith(values.only));

@@ -66,11 +66,11 @@ export function CaseTable({ rows, sort, sortHref, now }: Props) {
               </span>
               <HoldMark checks={row.holds} />
             </th>
-            <td role="cell" className={cell()}>
+            <td role="cell" className={cell('lg:whitespace-nowrap')}>
               {row.siteName}
               {row.odometer && <Soft><span className="figure">{row.odometer}</span></Soft>}
             </td>
-            <td role="cell" className={cell()}>
+            <td role="cell" className={cell('lg:whitespace-nowrap')}>
               <span className="text-ink-soft lg:hidden">With </span>
               {row.assignedTo ?? 'nobody'}
             </td>

@@ -23,6 +23,10 @@ const CHANGES: Record<Stage, string> = {
   broken: 'alter table compressor_model rename to mislaid; alter table "case" rename to mislaid_too',
 };
 
+/** Makes a database that nobody else uses be as a stage needs it. */
+export const become = (superuserUrl: string, stage: Stage): Promise<void> =>
+  withClient(superuserUrl, async (client) => void (await client.query(CHANGES[stage])));
+
 /** The built application over a demo of its own, which may be emptied and broken. Stops with the run's other processes. */
 export async function startOwnServer(run: Run) {
   const { processes, steps } = run;
@@ -54,8 +58,8 @@ export async function startOwnServer(run: Run) {
     startWorker(processes, { env, log: log('worker') });
     return {
       url: `http://127.0.0.1:${port}`,
-      mailPage: mail.page,
-      become: (stage: Stage) => withClient(database.superuserUrl, async (client) => void (await client.query(CHANGES[stage]))),
+      letters: async () => (await (await fetch(`${mail.page}/letters.json`)).json()) as { links: string[] }[],
+      become: (stage: Stage) => become(database.superuserUrl, stage),
       removeFiles: () => rmSync(folder, { recursive: true, force: true }),
     };
   });

@@ -1,4 +1,4 @@
-import { mkdtempSync, rmSync } from 'node:fs';
+import { mkdtempSync, readFileSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { inject } from 'vitest';
@@ -57,6 +57,8 @@ export async function startServer() {
     async letters(): Promise<Letter[]> {
       return (await (await fetch(`${mail.page}/letters.json`)).json()) as Letter[];
     },
+    /** What the web server has logged so far. */
+    webLog: () => readFileSync(log('web'), 'utf8'),
     async stop() {
       await processes.stopAll();
       await database.drop();
