@@ -20,7 +20,9 @@ export interface Taken {
 /** Goes to the page once, and pictures it whole in every size and theme. */
 export async function take(page: Page, url: string, { name, as }: Shot, folder: string): Promise<Taken> {
   await page.setViewportSize(SIZES[0]);
-  await page.goto(url, { waitUntil: 'load' });
+  await page.goto(url);
+  // The outline of a page that is still fetched has no heading, and neither has one that leads elsewhere.
+  await page.locator('h1').waitFor();
   await page.evaluate(() => document.fonts.ready);
   const files: Taken['files'] = [];
   for (const size of SIZES) {

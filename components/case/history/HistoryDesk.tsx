@@ -13,7 +13,7 @@ import { Comparison } from './Comparison';
 import { MomentSlider } from './MomentSlider';
 import { useMoments, type Moment } from './use-moment';
 
-interface Props extends Pick<ComponentProps<typeof CaseDesk>, 'hand' | 'decimalMark'> {
+interface Props extends Omit<ComponentProps<typeof CaseDesk>, 'view'> {
   view: CaseView;
   steps: readonly Step[];
   /** What the server rendered, by instant. */
