@@ -8,7 +8,7 @@ import { SignedInFrame } from './signed-in-frame';
 
 export const metadata: Metadata = { title: 'Not found' };
 
-const WHY = 'It was never here, it was removed, or it belongs to another organisation. Nothing was changed.';
+const WHY = 'It was never here, it was removed, or it belongs to another organisation.';
 
 /** An address that no page has: inside the shell for whoever is signed in. */
 export default async function NotFound() {
@@ -24,7 +24,7 @@ export default async function NotFound() {
     <main className="mx-auto grid min-h-dvh max-w-page content-center gap-4 px-4 sm:px-6">
       <Wordmark href="/" />
       <h1>Nothing at this address</h1>
-      <p className="max-w-prose">{WHY}</p>
+      <p className="max-w-prose">{WHY} Nothing was changed.</p>
       <p><ButtonLink href="/">To the start</ButtonLink></p>
     </main>
   );

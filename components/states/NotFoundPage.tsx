@@ -14,7 +14,7 @@ interface Props {
 export function NotFoundPage({ kind, children, to }: Props) {
   return (
     <>
-      <PageHeader title={`No such ${kind}`} />
+      <PageHeader title={`No such ${kind}`} lead="Nothing was changed." />
       <EmptyState title={`There is no ${kind} at this address`} action={<ButtonLink href={to.href}>{to.label}</ButtonLink>}>
         {children}
       </EmptyState>

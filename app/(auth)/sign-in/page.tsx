@@ -4,6 +4,7 @@ import { redirect } from 'next/navigation';
 import { homeFor } from '@/lib/auth/navigation';
 import { returnPath } from '@/lib/auth/return-path';
 import { getContext } from '@/lib/auth/session';
+import { Doorway } from '@/components/sign-in/Doorway';
 import { SignInForm } from '@/components/sign-in/SignInForm';
 import { signIn } from './actions';
 
@@ -19,12 +20,12 @@ export default async function SignInPage({ searchParams }: Props) {
   const ctx = await getContext();
   if (ctx) redirect(next ?? homeFor(ctx.roles));
   return (
-    <div className="mx-auto grid max-w-md gap-8 py-10">
+    <Doorway>
       <h1>Sign in</h1>
       <SignInForm action={signIn} next={next} />
       <p>
         <Link href="/reset-password">Password forgotten?</Link>
       </p>
-    </div>
+    </Doorway>
   );
 }

@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
 import { ButtonLink } from '@/components/ui/Button';
+import { Doorway } from '@/components/sign-in/Doorway';
 import { DeadLink } from '@/components/sign-in/DeadLink';
 import { InvitationForm } from '@/components/sign-in/InvitationForm';
 import { unlessDead } from '@/lib/auth/page';
@@ -17,12 +18,12 @@ export default async function InvitationPage({ params }: { params: Promise<{ tok
   }
   const { organisationName, email, hasSignIn } = invitation.result;
   return (
-    <div className="mx-auto grid max-w-md gap-8 py-10">
+    <Doorway>
       <div className="grid gap-2">
         <h1>Join {organisationName}</h1>
         <p className="text-ink-soft">In Carryover you find out why a compressor passes oil or fails before anybody fits another one.</p>
       </div>
       <InvitationForm action={join} token={token} email={email} hasSignIn={hasSignIn} />
-    </div>
+    </Doorway>
   );
 }

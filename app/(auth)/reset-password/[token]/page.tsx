@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import { Doorway } from '@/components/sign-in/Doorway';
 import { DeadLink } from '@/components/sign-in/DeadLink';
 import { ResetForm } from '@/components/sign-in/ResetForm';
 import { ButtonLink } from '@/components/ui/Button';
@@ -16,9 +17,9 @@ export default async function ResetPage({ params }: { params: Promise<{ token: s
     return <DeadLink action={<ButtonLink href="/reset-password">Ask for a new link</ButtonLink>}>{link.message}</DeadLink>;
   }
   return (
-    <div className="mx-auto grid max-w-md gap-8 py-10">
+    <Doorway>
       <h1>Set a new password</h1>
       <ResetForm action={reset} token={token} />
-    </div>
+    </Doorway>
   );
 }
