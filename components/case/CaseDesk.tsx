@@ -1,6 +1,6 @@
 'use client';
 
-import { useEffect, useRef, useState } from 'react';
+import { useEffect, useRef, useState, type ReactNode } from 'react';
 import { OilPath } from '@/components/oil-path/OilPath';
 import { PhotoStrip } from '@/components/photos/PhotoStrip';
 import { Button } from '@/components/ui/Button';
@@ -29,6 +29,8 @@ const stationName = (id: StationId) => STATIONS.find((station) => station.id ===
 
 interface Props {
   view: CaseView;
+  /** Of the oil path, drawn by the server. */
+  drawing: ReactNode;
   /** As the cookie says, so that the page comes with answers on the right side. */
   hand: Hand;
   /** The mark that the organisation writes. */
@@ -36,7 +38,7 @@ interface Props {
 }
 
 /** Where a case is diagnosed: the oil path at its head, the check at hand, the ranked causes, and what was answered. */
-export function CaseDesk({ view, hand: kept, decimalMark }: Props) {
+export function CaseDesk({ view, drawing, hand: kept, decimalMark }: Props) {
   const { rulebook } = view;
   const handle = useCase(view);
   const { state, reasons } = handle;
@@ -58,7 +60,7 @@ export function CaseDesk({ view, hand: kept, decimalMark }: Props) {
     <div data-hand={hand} className="grid gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,1fr)_minmax(0,27rem)]">
       <div className="grid min-w-0 gap-4 lg:col-span-2">
         <ReleaseHold checks={state.releaseHolds.map((id) => rulebook.checks[id]?.name ?? id)} others={view.otherHolds} />
-        <OilPath suspicion={state.suspicion} open={openChecks(state, rulebook)} picked={station} onPick={pickStation} />
+        <OilPath drawing={drawing} suspicion={state.suspicion} open={openChecks(state, rulebook)} picked={station} onPick={pickStation} />
         <SyncStrip sync={handle.sync} rulebook={rulebook} />
       </div>
       <div className="grid min-w-0 content-start gap-5 border-t-2 border-ink pt-4 print:hidden lg:col-start-1">

@@ -1,15 +1,16 @@
 'use client';
 
-import { useId, useRef, useState, type KeyboardEvent } from 'react';
+import { useId, useRef, useState, type CSSProperties, type KeyboardEvent, type ReactNode } from 'react';
 import { Button } from '@/components/ui/Button';
 import { STATIONS, type StationId } from '@/lib/diagnose/stations';
-import { TallComposition, WideComposition } from './compositions';
 import { directionOf, nextInDirection } from './directions';
-import { buttonPlace, labelPlace } from './places';
+import { buttonPlace, labelPlace, levelOf } from './places';
 import { wholePercents, type Place } from './shares';
 import { StationList } from './StationList';
 
 export interface OilPathProps {
+  /** `OilPathCompositions`, drawn by the server. */
+  drawing: ReactNode;
   /** How much of the suspicion sits where, together 1. */
   suspicion: Readonly<Record<Place, number>>;
   /** How many checks of a station are still open. */
@@ -22,7 +23,7 @@ export interface OilPathProps {
  * The path that oil takes, where a case is worked: each station holds as much oil as suspicion sits there. One stop of
  * the keyboard; arrows walk the drawing as it lies on the screen. The same drawing stands across a page or down a phone.
  */
-export function OilPath({ suspicion, open, picked, onPick }: OilPathProps) {
+export function OilPath({ drawing, suspicion, open, picked, onPick }: OilPathProps) {
   const [asList, setAsList] = useState(false);
   const [stop, setStop] = useState<StationId>(picked ?? 'intake');
   const stations = useRef<HTMLDivElement>(null);
@@ -52,9 +53,8 @@ export function OilPath({ suspicion, open, picked, onPick }: OilPathProps) {
       {asList ? (
         <StationList {...{ percents, suspicion, open, picked, onPick }} />
       ) : (
-        <div className="oil-path-plate">
-          <WideComposition levels={suspicion} />
-          <TallComposition levels={suspicion} />
+        <div className="oil-path-plate" style={levels(suspicion)}>
+          {drawing}
           <div ref={stations} role="toolbar" aria-label="Stations on the oil path" aria-describedby={help} onKeyDown={walk}>
             {STATIONS.map(({ id, name }) => (
               <button
@@ -90,6 +90,8 @@ export function OilPath({ suspicion, open, picked, onPick }: OilPathProps) {
     </section>
   );
 }
+
+const levels = (suspicion: OilPathProps['suspicion']) => Object.fromEntries(STATIONS.map(({ id }) => [levelOf(id), suspicion[id]])) as CSSProperties;
 
 function Key() {
   return (

@@ -4,7 +4,7 @@ import type { OilPathProps } from './OilPath';
 import type { Place } from './shares';
 
 /** The oil path as a list, in the order in which air and oil flow. */
-export function StationList({ percents, suspicion, open, picked, onPick }: OilPathProps & { percents: Readonly<Record<Place, number>> }) {
+export function StationList({ percents, suspicion, open, picked, onPick }: Omit<OilPathProps, 'drawing'> & { percents: Readonly<Record<Place, number>> }) {
   return (
     <ul aria-label="Stations on the oil path" className="border-t border-ink">
       {STATIONS.map(({ id, name }) => (

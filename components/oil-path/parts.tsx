@@ -2,10 +2,12 @@ import { useId, type CSSProperties, type ReactNode } from 'react';
 
 /**
  * The parts of the oil path, each drawn once about an origin of its own and placed by the compositions. Outlines take the
- * stroke of the drawing; grounds are paper. `level` is how far a part is filled with oil, from 0 to 1.
+ * stroke of the drawing; grounds are paper. `level` is how far a part is filled with oil, from 0 to 1, or the style variable that says so.
  */
+type Level = number | `var(${string})`;
+
 interface PartProps {
-  level: number;
+  level: Level;
 }
 
 /** A tube in section: two walls, and what runs inside. */
@@ -42,7 +44,7 @@ function Oil({ level, box: [x, y, width, height], within, pipe }: PartProps & { 
         </mask>
       )}
       <g {...(within !== undefined ? { clipPath: `url(#${id})` } : { mask: `url(#${id})` })}>
-        <rect className="oil-level" style={{ '--level': level } as CSSProperties} x={x - 4} y={y} width={width + 8} height={height} fill="var(--oil-fill)" stroke={level > 0 ? 'var(--oil-ink)' : 'none'} strokeWidth="3" />
+        <rect className="oil-level" style={{ '--level': level } as CSSProperties} x={x - 4} y={y} width={width + 8} height={height} fill="var(--oil-fill)" stroke="var(--oil-ink)" strokeWidth="3" />
       </g>
     </>
   );
@@ -103,7 +105,7 @@ const FINS = [66, 82, 98, 114, 130, 146, 162, 178];
  * Cylinder and head over the crankcase. The origin is the middle of the head's top; the air line passes at y 24, the
  * crank turns at (0, 267), the crankcase stands from -94 to 94 and down to 334. `walls` says where it is open for pipes.
  */
-export function Compressor({ cylinder, crankcase, walls = CRANKCASE_WALLS, film, children }: { cylinder: number; crankcase: number; walls?: string; film?: boolean; children?: ReactNode }) {
+export function Compressor({ cylinder, crankcase, walls = CRANKCASE_WALLS, film, children }: { cylinder: Level; crankcase: Level; walls?: string; film?: boolean; children?: ReactNode }) {
   const metal = useId();
   const hatched = `url(#${metal})`;
   return (

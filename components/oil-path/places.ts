@@ -33,7 +33,7 @@ export const WIDE: Composition = {
     'oil-feed': { box: [124, 294, 220, 108], label: [130, 298, 200, 54], align: 'left', lean: 'end' },
     'crankcase-and-drain': { box: [386, 336, 232, 170], label: [386, 450, 232, 56], align: 'center', lean: 'start' },
     drive: { box: [614, 330, 214, 94], label: [710, 346, 118, 62], align: 'left', lean: 'center' },
-    'unloader-and-governor': { box: [462, 16, 240, 80], label: [542, 16, 172, 80], align: 'left', lean: 'center' },
+    'unloader-and-governor': { box: [462, 16, 252, 80], label: [542, 16, 172, 80], align: 'left', lean: 'center' },
     'vehicle-and-history': { box: [136, 184, 268, 108], label: [266, 194, 138, 90], align: 'left', lean: 'center' },
   },
 };
@@ -55,6 +55,9 @@ export const TALL: Composition = {
     'vehicle-and-history': { box: [150, 334, 138, 54], label: [211, 338, 77, 46], align: 'left', lean: 'center' },
   },
 };
+
+/** The style variable that holds how full a station is drawn. */
+export const levelOf = (station: StationId) => `--at-${station}` as const;
 
 const percent = (share: number) => `${Number((share * 100).toFixed(3))}%`;
 

@@ -5,7 +5,7 @@ import { defaultRulebook } from '@/lib/diagnose/default-rulebook';
 import { accessibilityTree } from './support/accessibility-tree';
 import { expectNoAxeViolations } from './support/axe';
 import { launchBrowser, SIZES } from './support/browser';
-import { press, tabTo, type } from './support/keyboard';
+import { press, tabTo, type, walkTo } from './support/keyboard';
 import { startServer, type TestServer } from './support/server';
 import { demoPerson } from './support/sign-in';
 
@@ -81,7 +81,10 @@ describe.each(SIZES)('the main job by keyboard alone, on a %s', (_name, size) =>
   });
 
   it('enters a measured value, with the message beside it when it can’t be right', async () => {
-    await press(page, /^Cylinder and head/);
+    await tabTo(page, /% suspicion/);
+    // The stations are one stop; arrows walk them.
+    await walkTo(page, /^Cylinder and head/);
+    await page.keyboard.press('Enter');
     await press(page, /^Build-up/);
     const atHand = page.locator('section[aria-labelledby=check-at-hand]');
     await atHand.getByRole('heading', { level: 2 }).waitFor();

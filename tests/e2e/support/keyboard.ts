@@ -3,6 +3,9 @@ import type { Page } from 'playwright-core';
 /** As far as anybody would tab before giving up on a page. */
 const MOST_TABS = 250;
 
+/** More than stand in one line. */
+const MOST_STEPS = 8;
+
 /** What the focused element is called, near enough to what a screen reader says. */
 const focusedName = (page: Page): Promise<string> =>
   page.evaluate(() => {
@@ -24,6 +27,18 @@ export async function tabTo(page: Page, name: RegExp): Promise<void> {
     seen.push(focused.slice(0, 40));
   }
   throw new Error(`Tab never reached ${name} on ${page.url()}; it passed ${[...new Set(seen)].join(' | ')}`);
+}
+
+/** Walks by arrow keys, from the first place on, until something with that name has the focus. */
+export async function walkTo(page: Page, name: RegExp): Promise<void> {
+  await page.keyboard.press('Home');
+  for (const key of ['ArrowRight', 'ArrowDown', 'ArrowLeft', 'ArrowUp']) {
+    for (let presses = 0; presses < MOST_STEPS; presses += 1) {
+      if (name.test(await focusedName(page))) return;
+      await page.keyboard.press(key);
+    }
+  }
+  throw new Error(`No arrow key led to ${name} on ${page.url()}`);
 }
 
 /** Tabs there and presses Enter, or another key. */

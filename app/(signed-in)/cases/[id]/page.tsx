@@ -10,6 +10,7 @@ import { ReopenForm } from '@/components/case/ReopenForm';
 import { PhotosOfCase } from '@/components/photos/PhotosOfCase';
 import { timeText } from '@/components/case/words';
 import { ButtonLink } from '@/components/ui/Button';
+import { OilPathCompositions } from '@/components/oil-path/compositions';
 import { Notice } from '@/components/ui/Notice';
 import { PageHeader } from '@/components/ui/PageHeader';
 import { Tag } from '@/components/ui/Tag';
@@ -62,6 +63,7 @@ export default async function CasePage({ params, searchParams }: Props) {
       <CaseDesk
         key={`${state.at}/${state.status}`}
         view={view}
+        drawing={<OilPathCompositions />}
         hand={handFrom((await cookies()).get(HAND_COOKIE)?.value)}
         decimalMark={decimalMarkOf(ctx.organisation.country) ?? ','}
       />

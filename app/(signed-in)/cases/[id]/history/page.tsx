@@ -2,6 +2,7 @@ import type { Metadata } from 'next';
 import { cookies } from 'next/headers';
 import { HAND_COOKIE, handFrom } from '@/components/case/hand';
 import { HistoryDesk } from '@/components/case/history/HistoryDesk';
+import { OilPathCompositions } from '@/components/oil-path/compositions';
 import { PhotosOfCase } from '@/components/photos/PhotosOfCase';
 import { PageHeader } from '@/components/ui/PageHeader';
 import { orNotFound, pageContext } from '@/lib/auth/page';
@@ -48,6 +49,7 @@ export default async function CaseHistoryPage({ params, searchParams }: Props) {
           known={known}
           at={at}
           withAt={withAt}
+          drawing={<OilPathCompositions />}
           hand={handFrom((await cookies()).get(HAND_COOKIE)?.value)}
           decimalMark={decimalMarkOf(ctx.organisation.country) ?? ','}
         />
