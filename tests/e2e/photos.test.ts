@@ -105,8 +105,13 @@ describe('photos in the bay', () => {
     await expectNoAxeViolations(page, 'section[aria-labelledby=photos]');
   });
 
-  it('forty at once all arrive, and the page goes on answering meanwhile', async () => {
+  it('forty at once all arrive, each sent once by one of two tabs, and the page goes on answering meanwhile', async () => {
     const caseId = await openACase();
+    const second = await context.newPage();
+    await second.goto(page.url());
+    await strip(second).waitFor();
+    const announced: string[] = [];
+    context.on('request', (request) => request.method() === 'POST' && request.url().endsWith(`/cases/${caseId}/photos`) && announced.push(request.url()));
     await page.evaluate(() => {
       const seen = window as unknown as { longestGapMs: number };
       seen.longestGapMs = 0;
@@ -123,6 +128,21 @@ describe('photos in the bay', () => {
     expect(await page.evaluate(() => (window as unknown as { longestGapMs: number }).longestGapMs)).toBeLessThan(1_000);
     await settled(page);
     expect(await tiles(page).count()).toBe(40);
+    expect(announced).toHaveLength(40);
+    await settled(second);
+    expect(await tiles(second).count()).toBe(40);
+    await second.close();
+  });
+
+  it('taken after the session has ended, a photo waits until somebody has signed in again', async () => {
+    const caseId = await openACase();
+    const cookies = await context.cookies();
+    await context.clearCookies();
+    await choose(page, [file('later.jpg', await smallJpeg())]);
+    await strip(page).getByText('Waits').waitFor();
+    await context.addCookies(cookies);
+    await untilListed(page, caseId, 1);
+    await settled(page);
   });
 
   it('an upload that is cut waits, survives a reload, takes what is drawn along, and is seen by somebody else', async () => {

@@ -2,6 +2,7 @@ import { sql } from 'drizzle-orm';
 import { parse as readExif } from 'exifr';
 import sharp from 'sharp';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+import { fileResponse } from '@/lib/auth/file-response';
 import { newId } from '@/lib/ids';
 import { MOST_PHOTO_BYTES } from '@/lib/schemas/photo';
 import type { Ctx } from '@/lib/services/context';
@@ -214,6 +215,17 @@ describe('the thumbnail', () => {
     expect(await stand.storage.head(thumbnailKey(house.organisationId, id))).toEqual({ bytes: before.byteLength, mediaType: 'image/webp' });
     expect(await bytesOf(await read())).toEqual(before);
     expect(await sharp(before).metadata()).toMatchObject({ format: 'webp', width: 320, height: 240 });
+  });
+
+  test('is passed on to be shown and kept by this browser alone, and never to be run', async () => {
+    const { id } = await send(ctx, jpeg, { caseId });
+    const { headers } = await fileResponse(await readThumbnail({ ctx, input: { photoId: id } }));
+    expect(Object.fromEntries(headers)).toMatchObject({
+      'content-type': 'image/webp',
+      'cache-control': 'private, max-age=31536000, immutable',
+      'x-content-type-options': 'nosniff',
+      'content-security-policy': "default-src 'none'; sandbox",
+    });
   });
 
   test('of a photo that was refused is not made', async () => {
