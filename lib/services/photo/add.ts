@@ -45,8 +45,10 @@ export const addPhoto = defineWrite({
     else unchanged();
 
     const photo = await selectAttachment(tx, { organisationId, photoId: input.id });
-    if (!photo || photo.caseId !== input.caseId || photo.bytes < input.bytes) throw conflict('This id belongs to another photo.');
+    if (photo?.caseId !== input.caseId) throw conflict('This id belongs to another photo.');
     const state = asState(photo.state);
+    // What is kept may be smaller than what was sent; what is still to come may not.
+    if (state === 'awaited' && photo.bytes !== input.bytes) throw conflict('This id belongs to another photo.');
     const upload = state === 'awaited' ? await ctx.storage.presignUpload(arrivalKey(organisationId, input.id), { maxBytes: photo.bytes, mediaType: photo.mediaType }) : null;
     return { id: input.id, state, refusal: photo.refusal, upload };
   },

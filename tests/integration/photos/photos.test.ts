@@ -124,8 +124,9 @@ describe('repeats', () => {
     expect(Buffer.from((await kept(standing.id)) ?? [])).toEqual(jpeg);
   });
 
-  test('an id of another case is a mistake', async () => {
+  test('an id of another case or of another file is a mistake', async () => {
     const { id } = await announce(ctx, jpeg, { caseId });
+    expect((await refusalOf(announce(ctx, jpeg.subarray(1), { caseId, id }))).code).toBe('conflict');
     expect((await refusalOf(announce(ctx, jpeg, { caseId: await openACase(house), id }))).code).toBe('conflict');
   });
 });
@@ -139,6 +140,8 @@ describe('the place where it was taken', () => {
     const stored = Buffer.from((await kept(id)) ?? []);
     expect(await readExif(stored, { tiff: true, exif: true, gps: true, xmp: true, iptc: true, icc: false })).toBeUndefined();
     expect(stored.includes('Exif')).toBe(false);
+    expect(stored.byteLength).not.toBe(original.byteLength);
+    expect(await announce(ctx, original, { caseId, id })).toMatchObject({ state: 'stored', upload: null });
     // It lay on its side.
     expect((await listed()).find((photo) => photo.id === id)).toMatchObject({ width: 300, height: 400 });
   });
