@@ -8,7 +8,8 @@ import { problemResponse, refuseForeignOrigin } from './problem';
 import type { Scope } from './scopes';
 
 type Params = Record<string, string | string[] | undefined>;
-export type RouteHandler = (request: Request, context: { params: Promise<Params> }) => Promise<Response>;
+/** Next gives no params to a route without a changing part in its address. */
+export type RouteHandler = (request: Request, context: { params: Promise<Params | undefined> }) => Promise<Response>;
 
 interface Parts {
   params: Params;
@@ -89,7 +90,7 @@ export function route<Schema extends z.ZodType, Result, Answer = Result>(service
       if (!isRead(request.method) && caller.token === null) refuseForeignOrigin(request);
       refuseMissingScope(caller, scope);
       const input = toInput({
-        params: await context.params,
+        params: (await context.params) ?? {},
         query: Object.fromEntries(new URL(request.url).searchParams),
         body: isRead(request.method) ? {} : await jsonBody(request),
         request,

@@ -104,7 +104,7 @@ async function tryRoute(row: RouteRow<Made>, made: Made, browser: Browser, chang
     headers,
     ...(!isRead && { body: change.body ?? JSON.stringify(row.body?.(made) ?? {}) }),
   });
-  const params = Promise.resolve(change.params ?? row.params?.(made) ?? {});
+  const params = Promise.resolve(change.params ?? row.params?.(made));
   try {
     const response = await browser.act(path, () => handle(request, { params }), headers);
     const text = await textOf(response);
