@@ -37,8 +37,9 @@ interface Props<Row> {
 }
 
 /**
- * A ledger, rendered on the server. Sorting is by links, so that a list's state is in its address; on a
- * narrow screen it scrolls sideways inside a region that the keyboard reaches.
+ * A ledger, rendered on the server. Sorting is by links, so that a list's state is in its address. On a phone each row
+ * becomes lines under each other, label and value, and the roles keep it a table to a screen reader; on a screen in
+ * between it scrolls sideways inside a region that the keyboard reaches.
  * @example <DataTable caption="Units" columns={columns} rows={units} rowKey={(u) => u.id} sort={sort} sortHref={(s) => hrefWith({ sort: s.key, direction: s.direction })} empty={<EmptyState title="No unit matches">Clear the filter.</EmptyState>} />
  */
 export function DataTable<Row>({ caption, captionHidden, columns, rows, rowKey, sort, sortHref, empty }: Props<Row>) {
@@ -46,31 +47,39 @@ export function DataTable<Row>({ caption, captionHidden, columns, rows, rowKey, 
   if (rows.length === 0) return empty ?? <EmptyState title="Nothing here yet" />;
   return (
     <div role="region" aria-labelledby={captionId} tabIndex={0} className="scroll-x">
-      <table className="ledger">
+      <table role="table" className="ledger max-sm:block">
         <caption id={captionId} className={captionHidden ? 'sr-only' : 'label text-left text-ink-soft'}>{caption}</caption>
-        <thead>
-          <tr>
+        <thead role="rowgroup" className="max-sm:block max-sm:border-b-2 max-sm:border-ink">
+          <tr role="row" className={classes('max-sm:flex max-sm:flex-wrap max-sm:items-center max-sm:gap-x-5', sortHref && "max-sm:before:text-ink-soft max-sm:before:content-['Sort_by']")}>
             {columns.map((column) => (
               <HeadCell key={column.key} column={column} sort={sort} sortHref={sortHref} />
             ))}
           </tr>
         </thead>
-        <tbody>
+        <tbody role="rowgroup" className="max-sm:block">
           {rows.map((row) => (
-            <tr key={rowKey(row)}>
-              {columns.map((column) => {
-                const Cell = column.rowHeader ? 'th' : 'td';
-                return (
-                  <Cell key={column.key} scope={column.rowHeader ? 'row' : undefined} className={classes(column.numeric && 'numeric')}>
-                    {column.cell(row)}
-                  </Cell>
-                );
-              })}
+            <tr key={rowKey(row)} role="row" className="max-sm:block max-sm:border-b max-sm:border-rule max-sm:py-3">
+              {columns.map((column) => <Cell key={column.key} column={column} row={row} />)}
             </tr>
           ))}
         </tbody>
       </table>
     </div>
+  );
+}
+
+function Cell<Row>({ column, row }: { column: Column<Row>; row: Row }) {
+  const value = column.cell(row);
+  const Tag = column.rowHeader ? 'th' : 'td';
+  return (
+    <Tag
+      role={column.rowHeader ? 'rowheader' : 'cell'}
+      scope={column.rowHeader ? 'row' : undefined}
+      className={classes('max-sm:border-0! max-sm:p-0!', column.numeric && 'numeric', value === null || value === undefined || value === '' ? 'max-sm:hidden' : 'max-sm:flex max-sm:items-baseline max-sm:gap-4')}
+    >
+      {!column.rowHeader && <span aria-hidden="true" className="label w-28 shrink-0 text-left text-ink-soft sm:hidden">{column.header}</span>}
+      <span className="contents max-sm:block max-sm:min-w-0 max-sm:wrap-anywhere">{value}</span>
+    </Tag>
   );
 }
 
@@ -81,11 +90,12 @@ function HeadCell<Row>({ column, sort, sortHref }: { column: Column<Row> } & Pic
   return (
     <th
       scope="col"
+      role="columnheader"
       aria-sort={sorted && (sorted === 'asc' ? 'ascending' : 'descending')}
-      className={classes('label', column.numeric && 'numeric')}
+      className={classes('label max-sm:border-0! max-sm:p-0!', column.numeric && 'numeric', !(column.sortable && sortHref) && 'max-sm:sr-only')}
     >
       {column.sortable && sortHref ? (
-        <Link href={sortHref(next)} scroll={false} className="inline-flex min-h-8 items-end gap-1.5 underline decoration-edge decoration-dotted underline-offset-4 hover:decoration-solid">
+        <Link href={sortHref(next)} scroll={false} className="inline-flex min-h-8 items-end gap-1.5 underline decoration-edge decoration-dotted underline-offset-4 hover:decoration-solid max-sm:min-h-touch max-sm:items-center">
           {words}
           <SortMark direction={sorted} />
         </Link>

@@ -47,12 +47,21 @@ export default async function UnitsPage({ searchParams }: { searchParams: Promis
   return (
     <>
       <PageHeader title="Units" lead="Every vehicle, and what was fitted to it." actions={addLink} />
-      <FilterBar action="/units" label="Filter units" resetHref={isFiltered ? '/units' : undefined}>
-        <TextField label="Number" name="q" defaultValue={q} autoComplete="off" className="w-40" />
-        <SelectField label="Site" name="site" placeholder="Any site" defaultValue={site} options={sites.map(({ id, name }) => ({ value: id, label: name }))} className="w-48" />
-        <SelectField label="Work" name="vocation" placeholder="Any work" defaultValue={vocation} options={termOptions('vocation')} className="w-56" />
-        <SelectField label="Kind" name="kind" placeholder="Any kind" defaultValue={kind} options={termOptions('vehicleKind')} className="w-36" />
-        <SelectField label="List" name="hidden" placeholder="In use" defaultValue={hidden} options={[{ value: 'yes', label: 'Hidden' }]} className="w-36" />
+      <FilterBar
+        action="/units"
+        label="Filter units"
+        resetHref={isFiltered ? '/units' : undefined}
+        moreOpen={Boolean(vocation || kind || hidden)}
+        more={
+          <>
+            <SelectField label="Work" name="vocation" placeholder="Any work" defaultValue={vocation} options={termOptions('vocation')} />
+            <SelectField label="Kind" name="kind" placeholder="Any kind" defaultValue={kind} options={termOptions('vehicleKind')} />
+            <SelectField label="List" name="hidden" placeholder="In use" defaultValue={hidden} options={[{ value: 'yes', label: 'Hidden' }]} />
+          </>
+        }
+      >
+        <TextField label="Number" name="q" defaultValue={q} autoComplete="off" className="w-52 max-sm:w-full" />
+        <SelectField label="Site" name="site" placeholder="Any site" defaultValue={site} options={sites.map(({ id, name }) => ({ value: id, label: name }))} className="w-52 max-sm:min-w-0 max-sm:flex-1" />
       </FilterBar>
       <div className="mt-6 grid gap-6">
         <DataTable
