@@ -2,6 +2,7 @@
 
 import { useState } from 'react';
 import { Button } from '@/components/ui/Button';
+import { Tag } from '@/components/ui/Tag';
 import { TextareaField } from '@/components/ui/TextareaField';
 import type { FindingView, RulebookView } from '@/lib/schemas/case-view';
 import type { Picked } from './at-hand';
@@ -76,27 +77,33 @@ export function Answered({ handle, rulebook, timeZone, readOnly, onPick }: Props
 function Finding({ finding, handle, rulebook, timeZone, readOnly, onPick }: Props & { finding: FindingView }) {
   const check = rulebook.checks[finding.checkId];
   return (
-    <li data-finding={finding.id} data-waits={finding.waits || undefined} className="grid gap-1 border-b border-rule py-3">
-      <p>
-        {check?.name ?? finding.checkId}: <strong className={check?.kind === 'measured' ? 'figure' : undefined}>{finding.answer}</strong>
-        {finding.thinkSo && ' (think so)'}
-      </p>
-      <p className="text-[0.9375rem] text-ink-soft">
-        {SOURCES[finding.source] ? `${SOURCES[finding.source]}, ` : ''}{finding.person}, {timeText(finding.at, timeZone)}
-      </p>
-      {finding.notes.map((note) => (
-        <p key={note.id} className="border-l-4 border-rule pl-3">
-          {note.text} <span className="text-[0.9375rem] text-ink-soft">{note.person}</span>
+    <li data-finding={finding.id} data-waits={finding.waits || undefined} className="grid gap-x-4 border-b border-rule py-1.5 sm:grid-cols-[minmax(0,1fr)_auto]">
+      <div className="py-1">
+        <p>
+          {check?.name ?? finding.checkId}: <strong className={finding.kind === 'measured' ? 'figure' : undefined}>{finding.answer}</strong>
+          {finding.thinkSo && ' (think so)'} {finding.waits && <Tag>waits on this device</Tag>}
         </p>
-      ))}
-      <div className="flex flex-wrap gap-x-2">
+        <p className="text-[0.9375rem] text-ink-soft">
+          {SOURCES[finding.source] ? `${SOURCES[finding.source]}, ` : ''}{finding.person}, {timeText(finding.at, timeZone)}
+        </p>
+      </div>
+      <div className="flex flex-wrap items-center gap-x-2 has-[form]:order-last has-[form]:col-span-full">
         {!readOnly && (
-          <Button variant="quiet" className="border-transparent! px-2!" onClick={() => onPick({ kind: 'check', checkId: finding.checkId })}>
+          <Button variant="quiet" className="border-transparent! px-3!" onClick={() => onPick({ kind: 'check', checkId: finding.checkId })}>
             Change<span className="sr-only">: {check?.name}</span>
           </Button>
         )}
         {handle.state.at === null && <NoteForm finding={finding} handle={handle} about={check?.name ?? ''} />}
       </div>
+      {finding.notes.length > 0 && (
+        <ul className="col-span-full mb-1 grid gap-1">
+          {finding.notes.map((note) => (
+            <li key={note.id} className="border-l-4 border-rule pl-3">
+              {note.text} <span className="text-[0.9375rem] text-ink-soft">{note.person}</span> {note.waits && <Tag>waits on this device</Tag>}
+            </li>
+          ))}
+        </ul>
+      )}
     </li>
   );
 }
@@ -106,7 +113,7 @@ function NoteForm({ finding, handle, about }: { finding: FindingView; handle: Ca
   const { note } = handle;
   if (!open) {
     return (
-      <Button variant="quiet" className="border-transparent! px-2!" onClick={() => setOpen(true)}>
+      <Button variant="quiet" className="border-transparent! px-3!" onClick={() => setOpen(true)}>
         Add a note<span className="sr-only">: {about}</span>
       </Button>
     );

@@ -75,7 +75,7 @@ export function CaseDesk({ view, drawing, hand: kept, decimalMark }: Props) {
         {!readOnly && <HandSwitch hand={hand} onChange={(next) => { setHand(next); keepHand(next); }} />}
       </div>
       <div className="grid min-w-0 content-start gap-8 lg:col-start-2 lg:row-span-2 lg:row-start-2">
-        <Causes state={state} reasons={reasons} rulebook={rulebook} />
+        <Causes state={state} reasons={reasons} rulebook={rulebook} provisional={handle.sync.provisional} />
         {!readOnly && <WhatNext state={state} settle={reasons.settle} rulebook={rulebook} readOnly={readOnly} onPick={pick} />}
       </div>
       <div className="min-w-0 lg:col-start-1">

@@ -3,6 +3,7 @@
 import { useState } from 'react';
 import { Notice } from '@/components/ui/Notice';
 import { SightGlass, percent } from '@/components/ui/SightGlass';
+import { Tag } from '@/components/ui/Tag';
 import type { CaseReasons, CaseState, CauseView, ReasonView, RulebookView } from '@/lib/schemas/case-view';
 import { Reasons } from './Reasons';
 import { useCalmOrder } from './use-calm-order';
@@ -11,17 +12,28 @@ import { changeText } from './words';
 /** Causes under this are in the list, not in the way. */
 const SHOWN = 6;
 
+interface Props {
+  state: CaseState;
+  reasons: CaseReasons;
+  rulebook: RulebookView;
+  /** Worked out on this device; the server's word is still to come. */
+  provisional: boolean;
+}
+
 /** The ranked causes, each with its level, how it moved, and its reasons when it is opened. */
-export function Causes({ state, reasons, rulebook }: { state: CaseState; reasons: CaseReasons; rulebook: RulebookView }) {
+export function Causes({ state, reasons, rulebook, provisional }: Props) {
   const [decibans, setDecibans] = useState(false);
   const list = useCalmOrder(state.causes.map(({ causeId }) => causeId).join());
   const leading = state.causes.slice(0, SHOWN);
   const rest = state.causes.slice(SHOWN);
   const row = (cause: CauseView) => <Cause key={cause.causeId} cause={cause} reasons={reasons.causes[cause.causeId] ?? []} rulebook={rulebook} decibans={decibans} />;
   return (
-    <section aria-labelledby="causes" className="grid gap-3">
+    <section aria-labelledby="causes" className="grid gap-3 border-t-2 border-ink pt-3">
       <div className="flex flex-wrap items-baseline justify-between gap-x-6">
-        <h2 id="causes">What is behind it</h2>
+        <div className="flex flex-wrap items-center gap-x-3">
+          <h2 id="causes">What is behind it</h2>
+          {provisional && <Tag>Provisional</Tag>}
+        </div>
         <label className="flex min-h-touch cursor-pointer items-center gap-2">
           <input type="checkbox" className="size-5" checked={decibans} onChange={(event) => setDecibans(event.target.checked)} />
           Show decibans
