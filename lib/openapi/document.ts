@@ -84,7 +84,7 @@ function operationObject({ method, path, operation }: DescribedOperation): ZodOp
     security: [...(scope ? [{ token: [scope] }] : []), { session: [] }],
     requestParams: { ...(inPath && { path: inPath }), ...(isRead && rest instanceof z.ZodObject && { query: rest }), header: z.object(headers) },
     ...(!isRead && { requestBody: { required: true, content: { 'application/json': { schema: rest } } } }),
-    responses: responsesOf({ method, path, operation }),
+    responses: responsesOf(method, operation),
   };
 }
 
@@ -110,7 +110,7 @@ function inputParts(path: string, { service: { action, input }, params, ifMatch 
 const etag = z.string().meta({ description: 'Names this state, for If-None-Match and If-Match.' });
 const replayed = z.enum(['true']).optional().meta({ description: 'It was done before, and is answered as it was then.' });
 
-function responsesOf({ method, path, operation: { status, ifMatch, doc } }: DescribedOperation): ZodOpenApiResponsesObject {
+function responsesOf(method: Method, { status, ifMatch, doc }: Operation): ZodOpenApiResponsesObject {
   const isRead = method === 'GET';
   const problems: ProblemStatus[] = [401, 403, 404, 409, 422, 500, ...(isRead ? [] : ([400, 413] as const)), ...(ifMatch ? ([412] as const) : []), ...(ifMatch === 'needed' ? ([428] as const) : [])];
   const done = {

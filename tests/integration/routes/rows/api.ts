@@ -46,6 +46,7 @@ export const api = feature({
     return { ...ids, siteId: tenant.siteId, personId: ctx.person.id, readingId: readings[0]?.id ?? '' };
   },
   rows: [
+    { page: '(public)/api/docs', roles: 'anybody' },
     { route: `${V1}/openapi.json`, method: 'GET', roles: 'anybody' },
     { route: `${V1}/cases`, method: 'GET', roles: SEE, query: () => ({ status: 'all', mine: 'yes', limit: '1' }) },
     { route: `${V1}/cases`, method: 'POST', roles: WORK, body: ({ unitId }) => ({ id: newId(), unit: { kind: 'known', unitId }, complaints: ['complaint-oil'] }) },

@@ -1,0 +1,18 @@
+import { DataTable } from '@/components/ui/DataTable';
+import type { Field } from '@/lib/openapi/fields';
+
+/** What something takes or holds, a line for each field. */
+export function FieldTable({ caption, fields, marksOptional = false }: { caption: string; fields: readonly Field[]; marksOptional?: boolean }) {
+  return (
+    <DataTable
+      caption={caption}
+      rows={fields.map((field, index) => ({ ...field, key: `${index} ${field.path}` }))}
+      rowKey={({ key }) => key}
+      columns={[
+        { key: 'name', header: 'Name', rowHeader: true, cell: ({ path, isRequired }) => <><code className="figure text-[0.9375rem]">{path}</code>{marksOptional && !isRequired && <span className="block text-sm font-normal text-ink-soft">optional</span>}</> },
+        { key: 'type', header: 'Is', cell: ({ type, of }) => <span className="block min-w-40 wrap-break-word">{of ? <a href={`#schema-${of}`}>{type}</a> : type}</span> },
+        { key: 'means', header: 'Means', cell: ({ description, when }) => <span className="block min-w-40">{when && <span className="block text-ink-soft">When {when}.</span>}{description}</span> },
+      ]}
+    />
+  );
+}
