@@ -14,8 +14,6 @@ interface Props {
   onOpen: () => void;
 }
 
-const HEIGHT_REM = 7;
-
 /** What a photo is called for who doesn't see it. */
 export function nameOf({ description, takenAt, person }: ShownPhoto, checkName: string | null, timeZone: string): string {
   return `${description || 'Photo'}${checkName ? `, for ${checkName}` : ''}, ${timeText(takenAt, timeZone)}${person ? `, by ${person}` : ''}`;
@@ -28,7 +26,7 @@ export function PhotoTile({ photo, checkName, timeZone, share, onOpen }: Props) 
   const standing = standingOf(photo, share);
   const ratio = photo.width / photo.height;
   return (
-    <li className="grid max-w-full content-start gap-1" style={{ width: `min(100%, ${HEIGHT_REM * ratio}rem)`, minWidth: '3rem' }}>
+    <li className="grid content-start gap-1 [--tall:5.5rem] sm:[--tall:7rem]" style={{ width: `min(100%, calc(var(--tall) * ${ratio}))`, minWidth: '3rem' }}>
       <button type="button" onClick={onOpen} className="relative block min-h-touch w-full overflow-hidden rounded border border-edge bg-sunk hover:border-ink" style={{ aspectRatio: `${photo.width} / ${photo.height}` }}>
         {src ? (
           // eslint-disable-next-line @next/next/no-img-element -- streamed through our own route, at the size that is shown
