@@ -155,7 +155,7 @@ function Enough({ state, rulebook, onPick }: { state: CaseState; rulebook: Ruleb
   const next = best ? ofSuggestion(best, rulebook) : null;
   return (
     <section aria-labelledby="check-at-hand">
-      <h2 id="check-at-hand" tabIndex={-1} className="text-[1.75rem]">Enough is known; repair</h2>
+      <h2 id="check-at-hand" tabIndex={-1} className="scroll-mt-12 text-[1.75rem]">Enough is known; repair</h2>
       <Notice
         title="No open check is worth its time"
         actions={next && <Button variant="quiet" onClick={() => onPick(next.kind === 'check' ? { kind: 'check', checkId: next.checkId } : next)}>Check further all the same</Button>}

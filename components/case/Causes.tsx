@@ -34,7 +34,7 @@ export function Causes({ state, reasons, rulebook, provisional }: Props) {
           <h2 id="causes">What is behind it</h2>
           {provisional && <Tag>Provisional</Tag>}
         </div>
-        <label className="flex min-h-touch cursor-pointer items-center gap-2">
+        <label className="no-print flex min-h-touch cursor-pointer items-center gap-2">
           <input type="checkbox" className="size-5" checked={decibans} onChange={(event) => setDecibans(event.target.checked)} />
           Show decibans
         </label>
@@ -95,7 +95,7 @@ function Cause({ cause, reasons, rulebook, decibans }: { cause: CauseView; reaso
             <span className="block leading-tight font-bold">{name}</span>
             {/* Always a line, so that a level that moves moves nothing else. */}
             <span className="block min-h-[1.3em] text-[0.875rem] leading-[1.3] text-ink-soft">
-              {without ? `without “${without.finding}”` : change && <><Moved rose={rose} /> <span className="figure">{change}</span></>}
+              {without ? 'without that answer' : change && <><Moved rose={rose} /> <span className="figure">{change}</span></>}
             </span>
           </span>
         </summary>

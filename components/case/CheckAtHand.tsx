@@ -46,7 +46,7 @@ export function CheckAtHand({ check, rulebook, handle, suggestion, then, station
         <p className="label text-ink-soft">
           {stationName} · {suggestion ? suggestion.word : 'your choice'}
         </p>
-        <h2 id="check-at-hand" tabIndex={-1} className="mt-1 text-[1.75rem]">{check.prompt}</h2>
+        <h2 id="check-at-hand" tabIndex={-1} className="scroll-mt-12 mt-1 text-[1.75rem]">{check.prompt}</h2>
         {suggestion?.because && <p className="mt-1">{suggestion.because}</p>}
         {then && <p className="mt-1 text-ink-soft">Then: {then.prompt}</p>}
       </header>

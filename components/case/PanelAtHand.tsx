@@ -33,7 +33,7 @@ export function PanelAtHand({ panel, rulebook, handle, stationName, onDone }: Pr
     <section aria-labelledby="check-at-hand" className="grid gap-4">
       <header>
         <p className="label text-ink-soft">{stationName} · {checks.length} checks on one screen</p>
-        <h2 id="check-at-hand" tabIndex={-1} className="mt-1 text-[1.75rem]">{panel.prompt}</h2>
+        <h2 id="check-at-hand" tabIndex={-1} className="scroll-mt-12 mt-1 text-[1.75rem]">{panel.prompt}</h2>
         <p className="mt-1 text-ink-soft">
           About <span className="figure">{minutesText(checks.reduce((sum, { minutes }) => sum + minutes, 0))}</span> for all of them. Answer those that you can; each is saved as you tap it.
         </p>

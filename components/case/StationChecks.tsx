@@ -49,9 +49,9 @@ export function StationChecks({ station, name, state, rulebook, onPick, onClose 
 function Row({ title, detail, onPick }: { title: string; detail: string; onPick: () => void }) {
   return (
     <li className="border-b border-rule">
-      <Button variant="quiet" className="w-full justify-between! border-transparent! text-left!" onClick={onPick}>
+      <Button variant="quiet" className="w-full justify-between! border-transparent! px-2! text-left!" onClick={onPick}>
         <span>{title}</span>
-        <span className="shrink-0 font-normal text-ink-soft">{detail}</span>
+        <span className="max-w-[55%] shrink-0 text-right font-normal text-ink-soft">{detail}</span>
       </Button>
     </li>
   );

@@ -24,7 +24,7 @@ export function WhatNext({ state, settle, rulebook, readOnly, onPick }: Props) {
   return (
     <div className="grid gap-6">
       {suggestions.length > 0 && (
-        <section aria-labelledby="next-checks">
+        <section aria-labelledby="next-checks" className="print:hidden">
           <h2 id="next-checks">Checks that tell most for their time</h2>
           <ol className="mt-2 border-t border-ink">
             {suggestions.map(({ checkIds, panelId, word, minutes, because }) => {
@@ -34,14 +34,14 @@ export function WhatNext({ state, settle, rulebook, readOnly, onPick }: Props) {
                 <li key={checkIds.join()} className="border-b border-rule py-1">
                   <Button
                     variant="quiet"
-                    className="w-full justify-between! border-transparent! text-left!"
+                    className="w-full justify-between! border-transparent! px-2! text-left!"
                     aria-disabled={readOnly || undefined}
                     onClick={() => !readOnly && checkId && onPick(panelId ? { kind: 'panel', panelId } : { kind: 'check', checkId })}
                   >
                     <span>{title}</span>
-                    <span className="shrink-0 text-right font-normal text-ink-soft">{word}, <span className="figure">{minutesText(minutes)}</span></span>
+                    <span className="max-w-[55%] shrink-0 text-right font-normal text-ink-soft">{word}, <span className="figure">{minutesText(minutes)}</span></span>
                   </Button>
-                  {because && <p className="px-5 pb-2 text-[0.9375rem]">{because}</p>}
+                  {because && <p className="px-2 pb-2 text-[0.9375rem]">{because}</p>}
                 </li>
               );
             })}

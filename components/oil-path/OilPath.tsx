@@ -82,7 +82,7 @@ export function OilPath({ drawing, suspicion, open, picked, onPick }: OilPathPro
       )}
       <div className="oil-path-caption">
         <p className="oil-path-none"><span className="label">Not on the path</span> <b className="figure">{percents.none}%</b></p>
-        <p>Oil stands where the suspicion is. {asList ? 'All of it' : 'The stations and this'} make <span className="figure">100%</span>.</p>
+        <p>Oil stands where the suspicion is. The stations and this make <span className="figure">100%</span>.</p>
         {!asList && <Key />}
         <Button variant="quiet" className="no-print justify-self-start" aria-pressed={asList} onClick={() => setAsList(!asList)}>As a list</Button>
       </div>

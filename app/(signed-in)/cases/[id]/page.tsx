@@ -71,14 +71,14 @@ export default async function CasePage({ params, searchParams }: Props) {
       <section aria-labelledby="call" className="mt-12 grid gap-4 border-t-2 border-ink pt-6">
         <h2 id="call">The call</h2>
         {view.calls.length > 0 && <Calls calls={view.calls} rulebook={rulebook} timeZone={head.timeZone} />}
-        {works && state.status === 'open' && <CallForm action={callFromForm} callId={newId()} initial={state} rulebook={rulebook} />}
-        {works && state.status !== 'open' && <ReopenForm action={reopenFromForm} eventId={newId()} caseId={head.id} />}
-        {!works && view.calls.length === 0 && <p>Not called.</p>}
+        {works && state.status === 'open' && <div className="no-print"><CallForm action={callFromForm} callId={newId()} initial={state} rulebook={rulebook} /></div>}
+        {works && state.status !== 'open' && <div className="no-print"><ReopenForm action={reopenFromForm} eventId={newId()} caseId={head.id} /></div>}
+        {view.calls.length === 0 && <p className={works ? 'hidden print:block' : undefined}>Not called.</p>}
       </section>
       <section aria-labelledby="history" className="mt-12 grid gap-4 border-t-2 border-ink pt-6">
         <h2 id="history">History</h2>
         <p><ButtonLink variant="quiet" href={`/cases/${head.id}/history`}>Slide back through this case</ButtonLink></p>
-        {works && <AssignForm action={assignFromForm} caseId={head.id} people={people} assignedTo={view.assignedTo} />}
+        {works && <div className="no-print"><AssignForm action={assignFromForm} caseId={head.id} people={people} assignedTo={view.assignedTo} /></div>}
         <ul className="grid gap-1 text-ink-soft">
           {view.events.map((event) => (
             <li key={event.id}>{timeText(event.at, head.timeZone)}: {event.kind} by {event.person}{event.reason ? `, “${event.reason}”` : ''}</li>
