@@ -17,8 +17,14 @@ const ROWS = [
   { folder: 'app/**', never: DATABASE, because: 'Routes reach the database through a service.' },
   {
     folder: 'components/**',
-    never: [...DATABASE, '@/lib/services', '@/lib/services/**', '@/lib/auth', '@/lib/auth/**'],
+    never: [...DATABASE, '@/lib/services', '@/lib/services/**', '@/lib/auth', '@/lib/auth/**', '@/lib/openapi/answers/**', '@/lib/openapi/document'],
     because: 'Components get their data as properties.',
+    typesAllowed: true,
+  },
+  {
+    folder: 'lib/openapi/**',
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, '@/lib/services/**', '@/lib/auth/session'],
+    because: 'The document is made from schemas alone.',
     typesAllowed: true,
   },
   {

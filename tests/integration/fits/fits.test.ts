@@ -180,7 +180,7 @@ describe('correcting a fit', () => {
     const { version, values } = await fitNow(fitId);
     const input = { ...values, fitId, version };
     await changeFit({ ctx, input: sent(changeFit, { ...input, sealant: 'none' }) });
-    await expect(changeFit({ ctx, input: sent(changeFit, { ...input, sealant: 'heavy-bead' }) })).rejects.toMatchObject({ code: 'conflict', fields: { sealant: 'Stored now: None' } });
+    await expect(changeFit({ ctx, input: sent(changeFit, { ...input, sealant: 'heavy-bead' }) })).rejects.toMatchObject({ code: 'stale', fields: { sealant: 'Stored now: None' } });
   });
 
   test("another organisation's fit is not found", async () => {

@@ -55,7 +55,7 @@ test('a change is refused when somebody saved meanwhile, and when the name is ta
   await expect(changeModel({ ctx, input: sent(changeModel, { ...values, modelId: one.id, version, name: 'brisk 16' }) })).rejects.toMatchObject({ code: 'conflict', fields: { name: 'There is a model Brisk 16 already.' } });
   await changeModel({ ctx, input: sent(changeModel, { ...values, modelId: one.id, version, note: 'Seen with both drains' }) });
   await expect(changeModel({ ctx, input: sent(changeModel, { ...values, modelId: one.id, version, cooling: 'air' }) })).rejects.toMatchObject({
-    code: 'conflict',
+    code: 'stale',
     fields: { note: 'Stored now: Seen with both drains', cooling: 'Stored now: nothing.' },
   });
 });

@@ -17,8 +17,8 @@ describe('the navigation', () => {
   });
 
   test('has the administrator\'s settings for administrators alone', () => {
-    expect(labels(settingsFor(['administrator']))).toEqual(['You', 'Units of measure', 'People', 'Sites', 'Organisation', 'Audit']);
-    expect(labels(settingsFor(['technician', 'engineer', 'manager', 'trainer']))).toEqual(['You', 'Units of measure']);
+    expect(labels(settingsFor(['administrator']))).toEqual(['You', 'Units of measure', 'Tokens', 'People', 'Sites', 'Organisation', 'Audit']);
+    expect(labels(settingsFor(['technician', 'engineer', 'manager', 'trainer']))).toEqual(['You', 'Units of measure', 'Tokens']);
   });
 
   test('begins where the work is', () => {
