@@ -1,6 +1,7 @@
 import { api } from '@/lib/query/problem';
 import { offlineDatabase } from './database';
 import { dropOtherPages, keepBuiltFiles, keepPages, keepThumbnails } from './keep-pages';
+import { warmRanker } from './ranker';
 import { refreshKit } from './refresh-kit';
 
 interface Listed {
@@ -23,6 +24,6 @@ export async function keepOpenCases(): Promise<void> {
     await keepThumbnails(thumbnails);
   }
   await keepPages(['/cases', ...here.filter((path) => !paths.includes(path))]);
-  // What those pages brought with them.
-  await keepBuiltFiles();
+  // The ranker's own files are asked for by its worker, and kept as they pass the service worker.
+  warmRanker();
 }

@@ -1,23 +1,32 @@
 /** Names of the caches that the service worker (public/sw.js) serves from. */
 const CACHES = { static: 'carryover-static', pages: 'carryover-pages', thumbnails: 'carryover-thumbnails' } as const;
 
-/** Puts pages on the device, so that they open without a connection. */
+/** Built files as a page names them: with their whole address in tags, without its beginning in its data. */
+const BUILT_FILE = /(?:\/_next\/)?static\/(?:chunks|css|media)\/[\w.~/-]+\.(?:js|css|woff2)/g;
+
+/** Puts pages on the device, with the scripts and styles that they name, so that they open without a connection. */
 export async function keepPages(paths: readonly string[]): Promise<void> {
   const cache = await caches.open(CACHES.pages);
+  const files = new Set<string>();
   for (const path of paths) {
     const response = await fetch(path, { headers: { accept: 'text/html' } });
-    if (response.ok && !response.redirected) await cache.put(new URL(path, location.origin).href, response);
+    if (!response.ok || response.redirected) continue;
+    const text = await response.clone().text();
+    for (const [file] of text.matchAll(BUILT_FILE)) files.add(file.startsWith('/') ? file : `/_next/${file}`);
+    await cache.put(new URL(path, location.origin).href, response);
   }
+  await keepFiles([...files]);
 }
 
 /** Puts the built files that this page came with there too: they were loaded before the service worker ruled. */
-export async function keepBuiltFiles(): Promise<void> {
+export function keepBuiltFiles(): Promise<void> {
+  const names = performance.getEntriesByType('resource').map(({ name }) => name);
+  return keepFiles([...new Set(names)].filter((name) => name.startsWith(`${location.origin}/_next/static/`)));
+}
+
+async function keepFiles(urls: readonly string[]): Promise<void> {
   const cache = await caches.open(CACHES.static);
-  const urls = performance
-    .getEntriesByType('resource')
-    .map(({ name }) => name)
-    .filter((name) => name.startsWith(`${location.origin}/_next/static/`));
-  for (const url of new Set(urls)) if (!(await cache.match(url))) await cache.add(url).catch(() => undefined);
+  for (const url of urls) if (!(await cache.match(url))) await cache.add(url).catch(() => undefined);
 }
 
 export async function keepThumbnails(paths: readonly string[]): Promise<void> {
