@@ -6,7 +6,7 @@ import { STATIONS, type StationId } from '@/lib/diagnose/stations';
 import { directionOf, nextInDirection } from './directions';
 import { buttonPlace, labelPlace, levelOf } from './places';
 import { wholePercents, type Place } from './shares';
-import { StationList } from './StationList';
+import { StationList, stationText } from './StationList';
 
 export interface OilPathProps {
   /** `OilPathCompositions`, drawn by the server. */
@@ -64,11 +64,11 @@ export function OilPath({ drawing, suspicion, open, picked, onPick }: OilPathPro
                 style={buttonPlace(id)}
                 tabIndex={id === stop ? 0 : -1}
                 aria-pressed={picked === id}
-                aria-label={`${name}, ${percents[id]}% suspicion, ${open[id]} open`}
                 onFocus={() => setStop(id)}
                 onClick={() => onPick(picked === id ? null : id)}
               >
-                <span className="oil-path-words" style={labelPlace(id)}>
+                <span className="sr-only">{stationText(name, percents[id], open[id])}</span>
+                <span aria-hidden="true" className="oil-path-words" style={labelPlace(id)}>
                   <span className="oil-path-plate-words">
                     <span className="oil-path-name">{name}</span>
                     <span className="oil-path-figures"><b>{percents[id]}%</b> {open[id]} open</span>
