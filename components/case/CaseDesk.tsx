@@ -80,7 +80,7 @@ export function CaseDesk({ view, drawing, hand: kept, decimalMark }: Props) {
       </div>
       <div className="min-w-0 lg:col-start-1">
         <Answered handle={handle} rulebook={rulebook} timeZone={view.head.timeZone} readOnly={readOnly} onPick={pick} />
-        <div className="mt-8"><PhotoStrip /></div>
+        <div className="mt-8 not-has-[img]:print:hidden"><PhotoStrip /></div>
       </div>
       <LiveRegion>{spoken(state, rulebook)}</LiveRegion>
     </div>
