@@ -46,7 +46,7 @@ export function DataTable<Row>({ caption, captionHidden, columns, rows, rowKey, 
   const captionId = useId();
   if (rows.length === 0) return empty ?? <EmptyState title="Nothing here yet" />;
   return (
-    <div role="region" aria-labelledby={captionId} tabIndex={0} className="scroll-x">
+    <div role="region" aria-labelledby={captionId} tabIndex={0} className="scroll-x relative">
       <table role="table" className="ledger max-sm:block">
         <caption id={captionId} className={captionHidden ? 'sr-only' : 'label text-left text-ink-soft'}>{caption}</caption>
         <thead role="rowgroup" className="max-sm:block max-sm:border-b-2 max-sm:border-ink">

@@ -30,6 +30,7 @@ const shot = (page: string | null, name: string, as: Shot['as'], path: string | 
 /** Every page in every state it has. `tests/unit/screenshots/pages.test.ts` compares it with the folders of `app`. */
 export const SHOTS: readonly Shot[] = [
   shot('(public)', 'home', 'nobody', '/'),
+  shot('(public)/api/docs', 'api-docs', 'nobody', '/api/docs'),
   shot('(auth)/sign-in', 'sign-in', 'nobody', '/sign-in'),
   shot('(auth)/reset-password', 'reset-password', 'nobody', '/reset-password'),
   shot('(auth)/reset-password/[token]', 'reset-password-link', 'nobody', ({ reset }) => reset),

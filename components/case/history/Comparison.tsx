@@ -22,7 +22,7 @@ export function Comparison({ before, after, rulebook, timeZone }: Props) {
   const head = ({ step }: At) => <>{timeText(step.at, timeZone)}<span className="unit block text-ink-soft">{step.what}</span></>;
   return (
     <div className="grid gap-8">
-      <div role="region" aria-label="The ranking at two moments" tabIndex={0} className="scroll-x">
+      <div role="region" aria-label="The ranking at two moments" tabIndex={0} className="scroll-x relative">
       <table className="ledger">
         <caption className="sr-only">The ranking at two moments</caption>
         <thead>
