@@ -122,7 +122,7 @@ describe('photos in the bay', () => {
         last = now;
       }, 20);
     });
-    const one = await smallJpeg(2400, 1800);
+    const one = await smallJpeg(1400, 1050);
     await choose(page, Array.from({ length: 40 }, (_, i) => file(`IMG_${i}.jpg`, one)));
     expect(new Set((await untilListed(page, caseId, 40)).map(({ id }) => id)).size).toBe(40);
     expect(await page.evaluate(() => (window as unknown as { longestGapMs: number }).longestGapMs)).toBeLessThan(1_000);
