@@ -6,6 +6,7 @@ import { newId } from '@/lib/ids';
 import { listen } from '@/lib/offline/bus';
 import { stamp } from '@/lib/offline/clock';
 import { connectionAtFirst, onConnection, readConnection } from '@/lib/offline/connection';
+import { warmRanker } from '@/lib/offline/ranker';
 import { refreshKit } from '@/lib/offline/refresh-kit';
 import { waitingOf, type Kept } from '@/lib/offline/waiting';
 import { queryKeys } from '@/lib/query/keys';
@@ -123,7 +124,10 @@ function useAfter(ms: number, since: boolean): boolean {
 function useKit(caseId: string, version: number, enabled: boolean): void {
   useEffect(() => {
     if (!enabled) return;
-    const timer = setTimeout(() => void refreshKit(caseId).catch(() => undefined), KIT_AFTER_MS);
+    const timer = setTimeout(() => {
+      warmRanker();
+      void refreshKit(caseId).catch(() => undefined);
+    }, KIT_AFTER_MS);
     return () => clearTimeout(timer);
   }, [caseId, version, enabled]);
 }

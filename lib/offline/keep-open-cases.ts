@@ -1,8 +1,11 @@
 import { api } from '@/lib/query/problem';
 import { offlineDatabase } from './database';
 import { dropOtherPages, keepBuiltFiles, keepPages, keepThumbnails } from './keep-pages';
-import { warmRanker } from './ranker';
+import { askRanker } from './ranker';
 import { refreshKit } from './refresh-kit';
+
+/** In the device's own store: which cases it could go on with. */
+const KEPT_CASES = 'kept-cases';
 
 interface Listed {
   cases: { id: string; version: number; thumbnails: string[] }[];
@@ -24,6 +27,6 @@ export async function keepOpenCases(): Promise<void> {
     await keepThumbnails(thumbnails);
   }
   await keepPages(['/cases', ...here.filter((path) => !paths.includes(path))]);
-  // The ranker's own files are asked for by its worker, and kept as they pass the service worker.
-  warmRanker();
+  await askRanker({ kind: 'keep' });
+  await db.put('device', cases.map(({ id }) => id), KEPT_CASES);
 }

@@ -18,9 +18,9 @@ export async function keepPages(paths: readonly string[]): Promise<void> {
   await keepFiles([...files]);
 }
 
-/** Puts the built files that this page came with there too: they were loaded before the service worker ruled. */
-export function keepBuiltFiles(): Promise<void> {
-  const names = performance.getEntriesByType('resource').map(({ name }) => name);
+/** Puts the built files that this page, or this worker, came with there too: they may have been loaded before the service worker ruled. */
+export function keepBuiltFiles(more: readonly string[] = []): Promise<void> {
+  const names = [...performance.getEntriesByType('resource').map(({ name }) => name), ...more];
   return keepFiles([...new Set(names)].filter((name) => name.startsWith(`${location.origin}/_next/static/`)));
 }
 

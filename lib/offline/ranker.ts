@@ -3,6 +3,8 @@ import type { CaseReasons, CaseState } from '@/lib/schemas/case-view';
 
 export type RankerQuestion =
   | { kind: 'state'; caseId: string }
+  /** Keep your own files where the service worker finds them. */
+  | { kind: 'keep' }
   /** Can this be understood as an answer? */
   | { kind: 'read'; caseId: string; checkId: string; answer: ParsedAnswer };
 
@@ -37,7 +39,7 @@ function start(): Worker {
   return worker;
 }
 
-/** Has it ready before it is needed. */
+/** Has it ready before it is needed: without a connection it could not be fetched. */
 export const warmRanker = () => void start();
 
 export function askRanker(question: RankerQuestion): Promise<RankerAnswer['result']> {

@@ -6,6 +6,7 @@ import { compileTrusted } from '@/lib/diagnose/compile';
 import type { CompiledRulebook } from '@/lib/diagnose/compiled';
 import { AppError } from '@/lib/errors';
 import { readKit } from './read-kit';
+import { keepBuiltFiles } from './keep-pages';
 import type { RankerAnswer, RankerQuestion } from './ranker';
 import { waitingOf } from './waiting';
 
@@ -22,6 +23,10 @@ async function ready(caseId: string) {
 }
 
 async function answer(question: RankerQuestion): Promise<RankerAnswer['result']> {
+  if (question.kind === 'keep') {
+    await keepBuiltFiles([self.location.href]);
+    return { kind: 'fine' };
+  }
   const found = await ready(question.caseId);
   if (!found) return { kind: 'unready' };
   const { kit, compiled } = found;

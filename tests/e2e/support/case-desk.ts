@@ -61,25 +61,25 @@ export async function untilSent(page: Page, withinMs = 60_000): Promise<void> {
   throw new Error(`${await unsentOn(page)} entries still wait on the device`);
 }
 
-/** Until the device has what it takes to go on alone: the page, the case's kit and the edition. */
+/** Until the device has what it takes to go on alone, after a reload as well: pages, files, the case's kit, the edition. */
 export async function untilKept(page: Page, caseId: string): Promise<void> {
-  await page.waitForFunction(
-    async (id) => {
-      if ((await caches.match(`/cases/${id}`)) === undefined) return false;
-      return new Promise<boolean>((resolve) => {
-        const request = indexedDB.open('carryover');
-        request.onsuccess = () => {
-          const held = request.result.transaction('kit').objectStore('kit').count(id);
-          held.onsuccess = () => {
-            request.result.close();
-            resolve(held.result === 1);
+  const isKept = () =>
+    page.evaluate(
+      (id) =>
+        new Promise<boolean>((resolve) => {
+          const request = indexedDB.open('carryover');
+          request.onsuccess = () => {
+            const held = request.result.transaction('device').objectStore('device').get('kept-cases');
+            held.onsuccess = () => {
+              request.result.close();
+              resolve(((held.result as string[] | undefined) ?? []).includes(id));
+            };
           };
-        };
-      });
-    },
-    caseId,
-    { timeout: 60_000, polling: 250 },
-  );
+        }),
+      caseId,
+    );
+  for (const deadline = Date.now() + 60_000; Date.now() < deadline; await page.waitForTimeout(250)) if (await isKept()) return;
+  throw new Error(`the device does not keep case ${caseId}`);
 }
 
 /** Opens a case on a unit of the person's organisation by the API that the page itself uses. @returns its id */
