@@ -21,7 +21,7 @@ export function Comparison({ before, after, rulebook, timeZone }: Props) {
   const { causes, rest, answered } = compareStates(before.state, after.state);
   const head = ({ step }: At) => <>{timeText(step.at, timeZone)}<span className="unit block text-ink-soft">{step.what}</span></>;
   return (
-    <div className="grid gap-8">
+    <div className="grid grid-cols-1 gap-8">
       <div role="region" aria-label="The ranking at two moments" tabIndex={0} className="scroll-x relative">
       <table className="ledger">
         <caption className="sr-only">The ranking at two moments</caption>

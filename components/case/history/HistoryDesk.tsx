@@ -51,8 +51,8 @@ export function HistoryDesk({ view, steps, known, at, withAt, ...desk }: Props) 
   const leader = moment?.state.causes[0];
 
   return (
-    <div className="grid gap-8">
-      <section aria-labelledby="moments" className="grid gap-3 border-b border-rule pb-6">
+    <div className="grid grid-cols-1 gap-8">
+      <section aria-labelledby="moments" className="grid grid-cols-1 gap-3 border-b border-rule pb-6">
         <h2 id="moments" className="sr-only">Moments</h2>
         <MomentSlider steps={steps} index={index} timeZone={head.timeZone} onChange={(next) => go(next, other)} />
         {step && (
@@ -75,7 +75,7 @@ export function HistoryDesk({ view, steps, known, at, withAt, ...desk }: Props) 
         <Notice title="This moment could not be fetched">{(shown?.error ?? compared?.error)?.message} Nothing of the case was changed. Step on, or come back to it.</Notice>
       )}
       {step && otherStep && shown?.data && compared?.data && other !== index && (
-        <section aria-labelledby="compared" className="grid gap-4">
+        <section aria-labelledby="compared" className="grid grid-cols-1 gap-4">
           <h2 id="compared">Two moments beside each other</h2>
           <Comparison
             {...inOrder({ step: otherStep, state: compared.data.state }, { step, state: shown.data.state })}
