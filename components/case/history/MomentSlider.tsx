@@ -16,7 +16,7 @@ export function MomentSlider({ steps, index, timeZone, onChange }: Props) {
   const step = steps[index];
   const spoken = step ? `${timeText(step.at, timeZone)}: ${step.what}` : '';
   return (
-    <div className="grid gap-2 print:hidden">
+    <div className="grid grid-cols-1 gap-2 print:hidden">
       <label htmlFor="moment" className="label">Moment <span className="figure">{index + 1}</span> of <span className="figure">{steps.length}</span></label>
       <div className="flex items-center gap-3">
         <Button variant="quiet" disabled={index === 0} onClick={() => onChange(index - 1)}>Earlier</Button>
