@@ -106,7 +106,8 @@ interface AtHandProps {
 
 function AtHandView({ handle, rulebook, picked, decimalMark, onPick }: AtHandProps) {
   const { state } = handle;
-  const asked = useHeld(atHand(state, rulebook, picked), handle.answer.isPending);
+  const [passed, setPassed] = useState<ReadonlySet<string>>(new Set());
+  const asked = useHeld(atHand(state, rulebook, picked, passed), handle.answer.isPending);
   const shown = useRef(nameOf(asked));
   useEffect(() => {
     // The page itself has the focus at first; after an answer it goes to the next question.
@@ -118,9 +119,13 @@ function AtHandView({ handle, rulebook, picked, decimalMark, onPick }: AtHandPro
     const panel = rulebook.panels.find(({ id }) => id === asked.panelId);
     // Kept at hand while its items are answered, though the suggestion moves on.
     const keep = () => picked?.kind === 'panel' || onPick({ kind: 'panel', panelId: asked.panelId });
+    const pass = () => {
+      setPassed(new Set([...passed, asked.panelId]));
+      onPick(null);
+    };
     return panel ? (
       <div onClickCapture={keep}>
-        <PanelAtHand panel={panel} rulebook={rulebook} handle={handle} stationName={stationName(panel.station)} onDone={() => onPick(null)} />
+        <PanelAtHand panel={panel} rulebook={rulebook} handle={handle} stationName={stationName(panel.station)} onDone={pass} />
       </div>
     ) : null;
   }

@@ -6,13 +6,16 @@ export type AtHand = { kind: 'check'; checkId: string; then: string | null } | {
 /** What a person picked instead of the suggestion; null follows the suggestion. */
 export type Picked = { kind: 'check'; checkId: string } | { kind: 'panel'; panelId: string } | null;
 
-/** What to ask: what was picked, else what tells most, else nothing, because enough is known. */
-export function atHand(state: CaseState, rulebook: RulebookView, picked: Picked): AtHand | null {
+/**
+ * What to ask: what was picked, else what tells most, else nothing, because enough is known. A panel that was passed with
+ * items left open isn't asked again at once, as long as there is something else to ask.
+ */
+export function atHand(state: CaseState, rulebook: RulebookView, picked: Picked, passed: ReadonlySet<string>): AtHand | null {
   if (picked?.kind === 'panel') return picked;
   if (picked) return { ...picked, then: null };
-  const best = state.next.suggestions[0];
-  if (!best || state.next.stop) return null;
-  return ofSuggestion(best, rulebook);
+  const { suggestions, stop } = state.next;
+  const best = suggestions.find(({ panelId }) => panelId === null || !passed.has(panelId)) ?? suggestions[0];
+  return best && !stop ? ofSuggestion(best, rulebook) : null;
 }
 
 export function ofSuggestion(

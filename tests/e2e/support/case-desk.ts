@@ -106,24 +106,35 @@ export const stateOnServer = (page: Page, caseId: string): Promise<CaseState> =>
 export const rankingOn = (page: Page): Promise<[string, number][]> =>
   page.evaluate(() => [...document.querySelectorAll<HTMLElement>('[data-cause]')].map(({ dataset }) => [dataset.cause ?? '', Number(dataset.p)]));
 
-/** Answers whatever is at hand by touch: the first answer, a plain value, or that one can't tell. */
-export async function answerAtHand(page: Page): Promise<string> {
+/**
+ * Answers whatever is at hand by touch: the first answer, or that one can't tell. The question may change under the hand
+ * when another ranking comes in; then what has come is answered.
+ */
+export async function answerAtHand(page: Page): Promise<void> {
   const atHand = page.locator('section[aria-labelledby=check-at-hand]');
   const heading = (await page.locator('#check-at-hand').textContent()) ?? '';
-  const read = atHand.getByRole('button', { name: /I have read this/ });
-  if (await read.count()) {
-    await read.click();
-    await read.waitFor({ state: 'detached' });
+  const answered = () => page.waitForFunction((was) => document.getElementById('check-at-hand')?.textContent !== was, heading, { timeout: 20_000 });
+  const tap = (button: ReturnType<Page['locator']>) => button.click({ timeout: 3_000 });
+  for (let tries = 0; tries < 5; tries += 1) {
+    if ((await page.locator('#check-at-hand').textContent()) !== heading) return;
+    const read = atHand.getByRole('button', { name: /I have read this/ });
+    const goOn = atHand.getByRole('button', { name: 'Go on to the next check' });
+    const choices = atHand.getByRole('group', { name: /^Answers/ }).getByRole('button');
+    try {
+      if (await read.count()) await tap(read);
+      else if (await goOn.count()) {
+        await tap(atHand.getByRole('button', { name: 'No', exact: true, pressed: false }).first());
+        await atHand.getByRole('button', { name: 'No', exact: true, pressed: true }).first().waitFor({ timeout: 10_000 });
+        await tap(goOn);
+        await answered();
+        return;
+      } else {
+        await tap((await choices.count()) ? choices.first() : atHand.getByRole('button', { name: 'Can’t tell' }).first());
+        await answered();
+        return;
+      }
+    } catch (error) {
+      if (tries === 4) throw error;
+    }
   }
-  const goOn = atHand.getByRole('button', { name: 'Go on to the next check' });
-  if (await goOn.count()) {
-    await atHand.getByRole('button', { name: 'No', exact: true }).first().click();
-    await atHand.getByRole('button', { name: 'No', exact: true, pressed: true }).first().waitFor();
-    await goOn.click();
-  } else {
-    const first = atHand.getByRole('group', { name: /^Answers/ }).getByRole('button').first();
-    await ((await first.count()) ? first : atHand.getByRole('button', { name: 'Can’t tell' })).click();
-  }
-  await page.waitForFunction((was) => document.getElementById('check-at-hand')?.textContent !== was, heading);
-  return heading;
 }
