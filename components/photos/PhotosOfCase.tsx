@@ -1,9 +1,10 @@
 'use client';
 
 import { createContext, use, useEffect, useMemo, type ReactNode } from 'react';
+import { keepBuiltFiles } from '@/lib/offline/keep-pages';
+import { warmPhotoWorker } from '@/lib/offline/photos-worker';
 import type { CaseView } from '@/lib/schemas/case-view';
 import type { PhotoList } from '@/lib/schemas/photo';
-import { loadPreparing } from './add-photos';
 import { loadDialog } from './load-dialog';
 import type { ShownPhoto } from './shown';
 import { usePhotos } from './use-photos';
@@ -32,7 +33,12 @@ export function PhotosOfCase({ view, initial, children }: { view: CaseView; init
   const { caseId, at } = state;
   const { photos, refresh } = usePhotos({ caseId, personId: reader.personId, initial, live: at === null });
   useEffect(() => {
-    const timer = setTimeout(() => void Promise.allSettled([loadPreparing(), loadDialog()]), FETCH_AFTER_MS);
+    const timer = setTimeout(() => {
+      warmPhotoWorker();
+      void loadDialog()
+        .then(() => (process.env.NODE_ENV === 'production' ? keepBuiltFiles() : undefined))
+        .catch(() => undefined);
+    }, FETCH_AFTER_MS);
     return () => clearTimeout(timer);
   }, []);
   const value = useMemo<CasePhotos>(

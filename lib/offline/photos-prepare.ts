@@ -1,9 +1,7 @@
 import { LONGEST_SIDE_PX, MOST_PHOTO_BYTES } from '@/lib/schemas/photo';
 
 /** Why a file is no photo for us, in a sentence for whoever chose it. */
-export class PhotoProblem extends Error {
-  override readonly name = 'PhotoProblem';
-}
+export class PhotoProblem extends Error {}
 
 export interface PreparedPhoto {
   picture: Blob;
@@ -24,18 +22,17 @@ const QUALITIES = [0.82, 0.6, 0.4];
  */
 export async function preparePhoto(file: File): Promise<PreparedPhoto> {
   const original = await decoded(file);
+  const small = await resized(original, LONGEST_SIDE_PX).finally(() => original.close());
   try {
-    const small = await resized(original, LONGEST_SIDE_PX);
     const { width, height } = small;
     const picture = await encoded(small);
-    small.close();
     if (!picture) throw new PhotoProblem(`“${file.name}” could not be made small enough to send. It was left out.`);
-    const tiny = await resized(original, THUMBNAIL_PX);
+    const tiny = await resized(small, THUMBNAIL_PX);
     const thumbnail = (await encoded(tiny)) ?? picture;
     tiny.close();
     return { picture, thumbnail, width, height };
   } finally {
-    original.close();
+    small.close();
   }
 }
 
@@ -57,7 +54,6 @@ async function isHeif(file: File): Promise<boolean> {
   return /^ftyp(heic|heix|hevc|heim|heis|mif1|msf1)$/.test(start);
 }
 
-/** Scaled outside the page's own thread, so that the page goes on answering. */
 function resized(bitmap: ImageBitmap, longest: number): Promise<ImageBitmap> {
   const scale = Math.min(1, longest / Math.max(bitmap.width, bitmap.height));
   const side = (px: number) => Math.max(1, Math.round(px * scale));

@@ -1,3 +1,6 @@
+import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import { parse as readExif } from 'exifr';
 import type { Browser, BrowserContext, Page } from 'playwright-core';
 import sharp from 'sharp';
@@ -13,23 +16,46 @@ import { startServer, type TestServer } from './support/server';
 import { signIn } from './support/sign-in';
 
 const SENT_WITHIN_MS = 60_000;
+/** On two cores that other tests share, with pictures that no coder can make small. */
+const FORTY_SENT_WITHIN_MS = 200_000;
 
 const file = (name: string, buffer: Buffer, mimeType = 'image/jpeg') => ({ name, mimeType, buffer });
 const strip = (page: Page) => page.locator('section[aria-labelledby=photos]');
 const tiles = (page: Page) => strip(page).locator('ul > li > button');
-const choose = (page: Page, files: ReturnType<typeof file>[]) => strip(page).getByLabel(/^Choose photos/).setInputFiles(files);
+const choose = (page: Page, files: ReturnType<typeof file>[] | string[]) => strip(page).getByLabel(/^Choose photos/).setInputFiles(files);
 const listed = (page: Page, caseId: string): Promise<PhotoList['photos']> =>
   page.evaluate(async (id) => ((await (await fetch(`/api/v1/cases/${id}/photos`)).json()) as { photos: never }).photos, caseId);
 
 const organisationOf = (page: Page, caseId: string): Promise<string> =>
   page.evaluate(async (id) => ((await (await fetch(`/api/v1/cases/${id}/kit`)).json()) as { organisationId: string }).organisationId, caseId);
 
-async function untilListed(page: Page, caseId: string, count: number): Promise<PhotoList['photos']> {
-  for (const deadline = Date.now() + SENT_WITHIN_MS; Date.now() < deadline; await page.waitForTimeout(200)) {
+async function untilListed(page: Page, caseId: string, count: number, withinMs = SENT_WITHIN_MS): Promise<PhotoList['photos']> {
+  for (const deadline = Date.now() + withinMs; Date.now() < deadline; await page.waitForTimeout(200)) {
     const photos = await listed(page, caseId);
     if (photos.length >= count) return photos;
   }
-  throw new Error(`${(await listed(page, caseId)).length} photos arrived within a minute; expected ${count}. The strip says: ${await strip(page).innerText()}`);
+  throw new Error(`${(await listed(page, caseId)).length} photos arrived within ${withinMs / 1000} s; expected ${count}. The strip says: ${await strip(page).innerText()}`);
+}
+
+/** How long the page's own thread was kept from its next turn, at the longest since it was last asked. */
+async function watchGaps(page: Page): Promise<() => Promise<number>> {
+  await page.evaluate(() => {
+    const seen = window as unknown as { longestGapMs: number };
+    let last = performance.now();
+    seen.longestGapMs = 0;
+    setInterval(() => {
+      const now = performance.now();
+      seen.longestGapMs = Math.max(seen.longestGapMs, now - last);
+      last = now;
+    }, 20);
+  });
+  return () =>
+    page.evaluate(() => {
+      const seen = window as unknown as { longestGapMs: number };
+      const longest = seen.longestGapMs;
+      seen.longestGapMs = 0;
+      return longest;
+    });
 }
 
 /** Nothing of the strip says that it waits or is being sent, and every picture of it is there. */
@@ -110,29 +136,29 @@ describe('photos in the bay', () => {
     const second = await context.newPage();
     await second.goto(page.url());
     await strip(second).waitFor();
+    // Behind another tab, timers run slow.
+    await page.bringToFront();
     const announced: string[] = [];
     context.on('request', (request) => request.method() === 'POST' && request.url().endsWith(`/cases/${caseId}/photos`) && announced.push(request.url()));
-    await page.evaluate(() => {
-      const seen = window as unknown as { longestGapMs: number };
-      seen.longestGapMs = 0;
-      let last = performance.now();
-      setInterval(() => {
-        const now = performance.now();
-        seen.longestGapMs = Math.max(seen.longestGapMs, now - last);
-        last = now;
-      }, 20);
-    });
-    const one = await smallJpeg(1400, 1050);
-    await choose(page, Array.from({ length: 40 }, (_, i) => file(`IMG_${i}.jpg`, one)));
-    expect(new Set((await untilListed(page, caseId, 40)).map(({ id }) => id)).size).toBe(40);
-    expect(await page.evaluate(() => (window as unknown as { longestGapMs: number }).longestGapMs)).toBeLessThan(1_000);
+    const gaps = await watchGaps(page);
+    await page.waitForTimeout(3_000);
+    const atRestMs = await gaps();
+    const one = await smallJpeg(1600, 1200);
+    const folder = mkdtempSync(join(tmpdir(), 'carryover-photos-'));
+    const paths = Array.from({ length: 40 }, (_, i) => join(folder, `IMG_${i}.jpg`));
+    for (const path of paths) writeFileSync(path, one);
+    await choose(page, paths);
+    expect(new Set((await untilListed(page, caseId, 40, FORTY_SENT_WITHIN_MS)).map(({ id }) => id)).size).toBe(40);
+    // On a machine that others work on, too, even a page at rest is made to wait.
+    expect(await gaps()).toBeLessThan(Math.max(500, 4 * atRestMs));
     await settled(page);
     expect(await tiles(page).count()).toBe(40);
     expect(announced).toHaveLength(40);
     await settled(second);
     expect(await tiles(second).count()).toBe(40);
     await second.close();
-  });
+    rmSync(folder, { recursive: true });
+  }, FORTY_SENT_WITHIN_MS + 60_000);
 
   it('taken after the session has ended, a photo waits until somebody has signed in again', async () => {
     const caseId = await openACase();
