@@ -1,6 +1,6 @@
 import { api } from '@/lib/query/problem';
 import { offlineDatabase } from './database';
-import { dropOtherPages, keepBuiltFiles, keepPages, keepThumbnails } from './keep-pages';
+import { dropOtherPages, hasPage, keepBuiltFiles, keepPages, keepThumbnails } from './keep-pages';
 import { askRanker } from './ranker';
 import { refreshKit } from './refresh-kit';
 
@@ -21,7 +21,8 @@ export async function keepOpenCases(): Promise<void> {
   await dropOtherPages([...paths, ...here, '/cases']);
   for (const { id, version, thumbnails } of cases) {
     const held = await db.get('kit', id);
-    if (held?.version === version) continue;
+    // The case's own page keeps its kit by itself.
+    if (held?.version === version && (await hasPage(`/cases/${id}`))) continue;
     await refreshKit(id);
     await keepPages([`/cases/${id}`]);
     await keepThumbnails(thumbnails);

@@ -1,6 +1,11 @@
 /** Names of the caches that the service worker (public/sw.js) serves from. */
 const CACHES = { static: 'carryover-static', pages: 'carryover-pages', thumbnails: 'carryover-thumbnails' } as const;
 
+/** Whether a page is on the device. */
+export async function hasPage(path: string): Promise<boolean> {
+  return (await (await caches.open(CACHES.pages)).match(path)) !== undefined;
+}
+
 /** Built files as a page names them: with their whole address in tags, without its beginning in its data. */
 const BUILT_FILE = /(?:\/_next\/)?static\/(?:chunks|css|media)\/[\w.~/-]+\.(?:js|css|woff2)/g;
 
