@@ -41,7 +41,7 @@ export function CheckAtHand({ check, rulebook, handle, suggestion, then, station
   const common = { check, pending: answer.isPending, onAnswer: give, onUndo: undo };
 
   return (
-    <section aria-labelledby="check-at-hand" className="grid gap-4">
+    <section aria-labelledby="check-at-hand" aria-busy={answer.isPending || undefined} className="grid gap-4">
       <header>
         <p className="label text-ink-soft">
           {stationName} · {suggestion ? suggestion.word : 'your choice'}

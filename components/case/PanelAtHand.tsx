@@ -30,7 +30,7 @@ export function PanelAtHand({ panel, rulebook, handle, stationName, onDone }: Pr
   const [first] = checks;
   const last = lastAsked(state);
   return (
-    <section aria-labelledby="check-at-hand" className="grid gap-4">
+    <section aria-labelledby="check-at-hand" aria-busy={answer.isPending || undefined} className="grid gap-4">
       <header>
         <p className="label text-ink-soft">{stationName} · {checks.length} checks on one screen</p>
         <h2 id="check-at-hand" tabIndex={-1} className="scroll-mt-12 mt-1 text-[1.75rem]">{panel.prompt}</h2>

@@ -14,6 +14,8 @@ const answeredCount = (page: Page) => page.locator('section[aria-labelledby=answ
 
 async function settled(page: Page, before: number) {
   await page.waitForFunction((count) => document.querySelectorAll('section[aria-labelledby=answered] > ul > li').length !== count, before);
+  // The question stands until the next one is known.
+  await page.locator('section[aria-labelledby=check-at-hand][aria-busy]').waitFor({ state: 'detached' });
 }
 
 /** Answers whatever is at hand as a person at the keyboard would; a value that nobody has is "can't tell". */
@@ -130,7 +132,7 @@ describe.each(SIZES)('the main job by keyboard alone, on a %s', (_name, size) =>
   });
 
   it('calls the cause and takes the call back', async () => {
-    await tabTo(page, /^Sure/);
+    await tabTo(page, /^Sure\s*I have seen it/);
     // A radio group is one stop; arrows and Space choose in it.
     await page.keyboard.press('Space');
     await press(page, /^Call the cause$/);
