@@ -1,4 +1,4 @@
-import { Disclosure } from '@/components/ui/Disclosure';
+import Link from 'next/link';
 import { Tag } from '@/components/ui/Tag';
 import { fieldsOf, nameIn, typeInWords, type Field, type Schema } from '@/lib/openapi/fields';
 import type { ReadableOperation } from '@/lib/openapi/readable';
@@ -15,7 +15,7 @@ const parameterFields = (parameters: ReadableOperation['parameters']): Field[] =
     description: [description, schema.default !== undefined && schema.default !== '' && `${String(schema.default)} unless given.`].filter(Boolean).join(' '),
   }));
 
-export function OperationArticle({ operation: { operationId, method, path, summary, description, scope, parameters, body, answers } }: { operation: ReadableOperation }) {
+export function OperationArticle({ operation: { operationId, method, path, summary, description, scope, parameters, body, answer, refusals } }: { operation: ReadableOperation }) {
   const bodyFields = body ? fieldsOf(body) : [];
   return (
     <article id={operationId} aria-labelledby={`${operationId}-title`} className="grid scroll-mt-4 gap-3 border-t border-ink pt-4">
@@ -29,16 +29,10 @@ export function OperationArticle({ operation: { operationId, method, path, summa
       {parameters.length > 0 && <FieldTable caption={`Takes: ${summary}`} fields={parameterFields(parameters)} marksOptional />}
       {bodyFields.length > 0 && <FieldTable caption={`Body: ${summary}`} fields={bodyFields} marksOptional />}
       {body && bodyFields.length === 0 && typeInWords(body) !== 'object' && <p>Body: {typeInWords(body)}.</p>}
-      <Disclosure summary={<>Answers<span className="sr-only"> of “{summary}”</span></>}>
-        <dl className="grid gap-2">
-          {answers.map((answer) => (
-            <div key={answer.status} className="grid grid-cols-[3.5rem_1fr] gap-3">
-              <dt className="figure">{answer.status}</dt>
-              <dd>{answer.description} {answer.schema && <Answered schema={answer.schema} />}</dd>
-            </div>
-          ))}
-        </dl>
-      </Disclosure>
+      <p>
+        Answers <span className="figure">{answer.status}</span>{answer.schema && <> with <Answered schema={answer.schema} /></>}, or{' '}
+        <Link href="/api/docs#refusals" className="figure">{refusals.join(', ')}</Link>.
+      </p>
     </article>
   );
 }
@@ -47,5 +41,5 @@ function Answered({ schema }: { schema: Schema }) {
   const name = nameIn(schema);
   if (name) return <a href={`#schema-${name}`}>{name}</a>;
   const fields = fieldsOf(schema);
-  return fields.length > 0 ? <>With {fields.map(({ path, type }) => `${path} (${type})`).join('; ')}.</> : null;
+  return <>{fields.length > 0 ? fields.map(({ path, type }) => `${path} (${type})`).join('; ') : typeInWords(schema)}</>;
 }

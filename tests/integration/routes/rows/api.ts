@@ -47,6 +47,7 @@ export const api = feature({
   },
   rows: [
     { page: '(public)/api/docs', roles: 'anybody' },
+    { page: '(public)/api/docs/[group]', roles: 'anybody', params: () => ({ group: 'cases' }) },
     { route: `${V1}/openapi.json`, method: 'GET', roles: 'anybody' },
     { route: `${V1}/cases`, method: 'GET', roles: SEE, query: () => ({ status: 'all', mine: 'yes', limit: '1' }) },
     { route: `${V1}/cases`, method: 'POST', roles: WORK, body: ({ unitId }) => ({ id: newId(), unit: { kind: 'known', unitId }, complaints: ['complaint-oil'] }) },
