@@ -31,6 +31,7 @@ const shot = (page: string | null, name: string, as: Shot['as'], path: string | 
 export const SHOTS: readonly Shot[] = [
   shot('(public)', 'home', 'nobody', '/'),
   shot('(public)/api/docs', 'api-docs', 'nobody', '/api/docs'),
+  shot('(public)/api/docs/[group]', 'api-docs-cases', 'nobody', '/api/docs/cases'),
   shot('(auth)/sign-in', 'sign-in', 'nobody', '/sign-in'),
   shot('(auth)/reset-password', 'reset-password', 'nobody', '/reset-password'),
   shot('(auth)/reset-password/[token]', 'reset-password-link', 'nobody', ({ reset }) => reset),
