@@ -33,7 +33,7 @@ async function answerWhatIsAtHand(page: Page) {
     await press(page, /^Go on to the next check$/);
     return;
   }
-  const first = atHand.locator('[role=group] button').first();
+  const first = atHand.getByRole('group', { name: /^Answers/ }).getByRole('button').first();
   const label = (await first.count()) ? await first.textContent() : null;
   await press(page, label === null ? /^Can’t tell$/ : new RegExp(`^${label.replace(/[.*+?^${}()|[\]\\]/g, '\\$&')}$`));
   await settled(page, before);

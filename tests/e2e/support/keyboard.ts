@@ -3,9 +3,6 @@ import type { Page } from 'playwright-core';
 /** As far as anybody would tab before giving up on a page. */
 const MOST_TABS = 250;
 
-/** More than stand in one line. */
-const MOST_STEPS = 8;
-
 /** What the focused element is called, near enough to what a screen reader says. */
 const focusedName = (page: Page): Promise<string> =>
   page.evaluate(() => {
@@ -29,16 +26,20 @@ export async function tabTo(page: Page, name: RegExp): Promise<void> {
   throw new Error(`Tab never reached ${name} on ${page.url()}; it passed ${[...new Set(seen)].join(' | ')}`);
 }
 
-/** Walks by arrow keys, from the first place on, until something with that name has the focus. */
+/** Walks by arrow keys from the first place, by the fewest steps, until something with that name has the focus. */
 export async function walkTo(page: Page, name: RegExp): Promise<void> {
-  await page.keyboard.press('Home');
-  for (const key of ['ArrowRight', 'ArrowDown', 'ArrowLeft', 'ArrowUp']) {
-    for (let presses = 0; presses < MOST_STEPS; presses += 1) {
-      if (name.test(await focusedName(page))) return;
-      await page.keyboard.press(key);
-    }
+  const ways: string[][] = [[]];
+  const seen = new Set<string>();
+  for (const way of ways) {
+    await page.keyboard.press('Home');
+    for (const key of way) await page.keyboard.press(key);
+    const focused = await focusedName(page);
+    if (name.test(focused)) return;
+    if (seen.has(focused)) continue;
+    seen.add(focused);
+    ways.push(...['ArrowRight', 'ArrowDown', 'ArrowLeft', 'ArrowUp'].map((key) => [...way, key]));
   }
-  throw new Error(`No arrow key led to ${name} on ${page.url()}`);
+  throw new Error(`No arrow key led to ${name} on ${page.url()}; they led to ${[...seen].join(' | ')}`);
 }
 
 /** Tabs there and presses Enter, or another key. */
