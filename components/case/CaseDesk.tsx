@@ -70,7 +70,7 @@ export function CaseDesk({ view, drawing, hand: kept, decimalMark }: Props) {
         ) : readOnly ? (
           <p className="text-ink-soft">Nothing is asked here. Pick a station to see its checks.</p>
         ) : (
-          <AtHandView {...{ handle, rulebook, picked, decimalMark, onPick: setPicked }} />
+          <div className="at-hand"><AtHandView {...{ handle, rulebook, picked, decimalMark, onPick: setPicked }} /></div>
         )}
         {!readOnly && <HandSwitch hand={hand} onChange={(next) => { setHand(next); keepHand(next); }} />}
       </div>
