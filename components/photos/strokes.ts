@@ -1,4 +1,5 @@
-import { MOST_POINTS, MOST_STROKES, type Stroke } from '@/lib/schemas/photo';
+import type { Stroke } from '@/lib/schemas/photo';
+import { MOST_POINTS, MOST_STROKES } from '@/lib/schemas/photo-limits';
 
 type Point = Stroke['points'][number];
 

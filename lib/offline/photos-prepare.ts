@@ -1,4 +1,4 @@
-import { LONGEST_SIDE_PX, MOST_PHOTO_BYTES } from '@/lib/schemas/photo';
+import { LONGEST_SIDE_PX, MOST_PHOTO_BYTES } from '@/lib/schemas/photo-limits';
 
 /** Why a file is no photo for us, in a sentence for whoever chose it. */
 export class PhotoProblem extends Error {}

@@ -2,11 +2,14 @@ import { z } from 'zod';
 import { filterId, filterOf, filterText, ordered } from './list';
 
 /** A client-made uuid: the id of the row to be, and the key by which a repeated request is known. */
-const rowId = z.uuid('This id is not a uuid.');
+export const rowId = z.uuid('This id is not a uuid.');
 const words = (most: number) => z.string().trim().max(most, `Keep it under ${most.toLocaleString('en')} characters.`);
-const instant = z.iso.datetime({ offset: true, message: 'Give the time as ISO 8601 with its offset.' });
+export const instant = z.iso.datetime({ offset: true, message: 'Give the time as ISO 8601 with its offset.' });
 /** A check, cause or state of the rulebook; whether it exists is the edition's to say. */
-const rulebookId = z.string().regex(/^[a-z0-9][a-z0-9-]{0,79}$/, 'This is not an id of the rulebook.');
+export const rulebookId = z.string().regex(/^[a-z0-9][a-z0-9-]{0,79}$/, 'This is not an id of the rulebook.');
+
+/** Milliseconds to add to the device's clock to get ours. */
+export const clockOffsetMs = z.number().min(-1e11).max(1e11).default(0);
 
 export const caseId = rowId;
 
@@ -61,8 +64,7 @@ export const recordFindingInput = z.strictObject({
   answer: answerInput,
   askedBecause: z.enum(['suggested', 'always', 'random', 'choice', 'panel']).default('choice'),
   deviceAt: instant,
-  /** Milliseconds to add to the device's clock to get ours. */
-  clockOffsetMs: z.number().min(-1e11).max(1e11).default(0),
+  clockOffsetMs,
 });
 export type AnswerInput = z.input<typeof answerInput>;
 export type RecordFindingInput = z.input<typeof recordFindingInput>;
@@ -82,7 +84,7 @@ export const acknowledgeCautionsInput = z.strictObject({
   cautions: z.array(z.strictObject({ id: rowId, cautionId: rulebookId })).min(1).max(20),
   /** When they were read, if that was before now; and what to add to the device's clock to get ours. */
   deviceAt: instant.optional(),
-  clockOffsetMs: z.number().min(-1e11).max(1e11).default(0),
+  clockOffsetMs,
 });
 
 export const SURENESS_OF_CALL = ['sure', 'fairly-sure', 'guess'] as const;

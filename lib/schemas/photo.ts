@@ -1,20 +1,10 @@
 import { z } from 'zod';
+import { clockOffsetMs, instant, rowId, rulebookId } from './case';
+import { MOST_PHOTO_BYTES, MOST_POINTS, MOST_STROKES, PHOTO_TYPES } from './photo-limits';
 
-/** A resized picture is well under it; an original from a phone often is not. */
-export const MOST_PHOTO_BYTES = 4 * 1024 * 1024;
-export const PHOTO_TYPES = ['image/jpeg', 'image/webp', 'image/png'] as const;
-/** The long side of a picture as a device sends it, in pixels. */
-export const LONGEST_SIDE_PX = 2048;
-
-const rowId = z.uuid('This id is not a uuid.');
-const rulebookId = z.string().regex(/^[a-z0-9][a-z0-9-]{0,79}$/, 'This is not an id of the rulebook.');
-const instant = z.iso.datetime({ offset: true, message: 'Give the time as ISO 8601 with its offset.' });
 const description = z.string().trim().max(1000, 'Keep it under 1,000 characters.');
 
 const fraction = z.number().min(0).max(1);
-export const MOST_STROKES = 100;
-/** Of all strokes together: more than a hand draws, and well within a request. */
-export const MOST_POINTS = 6000;
 
 /** A line drawn on a photo: points in fractions of its width and height, so that any size of it can carry them. */
 export const stroke = z.strictObject({ points: z.array(z.tuple([fraction, fraction])).min(1).max(MOST_POINTS) });
@@ -35,8 +25,7 @@ export const addPhotoInput = z.strictObject({
   /** Exact length of what will be uploaded. */
   bytes: z.int().min(1).max(MOST_PHOTO_BYTES, `A photo may hold ${MOST_PHOTO_BYTES / 1024 / 1024} MB at most. Make it smaller first.`),
   takenAt: instant,
-  /** Milliseconds to add to the device's clock to get ours. */
-  clockOffsetMs: z.number().min(-1e11).max(1e11).default(0),
+  clockOffsetMs,
   description: description.default(''),
 });
 

@@ -3,7 +3,8 @@ import { lockAttachment, selectAttachment, updateAttachment } from '@/db/queries
 import { updateCase } from '@/db/queries/case';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { conflict, notFound } from '@/lib/errors';
-import { MOST_PHOTO_BYTES, photoInput, type PhotoStanding } from '@/lib/schemas/photo';
+import { photoInput, type PhotoStanding } from '@/lib/schemas/photo';
+import { MOST_PHOTO_BYTES } from '@/lib/schemas/photo-limits';
 import type { Ctx } from '../context';
 import { defineWrite } from '../define';
 import { arrivalKey } from './object-key';

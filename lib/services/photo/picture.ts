@@ -1,5 +1,5 @@
 import sharp from 'sharp';
-import { type PHOTO_TYPES } from '@/lib/schemas/photo';
+import { type PHOTO_TYPES } from '@/lib/schemas/photo-limits';
 
 /** An original from a phone has a third of it; a bomb unfolds to a thousand times as much. */
 const MOST_PIXELS = 60_000_000;

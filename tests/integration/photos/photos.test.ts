@@ -4,7 +4,7 @@ import sharp from 'sharp';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { fileResponse } from '@/lib/auth/file-response';
 import { newId } from '@/lib/ids';
-import { MOST_PHOTO_BYTES } from '@/lib/schemas/photo';
+import { MOST_PHOTO_BYTES } from '@/lib/schemas/photo-limits';
 import type { Ctx } from '@/lib/services/context';
 import { addPhoto } from '@/lib/services/photo/add';
 import { photoArrived } from '@/lib/services/photo/arrived';

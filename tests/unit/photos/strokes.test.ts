@@ -1,6 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import { extended, hasRoom, pathOf, pointAt, ringStroke } from '@/components/photos/strokes';
-import { MOST_POINTS, MOST_STROKES, strokes as schema, type Stroke } from '@/lib/schemas/photo';
+import { strokes as schema, type Stroke } from '@/lib/schemas/photo';
+import { MOST_POINTS, MOST_STROKES } from '@/lib/schemas/photo-limits';
 
 describe('a line on a photo', () => {
   test('stays on the picture and is rounded to what a screen shows', () => {
