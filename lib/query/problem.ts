@@ -14,6 +14,9 @@ export class ApiProblem extends Error {
   }
 }
 
+/** No answer, or one that may be another in a moment or after signing in again: what was asked may be asked again. */
+export const mayPass = ({ status }: ApiProblem) => status === 0 || status === 401 || status === 408 || status === 429 || status >= 500;
+
 const OFFLINE = 'No connection to Carryover. What you entered is still here; try again in a moment.';
 
 /** Reads or writes JSON; throws ApiProblem with words that can be shown. */
