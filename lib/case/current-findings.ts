@@ -25,6 +25,12 @@ export function isNewer(a: Dated, b: Dated): boolean {
   return later === 0 ? a.id > b.id : later > 0;
 }
 
+/** How an answer that comes stands to those that are there: what it would replace, and whether it comes too late for it. */
+export function arriving<Row extends Dated>(dated: Dated, rows: readonly Row[]): { standing: Row | undefined; late: boolean } {
+  const standing = currentFindings(rows).find((other) => slotOf(other) === slotOf(dated));
+  return { standing, late: standing !== undefined && !isNewer(dated, standing) };
+}
+
 /** The current answer of each check and stage: the latest. */
 export function currentFindings<Row extends Dated>(rows: readonly Row[]): Row[] {
   const latest = new Map<string, Row>();

@@ -1,17 +1,16 @@
 import { dangersOf } from '@/lib/diagnose/cautions';
 import type { CompiledRulebook } from '@/lib/diagnose/compiled';
 import { rank } from '@/lib/diagnose/rank';
-import { stateAfter } from '@/lib/diagnose/set-up';
-import type { SetUp } from '@/lib/diagnose/types';
 import type { Waiting } from '@/lib/schemas/waiting';
 import type { CaseKit } from '@/lib/schemas/case-kit';
 import type { StateParts } from './build-state';
 import { correctedTime } from './corrected-time';
-import { currentFindings, isNewer, slotOf } from './current-findings';
+import { arriving } from './current-findings';
 import { findingsForRanking } from './findings-for-ranking';
 import { readAnswer } from './read-answer';
 import type { FindingRow } from './rows';
 import { siteDay } from './site-day';
+import { vehicleAfter } from './vehicle-after';
 
 interface Asked {
   compiled: CompiledRulebook;
@@ -37,7 +36,7 @@ export function provisionalParts({ compiled, kit, waiting, now }: Asked): StateP
   for (const item of given) {
     before = rows;
     rows = [...rows, rowOf(item, { compiled, kit, rows, now })];
-    if (rows.at(-1)?.shares.length) vehicleState = after(vehicleState, compiled.checks.get(item.body.checkId)?.check.setUp ?? {});
+    if (rows.at(-1)?.shares.length) vehicleState = vehicleAfter(vehicleState, compiled.checks.get(item.body.checkId)?.check.setUp ?? {});
   }
 
   const { recordFacts } = kit.run;
@@ -75,21 +74,14 @@ function rowOf({ id, body }: Extract<Waiting, { kind: 'finding' }>, { compiled, 
   if (!check) throw new Error(`the edition has no check ${body.checkId}`);
   const correctedAt = correctedTime(body, now);
   const dated = { id, checkId: body.checkId, stage: body.stage ?? { kind: 'diagnosis' as const }, correctedAt, receivedAt: correctedAt };
-  const standing = currentFindings(rows).find((other) => slotOf(other) === slotOf(dated));
   return {
     ...readAnswer(check, body.answer, kit.person),
     ...dated,
     source: 'asked',
     askedBecause: body.askedBecause ?? 'choice',
     person: kit.person.name,
-    late: standing !== undefined && !isNewer(dated, standing),
+    late: arriving(dated, rows).late,
   };
-}
-
-/** Where the vehicle stands once a check was made. */
-export function after(state: SetUp, setUp: SetUp): SetUp {
-  const { access, ...rest } = stateAfter({ ...state, access: state.access ?? [] }, setUp);
-  return { ...rest, access: [...access] };
 }
 
 function acknowledged({ compiled, kit, waiting, now }: Asked): StateParts['acknowledged'] {

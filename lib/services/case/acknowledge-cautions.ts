@@ -1,13 +1,13 @@
 import { lockCase } from '@/db/queries/case';
 import { insertAcknowledgements } from '@/db/queries/finding';
 import { PERMITTED } from '@/lib/auth/permissions';
+import { correctedTime } from '@/lib/case/corrected-time';
+import { siteDay } from '@/lib/case/site-day';
 import { dangersOf } from '@/lib/diagnose/cautions';
 import { invalid, notFound } from '@/lib/errors';
 import { acknowledgeCautionsInput } from '@/lib/schemas/case';
 import { defineWrite } from '../define';
 import { compiledEdition } from '../edition/compiled';
-import { correctedTime } from '@/lib/case/corrected-time';
-import { siteDay } from '@/lib/case/site-day';
 
 /** Notes that a person read cautions today, in the danger of the check at hand. */
 export const acknowledgeCautions = defineWrite({

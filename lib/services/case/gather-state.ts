@@ -3,13 +3,13 @@ import { selectCaseHead } from '@/db/queries/case';
 import { selectAcknowledgements, selectFindingNotes, selectFindings } from '@/db/queries/finding';
 import { selectLastRuns } from '@/db/queries/run';
 import type { RunResult } from '@/db/schema';
+import type { StateParts } from '@/lib/case/build-state';
+import { findingsForRanking } from '@/lib/case/findings-for-ranking';
+import { siteDay } from '@/lib/case/site-day';
 import { rank, type Ranking } from '@/lib/diagnose';
 import { notFound } from '@/lib/errors';
 import type { Ctx } from '../context';
 import { compiledEdition } from '../edition/compiled';
-import type { StateParts } from '@/lib/case/build-state';
-import { findingsForRanking } from '@/lib/case/findings-for-ranking';
-import { siteDay } from '@/lib/case/site-day';
 
 type Head = NonNullable<Awaited<ReturnType<typeof selectCaseHead>>>;
 

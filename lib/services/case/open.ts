@@ -3,6 +3,9 @@ import { selectPublishedEdition } from '@/db/queries/edition';
 import { insertFindings } from '@/db/queries/finding';
 import { selectUnit } from '@/db/queries/unit';
 import { PERMITTED } from '@/lib/auth/permissions';
+import { findingsForRanking } from '@/lib/case/findings-for-ranking';
+import { releaseHolds } from '@/lib/case/release-holds';
+import { siteDay } from '@/lib/case/site-day';
 import type { Finding } from '@/lib/diagnose';
 import { findingsFromRecord } from '@/lib/diagnose/findings-from-record';
 import { AS_PARKED } from '@/lib/diagnose/set-up';
@@ -15,10 +18,7 @@ import { addUnit } from '../unit/add-unit';
 import { noteReading } from '../unit/note-reading';
 import { unitRecord } from '../unit/unit-record';
 import { complaintFindings, complaintIds } from './complaints';
-import { findingsForRanking } from '@/lib/case/findings-for-ranking';
-import { releaseHolds } from '@/lib/case/release-holds';
 import { makeRun } from './run-of-record';
-import { siteDay } from '@/lib/case/site-day';
 
 /**
  * Opens a case on a unit, known or made on the spot: complaints and what the record knows become its first findings,

@@ -1,15 +1,15 @@
 import { selectCalls, selectCaseEvents } from '@/db/queries/case';
 import { PERMITTED } from '@/lib/auth/permissions';
-import { readCaseInput } from '@/lib/schemas/case';
-import type { CallView, CaseReasons, CaseState, CaseView } from '@/lib/schemas/case-view';
-import { defineRead } from '../define';
 import { buildReasons } from '@/lib/case/build-reasons';
 import { buildState } from '@/lib/case/build-state';
-import { gatherState } from './gather-state';
-import { holdsOfUnit } from './holds-of-unit';
 import { headView } from '@/lib/case/view/head';
 import { momentsOf } from '@/lib/case/view/moments';
 import { rulebookView } from '@/lib/case/view/rulebook';
+import { readCaseInput } from '@/lib/schemas/case';
+import type { CallView, CaseReasons, CaseState, CaseView } from '@/lib/schemas/case-view';
+import { defineRead } from '../define';
+import { gatherState } from './gather-state';
+import { holdsOfUnit } from './holds-of-unit';
 
 /** What changes of a case: its ranking, findings and next checks, now or as they were. */
 export const readCaseState = defineRead({

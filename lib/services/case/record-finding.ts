@@ -3,6 +3,14 @@ import { lockCase, updateCase } from '@/db/queries/case';
 import { insertFinding, selectAcknowledgements, selectFindingNotes, selectFindings } from '@/db/queries/finding';
 import { selectLatestRun } from '@/db/queries/run';
 import { PERMITTED } from '@/lib/auth/permissions';
+import { buildState } from '@/lib/case/build-state';
+import { correctedTime } from '@/lib/case/corrected-time';
+import { arriving } from '@/lib/case/current-findings';
+import { findingsForRanking } from '@/lib/case/findings-for-ranking';
+import { readAnswer } from '@/lib/case/read-answer';
+import { releaseHolds } from '@/lib/case/release-holds';
+import { siteDay } from '@/lib/case/site-day';
+import { vehicleAfter } from '@/lib/case/vehicle-after';
 import type { CompiledRulebook } from '@/lib/diagnose';
 import { cautionsToRead } from '@/lib/diagnose/cautions';
 import type { Check } from '@/lib/diagnose/types';
@@ -12,16 +20,8 @@ import type { CaseState } from '@/lib/schemas/case-view';
 import type { Ctx } from '../context';
 import { defineWrite } from '../define';
 import { compiledEdition } from '../edition/compiled';
-import { buildState } from '@/lib/case/build-state';
-import { correctedTime } from '@/lib/case/corrected-time';
-import { currentFindings, isNewer, slotOf } from '@/lib/case/current-findings';
-import { findingsForRanking } from '@/lib/case/findings-for-ranking';
-import { releaseHolds } from '@/lib/case/release-holds';
-import { after } from '@/lib/case/provisional';
 import { gatherState } from './gather-state';
-import { readAnswer } from '@/lib/case/read-answer';
 import { makeRun } from './run-of-record';
-import { siteDay } from '@/lib/case/site-day';
 import { writingOf } from './writing';
 
 /**
@@ -57,15 +57,8 @@ export const recordFinding = defineWrite({
     const says = answer.shares.length > 0;
     if (says) refuseUnreadCautions(compiled, check.check, acknowledged);
 
-    const dated = {
-      id: input.id,
-      checkId: input.checkId,
-      stage: input.stage,
-      correctedAt,
-      receivedAt,
-    };
-    const standing = currentFindings(rows).find((other) => slotOf(other) === slotOf(dated));
-    const late = standing !== undefined && !isNewer(dated, standing);
+    const dated = { id: input.id, checkId: input.checkId, stage: input.stage, correctedAt, receivedAt };
+    const { standing, late } = arriving(dated, rows);
     const finding = { ...answer, ...dated, source: 'asked', askedBecause: input.askedBecause, late };
     const written = await insertFinding(tx, {
       ...finding,
@@ -76,7 +69,7 @@ export const recordFinding = defineWrite({
       supersedes: late ? null : (standing?.id ?? null),
     });
     if (!written) throw takenId();
-    const vehicleState = says ? after(head.vehicleState, check.check.setUp) : head.vehicleState;
+    const vehicleState = says ? vehicleAfter(head.vehicleState, check.check.setUp) : head.vehicleState;
     const rowsNow = [...rows, { ...finding, person: ctx.person.name }];
     await updateCase(tx, of, { vehicleState, releaseHolds: releaseHolds(compiled, rowsNow) });
 
