@@ -56,11 +56,11 @@ export function useCase(view: CaseView) {
   const serverReasons = useCaseReasons(server, view.reasons);
 
   const connection = useSyncExternalStore(onConnection, readConnection, connectionAtFirst);
-  const waiting = useWaiting(caseId, isNow);
+  const waiting = useWaiting(caseId, reader.personId, isNow);
   const unsent = waiting.filter(({ sentAt, refusal }) => sentAt === undefined && refusal === null);
   const slow = useAfter(PATIENCE_MS, unsent.length > 0);
   const provisional = useProvisional(caseId, waiting, isNow && (!connection.reachable || slow));
-  const difference = useDifference(caseId, provisional, server);
+  const difference = useDifference(caseId, reader.personId, provisional, server);
   useKit(caseId, server.version, isNow && connection.reachable);
 
   const post = (waitingItem: Parameters<typeof keepAndSend>[1], path: string) => keepAndSend(client, waitingItem, `/api/v1/cases/${caseId}/${path}`);
@@ -133,7 +133,7 @@ function useKit(caseId: string, version: number, enabled: boolean): void {
 }
 
 /** Takes the server's word on what was sent, and notes where it differs from what this device had shown. */
-function useDifference(caseId: string, provisional: Provisional | null, server: CaseState): Difference | null {
+function useDifference(caseId: string, personId: string, provisional: Provisional | null, server: CaseState): Difference | null {
   const client = useQueryClient();
   const [difference, setDifference] = useState<Difference | null>(null);
   const shown = useRef<Provisional | null>(null);
@@ -146,13 +146,13 @@ function useDifference(caseId: string, provisional: Provisional | null, server: 
         if (told.kind !== 'sent' || told.caseId !== caseId || !told.state) return;
         const fresh = told.state;
         client.setQueryData<CaseState>([...queryKeys.caseState(caseId), null], (held) => (held && held.version > fresh.version ? held : fresh));
-        void waitingOf(caseId).then((items) => {
+        void waitingOf({ caseId, personId }).then((items) => {
           if (items.some(({ sentAt, refusal }) => sentAt === undefined && refusal === null)) return;
           setDifference(shown.current && differenceOf(shown.current.state, fresh));
           shown.current = null;
         });
       }),
-    [caseId, client],
+    [caseId, personId, client],
   );
   return difference && server.version >= difference.version ? difference : null;
 }

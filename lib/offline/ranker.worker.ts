@@ -41,7 +41,7 @@ async function answer(question: RankerQuestion): Promise<RankerAnswer['result']>
       throw error;
     }
   }
-  const parts = provisionalParts({ compiled, kit, waiting: await waitingOf(question.caseId), now: new Date() });
+  const parts = provisionalParts({ compiled, kit, waiting: await waitingOf(kit), now: new Date() });
   return { kind: 'state', kitVersion: kit.version, state: buildState(parts), reasons: buildReasons(parts) };
 }
 

@@ -16,7 +16,7 @@ export async function refreshKit(caseId: string): Promise<CaseKit> {
   const held = await db.get('kit', caseId);
   // Two requests may come back in the other order.
   if (!held || held.personId !== kit.personId || held.version <= kit.version) await db.put('kit', kit);
-  await forgetSent(await waitingOf(caseId), askedAt);
+  await forgetSent(await waitingOf(kit), askedAt);
   tell({ kind: 'kit-changed', caseId });
   return kit;
 }

@@ -14,10 +14,10 @@ export async function keepWaiting(waiting: Waiting): Promise<void> {
   tell({ kind: 'waiting-changed', caseId: waiting.caseId });
 }
 
-/** Everything of a case that is here and not in its kit, in the order of doing. */
-export async function waitingOf(caseId: string): Promise<Kept[]> {
+/** Everything of a case that this person has here and that is not in its kit, in the order of doing. */
+export async function waitingOf({ caseId, personId }: Pick<Waiting, 'caseId' | 'personId'>): Promise<Kept[]> {
   const db = await offlineDatabase();
-  return sorted(await db.getAllFromIndex('waiting', 'case', caseId));
+  return sorted(await db.getAllFromIndex('waiting', 'case', caseId)).filter((item) => item.personId === personId);
 }
 
 /** What has still to be sent by this person, of any case. */

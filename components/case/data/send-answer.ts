@@ -37,7 +37,7 @@ export async function keepAndSend(client: QueryClient, waiting: Waiting, path: s
   const heard = readConnection().reachable ? await Promise.race([word.heard, pause(PATIENCE_MS)]) : undefined;
   word.cancel();
   if (heard === 'sent') return;
-  const items = await waitingOf(waiting.caseId);
+  const items = await waitingOf(waiting);
   if (heard === 'refused') {
     const item = items.find(({ id }) => id === waiting.id);
     if (item?.refusal) {

@@ -29,7 +29,7 @@ export const provisionalOptions = (caseId: string, waiting: readonly Kept[]) =>
   });
 
 /** What waits on this device for the case, kept in step with every tab. */
-export function useWaiting(caseId: string, enabled: boolean): Kept[] {
+export function useWaiting(caseId: string, personId: string, enabled: boolean): Kept[] {
   const client = useQueryClient();
   useEffect(() => {
     if (!enabled) return;
@@ -39,7 +39,7 @@ export function useWaiting(caseId: string, enabled: boolean): Kept[] {
       if (told.kind === 'kit-changed') void client.invalidateQueries({ queryKey: queryKeys.caseProvisional(caseId) });
     });
   }, [caseId, client, enabled]);
-  const { data } = useQuery({ queryKey: queryKeys.caseWaiting(caseId), queryFn: () => waitingOf(caseId), enabled, networkMode: 'always', retry: false });
+  const { data } = useQuery({ queryKey: queryKeys.caseWaiting(caseId), queryFn: () => waitingOf({ caseId, personId }), enabled, networkMode: 'always', retry: false });
   return data ?? NOTHING;
 }
 
