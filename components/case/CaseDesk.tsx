@@ -11,7 +11,7 @@ import { STATIONS, type StationId } from '@/lib/diagnose/stations';
 import type { CaseState, CaseView, RulebookView } from '@/lib/schemas/case-view';
 import { Answered } from './Answered';
 import { AnsweredStrip } from './AnsweredStrip';
-import { atHand, ofSuggestion, type AtHand, type Picked } from './at-hand';
+import { atHand, ofSuggestion, type Picked } from './at-hand';
 import { Causes } from './Causes';
 import { CheckAtHand } from './CheckAtHand';
 import { keepHand, type Hand } from './hand';
@@ -22,6 +22,7 @@ import { ReleaseHold } from './ReleaseHold';
 import { StationChecks } from './StationChecks';
 import { SyncStrip } from './SyncStrip';
 import { useCase, type CaseHandle } from './use-case';
+import { nameOf, useHeld } from './use-held';
 import { WhatNext } from './WhatNext';
 import { changeText } from './words';
 
@@ -107,7 +108,12 @@ interface AtHandProps {
 function AtHandView({ handle, rulebook, picked, decimalMark, onPick }: AtHandProps) {
   const { state } = handle;
   const [passed, setPassed] = useState<ReadonlySet<string>>(new Set());
-  const asked = useHeld(atHand(state, rulebook, picked, passed), handle.answer.isPending);
+  const { isPending: pending, submittedAt } = handle.answer;
+  const asked = useHeld(atHand(state, rulebook, picked, passed), {
+    turn: [picked?.kind === 'panel' ? picked.panelId : picked?.checkId, passed.size, submittedAt].join('/'),
+    pending,
+    isOpen: (held) => held.kind === 'panel' || !state.findings.some(({ checkId, current }) => current && checkId === held.checkId),
+  });
   const shown = useRef(nameOf(asked));
   useEffect(() => {
     // The page itself has the focus at first; after an answer it goes to the next question.
@@ -143,15 +149,6 @@ function AtHandView({ handle, rulebook, picked, decimalMark, onPick }: AtHandPro
       onAnswered={() => onPick(null)}
     />
   );
-}
-
-const nameOf = (asked: AtHand | null) => (asked?.kind === 'panel' ? asked.panelId : (asked?.checkId ?? null));
-
-/** What is asked, kept while an answer is on its way: the next question comes once, when it is known. */
-function useHeld(asked: AtHand | null, pending: boolean): AtHand | null {
-  const [held, setHeld] = useState(asked);
-  if (!pending && nameOf(held) !== nameOf(asked)) setHeld(asked);
-  return pending ? held : asked;
 }
 
 /** No check is worth its time: say so, and leave the way open to go on. */
