@@ -131,7 +131,7 @@ function AtHandView({ handle, rulebook, picked, decimalMark, onPick }: AtHandPro
     };
     return panel ? (
       <div onClickCapture={keep}>
-        <PanelAtHand panel={panel} rulebook={rulebook} handle={handle} stationName={stationName(panel.station)} onDone={pass} />
+        <PanelAtHand key={panel.id} panel={panel} rulebook={rulebook} handle={handle} stationName={stationName(panel.station)} onDone={pass} />
       </div>
     ) : null;
   }
@@ -139,6 +139,7 @@ function AtHandView({ handle, rulebook, picked, decimalMark, onPick }: AtHandPro
   if (!check) return null;
   return (
     <CheckAtHand
+      key={check.id}
       check={check}
       rulebook={rulebook}
       handle={handle}
