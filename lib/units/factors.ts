@@ -60,3 +60,12 @@ export const DAY = 86_400;
 
 /** Seconds in a year of 365.25 days. Ages are typed in years; no sum depends on which year is meant. */
 export const YEAR = 365.25 * DAY;
+
+/** Watts in a horsepower of 550 ft lbf/s: 745.699 87... W (SP 811 prints 7.456 999 E+02). */
+export const HORSEPOWER = 550 * FOOT * POUND * STANDARD_GRAVITY;
+
+/** Watts in a metric horsepower of 75 m kgf/s: 735.498 75 W, exact. */
+export const METRIC_HORSEPOWER = 75 * STANDARD_GRAVITY;
+
+/** Radians in a degree. */
+export const DEGREE = Math.PI / 180;

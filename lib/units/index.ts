@@ -2,6 +2,21 @@
  * What people type and what they are shown: quantities with their units, parsed into SI and back. Pure, without
  * dependencies, for server and browser alike.
  */
+export {
+  ATMOSPHERE,
+  absolutePressure,
+  gaugePressure,
+  hotterBy,
+  temperature,
+  temperatureDifference,
+  toAbsolute,
+  toGauge,
+  warmed,
+  type AbsolutePressure,
+  type GaugePressure,
+  type Temperature,
+  type TemperatureDifference,
+} from './absolute';
 export { convert, fromSi, toSi } from './convert';
 export type { QuantityDefinition, UnitDefinition } from './definition';
 export { formatQuantity, formatValue, type FormatOptions } from './format';

@@ -3,7 +3,10 @@ import { QUANTITY_IDS, isUnitOf, type Quantity, type UnitOf } from './quantities
 /** The unit a person set for each quantity. */
 export type UnitPreferences = { readonly [Q in Quantity]: UnitOf<Q> };
 
-/** What a shop in the United States uses. Oil per hour is in millilitres everywhere: ounces would all be small decimals. */
+/**
+ * What a shop in the United States uses. Oil per hour is in millilitres everywhere: ounces would all be small decimals.
+ * So are an oil's viscosity and density in the units of its data sheet.
+ */
 export const US_UNITS: UnitPreferences = {
   pressure: 'psi',
   pressureRate: 'psi/min',
@@ -24,6 +27,13 @@ export const US_UNITS: UnitPreferences = {
   rotationalSpeed: 'rpm',
   ratio: 'percent',
   count: 'one',
+  absolutePressure: 'psia',
+  kinematicViscosity: 'cSt',
+  dynamicViscosity: 'mPas',
+  density: 'g/mL',
+  concentration: 'mg/m3',
+  power: 'hp',
+  angle: 'deg',
 };
 
 /** What a shop nearly everywhere else uses. */
@@ -41,6 +51,8 @@ export const METRIC_UNITS: UnitPreferences = {
   mass: 'g',
   flow: 'L/min',
   distance: 'km',
+  absolutePressure: 'kPa abs',
+  power: 'kW',
 };
 
 interface Size<Q extends Quantity> {
@@ -70,6 +82,11 @@ const SIZES: { readonly [Q in Quantity]?: readonly Size<Q>[] } = {
     { us: ['oz'], metric: ['g'] },
     { us: ['lb'], metric: ['kg'] },
   ],
+  absolutePressure: [
+    { us: ['psia'], metric: ['kPa abs', 'bar abs', 'kgf/cm2 abs', 'atm'] },
+    { us: ['inHg abs'], metric: ['mbar abs'] },
+  ],
+  power: [{ us: ['hp'], metric: ['kW', 'PS', 'W'] }],
   flow: [
     { us: ['cfm'], metric: ['L/min', 'L/s'] },
     { us: ['gal/min'], metric: ['L/min', 'mL/min'] },
@@ -77,7 +94,19 @@ const SIZES: { readonly [Q in Quantity]?: readonly Size<Q>[] } = {
 };
 
 /** Written alike in both systems, so the unit in which a check is written stands: an age in years, a share in percent. */
-const SAME_EVERYWHERE: ReadonlySet<Quantity> = new Set<Quantity>(['duration', 'engineHours', 'cycleRate', 'rotationalSpeed', 'ratio', 'count']);
+const SAME_EVERYWHERE: ReadonlySet<Quantity> = new Set<Quantity>([
+  'duration',
+  'engineHours',
+  'cycleRate',
+  'rotationalSpeed',
+  'ratio',
+  'count',
+  'kinematicViscosity',
+  'dynamicViscosity',
+  'density',
+  'concentration',
+  'angle',
+]);
 
 /**
  * The unit to show a quantity in.

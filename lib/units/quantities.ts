@@ -1,5 +1,6 @@
 import type { QuantityDefinition, UnitDefinition } from './definition';
 import { pressure, pressureRate, temperature, temperatureDifference, vacuum } from './tables/air';
+import { absolutePressure, angle, concentration, density, dynamicViscosity, kinematicViscosity, power } from './tables/fluid';
 import { count, ratio } from './tables/number';
 import { area, displacement, distance, flow, length, mass, oilRate, volume } from './tables/size';
 import { cycleRate, duration, engineHours, rotationalSpeed } from './tables/time';
@@ -28,6 +29,13 @@ const TABLE = {
   rotationalSpeed,
   ratio,
   count,
+  absolutePressure,
+  kinematicViscosity,
+  dynamicViscosity,
+  density,
+  concentration,
+  power,
+  angle,
 };
 
 /** The id of a quantity: 'pressure', 'length', ... */
