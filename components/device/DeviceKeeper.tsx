@@ -2,9 +2,9 @@
 
 import { useEffect } from 'react';
 import { onConnection, readConnection } from '@/lib/offline/connection';
+import { takeDevice } from '@/lib/offline/owner';
 import { startPhotoSender } from '@/lib/offline/photos-sender';
 import { startSender } from '@/lib/offline/sender';
-import { takeDevice } from '@/lib/offline/wipe';
 
 interface Props {
   personId: string;

@@ -1,6 +1,7 @@
 import { api } from '@/lib/query/problem';
 import { offlineDatabase } from './database';
-import { dropOtherPages, hasPage, keepBuiltFiles, keepPages, keepThumbnails } from './keep-pages';
+import { dropKept, dropOtherPages, hasPage, keepBuiltFiles, keepPages, keepThumbnails } from './keep-pages';
+import { isOwned, keepForOwner } from './owner';
 import { askRanker } from './ranker';
 import { refreshKit } from './refresh-kit';
 
@@ -11,8 +12,13 @@ interface Listed {
   cases: { id: string; version: number; thumbnails: string[] }[];
 }
 
-/** Keeps on this device what it takes to go on with the open cases of whoever is signed in. */
+/** Keeps on this device what it takes to go on with the open cases of whoever is signed in; nothing, if they sign out meanwhile. */
 export async function keepOpenCases(): Promise<void> {
+  await fill();
+  if (!(await isOwned())) await dropKept();
+}
+
+async function fill(): Promise<void> {
   const { cases } = await api<Listed>('/api/v1/device/cases');
   const db = await offlineDatabase();
   const paths = cases.map(({ id }) => `/cases/${id}`);
@@ -20,6 +26,7 @@ export async function keepOpenCases(): Promise<void> {
   await keepBuiltFiles();
   await dropOtherPages([...paths, ...here, '/cases']);
   for (const { id, version, thumbnails } of cases) {
+    if (!(await isOwned())) return;
     const held = await db.get('kit', id);
     // The case's own page keeps its kit by itself.
     if (held?.version === version && (await hasPage(`/cases/${id}`))) continue;
@@ -29,5 +36,5 @@ export async function keepOpenCases(): Promise<void> {
   }
   await keepPages(['/cases', ...here.filter((path) => !paths.includes(path))]);
   await askRanker({ kind: 'keep' });
-  await db.put('device', cases.map(({ id }) => id), KEPT_CASES);
+  await keepForOwner('device', cases.map(({ id }) => id), KEPT_CASES);
 }

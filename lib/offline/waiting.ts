@@ -28,23 +28,21 @@ export async function unsentOf(personId: string, organisationId: string): Promis
   );
 }
 
-export async function markSent(item: Kept): Promise<void> {
-  const db = await offlineDatabase();
-  await db.put('waiting', { ...item, sentAt: Date.now() } as Kept);
-  tell({ kind: 'waiting-changed', caseId: item.caseId });
-}
+export const markSent = (item: Kept) => change(item, { sentAt: Date.now() });
 
-export async function markRefused(item: Kept, refusal: NonNullable<Waiting['refusal']>): Promise<void> {
-  const db = await offlineDatabase();
-  await db.put('waiting', { ...item, refusal });
-  tell({ kind: 'waiting-changed', caseId: item.caseId });
-}
+export const markRefused = (item: Kept, refusal: NonNullable<Waiting['refusal']>) => change(item, { refusal });
 
 /** Tries a refused one again: what stood in its way may be gone. */
-export async function tryAgain(item: Kept): Promise<void> {
+export const tryAgain = (item: Kept) => change(item, { refusal: null });
+
+/** Changes what is still here: what was discarded meanwhile, or went with a sign-out, doesn't come back. */
+async function change({ order, caseId }: Kept, changed: Partial<Pick<Kept, 'sentAt' | 'refusal'>>): Promise<void> {
   const db = await offlineDatabase();
-  await db.put('waiting', { ...item, refusal: null });
-  tell({ kind: 'waiting-changed', caseId: item.caseId });
+  const tx = db.transaction('waiting', 'readwrite');
+  const held = await tx.store.get(order);
+  if (held) await tx.store.put({ ...held, ...changed });
+  await tx.done;
+  tell({ kind: 'waiting-changed', caseId });
 }
 
 export async function discard(item: Pick<Kept, 'order' | 'caseId'>): Promise<void> {

@@ -13,26 +13,13 @@ export async function unsentCount(): Promise<number> {
   }
 }
 
-/** Takes everything of Carryover off this device but its built files. */
+/** Takes everything of Carryover off this device but its built files, at once: nothing is written between one store and the next. */
 export async function wipeDevice(): Promise<void> {
   const db = await offlineDatabase().catch(() => undefined);
-  if (db) for (const store of ['waiting', 'photo', 'kit', 'edition', 'device'] as const) await db.clear(store);
-  await dropKept();
-}
-
-/**
- * Notes who uses this device now. Another person's cases are none of theirs; what the other has still to send stays
- * until he or she is back, and shows to nobody.
- */
-export async function takeDevice(person: { personId: string; organisationId: string }): Promise<void> {
-  const db = await offlineDatabase();
-  const mark = `${person.organisationId}/${person.personId}`;
-  const held = await db.get('device', 'user');
-  if (held === mark) return;
-  if (held !== undefined) {
-    await db.clear('kit');
-    await db.clear('edition');
-    await dropKept();
+  if (db) {
+    const tx = db.transaction(db.objectStoreNames, 'readwrite');
+    await Promise.all([...db.objectStoreNames].map((name) => tx.objectStore(name).clear()));
+    await tx.done;
   }
-  await db.put('device', mark, 'user');
+  await dropKept();
 }

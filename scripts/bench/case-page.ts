@@ -6,6 +6,7 @@ import { gzipSync } from 'node:zlib';
 import type { Browser, Page } from 'playwright-core';
 import { answerAtHand } from '@/tests/e2e/support/case-desk';
 import { launchBrowser, PHONE } from '@/tests/e2e/support/browser';
+import { shiftsOn, watchShifts, type Shifts } from '@/tests/e2e/support/layout-shift';
 import { signInAs } from '@/tests/e2e/support/sign-in';
 import { startBenchServer, type BenchServer } from './server';
 
@@ -77,13 +78,7 @@ async function slowed(page: Page): Promise<void> {
 async function taps(browser: Browser, { url, signIn, caseIds }: BenchServer) {
   const context = await browser.newContext(PHONE);
   const page = await context.newPage();
-  await page.addInitScript(() => {
-    const shifts: number[] = [];
-    (window as unknown as { shifts: number[] }).shifts = shifts;
-    new PerformanceObserver((list) => {
-      for (const entry of list.getEntries() as (PerformanceEntry & { value: number; hadRecentInput: boolean })[]) if (!entry.hadRecentInput) shifts.push(entry.value);
-    }).observe({ type: 'layout-shift', buffered: true });
-  });
+  await watchShifts(page);
   await page.addInitScript(LISTEN_FOR_TAPS);
   await signInAs(page, url, signIn);
   await page.goto(`${url}/cases/${caseIds[1]}`);
@@ -98,12 +93,19 @@ async function taps(browser: Browser, { url, signIn, caseIds }: BenchServer) {
   await slowed(plain);
 
   let at = 1;
+  let worst: Shifts = { sum: 0, moved: [] };
+  const shifts = async () => {
+    const here = await shiftsOn(page);
+    if (here.sum >= worst.sum) worst = here;
+    return worst;
+  };
   const cannotTell = page.locator('section[aria-labelledby=check-at-hand]').getByRole('button', { name: 'Can’t tell' }).first();
   return {
     answer: async () => {
       await page.bringToFront();
       // Where enough is known nothing is asked any more: on with the next case.
       while (!(await cannotTell.isVisible())) {
+        await shifts();
         await page.goto(`${url}/cases/${caseIds[(at += 1)]}`);
         await cannotTell.waitFor();
         await page.waitForTimeout(1_500);
@@ -119,7 +121,8 @@ async function taps(browser: Browser, { url, signIn, caseIds }: BenchServer) {
       await plain.bringToFront();
       return tapTime(plain, () => plain.getByRole('button').click());
     },
-    shifts: () => page.evaluate(() => (window as unknown as { shifts: number[] }).shifts.reduce((sum, value) => sum + value, 0)),
+    /** Of the page that moved most. */
+    shifts,
     close: () => context.close(),
   };
 }

@@ -48,6 +48,8 @@ async function firstId(page: Page, prefix: string): Promise<string | undefined> 
 }
 
 async function firstHref(page: Page, pattern: RegExp): Promise<string | undefined> {
+  // Loaded isn't there yet: the page may still show its outline, which has no heading.
+  await page.locator('h1').waitFor();
   const hrefs = await page.locator('main a[href]').evaluateAll((links) => links.map((link) => link.getAttribute('href') ?? ''));
   return hrefs.find((href) => pattern.test(href));
 }

@@ -5,6 +5,7 @@ import { expectNoAxeViolations } from './support/axe';
 import { DESKTOP, launchBrowser, PHONE } from './support/browser';
 import { answerAtHand, openCaseOn } from './support/case-desk';
 import { tabTo } from './support/keyboard';
+import { shiftsOn, watchShifts } from './support/layout-shift';
 import { startServer, type TestServer } from './support/server';
 import { signIn } from './support/sign-in';
 
@@ -47,6 +48,7 @@ describe('the case page', () => {
 
   async function open(options: BrowserContextOptions): Promise<Page> {
     const page = await (await browser.newContext({ ...options, storageState: signedIn })).newPage();
+    await watchShifts(page);
     await page.goto(`${server.url}${path}`);
     // The page stands before its script runs; a tap before that would be lost on this test, though not on a person.
     await page.waitForFunction(() => Object.keys(document.querySelector('.oil-path-station') ?? {}).some((key) => key.startsWith('__react')));
@@ -187,24 +189,10 @@ describe('the case page', () => {
     ['desktop', DESKTOP],
   ])('shifts nothing while four checks are answered on a %s', async (_size, options) => {
     const page = await open(options);
-    await page.evaluate(() => {
-      const shifts: string[] = [];
-      Object.assign(window, { shifts, shifted: 0 });
-      new PerformanceObserver((list) => {
-        for (const entry of list.getEntries() as (PerformanceEntry & { value: number; hadRecentInput: boolean; sources: { node?: Node }[] })[]) {
-          if (entry.hadRecentInput) continue;
-          (window as unknown as { shifted: number }).shifted += entry.value;
-          shifts.push(`${entry.value.toFixed(4)} ${entry.sources.map(({ node }) => (node instanceof Element ? node.outerHTML.slice(0, 80) : '')).join(' | ')}`);
-        }
-      }).observe({ type: 'layout-shift', buffered: true });
-    });
     for (let i = 0; i < 4; i += 1) await answerAtHand(page);
     await page.waitForTimeout(1000);
-    const { shifted, shifts } = await page.evaluate(() => {
-      const seen = window as unknown as { shifted: number; shifts: string[] };
-      return { shifted: seen.shifted, shifts: seen.shifts };
-    });
-    expect(shifted, shifts.join('\n')).toBeLessThanOrEqual(MOST_SHIFT);
+    const { sum, moved } = await shiftsOn(page);
+    expect(sum, moved.join('\n')).toBeLessThanOrEqual(MOST_SHIFT);
   });
 });
 
