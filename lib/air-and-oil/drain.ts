@@ -1,6 +1,9 @@
 import { GRAVITY } from './air';
 import { requirePositive, requireWithin } from './out-of-range';
 
+/** A right angle, and the last bit that a conversion from degrees may add. */
+const PLUMB = Math.PI / 2 + 1e-12;
+
 /** Up to this Reynolds number oil runs in layers. */
 const LAMINAR_UP_TO = 2000;
 
@@ -28,7 +31,7 @@ function requirePipe({ boreM, viscosityM2PerS }: Pipe): void {
  */
 export function laminarGravityFlow({ slopeRad, ...pipe }: Pipe & { readonly slopeRad: number }): { flowM3PerS: number; reynolds: number; laminar: boolean } {
   requirePipe(pipe);
-  requireWithin('slopeRad', 'angle', slopeRad, { least: 0, most: Math.PI / 2 });
+  requireWithin('slopeRad', 'angle', slopeRad, { least: 0, most: PLUMB });
   const flowM3PerS = (Math.PI * GRAVITY * pipe.boreM ** 4 * Math.sin(slopeRad)) / (128 * pipe.viscosityM2PerS);
   const reynolds = (4 * flowM3PerS) / (Math.PI * pipe.boreM * pipe.viscosityM2PerS);
   return { flowM3PerS, reynolds, laminar: reynolds <= LAMINAR_UP_TO };
