@@ -58,6 +58,16 @@ const ROWS = [
     because: 'Units are pure arithmetic on text.',
   },
   {
+    folder: 'lib/air-and-oil/**',
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES('units'), 'zod'],
+    because: 'A sum is worked out alike on a page, on the server and without a connection.',
+  },
+  {
+    folder: 'lib/stopwatch/**',
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES(), 'zod'],
+    because: 'A stopwatch is times of the clock, handed to it.',
+  },
+  {
     folder: 'lib/schemas/**',
     never: [...FRAMEWORK, ...DATABASE, ...APPLICATION, '@/lib/services', '@/lib/services/**', '@/lib/auth/session'],
     because: 'Schemas are shared by form, action, route and service.',

@@ -13,6 +13,8 @@ const BROKEN: [file: string, source: string][] = [
   ['lib/diagnose/rank.ts', "import { parseQuantity } from '@/lib/units'; export default parseQuantity;"],
   ['lib/diagnose/record-run.ts', "import { readFileSync } from 'node:fs'; export default readFileSync;"],
   ['lib/units/parse.ts', "import { rank } from '@/lib/diagnose'; export default rank;"],
+  ['lib/air-and-oil/build-up.ts', "import { z } from 'zod'; export default z;"],
+  ['lib/stopwatch/index.ts', "import { useState } from 'react'; export default useState;"],
   ['lib/schemas/case.ts', "import { unit } from '@/db/schema'; export default unit;"],
   ['lib/services/case/open.ts', "import { database } from '@/db'; export default database;"],
   ['lib/services/case/open.ts', "import { cookies } from 'next/headers'; export default cookies;"],
