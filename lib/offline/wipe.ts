@@ -1,5 +1,6 @@
 import { offlineDatabase } from './database';
 import { dropKept } from './keep-pages';
+import { dropStopwatches } from './stopwatches';
 
 /** How much would be lost with this device's keep: answers and photos that the server hasn't got. */
 export async function unsentCount(): Promise<number> {
@@ -21,5 +22,6 @@ export async function wipeDevice(): Promise<void> {
     await Promise.all([...db.objectStoreNames].map((name) => tx.objectStore(name).clear()));
     await tx.done;
   }
+  dropStopwatches();
   await dropKept();
 }
