@@ -1,0 +1,1 @@
+export const BAND_COVERAGE: Readonly<Record<string, number>> = {};
