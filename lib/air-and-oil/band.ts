@@ -30,7 +30,7 @@ export const COVERAGE = 0.95;
  * moved by its likeliest part of the way, so that a curved function has a band that is wider on its steeper side.
  *
  * @param evaluate the result for inputs; undefined where there is none (the tank never fills). It may throw for inputs
- *   out of its range, which counts as no result
+ *   out of its range: no true value is there, and the band ends before
  * @param readings by name
  * @returns undefined where there is no result for the inputs as read
  * @throws whatever `evaluate` throws for the inputs as read
@@ -45,22 +45,21 @@ export function band<Name extends string>(evaluate: (inputs: Readonly<Record<Nam
   const value = evaluate(asRead);
   if (value === undefined) return undefined;
 
-  const moved = (by: Partial<Record<Name, number>>) => {
+  /** The result with inputs moved; undefined where there is none, 'out' where an input would leave its range. */
+  const moved = (by: Partial<Record<Name, number>>, share = 1): number | undefined | 'out' => {
+    const inputs = Object.fromEntries(names.map((name) => [name, readings[name].value + share * (by[name] ?? 0)])) as Record<Name, number>;
     try {
-      const inputs = Object.fromEntries(names.map((name) => [name, readings[name].value + (by[name] ?? 0)])) as Record<Name, number>;
       return evaluate(inputs);
     } catch {
-      return undefined;
+      return 'out';
     }
   };
 
   const parts = names.map((name) => {
     const { halfWidth, times = 1 } = readings[name];
     const uncertainty = halfWidth / Math.sqrt(3);
-    const up = halfWidth > 0 ? moved({ [name]: uncertainty } as Partial<Record<Name, number>>) : value;
-    const down = halfWidth > 0 ? moved({ [name]: -uncertainty } as Partial<Record<Name, number>>) : value;
-    // Where one side has no result, the other alone tells how steep the function is.
-    const slope = halfWidth > 0 ? difference(down, value, up) / uncertainty : 0;
+    const alone = (by: number) => moved({ [name]: by } as Partial<Record<Name, number>>);
+    const slope = halfWidth > 0 ? difference(alone(-uncertainty), value, alone(uncertainty)) / uncertainty : 0;
     return { name, slope, halfWidth, times, variance: times * (slope * halfWidth) ** 2 };
   });
 
@@ -70,16 +69,31 @@ export function band<Name extends string>(evaluate: (inputs: Readonly<Record<Nam
 
   const distance = sumOfUniforms(parts.flatMap(({ slope, halfWidth, times }) => Array<number>(times).fill(slope * halfWidth)), COVERAGE);
   const way = likeliestWay(parts.map(({ slope, halfWidth, times }) => ({ reach: Math.abs(slope) * halfWidth * times, variance: times * (slope * halfWidth) ** 2 })), distance);
-  const end = (direction: 1 | -1) =>
-    moved(Object.fromEntries(parts.map(({ name, slope }, i) => [name, slope === 0 ? 0 : (direction * (way[i] ?? 0)) / slope])) as Partial<Record<Name, number>>);
+  const end = (direction: 1 | -1) => {
+    const by = Object.fromEntries(parts.map(({ name, slope }, i) => [name, slope === 0 ? 0 : (direction * (way[i] ?? 0)) / slope])) as Partial<Record<Name, number>>;
+    return furthest((share) => moved(by, share));
+  };
   return { value, low: end(-1), high: end(1), shares };
 }
 
-/** Half of what lies between the results on both sides; a whole step of one side where the other has none. */
-function difference(down: number | undefined, value: number, up: number | undefined): number {
-  if (up !== undefined && down !== undefined) return (up - down) / 2;
-  if (up !== undefined) return up - value;
-  return down === undefined ? 0 : value - down;
+/** Half of what lies between the results on both sides; where one side has none, the other alone tells how steep it is. */
+function difference(down: number | undefined | 'out', value: number, up: number | undefined | 'out'): number {
+  if (typeof up === 'number') return typeof down === 'number' ? (up - down) / 2 : up - value;
+  return typeof down === 'number' ? value - down : 0;
+}
+
+/** The result at the end of a way, or where it leaves the range of the inputs: what cannot be is not as likely. */
+function furthest(at: (share: number) => number | undefined | 'out'): number | undefined {
+  const whole = at(1);
+  if (whole !== 'out') return whole;
+  let [inside, outside] = [0, 1];
+  for (let halvings = 0; halvings < 40; halvings += 1) {
+    const middle = (inside + outside) / 2;
+    if (at(middle) === 'out') outside = middle;
+    else inside = middle;
+  }
+  const last = at(inside);
+  return last === 'out' ? undefined : last;
 }
 
 /**

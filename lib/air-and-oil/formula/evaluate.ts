@@ -13,7 +13,7 @@ export function evaluate(expression: Expression, values: Readonly<Record<string,
     case 'number':
       return expression.value;
     case 'symbol': {
-      const known = values[expression.id];
+      const known = Object.hasOwn(values, expression.id) ? values[expression.id] : undefined;
       if (known === undefined) throw new RangeError(`'${expression.id}' has no value`);
       return known;
     }

@@ -8,6 +8,7 @@ import { drainCapacity } from './drain-capacity';
 import { headPressure } from './head-pressure';
 import { leakDown } from './leak-down';
 import { lineLoss } from './line-loss';
+import { measuredBuildUp } from './measured-build-up';
 import { leakSize, orificeFlow } from './orifice-flow';
 import type { Sum } from './sum';
 import { timeLoaded } from './time-loaded';
@@ -18,6 +19,7 @@ export type { Outcome, Plot, Sum, SumInput, SumQuantity, Values } from './sum';
 
 /** In the order in which a technician meets them. */
 export const SUMS: readonly Sum[] = [
+  measuredBuildUp,
   buildUp,
   buildUpLimit,
   requiredReservoir,

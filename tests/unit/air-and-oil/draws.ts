@@ -23,14 +23,17 @@ export function defaultsOf(sum: Sum): Record<string, number> {
   return Object.fromEntries(sum.inputs.map(({ id, byDefault }) => [id, byDefault]));
 }
 
-/** The share of draws within the errors of the inputs whose result lies in the band. */
+/**
+ * The share of draws within the errors of the inputs whose result lies in the band. A draw outside the range of the sum,
+ * such as a negative loss, cannot be true and is drawn again.
+ */
 export function coverage(sum: Sum, { given = {}, halfWidths = {} }: Scenario, draws: number, seed: number): number {
   const inputs = completeInputs(sum, { ...defaultsOf(sum), ...given });
   const band = bandOf(sum, inputs, { halfWidths });
   if (!band) throw new Error(`${sum.id} comes to nothing`);
   const random = seeded(seed);
   let within = 0;
-  for (let draw = 0; draw < draws; draw += 1) {
+  for (let draw = 0; draw < draws; ) {
     const drawn = Object.fromEntries(
       sum.inputs.map(({ id, halfWidth, totalOf }) => {
         const value = inputs[id] ?? NaN;
@@ -41,19 +44,25 @@ export function coverage(sum: Sum, { given = {}, halfWidths = {} }: Scenario, dr
       }),
     );
     const result = resultOf(sum, drawn);
+    if (result === 'out') continue;
+    draw += 1;
     if ((result ?? Infinity) <= (band.high ?? Infinity) && (result ?? Infinity) >= (band.low ?? -Infinity)) within += 1;
   }
   return within / draws;
 }
 
-/** Draws may leave the range that a person may type, not the sum's own. */
-function resultOf(sum: Sum, inputs: Record<string, number>): number | undefined {
+function resultOf(sum: Sum, inputs: Record<string, number>): number | undefined | 'out' {
   try {
     const outcome = sum.compute(inputs);
     return outcome.kind === 'values' ? outcome.values[sum.main] : undefined;
   } catch (error) {
-    if (error instanceof OutOfRange) return undefined;
+    if (error instanceof OutOfRange) return 'out';
     throw error;
   }
 }
 
+
+/** Every input off by up to three times what it usually is. */
+export function tripled(sum: Sum): Scenario {
+  return { name: 'three times the usual errors', halfWidths: Object.fromEntries(sum.inputs.map(({ id, halfWidth, byDefault }) => [id, 3 * halfWidth(byDefault)])) };
+}
