@@ -26,4 +26,5 @@ export const BAND_COVERAGE: Readonly<Record<string, BandCoverage>> = {
   'break-in-bleed': { usual: 0.950, tripled: 0.954 },
   'drain-capacity': { usual: 0.950, tripled: 0.948 },
   'carry-over': { usual: 0.950, tripled: 0.950 },
+  'carry-over-by-weight': { usual: 0.948, tripled: 0.948 },
 };

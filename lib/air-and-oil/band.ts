@@ -29,8 +29,8 @@ export const COVERAGE = 0.95;
  * for normal (`sumOfUniforms`); its quantile says how far to go. There the function itself is asked, with each input
  * moved by its likeliest part of the way, so that a curved function has a band that is wider on its steeper side.
  *
- * @param evaluate the result for inputs; undefined where there is none (the tank never fills). It may throw for inputs
- *   out of its range: no true value is there, and the band ends before
+ * @param evaluate the result for inputs; undefined where there is none (the tank never fills). It may throw a RangeError
+ *   for inputs out of its range: no true value is there, and the band ends before
  * @param readings by name
  * @returns undefined where there is no result for the inputs as read
  * @throws whatever `evaluate` throws for the inputs as read
@@ -50,8 +50,9 @@ export function band<Name extends string>(evaluate: (inputs: Readonly<Record<Nam
     const inputs = Object.fromEntries(names.map((name) => [name, readings[name].value + share * (by[name] ?? 0)])) as Record<Name, number>;
     try {
       return evaluate(inputs);
-    } catch {
-      return 'out';
+    } catch (error) {
+      if (error instanceof RangeError) return 'out';
+      throw error;
     }
   };
 

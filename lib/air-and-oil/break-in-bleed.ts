@@ -1,6 +1,6 @@
 import type { AbsolutePressure, Temperature } from '@/lib/units';
 import { delivery, volumetricEfficiency } from './delivery';
-import { FREE_AIR_DENSITY, GAS_CONSTANT_AIR } from './air';
+import { FREE_AIR_TEMPERATURE, airDensity } from './air';
 import { openingForFlow } from './orifice-flow';
 
 export interface BreakIn {
@@ -22,7 +22,7 @@ export interface BreakIn {
  * The bleed that holds a pressure while a fitted compressor is broken in, so that it never unloads: the hole that passes
  * just what it delivers against that pressure.
  *
- * @returns m, the diameter of a round hole; m3/s of free air that it passes
+ * @returns m, the diameter of a round hole; m3/s that it passes, counted at the pressure of the inlet and 20 °C
  * @throws OutOfRange
  * @example
  * // 19.4 in3, 1000 rpm, 80 psi
@@ -31,13 +31,14 @@ export interface BreakIn {
 export function breakInBleed(run: BreakIn): { diameterM: number; freeAirFlowM3PerS: number } {
   const efficiency = volumetricEfficiency({ ...run, dischargePressurePa: run.holdPressurePa });
   const asTakenIn = delivery({ ...run, efficiency });
-  const freeAirFlowM3PerS = (asTakenIn * run.inletPressurePa) / (GAS_CONSTANT_AIR * run.inletTemperatureK) / FREE_AIR_DENSITY;
+  const freeAirFlowM3PerS = asTakenIn * (FREE_AIR_TEMPERATURE / run.inletTemperatureK);
   const diameterM = openingForFlow({
     freeAirFlowM3PerS,
     upstreamPressurePa: run.holdPressurePa,
     downstreamPressurePa: run.inletPressurePa,
     upstreamTemperatureK: run.tankTemperatureK,
     dischargeCoefficient: run.dischargeCoefficient,
+    freeAirDensityKgPerM3: airDensity(run.inletPressurePa, FREE_AIR_TEMPERATURE),
   });
   return { diameterM, freeAirFlowM3PerS };
 }

@@ -20,6 +20,8 @@ export interface RestrictedLine {
 /** What the compressor sends into the line. */
 export interface Delivery {
   readonly freeAirFlowM3PerS: number;
+  /** kg/m3, of the air that the flow is counted in. */
+  readonly freeAirDensityKgPerM3?: number;
   readonly inletTemperatureK: Temperature;
   readonly inletPressurePa: AbsolutePressure;
   /** Index of compression, 1 to 1.6. */
@@ -74,7 +76,7 @@ export function headTemperature(headPressurePa: AbsolutePressure, { inletTempera
  * @returns Pa, absolute, and whether a limit by the speed of sound decided it
  */
 export function pressureNeeded(headTemperatureK: Temperature, line: RestrictedLine, delivery: Delivery): { pressurePa: AbsolutePressure; choked: boolean } {
-  const air = { massFlowKgPerS: massFlowOf(delivery.freeAirFlowM3PerS), airTemperatureK: headTemperatureK };
+  const air = { massFlowKgPerS: massFlowOf(delivery.freeAirFlowM3PerS, delivery.freeAirDensityKgPerM3), airTemperatureK: headTemperatureK };
   const { narrowedBoreM, narrowedLengthM } = line;
   const sound = { lengthM: line.lengthM - narrowedLengthM, boreM: line.nominalBoreM };
   const flux = massFlux(air.massFlowKgPerS, narrowedBoreM);
@@ -124,7 +126,7 @@ export function headPressure(line: RestrictedLine, delivery: Delivery): HeadPres
     choked: needed(headPressurePa).choked,
     frictionFactor: lineFrictionFactor({
       boreM: line.narrowedBoreM,
-      massFlowKgPerS: massFlowOf(delivery.freeAirFlowM3PerS),
+      massFlowKgPerS: massFlowOf(delivery.freeAirFlowM3PerS, delivery.freeAirDensityKgPerM3),
       airTemperatureK: headTemperatureK,
     }),
     iterations: found.iterations,

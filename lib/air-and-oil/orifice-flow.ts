@@ -25,6 +25,9 @@ export function criticalFlowConstant(k = HEAT_CAPACITY_RATIO, gasConstant = GAS_
   return Math.sqrt(k / gasConstant) * (2 / (k + 1)) ** ((k + 1) / (2 * (k - 1)));
 }
 
+/** As a share of the pressure before it: with less across it no opening can be told from its flow. */
+const LEAST_DROP = 1e-9;
+
 export interface Opening {
   readonly upstreamPressurePa: AbsolutePressure;
   readonly downstreamPressurePa: AbsolutePressure;
@@ -82,7 +85,7 @@ export function orificeFlow({ diameterM, ...opening }: Opening & { readonly diam
  */
 export function openingForFlow({ freeAirFlowM3PerS, ...opening }: Opening & { readonly freeAirFlowM3PerS: number }): number {
   requireNotNegative('freeAirFlowM3PerS', 'flow', freeAirFlowM3PerS);
+  requireWithin('downstreamPressurePa', 'absolutePressure', opening.downstreamPressurePa, { least: 0, most: opening.upstreamPressurePa * (1 - LEAST_DROP) });
   const { flux } = fluxThrough(opening);
-  requirePositive('upstreamPressurePa', 'absolutePressure', flux);
   return Math.sqrt((freeAirFlowM3PerS * (opening.freeAirDensityKgPerM3 ?? FREE_AIR_DENSITY)) / (flux * (Math.PI / 4)));
 }

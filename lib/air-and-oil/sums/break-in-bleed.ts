@@ -1,5 +1,5 @@
 import { gaugePressure, temperature, toAbsolute } from '@/lib/units';
-import { FREE_AIR_DENSITY } from '../air';
+import { FREE_AIR_TEMPERATURE, airDensity } from '../air';
 import { breakInBleed as sum } from '../break-in-bleed';
 import { frac, number, sqrt, symbol, times } from '../formula/expression';
 import { criticalFlowConstant } from '../orifice-flow';
@@ -35,11 +35,14 @@ export const breakInBleed = defineSum({
   main: 'diameter',
   expression: sqrt(
     frac(
-      times(number(4), symbol('flow'), number(FREE_AIR_DENSITY), sqrt(symbol('tankTemperature'))),
+      times(number(4), symbol('flow'), symbol('freeAirDensity'), sqrt(symbol('tankTemperature'))),
       times(number(Math.PI), symbol('dischargeCoefficient'), number(criticalFlowConstant()), symbol('holdAbsolute')),
     ),
   ),
-  terms: { holdAbsolute: output('Pressure to hold, absolute', 'p_1', 'absolutePressure', 'psia') },
+  terms: {
+    holdAbsolute: output('Pressure to hold, absolute', 'p_1', 'absolutePressure', 'psia'),
+    freeAirDensity: output('Density of free air', 'ρ_a', 'density', 'kg/m3'),
+  },
   assumptions: ['All that is delivered leaves through the opening, and nothing else leaks.', 'The opening is round and blows into the open; a drain cock needs to be opened until the gauge stands.'],
   cannotTell: ['What a worn or badly sealed compressor delivers: watch the gauge and set the opening by it.'],
   source: 'Delivery by volumetric efficiency (E. G. Harris, Compressed Air, formula 11) through a choked opening.',
@@ -59,6 +62,6 @@ export const breakInBleed = defineSum({
       dischargeCoefficient: given.dischargeCoefficient,
     });
     // From 20 psi up the opening chokes at any altitude that is allowed, as the formula shown says.
-    return { values: { diameter: diameterM, flow: freeAirFlowM3PerS, holdAbsolute: holdPressurePa } };
+    return { values: { diameter: diameterM, flow: freeAirFlowM3PerS, holdAbsolute: holdPressurePa, freeAirDensity: airDensity(atmosphere, FREE_AIR_TEMPERATURE) } };
   },
 });

@@ -24,7 +24,7 @@ export const delivery = defineSum({
     altitude,
   },
   outputs: {
-    delivery: output('Delivery, as air around the vehicle', 'Q', 'flow', 'cfm'),
+    delivery: output('Delivery, free air', 'Q', 'flow', 'cfm'),
     seaLevelDelivery: output('The same air at sea level', 'Q_0', 'flow', 'cfm'),
     displaced: output('Swept by the pistons', 'Q_s', 'flow', 'cfm'),
     efficiency: output('Volumetric efficiency by clearance', 'E', 'ratio', 'percent'),
@@ -45,7 +45,7 @@ export const delivery = defineSum({
     dischargeAbsolute: output('Pressure delivered against, absolute', 'p_2', 'absolutePressure', 'psia'),
     pressureRatio: output('Pressure ratio', 'r', 'ratio', 'one'),
   },
-  assumptions: ['The intake is at the pressure of the air around: suction takes some, boost gives some.', 'Volumetric efficiency E = 1 + c − c r^(1/n): air left in the clearance expands first.'],
+  assumptions: ['Delivery is counted as air lies around the vehicle: high up the same volume holds less.', 'The intake is at the pressure of the air around: suction takes some, boost gives some.', 'Volumetric efficiency E = 1 + c − c r^(1/n): air left in the clearance expands first.'],
   cannotTell: ['What a worn one still delivers: time a build-up for that.'],
   source: 'E. G. Harris, Compressed Air, formula 11; U.S. Standard Atmosphere 1976.',
   compute: (given) => {

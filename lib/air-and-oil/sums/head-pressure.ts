@@ -1,7 +1,7 @@
 import { gaugePressure, temperature, toAbsolute, toGauge, toSi } from '@/lib/units';
-import { GAS_CONSTANT_AIR, HEAT_CAPACITY_RATIO } from '../air';
+import { FREE_AIR_TEMPERATURE, GAS_CONSTANT_AIR, HEAT_CAPACITY_RATIO, airDensity } from '../air';
 import { frac, larger, minus, number, plus, pow, sqrt, symbol, times } from '../formula/expression';
-import { ENTRY_COEFFICIENT, MOST_HEAD_PRESSURE, boreForHeadPressure, headPressure as solve, type BoreForHeadPressure, type Delivery } from '../head-pressure';
+import { ENTRY_COEFFICIENT, boreForHeadPressure, headPressure as solve, type Delivery } from '../head-pressure';
 import { massFlowOf, massFlux, upstreamPressure } from '../line-friction';
 import { criticalFlowConstant } from '../orifice-flow';
 import { requireWithin } from '../out-of-range';
@@ -21,10 +21,6 @@ const friction = frac(
   symbol('narrowedBore'),
 );
 const sonicEntry = frac(times(symbol('flux'), sqrt(symbol('headTemperature'))), times(number(ENTRY_COEFFICIENT), number(criticalFlowConstant())));
-
-function boreOf(found: BoreForHeadPressure): number | undefined {
-  return found.kind === 'bore' ? found.boreM : undefined;
-}
 
 export const headPressure = defineSum({
   id: 'head-pressure',
@@ -70,27 +66,32 @@ export const headPressure = defineSum({
     const line = { lengthM: given.length, nominalBoreM: given.nominalBore, narrowedLengthM: given.narrowedLength, narrowedBoreM: given.narrowedBore };
     const delivery: Delivery = {
       freeAirFlowM3PerS: given.delivery,
+      freeAirDensityKgPerM3: airDensity(atmosphere, FREE_AIR_TEMPERATURE),
       inletTemperatureK: temperature(given.inletTemperature),
       inletPressurePa: atmosphere,
       index: given.index,
       systemPressurePa: toAbsolute(gaugePressure(given.systemPressure), atmosphere),
     };
     const head = solve(line, delivery);
-    if (head.kind === 'beyond') return { kind: 'never', because: `The head would pass ${Math.round(toGauge(MOST_HEAD_PRESSURE) / toSi(1, 'pressure', 'psi'))} psi, and something gives before that: the line is as good as blocked.` };
+    if (head.kind === 'beyond') return { kind: 'never', because: 'The head would pass any pressure that it can hold, and something gives before that: the line is as good as blocked.' };
     if (head.kind === 'not-settled') return { kind: 'never', because: 'No steady pressure was found for these numbers.' };
 
     const nominal = solve({ ...line, narrowedBoreM: line.nominalBoreM }, delivery);
-    const boreAt = (limit: typeof LIMIT_1) =>
-      limit <= given.systemPressure ? undefined : boreOf(boreForHeadPressure(line, delivery, toAbsolute(limit, atmosphere)));
-    const massFlowKgPerS = massFlowOf(given.delivery);
+    const boreAt = (limit: typeof LIMIT_1): number | undefined => {
+      if (limit <= given.systemPressure) return undefined;
+      const found = boreForHeadPressure(line, delivery, toAbsolute(limit, atmosphere));
+      return found.kind === 'bore' ? found.boreM : undefined;
+    };
+    const [boreAt150Psi, boreAt250Psi] = [boreAt(LIMIT_1), boreAt(LIMIT_2)];
+    const massFlowKgPerS = massFlowOf(delivery.freeAirFlowM3PerS, delivery.freeAirDensityKgPerM3);
     return {
       values: {
         headPressure: toGauge(head.headPressurePa, atmosphere),
         headTemperature: head.headTemperatureK,
         loss: head.lossPa,
         nominalHeadPressure: nominal.kind === 'settled' ? toGauge(nominal.headPressurePa, atmosphere) : undefined,
-        boreAt150Psi: boreAt(LIMIT_1),
-        boreAt250Psi: boreAt(LIMIT_2),
+        boreAt150Psi,
+        boreAt250Psi,
         flux: massFlux(massFlowKgPerS, given.narrowedBore),
         factor: head.frictionFactor,
         afterNarrowed: upstreamPressure({
@@ -102,7 +103,11 @@ export const headPressure = defineSum({
         }),
         atmosphere,
       },
-      notes: [PULSES, ...(head.choked ? ['The air reaches the speed of sound in the narrowed part.'] : [])],
+      notes: [
+        PULSES,
+        ...(head.choked ? ['The air reaches the speed of sound in the narrowed part.'] : []),
+        ...(boreAt150Psi === undefined || boreAt250Psi === undefined ? ['Where no bore is given, the head is past that pressure with its full bore already.'] : []),
+      ],
     };
   },
   plot: {

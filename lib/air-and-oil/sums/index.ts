@@ -1,7 +1,7 @@
 /** The sums of the bench, each with all that a page, the API or a rulebook needs to drive it without knowing it. */
 import { breakInBleed } from './break-in-bleed';
 import { buildUp, buildUpLimit, requiredReservoir } from './build-up';
-import { carryOver } from './carry-over';
+import { carryOver, carryOverByWeight } from './carry-over';
 import { delivery } from './delivery';
 import { compressionIndex, dischargeTemperature } from './discharge-temperature';
 import { drainCapacity } from './drain-capacity';
@@ -35,6 +35,7 @@ export const SUMS: readonly Sum[] = [
   breakInBleed,
   drainCapacity,
   carryOver,
+  carryOverByWeight,
 ];
 
 const byId = new Map(SUMS.map((sum) => [sum.id, sum]));

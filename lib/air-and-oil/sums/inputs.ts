@@ -17,7 +17,7 @@ export const deliveryFlow = input('Delivery of the compressor', 'Q', 'flow', 'cf
   least: 0.1,
   most: 200,
   share: 0.05,
-  note: 'Free air at this speed and pressure: from its model, or from the sum for delivery.',
+  note: 'Free air, as it lies around the vehicle: from the sum for delivery, or from what its model should give at this speed.',
 });
 
 export const inletTemperature = input('Air at the intake', 'T_1', 'temperature', 'degF', { optional: true, byDefault: 70, least: -60, most: 250, off: 4 });

@@ -1,13 +1,13 @@
 import { gaugePressure, temperature, toAbsolute } from '@/lib/units';
-import { GAS_CONSTANT_AIR } from '../air';
+import { FREE_AIR_PRESSURE, FREE_AIR_TEMPERATURE, airDensity } from '../air';
 import { frac, number, plus, pow, symbol, times, type Expression } from '../formula/expression';
 import { harrisLoss } from '../harris-loss';
 import { darcyWeisbachLoss, lineFrictionFactor, massFlowOf, massFlux } from '../line-friction';
 import { requireWithin } from '../out-of-range';
+import { standardAtmosphere } from '../standard-atmosphere';
 import { altitude, deliveryFlow } from './inputs';
 import { LINE_CAUTIONS, SMOOTH_WALL, lineInputs } from './line';
 import { defineSum, input, output } from './sum';
-import { standardAtmosphere } from '../standard-atmosphere';
 
 /** Past this share of the pressure the density is no longer one. */
 const MUCH = 0.1;
@@ -54,14 +54,17 @@ export const lineLoss = defineSum({
   compute: (given) => {
     requireWithin('narrowedLength', 'length', given.narrowedLength, { least: 0, most: given.length });
     requireWithin('narrowedBore', 'length', given.narrowedBore, { least: 0, most: given.nominalBore });
-    const linePressurePa = toAbsolute(gaugePressure(given.linePressure), standardAtmosphere(given.altitude));
-    const air = { massFlowKgPerS: massFlowOf(given.delivery), airTemperatureK: temperature(given.airTemperature) };
+    const atmosphere = standardAtmosphere(given.altitude);
+    const linePressurePa = toAbsolute(gaugePressure(given.linePressure), atmosphere);
+    const air = { massFlowKgPerS: massFlowOf(given.delivery, airDensity(atmosphere, FREE_AIR_TEMPERATURE)), airTemperatureK: temperature(given.airTemperature) };
+    // The formula of Harris counts free air at the level of the sea.
+    const seaLevelFlow = given.delivery * (atmosphere / FREE_AIR_PRESSURE);
     const narrowed = { lengthM: given.narrowedLength, boreM: given.narrowedBore };
     const sound = { lengthM: given.length - given.narrowedLength, boreM: given.nominalBore };
     const whole = { lengthM: given.length, boreM: given.nominalBore };
 
     const darcy = (...parts: (typeof whole)[]) => parts.reduce((sum, part) => sum + darcyWeisbachLoss({ ...part, ...air, linePressurePa }), 0);
-    const harris = (...parts: (typeof whole)[]) => parts.reduce((sum, part) => sum + harrisLoss({ ...part, freeAirFlowM3PerS: given.delivery, linePressurePa }), 0);
+    const harris = (...parts: (typeof whole)[]) => parts.reduce((sum, part) => sum + harrisLoss({ ...part, freeAirFlowM3PerS: seaLevelFlow, linePressurePa }), 0);
     const [loss, nominalLoss] = [darcy(narrowed, sound), darcy(whole)];
     return {
       values: {
@@ -75,7 +78,7 @@ export const lineLoss = defineSum({
         narrowedFlux: massFlux(air.massFlowKgPerS, narrowed.boreM),
         nominalFlux: massFlux(air.massFlowKgPerS, sound.boreM),
         soundLength: sound.lengthM,
-        density: linePressurePa / (GAS_CONSTANT_AIR * air.airTemperatureK),
+        density: airDensity(linePressurePa, air.airTemperatureK),
       },
       notes: loss > MUCH * linePressurePa ? ['So large a loss changes the density of the air: see the sum for the pressure at the head instead.'] : [],
     };

@@ -5,7 +5,6 @@ export const lineInputs = {
   length: input('Length of the line', 'L', 'length', 'ft', { byDefault: 12, least: 0, most: 60, off: 0.1 }),
   nominalBore: input('Bore of the line when new', 'd_0', 'length', 'in', { byDefault: 0.625, least: 0.1, most: 3, off: 0.005 }),
   narrowedLength: input('Length that carbon has narrowed', 'L_1', 'length', 'ft', {
-    optional: true,
     byDefault: 6,
     least: 0,
     most: 60,

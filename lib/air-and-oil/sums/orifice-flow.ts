@@ -1,5 +1,5 @@
 import { gaugePressure, temperature, toAbsolute } from '@/lib/units';
-import { FREE_AIR_DENSITY } from '../air';
+import { FREE_AIR_TEMPERATURE, airDensity } from '../air';
 import { frac, number, pow, sqrt, symbol, times } from '../formula/expression';
 import { openingForFlow, orificeFlow as sum, type Opening } from '../orifice-flow';
 import { requireWithin } from '../out-of-range';
@@ -22,7 +22,7 @@ const inputs = {
 /** What it takes in pressure for a flow to be told at all, Pa. */
 const LEAST_DROP = 700;
 
-function openingOf(given: { [K in keyof typeof inputs]: number }): Opening {
+function openingOf(given: { [K in keyof typeof inputs]: number }): Opening & { readonly freeAirDensityKgPerM3: number } {
   requireWithin('downstreamPressure', 'pressure', given.downstreamPressure, { most: given.upstreamPressure - LEAST_DROP });
   const atmosphere = standardAtmosphere(given.altitude);
   return {
@@ -30,6 +30,7 @@ function openingOf(given: { [K in keyof typeof inputs]: number }): Opening {
     downstreamPressurePa: toAbsolute(gaugePressure(given.downstreamPressure), atmosphere),
     upstreamTemperatureK: temperature(given.temperature),
     dischargeCoefficient: given.dischargeCoefficient,
+    freeAirDensityKgPerM3: airDensity(atmosphere, FREE_AIR_TEMPERATURE),
   };
 }
 
@@ -42,10 +43,11 @@ function flowFunction(opening: Opening): { flowFunction: number; choked: boolean
 const terms = {
   upstreamAbsolute: output('Pressure before the hole, absolute', 'p_1', 'absolutePressure', 'psia'),
   flowFunction: output('Flow function of the pressures, s√K/m', 'ψ', 'ratio', 'one'),
+  freeAirDensity: output('Density of free air', 'ρ_a', 'density', 'kg/m3'),
 };
 
 const CHOKED = 'The air leaves at the speed of sound: a lower pressure behind the hole changes nothing.';
-const ASSUMPTIONS = ['The hole is round, and the air before it is at rest.', 'Flow is counted as free air at 20 °C and one standard atmosphere.'];
+const ASSUMPTIONS = ['The hole is round, and the air before it is at rest.', 'Flow is counted as free air: as it lies around the vehicle, at 20 °C (68 °F).'];
 
 export const orificeFlow = defineSum({
   id: 'orifice-flow',
@@ -57,7 +59,7 @@ export const orificeFlow = defineSum({
   main: 'flow',
   expression: frac(
     times(frac(number(Math.PI), number(4)), pow(symbol('diameter'), number(2)), symbol('dischargeCoefficient'), symbol('flowFunction'), symbol('upstreamAbsolute')),
-    times(number(FREE_AIR_DENSITY), sqrt(symbol('temperature'))),
+    times(symbol('freeAirDensity'), sqrt(symbol('temperature'))),
   ),
   terms,
   assumptions: ASSUMPTIONS,
@@ -67,7 +69,7 @@ export const orificeFlow = defineSum({
     const opening = openingOf(given);
     const { flowFunction: psi, choked } = flowFunction(opening);
     const { freeAirFlowM3PerS } = sum({ ...opening, diameterM: given.diameter });
-    return { values: { flow: freeAirFlowM3PerS, upstreamAbsolute: opening.upstreamPressurePa, flowFunction: psi }, notes: choked ? [CHOKED] : [] };
+    return { values: { flow: freeAirFlowM3PerS, upstreamAbsolute: opening.upstreamPressurePa, flowFunction: psi, freeAirDensity: opening.freeAirDensityKgPerM3 }, notes: choked ? [CHOKED] : [] };
   },
 });
 
@@ -81,7 +83,7 @@ export const leakSize = defineSum({
   main: 'diameter',
   expression: sqrt(
     frac(
-      times(number(4), symbol('flow'), number(FREE_AIR_DENSITY), sqrt(symbol('temperature'))),
+      times(number(4), symbol('flow'), symbol('freeAirDensity'), sqrt(symbol('temperature'))),
       times(number(Math.PI), symbol('dischargeCoefficient'), symbol('flowFunction'), symbol('upstreamAbsolute')),
     ),
   ),
@@ -92,7 +94,12 @@ export const leakSize = defineSum({
   compute: (given) => {
     const opening = openingOf(given);
     return {
-      values: { diameter: openingForFlow({ ...opening, freeAirFlowM3PerS: given.flow }), upstreamAbsolute: opening.upstreamPressurePa, flowFunction: flowFunction(opening).flowFunction },
+      values: {
+        diameter: openingForFlow({ ...opening, freeAirFlowM3PerS: given.flow }),
+        upstreamAbsolute: opening.upstreamPressurePa,
+        flowFunction: flowFunction(opening).flowFunction,
+        freeAirDensity: opening.freeAirDensityKgPerM3,
+      },
     };
   },
 });

@@ -58,6 +58,11 @@ const SCENARIOS: Record<string, Scenario[]> = {
     { name: 'next to nothing caught', given: { caught: 2e-6 } },
     { name: 'cup and time alike', given: { readings: 3 }, halfWidths: { time: 6000 } },
   ],
+  'carry-over-by-weight': [
+    { name: 'as usual' },
+    { name: 'four readings on a coarse scale', given: { readings: 4 }, halfWidths: { weight: 0.002 } },
+    { name: 'density alone', halfWidths: onlyOff('carry-over-by-weight', 'density', 60) },
+  ],
   'orifice-flow': [
     { name: 'as usual' },
     { name: 'diameter alone, off by a fifth', halfWidths: onlyOff('orifice-flow', 'diameter', 0.0003) },

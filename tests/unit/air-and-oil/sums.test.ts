@@ -134,7 +134,7 @@ describe('the words of the sums', () => {
   });
 
   it('warn first wherever an engine runs, a line is hot or a tank holds pressure', () => {
-    for (const id of ['build-up', 'leak-down', 'time-loaded', 'discharge-temperature', 'line-loss', 'head-pressure', 'orifice-flow', 'leak-size', 'break-in-bleed', 'drain-capacity', 'carry-over']) {
+    for (const id of ['build-up', 'leak-down', 'time-loaded', 'discharge-temperature', 'line-loss', 'head-pressure', 'orifice-flow', 'leak-size', 'break-in-bleed', 'drain-capacity', 'carry-over', 'carry-over-by-weight']) {
       expect(sumOf(id)?.cautions.length, id).toBeGreaterThan(0);
     }
   });
