@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { airViscosity } from '@/lib/air-and-oil/air-viscosity';
 import { breakInBleed } from '@/lib/air-and-oil/break-in-bleed';
 import { buildUpTime, freeAirDelivery, leastDelivery } from '@/lib/air-and-oil/build-up';
 import { oilPerLoadedTime, oilPerTime, oilVolume, requireReadings } from '@/lib/air-and-oil/carry-over';
@@ -63,6 +64,10 @@ describe('compression', () => {
 });
 
 describe('lines', () => {
+  it.each([[250, 15.96], [300, 18.46], [400, 23.01], [600, 30.58]])('carry air as thick as at %d K in printed tables, within 2 %% (from memory)', (kelvin, micropascalSeconds) => {
+    expect(Math.abs((airViscosity(temperature(kelvin)) * 1e6) / micropascalSeconds - 1)).toBeLessThan(0.02);
+  });
+
   const air = { massFlowKgPerS: massFlowOf(cfm(12)), airTemperatureK: temperature(400) };
 
   it('take 64 / Re where they run in layers, and by Colebrook and White within 2 % where they don’t', () => {
