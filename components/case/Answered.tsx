@@ -1,12 +1,14 @@
 'use client';
 
 import { useState } from 'react';
-import { Button } from '@/components/ui/Button';
+import { Button, ButtonLink } from '@/components/ui/Button';
 import { Tag } from '@/components/ui/Tag';
 import { TextareaField } from '@/components/ui/TextareaField';
 import type { FindingView, RulebookView } from '@/lib/schemas/case-view';
+import { lastAsked } from './answered';
 import type { Picked } from './at-hand';
 import type { CaseHandle } from './use-case';
+import { sumHref } from './sum-href';
 import { timeText } from './words';
 
 interface Props {
@@ -26,7 +28,7 @@ export function Answered({ handle, rulebook, timeZone, readOnly, onPick }: Props
   const current = state.findings.filter((finding) => finding.current && finding.source !== 'record');
   const recorded = state.findings.filter((finding) => finding.current && finding.source === 'record');
   const replaced = state.findings.filter((finding) => !finding.current);
-  const last = current.find((finding) => finding.source === 'asked');
+  const last = lastAsked(state);
   return (
     <section aria-labelledby="answered" className="grid gap-3">
       <div className="flex flex-wrap items-center justify-between gap-3">
@@ -88,6 +90,11 @@ function Finding({ finding, handle, rulebook, timeZone, readOnly, onPick }: Prop
         </p>
       </div>
       <div className="flex flex-wrap items-center gap-x-2 has-[form]:order-last has-[form]:col-span-full">
+        {finding.sum && (
+          <ButtonLink variant="quiet" className="border-transparent! px-3!" href={sumHref(finding.sum.id, { caseId: handle.state.caseId, checkId: finding.checkId }, finding.sum.search)}>
+            The sum<span className="sr-only"> behind {check?.name}</span>
+          </ButtonLink>
+        )}
         {!readOnly && (
           <Button variant="quiet" className="border-transparent! px-3!" onClick={() => onPick({ kind: 'check', checkId: finding.checkId })}>
             Change<span className="sr-only">: {check?.name}</span>

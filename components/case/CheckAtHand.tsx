@@ -1,6 +1,7 @@
 'use client';
 
 import { PhotoStrip } from '@/components/photos/PhotoStrip';
+import { ButtonLink } from '@/components/ui/Button';
 import { Notice } from '@/components/ui/Notice';
 import { ApiProblem } from '@/lib/query/problem';
 import type { AnswerInput } from '@/lib/schemas/case';
@@ -11,6 +12,7 @@ import { ChoiceAnswers } from './ChoiceAnswers';
 import { Dock } from './Dock';
 import { Instructions } from './Instructions';
 import { MeasuredAnswer } from './MeasuredAnswer';
+import { sumHref } from './sum-href';
 import type { CaseHandle } from './use-case';
 
 interface Props {
@@ -65,7 +67,14 @@ export function CheckAtHand({ check, rulebook, handle, suggestion, then, station
       <Instructions check={check} setUpMinutes={suggestion?.setUpMinutes} />
       {toRead.length === 0 &&
         (check.kind === 'measured' ? (
-          <MeasuredAnswer key={check.id} {...common} errors={problem?.fields ?? {}} decimalMark={decimalMark} />
+          <>
+            {check.sum && (
+              <p>
+                <ButtonLink variant="quiet" href={sumHref(check.sum, { caseId: state.caseId, checkId: check.id })}>Work it out on the bench</ButtonLink>
+              </p>
+            )}
+            <MeasuredAnswer key={check.id} {...common} errors={problem?.fields ?? {}} decimalMark={decimalMark} />
+          </>
         ) : (
           <ChoiceAnswers key={check.id} {...common} />
         ))}

@@ -4,4 +4,4 @@ import type { CaseState, FindingView } from '@/lib/schemas/case-view';
 export const standing = ({ findings }: CaseState): FindingView[] => findings.filter(({ current, source }) => current && source !== 'record');
 
 /** What "undo" takes back. */
-export const lastAsked = (state: CaseState): FindingView | undefined => standing(state).find(({ source }) => source === 'asked');
+export const lastAsked = (state: CaseState): FindingView | undefined => standing(state).find(({ source }) => source === 'asked' || source === 'sum');

@@ -26,6 +26,8 @@ export const PAGES: readonly Page[] = [
   { route: 'models/new', shape: 'form', what: 'the form' },
   { route: 'models/[id]', shape: 'record', what: 'the compressor model' },
   { route: 'models/[id]/edit', shape: 'form', what: 'the form' },
+  { route: 'bench', shape: 'list', what: 'the sums' },
+  { route: 'bench/[sum]', shape: 'form', what: 'the sum' },
   { route: 'not-allowed', shape: 'form', what: 'the page' },
   { route: 'settings', shape: 'form', what: 'your settings' },
   { route: 'settings/profile', shape: 'form', what: 'your settings' },

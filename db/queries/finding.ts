@@ -28,6 +28,7 @@ export async function selectFindings(db: Executor, of: Of & { receivedBy?: Date 
       unit: finding.unit,
       valueSi: finding.valueSi,
       errorSi: finding.errorSi,
+      sum: finding.sum,
       person: person.name,
       correctedAt: finding.correctedAt,
       receivedAt: finding.receivedAt,

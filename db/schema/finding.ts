@@ -1,4 +1,5 @@
 import { boolean, date, foreignKey, index, jsonb, pgTable, primaryKey, text, uuid } from 'drizzle-orm/pg-core';
+import type { FindingSum } from '@/lib/case/rows';
 import type { Stage, StateShare } from '@/lib/diagnose/types';
 import { cases } from './case';
 import { createdAt, id, instant, organisationId, organisationPolicy, si } from './columns';
@@ -32,6 +33,8 @@ export const finding = pgTable(
     unit: text(),
     valueSi: si(),
     errorSi: si(),
+    /** What a sum of the bench made it from; null: it was read or chosen. */
+    sum: jsonb().$type<FindingSum>(),
     personId: uuid().notNull().references(() => person.id),
     /** The device's clock, and what to add to it to get the server's. */
     deviceAt: instant().notNull(),

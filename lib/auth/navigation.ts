@@ -9,6 +9,7 @@ export interface Place {
 const PLACES: readonly (Place & { needs: Permission })[] = [
   { href: '/cases', label: 'Cases', needs: 'case.see' },
   { href: '/units', label: 'Units', needs: 'unit.see' },
+  { href: '/bench', label: 'Bench', needs: 'bench.use' },
   { href: '/models', label: 'Compressor models', needs: 'model.see' },
   { href: '/settings', label: 'Settings', needs: 'own-settings' },
 ];

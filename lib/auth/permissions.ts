@@ -14,6 +14,7 @@ export const PERMITTED = {
   'unit.edit': CASE_WORKERS,
   'model.see': ANYONE,
   'model.edit': ['engineer', 'manager'],
+  'bench.use': ANYONE,
   'own-settings': ANYONE,
   'people.manage': ['administrator'],
   'site.manage': ['administrator'],

@@ -74,10 +74,11 @@ function rowOf({ id, body }: Extract<Waiting, { kind: 'finding' }>, { compiled, 
   if (!check) throw new Error(`the edition has no check ${body.checkId}`);
   const correctedAt = correctedTime(body, now);
   const dated = { id, checkId: body.checkId, stage: body.stage ?? { kind: 'diagnosis' as const }, correctedAt, receivedAt: correctedAt };
+  const answer = readAnswer(check, body.answer, kit.person);
   return {
-    ...readAnswer(check, body.answer, kit.person),
+    ...answer,
     ...dated,
-    source: 'asked',
+    source: answer.sum ? 'sum' : 'asked',
     askedBecause: body.askedBecause ?? 'choice',
     person: kit.person.name,
     late: arriving(dated, rows).late,

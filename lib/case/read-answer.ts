@@ -1,11 +1,15 @@
 import type { z } from 'zod';
+import { sumOf } from '@/lib/air-and-oil/sums';
+import type { Writing } from '@/lib/bench/read-texts';
+import { workOut } from '@/lib/bench/work-out';
 import type { CompiledCheck } from '@/lib/diagnose/compiled';
 import { FindingError } from '@/lib/diagnose/errors';
 import { sharesOf } from '@/lib/diagnose/shares';
 import type { StateShare } from '@/lib/diagnose/types';
 import { invalid } from '@/lib/errors';
 import type { answerInput } from '@/lib/schemas/case';
-import { formatQuantity, parseQuantity, type DecimalMark, type UnitPreferences } from '@/lib/units';
+import { formatQuantity, parseQuantity, type DecimalMark } from '@/lib/units';
+import type { FindingSum } from './rows';
 import { measureOf, type Measure } from './view/measure';
 
 /** The columns of a finding that an answer fills. */
@@ -18,15 +22,10 @@ export interface AnswerColumns {
   unit: string | null;
   valueSi: number | null;
   errorSi: number | null;
+  sum: FindingSum | null;
 }
 
-/** How the person writes measures. */
-export interface Writing {
-  units: UnitPreferences;
-  decimal?: DecimalMark;
-}
-
-const NOT_MEASURED = { valueTyped: null, errorTyped: null, unit: null, valueSi: null, errorSi: null };
+const NOT_MEASURED = { valueTyped: null, errorTyped: null, unit: null, valueSi: null, errorSi: null, sum: null };
 
 export type ParsedAnswer = z.output<typeof answerInput>;
 
@@ -37,6 +36,7 @@ export type ParsedAnswer = z.output<typeof answerInput>;
  */
 export function readAnswer(check: CompiledCheck, answer: ParsedAnswer, writing: Writing): AnswerColumns {
   if (answer.kind === 'measured') return readMeasured(check, answer, writing);
+  if (answer.kind === 'sum') return readSum(check, answer, writing);
   if (answer.kind !== 'state') return { kind: answer.kind, shares: [], reliability: 1, ...NOT_MEASURED };
   if (check.check.kind === 'measured') throw invalid({ value: 'This check is measured: enter the value.' });
   if (!check.stateIndex.has(answer.state)) throw invalid({ state: 'This check has no such answer.' });
@@ -61,11 +61,40 @@ function readMeasured(check: CompiledCheck, answer: Extract<ParsedAnswer, { kind
       unit: value.unit,
       valueSi: value.si,
       errorSi: error,
+      sum: null,
     };
   } catch (cause) {
     if (cause instanceof FindingError) throw invalid({ value: 'This value does not fit the check.' });
     throw cause;
   }
+}
+
+/** The value and its band from a sum of the bench, made here from what was typed: what a page showed counts for nothing. */
+function readSum(check: CompiledCheck, { inputs, sureness }: Extract<ParsedAnswer, { kind: 'sum' }>, writing: Writing): AnswerColumns {
+  const measure = measureOf(check.check, writing.units);
+  const sum = check.check.sum && sumOf(check.check.sum.id);
+  if (!check.check.sum || !sum || !measure) throw invalid({ inputs: 'The bench has no sum for this check: enter the value.' });
+  const { output } = check.check.sum;
+  const worked = workOut(sum, inputs, writing, output);
+  if (worked.kind === 'refused') throw invalid(worked.errors);
+  if (worked.kind === 'never') throw invalid({ inputs: worked.because });
+  const { band } = worked;
+  const value = worked.values[output];
+  if (value === undefined || !band) throw invalid({ inputs: 'There is no such value for these readings.' });
+  const shown = formatQuantity(value, { quantity: measure.quantity, unit: measure.unit });
+  refuseOutOfRange(check, shown, value, measure);
+  // Bands are spread over as they are for a reading: evenly within the larger side of its doubt.
+  const error = Math.max(value - (band.low ?? value), (band.high ?? value) - value);
+  return {
+    kind: 'measured',
+    ...sharesOf(check, { kind: 'measured', value, error, sureness }),
+    valueTyped: null,
+    errorTyped: null,
+    unit: measure.unit,
+    valueSi: value,
+    errorSi: error,
+    sum: { id: sum.id, output, inputs: worked.inputs, low: band.low ?? null, high: band.high ?? null },
+  };
 }
 
 function refuseOutOfRange({ check }: CompiledCheck, typed: string, si: number, { quantity, unit }: Measure): void {

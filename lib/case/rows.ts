@@ -1,4 +1,15 @@
+import type { UsedInput } from '@/lib/bench/read-texts';
 import type { Ranking, RecordFacts, Stage, StateShare } from '@/lib/diagnose/types';
+
+/** What a finding that was worked out on the bench was worked out from: its figure can be made again from this alone. */
+export interface FindingSum {
+  id: string;
+  output: string;
+  inputs: UsedInput[];
+  /** Where the value lies with 95 % probability; null: "never" is within reach on that side. */
+  low: number | null;
+  high: number | null;
+}
 
 /** A finding as it is kept, in the database and on a device. */
 export interface FindingRow {
@@ -15,6 +26,8 @@ export interface FindingRow {
   unit: string | null;
   valueSi: number | null;
   errorSi: number | null;
+  /** null: not worked out on the bench. */
+  sum: FindingSum | null;
   person: string;
   correctedAt: Date;
   receivedAt: Date;

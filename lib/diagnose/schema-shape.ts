@@ -121,6 +121,7 @@ const checkSchema = z.strictObject({
   cannotTell: z.number().min(0).lt(1),
   reliability: reliabilitySchema.optional(),
   fromRecord: z.strictObject({ fact: factNameSchema, states: z.record(z.string().max(160), idSchema).optional() }).optional(),
+  sum: z.strictObject({ id: idSchema, output: factNameSchema }).optional(),
   ...sourced,
 });
 

@@ -138,6 +138,8 @@ export interface Check {
   reliability?: number;
   /** Name of the fact of unit, model or fit that answers it, with the state for each text (a number falls in bands). */
   fromRecord?: { fact: string; states?: Record<string, string> };
+  /** Measured checks only: the sum of the bench that works its value out, and which of its outputs that is. */
+  sum?: { id: string; output: string };
   basis: Basis;
   source?: string;
 }

@@ -28,6 +28,8 @@ export interface CheckView
   errorSymbol: string | null;
   /** Usual error of the instrument in that unit, as text for the field. */
   usualError: string | null;
+  /** The sum of the bench that works its value out. */
+  sum: string | null;
   /** Checks that this one spoils. */
   spoils: { id: string; name: string }[];
 }
@@ -73,6 +75,8 @@ export interface FindingView {
   /** "48 s ± 1 s", "Heavy bead", "Can't tell" */
   answer: string;
   shares: StateShare[];
+  /** The sum of the bench that it came from, with all that went in, as the bench's address takes it. */
+  sum: { id: string; search: Record<string, string> } | null;
   thinkSo: boolean;
   person: string;
   /** By the device's corrected clock. */

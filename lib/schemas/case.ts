@@ -44,12 +44,24 @@ export const stageInput = z.discriminatedUnion('kind', [
   z.strictObject({ kind: z.literal('watch') }),
 ]);
 
+/** The readings of a sum as typed, with or without a unit, by the id of its input; left out: the usual. */
+export const sumInputs = z.record(
+  z.string().regex(/^[a-z][A-Za-z0-9]{0,40}$/, 'This is not an input of a sum.'),
+  z.strictObject({ value: words(60).optional(), error: words(60).optional() }),
+);
+
 const sureness = z.enum(['sure', 'think-so']);
 
 export const answerInput = z.discriminatedUnion('kind', [
   z.strictObject({ kind: z.literal('state'), state: rulebookId, sureness }),
   /** Value and error as typed, with or without a unit: "8,3 bar". */
   z.strictObject({ kind: z.literal('measured'), value: words(40).min(1, 'Enter what you measured.'), error: words(40).optional(), sureness }),
+  /** Worked out on the bench: what went in, as typed. The check names the sum, and it is worked out anew where it is kept. */
+  z.strictObject({
+    kind: z.literal('sum'),
+    inputs: sumInputs,
+    sureness,
+  }),
   z.strictObject({ kind: z.literal('cannot-tell') }),
   z.strictObject({ kind: z.literal('skip') }),
   /** Takes the current answer back: the check is open again. */

@@ -75,6 +75,13 @@ export const SHOTS: readonly Shot[] = [
   shot(`${IN}/models/[id]`, 'model-not-found', 'engineer', `/models/${NOWHERE}`),
   shot(`${IN}/models/[id]/edit`, 'model-edit', 'engineer', ({ model }) => model && `/models/${model}/edit`),
 
+  shot(`${IN}/bench`, 'bench', 'technician', '/bench'),
+  shot(`${IN}/bench/[sum]`, 'bench-measured-build-up', 'technician', '/bench/measured-build-up'),
+  shot(`${IN}/bench/[sum]`, 'bench-head-pressure', 'technician', '/bench/head-pressure?narrowedBore=6+mm'),
+  shot(`${IN}/bench/[sum]`, 'bench-never', 'technician', '/bench/build-up?delivery=5+cfm&leak=6+cfm'),
+  shot(`${IN}/bench/[sum]`, 'bench-refused', 'technician', '/bench/leak-down?volume=three&time=2+psi'),
+  shot(`${IN}/bench/[sum]`, 'bench-sum-not-found', 'technician', '/bench/no-such-sum'),
+
   shot(`${IN}/not-allowed`, 'not-allowed', 'trainer', '/not-allowed'),
 
   shot(`${IN}/settings/profile`, 'settings-profile', 'technician', '/settings/profile'),

@@ -1,3 +1,5 @@
+import * as bench from './bench/route';
+import * as benchSum from './bench/[sum]/route';
 import * as cases from './cases/route';
 import * as casesId from './cases/[id]/route';
 import * as casesIdAcknowledgements from './cases/[id]/acknowledgements/route';
@@ -42,6 +44,8 @@ import * as unitsIdShow from './units/[id]/show/route';
 
 /** Every route of the API by its path; a test holds this to the folders. */
 export const ROUTES = {
+  '/bench': bench,
+  '/bench/{sum}': benchSum,
   '/cases': cases,
   '/cases/{id}': casesId,
   '/cases/{id}/acknowledgements': casesIdAcknowledgements,

@@ -13,7 +13,7 @@ export const PATIENCE_MS = 600;
 
 /** Refuses at once what can't be understood, as far as the device can tell. */
 export async function refuseUnreadable(caseId: string, checkId: string, answer: AnswerInput): Promise<void> {
-  if (answer.kind !== 'measured') return;
+  if (answer.kind !== 'measured' && answer.kind !== 'sum') return;
   const read = await askRanker({ kind: 'read', caseId, checkId, answer });
   if (read.kind === 'refused') throw new ApiProblem(read.message, 422, read.fields);
 }

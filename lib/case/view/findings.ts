@@ -1,3 +1,4 @@
+import { searchOfInputs } from '@/lib/bench/texts-in-url';
 import type { CompiledRulebook } from '@/lib/diagnose/compiled';
 import type { FindingView } from '@/lib/schemas/case-view';
 import type { UnitPreferences } from '@/lib/units';
@@ -22,6 +23,7 @@ export function findingViews(
       kind: row.kind,
       answer: answerText(compiled.checks.get(row.checkId)?.check, row, units),
       shares: row.shares,
+      sum: row.sum && { id: row.sum.id, search: searchOfInputs(row.sum) },
       thinkSo: row.reliability < 1,
       person: row.person,
       at: row.correctedAt.toISOString(),

@@ -26,6 +26,7 @@ function checkView(check: Check, names: ReadonlyMap<string, string>, units: Unit
     usualError: measure && usualError !== undefined
       ? formatValue(usualError, { quantity: measure.difference, unit: measure.differenceUnit })
       : null,
+    sum: check.sum?.id ?? null,
     spoils: check.spoils.map((spoiled) => ({ id: spoiled, name: names.get(spoiled) ?? spoiled })),
   };
 }

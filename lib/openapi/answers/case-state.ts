@@ -35,6 +35,10 @@ const finding = z
     kind: z.string(),
     answer: z.string().meta({ description: 'In words: “48 s ± 1 s”, “Heavy bead”, “Can’t tell”.' }),
     shares: z.array(z.object({ state: z.string(), share: probability })),
+    sum: z
+      .object({ id: z.string(), search: z.record(z.string(), z.string()) })
+      .nullable()
+      .meta({ description: 'The sum of the bench that it came from, with all that went in.' }),
     thinkSo: z.boolean(),
     person: z.string(),
     at: instant,

@@ -19,6 +19,15 @@ const row = z.object({
   unit: z.string().nullable(),
   valueSi: z.number().nullable(),
   errorSi: z.number().nullable(),
+  sum: z
+    .object({
+      id: z.string(),
+      output: z.string(),
+      inputs: z.array(z.object({ id: z.string(), typed: z.string().nullable(), errorTyped: z.string().nullable(), unit: z.string(), si: z.number(), halfWidthSi: z.number() })),
+      low: z.number().nullable(),
+      high: z.number().nullable(),
+    })
+    .nullable(),
   person: z.string(),
   correctedAt: instant,
   receivedAt: instant,

@@ -26,6 +26,7 @@ const check = z
     unitSymbol: z.string().nullable().meta({ description: 'What a measured value without a unit is taken to be in.' }),
     errorSymbol: z.string().nullable(),
     usualError: z.string().nullable(),
+    sum: z.string().nullable().meta({ description: 'The sum of the bench that works its value out.' }),
     spoils: z.array(z.object({ id: z.string(), name: z.string() })),
   })
   .meta({ id: 'Check' });

@@ -59,7 +59,7 @@ export const recordFinding = defineWrite({
 
     const dated = { id: input.id, checkId: input.checkId, stage: input.stage, correctedAt, receivedAt };
     const { standing, late } = arriving(dated, rows);
-    const finding = { ...answer, ...dated, source: 'asked', askedBecause: input.askedBecause, late };
+    const finding = { ...answer, ...dated, source: answer.sum ? 'sum' : 'asked', askedBecause: input.askedBecause, late };
     const written = await insertFinding(tx, {
       ...finding,
       ...of,

@@ -51,6 +51,7 @@ const atWork: Check[] = [
       { id: 'slow', label: '26 to 45 s', background: 0.267, low: seconds(26), high: seconds(46) },
       { id: 'very-slow', label: 'Over 45 s, or it never gets there', background: 0.165, low: seconds(46), holdsRelease: true },
     ],
+    sum: { id: 'measured-build-up', output: 'corrected' },
     cannotTell: 0.05,
     basis: 'regulation',
     source:

@@ -122,6 +122,7 @@ export const checks: Check[] = [
       { id: 'much', label: '1 to 5 mL an hour', background: 0.246, low: millilitresPerHour(1), high: millilitresPerHour(5) },
       { id: 'very-much', label: '5 mL an hour or more', background: 0.118, low: millilitresPerHour(5) },
     ],
+    sum: { id: 'carry-over', output: 'perHour' },
     cannotTell: 0.5,
     ...judgement,
   }),

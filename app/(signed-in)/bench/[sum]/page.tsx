@@ -1,0 +1,38 @@
+import type { Metadata } from 'next';
+import { notFound } from 'next/navigation';
+import { SumDesk } from '@/components/bench/SumDesk';
+import { PageHeader } from '@/components/ui/PageHeader';
+import { sumOf } from '@/lib/air-and-oil/sums';
+import { orNotFound, pageContext } from '@/lib/auth/page';
+import { PERMITTED } from '@/lib/auth/permissions';
+import { firstOfEach } from '@/lib/schemas/list';
+import { readSumTarget } from '@/lib/services/bench/target';
+import { writingOf } from '@/lib/services/case/writing';
+
+interface Props {
+  params: Promise<{ sum: string }>;
+  searchParams: Promise<Record<string, string | string[] | undefined>>;
+}
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  return { title: sumOf((await params).sum)?.name ?? 'Bench' };
+}
+
+export default async function SumPage({ params, searchParams }: Props) {
+  const ctx = await pageContext(PERMITTED['bench.use']);
+  const sum = sumOf((await params).sum);
+  if (!sum) notFound();
+  const { case: caseId, check: checkId, ...search } = firstOfEach(await searchParams) as Record<string, string>;
+  const found = caseId && checkId ? await orNotFound(readSumTarget({ ctx, input: { caseId, checkId } })) : null;
+  if (found && found.sumId !== sum.id) notFound();
+  return (
+    <>
+      <PageHeader
+        title={sum.name}
+        lead={sum.purpose}
+        breadcrumbs={[{ label: 'Bench', href: '/bench' }, ...(found ? [{ label: `For ${found.target.caseName}`, href: `/cases/${found.target.caseId}` }] : [])]}
+      />
+      <SumDesk sumId={sum.id} search={search} known={found?.known ?? {}} writing={writingOf(ctx)} target={found?.target ?? null} />
+    </>
+  );
+}
