@@ -2,6 +2,7 @@
 export interface BenchFacts {
   reservoirM3: number | null;
   requiredReservoirM3: number | null;
+  displacementM3: number | null;
   boreM: number | null;
   strokeM: number | null;
   cylinders: number | null;
@@ -17,6 +18,7 @@ const MODEL = 'from its compressor model';
 const FROM: Readonly<Record<FactName, string>> = {
   reservoirM3: UNIT,
   requiredReservoirM3: UNIT,
+  displacementM3: MODEL,
   boreM: MODEL,
   strokeM: MODEL,
   cylinders: MODEL,
@@ -31,7 +33,7 @@ const INPUTS: Readonly<Record<string, Readonly<Record<string, FactName>>>> = {
   'build-up': { volume: 'reservoirM3' },
   'leak-down': { volume: 'reservoirM3' },
   delivery: { bore: 'boreM', stroke: 'strokeM', cylinders: 'cylinders', driveRatio: 'driveRatio' },
-  'break-in-bleed': { bore: 'boreM', stroke: 'strokeM', cylinders: 'cylinders', driveRatio: 'driveRatio' },
+  'break-in-bleed': { displacement: 'displacementM3', driveRatio: 'driveRatio' },
   'line-loss': { nominalBore: 'lineSizeM' },
   'head-pressure': { nominalBore: 'lineSizeM' },
 };

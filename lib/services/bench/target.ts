@@ -43,6 +43,7 @@ export const readSumTarget = defineRead({
       known: knownInputs(check.sum.id, {
         reservoirM3: unit?.reservoirM3 ?? null,
         requiredReservoirM3: unit?.requiredReservoirM3 ?? null,
+        displacementM3: model?.displacementM3 ?? null,
         boreM: model?.boreM ?? null,
         strokeM: model?.strokeM ?? null,
         cylinders: model?.cylinders ?? null,

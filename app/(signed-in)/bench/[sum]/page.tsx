@@ -5,6 +5,7 @@ import { PageHeader } from '@/components/ui/PageHeader';
 import { sumOf } from '@/lib/air-and-oil/sums';
 import { orNotFound, pageContext } from '@/lib/auth/page';
 import { PERMITTED } from '@/lib/auth/permissions';
+import { QueryProvider } from '@/lib/query/provider';
 import { firstOfEach } from '@/lib/schemas/list';
 import { readSumTarget } from '@/lib/services/bench/target';
 import { writingOf } from '@/lib/services/case/writing';
@@ -32,7 +33,7 @@ export default async function SumPage({ params, searchParams }: Props) {
         lead={sum.purpose}
         breadcrumbs={[{ label: 'Bench', href: '/bench' }, ...(found ? [{ label: `For ${found.target.caseName}`, href: `/cases/${found.target.caseId}` }] : [])]}
       />
-      <SumDesk sumId={sum.id} search={search} known={found?.known ?? {}} writing={writingOf(ctx)} target={found?.target ?? null} />
+      <QueryProvider><SumDesk sumId={sum.id} search={search} known={found?.known ?? {}} writing={writingOf(ctx)} target={found?.target ?? null} /></QueryProvider>
     </>
   );
 }
