@@ -1,5 +1,6 @@
 import type { Feature } from './row';
 import { api } from './rows/api';
+import { bench } from './rows/bench';
 import { cases } from './rows/cases';
 import { device } from './rows/device';
 import { models } from './rows/models';
@@ -14,4 +15,4 @@ import { units } from './rows/units';
  * `app` is not here, and tries wrong roles, another organisation, malformed and oversized input on each. A feature adds
  * its file of rows to `rows/` and its name here.
  */
-export const FEATURES: readonly Feature[] = [signingIn, api, cases, device, photos, units, models, settings, tokens];
+export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, device, photos, units, models, settings, tokens];

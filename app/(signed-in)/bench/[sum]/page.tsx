@@ -4,7 +4,7 @@ import { SumDesk } from '@/components/bench/SumDesk';
 import { PageHeader } from '@/components/ui/PageHeader';
 import { sumOf } from '@/lib/air-and-oil/sums';
 import { orNotFound, pageContext } from '@/lib/auth/page';
-import { PERMITTED } from '@/lib/auth/permissions';
+import { may, PERMITTED } from '@/lib/auth/permissions';
 import { QueryProvider } from '@/lib/query/provider';
 import { firstOfEach } from '@/lib/schemas/list';
 import { readSumTarget } from '@/lib/services/bench/target';
@@ -24,7 +24,7 @@ export default async function SumPage({ params, searchParams }: Props) {
   const sum = sumOf((await params).sum);
   if (!sum) notFound();
   const { case: caseId, check: checkId, ...search } = firstOfEach(await searchParams) as Record<string, string>;
-  const found = caseId && checkId ? await orNotFound(readSumTarget({ ctx, input: { caseId, checkId } })) : null;
+  const found = caseId && checkId && may(ctx.roles, 'case.see') ? await orNotFound(readSumTarget({ ctx, input: { caseId, checkId } })) : null;
   if (found && found.sumId !== sum.id) notFound();
   return (
     <>
