@@ -20,8 +20,9 @@ self.addEventListener('fetch', (event) => {
   else if (request.mode === 'navigate' && isKept(url)) event.respondWith(fromNetworkFirst(request));
 });
 
-/** The list of cases and each case as it is now: what a bay goes on with. */
-const isKept = ({ pathname, search }) => pathname === '/cases' || (/^\/cases\/[0-9a-f-]{36}$/.test(pathname) && search === '');
+/** The list of cases, each case as it is now, and the bench: what a bay goes on with. */
+const isKept = ({ pathname, search }) => pathname === '/cases' || (/^\/cases\/[0-9a-f-]{36}$/.test(pathname) && search === '') || isBench(pathname);
+const isBench = (pathname) => /^\/bench(\/[a-z-]+)?$/.test(pathname);
 
 async function fromCacheFirst(name, request, afterwards) {
   const cache = await caches.open(name);
@@ -42,14 +43,17 @@ async function trim(cache) {
 
 async function fromNetworkFirst(request) {
   const cache = await caches.open(PAGES);
+  const { origin, pathname } = new URL(request.url);
+  // A sum reads its own address, so that its page does for any readings.
+  const held = async () => (await cache.match(request.url)) ?? (isBench(pathname) ? await cache.match(origin + pathname) : undefined);
   try {
     const response = await fetch(request);
     // A redirect (to the sign-in) is the browser's to follow, and no page of this address.
     if (response.ok && response.type === 'basic' && !response.redirected) await cache.put(request.url, response.clone());
     if (response.status < 502) return response;
-    return (await cache.match(request.url)) ?? response;
+    return (await held()) ?? response;
   } catch {
-    return (await cache.match(request.url)) ?? noPage();
+    return (await held()) ?? noPage();
   }
 }
 

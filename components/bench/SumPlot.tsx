@@ -1,6 +1,7 @@
 'use client';
 
-import { lazy, Suspense, useMemo, useSyncExternalStore } from 'react';
+import { lazy, Suspense, useMemo, useSyncExternalStore, type ComponentType } from 'react';
+import type { LinePlotProps } from '@/components/plots/LinePlot';
 import { DataTable } from '@/components/ui/DataTable';
 import { Disclosure } from '@/components/ui/Disclosure';
 import { completeInputs, plotPoints, type Given } from '@/lib/air-and-oil/sums';
@@ -10,8 +11,8 @@ import type { Writing } from '@/lib/bench/read-texts';
 import { shown, shownValue, symbolOf } from '@/lib/bench/show';
 import { unitFor } from '@/lib/units';
 
-// The chart library comes with the first plot that is shown, and not before.
-const LinePlot = lazy(() => import('@/components/plots/LinePlot'));
+// The chart library comes with the first plot that is shown, and not before. Where it can't be fetched, words and table do.
+const LinePlot = lazy<ComponentType<LinePlotProps>>(() => import('@/components/plots/LinePlot').catch(() => ({ default: () => null })));
 
 interface Props {
   sum: Sum;

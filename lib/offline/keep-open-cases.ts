@@ -1,9 +1,13 @@
+import { GROUPS } from '@/lib/bench/groups';
 import { api } from '@/lib/query/problem';
 import { offlineDatabase } from './database';
 import { dropKept, dropOtherPages, hasPage, keepBuiltFiles, keepPages, keepThumbnails } from './keep-pages';
 import { isOwned, keepForOwner } from './owner';
 import { askRanker } from './ranker';
 import { refreshKit } from './refresh-kit';
+
+/** The bench is the same for everybody, and fetched once; a visit fetches it anew. */
+const BENCH = ['/bench', ...GROUPS.flatMap(({ sums }) => sums.map((id) => `/bench/${id}`))];
 
 /** In the device's own store: which cases it could go on with. */
 const KEPT_CASES = 'kept-cases';
@@ -24,7 +28,9 @@ async function fill(): Promise<void> {
   const paths = cases.map(({ id }) => `/cases/${id}`);
   const here = /^\/cases\/[0-9a-f-]{36}$/.test(location.pathname) ? [location.pathname] : [];
   await keepBuiltFiles();
-  await dropOtherPages([...paths, ...here, '/cases']);
+  // A sum that is open for a case is a page of its own.
+  const sumHere = location.pathname.startsWith('/bench/') ? [location.pathname + location.search] : [];
+  await dropOtherPages([...paths, ...here, ...sumHere, '/cases', ...BENCH]);
   for (const { id, version, thumbnails } of cases) {
     if (!(await isOwned())) return;
     const held = await db.get('kit', id);
@@ -37,4 +43,5 @@ async function fill(): Promise<void> {
   await keepPages(['/cases', ...here.filter((path) => !paths.includes(path))]);
   await askRanker({ kind: 'keep' });
   await keepForOwner('device', cases.map(({ id }) => id), KEPT_CASES);
+  for (const path of BENCH) if ((await isOwned()) && !(await hasPage(path))) await keepPages([path]);
 }
