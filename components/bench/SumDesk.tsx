@@ -75,6 +75,7 @@ function Desk({ sum, search, known, writing, target }: DeskProps) {
   return (
     <div className="grid gap-x-14 gap-y-10 lg:grid-cols-[minmax(0,1fr)_minmax(0,26rem)]">
       <div className="grid min-w-0 content-start gap-6">
+        <h2 className="sr-only">Readings</h2>
         {sum.cautions.length > 0 && (
           <Notice kind="caution" title="Before you measure">
             <ul className="ml-5 grid list-disc gap-1">{sum.cautions.map((caution) => <li key={caution}>{caution}</li>)}</ul>

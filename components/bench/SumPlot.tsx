@@ -43,7 +43,7 @@ export function SumPlot({ sum, given, writing }: Props) {
       {data && (
         <Disclosure summary="The same as a table">
           <DataTable
-            caption={plot.title}
+            caption={`${plot.title}, as a table`}
             captionHidden
             columns={[
               { key: 'x', header: data.x.label, unit: symbolOf(data.x, writing), numeric: true, rowHeader: true, cell: (row) => shownValue(row.x, data.x, writing) },

@@ -2,7 +2,7 @@ import type { Browser, BrowserContext, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { expectNoAxeViolations } from './support/axe';
 import { DESKTOP, launchBrowser, PHONE } from './support/browser';
-import { openCaseOn, stateOnServer, untilSent } from './support/case-desk';
+import { openCaseOn, stateOnServer, untilCached, untilSent } from './support/case-desk';
 import { startRelay, type Relay } from './support/relay';
 import { startServer, type TestServer } from './support/server';
 import { signIn } from './support/sign-in';
@@ -43,7 +43,7 @@ describe('the bench', () => {
     await page.locator('#loaded').fill('1:30');
     await page.locator('#unloaded').fill('10:30');
     // Bureau of Energy Efficiency's worked example: 1.5 min loaded, 10.5 min unloaded, 12.5 %.
-    await expect.poll(() => result().textContent()).toBe('12.5\u00a0%');
+    await expect.poll(() => result().textContent()).toBe('12.5 %');
     await page.locator('#loaded').fill('soon');
     await page.getByText(/soon/).first().waitFor();
     expect(await page.locator('#loaded').getAttribute('aria-invalid')).toBe('true');
@@ -51,7 +51,7 @@ describe('the bench', () => {
     await page.waitForURL(/loaded=90\+s/);
     const other = await (await browser.newContext({ storageState: await context.storageState() })).newPage();
     await other.goto(page.url());
-    expect(await result(other).textContent()).toBe('12.5\u00a0%');
+    expect(await result(other).textContent()).toBe('12.5 %');
     await other.context().close();
   });
 
@@ -104,7 +104,7 @@ describe('the bench', () => {
     await page.locator('#actualVolume').fill('7200 in3');
     await page.locator('#requiredVolume').fill('5568 in3');
     const write = page.getByRole('button', { name: 'Write it into the case' });
-    await expect.poll(() => result().textContent()).toBe('37.1\u00a0s');
+    await expect.poll(() => result().textContent()).toBe('37.1 s');
     await write.click();
     await page.waitForURL(`${url}/cases/${caseId}`);
     await untilSent(page);
@@ -114,25 +114,25 @@ describe('the bench', () => {
     await page.locator(`[data-finding="${kept?.id}"]`).getByRole('link', { name: /^The sum/ }).click();
     await page.waitForURL(/\/bench\/measured-build-up/);
     await hydrated();
-    expect(await result().textContent()).toBe('37.1\u00a0s');
+    expect(await result().textContent()).toBe('37.1 s');
     await page.getByText(/It replaces 37\.1/).waitFor();
     await page.locator('#time').fill('24');
-    await expect.poll(() => result().textContent()).toBe('18.6\u00a0s');
+    await expect.poll(() => result().textContent()).toBe('18.6 s');
     await write.click();
     await page.waitForURL(`${url}/cases/${caseId}`);
     await untilSent(page);
     const findings = (await stateOnServer(page, caseId)).findings.filter(({ checkId }) => checkId === 'build-up-time');
-    expect(findings.map(({ answer, current }) => [answer.split('\u00a0')[0], current])).toEqual([['18.6', true], ['37.1', false]]);
+    expect(findings.map(({ answer, current }) => [answer.split(' ')[0], current])).toEqual([['18.6', true], ['37.1', false]]);
   });
 
   it('works without a connection, for readings that it was never opened with', async () => {
     await page.goto(`${url}/cases`);
-    await page.waitForFunction(async () => (await caches.match('/bench/carry-over-by-weight')) !== undefined, undefined, { timeout: 60_000 });
+    await untilCached(page, '/bench/carry-over-by-weight');
     wire.cut();
     await page.goto(`${url}/bench/time-loaded?loaded=2+min&unloaded=6+min`);
-    await expect.poll(() => result().textContent()).toBe('25\u00a0%');
+    await expect.poll(() => result().textContent()).toBe('25 %');
     await page.locator('#unloaded').fill('2:00');
-    await expect.poll(() => result().textContent()).toBe('50\u00a0%');
+    await expect.poll(() => result().textContent()).toBe('50 %');
     wire.mend();
   });
 

@@ -1,6 +1,6 @@
 import type { Browser, BrowserContext, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { answerAtHand, openCaseOn, rankingOn, stateOnServer, unsentOn, untilKept, untilSent } from './support/case-desk';
+import { answerAtHand, openCaseOn, rankingOn, stateOnServer, unsentOn, untilCached, untilKept, untilSent } from './support/case-desk';
 import { launchBrowser, PHONE } from './support/browser';
 import { startRelay, type Relay } from './support/relay';
 import { startServer, type TestServer } from './support/server';
@@ -108,7 +108,7 @@ describe('a case without a connection', () => {
 
   it('opens the kept list of cases too, and says so of a page that is not kept', async () => {
     await page.goto(`${url}/cases`);
-    await page.waitForFunction(async () => (await caches.match('/cases')) !== undefined);
+    await untilCached(page, '/cases');
     wire.cut();
     await page.goto(`${url}/cases`);
     await page.getByRole('heading', { level: 1, name: 'Cases' }).waitFor();

@@ -61,6 +61,13 @@ export async function untilSent(page: Page, withinMs = 60_000): Promise<void> {
   throw new Error(`${await unsentOn(page)} entries still wait on the device`);
 }
 
+/** Until a page is on the device. */
+export async function untilCached(page: Page, path: string): Promise<void> {
+  const isHere = () => page.evaluate(async (of) => (await caches.match(of)) !== undefined, path);
+  for (const deadline = Date.now() + 60_000; Date.now() < deadline; await page.waitForTimeout(250)) if (await isHere()) return;
+  throw new Error(`the device does not keep ${path}`);
+}
+
 /** Until the device has what it takes to go on alone, after a reload as well: pages, files, the case's kit, the edition. */
 export async function untilKept(page: Page, caseId: string): Promise<void> {
   const isKept = () =>
