@@ -1,4 +1,5 @@
 import Link from 'next/link';
+import { Breakable } from '@/components/ui/Breakable';
 import { Tag } from '@/components/ui/Tag';
 import { fieldsOf, nameIn, typeInWords, type Field, type Schema } from '@/lib/openapi/fields';
 import type { ReadableOperation } from '@/lib/openapi/readable';
@@ -12,7 +13,7 @@ const parameterFields = (parameters: ReadableOperation['parameters']): Field[] =
     path: name,
     type: `${typeInWords(schema)}, ${WHERE[where] ?? where}`,
     isRequired: required ?? false,
-    description: [description, schema.default !== undefined && schema.default !== '' && `${String(schema.default)} unless given.`].filter(Boolean).join(' '),
+    description: [description, schema.default !== undefined && schema.default !== '' && `Unless given: \`${String(schema.default)}\`.`].filter(Boolean).join(' '),
   }));
 
 export function OperationArticle({ operation: { operationId, method, path, summary, description, scope, parameters, body, answer, refusals } }: { operation: ReadableOperation }) {
@@ -22,7 +23,7 @@ export function OperationArticle({ operation: { operationId, method, path, summa
       <h3 id={`${operationId}-title`} className="text-xl">{summary}</h3>
       <p className="flex flex-wrap items-center gap-3">
         <Tag tone="strong">{method}</Tag>
-        <code className="figure wrap-anywhere">/api/v1{path}</code>
+        <code className="figure wrap-anywhere"><Breakable>{`/api/v1${path}`}</Breakable></code>
         {scope && <span className="text-ink-soft">needs the scope <code className="figure text-[0.9375rem]">{scope}</code></span>}
       </p>
       {description && <Prose>{description}</Prose>}

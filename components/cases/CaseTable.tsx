@@ -6,7 +6,7 @@ import { SightGlass } from '@/components/ui/SightGlass';
 import { Tag } from '@/components/ui/Tag';
 import { dayText } from '@/lib/schemas/day-text';
 import { HoldMark } from './HoldMark';
-import { activityText, standsText } from './words';
+import { activityText, standsText, stoodText } from './words';
 
 export interface CaseRow {
   id: string;
@@ -35,11 +35,12 @@ interface Props {
 const STATUS: Record<string, string> = { open: 'Open', called: 'Called', closed: 'Closed' };
 
 /**
- * What stands where: a ledger on a wide screen, on a phone each row as lines under each other. The roles keep it a table
+ * What stands where: a ledger on a wide screen, on a phone each row as lines under each
+ * other, on a tablet in two columns. The roles keep it a table
  * to a screen reader when it is laid out as blocks.
  */
 export function CaseTable({ rows, sort, sortHref, now }: Props) {
-  const head = (label: string, key?: string) => <HeadCell {...{ label, sort, sortHref }} sortKey={key} />;
+  const head = (label: string, key?: string, turned?: boolean) => <HeadCell {...{ label, sort, sortHref, turned }} sortKey={key} />;
   return (
     <table role="table" className="ledger max-lg:block">
       <caption className="sr-only">Cases</caption>
@@ -48,14 +49,14 @@ export function CaseTable({ rows, sort, sortHref, now }: Props) {
           {head('Unit', 'unit')}
           {head('Where', 'site')}
           {head('With')}
-          {head('Stands', 'opened')}
+          {head('Stands', 'opened', true)}
           {head('Complaint, and what leads')}
           {head('Last activity', 'active')}
         </tr>
       </thead>
       <tbody role="rowgroup" className="max-lg:block">
         {rows.map((row) => (
-          <tr key={row.id} role="row" className="group max-lg:relative max-lg:block max-lg:border-b max-lg:border-rule max-lg:py-4 has-[a:focus-visible]:bg-sunk">
+          <tr key={row.id} role="row" className="group max-lg:relative max-lg:block sm:max-lg:grid sm:max-lg:grid-cols-2 sm:max-lg:grid-rows-[auto_auto_auto_1fr] sm:max-lg:gap-x-10 max-lg:border-b max-lg:border-rule max-lg:py-4 has-[a:focus-visible]:bg-sunk">
             <th role="rowheader" scope="row" className={cell('lg:max-w-64')}>
               <span className="flex flex-wrap items-center gap-x-3 lg:block">
                 <Link data-row href={`/cases/${row.id}`} className="inline-flex min-h-touch items-center gap-2 whitespace-nowrap max-lg:after:absolute max-lg:after:inset-0">
@@ -75,11 +76,10 @@ export function CaseTable({ rows, sort, sortHref, now }: Props) {
               {row.assignedTo ?? 'nobody'}
             </td>
             <td role="cell" className={cell('lg:whitespace-nowrap')}>
-              <span className="text-ink-soft lg:hidden">{row.status === 'closed' ? 'Stood ' : 'Stands '}</span>
-              {standsText(row.days)}
-              {row.days > 0 && <Soft>since {dayText(row.openedOn)}</Soft>}
+              {row.status === 'closed' ? `stood ${stoodText(row.days)}` : <><span className="text-ink-soft lg:hidden">Stands </span>{standsText(row.days)}</>}
+              {row.days > 0 && <Soft>{row.status === 'closed' ? 'from' : 'since'} {dayText(row.openedOn)}</Soft>}
             </td>
-            <td role="cell" className={cell('max-lg:mt-2')}>
+            <td role="cell" className={cell('max-sm:mt-2 sm:max-lg:col-start-2 sm:max-lg:row-span-3 sm:max-lg:row-start-1')}>
               <span className="max-lg:block max-lg:text-ink-soft lg:hidden">{row.complaints.join(', ')}</span>
               <span className="flex items-center gap-3">
                 {row.leader && <SightGlass label={row.leader.name} value={row.leader.p} size="small" />}
@@ -89,7 +89,7 @@ export function CaseTable({ rows, sort, sortHref, now }: Props) {
                 </span>
               </span>
             </td>
-            <td role="cell" className={cell('lg:whitespace-nowrap')}>
+            <td role="cell" className={cell('lg:whitespace-nowrap sm:max-lg:col-start-2 sm:max-lg:row-start-4')}>
               <span className="max-lg:hidden"><Tag>{STATUS[row.status] ?? row.status}</Tag></span>
               <span className="text-[0.9375rem] text-ink-soft lg:block"><span className="lg:hidden">Last activity </span>{activityText(row.activeAt, row.timeZone, now)}</span>
             </td>
@@ -110,19 +110,21 @@ const Soft = ({ children }: { children: ReactNode }) => (
   </span>
 );
 
-function HeadCell({ label, sortKey, sort, sortHref }: { label: string; sortKey?: string } & Pick<Props, 'sort' | 'sortHref'>) {
+/** `turned`: the column shows the sort key the other way round, as days since it. The arrow is that of what is shown. */
+function HeadCell({ label, sortKey, sort, sortHref, turned = false }: { label: string; sortKey?: string; turned?: boolean } & Pick<Props, 'sort' | 'sortHref'>) {
   const sorted = sortKey !== undefined && sort.key === sortKey ? sort.direction : undefined;
+  const shown = !turned || !sorted ? sorted : sorted === 'asc' ? 'desc' : 'asc';
   return (
     <th
       role="columnheader"
       scope="col"
-      aria-sort={sorted && (sorted === 'asc' ? 'ascending' : 'descending')}
+      aria-sort={shown && (shown === 'asc' ? 'ascending' : 'descending')}
       className={classes('label max-lg:border-0! max-lg:p-0!', !sortKey && 'max-lg:sr-only')}
     >
       {sortKey ? (
         <Link href={sortHref({ key: sortKey, direction: sorted === 'asc' ? 'desc' : 'asc' })} scroll={false} className="inline-flex min-h-8 items-end gap-1 underline decoration-edge decoration-dotted underline-offset-4 hover:decoration-solid max-lg:min-h-touch max-lg:items-center">
           {label}
-          <span aria-hidden="true" className="figure w-3">{sorted === 'asc' ? '↑' : sorted === 'desc' ? '↓' : ''}</span>
+          <span aria-hidden="true" className="figure w-3">{shown === 'asc' ? '↑' : shown === 'desc' ? '↓' : ''}</span>
         </Link>
       ) : (
         label

@@ -6,6 +6,9 @@ export function standsText(days: number): string {
   return days === 1 ? '1 day' : `${days.toLocaleString('en-GB')} days`;
 }
 
+/** How long a unit stood that stands no more. */
+export const stoodText = (days: number): string => (days <= 0 ? 'less than a day' : standsText(days));
+
 /** When something last happened, where the site is: the time alone today, the day otherwise. */
 export function activityText(iso: string, timeZone: string, now: Date): string {
   const at = new Date(iso);

@@ -13,8 +13,10 @@ export interface Column<Row> {
   numeric?: boolean;
   /** The head links to the same list sorted by this column (needs `sortHref`). */
   sortable?: boolean;
-  /** The cell that names the row; one column at most. */
+  /** The cell that names the row; one column at most. On a phone it heads the row's lines, wherever its column stands. */
   rowHeader?: boolean;
+  /** Left out on a tablet, where a table this wide would run off the page; a phone's lines and a desk have room for it. */
+  spare?: boolean;
 }
 
 export interface Sort {
@@ -48,7 +50,7 @@ export function DataTable<Row>({ caption, captionHidden, columns, rows, rowKey, 
   return (
     <div role="region" aria-labelledby={captionId} tabIndex={0} className="scroll-x relative">
       <table role="table" className="ledger max-sm:block">
-        <caption id={captionId} className={captionHidden ? 'sr-only' : 'label text-left text-ink-soft'}>{caption}</caption>
+        <caption id={captionId} className={captionHidden ? 'sr-only' : 'label text-left text-ink-soft max-sm:block'}>{caption}</caption>
         <thead role="rowgroup" className="max-sm:block max-sm:border-b-2 max-sm:border-ink">
           <tr role="row" className={classes('max-sm:flex max-sm:flex-wrap max-sm:items-center max-sm:gap-x-5', sortHref && "max-sm:before:text-ink-soft max-sm:before:content-['Sort_by']")}>
             {columns.map((column) => (
@@ -58,7 +60,7 @@ export function DataTable<Row>({ caption, captionHidden, columns, rows, rowKey, 
         </thead>
         <tbody role="rowgroup" className="max-sm:block">
           {rows.map((row) => (
-            <tr key={rowKey(row)} role="row" className="max-sm:block max-sm:border-b max-sm:border-rule max-sm:py-3">
+            <tr key={rowKey(row)} role="row" className="max-sm:flex max-sm:flex-col max-sm:border-b max-sm:border-rule max-sm:py-3">
               {columns.map((column) => <Cell key={column.key} column={column} row={row} />)}
             </tr>
           ))}
@@ -75,7 +77,7 @@ function Cell<Row>({ column, row }: { column: Column<Row>; row: Row }) {
     <Tag
       role={column.rowHeader ? 'rowheader' : 'cell'}
       scope={column.rowHeader ? 'row' : undefined}
-      className={classes('max-sm:border-0! max-sm:p-0!', column.numeric && 'numeric', value === null || value === undefined || value === '' ? 'max-sm:hidden' : 'max-sm:flex max-sm:items-baseline max-sm:gap-4')}
+      className={classes('max-sm:border-0! max-sm:p-0!', column.numeric && 'numeric', column.spare && 'sm:max-lg:hidden', column.rowHeader && 'max-sm:order-first', value === null || value === undefined || value === '' ? 'max-sm:hidden' : 'max-sm:flex max-sm:items-baseline max-sm:gap-4')}
     >
       {!column.rowHeader && <span aria-hidden="true" className="label w-28 shrink-0 text-left text-ink-soft sm:hidden">{column.header}</span>}
       <span className="contents max-sm:block max-sm:min-w-0 max-sm:wrap-anywhere">{value}</span>
@@ -92,7 +94,7 @@ function HeadCell<Row>({ column, sort, sortHref }: { column: Column<Row> } & Pic
       scope="col"
       role="columnheader"
       aria-sort={sorted && (sorted === 'asc' ? 'ascending' : 'descending')}
-      className={classes('label max-sm:border-0! max-sm:p-0!', column.numeric && 'numeric', !(column.sortable && sortHref) && 'max-sm:sr-only')}
+      className={classes('label max-sm:border-0! max-sm:p-0!', column.numeric && 'numeric', column.spare && 'sm:max-lg:hidden', !(column.sortable && sortHref) && 'max-sm:sr-only')}
     >
       {column.sortable && sortHref ? (
         <Link href={sortHref(next)} scroll={false} className="inline-flex min-h-8 items-end gap-1.5 underline decoration-edge decoration-dotted underline-offset-4 hover:decoration-solid max-sm:min-h-touch max-sm:items-center">

@@ -17,15 +17,15 @@ interface Props {
  * @example <Pager label="Pages of units" page={2} pageCount={5} total={118} hrefFor={(page) => hrefWith({ page })} />
  */
 export function Pager({ page, pageCount, hrefFor, label, total }: Props) {
-  const count = total === undefined ? null : <span className="text-ink-soft"><span className="figure">{total}</span> in all</span>;
+  const count = total === undefined ? null : <span className="text-ink-soft"><span className="figure">{total.toLocaleString('en-GB')}</span> in all</span>;
   if (pageCount <= 1) return count && <p>{count}</p>;
   return (
     <nav aria-label={label} className="flex flex-wrap items-center gap-x-5 gap-y-2">
-      {page > 1 && <Link rel="prev" href={hrefFor(page - 1)} className={buttonClass({ variant: 'quiet' })}>Back</Link>}
+      {page > 1 && <Link rel="prev" href={hrefFor(page - 1)} className={buttonClass({ variant: 'quiet' })}>Previous page</Link>}
       <span>
         Page <span className="figure">{page}</span> of <span className="figure">{pageCount}</span>
       </span>
-      {page < pageCount && <Link rel="next" href={hrefFor(page + 1)} className={buttonClass({ variant: 'quiet' })}>On</Link>}
+      {page < pageCount && <Link rel="next" href={hrefFor(page + 1)} className={buttonClass({ variant: 'quiet' })}>Next page</Link>}
       {count}
     </nav>
   );

@@ -17,6 +17,12 @@ export function MeasureField({ measure, units, ...field }: Props) {
   return symbol === '' ? <TextField inputMode="decimal" autoComplete="off" {...field} /> : <NumberWithUnitField {...field} unit={symbol} />;
 }
 
-/** A stored measure as the person reads it; nothing where there is none. */
-export const measureText = (si: number | null, measure: Pick<Measure, 'quantity' | 'like'>, units: UnitPreferences): string | null =>
-  si === null ? null : formatQuantity<Quantity>(si, { quantity: measure.quantity, unit: measureUnit(units, measure) });
+/**
+ * A stored measure as the person reads it; nothing where there is none. No line breaks between figure and unit, and
+ * thousands are grouped whatever the quantity: as people write volumes of reservoirs themselves.
+ */
+export function measureText(si: number | null, measure: Pick<Measure, 'quantity' | 'like'>, units: UnitPreferences): string | null {
+  if (si === null) return null;
+  const text = formatQuantity<Quantity>(si, { quantity: measure.quantity, unit: measureUnit(units, measure) });
+  return text.replace(/^\d{4,}/, (whole) => Number(whole).toLocaleString('en-GB')).replaceAll(' ', '\u00a0');
+}

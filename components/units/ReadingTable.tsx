@@ -20,7 +20,7 @@ export function ReadingTable({ readings, units }: { readings: readonly Reading[]
       rowKey={(row) => row.id}
       empty={<EmptyState title="No reading yet">The first comes with the next case, or enter one.</EmptyState>}
       columns={[
-        { key: 'day', header: 'Read on', rowHeader: true, cell: (row) => dayText(row.readOn) },
+        { key: 'day', header: 'Read on', rowHeader: true, cell: (row) => <span className="whitespace-nowrap">{dayText(row.readOn)}</span> },
         {
           key: 'odometer',
           header: 'Odometer',

@@ -26,14 +26,14 @@ type Row = UnitList['units'][number];
 
 const columnsFor = (units: UnitPreferences): Column<Row>[] => [
   { key: 'number', header: 'Number', sortable: true, rowHeader: true, cell: (row) => <><Link className="inline-flex min-h-touch items-center whitespace-nowrap underline underline-offset-4" href={`/units/${row.id}`}>{row.fleetNumber}</Link><HoldMark checks={row.holds} /></> },
-  { key: 'kind', header: 'Kind', sortable: true, cell: (row) => termLabel('vehicleKind', row.vehicleKind) },
-  { key: 'vocation', header: 'Work', sortable: true, cell: (row) => termLabel('vocation', row.vocation) },
+  { key: 'kind', header: 'Kind', sortable: true, spare: true, cell: (row) => termLabel('vehicleKind', row.vehicleKind) },
+  { key: 'vocation', header: 'Work', sortable: true, spare: true, cell: (row) => termLabel('vocation', row.vocation) },
   { key: 'site', header: 'Site', sortable: true, cell: (row) => row.siteName },
   { key: 'model', header: 'Compressor', cell: (row) => row.modelName },
-  { key: 'since', header: 'Fitted', cell: (row) => row.installedOn && dayText(row.installedOn) },
+  { key: 'since', header: 'Fitted', spare: true, cell: (row) => row.installedOn && <span className="whitespace-nowrap">{dayText(row.installedOn)}</span> },
   { key: 'odometer', header: 'Odometer', numeric: true, cell: (row) => measureText(row.odometerM, { quantity: 'distance' }, units) },
-  { key: 'read', header: 'Read on', cell: (row) => row.readOn && dayText(row.readOn) },
-  { key: 'built', header: 'Built', sortable: true, numeric: true, cell: (row) => row.builtOn?.slice(0, 4) },
+  { key: 'read', header: 'Read on', cell: (row) => row.readOn && <span className="whitespace-nowrap">{dayText(row.readOn)}</span> },
+  { key: 'built', header: 'Built', sortable: true, spare: true, numeric: true, cell: (row) => row.builtOn?.slice(0, 4) },
 ];
 
 export default async function UnitsPage({ searchParams }: { searchParams: Promise<Record<string, string | string[] | undefined>> }) {

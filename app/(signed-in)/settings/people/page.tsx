@@ -1,6 +1,7 @@
 import type { Metadata } from 'next';
 import Link from 'next/link';
 import { InvitationButtons } from '@/components/settings/InvitationButtons';
+import { Breakable } from '@/components/ui/Breakable';
 import { ButtonLink } from '@/components/ui/Button';
 import { DataTable } from '@/components/ui/DataTable';
 import { PageHeader } from '@/components/ui/PageHeader';
@@ -33,7 +34,7 @@ export default async function PeoplePage() {
             rows={invitations}
             rowKey={({ id }) => id}
             columns={[
-              { key: 'email', header: 'Address', cell: ({ email }) => email, rowHeader: true },
+              { key: 'email', header: 'Address', cell: ({ email }) => email && <Breakable>{email}</Breakable>, rowHeader: true },
               { key: 'roles', header: 'Roles', cell: ({ roles }) => list.format(roles) },
               { key: 'until', header: 'Link works until', cell: ({ expiresAt, hasExpired }) => (hasExpired ? <Tag>Expired</Tag> : day.format(expiresAt)) },
               {
@@ -55,7 +56,7 @@ export default async function PeoplePage() {
               rowHeader: true,
               cell: ({ personId, name, endedAt }) => (endedAt ? name : <Link href={`/settings/people/${personId}`}>{name}</Link>),
             },
-            { key: 'email', header: 'Address', cell: ({ email }) => email },
+            { key: 'email', header: 'Address', cell: ({ email }) => <Breakable>{email}</Breakable> },
             { key: 'roles', header: 'Roles', cell: ({ roles, endedAt }) => (endedAt ? <Tag>Left {day.format(endedAt)}</Tag> : list.format(roles)) },
             { key: 'site', header: 'Site', cell: ({ siteName }) => siteName ?? 'any' },
             { key: 'release', header: 'May release', cell: ({ mayRelease }) => (mayRelease ? 'yes' : 'no') },

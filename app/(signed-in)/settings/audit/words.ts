@@ -1,0 +1,98 @@
+/** What a row of the audit did, by the name of the service that wrote it. A test holds every write to have its words. */
+export const ACTION_WORDS: Readonly<Record<string, string>> = {
+  'accept.invitation': 'Accepted an invitation',
+  'acknowledge.caution': 'Acknowledged a caution',
+  'add.photo': 'Added a photo',
+  'add.site': 'Added a site',
+  'add.unit-reading': 'Added a reading of a unit',
+  'assign.case': 'Gave a case to somebody',
+  'call.case': 'Called a case',
+  'change-password.person': 'Changed their own password',
+  'change.compressor-model': 'Changed a compressor model',
+  'change.fit': 'Changed a fit',
+  'change.membership': 'Changed what somebody may do',
+  'change.organisation': 'Changed the organisation',
+  'change.site': 'Changed a site',
+  'change.unit': 'Changed a unit',
+  'create.api-token': 'Made a token',
+  'create.compressor-model': 'Added a compressor model',
+  'create.fit': 'Recorded a fit',
+  'create.unit': 'Added a unit',
+  'end.membership': 'Ended a membership',
+  'hide.compressor-model': 'Hid a compressor model',
+  'hide.fit': 'Hid a fit',
+  'hide.photo': 'Hid a photo, or showed it again',
+  'hide.unit': 'Hid a unit',
+  'invite.person': 'Invited somebody',
+  'mail.invitation': 'Mailed an invitation',
+  'make.thumbnail': 'Made the small picture of a photo',
+  'mark.photo': 'Drew on a photo or described it',
+  'note.finding': 'Noted something at an answer',
+  'open.case': 'Opened a case',
+  'record.finding': 'Answered a check',
+  'remove.saved_view': 'Removed a view of a list',
+  'rename.person': 'Changed their own name',
+  'rename.saved_view': 'Renamed a view of a list',
+  'reopen.case': 'Opened a case again',
+  'resend.invitation': 'Sent an invitation again',
+  'reset-password.person': 'Chose a new password by mail',
+  'revoke.api-token': 'Revoked a token',
+  'save.saved_view': 'Saved a view of a list',
+  'set-units.person': 'Chose their units of measure',
+  'show.compressor-model': 'Showed a hidden compressor model again',
+  'show.unit': 'Showed a hidden unit again',
+  'sign-out-everywhere.person': 'Signed out everywhere',
+  'store.photo': 'Sent a photo’s file',
+  'strike.unit-reading': 'Struck out a reading of a unit',
+  'take-out.fit': 'Took a compressor out',
+  'withdraw.invitation': 'Withdrew an invitation',
+};
+
+/** The kinds of things that are written, as one picks among them. */
+export const ENTITY_WORDS: Readonly<Record<string, string>> = {
+  'api-token': 'Tokens',
+  call: 'Calls',
+  case: 'Cases',
+  caution_acknowledgement: 'Cautions acknowledged',
+  'compressor-model': 'Compressor models',
+  finding: 'Answers',
+  finding_note: 'Notes at answers',
+  fit: 'Fits',
+  invitation: 'Invitations',
+  membership: 'Memberships',
+  organisation: 'Organisation',
+  person: 'People',
+  photo: 'Photos',
+  saved_view: 'Views of lists',
+  site: 'Sites',
+  unit: 'Units',
+  'unit-reading': 'Readings of units',
+};
+
+/** "strike.unit-reading": a name that has no words yet is at least made of some. */
+const plainly = (name: string): string => {
+  const words = name.replaceAll(/[._-]/g, ' ');
+  return words.charAt(0).toUpperCase() + words.slice(1);
+};
+
+export const actionWords = (action: string): string => ACTION_WORDS[action] ?? plainly(action);
+export const entityWords = (entity: string): string => ENTITY_WORDS[entity] ?? plainly(entity);
+
+interface Written {
+  entity: string;
+  entityId: string;
+  changed: Record<string, unknown>;
+}
+
+/** The page of the thing that a row is about; nothing where it has none. */
+export function subjectOf({ entity, entityId, changed }: Written): { href: string; label: string } | null {
+  if (entity === 'case' || entity === 'caution_acknowledgement') return { href: `/cases/${entityId}`, label: 'The case' };
+  if (typeof changed.caseId === 'string') return { href: `/cases/${changed.caseId}`, label: 'The case' };
+  if (entity === 'unit') return { href: `/units/${entityId}`, label: 'The unit' };
+  if (entity === 'fit' && typeof changed.unitId === 'string') return { href: `/units/${changed.unitId}/fits/${entityId}`, label: 'The fit' };
+  if (entity === 'unit-reading' && typeof changed.unitId === 'string') return { href: `/units/${changed.unitId}`, label: 'The unit' };
+  if (entity === 'compressor-model') return { href: `/models/${entityId}`, label: 'The model' };
+  if (entity === 'site') return { href: `/settings/sites/${entityId}`, label: 'The site' };
+  if (entity === 'membership') return { href: `/settings/people/${entityId}`, label: 'The person' };
+  return null;
+}
