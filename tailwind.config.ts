@@ -46,8 +46,12 @@ export type Token = keyof (typeof palette)['light'];
 
 const kebab = (token: string) => token.replace(/[A-Z]/g, (letter) => `-${letter.toLowerCase()}`);
 const tokens = Object.keys(palette.light) as Token[];
+/** What opens a list. A background can't take a variable's colour, so that each theme has its own. */
+const arrow = (ink: string) => `url("data:image/svg+xml,%3Csvg xmlns='http://www.w3.org/2000/svg' viewBox='0 0 16 10'%3E%3Cpath d='M1.5 1.5 8 8l6.5-6.5' fill='none' stroke='${ink.replace('#', '%23')}' stroke-width='2.5'/%3E%3C/svg%3E")`;
+
 const variables = (theme: keyof typeof palette) => ({
   colorScheme: theme,
+  '--select-arrow': arrow(palette[theme].ink),
   ...Object.fromEntries(tokens.map((token) => [`--${kebab(token)}`, palette[theme][token]])),
 });
 

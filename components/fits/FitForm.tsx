@@ -29,7 +29,8 @@ interface Props {
   fit: { newId: string; unitId: string; standing: { modelName: string; installedOn: string } | null } | { fitId: string; version: string };
 }
 
-const NOT_KNOWN = 'Nobody knows';
+/** The record doesn't say. That somebody said “nobody knows” is an answer of its own where it can be given. */
+const NOT_RECORDED = 'Not recorded';
 
 const OUT = ['removedOn', 'whyOut', 'removedOdometer', 'removedEngineHours'];
 
@@ -40,7 +41,7 @@ export function FitForm({ action, models, units, today, stored, fit }: Props) {
   const condition = field('condition');
   const isNew = 'newId' in fit;
   const out = (
-    <div className="grid items-start gap-x-8 gap-y-5 sm:grid-cols-2">
+    <div className="form-grid">
       <TextField label="Came out on" type="date" max={today} required={false} {...field('removedOn')} />
       <SelectField label="Why it came out" placeholder="It hasn’t" required={false} options={termOptions('whyOut')} {...field('whyOut')} />
       <ReadingFields form={form} units={units} names={{ odometer: 'removedOdometer', engineHours: 'removedEngineHours' }} stored={stored} />
@@ -84,13 +85,13 @@ export function FitForm({ action, models, units, today, stored, fit }: Props) {
 
 function HowItWasFitted({ field }: { field: (name: string) => ReturnType<FormHandle['field']> }) {
   return (
-    <FormSection title="How it was fitted" hint="Leave open what nobody knows: a case asks for it only then.">
-      <SelectField label="Sealant at the gasket" placeholder="Not recorded" options={termOptions('sealant')} {...field('sealant')} />
+    <FormSection title="How it was fitted" hint="Leave open what you can’t say: a case asks for it only then.">
+      <SelectField label="Sealant at the gasket" placeholder={NOT_RECORDED} options={termOptions('sealant')} {...field('sealant')} />
       {PARTS_WITH_IT.map(({ field: name, label }) => (
-        <SelectField key={name} label={label} placeholder={NOT_KNOWN} options={termOptions('withIt')} {...field(name)} />
+        <SelectField key={name} label={label} placeholder={NOT_RECORDED} options={termOptions('withIt')} {...field(name)} />
       ))}
-      <SelectField label="Old oil cleaned out" hint="Of line, dryer and tanks" placeholder={NOT_KNOWN} options={termOptions('yesNo')} {...field('systemCleaned')} />
-      <SelectField label="Break-in run" hint="Run in under steady load" placeholder={NOT_KNOWN} options={termOptions('yesNo')} {...field('breakInRun')} />
+      <SelectField label="Old oil cleaned out" hint="Of line, dryer and tanks" placeholder={NOT_RECORDED} options={termOptions('yesNo')} {...field('systemCleaned')} />
+      <SelectField label="Break-in run" hint="Run in under steady load" placeholder={NOT_RECORDED} options={termOptions('yesNo')} {...field('breakInRun')} />
     </FormSection>
   );
 }

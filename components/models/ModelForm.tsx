@@ -21,7 +21,7 @@ interface Props {
   model: { newId: string } | { modelId: string; version: string };
 }
 
-const NOT_KNOWN = 'Not known';
+const NOT_RECORDED = 'Not recorded';
 
 export function ModelForm({ action, units, stored, model }: Props) {
   const form = useForm(action);
@@ -37,13 +37,13 @@ export function ModelForm({ action, units, stored, model }: Props) {
         </>
       )}
       <TextField label="Name" hint="As your workshop calls it" autoComplete="off" required className="max-w-md" {...field('name')} />
-      <FormSection title="What a case asks for" hint="Whatever stands here is never asked in the bay.">
-        <SelectField label="Oil drain" hint="How oil falls back to the engine" placeholder={NOT_KNOWN} options={termOptions('drainOpening')} {...field('drainOpening')} />
-        <SelectField label="Oil feed" hint="Where engine oil enters" placeholder={NOT_KNOWN} options={termOptions('oilFeedPlace')} {...field('oilFeedPlace')} />
-        <SelectField label="Breathes from" placeholder={NOT_KNOWN} options={termOptions('intakeType')} {...field('intakeType')} />
-        <SelectField label="Head cooled by" placeholder={NOT_KNOWN} options={termOptions('cooling')} {...field('cooling')} />
-        <SelectField label="Drive gear of" placeholder={NOT_KNOWN} options={termOptions('driveGear')} {...field('driveGear')} />
-        <SelectField label="Unloads by" placeholder={NOT_KNOWN} options={termOptions('unloading')} {...field('unloading')} />
+      <FormSection title="What a case need not ask" hint="Whatever is recorded here is never asked in the bay.">
+        <SelectField label="Oil drain" hint="How oil falls back to the engine" placeholder={NOT_RECORDED} options={termOptions('drainOpening')} {...field('drainOpening')} />
+        <SelectField label="Oil feed" hint="Where engine oil enters" placeholder={NOT_RECORDED} options={termOptions('oilFeedPlace')} {...field('oilFeedPlace')} />
+        <SelectField label="Breathes from" placeholder={NOT_RECORDED} options={termOptions('intakeType')} {...field('intakeType')} />
+        <SelectField label="Head cooled by" placeholder={NOT_RECORDED} options={termOptions('cooling')} {...field('cooling')} />
+        <SelectField label="Drive gear of" placeholder={NOT_RECORDED} options={termOptions('driveGear')} {...field('driveGear')} />
+        <SelectField label="Unloads by" placeholder={NOT_RECORDED} options={termOptions('unloading')} {...field('unloading')} />
       </FormSection>
       <FormSection title="Sizes">
         {MODEL_MEASURE_FIELDS.map(({ measure, label, hint }) => (

@@ -21,7 +21,7 @@ function OnlyHere({ photo, onDone }: { photo: ShownPhoto; onDone: () => void }) 
       <p className="mb-3">This photo is on this device alone. Removed from here, it is gone.</p>
       <div className="flex flex-wrap gap-3">
         {refused && <Button onClick={() => then(tryAgain(photo))}>Send it again</Button>}
-        <Button variant="danger" onClick={() => then(dropHere(photo))}>Remove it from this device</Button>
+        <Button variant="quiet" onClick={() => then(dropHere(photo))}>Remove it from this device</Button>
       </div>
     </details>
   );

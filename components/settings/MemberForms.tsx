@@ -49,7 +49,7 @@ export function EndMembershipForm({ action, personId, name }: { action: Action; 
     <Form form={form} label="End the membership" errorTitle="Not ended">
       <input type="hidden" name="personId" value={personId} />
       <p>{name} is signed out at once and gets no further. Cases go on naming whoever worked on them. An invitation brings somebody back.</p>
-      <SubmitButton variant="danger" pendingLabel="Ending…">End the membership</SubmitButton>
+      <SubmitButton pendingLabel="Ending…">End the membership</SubmitButton>
     </Form>
   );
 }

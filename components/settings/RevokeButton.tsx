@@ -16,7 +16,7 @@ export function RevokeButton({ tokenId, name, action }: Props) {
   return (
     <form action={revoke}>
       <input type="hidden" name="tokenId" value={tokenId} />
-      <SubmitButton variant="danger" size="small" pendingLabel="Revoking…">Revoke<span className="sr-only"> the token {name}</span></SubmitButton>
+      <SubmitButton variant="quiet" size="small" pendingLabel="Revoking…">Revoke<span className="sr-only"> the token {name}</span></SubmitButton>
       <span role="status">{state && !state.ok ? state.message : ''}</span>
     </form>
   );

@@ -2,7 +2,8 @@ import Link from 'next/link';
 import type { ComponentProps } from 'react';
 import { classes } from './classes';
 
-export type ButtonVariant = 'primary' | 'quiet' | 'danger';
+/** None is red: red is kept for danger to people, and what is hard to undo says so in words. */
+export type ButtonVariant = 'primary' | 'quiet';
 /** `touch` is 48 px high and more, for gloves; `small` only where a mouse is at hand (tables, toolbars). */
 export type ButtonSize = 'touch' | 'small';
 
@@ -16,7 +17,6 @@ interface Look {
 const variants: Record<ButtonVariant, string> = {
   primary: 'bg-ink text-paper border-ink hover:bg-ink-soft hover:border-ink-soft disabled:border-edge disabled:border-dashed disabled:bg-transparent disabled:text-ink-soft',
   quiet: 'bg-transparent text-ink border-edge hover:border-ink hover:bg-sunk disabled:border-dashed disabled:border-edge disabled:bg-transparent disabled:text-ink-soft',
-  danger: 'bg-transparent text-danger border-danger hover:bg-danger hover:text-paper disabled:border-dashed disabled:border-edge disabled:bg-transparent disabled:text-ink-soft',
 };
 const sizes: Record<ButtonSize, string> = {
   touch: 'min-h-touch px-5 py-2.5 text-[1.0625rem]',
@@ -25,7 +25,7 @@ const sizes: Record<ButtonSize, string> = {
 
 export function buttonClass({ variant = 'primary', size = 'touch', wide = false }: Look = {}): string {
   return classes(
-    'inline-flex print:hidden items-center justify-center gap-2 rounded border font-heading font-semibold font-stretch-[80%] leading-tight no-underline text-center',
+    'inline-flex print:hidden items-center justify-center gap-2 rounded border font-heading font-semibold font-stretch-[80%] [word-spacing:0.12em] leading-tight no-underline text-center',
     variants[variant],
     sizes[size],
     wide && 'w-full sm:w-auto',

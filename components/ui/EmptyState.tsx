@@ -7,7 +7,7 @@ import { OilPathMark } from '@/components/oil-path/OilPathMark';
  */
 export function EmptyState({ title, children, action }: { title: ReactNode; children?: ReactNode; action?: ReactNode }) {
   return (
-    <div className="flex flex-wrap gap-x-8 gap-y-5 border-y border-rule py-10">
+    <div className="flex flex-wrap gap-x-8 gap-y-5 border-b border-rule pt-4 pb-10">
       <OilPathMark className="size-20 shrink-0" />
       <div className="min-w-0 flex-1 basis-64">
         <p className="heading text-2xl">{title}</p>

@@ -61,7 +61,7 @@ export function RadioGroup({ label, name, id = name, hint, error, choices, defau
               defaultChecked={defaultValue === choice.value}
               disabled={choice.disabled}
               required={required}
-              className={classes('size-5 shrink-0', look === 'cards' && 'outline-none checked:accent-paper')}
+              className={classes('size-5 shrink-0', look === 'cards' && 'outline-none')}
             />
             <span>
               <span className={look === 'cards' ? 'text-[1.0625rem] font-bold' : undefined}>{choice.label}</span>

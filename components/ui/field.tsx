@@ -31,12 +31,14 @@ export function wiring({ name, id = name, hint, error }: Pick<FieldProps, 'name'
 /** Label above, hint under it, then the control, then what is wrong with it. */
 export function FieldFrame({ label, name, id = name, hint, error, required, children, className }: FieldProps & { required?: boolean; children: ReactNode; className?: string }) {
   return (
-    <div className={classes('grid gap-1.5', className)}>
-      <label htmlFor={id} className="label">
-        {label}
-        {required === false && <span className="ml-2 font-normal normal-case tracking-normal text-ink-soft">optional</span>}
-      </label>
-      {hint != null && <p id={`${id}-hint`} className="-mt-1 text-[0.9375rem] text-ink-soft">{hint}</p>}
+    <div className={classes('field', className)}>
+      <div className="field-head">
+        <label htmlFor={id} className="label block">
+          {label}
+          {required === false && <span className="ml-2 font-normal normal-case tracking-normal text-ink-soft">optional</span>}
+        </label>
+        {hint != null && <p id={`${id}-hint`} className="mt-0.5 text-[0.9375rem] text-ink-soft">{hint}</p>}
+      </div>
       {children}
       <FieldError id={`${id}-error`} error={error} />
     </div>

@@ -22,10 +22,12 @@ export function ReadingFields({ form, units, names, stored = {}, askReplaced = f
   return both.map(({ name, label, measure, replaced }) => {
     const flag = `${name}Replaced`;
     const wasTicked = form.isTicked(flag, 'on', false);
+    const figure = <MeasureField key={name} label={label} required={false} units={units} measure={measure} {...form.field(name, stored[name])} />;
+    if (!askReplaced && form.errors[name] === undefined && !wasTicked) return figure;
     return (
       <div key={name} className="grid gap-1">
-        <MeasureField label={label} required={false} units={units} measure={measure} {...form.field(name, stored[name])} />
-        {(askReplaced || form.errors[name] !== undefined || wasTicked) && <CheckboxField label={replaced} name={flag} defaultChecked={wasTicked} />}
+        {figure}
+        <CheckboxField label={replaced} name={flag} defaultChecked={wasTicked} />
       </div>
     );
   });

@@ -30,7 +30,7 @@ export function HideForm<Result>({ action, id, title, explains }: HideProps<Resu
         <p>{explains}</p>
         <TextField label="Why" autoComplete="off" required {...form.field('reason')} />
         <div>
-          <SubmitButton variant="danger">{title}</SubmitButton>
+          <SubmitButton>{title}</SubmitButton>
         </div>
       </Form>
     </Disclosure>
@@ -61,7 +61,7 @@ export function StrikeReadingForm<Result>({ action, unitId, readings }: { action
         <SelectField label="Reading" placeholder="Choose the reading" required options={readings} {...form.field('readingId')} />
         <TextField label="What is wrong with it" autoComplete="off" required {...form.field('whyWrong')} />
         <div>
-          <SubmitButton variant="danger" pendingLabel="Striking out…">Strike it out</SubmitButton>
+          <SubmitButton pendingLabel="Striking out…">Strike it out</SubmitButton>
         </div>
       </Form>
     </Disclosure>

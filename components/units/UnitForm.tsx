@@ -45,7 +45,7 @@ export function UnitForm({ action, sites, units, stored, unit }: Props) {
         <TextField label="Fleet number" hint="As it is painted on the door" autoComplete="off" autoCapitalize="characters" required {...field('fleetNumber')} />
         <SelectField label="Site" placeholder="Choose a site" required options={sites.map(({ id, name }) => ({ value: id, label: name }))} {...field('siteId')} />
         <RadioGroup label="Kind" choices={termOptions('vehicleKind')} columns={2} required name="vehicleKind" error={kind.error} defaultValue={kind.defaultValue} />
-        <SelectField label="Work" hint="What it has done in the last months" placeholder="Not known" required={false} options={termOptions('vocation')} {...field('vocation')} />
+        <SelectField label="Work" hint="What it has done in the last months" placeholder="Not recorded" required={false} options={termOptions('vocation')} {...field('vocation')} />
       </FormSection>
       <FormSection title="What it is">
         <TextField label="Engine family" hint="As your workshop calls it" required={false} autoComplete="off" {...field('engineFamily')} />
