@@ -1,9 +1,10 @@
 import type { Metadata } from 'next';
-import { Wordmark } from '@/components/shell/Wordmark';
+import { Doorway } from '@/components/sign-in/Doorway';
 import { NotFoundPage } from '@/components/states/NotFoundPage';
 import { ButtonLink } from '@/components/ui/Button';
 import { homeFor } from '@/lib/auth/navigation';
 import { getContext } from '@/lib/auth/session';
+import PublicLayout from './(public)/layout';
 import { SignedInFrame } from './signed-in-frame';
 
 export const metadata: Metadata = { title: 'Not found' };
@@ -21,11 +22,12 @@ export default async function NotFound() {
     );
   }
   return (
-    <main className="mx-auto grid min-h-dvh max-w-page content-center gap-4 px-4 sm:px-6">
-      <Wordmark href="/" />
-      <h1>Nothing at this address</h1>
-      <p className="max-w-prose">{WHY} Nothing was changed.</p>
-      <p><ButtonLink href="/">To the start</ButtonLink></p>
-    </main>
+    <PublicLayout>
+      <Doorway>
+        <h1>Nothing at this address</h1>
+        <p>{WHY} Nothing was changed.</p>
+        <p><ButtonLink href="/">To the start</ButtonLink></p>
+      </Doorway>
+    </PublicLayout>
   );
 }

@@ -1,4 +1,5 @@
 import type { CaseState, RulebookView } from '@/lib/schemas/case-view';
+import { keepFigures } from '@/components/ui/figures';
 import { standing } from './answered';
 import type { Picked } from './at-hand';
 
@@ -24,7 +25,7 @@ export function AnsweredStrip({ state, rulebook, onPick }: Props) {
             <li key={finding.id}>
               <button type="button" className="chip" onClick={() => onPick({ kind: 'check', checkId: finding.checkId })}>
                 <span className="sr-only">Change </span>
-                <span className="chip-name">{rulebook.checks[finding.checkId]?.name ?? finding.checkId}</span>
+                <span className="chip-name">{keepFigures(rulebook.checks[finding.checkId]?.name ?? finding.checkId)}</span>
                 <span className="sr-only">: </span>
                 <span className="chip-answer">{finding.waits && <span className="label text-[0.6875rem]">waits </span>}{finding.answer}</span>
               </button>

@@ -1,6 +1,7 @@
 import { Disclosure } from '@/components/ui/Disclosure';
 import type { CheckView } from '@/lib/schemas/case-view';
-import { minutesText, setUpWords } from './words';
+import { Minutes } from './Minutes';
+import { setUpWords } from './words';
 
 /** What it takes to make a check: time, set-up, tools, steps, and what it destroys. */
 export function Instructions({ check, setUpMinutes }: { check: CheckView; setUpMinutes?: number }) {
@@ -10,8 +11,8 @@ export function Instructions({ check, setUpMinutes }: { check: CheckView; setUpM
       <p className="text-ink-soft">{check.why}</p>
       <dl className="flex flex-wrap gap-x-8 gap-y-1">
         <Item term="Takes">
-          <span className="figure">{minutesText(check.minutes)}</span>
-          {setUpMinutes ? <> and <span className="figure">{minutesText(setUpMinutes)}</span> to set up</> : null}
+          <Minutes of={check.minutes} />
+          {setUpMinutes ? <> and <Minutes of={setUpMinutes} /> to set up</> : null}
         </Item>
         {setUp.length > 0 && <Item term="With">{setUp.join(', ')}</Item>}
         {check.tools.length > 0 && <Item term="Tools">{check.tools.join(', ')}</Item>}

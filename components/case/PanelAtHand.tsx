@@ -10,7 +10,7 @@ import { Undo } from './Dock';
 import { Instructions } from './Instructions';
 import { PanelAnswers } from './PanelAnswers';
 import type { CaseHandle } from './use-case';
-import { minutesText } from './words';
+import { Minutes } from './Minutes';
 
 interface Props {
   panel: RulebookView['panels'][number];
@@ -35,7 +35,7 @@ export function PanelAtHand({ panel, rulebook, handle, stationName, onDone }: Pr
         <p className="label text-ink-soft">{stationName} · {checks.length} checks on one screen</p>
         <h2 id="check-at-hand" tabIndex={-1} className="scroll-mt-12 mt-1 text-[1.75rem]">{panel.prompt}</h2>
         <p className="mt-1 text-ink-soft">
-          About <span className="figure">{minutesText(checks.reduce((sum, { minutes }) => sum + minutes, 0))}</span> for all of them. Answer those that you can; each is saved as you tap it.
+          About <Minutes of={checks.reduce((sum, { minutes }) => sum + minutes, 0)} /> for all of them. Answer those that you can; each is saved as you tap it.
         </p>
       </header>
       {problem && <Notice kind="danger" title="Not saved">{problem.message}</Notice>}

@@ -4,7 +4,7 @@ import { Button } from '@/components/ui/Button';
 import { percent } from '@/components/ui/SightGlass';
 import type { CaseState, RulebookView, SettleView } from '@/lib/schemas/case-view';
 import type { Picked } from './at-hand';
-import { minutesText } from './words';
+import { Minutes } from './Minutes';
 
 interface Props {
   state: CaseState;
@@ -39,7 +39,7 @@ export function WhatNext({ state, settle, rulebook, readOnly, onPick }: Props) {
                     onClick={() => !readOnly && checkId && onPick(panelId ? { kind: 'panel', panelId } : { kind: 'check', checkId })}
                   >
                     <span>{title}</span>
-                    <span className="max-w-[55%] shrink-0 text-right font-normal text-ink-soft">{word}, <span className="figure">{minutesText(minutes)}</span></span>
+                    <span className="max-w-[55%] shrink-0 text-right font-normal text-ink-soft">{word}, <Minutes of={minutes} /></span>
                   </Button>
                   {because && <p className="px-2 pb-2 text-[0.9375rem]">{because}</p>}
                 </li>
@@ -72,8 +72,8 @@ export function WhatNext({ state, settle, rulebook, readOnly, onPick }: Props) {
           <ol className="mt-2 ml-5 grid list-decimal gap-1">
             {state.repairs.slice(0, MOST_REPAIRS).map(({ remedyId, name: remedy, p, lookMinutes, fixMinutes }) => (
               <li key={remedyId}>
-                {remedy}: <span className="figure">{percent(p)}</span> likely, <span className="figure">{minutesText(lookMinutes)}</span> to look
-                {fixMinutes > 0 && <>, <span className="figure">{minutesText(fixMinutes)}</span> to put right</>}
+                {remedy}: <span className="figure">{percent(p)}</span> likely, <Minutes of={lookMinutes} /> to look
+                {fixMinutes > 0 && <>, <Minutes of={fixMinutes} /> to put right</>}
               </li>
             ))}
           </ol>

@@ -5,7 +5,7 @@ import { Doorway } from './Doorway';
 export function DeadLink({ children, action }: { children: ReactNode; action: ReactNode }) {
   return (
     <Doorway>
-      <h1>This link is used up</h1>
+      <h1>This link doesn’t work</h1>
       <p>{children}</p>
       <div>{action}</div>
     </Doorway>

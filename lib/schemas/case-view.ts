@@ -72,7 +72,7 @@ export interface FindingView {
   stage: Stage;
   source: string;
   kind: string;
-  /** "48 s ± 1 s", "Heavy bead", "Can't tell" */
+  /** "48 s ± 1 s", "Heavy bead", “Can’t tell” */
   answer: string;
   shares: StateShare[];
   /** The sum of the bench that it came from, with all that went in, as the bench's address takes it. */

@@ -2,7 +2,7 @@ import { z } from 'zod';
 import { ROLES } from '@/lib/auth/roles';
 import { QUANTITY_IDS, isUnitOf } from '@/lib/units';
 import { checkbox, email, line, optionalId, optionalLine, pageNumber, rowId, several } from './common';
-import { linkToken, newPassword, triedPassword } from './sign-in';
+import { invitationToken, newPassword, triedPassword } from './sign-in';
 
 const personName = line('your name', 100);
 
@@ -24,10 +24,10 @@ const roles = several(z.enum(ROLES, 'This is not a role.')).refine((chosen) => c
 export const inviteInput = z.object({ email, roles, siteId: optionalId });
 export const invitationInput = z.object({ invitationId: rowId });
 
-export const viewInvitationInput = z.object({ token: linkToken });
+export const viewInvitationInput = z.object({ token: invitationToken });
 
 /** Name and a new password for a first sign-in; the password that exists for one that is there. */
-export const acceptInvitationInput = z.object({ token: linkToken, name: z.string().max(200).optional(), password: triedPassword });
+export const acceptInvitationInput = z.object({ token: invitationToken, name: z.string().max(200).optional(), password: triedPassword });
 export const firstSignInInput = z.object({ name: personName, password: newPassword });
 
 export const memberInput = z.object({ personId: rowId });

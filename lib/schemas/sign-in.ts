@@ -16,11 +16,16 @@ export const newPassword = z
 export const triedPassword = z.string('Enter your password.').min(1, 'Enter your password.').max(LONGEST_PASSWORD, 'That is longer than any password here.');
 
 /** From a mailed link. */
-export const linkToken = z.string().regex(/^[A-Za-z0-9_-]{43}$/, 'This link is not complete.');
+const tokenOf = (otherwise: string) =>
+  z.string().regex(/^[A-Za-z0-9_-]{43}$/, `This link is not complete. Open it from the mail once more, or ${otherwise}.`);
+export const linkToken = tokenOf('ask for a new one');
+export const invitationToken = tokenOf('ask the administrator who invited you for a new one');
 
 export const signInInput = z.object({ email, password: triedPassword });
 
 export const requestResetInput = z.object({ email });
+
+export const viewResetInput = z.object({ token: linkToken });
 
 export const resetPasswordInput = z.object({ token: linkToken, password: newPassword });
 

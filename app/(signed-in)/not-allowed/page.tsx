@@ -2,6 +2,7 @@ import type { Metadata } from 'next';
 import { ButtonLink } from '@/components/ui/Button';
 import { EmptyState } from '@/components/ui/EmptyState';
 import { PageHeader } from '@/components/ui/PageHeader';
+import { asRoles } from '@/lib/auth/role-words';
 import { homeFor } from '@/lib/auth/navigation';
 import { pageContext } from '@/lib/auth/page';
 
@@ -13,8 +14,8 @@ export default async function NotAllowedPage() {
   return (
     <>
       <PageHeader title="Not for your role" />
-      <EmptyState title="This page is for another role" action={<ButtonLink href={homeFor(roles)}>To your pages</ButtonLink>}>
-        You are signed in as {new Intl.ListFormat('en').format(roles)}. An administrator of your organisation can give you more.
+      <EmptyState title={`You are signed in ${asRoles(roles)}`} action={<ButtonLink href={homeFor(roles)}>To your pages</ButtonLink>}>
+        An administrator of your organisation can give you more rights.
       </EmptyState>
     </>
   );

@@ -36,7 +36,7 @@ export function withWaiting(state: CaseState, waiting: readonly Kept[], rulebook
 /** An answer that no ranking has seen yet: shown as it was given. */
 function viewOf({ id, body }: Extract<Kept, { kind: 'finding' }>, rulebook: RulebookView): FindingView {
   const { answer, checkId, deviceAt } = body;
-  const labels: Record<string, string> = { 'cannot-tell': "Can't tell", sum: 'Worked out on the bench', skip: 'Skipped', undo: 'Taken back' };
+  const labels: Record<string, string> = { 'cannot-tell': 'Can’t tell', sum: 'Worked out on the bench', skip: 'Skipped', undo: 'Taken back' };
   const check = rulebook.checks[checkId];
   const words =
     answer.kind === 'state' ? (check?.answers.find((one) => one.id === answer.state)?.label ?? answer.state)

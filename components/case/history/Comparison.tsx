@@ -19,17 +19,21 @@ interface Props {
 /** Two moments beside each other: each cause with its level at both, and what was answered between them. */
 export function Comparison({ before, after, rulebook, timeZone }: Props) {
   const { causes, rest, answered } = compareStates(before.state, after.state);
-  const head = ({ step }: At) => <>{timeText(step.at, timeZone)}<span className="unit block text-ink-soft">{step.what}</span></>;
   return (
     <div className="grid grid-cols-1 gap-8">
+      <div>
+        {[before, after].map(({ step }) => (
+          <p key={step.at}><strong>{timeText(step.at, timeZone)}</strong>: {step.what}</p>
+        ))}
+      </div>
       <div role="region" aria-label="The ranking at two moments" tabIndex={0} className="scroll-x relative">
       <table className="ledger">
         <caption className="sr-only">The ranking at two moments</caption>
         <thead>
           <tr>
             <th scope="col" className="label">Cause</th>
-            <th scope="col" className="label whitespace-normal!">{head(before)}</th>
-            <th scope="col" className="label whitespace-normal!">{head(after)}</th>
+            <th scope="col" className="label whitespace-normal!">{timeText(before.step.at, timeZone)}</th>
+            <th scope="col" className="label whitespace-normal!">{timeText(after.step.at, timeZone)}</th>
             <th scope="col" className="label">Change</th>
           </tr>
         </thead>

@@ -10,9 +10,9 @@ interface Answered {
   errorSi: number | null;
 }
 
-/** An answer as it is shown: "Heavy bead", "48 s ± 1 s", "Can't tell". */
+/** An answer as it is shown: "Heavy bead", "48 s ± 1 s", “Can’t tell”. */
 export function answerText(check: Check | undefined, answered: Answered, units: UnitPreferences): string {
-  if (answered.kind === 'cannot-tell') return "Can't tell";
+  if (answered.kind === 'cannot-tell') return 'Can’t tell';
   if (answered.kind === 'skip') return 'Skipped';
   if (answered.kind === 'undo') return 'Taken back';
   if (answered.kind === 'measured') return measuredText(check, answered, units);

@@ -4,8 +4,7 @@ import { isPasswordResetOpen, organisationsOf, usePasswordReset } from '@/db/que
 import { hashPassword } from '@/lib/auth/password-hash';
 import { hashToken } from '@/lib/auth/token';
 import { AppError } from '@/lib/errors';
-import { viewInvitationInput } from '@/lib/schemas/person';
-import { resetPasswordInput } from '@/lib/schemas/sign-in';
+import { resetPasswordInput, viewResetInput } from '@/lib/schemas/sign-in';
 import { tryOrRefuse } from '../session/tries';
 import { defineVisit } from '../visit';
 
@@ -14,7 +13,7 @@ const noGood = () =>
 
 /** Whether a mailed link can still be used, for the page that it opens. */
 export const viewPasswordReset = defineVisit({
-  input: viewInvitationInput,
+  input: viewResetInput,
   run: async ({ visitor, input: { token } }) => {
     await tryOrRefuse(visitor, 'link by network', visitor.network);
     if (!(await isPasswordResetOpen(visitor.db, { tokenHash: hashToken(token), now: visitor.now() }))) throw noGood();

@@ -19,6 +19,7 @@ import { may, PERMITTED } from '@/lib/auth/permissions';
 import { newId } from '@/lib/ids';
 import { QueryProvider } from '@/lib/query/provider';
 import type { CaseView } from '@/lib/schemas/case-view';
+import { dayText } from '@/lib/schemas/day-text';
 import { listAssignable } from '@/lib/services/case/assignable';
 import { readCase } from '@/lib/services/case/read';
 import { decimalMarkOf } from '@/lib/services/units-of-measure';
@@ -93,8 +94,8 @@ function Lead({ view: { head } }: { view: CaseView }) {
   return (
     <>
       <Link className="underline underline-offset-4" href={`/units/${head.unit.id}`}>{head.unit.fleetNumber}</Link>, {head.siteName}.{' '}
-      {head.fit ? <>{head.fit.modelName}, fitted {head.fit.installedOn}. </> : <>No fit on record. </>}
-      {head.odometer && <span className="figure">{head.odometer}. </span>}
+      {head.fit ? <>{head.fit.modelName}, fitted {dayText(head.fit.installedOn)}. </> : <>No fit on record. </>}
+      {head.odometer && <><span className="figure whitespace-nowrap">{head.odometer}</span>. </>}
       Opened by {head.openedBy}, {timeText(head.openedAt, head.timeZone)}. Rulebook edition <span className="figure">{head.editionNumber}</span>.
       {head.complaintWords && <> “{head.complaintWords}”</>}
     </>

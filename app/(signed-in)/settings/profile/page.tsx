@@ -1,6 +1,7 @@
 import type { Metadata } from 'next';
 import { ChangeOrganisationForm, PasswordForm, RenameForm, SignOutEverywhereForm } from '@/components/settings/ProfileForms';
 import { PageHeader } from '@/components/ui/PageHeader';
+import { asRoles } from '@/lib/auth/role-words';
 import { pageContext } from '@/lib/auth/page';
 import { profile } from '@/lib/services/person/profile';
 import { endEverySession, goOnElsewhere, renamePerson, setPassword } from './actions';
@@ -13,7 +14,7 @@ export default async function ProfilePage() {
   const others = organisations.filter(({ id }) => id !== ctx.organisation.id);
   return (
     <>
-      <PageHeader title="You" lead={`You sign in as ${email}, and are ${new Intl.ListFormat('en').format(ctx.roles)} at ${ctx.organisation.name}.`} />
+      <PageHeader title="You" lead={`You sign in as ${email}, and work ${asRoles(ctx.roles)} at ${ctx.organisation.name}.`} />
       <div className="grid gap-12">
         <section className="grid gap-4">
           <h2>Name</h2>

@@ -29,13 +29,14 @@ export default async function UnitPage({ params }: { params: Promise<{ id: strin
   const { unit, currentFit, fits, cases, readings, today, hidden } = record;
   const { units } = ctx.person;
   const mayEdit = may(ctx.roles, 'unit.edit');
-  const vehicle = [termLabel('vocation', unit.vocation), termLabel('vehicleKind', unit.vehicleKind)?.toLowerCase()].filter(Boolean).join(' ');
+  const work = termLabel('vocation', unit.vocation)?.toLowerCase();
+  const vehicle = `${termLabel('vehicleKind', unit.vehicleKind)}${work ? `, ${work},` : ''}`;
 
   return (
     <>
       <PageHeader
         title={`Unit ${unit.fleetNumber}`}
-        lead={`${vehicle.charAt(0).toUpperCase()}${vehicle.slice(1)} at ${unit.siteName}. ${currentFit ? `${currentFit.modelName} on it since ${dayText(currentFit.installedOn)}.` : 'No compressor recorded on it.'}`}
+        lead={`${vehicle} at ${unit.siteName}. ${currentFit ? `${currentFit.modelName} on it since ${dayText(currentFit.installedOn)}.` : 'No compressor recorded on it.'}`}
         breadcrumbs={[{ label: 'Units', href: '/units' }]}
         tags={unit.hiddenAt && <Tag>hidden</Tag>}
         actions={
