@@ -45,7 +45,9 @@ function Desk({ sum, search, known, writing, target }: DeskProps) {
   useEffect(() => {
     // A page kept on the device was served for another query, or none.
     const here = Object.fromEntries(new URLSearchParams(location.search));
-    if (!sameSearch(here, search)) setTexts(begin(here));
+    if (sameSearch(here, search)) return;
+    const frame = requestAnimationFrame(() => setTexts(begin(here)));
+    return () => cancelAnimationFrame(frame);
   }, [begin, search]);
 
   useEffect(() => {
