@@ -1,5 +1,6 @@
 import { OilPathDrawing } from '@/components/oil-path/OilPathDrawing';
 import { ButtonLink } from '@/components/ui/Button';
+import { classes } from '@/components/ui/classes';
 
 const steps = [
   'Be asked the next check that tells most for its minutes.',
@@ -24,8 +25,8 @@ export default function Home() {
       <figure className="keep">
         <OilPathDrawing className="h-auto w-full" />
         <figcaption className="mt-2 flex flex-wrap items-center gap-x-6 gap-y-1 text-[0.9375rem] text-ink-soft">
-          <Key className="border-ink" words="Air line" />
-          <Key className="border-oil-fill" words="Oil line" />
+          <Key words="Air line" />
+          <Key className="bg-oil-fill" words="Oil line" />
           <span>They meet at the cylinder.</span>
         </figcaption>
       </figure>
@@ -41,10 +42,11 @@ export default function Home() {
   );
 }
 
-function Key({ className, words }: { className: string; words: string }) {
+/** The lines as the drawing has them: air between two lines of ink, oil in its own colour between the same. */
+function Key({ className, words }: { className?: string; words: string }) {
   return (
     <span className="inline-flex items-center gap-2">
-      <span aria-hidden="true" className={`w-8 border-t-[6px] ${className}`} />
+      <span aria-hidden="true" className={classes('h-2.5 w-8 border-y-2 border-ink', className)} />
       {words}
     </span>
   );

@@ -24,7 +24,7 @@ export function OilPathDrawing({ className }: { className?: string }) {
   );
 }
 
-function Label({ lines, className = 'text-[22px] sm:text-[18px]', ...rest }: { lines: string[] } & SVGProps<SVGTextElement>) {
+function Label({ lines, className = 'text-[18px] max-sm:hidden', ...rest }: { lines: string[] } & SVGProps<SVGTextElement>) {
   return (
     <text className={`label ${className}`} fill="var(--ink)" stroke="var(--paper)" strokeWidth="5" paintOrder="stroke" {...rest}>
       {lines.map((line, index) => (
@@ -46,7 +46,7 @@ function AirIn() {
       <path d="M176 151C180 172 158 184 157 204" strokeWidth="1.8" />
       <g transform="translate(156 204) scale(0.96)">
         <Tag level={0}>
-          <Label x={0} y={32} textAnchor="middle" lines={['Vehicle', 'and history']} strokeWidth="0" className="text-[18.5px] tracking-normal" />
+          <Label x={0} y={32} textAnchor="middle" lines={['Vehicle', 'and history']} strokeWidth="0" className="text-[18.5px] tracking-normal max-sm:hidden" />
           <path d="M-52 72H52M-52 82H22" strokeWidth="1.5" />
         </Tag>
       </g>

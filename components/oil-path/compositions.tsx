@@ -80,8 +80,9 @@ function TallComposition() {
         <path d="M4 138H24M4 156H24M4 174H24" strokeWidth="2" />
 
         <OilLine d="M182 624V462Q182 448 192 448H200" />
-        <OilLine d="M288 466V624" />
-        <Arrow x={288} y={592} turn={90} color="var(--paper)" />
+        <OilLine d="M230 466V624" />
+        <Arrow x={182} y={488} turn={-90} color="var(--paper)" />
+        <Arrow x={230} y={580} turn={90} color="var(--paper)" />
         <path d="M112 616H344V676L316 664 284 682 252 664 220 682 188 664 156 682 112 668Z" fill="var(--paper)" strokeWidth="2.4" />
         <text className="label text-[25px]" x="228" y="656" textAnchor="middle" fill="var(--ink-soft)" stroke="none">Engine</text>
         <g transform="translate(164 518)"><FeedGlass level={at('oil-feed')} standing /></g>
@@ -95,10 +96,10 @@ function TallComposition() {
         <Tube d="M362 156H392" />
         <Tube d="M488 156H500Q524 156 524 180V216" />
         <Discharge level={at('discharge-line')} d={COIL_DOWN} box={[380, 112, 120, 88]} />
-        <Tube d="M476 330H416Q396 330 396 350V456" />
-        <Arrow x={396} y={400} turn={90} />
+        <Tube d="M476 330H438Q418 330 418 350V460" />
+        <Arrow x={418} y={404} turn={90} />
         <g transform="translate(524 212)"><Dryer level={at('dryer')} /></g>
-        <g transform="translate(388 444)"><Tanks level={at('tanks-and-system')} /></g>
+        <g transform="translate(394 452) scale(0.96)"><Tanks level={at('tanks-and-system')} /></g>
 
         <path d="M344 636C362 636 362 664 358 690" strokeWidth="1.8" />
         <g transform="translate(358 690) scale(0.74)">
