@@ -9,6 +9,7 @@ import { launchBrowser, PHONE } from '@/tests/e2e/support/browser';
 import { shiftsOn, watchShifts, type Shifts } from '@/tests/e2e/support/layout-shift';
 import { signInAs } from '@/tests/e2e/support/sign-in';
 import { startBenchServer, type BenchServer } from './server';
+import { sumPage } from './sum-page';
 
 const SLOWER = 4;
 const TAPS = 24;
@@ -132,6 +133,7 @@ export async function casePage() {
   return {
     scripts: () => scripts(browser, server),
     taps: () => taps(browser, server),
+    keys: () => sumPage(browser, server),
     turns: { pairs: TAPS, warmUp: 3 },
     slower: SLOWER,
     close: async () => {

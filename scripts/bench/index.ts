@@ -49,6 +49,12 @@ function report(name: string, ratio: Ratio, holds: boolean, limit: string) {
   report('layout shift', { median: sum, low: sum, high: sum }, sum <= 0.02, 'at most 0.02');
   for (const what of moved) console.log(`  ${what}`);
   await close();
+
+  const keys = await page.keys();
+  const typed = await compareMeasured({ a: keys.sum, b: keys.echo }, keys.turns);
+  console.log(`\nA key in the heaviest sum of the bench\n  worked out, drawn ${ms(typed.a)}\n  echoed            ${ms(typed.b)}`);
+  report('sum / echo, p50', typed.ratio, typed.ratio.low <= 4, 'at most 4');
+  await keys.close();
   await page.close();
 }
 
