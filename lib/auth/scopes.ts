@@ -8,7 +8,7 @@ import type { Role } from './roles';
 export const SCOPES = {
   'cases:read': { needs: 'case.see', does: 'See cases, their rankings, photos and the rulebook' },
   'cases:write': { needs: 'case.work', does: 'Open cases, answer checks, add photos, name causes' },
-  'bench:use': { needs: 'bench.use', does: 'Work out sums of the bench' },
+  'bench:read': { needs: 'bench.use', does: 'Work out sums of the bench' },
   'units:read': { needs: 'unit.see', does: 'See units with their readings and fits' },
   'units:write': { needs: 'unit.edit', does: 'Add and change units, readings and fits' },
   'models:read': { needs: 'model.see', does: 'See compressor models' },

@@ -47,8 +47,8 @@ export function fieldText(units: UnitPreferences, measure: MeasureField, row: Me
   if (typeof si !== 'number') return '';
   const unit = measureUnit(units, measure);
   const text = row.asTyped[column] ?? formatQuantity<Quantity>(si, { quantity, unit });
-  const [, figure = '', typedUnit = ''] = /^([\d\s.,:/+-]*?)\s*([^\d\s.,:/+-]\D*\d?)$/u.exec(text) ?? [];
-  // However it was spelt: "in3" beside the field's own "in³" would be the same unit twice.
+  const [, figure = '', typedUnit = ''] = /^([\d\s.,:/+-]*?)\s*([\p{L}°%]\D*\d?)$/u.exec(text) ?? [];
+  // However its letters were spelt: "in3" beside the field's own "in³" would be the same unit twice.
   const parsed = figure !== '' && typedUnit !== '' && parseQuantity<Quantity>(`1 ${typedUnit}`, { quantity, defaultUnit: unit });
   return parsed && parsed.ok && parsed.unit === unit ? figure : text;
 }

@@ -50,12 +50,15 @@ test('it is OpenAPI 3.1 whose schemas are JSON Schema 2020-12', () => {
   }
 });
 
+/** What goes in is too long for an address; nothing is written. */
+const ASKED_BY_POST = ['POST /bench/{sum}'];
+
 test('names what can be asked by a token, with scopes that exist', () => {
   for (const [name, { security }] of operations) {
     const scopes = security.flatMap(({ token }) => token ?? []);
     expect([name, scopes.length]).toEqual([name, 1]);
     expect(SCOPE_IDS).toContain(scopes[0]);
-    expect([name, scopes[0]?.endsWith(':read')]).toEqual([name, name.startsWith('GET')]);
+    expect([name, scopes[0]?.endsWith(':read')]).toEqual([name, name.startsWith('GET') || ASKED_BY_POST.includes(name)]);
   }
 });
 

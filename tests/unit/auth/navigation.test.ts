@@ -7,10 +7,10 @@ const labels = (places: { label: string }[]) => places.map(({ label }) => label)
 
 describe('the navigation', () => {
   test.each([
-    [['technician'], ['Cases', 'Units', 'Compressor models', 'Settings']],
-    [['trainer'], ['Units', 'Compressor models', 'Settings']],
-    [['administrator'], ['Units', 'Compressor models', 'Settings']],
-    [['administrator', 'manager'], ['Cases', 'Units', 'Compressor models', 'Settings']],
+    [['technician'], ['Cases', 'Units', 'Bench', 'Compressor models', 'Settings']],
+    [['trainer'], ['Units', 'Bench', 'Compressor models', 'Settings']],
+    [['administrator'], ['Units', 'Bench', 'Compressor models', 'Settings']],
+    [['administrator', 'manager'], ['Cases', 'Units', 'Bench', 'Compressor models', 'Settings']],
     [[], []],
   ] as const)('of %j is %j', (roles, expected) => {
     expect(labels(navigationFor(roles))).toEqual(expected);
