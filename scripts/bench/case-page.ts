@@ -113,6 +113,8 @@ async function taps(browser: Browser, { url, signIn, caseIds }: BenchServer) {
       }
       const heading = await page.locator('#check-at-hand').textContent();
       const ms = await tapTime(page, () => cannotTell.click());
+      // The next question, however long the server takes; then whatever comes after it.
+      await page.waitForFunction((was) => document.getElementById('check-at-hand')?.textContent !== was, heading, { timeout: 3_000 }).catch(() => undefined);
       await page.waitForTimeout(700);
       // A panel stays at hand until one goes on from it.
       if ((await page.locator('#check-at-hand').textContent()) === heading) await answerAtHand(page);
