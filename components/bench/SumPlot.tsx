@@ -6,10 +6,8 @@ import { DataTable } from '@/components/ui/DataTable';
 import { Disclosure } from '@/components/ui/Disclosure';
 import { completeInputs, plotPoints, type Given } from '@/lib/air-and-oil/sums';
 import type { Sum, SumQuantity } from '@/lib/air-and-oil/sums/sum';
-import { fromSi, type Quantity, type UnitOf } from '@/lib/units';
 import type { Writing } from '@/lib/bench/read-texts';
-import { shown, shownValue, symbolOf } from '@/lib/bench/show';
-import { unitFor } from '@/lib/units';
+import { shown, shownNumber, shownValue, symbolOf } from '@/lib/bench/show';
 
 // The chart library comes with the first plot that is shown, and not before. Where it can't be fetched, words and table do.
 const LinePlot = lazy<ComponentType<LinePlotProps>>(() => import('@/components/plots/LinePlot').catch(() => ({ default: () => null })));
@@ -73,8 +71,7 @@ function dataOf(sum: Sum, given: Given | null, writing: Writing) {
   try {
     const inputs = completeInputs(sum, given);
     const points = plotPoints(sum, given);
-    const number = (si: number, { quantity, like }: Pick<SumQuantity, 'quantity' | 'like'>) =>
-      fromSi(si, quantity, unitFor<Quantity>(writing.units, quantity, like as UnitOf<Quantity>));
+    const number = (si: number, of: SumQuantity) => shownNumber(si, of, writing);
     const marks = plot.marks.map(({ label, at }) => ({ label, y: number(at(inputs), main), text: `${label}: ${shown(at(inputs), main, writing)}` }));
     return {
       x,
@@ -82,7 +79,6 @@ function dataOf(sum: Sum, given: Given | null, writing: Writing) {
       points,
       summary: [summaryOf(points, main.id, { x, y: main, writing }), ...marks.map(({ text }) => `${text}.`)].join(' '),
       drawn: {
-        title: plot.title,
         xLabel: axis(x, writing),
         yLabel: axis(main, writing),
         series: series.map((output) => ({

@@ -7,7 +7,6 @@ import { Stopwatch } from './Stopwatch';
 const TIMED: Readonly<Record<string, { input: string; start: string; stop: string; marks: readonly string[] }>> = {
   'measured-build-up': { input: 'time', start: 'Start at 85 psi', stop: 'Stop at 100 psi', marks: ['90 psi', '95 psi'] },
   'leak-down': { input: 'time', start: 'Start', stop: 'Stop, and read the gauge', marks: [] },
-  delivery: { input: 'time', start: 'Start at the lower pressure', stop: 'Stop at the higher', marks: [] },
   'time-loaded': { input: 'loaded', start: 'Start at cut-in', stop: 'Stop at cut-out', marks: [] },
 };
 
@@ -21,6 +20,6 @@ interface Props {
 /** The stopwatch of a sum that takes a time; nothing for any other. */
 export function SumTimer({ sum, name, onSeconds }: Props) {
   const timed = TIMED[sum.id];
-  if (!timed || !sum.inputs.some(({ id }) => id === timed.input)) return null;
+  if (!timed) return null;
   return <Stopwatch name={name} startLabel={timed.start} stopLabel={timed.stop} marks={timed.marks} onTime={(seconds) => onSeconds(timed.input, seconds)} />;
 }

@@ -1,5 +1,5 @@
 import type { Sum, SumInput } from '@/lib/air-and-oil/sums/sum';
-import { parseQuantity, unitFor, type DecimalMark, type Quantity, type UnitId, type UnitOf, type UnitPreferences } from '@/lib/units';
+import { differenceOf, parseQuantity, unitFor, type DecimalMark, type Quantity, type UnitId, type UnitOf, type UnitPreferences } from '@/lib/units';
 
 /** How the person writes measures. */
 export interface Writing {
@@ -36,7 +36,7 @@ export interface ReadTexts {
 /** The unit in which an input is written without one, and that of its error, which is a difference. */
 export function unitsOfInput({ quantity, like }: Pick<SumInput, 'quantity' | 'like'>, units: UnitPreferences): { unit: UnitId; difference: Quantity } {
   const unit = unitFor<Quantity>(units, quantity, like as UnitOf<Quantity>);
-  return { unit, difference: quantity === 'temperature' ? 'temperatureDifference' : quantity };
+  return { unit, difference: differenceOf(quantity) };
 }
 
 /**

@@ -1,6 +1,6 @@
 import { sumOf } from '@/lib/air-and-oil/sums';
 import type { Sum } from '@/lib/air-and-oil/sums/sum';
-import { formatQuantity, formatValue, parseQuantity, type Quantity, type UnitId, type UnitOf } from '@/lib/units';
+import { differenceOf, formatQuantity, formatValue, parseQuantity, type Quantity, type UnitId, type UnitOf } from '@/lib/units';
 import { unitsOfInput, type InputText, type SumTexts, type UsedInput, type Writing } from './read-texts';
 
 type Search = Readonly<Record<string, string | undefined>>;
@@ -72,11 +72,10 @@ export function searchOfInputs({ id, inputs }: { id: string; inputs: readonly Us
       const input = sum.inputs.find((one) => one.id === inputId);
       if (!input) return [];
       const { quantity } = input;
-      const difference = quantity === 'temperature' ? 'temperatureDifference' : quantity;
       const text = (value: number, of: Quantity) => formatQuantity<Quantity>(value, { quantity: of, unit: unit as UnitOf<Quantity>, significant: FIGURES });
       return [
         ...(typed === null ? [] : [[inputId, text(si, quantity)] as const]),
-        ...(errorTyped === null ? [] : [[`${inputId}.error`, text(halfWidthSi, difference)] as const]),
+        ...(errorTyped === null ? [] : [[`${inputId}.error`, text(halfWidthSi, differenceOf(quantity))] as const]),
       ];
     }),
   );

@@ -26,6 +26,7 @@ export { METRIC_UNITS, US_UNITS, unitFor, withUnits, type UnitPreferences } from
 export {
   QUANTITIES,
   QUANTITY_IDS,
+  differenceOf,
   isQuantity,
   isUnitOf,
   unitDefinition,

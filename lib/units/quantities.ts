@@ -101,3 +101,11 @@ export function unitDefinition<Q extends Quantity>(quantity: Q, id: UnitOf<Q>): 
   if (!definition) throw new RangeError(`${quantity} has no unit '${id}'; it has ${Object.keys(units).join(', ')}`);
   return definition;
 }
+
+/**
+ * The quantity that a difference, or an error, of a quantity is: 2 °F of error is 1.1 K, not −16.7 °C.
+ *
+ * @example differenceOf('temperature') // 'temperatureDifference'
+ * @example differenceOf('pressure')    // 'pressure'
+ */
+export const differenceOf = (quantity: Quantity): Quantity => (quantity === 'temperature' ? 'temperatureDifference' : quantity);

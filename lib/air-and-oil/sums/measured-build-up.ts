@@ -41,15 +41,15 @@ export const measuredBuildUp = defineSum({
   source: '49 CFR 571.121 S5.1.1 for the limit (United States, new trucks and buses); proportion of rise and volume by the ideal gas at one temperature.',
   compute: (given) => {
     requireWithin('toPressure', 'pressure', given.toPressure, { least: given.fromPressure + LEAST_RISE });
-    const corrected = given.time * (given.requiredVolume / given.actualVolume) * (RISE_OF_LIMIT / (given.toPressure - given.fromPressure));
+    const overRise = given.time * (RISE_OF_LIMIT / (given.toPressure - given.fromPressure));
     const allowed = limit({ actualVolumeM3: given.actualVolume, requiredVolumeM3: given.requiredVolume });
-    const ofRequired = limit({ actualVolumeM3: given.requiredVolume, requiredVolumeM3: given.requiredVolume });
     const air = freeAirOfRise({
       volumeM3: given.actualVolume,
       fromPressurePa: gaugePressure(given.fromPressure),
       toPressurePa: gaugePressure(given.toPressure),
       atmospherePa: standardAtmosphere(given.altitude),
     });
-    return { values: { corrected, limit: allowed, ofLimit: corrected / ofRequired, delivery: air / given.time, rise: RISE_OF_LIMIT } };
+    const corrected = overRise * (given.requiredVolume / given.actualVolume);
+    return { values: { corrected, limit: allowed, ofLimit: overRise / allowed, delivery: air / given.time, rise: RISE_OF_LIMIT } };
   },
 });

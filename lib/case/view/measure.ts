@@ -1,5 +1,5 @@
 import type { Check } from '@/lib/diagnose/types';
-import { isUnitOf, unitFor, type Quantity, type UnitId, type UnitPreferences } from '@/lib/units';
+import { differenceOf, isUnitOf, unitFor, type Quantity, type UnitId, type UnitPreferences } from '@/lib/units';
 
 export interface Measure {
   quantity: Quantity;
@@ -14,6 +14,5 @@ export interface Measure {
 export function measureOf({ quantity, unit }: Pick<Check, 'quantity' | 'unit'>, units: UnitPreferences): Measure | null {
   if (!quantity || !unit || !isUnitOf(quantity, unit)) return null;
   const shown = unitFor(units, quantity, unit);
-  if (quantity !== 'temperature') return { quantity, unit: shown, difference: quantity, differenceUnit: shown };
-  return { quantity, unit: shown, difference: 'temperatureDifference', differenceUnit: shown };
+  return { quantity, unit: shown, difference: differenceOf(quantity), differenceUnit: shown };
 }
