@@ -7,7 +7,7 @@ import { Button } from '@/components/ui/Button';
 import { Notice } from '@/components/ui/Notice';
 import { keepAndSend } from '@/components/case/data/send-answer';
 import type { Sum } from '@/lib/air-and-oil/sums/sum';
-import type { Writing } from '@/lib/bench/read-texts';
+import type { SumTexts, Writing } from '@/lib/bench/read-texts';
 import { shown } from '@/lib/bench/show';
 import type { WorkedOut } from '@/lib/bench/work-out';
 import { newId } from '@/lib/ids';
@@ -34,8 +34,8 @@ interface Props {
   worked: WorkedOut;
   target: CaseTarget;
   writing: Writing;
-  /** What was typed, with units, by field. */
-  texts: Readonly<Record<string, string>>;
+  /** What was typed: the server works it out anew. */
+  texts: SumTexts;
 }
 
 /** Writes the result into the case, with all that went in; what stood there stays in the case's history. */
@@ -52,7 +52,7 @@ export function IntoCase({ sum, worked, target, writing, texts }: Props) {
     setPending(true);
     setProblem(null);
     const id = newId();
-    const inputs = Object.fromEntries(sum.inputs.map((input) => [input.id, { value: texts[input.id], error: texts[`${input.id}.error`] }]));
+    const inputs = Object.fromEntries(sum.inputs.map((input) => [input.id, texts[input.id] ?? {}]));
     try {
       await keepAndSend(
         client,

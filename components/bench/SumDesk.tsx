@@ -92,7 +92,7 @@ function Desk({ sum, search, known, writing, target }: DeskProps) {
       </div>
       <div className="grid min-w-0 content-start gap-8 lg:sticky lg:top-4 lg:self-start">
         <SumResult {...{ sum, worked, writing }} />
-        {target && <IntoCase {...{ sum, worked, target, writing }} texts={searchOfTexts(sum, texts, writing)} />}
+        {target && <IntoCase {...{ sum, worked, target, writing, texts }} />}
       </div>
       <div className="grid min-w-0 gap-10 lg:col-span-2 lg:grid-cols-2">
         {sum.plot && <SumPlot {...{ sum, writing }} given={later.kind === 'refused' ? null : siOf(later.inputs)} />}
