@@ -5,6 +5,8 @@
 const STATIC = 'carryover-static';
 const PAGES = 'carryover-pages';
 const THUMBNAILS = 'carryover-thumbnails';
+/** As lib/offline/kept-caches.ts has it: pages and thumbnails are put only where somebody is signed in. */
+const LOCK = 'carryover-kept-caches';
 /** Built files of former builds are of no use; the newest are at the end. */
 const MOST_STATIC = 500;
 
@@ -15,8 +17,8 @@ self.addEventListener('fetch', (event) => {
   const { request } = event;
   const url = new URL(request.url);
   if (request.method !== 'GET' || url.origin !== self.location.origin) return;
-  if (url.pathname.startsWith('/_next/static/')) event.respondWith(fromCacheFirst(STATIC, request, trim));
-  else if (/^\/api\/v1\/photos\/[^/]+\/thumbnail$/.test(url.pathname)) event.respondWith(fromCacheFirst(THUMBNAILS, request));
+  if (url.pathname.startsWith('/_next/static/')) event.respondWith(builtFile(request));
+  else if (/^\/api\/v1\/photos\/[^/]+\/thumbnail$/.test(url.pathname)) event.respondWith(thumbnail(request));
   else if (request.mode === 'navigate' && isKept(url)) event.respondWith(fromNetworkFirst(request));
 });
 
@@ -24,16 +26,30 @@ self.addEventListener('fetch', (event) => {
 const isKept = ({ pathname, search }) => pathname === '/cases' || (/^\/cases\/[0-9a-f-]{36}$/.test(pathname) && search === '') || isBench(pathname);
 const isBench = (pathname) => /^\/bench(\/[a-z-]+)?$/.test(pathname);
 
-async function fromCacheFirst(name, request, afterwards) {
-  const cache = await caches.open(name);
+async function builtFile(request) {
+  const cache = await caches.open(STATIC);
   const held = await cache.match(request);
   if (held) return held;
   const response = await fetch(request);
   if (response.ok) {
     await cache.put(request, response.clone());
-    afterwards?.(cache);
+    void trim(cache);
   }
   return response;
+}
+
+async function thumbnail(request) {
+  const held = await caches.match(request, { cacheName: THUMBNAILS });
+  if (held) return held;
+  const response = await fetch(request);
+  if (response.ok) await put(THUMBNAILS, request, response.clone());
+  return response;
+}
+
+function put(name, request, response) {
+  return navigator.locks.request(LOCK, { mode: 'shared' }, async () => {
+    if (await caches.has(name)) await (await caches.open(name)).put(request, response);
+  });
 }
 
 async function trim(cache) {
@@ -42,14 +58,14 @@ async function trim(cache) {
 }
 
 async function fromNetworkFirst(request) {
-  const cache = await caches.open(PAGES);
   const { origin, pathname } = new URL(request.url);
+  const kept = (url) => caches.match(url, { cacheName: PAGES });
   // A sum reads its own address, so that its page does for any readings.
-  const held = async () => (await cache.match(request.url)) ?? (isBench(pathname) ? await cache.match(origin + pathname) : undefined);
+  const held = async () => (await kept(request.url)) ?? (isBench(pathname) ? await kept(origin + pathname) : undefined);
   try {
     const response = await fetch(request);
     // A redirect (to the sign-in) is the browser's to follow, and no page of this address.
-    if (response.ok && response.type === 'basic' && !response.redirected) await cache.put(request.url, response.clone());
+    if (response.ok && response.type === 'basic' && !response.redirected) await put(PAGES, request.url, response.clone());
     if (response.status < 502) return response;
     return (await held()) ?? response;
   } catch {

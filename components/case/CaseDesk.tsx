@@ -143,8 +143,7 @@ function AtHandView({ handle, rulebook, picked, decimalMark, onPick }: AtHandPro
       check={check}
       rulebook={rulebook}
       handle={handle}
-      suggestion={picked ? null : (state.next.suggestions.find(({ checkIds }) => checkIds.includes(check.id)) ?? null)}
-      then={asked.then ? (rulebook.checks[asked.then] ?? null) : null}
+      suggestion={asked.suggestion}
       stationName={stationName(check.station)}
       decimalMark={decimalMark}
       onAnswered={() => onPick(null)}

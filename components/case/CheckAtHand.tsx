@@ -21,17 +21,17 @@ interface Props {
   handle: CaseHandle;
   /** The suggestion that put it here; null when somebody picked it. */
   suggestion: SuggestionView | null;
-  then: CheckView | null;
   stationName: string;
   decimalMark: '.' | ',';
   onAnswered: () => void;
 }
 
 /** One check, large: its cautions, how to do it, and its answers; "can't tell" and "skip" are always there. */
-export function CheckAtHand({ check, rulebook, handle, suggestion, then, stationName, decimalMark, onAnswered }: Props) {
+export function CheckAtHand({ check, rulebook, handle, suggestion, stationName, decimalMark, onAnswered }: Props) {
   const { state, answer, acknowledge } = handle;
   const problem = answer.error instanceof ApiProblem && answer.variables?.checkId === check.id ? answer.error : null;
   const toRead = unread(check, rulebook, state);
+  const then = rulebook.checks[suggestion?.checkIds[1] ?? ''];
   const give = (given: AnswerInput) =>
     answer.mutate(
       { checkId: check.id, answer: given, askedBecause: suggestion ? 'suggested' : 'choice' },

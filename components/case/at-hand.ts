@@ -1,7 +1,7 @@
-import type { CaseState, RulebookView } from '@/lib/schemas/case-view';
+import type { CaseState, RulebookView, SuggestionView } from '@/lib/schemas/case-view';
 
-/** What is asked on the screen: one check, or a panel of yes/no checks. */
-export type AtHand = { kind: 'check'; checkId: string; then: string | null } | { kind: 'panel'; panelId: string };
+/** What is asked on the screen: one check, with the suggestion that put it there, or a panel of yes/no checks. */
+export type AtHand = { kind: 'check'; checkId: string; suggestion: SuggestionView | null } | { kind: 'panel'; panelId: string };
 
 /** What a person picked instead of the suggestion; null follows the suggestion. */
 export type Picked = { kind: 'check'; checkId: string } | { kind: 'panel'; panelId: string } | null;
@@ -12,17 +12,15 @@ export type Picked = { kind: 'check'; checkId: string } | { kind: 'panel'; panel
  */
 export function atHand(state: CaseState, rulebook: RulebookView, picked: Picked, passed: ReadonlySet<string>): AtHand | null {
   if (picked?.kind === 'panel') return picked;
-  if (picked) return { ...picked, then: null };
+  if (picked) return { ...picked, suggestion: null };
   const { suggestions, stop } = state.next;
   const best = suggestions.find(({ panelId }) => panelId === null || !passed.has(panelId)) ?? suggestions[0];
   return best && !stop ? ofSuggestion(best, rulebook) : null;
 }
 
-export function ofSuggestion(
-  { checkIds, panelId }: { checkIds: string[]; panelId: string | null },
-  rulebook: RulebookView,
-): AtHand | null {
+export function ofSuggestion(suggestion: SuggestionView, rulebook: RulebookView): AtHand | null {
+  const { checkIds, panelId } = suggestion;
   if (panelId && rulebook.panels.some((panel) => panel.id === panelId)) return { kind: 'panel', panelId };
-  const [checkId, then = null] = checkIds;
-  return checkId ? { kind: 'check', checkId, then } : null;
+  const [checkId] = checkIds;
+  return checkId ? { kind: 'check', checkId, suggestion } : null;
 }

@@ -16,6 +16,7 @@ import { withWaiting } from './data/overlay';
 import { keepAndSend, PATIENCE_MS, refuseUnreadable } from './data/send-answer';
 import { useCaseEvents } from './data/use-case-events';
 import { useProvisional, useWaiting, type Provisional } from './data/use-provisional';
+import { useReadHere, withRead } from './data/use-read-here';
 import { useCaseReasons, useCaseState } from './data/use-server-state';
 import { differenceOf, type Difference } from './data/difference';
 
@@ -75,8 +76,11 @@ export function useCase(view: CaseView) {
     },
   });
 
+  const readHere = useReadHere(server.acknowledged);
   const acknowledge = useMutation({
     networkMode: 'always',
+    onMutate: ({ checkId, cautionIds }) => readHere.note(cautionIds, rulebook.checks[checkId]),
+    onError: (_, { cautionIds }) => readHere.forget(cautionIds),
     mutationFn: ({ checkId, cautionIds }: { checkId: string; cautionIds: string[] }) =>
       post(
         { ...common, kind: 'acknowledgement', id: newId(), body: { checkId, cautions: cautionIds.map((cautionId) => ({ id: newId(), cautionId })), ...stamp() } },
@@ -92,7 +96,7 @@ export function useCase(view: CaseView) {
     },
   });
 
-  const state = withWaiting(provisional?.state ?? server, waiting, rulebook);
+  const state = withRead(withWaiting(provisional?.state ?? server, waiting, rulebook), readHere.read);
   const reasons: CaseReasons = provisional?.reasons ?? serverReasons;
   const sync: Sync = {
     ...connection,

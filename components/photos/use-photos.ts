@@ -3,6 +3,7 @@
 import { useQuery, useQueryClient } from '@tanstack/react-query';
 import { useCallback, useEffect, useMemo } from 'react';
 import { listen } from '@/lib/offline/bus';
+import type { DevicePhoto } from '@/lib/offline/database';
 import { dropPhoto, photosHere } from '@/lib/offline/photos';
 import { fetchPhotos } from '@/lib/offline/photos-list';
 import { queryKeys } from '@/lib/query/keys';
@@ -32,7 +33,13 @@ export function usePhotos({ caseId, personId, initial, live }: Of): { photos: Sh
   }).data;
   const { data: here = [] } = useQuery({
     queryKey: queryKeys.casePhotosHere(caseId),
-    queryFn: () => photosHere({ caseId, personId }).catch(() => []),
+    queryFn: async () => {
+      const now = await photosHere({ caseId, personId }).catch(() => []);
+      const before = client.getQueryData<DevicePhoto[]>(queryKeys.casePhotosHere(caseId)) ?? [];
+      // Another tab drops what its own list has: here it stays in sight until this list has it, too.
+      if (before.some(({ id }) => !now.some((photo) => photo.id === id))) await client.refetchQueries({ queryKey: queryKeys.casePhotos(caseId), exact: true });
+      return now;
+    },
     networkMode: 'always',
     enabled: live,
   });

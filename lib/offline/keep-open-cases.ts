@@ -1,7 +1,7 @@
 import { GROUPS } from '@/lib/bench/groups';
 import { api } from '@/lib/query/problem';
 import { offlineDatabase } from './database';
-import { dropKept, dropOtherPages, hasPage, keepBuiltFiles, keepPages, keepThumbnails } from './keep-pages';
+import { dropOtherPages, hasPage, keepBuiltFiles, keepPages, keepThumbnails } from './keep-pages';
 import { isOwned, keepForOwner } from './owner';
 import { askRanker } from './ranker';
 import { refreshKit } from './refresh-kit';
@@ -18,11 +18,6 @@ interface Listed {
 
 /** Keeps on this device what it takes to go on with the open cases of whoever is signed in; nothing, if they sign out meanwhile. */
 export async function keepOpenCases(): Promise<void> {
-  await fill();
-  if (!(await isOwned())) await dropKept();
-}
-
-async function fill(): Promise<void> {
   const { cases } = await api<Listed>('/api/v1/device/cases');
   const db = await offlineDatabase();
   const paths = cases.map(({ id }) => `/cases/${id}`);

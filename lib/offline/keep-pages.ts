@@ -1,24 +1,23 @@
-/** Names of the caches that the service worker (public/sw.js) serves from. */
-const CACHES = { static: 'carryover-static', pages: 'carryover-pages', thumbnails: 'carryover-thumbnails' } as const;
+import { changeKept, matchKept, putKept } from './kept-caches';
+
+/** Built files say nothing of cases, and stay. The service worker (public/sw.js) serves from here too. */
+const STATIC_CACHE = 'carryover-static';
 
 /** Whether a page is on the device. */
-export async function hasPage(path: string): Promise<boolean> {
-  return (await (await caches.open(CACHES.pages)).match(path)) !== undefined;
-}
+export const hasPage = async (path: string): Promise<boolean> => (await matchKept('pages', path)) !== undefined;
 
 /** Built files as a page names them: with their whole address in tags, without its beginning in its data. */
 const BUILT_FILE = /(?:\/_next\/)?static\/(?:chunks|css|media)\/[\w.~/-]+\.(?:js|css|woff2)/g;
 
 /** Puts pages on the device, with the scripts and styles that they name, so that they open without a connection. */
 export async function keepPages(paths: readonly string[]): Promise<void> {
-  const cache = await caches.open(CACHES.pages);
   const files = new Set<string>();
   for (const path of paths) {
     const response = await fetch(path, { headers: { accept: 'text/html' } });
     if (!response.ok || response.redirected) continue;
     const text = await response.clone().text();
     for (const [file] of text.matchAll(BUILT_FILE)) files.add(file.startsWith('/') ? file : `/_next/${file}`);
-    await cache.put(new URL(path, location.origin).href, response);
+    await putKept('pages', path, response);
   }
   await keepFiles([...files]);
 }
@@ -30,24 +29,22 @@ export function keepBuiltFiles(more: readonly string[] = []): Promise<void> {
 }
 
 async function keepFiles(urls: readonly string[]): Promise<void> {
-  const cache = await caches.open(CACHES.static);
+  const cache = await caches.open(STATIC_CACHE);
   for (const url of urls) if (!(await cache.match(url))) await cache.add(url).catch(() => undefined);
 }
 
 export async function keepThumbnails(paths: readonly string[]): Promise<void> {
-  const cache = await caches.open(CACHES.thumbnails);
-  for (const path of paths) if (!(await cache.match(path))) await cache.add(path).catch(() => undefined);
+  for (const path of paths) {
+    if (await matchKept('thumbnails', path)) continue;
+    const response = await fetch(path).catch(() => undefined);
+    if (response?.ok) await putKept('thumbnails', path, response);
+  }
 }
 
 /** Keeps only the pages of these paths: a closed case needs no place. */
-export async function dropOtherPages(paths: readonly string[]): Promise<void> {
-  const cache = await caches.open(CACHES.pages);
+export function dropOtherPages(paths: readonly string[]): Promise<void> {
   const wanted = new Set(paths.map((path) => new URL(path, location.origin).href));
-  for (const { url } of await cache.keys()) if (!wanted.has(url)) await cache.delete(url);
-}
-
-/** Pages and pictures hold what cases say; built files don't. */
-export async function dropKept(): Promise<void> {
-  if (typeof caches === 'undefined') return;
-  await Promise.all([caches.delete(CACHES.pages), caches.delete(CACHES.thumbnails)]);
+  return changeKept('pages', async (cache) => {
+    for (const { url } of await cache.keys()) if (!wanted.has(url)) await cache.delete(url);
+  });
 }

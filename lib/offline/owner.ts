@@ -1,6 +1,6 @@
 import type { StoreKey, StoreNames, StoreValue } from 'idb';
 import { offlineDatabase, type OfflineSchema } from './database';
-import { dropKept } from './keep-pages';
+import { dropKept, makeKept } from './kept-caches';
 
 type Store = StoreNames<OfflineSchema>;
 
@@ -15,13 +15,13 @@ export async function takeDevice(person: { personId: string; organisationId: str
   const db = await offlineDatabase();
   const mark = `${person.organisationId}/${person.personId}`;
   const held = await db.get('device', OWNER);
-  if (held === mark) return;
-  if (held !== undefined) {
+  if (held !== undefined && held !== mark) {
     await db.clear('kit');
     await db.clear('edition');
     await dropKept();
   }
-  await db.put('device', mark, OWNER);
+  if (held !== mark) await db.put('device', mark, OWNER);
+  await makeKept();
 }
 
 /** Whether somebody is signed in on this device, as far as it knows. */

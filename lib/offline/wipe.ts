@@ -1,5 +1,5 @@
 import { offlineDatabase } from './database';
-import { dropKept } from './keep-pages';
+import { dropKept } from './kept-caches';
 import { dropStopwatches } from './stopwatches';
 
 /** How much would be lost with this device's keep: answers and photos that the server hasn't got. */

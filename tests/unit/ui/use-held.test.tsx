@@ -6,7 +6,7 @@ import { nameOf, useHeld } from '@/components/case/use-held';
 
 afterEach(cleanup);
 
-const check = (checkId: string): AtHand => ({ kind: 'check', checkId, then: null });
+const check = (checkId: string): AtHand => ({ kind: 'check', checkId, suggestion: null });
 
 function held() {
   const hook = renderHook(
