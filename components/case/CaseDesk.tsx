@@ -1,6 +1,6 @@
 'use client';
 
-import { useEffect, useRef, useState, type ReactNode } from 'react';
+import { useLayoutEffect, useRef, useState, type ReactNode } from 'react';
 import { OilPath } from '@/components/oil-path/OilPath';
 import { PhotoStrip } from '@/components/photos/PhotoStrip';
 import { Button } from '@/components/ui/Button';
@@ -11,7 +11,7 @@ import { STATIONS, type StationId } from '@/lib/diagnose/stations';
 import type { CaseState, CaseView, RulebookView } from '@/lib/schemas/case-view';
 import { Answered } from './Answered';
 import { AnsweredStrip } from './AnsweredStrip';
-import { atHand, ofSuggestion, type Picked } from './at-hand';
+import { atHand, ofSuggestion, type AtHand, type Picked } from './at-hand';
 import { Causes } from './Causes';
 import { CheckAtHand } from './CheckAtHand';
 import { keepHand, type Hand } from './hand';
@@ -23,6 +23,7 @@ import { StationChecks } from './StationChecks';
 import { SyncStrip } from './SyncStrip';
 import { useCase, type CaseHandle } from './use-case';
 import { nameOf, useHeld } from './use-held';
+import { useSteadyHeight } from './use-steady-height';
 import { WhatNext } from './WhatNext';
 import { changeText } from './words';
 
@@ -71,7 +72,7 @@ export function CaseDesk({ view, drawing, hand: kept, decimalMark }: Props) {
         ) : readOnly ? (
           <p className="text-ink-soft">Nothing is asked here. Pick a station to see its checks.</p>
         ) : (
-          <div className="at-hand"><AtHandView {...{ handle, rulebook, picked, decimalMark, onPick: setPicked }} /></div>
+          <AtHandView {...{ handle, rulebook, picked, decimalMark, onPick: setPicked }} />
         )}
         {!readOnly && <HandSwitch hand={hand} onChange={(next) => { setHand(next); keepHand(next); }} />}
       </div>
@@ -105,7 +106,8 @@ interface AtHandProps {
   onPick: (picked: Picked) => void;
 }
 
-function AtHandView({ handle, rulebook, picked, decimalMark, onPick }: AtHandProps) {
+function AtHandView(props: AtHandProps) {
+  const { handle, rulebook, picked } = props;
   const { state } = handle;
   const [passed, setPassed] = useState<ReadonlySet<string>>(new Set());
   const { isPending: pending, submittedAt } = handle.answer;
@@ -114,19 +116,30 @@ function AtHandView({ handle, rulebook, picked, decimalMark, onPick }: AtHandPro
     pending,
     isOpen: (held) => held.kind === 'panel' || !state.findings.some(({ checkId, current }) => current && checkId === held.checkId),
   });
-  const shown = useRef(nameOf(asked));
-  useEffect(() => {
+  const name = nameOf(asked);
+  const shown = useRef(name);
+  const block = useRef<HTMLDivElement>(null);
+  useLayoutEffect(() => {
     // The page itself has the focus at first; after an answer it goes to the next question.
-    if (shown.current !== nameOf(asked)) goTo('check-at-hand');
-    shown.current = nameOf(asked);
-  });
-  if (!asked) return <Enough {...{ state, rulebook, onPick }} />;
+    if (shown.current !== name) goTo('check-at-hand');
+    shown.current = name;
+  }, [name]);
+  useSteadyHeight(block, `${name}/${submittedAt}/${handle.acknowledge.submittedAt}`);
+  return (
+    <div ref={block} className="at-hand">
+      <Question {...props} asked={asked} onPass={(panelId) => setPassed(new Set([...passed, panelId]))} />
+    </div>
+  );
+}
+
+function Question({ handle, rulebook, picked, decimalMark, onPick, asked, onPass }: AtHandProps & { asked: AtHand | null; onPass: (panelId: string) => void }) {
+  if (!asked) return <Enough {...{ state: handle.state, rulebook, onPick }} />;
   if (asked.kind === 'panel') {
     const panel = rulebook.panels.find(({ id }) => id === asked.panelId);
     // Kept at hand while its items are answered, though the suggestion moves on.
     const keep = () => picked?.kind === 'panel' || onPick({ kind: 'panel', panelId: asked.panelId });
     const pass = () => {
-      setPassed(new Set([...passed, asked.panelId]));
+      onPass(asked.panelId);
       onPick(null);
     };
     return panel ? (

@@ -1,6 +1,6 @@
 import type { Page } from 'playwright-core';
 
-/** Shifts of one page that no tap or key of the last half second explains. */
+/** Shifts of one page that no tap or key of the last half second explains, other than the rows of the ranking: they glide to their new places, which is what they tell. */
 export interface Shifts {
   sum: number;
   /** What moved each time, to find out why. */
@@ -17,7 +17,7 @@ export async function watchShifts(page: Page): Promise<void> {
       `${node instanceof Element ? node.outerHTML.slice(0, 80) : (node?.textContent?.slice(0, 40) ?? 'gone')}: ${previousRect.y.toFixed(0)} to ${currentRect.y.toFixed(0)}`;
     new PerformanceObserver((list) => {
       for (const { value, hadRecentInput, sources } of list.getEntries() as Shift[]) {
-        if (hadRecentInput) continue;
+        if (hadRecentInput || (sources.length > 0 && sources.every(({ node }) => node instanceof Element && node.closest('[data-cause]')))) continue;
         shifts.sum += value;
         shifts.moved.push(`${value.toFixed(4)} of ${sources.map(told).join(' | ')}`);
       }
