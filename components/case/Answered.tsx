@@ -85,6 +85,9 @@ function Finding({ finding, handle, rulebook, timeZone, readOnly, onPick }: Prop
           {check?.name ?? finding.checkId}: <strong className={finding.kind === 'measured' ? 'figure' : undefined}>{finding.answer}</strong>
           {finding.thinkSo && ' (think so)'} {finding.waits && <Tag>waits on this device</Tag>}
         </p>
+        {finding.judgement && (
+          <p className={finding.judgement.verdict === 'out' ? 'text-[0.9375rem] font-bold' : 'text-[0.9375rem]'}>{finding.judgement.text}.</p>
+        )}
         <p className="text-[0.9375rem] text-ink-soft">
           {SOURCES[finding.source] ? `${SOURCES[finding.source]}, ` : ''}{finding.person}, {timeText(finding.at, timeZone)}
         </p>

@@ -61,7 +61,7 @@ export function CaseDesk({ view, drawing, hand: kept, decimalMark }: Props) {
   return (
     <div data-hand={hand} className="grid gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,1fr)_minmax(0,27rem)]">
       <div className="grid min-w-0 gap-4 lg:col-span-2">
-        <ReleaseHold checks={state.releaseHolds.map((id) => rulebook.checks[id]?.name ?? id)} others={view.otherHolds} />
+        <ReleaseHold unitId={view.head.unit.id} checks={state.releaseHolds.map((id) => rulebook.checks[id]?.name ?? id)} others={view.otherHolds} />
         <OilPath drawing={drawing} suspicion={state.suspicion} open={openChecks(state, rulebook)} picked={station} onPick={pickStation} />
         <SyncStrip sync={handle.sync} rulebook={rulebook} />
       </div>
@@ -72,7 +72,7 @@ export function CaseDesk({ view, drawing, hand: kept, decimalMark }: Props) {
         ) : readOnly ? (
           <p className="text-ink-soft">Nothing is asked here. Pick a station to see its checks.</p>
         ) : (
-          <AtHandView {...{ handle, rulebook, picked, decimalMark, onPick: setPicked }} />
+          <AtHandView {...{ handle, rulebook, picked, decimalMark, limits: view.limits, onPick: setPicked }} />
         )}
         {!readOnly && <HandSwitch hand={hand} onChange={(next) => { setHand(next); keepHand(next); }} />}
       </div>
@@ -103,6 +103,7 @@ interface AtHandProps {
   rulebook: RulebookView;
   picked: Picked;
   decimalMark: '.' | ',';
+  limits: CaseView['limits'];
   onPick: (picked: Picked) => void;
 }
 
@@ -132,7 +133,7 @@ function AtHandView(props: AtHandProps) {
   );
 }
 
-function Question({ handle, rulebook, picked, decimalMark, onPick, asked, onPass }: AtHandProps & { asked: AtHand | null; onPass: (panelId: string) => void }) {
+function Question({ handle, rulebook, picked, decimalMark, limits, onPick, asked, onPass }: AtHandProps & { asked: AtHand | null; onPass: (panelId: string) => void }) {
   if (!asked) return <Enough {...{ state: handle.state, rulebook, onPick }} />;
   if (asked.kind === 'panel') {
     const panel = rulebook.panels.find(({ id }) => id === asked.panelId);
@@ -159,6 +160,7 @@ function Question({ handle, rulebook, picked, decimalMark, onPick, asked, onPass
       suggestion={asked.suggestion}
       stationName={stationName(check.station)}
       decimalMark={decimalMark}
+      limit={limits[check.id]}
       onAnswered={() => onPick(null)}
     />
   );

@@ -5,7 +5,7 @@ import { ButtonLink } from '@/components/ui/Button';
 import { Notice } from '@/components/ui/Notice';
 import { ApiProblem } from '@/lib/query/problem';
 import type { AnswerInput } from '@/lib/schemas/case';
-import type { CheckView, RulebookView, SuggestionView } from '@/lib/schemas/case-view';
+import type { CaseView, CheckView, RulebookView, SuggestionView } from '@/lib/schemas/case-view';
 import { Cautions, unread } from './Cautions';
 import { lastAsked } from './answered';
 import { ChoiceAnswers } from './ChoiceAnswers';
@@ -23,11 +23,13 @@ interface Props {
   suggestion: SuggestionView | null;
   stationName: string;
   decimalMark: '.' | ',';
+  /** That a value is judged by; undefined: none adopted. */
+  limit: CaseView['limits'][string] | undefined;
   onAnswered: () => void;
 }
 
 /** One check, large: its cautions, how to do it, and its answers; "can't tell" and "skip" are always there. */
-export function CheckAtHand({ check, rulebook, handle, suggestion, stationName, decimalMark, onAnswered }: Props) {
+export function CheckAtHand({ check, rulebook, handle, suggestion, stationName, decimalMark, limit, onAnswered }: Props) {
   const { state, answer, acknowledge } = handle;
   const problem = answer.error instanceof ApiProblem && answer.variables?.checkId === check.id ? answer.error : null;
   const toRead = unread(check, rulebook, state);
@@ -65,6 +67,7 @@ export function CheckAtHand({ check, rulebook, handle, suggestion, stationName, 
         onRead={() => acknowledge.mutate({ checkId: check.id, cautionIds: toRead })}
       />
       <Instructions check={check} setUpMinutes={suggestion?.setUpMinutes} />
+      {limit && <p>Limit your organisation adopted: <strong className="figure">{limit.text}</strong> <span className="text-ink-soft">({limit.source})</span></p>}
       {toRead.length === 0 &&
         (check.kind === 'measured' ? (
           <>

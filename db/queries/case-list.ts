@@ -1,7 +1,6 @@
-import { and, asc, count, desc, eq, exists, ilike, inArray, isNull, ne, or, sql, type SQL } from 'drizzle-orm';
-import { alias } from 'drizzle-orm/pg-core';
+import { and, asc, count, desc, eq, exists, ilike, inArray, isNull, or, sql, type SQL } from 'drizzle-orm';
 import type { Executor } from '@/db/connect';
-import { caseEvent, cases, finding, person, site, unit } from '@/db/schema';
+import { caseEvent, cases, finding, person, site, unit, unitHold } from '@/db/schema';
 import { containing } from './like';
 import { naturally } from './natural';
 
@@ -76,20 +75,12 @@ export async function selectCaseList(db: Executor, filter: CaseFilter) {
 
 const itsUnit = and(eq(unit.organisationId, cases.organisationId), eq(unit.id, cases.unitId));
 
-/** Whether any case of the same unit holds its release: this one need not be it. */
+/** Whether anything stands against the release of the case's unit: this case need not be what found it. */
 function unitIsHeld(db: Executor): SQL {
-  const holding = alias(cases, 'holding');
   return exists(
     db
       .select({ one: sql`1` })
-      .from(holding)
-      .where(
-        and(
-          eq(holding.organisationId, cases.organisationId),
-          eq(holding.unitId, cases.unitId),
-          ne(holding.status, 'closed'),
-          ne(holding.releaseHolds, sql`'{}'::text[]`),
-        ),
-      ),
+      .from(unitHold)
+      .where(and(eq(unitHold.organisationId, cases.organisationId), eq(unitHold.unitId, cases.unitId), isNull(unitHold.endedAt))),
   );
 }

@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, inArray, ne, sql } from 'drizzle-orm';
+import { and, desc, eq, sql } from 'drizzle-orm';
 import type { Executor } from '@/db/connect';
 import { call, cases } from '@/db/schema';
 
@@ -25,21 +25,4 @@ export async function selectCasesOfUnit(db: Executor, { organisationId, unitId }
     .from(cases)
     .where(and(eq(cases.organisationId, organisationId), eq(cases.unitId, unitId)))
     .orderBy(desc(cases.openedAt), desc(cases.id));
-}
-
-/** What cases that aren't closed know against the release of these units, in the order of their numbers. */
-export async function selectReleaseHolds(db: Executor, { organisationId, unitIds }: { organisationId: string; unitIds: string[] }) {
-  if (unitIds.length === 0) return [];
-  return db
-    .select({ unitId: cases.unitId, caseId: cases.id, number: cases.number, editionId: cases.editionId, releaseHolds: cases.releaseHolds })
-    .from(cases)
-    .where(
-      and(
-        eq(cases.organisationId, organisationId),
-        inArray(cases.unitId, unitIds),
-        ne(cases.status, 'closed'),
-        ne(cases.releaseHolds, sql`'{}'::text[]`),
-      ),
-    )
-    .orderBy(asc(cases.number));
 }

@@ -1,5 +1,6 @@
 import { boolean, date, foreignKey, index, jsonb, pgTable, primaryKey, text, uuid } from 'drizzle-orm/pg-core';
 import type { FindingSum } from '@/lib/case/rows';
+import type { Judgement } from '@/lib/limits';
 import type { Stage, StateShare } from '@/lib/diagnose/types';
 import { cases } from './case';
 import { createdAt, id, instant, organisationId, organisationPolicy, si } from './columns';
@@ -35,6 +36,8 @@ export const finding = pgTable(
     errorSi: si(),
     /** What a sum of the bench made it from; null: it was read or chosen. */
     sum: jsonb().$type<FindingSum>(),
+    /** By which adopted limit it was judged, and how; null: by none. */
+    judgement: jsonb().$type<Judgement>(),
     personId: uuid().notNull().references(() => person.id),
     /** The device's clock, and what to add to it to get the server's. */
     deviceAt: instant().notNull(),

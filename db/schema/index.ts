@@ -10,3 +10,5 @@ export * from './run';
 export * from './record-keeping';
 export * from './api';
 export * from './saved-view';
+export * from './limit';
+export * from './unit-hold';

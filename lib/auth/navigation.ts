@@ -18,6 +18,7 @@ const SETTINGS: readonly (Place & { needs: Permission })[] = [
   { href: '/settings/profile', label: 'You', needs: 'own-settings' },
   { href: '/settings/units', label: 'Units of measure', needs: 'own-settings' },
   { href: '/settings/tokens', label: 'Tokens', needs: 'own-settings' },
+  { href: '/settings/limits', label: 'Limits', needs: 'limit.see' },
   { href: '/settings/people', label: 'People', needs: 'people.manage' },
   { href: '/settings/sites', label: 'Sites', needs: 'site.manage' },
   { href: '/settings/organisation', label: 'Organisation', needs: 'organisation.manage' },

@@ -15,6 +15,8 @@ export const PERMITTED = {
   'model.see': ANYONE,
   'model.edit': ['engineer', 'manager'],
   'bench.use': ANYONE,
+  'limit.see': CASE_WORKERS,
+  'limit.adopt': ['engineer', 'manager'],
   'own-settings': ANYONE,
   'people.manage': ['administrator'],
   'site.manage': ['administrator'],

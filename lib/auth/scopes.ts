@@ -11,6 +11,8 @@ export const SCOPES = {
   'bench:read': { needs: 'bench.use', does: 'Work out sums of the bench' },
   'units:read': { needs: 'unit.see', does: 'See units with their readings and fits' },
   'units:write': { needs: 'unit.edit', does: 'Add and change units, readings and fits' },
+  'limits:read': { needs: 'limit.see', does: 'See the limits your organisation adopted' },
+  'limits:write': { needs: 'limit.adopt', does: 'Adopt and withdraw limits' },
   'models:read': { needs: 'model.see', does: 'See compressor models' },
   'models:write': { needs: 'model.edit', does: 'Add and change compressor models' },
   'sites:read': { needs: 'own-settings', does: 'See sites' },

@@ -74,7 +74,7 @@ function rowOf({ id, body }: Extract<Waiting, { kind: 'finding' }>, { compiled, 
   if (!check) throw new Error(`the edition has no check ${body.checkId}`);
   const correctedAt = correctedTime(body, now);
   const dated = { id, checkId: body.checkId, stage: body.stage ?? { kind: 'diagnosis' as const }, correctedAt, receivedAt: correctedAt };
-  const answer = readAnswer(check, body.answer, kit.person);
+  const answer = readAnswer(check, body.answer, kit.person, kit.limits?.[body.checkId]);
   return {
     ...answer,
     ...dated,

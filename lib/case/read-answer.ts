@@ -7,6 +7,7 @@ import { FindingError } from '@/lib/diagnose/errors';
 import { sharesOf } from '@/lib/diagnose/shares';
 import type { StateShare } from '@/lib/diagnose/types';
 import { invalid } from '@/lib/errors';
+import { judge, type Judgement, type Limit } from '@/lib/limits';
 import type { answerInput } from '@/lib/schemas/case';
 import { formatQuantity, parseQuantity, type DecimalMark } from '@/lib/units';
 import type { FindingSum } from './rows';
@@ -23,18 +24,26 @@ export interface AnswerColumns {
   valueSi: number | null;
   errorSi: number | null;
   sum: FindingSum | null;
+  judgement: Judgement | null;
 }
 
-const NOT_MEASURED = { valueTyped: null, errorTyped: null, unit: null, valueSi: null, errorSi: null, sum: null };
+const NOT_MEASURED = { valueTyped: null, errorTyped: null, unit: null, valueSi: null, errorSi: null, sum: null, judgement: null };
 
 export type ParsedAnswer = z.output<typeof answerInput>;
 
 /**
- * Understands an answer to a check: a state as it is, a measured value from what was typed.
+ * Understands an answer to a check: a state as it is, a measured value from what was typed, judged by the limit that the
+ * organisation adopted.
  *
+ * @param limit that holds for this unit and check, if one does
  * @throws AppError "invalid" with the message beside `value`, `error` or `state`
  */
-export function readAnswer(check: CompiledCheck, answer: ParsedAnswer, writing: Writing): AnswerColumns {
+export function readAnswer(check: CompiledCheck, answer: ParsedAnswer, writing: Writing, limit?: Limit): AnswerColumns {
+  const read = readUnjudged(check, answer, writing);
+  return limit && read.valueSi !== null ? { ...read, judgement: judge(limit, read.valueSi, read.errorSi ?? 0) } : read;
+}
+
+function readUnjudged(check: CompiledCheck, answer: ParsedAnswer, writing: Writing): AnswerColumns {
   if (answer.kind === 'measured') return readMeasured(check, answer, writing);
   if (answer.kind === 'sum') return readSum(check, answer, writing);
   if (answer.kind !== 'state') return { kind: answer.kind, shares: [], reliability: 1, ...NOT_MEASURED };
@@ -62,6 +71,7 @@ function readMeasured(check: CompiledCheck, answer: Extract<ParsedAnswer, { kind
       valueSi: value.si,
       errorSi: error,
       sum: null,
+      judgement: null,
     };
   } catch (cause) {
     if (cause instanceof FindingError) throw invalid({ value: 'This value does not fit the check.' });
@@ -94,6 +104,7 @@ function readSum(check: CompiledCheck, { inputs, sureness }: Extract<ParsedAnswe
     valueSi: value,
     errorSi: error,
     sum: { id: sum.id, output, inputs: worked.inputs, low: band.low ?? null, high: band.high ?? null },
+    judgement: null,
   };
 }
 

@@ -1,17 +1,20 @@
 import type { CompiledCheck, CompiledRulebook } from '@/lib/diagnose/compiled';
+import type { Judgement } from '@/lib/limits';
 import type { StateShare } from '@/lib/diagnose/types';
 import { isNewer, slotOf, type Dated } from './current-findings';
 
 interface Answer extends Dated {
   kind: string;
   shares: readonly StateShare[];
+  judgement?: Judgement | null;
 }
 
 /** A measured value on the edge of a limit counts as over it. */
 const HOLDS_FROM = 0.5;
 
 /**
- * Checks whose answer forbids the unit's release, in the order of their ids. An answer holds until a later answer of the
+ * Checks whose answer forbids the unit's release, in the order of their ids. A measured value that was judged by a limit
+ * of the organisation holds when it is out of it; any other answer holds where the rulebook says so. An answer holds until a later answer of the
  * same check passes, at whatever stage: "can't tell" and a skipped check pass nothing, and an answer that was taken back
  * brings back the one before it.
  *
@@ -22,17 +25,18 @@ export function releaseHolds({ checks }: Pick<CompiledRulebook, 'checks'>, rows:
   const answers = new Map<string, Answer[]>();
   for (const row of rows) {
     const check = checks.get(row.checkId);
-    if (check && canHold(check)) answers.set(row.checkId, [...(answers.get(row.checkId) ?? []), row]);
+    if (check) answers.set(row.checkId, [...(answers.get(row.checkId) ?? []), row]);
   }
   return [...checks.values()]
     .filter((check) => {
       const last = standing(answers.get(check.id) ?? []).findLast(({ shares }) => shares.length > 0);
-      return last !== undefined && holding(check, last.shares) >= HOLDS_FROM;
+      return last !== undefined && holds(check, last);
     })
     .map(({ id }) => id);
 }
 
-const canHold = ({ check }: CompiledCheck) => check.states.some(({ holdsRelease }) => holdsRelease);
+const holds = (check: CompiledCheck, { judgement, shares }: Answer): boolean =>
+  judgement ? judgement.verdict === 'out' : holding(check, shares) >= HOLDS_FROM;
 
 /** The answers in the order they were given, less those that were taken back. */
 function standing(rows: readonly Answer[]): Answer[] {
@@ -46,6 +50,6 @@ function standing(rows: readonly Answer[]): Answer[] {
 }
 
 function holding({ check }: CompiledCheck, shares: readonly StateShare[]): number {
-  const holds = new Set(check.states.filter(({ holdsRelease }) => holdsRelease).map(({ id }) => id));
-  return shares.reduce((sum, { state, share }) => sum + (holds.has(state) ? share : 0), 0);
+  const against = new Set(check.states.filter(({ holdsRelease }) => holdsRelease).map(({ id }) => id));
+  return shares.reduce((sum, { state, share }) => sum + (against.has(state) ? share : 0), 0);
 }

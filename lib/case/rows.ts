@@ -1,4 +1,5 @@
 import type { UsedInput } from '@/lib/bench/read-texts';
+import type { Judgement } from '@/lib/limits';
 import type { Ranking, RecordFacts, Stage, StateShare } from '@/lib/diagnose/types';
 
 /** What a finding that was worked out on the bench was worked out from: its figure can be made again from this alone. */
@@ -28,6 +29,8 @@ export interface FindingRow {
   errorSi: number | null;
   /** null: not worked out on the bench. */
   sum: FindingSum | null;
+  /** By which adopted limit a measured value was judged, and how; null: by none. */
+  judgement: Judgement | null;
   person: string;
   correctedAt: Date;
   receivedAt: Date;

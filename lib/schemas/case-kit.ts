@@ -1,4 +1,5 @@
 import type { FindingRow, NoteRow } from '@/lib/case/rows';
+import type { Limit } from '@/lib/limits';
 import type { RecordFacts, SetUp } from '@/lib/diagnose/types';
 import type { DecimalMark, UnitPreferences } from '@/lib/units';
 import type { CaseView } from './case-view';
@@ -27,5 +28,7 @@ export interface CaseKit {
   /** What this person read, on which day of the site: it holds for that day. */
   acknowledged: CaseView['state']['acknowledged'];
   acknowledgedOn: string;
+  /** That measured values are judged by, by check; a kit that an earlier build kept has none. */
+  limits?: Record<string, Limit>;
   person: { name: string; units: UnitPreferences; decimal?: DecimalMark };
 }

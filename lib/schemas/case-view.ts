@@ -77,6 +77,8 @@ export interface FindingView {
   shares: StateShare[];
   /** The sum of the bench that it came from, with all that went in, as the bench's address takes it. */
   sum: { id: string; search: Record<string, string> } | null;
+  /** What the adopted limit says of a measured value, in words; null: judged by none. */
+  judgement: { verdict: 'within' | 'out'; text: string } | null;
   thinkSo: boolean;
   person: string;
   /** By the device's corrected clock. */
@@ -172,12 +174,14 @@ export interface CaseState {
   releaseHolds: string[];
 }
 
-/** What another case of the same unit found that forbids its release. */
+/** What forbids the unit's release besides what the case itself holds, by the case that found it. */
 export interface OtherHoldView {
   caseId: string;
   number: number;
   /** Names of the checks that hold. */
   checks: string[];
+  /** Names of those that have passed since: they hold until somebody with the right lifts them. */
+  passed: string[];
 }
 
 /**
@@ -203,6 +207,8 @@ export interface CaseView {
   reasons: CaseReasons;
   /** Other cases of the unit that hold its release, now. */
   otherHolds: OtherHoldView[];
+  /** The limits that the organisation adopted for this unit, by check. */
+  limits: Record<string, { text: string; source: string }>;
   assignedTo: string | null;
   calls: CallView[];
   events: CaseEventView[];

@@ -10,6 +10,7 @@ export interface Places {
   /** The address of a fit. */
   fit?: string;
   model?: string;
+  limit?: string;
   person?: string;
   site?: string;
   /** Addresses of mailed links; only a server of our own shows its mail. */
@@ -28,9 +29,10 @@ export async function findPlaces(go: Go): Promise<Places> {
   const unit = await firstId(await go('technician', '/units'), '/units/');
   const fit = unit && (await firstHref(await go('technician', `/units/${unit}`), new RegExp(`/units/${ID}/fits/${ID}$`)));
   const model = await firstId(await go('technician', '/models'), '/models/');
+  const limit = await firstId(await go('technician', '/settings/limits'), '/settings/limits/');
   const person = await firstId(await go('administrator', '/settings/people'), '/settings/people/');
   const site = await firstId(await go('administrator', '/settings/sites'), '/settings/sites/');
-  return { openCase, calledCase, pastMoment, unit, fit, model, person, site };
+  return { openCase, calledCase, pastMoment, unit, fit, model, limit, person, site };
 }
 
 /** The second of the moments that the API tells of: something was asked, and much was still to come. */

@@ -14,6 +14,7 @@ const BROKEN: [file: string, source: string][] = [
   ['lib/diagnose/record-run.ts', "import { readFileSync } from 'node:fs'; export default readFileSync;"],
   ['lib/units/parse.ts', "import { rank } from '@/lib/diagnose'; export default rank;"],
   ['lib/air-and-oil/build-up.ts', "import { z } from 'zod'; export default z;"],
+  ['lib/limits/judge.ts', "import { z } from 'zod'; export default z;"],
   ['lib/stopwatch/index.ts', "import { useState } from 'react'; export default useState;"],
   ['lib/schemas/case.ts', "import { unit } from '@/db/schema'; export default unit;"],
   ['lib/services/case/open.ts', "import { database } from '@/db'; export default database;"],

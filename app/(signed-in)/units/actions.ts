@@ -10,6 +10,7 @@ import { addReading as noteDown } from '@/lib/services/unit/add-reading';
 import { changeUnit as change } from '@/lib/services/unit/change';
 import { createUnit as add } from '@/lib/services/unit/create';
 import { hideUnit as hide, showUnit as show } from '@/lib/services/unit/hide';
+import { liftHold as lift } from '@/lib/services/unit-hold/lift';
 import { strikeReading as strikeOut } from '@/lib/services/unit/strike-reading';
 import { editing } from '../editing';
 
@@ -26,6 +27,8 @@ export const showUnit = action(show, { after: readAnew });
 
 export const addReading = action(noteDown, { after: toItsUnit });
 export const strikeReading = action(strikeOut, { after: readAnew });
+
+export const liftHold = action(lift, { after: readAnew });
 
 export const addFit = action(create, { after: toItsUnit });
 export const changeFit = editing(action(correct, { after: toItsUnit }), PAGES);

@@ -19,6 +19,8 @@ import * as editionsId from './editions/[id]/route';
 import * as fitsId from './fits/[id]/route';
 import * as fitsIdStrike from './fits/[id]/strike/route';
 import * as fitsIdTakeOut from './fits/[id]/take-out/route';
+import * as limits from './limits/route';
+import * as limitsIdWithdraw from './limits/[id]/withdraw/route';
 import * as models from './models/route';
 import * as modelsId from './models/[id]/route';
 import * as modelsIdHide from './models/[id]/hide/route';
@@ -38,6 +40,8 @@ import * as units from './units/route';
 import * as unitsId from './units/[id]/route';
 import * as unitsIdFits from './units/[id]/fits/route';
 import * as unitsIdHide from './units/[id]/hide/route';
+import * as unitsIdHolds from './units/[id]/holds/route';
+import * as unitsIdHoldsHoldIdLift from './units/[id]/holds/[holdId]/lift/route';
 import * as unitsIdReadings from './units/[id]/readings/route';
 import * as unitsIdReadingsReadingIdStrike from './units/[id]/readings/[readingId]/strike/route';
 import * as unitsIdShow from './units/[id]/show/route';
@@ -65,6 +69,8 @@ export const ROUTES = {
   '/fits/{id}': fitsId,
   '/fits/{id}/strike': fitsIdStrike,
   '/fits/{id}/take-out': fitsIdTakeOut,
+  '/limits': limits,
+  '/limits/{id}/withdraw': limitsIdWithdraw,
   '/models': models,
   '/models/{id}': modelsId,
   '/models/{id}/hide': modelsIdHide,
@@ -84,6 +90,8 @@ export const ROUTES = {
   '/units/{id}': unitsId,
   '/units/{id}/fits': unitsIdFits,
   '/units/{id}/hide': unitsIdHide,
+  '/units/{id}/holds': unitsIdHolds,
+  '/units/{id}/holds/{holdId}/lift': unitsIdHoldsHoldIdLift,
   '/units/{id}/readings': unitsIdReadings,
   '/units/{id}/readings/{readingId}/strike': unitsIdReadingsReadingIdStrike,
   '/units/{id}/show': unitsIdShow,

@@ -9,8 +9,10 @@ import { findingsForRanking } from '@/lib/case/findings-for-ranking';
 import { readAnswer } from '@/lib/case/read-answer';
 import { releaseHolds } from '@/lib/case/release-holds';
 import type { z } from 'zod';
+import { seededId } from '../seeded-id';
 import { audited, type AuditEntry } from './audit-row';
 import type { WorkClock } from './calendar';
+import { demoLimits } from './limit-rows';
 import type { Mileage } from './mileage';
 import { ORGANISATION, WRITING, type DemoPerson } from './organisation';
 import type { Random } from './random';
@@ -58,6 +60,7 @@ export class CaseDesk {
   private lastRunId = '';
   private lastCallId: string | null = null;
   private readonly readings;
+  private readonly limits;
 
   constructor(
     private readonly world: World,
@@ -70,6 +73,7 @@ export class CaseDesk {
     this.id = this.newId(at);
     this.assignedTo = by.id;
 
+    this.limits = demoLimits(vehicle, world.calendar);
     this.readings = mileage?.readings(clock.day) ?? null;
     if (this.readings) this.noteReading(vehicle.id, this.readings, at);
     const asked = { organisationId, caseId: this.id, kind: 'state', askedBecause: 'always', personId: by.id, deviceAt: at, clockOffsetMs: 0, correctedAt: at, receivedAt: at };
@@ -152,6 +156,8 @@ export class CaseDesk {
     const { vehicle, fitId, complaints, complaintWords, by } = this.opening;
     const { odometerM = null, engineS = null, asTyped = {} } = this.readings ?? {};
     this.world.rows.finding.push(...this.findings);
+    const held = releaseHolds(this.world.compiled, this.findings);
+    if (this.status !== 'closed') this.hold(held);
     this.world.rows.cases.push({
       organisationId,
       id: this.id,
@@ -167,7 +173,7 @@ export class CaseDesk {
       engineS,
       asTyped,
       vehicleState: { ...this.vehicleState, access: [...this.vehicleState.access] },
-      releaseHolds: releaseHolds(this.world.compiled, this.findings),
+      releaseHolds: held,
       assignedTo: this.assignedTo,
       openedBy: by.id,
       openedAt: this.openedAt,
@@ -179,8 +185,20 @@ export class CaseDesk {
     this.audit(this.openedAt, by, { action: 'open.case', entity: 'case', entityId: this.id, changed });
   }
 
+  /** What the case has found against the unit's release, unless an earlier one has. */
+  private hold(checkIds: readonly string[]): void {
+    const { unitHold } = this.world.rows;
+    for (const checkId of checkIds) {
+      const unitId = this.opening.vehicle.id;
+      if (unitHold.some((other) => other.unitId === unitId && other.checkId === checkId)) continue;
+      const found = this.findings.findLast((finding) => finding.checkId === checkId && finding.shares.length > 0);
+      const placedAt = found?.receivedAt ?? this.openedAt;
+      unitHold.push({ organisationId, id: seededId(`hold of ${this.id} by ${checkId}`), unitId, caseId: this.id, checkId, findingId: found?.id, placedAt, createdAt: placedAt });
+    }
+  }
+
   private record(check: CompiledCheck, given: Answer, by: DemoPerson, askedBecause: AskedBecause, correctedAt: Date, receivedAt: Date): string {
-    const answer = readAnswer(check, given, WRITES);
+    const answer = readAnswer(check, given, WRITES, this.limits.get(check.id));
     const says = answer.shares.length > 0;
     if (says) this.readCautions(check, by, correctedAt);
     const id = this.newId(correctedAt);

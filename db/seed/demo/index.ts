@@ -3,6 +3,7 @@ import type { Rulebook } from '@/lib/diagnose/types';
 import { seededId } from '../seeded-id';
 import { calendarTo, type Calendar } from './calendar';
 import type { World } from './world';
+import { limitRows } from './limit-rows';
 import { modelRows } from './model-rows';
 import { policyOf } from './policy';
 import { randomFrom } from './random';
@@ -35,6 +36,7 @@ export function makeDemo(today: Date, rulebook: Rulebook, vehicles: readonly Veh
   const shop = { compiled, truth: new Truth(compiled), policy: policyOf(compiled) };
   const random = randomFrom('demo');
   modelRows(rows, beganOn(calendar), random.fork('models'));
+  limitRows(rows, beganOn(calendar));
   for (const vehicle of vehicles) new UnitStory(world, shop, vehicle, random.fork(vehicle.fleetNumber)).tell();
   numberCases(rows);
   return { rows, truths: world.truths };

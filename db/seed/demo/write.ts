@@ -26,4 +26,4 @@ export async function writeRows(db: Executor, rows: DemoRows): Promise<void> {
 }
 
 /** A column that is left out of a row is null here, and would miss its default. */
-const DEFAULTS: Record<string, unknown> = { late: false, asTyped: {}, odometerReplaced: false, engineHoursReplaced: false };
+const DEFAULTS: Record<string, unknown> = { late: false, below: false, asTyped: {}, odometerReplaced: false, engineHoursReplaced: false };

@@ -39,6 +39,7 @@ const finding = z
       .object({ id: z.string(), search: z.record(z.string(), z.string()) })
       .nullable()
       .meta({ description: 'The sum of the bench that it came from, with all that went in.' }),
+    judgement: z.object({ verdict: z.enum(['within', 'out']), text: z.string() }).nullable().meta({ description: 'What the limit that the organisation adopted says of the value, and which limit.' }),
     thinkSo: z.boolean(),
     person: z.string(),
     at: instant,

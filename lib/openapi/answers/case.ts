@@ -54,7 +54,7 @@ const call = z
 
 const event = z.object({ id, kind: z.string(), reason: z.string().nullable(), person: z.string(), at: instant }) satisfies z.ZodType<CaseEventView>;
 
-const otherHold = z.object({ caseId: id, number: count, checks: z.array(z.string()) }) satisfies z.ZodType<OtherHoldView>;
+const otherHold = z.object({ caseId: id, number: count, checks: z.array(z.string()), passed: z.array(z.string()) }) satisfies z.ZodType<OtherHoldView>;
 
 export const caseRecord = z
   .object({

@@ -5,6 +5,9 @@ import { count, day, id, instant, probability } from './common';
 
 /** What a device asks for, to go on without a connection. */
 
+/** SI; null: no limit on that side. */
+const limit = z.object({ id, checkId: z.string(), least: z.number().nullable(), most: z.number().nullable(), below: z.boolean(), source: z.string() });
+
 const row = z.object({
   id,
   checkId: z.string(),
@@ -28,6 +31,7 @@ const row = z.object({
       high: z.number().nullable(),
     })
     .nullable(),
+  judgement: z.object({ limit, verdict: z.enum(['within', 'out']), doubtful: z.boolean() }).nullable(),
   person: z.string(),
   correctedAt: instant,
   receivedAt: instant,
@@ -51,6 +55,7 @@ export const caseKit = z
     previous: z.array(z.object({ causeId: z.string(), p: probability })).nullable(),
     acknowledged: z.array(z.object({ cautionId: z.string(), dangers: z.array(z.string()) })),
     acknowledgedOn: day,
+    limits: z.record(z.string(), limit).optional().meta({ description: 'That measured values are judged by, by check.' }),
     person: z.object({ name: z.string(), units: z.record(z.string(), z.string()), decimal: z.enum(['.', ',']).optional() }),
   })
   .meta({ id: 'CaseKit' });

@@ -7,6 +7,7 @@ import { notFound } from '@/lib/errors';
 import { readCaseInput } from '@/lib/schemas/case';
 import type { CaseKit } from '@/lib/schemas/case-kit';
 import { defineRead } from '../define';
+import { limitsOfCase } from '../limit/of-case';
 import { writingOf } from './writing';
 
 /** What a device needs to go on with a case without us; the rulebook comes with its edition. */
@@ -39,6 +40,7 @@ export const readCaseKit = defineRead({
       previous: previous?.result.causes.map(({ causeId, p }) => ({ causeId, p })) ?? null,
       acknowledged: await selectAcknowledgements(tx, { ...of, personId: ctx.person.id, onDay: acknowledgedOn }),
       acknowledgedOn,
+      limits: Object.fromEntries(await limitsOfCase(tx, of)),
       person: { name: ctx.person.name, ...writingOf(ctx) },
     };
   },

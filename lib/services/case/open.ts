@@ -1,6 +1,7 @@
 import { insertCase, insertCaseEvent, selectCaseHead, takeCaseNumber } from '@/db/queries/case';
 import { selectPublishedEdition } from '@/db/queries/edition';
 import { insertFindings } from '@/db/queries/finding';
+import { insertHolds } from '@/db/queries/unit-hold';
 import { selectUnit } from '@/db/queries/unit';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { findingsForRanking } from '@/lib/case/findings-for-ranking';
@@ -66,6 +67,7 @@ export const openCase = defineWrite({
       organisationId,
       caseId: input.id,
       source,
+      judgement: null,
       kind: 'state',
       askedBecause: 'always',
       personId: ctx.person.id,
@@ -79,6 +81,7 @@ export const openCase = defineWrite({
       ...complaintFindings(input.complaints).map((finding) => asFinding(finding, 'asked')),
     ];
 
+    const held = releaseHolds(compiled, rows);
     const number = await takeCaseNumber(tx, organisationId);
     const inserted = await insertCase(tx, {
       organisationId,
@@ -94,7 +97,7 @@ export const openCase = defineWrite({
       engineS: reading?.engineS ?? null,
       asTyped: reading?.asTyped ?? {},
       vehicleState: { ...AS_PARKED, access: [] },
-      releaseHolds: releaseHolds(compiled, rows),
+      releaseHolds: held,
       assignedTo: ctx.person.id,
       openedBy: ctx.person.id,
       openedAt: at,
@@ -103,6 +106,7 @@ export const openCase = defineWrite({
     await insertCaseEvent(tx, { organisationId, id: newId(at.getTime()), caseId: input.id, kind: 'opened', personId: ctx.person.id, at });
 
     await insertFindings(tx, rows);
+    await insertHolds(tx, held.map((checkId) => ({ organisationId, id: newId(at.getTime()), unitId, caseId: input.id, checkId, findingId: rows.findLast((row) => row.checkId === checkId)?.id, placedAt: at })));
     await makeRun(tx, { organisationId, caseId: input.id, editionId: edition.id, compiled, findings: findingsForRanking([...rows]), recordFacts: record.facts, becauseOf: null, at });
     audit({
       entity: 'case',

@@ -6,8 +6,10 @@ import { headView } from '@/lib/case/view/head';
 import { momentsOf } from '@/lib/case/view/moments';
 import { rulebookView } from '@/lib/case/view/rulebook';
 import { readCaseInput } from '@/lib/schemas/case';
-import type { CallView, CaseReasons, CaseState, CaseView } from '@/lib/schemas/case-view';
+import type { CallView, CaseReasons, CaseState, CaseView, OtherHoldView } from '@/lib/schemas/case-view';
+import { limitViews } from '@/lib/case/view/limits';
 import { defineRead } from '../define';
+import { limitsOfCase } from '../limit/of-case';
 import { gatherState } from './gather-state';
 import { holdsOfUnit } from './holds-of-unit';
 
@@ -53,7 +55,8 @@ export const readCase = defineRead({
       rulebook,
       state: at ? { ...state, status: statusAt(events) } : state,
       reasons: buildReasons(parts),
-      otherHolds: at ? [] : (await holdsOfUnit(tx, { ...of, unitId: caseHead.unitId })).filter((other) => other.caseId !== of.caseId),
+      otherHolds: at ? [] : otherHolds(await holdsOfUnit(tx, { ...of, unitId: caseHead.unitId }), of.caseId),
+      limits: at ? {} : limitViews(await limitsOfCase(tx, of), parts.compiled, ctx.person.units),
       assignedTo: caseHead.assignedTo,
       calls: callViews(calls, events),
       events: events.map(({ at: when, ...event }) => ({ ...event, at: when.toISOString() })),
@@ -61,6 +64,10 @@ export const readCase = defineRead({
     };
   },
 });
+
+/** What this case itself holds stands in its state; of what it found there is still what has passed and waits. */
+const otherHolds = (holds: OtherHoldView[], caseId: string): OtherHoldView[] =>
+  holds.map((held) => (held.caseId === caseId ? { ...held, checks: [] } : held)).filter(({ checks, passed }) => checks.length + passed.length > 0);
 
 type Events = Awaited<ReturnType<typeof selectCaseEvents>>;
 

@@ -20,6 +20,8 @@ import type { CaseState } from '@/lib/schemas/case-view';
 import type { Ctx } from '../context';
 import { defineWrite } from '../define';
 import { compiledEdition } from '../edition/compiled';
+import { limitsOfCase } from '../limit/of-case';
+import { holdAfterAnswer } from '../unit-hold/after-answer';
 import { gatherState } from './gather-state';
 import { makeRun } from './run-of-record';
 import { writingOf } from './writing';
@@ -40,9 +42,9 @@ export const recordFinding = defineWrite({
     const compiled = await compiledEdition(tx, { ...of, editionId: head.editionId });
 
     const rows = await selectFindings(tx, of);
-    const held = rows.find((row) => row.id === input.id);
-    if (held) {
-      if (held.checkId !== input.checkId) throw takenId();
+    const known = rows.find((row) => row.id === input.id);
+    if (known) {
+      if (known.checkId !== input.checkId) throw takenId();
       unchanged();
       return buildState(await gatherState(tx, ctx, { caseId: of.caseId }));
     }
@@ -50,7 +52,9 @@ export const recordFinding = defineWrite({
 
     const check = compiled.checks.get(input.checkId);
     if (!check) throw invalid({ checkId: "This check is not in the case's rulebook." });
-    const answer = readAnswer(check, input.answer, writingOf(ctx));
+    const measures = input.answer.kind === 'measured' || input.answer.kind === 'sum';
+    const limits = measures ? await limitsOfCase(tx, { ...of, checkId: input.checkId }) : undefined;
+    const answer = readAnswer(check, input.answer, writingOf(ctx), limits?.get(input.checkId));
     const receivedAt = ctx.now();
     const correctedAt = correctedTime(input, receivedAt);
     const acknowledged = await acknowledgedOn(tx, ctx, head, correctedAt);
@@ -71,7 +75,17 @@ export const recordFinding = defineWrite({
     if (!written) throw takenId();
     const vehicleState = says ? vehicleAfter(head.vehicleState, check.check.setUp) : head.vehicleState;
     const rowsNow = [...rows, { ...finding, person: ctx.person.name }];
-    await updateCase(tx, of, { vehicleState, releaseHolds: releaseHolds(compiled, rowsNow) });
+    const held = releaseHolds(compiled, rowsNow);
+    await updateCase(tx, of, { vehicleState, releaseHolds: held });
+    await holdAfterAnswer(tx, {
+      ...of,
+      unitId: head.unitId,
+      personId: ctx.person.id,
+      check,
+      finding: { ...finding, says },
+      holds: held.includes(check.id),
+      at: receivedAt,
+    });
 
     const previous = await selectLatestRun(tx, of);
     const run = await makeRun(tx, {

@@ -8,9 +8,10 @@ import { may, PERMITTED } from '@/lib/auth/permissions';
 import { notFound } from '@/lib/errors';
 import { unitIdInput } from '@/lib/schemas/unit';
 import { siteDay } from '@/lib/case/site-day';
-import { holdsOfUnit } from '../case/holds-of-unit';
+import { standingHolds } from '../case/holds-of-unit';
 import type { Ctx } from '../context';
 import { defineRead } from '../define';
+import { liftedHolds } from '../unit-hold/list';
 import { versionOf } from '../editing';
 import { compiledEdition } from '../edition/compiled';
 import { textsOf } from '../form-value';
@@ -36,7 +37,8 @@ export const readUnit = defineRead({
       today,
       fits: fits.map((fit) => ({ ...fit, ranM: ranSince(fit, readings, today) })),
       currentFit: currentFitOn(fits, today) ?? null,
-      holds: await holdsOfUnit(tx, of),
+      holds: await standingHolds(tx, of),
+      lifted: await liftedHolds(tx, of),
       readings,
       cases: may(ctx.roles, 'case.see') ? await casesOf(tx, ctx, { unitId: of.unitId, timeZone: unit.timeZone }) : [],
       hidden: unit.hiddenAt ? await selectLastRemoval(tx, { ...of, entity: 'unit', entityId: of.unitId }) : undefined,

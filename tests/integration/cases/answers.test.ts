@@ -86,7 +86,7 @@ describe('answering a check', () => {
     await freshCase();
     const now = workshop.ctx.now();
     const newer = await give(workshop.ctx, { caseId, checkId: 'oil-at-purge', answer: yes, deviceAt: now });
-    const late = await give(workshop.ctx, { caseId, checkId: 'oil-at-purge', answer: no, deviceAt: new Date(now.getTime() - 3_600_000) });
+    const late = await give(workshop.ctx, { caseId, checkId: 'oil-at-purge', answer: no, deviceAt: new Date(now.getTime() - 1_000) });
     expect(current(late, 'oil-at-purge')?.answer).toBe('Yes');
     expect(late.findings.find((f) => f.late)).toMatchObject({ answer: 'No', current: false });
     expect(late.causes.map((cause) => cause.p)).toEqual(newer.causes.map((cause) => cause.p));
@@ -95,8 +95,8 @@ describe('answering a check', () => {
   it('decides by device time corrected for its clock', async () => {
     await freshCase();
     const now = workshop.ctx.now();
-    // A clock a day ahead, with the offset that says so, is older than an answer of this minute.
-    const fast = { deviceAt: new Date(now.getTime() + 86_400_000 - 60_000), clockOffsetMs: -86_400_000 };
+    // A clock a day ahead, with the offset that says so, is older than an answer of this second. Seconds, so that it is the same day, of which cautions are read, but at midnight.
+    const fast = { deviceAt: new Date(now.getTime() + 86_400_000 - 1_000), clockOffsetMs: -86_400_000 };
     await give(workshop.ctx, { caseId, checkId: 'oil-at-purge', answer: yes, deviceAt: now });
     const state = await give(workshop.ctx, { caseId, checkId: 'oil-at-purge', answer: no, ...fast });
     expect(current(state, 'oil-at-purge')?.answer).toBe('Yes');

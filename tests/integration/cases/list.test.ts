@@ -10,6 +10,7 @@ import { removeView } from '@/lib/services/saved-view/remove';
 import { renameView } from '@/lib/services/saved-view/rename';
 import { saveView } from '@/lib/services/saved-view/save';
 import { listUnits } from '@/lib/services/unit/list';
+import { liftHold } from '@/lib/services/unit-hold/lift';
 import { readUnit } from '@/lib/services/unit/read';
 import { openTestDatabases, type TestDatabases } from '@/tests/support/context';
 import type { Tenant } from '@/tests/support/tenant';
@@ -75,15 +76,19 @@ describe('the list of cases', () => {
     expect(await numbers({ held: 'yes' })).toEqual(['K-1', 'K-1']);
     const { cases } = await listCases({ ctx, input: { q: 'K-1', sort: 'number', direction: 'asc' } });
     expect(cases.filter(({ fleetNumber }) => fleetNumber === 'K-1').map(({ holds }) => holds)).toEqual([['Oil in the service tanks'], ['Oil in the service tanks']]);
-    expect((await readUnit({ ctx, input: { unitId } })).holds).toEqual([{ caseId, number: expect.any(Number), checks: ['Oil in the service tanks'] }]);
+    expect((await readUnit({ ctx, input: { unitId } })).holds).toMatchObject([{ caseId, check: 'Oil in the service tanks', passedAt: null }]);
     const other = await readCase({ ctx, input: { caseId: second } });
     expect(other.state.releaseHolds).toEqual([]);
-    expect(other.otherHolds).toEqual([{ caseId, number: expect.any(Number), checks: ['Oil in the service tanks'] }]);
+    expect(other.otherHolds).toEqual([{ caseId, number: expect.any(Number), checks: ['Oil in the service tanks'], passed: [] }]);
 
     await give(ctx, { caseId, checkId: 'oil-in-service-tanks', answer: { kind: 'cannot-tell' } });
     expect(await numbers({ held: 'yes' })).toHaveLength(2);
     const passed = await give(ctx, { caseId, checkId: 'oil-in-service-tanks', answer: no });
     expect(passed.releaseHolds).toEqual([]);
+    // It has passed, and stays until somebody with the right lifts it.
+    expect(await numbers({ held: 'yes' })).toHaveLength(2);
+    const [hold] = (await readUnit({ ctx, input: { unitId } })).holds;
+    await liftHold({ ctx: { ...ctx, mayRelease: true }, input: { unitId, holdId: hold?.id ?? '', found: 'Dry after a week' } });
     expect(await numbers({ held: 'yes' })).toEqual([]);
   });
 });

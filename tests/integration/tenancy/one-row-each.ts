@@ -32,6 +32,8 @@ export async function insertOneRowEach(tx: Transaction, { organisationId, siteId
   await tx.insert(schema.attachment).values({ ...of, id: newId(), ownerKind: 'case', ownerId: caseId, objectKey: 'key', mediaType: 'image/jpeg', bytes: 1, personId });
   await tx.insert(schema.apiToken).values({ ...of, id: newId(), personId, name: 'Script', tokenHash: newId(), ending: 'wxyz', scopes: ['cases:read'], expiresAt: AT });
   await tx.insert(schema.idempotentAnswer).values({ ...of, personId, key: 'key', requestHash: 'hash', status: 200, at: AT });
+  await tx.insert(schema.adoptedLimit).values({ ...of, id: newId(), checkId: 'c', mostSi: 1, source: 'Ours', personId });
+  await tx.insert(schema.unitHold).values({ ...of, id: newId(), unitId, caseId, checkId: 'c', placedAt: AT });
   await tx.insert(schema.savedView).values({ ...of, id: newId(), personId, list: 'cases', name: 'Mine', query: 'whose=me' });
   await tx.insert(schema.removal).values({ ...of, id: newId(), entity: 'unit', entityId: unitId, kind: 'hide', reason: 'Test', personId, at: AT });
   await tx.insert(schema.audit).values({ ...of, id: newId(), action: 'test', entity: 'unit', entityId: unitId, changed: {} });

@@ -2,6 +2,7 @@
 export const ACTION_WORDS: Readonly<Record<string, string>> = {
   'accept.invitation': 'Accepted an invitation',
   'acknowledge.caution': 'Acknowledged a caution',
+  'adopt.limit': 'Adopted a limit',
   'add.photo': 'Added a photo',
   'add.site': 'Added a site',
   'add.unit-reading': 'Added a reading of a unit',
@@ -25,6 +26,7 @@ export const ACTION_WORDS: Readonly<Record<string, string>> = {
   'hide.unit': 'Hid a unit',
   'invite.person': 'Invited somebody',
   'mail.invitation': 'Mailed an invitation',
+  'lift.unit-hold': 'Lifted “do not release”',
   'make.thumbnail': 'Made the small picture of a photo',
   'mark.photo': 'Drew on a photo or described it',
   'note.finding': 'Noted something at an answer',
@@ -45,6 +47,7 @@ export const ACTION_WORDS: Readonly<Record<string, string>> = {
   'store.photo': 'Sent a photo’s file',
   'strike.unit-reading': 'Struck out a reading of a unit',
   'take-out.fit': 'Took a compressor out',
+  'withdraw.limit': 'Withdrew a limit',
   'withdraw.invitation': 'Withdrew an invitation',
 };
 
@@ -59,6 +62,7 @@ export const ENTITY_WORDS: Readonly<Record<string, string>> = {
   finding_note: 'Notes at answers',
   fit: 'Fits',
   invitation: 'Invitations',
+  limit: 'Limits',
   membership: 'Memberships',
   organisation: 'Organisation',
   person: 'People',
@@ -92,6 +96,7 @@ export function subjectOf({ entity, entityId, changed }: Written): { href: strin
   if (entity === 'fit' && typeof changed.unitId === 'string') return { href: `/units/${changed.unitId}/fits/${entityId}`, label: 'The fit' };
   if (entity === 'unit-reading' && typeof changed.unitId === 'string') return { href: `/units/${changed.unitId}`, label: 'The unit' };
   if (entity === 'compressor-model') return { href: `/models/${entityId}`, label: 'The model' };
+  if (entity === 'limit' && changed.withdrawn !== true) return { href: `/settings/limits/${entityId}`, label: 'The limit' };
   if (entity === 'site') return { href: `/settings/sites/${entityId}`, label: 'The site' };
   if (entity === 'membership') return { href: `/settings/people/${entityId}`, label: 'The person' };
   return null;

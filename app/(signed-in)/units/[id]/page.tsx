@@ -1,6 +1,5 @@
 import type { Metadata } from 'next';
 import Link from 'next/link';
-import { ReleaseHold } from '@/components/case/ReleaseHold';
 import { practiceFacts, spanFacts } from '@/components/fits/fit-facts';
 import { ButtonLink } from '@/components/ui/Button';
 import { DefinitionList } from '@/components/ui/DefinitionList';
@@ -8,6 +7,7 @@ import { Notice } from '@/components/ui/Notice';
 import { PageHeader } from '@/components/ui/PageHeader';
 import { Tag } from '@/components/ui/Tag';
 import { History } from '@/components/units/History';
+import { LiftedHolds, UnitHolds } from '@/components/units/UnitHolds';
 import { measureText } from '@/components/units/MeasureField';
 import { HideForm, ShowForm, StrikeReadingForm } from '@/components/units/ReasonForms';
 import { readingLabel, ReadingTable } from '@/components/units/ReadingTable';
@@ -18,7 +18,7 @@ import { UNIT_MEASURES } from '@/lib/schemas/measures';
 import { termLabel } from '@/lib/schemas/terms';
 import { readUnit, type UnitPage as UnitRecord } from '@/lib/services/unit/read';
 import type { UnitPreferences } from '@/lib/units';
-import { hideUnit, showUnit, strikeReading } from '../actions';
+import { hideUnit, liftHold, showUnit, strikeReading } from '../actions';
 
 export const metadata: Metadata = { title: 'Unit' };
 
@@ -53,7 +53,7 @@ export default async function UnitPage({ params }: { params: Promise<{ id: strin
           {hidden.reason}. It stands in no list and no search; its history stays.
         </Notice>
       )}
-      <ReleaseHold checks={[]} others={record.holds} linksToCases={may(ctx.roles, 'case.see')} />
+      <UnitHolds unitId={id} holds={record.holds} linksToCases={may(ctx.roles, 'case.see')} lift={ctx.mayRelease && may(ctx.roles, 'case.work') ? liftHold : null} />
       <div className="grid gap-x-14 gap-y-12 lg:grid-cols-[3fr_2fr]">
         <div className="grid min-w-0 content-start gap-12">
           <section aria-labelledby="history" className="min-w-0">
@@ -64,6 +64,7 @@ export default async function UnitPage({ params }: { params: Promise<{ id: strin
             <h2 id="readings">Odometer and engine hours</h2>
             <ReadingTable readings={readings} units={units} />
           </section>
+          <LiftedHolds lifted={record.lifted} linksToCases={may(ctx.roles, 'case.see')} />
         </div>
         <div className="grid content-start gap-12">
           <section aria-labelledby="facts">
