@@ -9,6 +9,7 @@ import type { InputText, Writing } from '@/lib/bench/read-texts';
 import { shown, shownValue } from '@/lib/bench/show';
 import { searchOfTexts, textsOfSearch } from '@/lib/bench/texts-in-url';
 import { siOf, workOut } from '@/lib/bench/work-out';
+import { CoverageNote } from './CoverageNote';
 import { Formula } from './Formula';
 import { SumFields } from './SumFields';
 import { SumPlot } from './SumPlot';
@@ -103,6 +104,7 @@ function Desk({ sum, search, known, writing, target }: DeskProps) {
         <section aria-labelledby="assumptions" className="grid content-start gap-3">
           <h2 id="assumptions">What it takes for granted</h2>
           <ul className="ml-5 grid max-w-prose list-disc gap-1">{sum.assumptions.map((line) => <li key={line}>{line}</li>)}</ul>
+          <CoverageNote {...{ sum, writing }} />
         </section>
         <section aria-labelledby="cannot-tell" className="grid content-start gap-3">
           <h2 id="cannot-tell">What it can’t tell</h2>
