@@ -85,7 +85,7 @@ function Desk({ sum, search, known, writing, target }: DeskProps) {
             <p className="mt-2 text-[0.9375rem]">The vehicle maker’s information, local rules and a qualified person’s judgement come first.</p>
           </Notice>
         )}
-        <SumTimer sum={sum} name={target ? `${target.caseId}/${sum.id}` : sum.id} onSeconds={(id, seconds) => onText(id, { ...texts[id], value: `${seconds.toFixed(1)} s` })} />
+        <SumTimer sum={sum} writing={writing} name={target ? `${target.caseId}/${sum.id}` : sum.id} onSeconds={(id, seconds) => onText(id, { ...texts[id], value: `${seconds.toFixed(1)} s` })} />
         <form onSubmit={(event) => event.preventDefault()} aria-label="Readings" className="grid gap-5">
           <SumFields {...{ sum, texts, writing, onText }} errors={worked.kind === 'refused' ? worked.errors : {}} known={fromWhere(known, texts, sum, writing)} />
         </form>
