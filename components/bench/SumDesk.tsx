@@ -10,11 +10,13 @@ import { shown, shownValue } from '@/lib/bench/show';
 import { searchOfTexts, textsOfSearch } from '@/lib/bench/texts-in-url';
 import { siOf, workOut } from '@/lib/bench/work-out';
 import { CoverageNote } from './CoverageNote';
+import { Foot } from './Foot';
 import { Formula } from './Formula';
 import { SumFields } from './SumFields';
 import { SumPlot } from './SumPlot';
 import { SumAtFoot, SumResult } from './SumResult';
 import { SumTimer } from './SumTimer';
+import { useKeypad } from './use-keypad';
 import { IntoCase, type CaseTarget } from './IntoCase';
 
 interface Props {
@@ -42,6 +44,7 @@ function Desk({ sum, search, known, writing, target }: DeskProps) {
   const begin = useCallback((from: Readonly<Record<string, string>>) => ({ ...usualTexts(sum, known, writing, target === null), ...textsOfSearch(sum, from, writing) }), [sum, known, writing, target]);
   const [texts, setTexts] = useState<Record<string, InputText>>(() => begin(search));
   const [touched, setTouched] = useState(false);
+  const keypad = useKeypad();
 
   useEffect(() => {
     // A page kept on the device was served for another query, or none.
@@ -86,10 +89,10 @@ function Desk({ sum, search, known, writing, target }: DeskProps) {
           </Notice>
         )}
         <SumTimer sum={sum} writing={writing} name={target ? `${target.caseId}/${sum.id}` : sum.id} onSeconds={(id, seconds) => onText(id, { ...texts[id], value: `${seconds.toFixed(1)} s` })} />
-        <form onSubmit={(event) => event.preventDefault()} aria-label="Readings" className="grid gap-5">
-          <SumFields {...{ sum, texts, writing, onText }} errors={worked.kind === 'refused' ? worked.errors : {}} known={fromWhere(known, texts, sum, writing)} />
+        <form onSubmit={(event) => event.preventDefault()} onFocus={keypad.onFocus} aria-label="Readings" className="grid gap-5">
+          <SumFields {...{ sum, texts, writing, onText }} inputMode={keypad.inputMode} errors={worked.kind === 'refused' ? worked.errors : {}} known={fromWhere(known, texts, sum, writing)} />
         </form>
-        <SumAtFoot {...{ sum, worked, writing }} />
+        <Foot keypad={keypad} decimalMark={writing.decimal ?? '.'}><SumAtFoot {...{ sum, worked, writing }} /></Foot>
       </div>
       <div className="grid min-w-0 content-start gap-8 lg:sticky lg:top-4 lg:self-start">
         <SumResult {...{ sum, worked, writing }} />

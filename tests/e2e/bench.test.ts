@@ -55,6 +55,30 @@ describe('the bench', () => {
     await other.context().close();
   });
 
+  it('takes a reading from the large keys at its foot, which stay where they are from field to field', async () => {
+    const phone = await (await browser.newContext({ ...PHONE, storageState: await context.storageState() })).newPage();
+    await phone.goto(`${url}/bench/time-loaded`);
+    await hydrated(phone);
+    const keypad = phone.getByRole('group', { name: 'Keypad' });
+    expect(await keypad.count()).toBe(0);
+    await phone.locator('#loaded').tap();
+    await phone.locator('#loaded').fill('');
+    for (const key of ['9', '0', '1']) await keypad.getByRole('button', { name: key, exact: true }).tap();
+    await phone.getByRole('button', { name: 'Delete the last character' }).tap();
+    expect(await phone.locator('#loaded').inputValue()).toBe('90');
+    const keys = await phone.locator('.keypad > button').evaluateAll((buttons) => buttons.map((button) => button.getBoundingClientRect()).map(({ width, height }) => Math.min(width, height)));
+    expect(Math.min(...keys)).toBeGreaterThanOrEqual(56);
+    const top = (await keypad.boundingBox())?.y;
+    await phone.locator('#unloaded').tap();
+    await phone.locator('#unloaded').fill('630');
+    expect((await keypad.boundingBox())?.y).toBe(top);
+    await expect.poll(() => result(phone).textContent()).toBe('12.5 %');
+    await phone.getByRole('button', { name: 'Keypad', exact: true }).tap();
+    expect(await keypad.count()).toBe(0);
+    expect(await phone.locator('#unloaded').getAttribute('inputmode')).toBe('decimal');
+    await phone.context().close();
+  });
+
   it('draws what the shape tells, with the same in words and as a table', async () => {
     await page.goto(`${url}/bench/head-pressure?narrowedBore=6+mm`);
     await page.locator('canvas').waitFor();
