@@ -1,13 +1,13 @@
 'use client';
 
-import { useCallback, useDeferredValue, useEffect, useMemo, useState } from 'react';
+import { useCallback, useDeferredValue, useMemo } from 'react';
 import { LiveRegion } from '@/components/ui/LiveRegion';
 import { Notice } from '@/components/ui/Notice';
 import { sumOf } from '@/lib/air-and-oil/sums';
 import type { Sum } from '@/lib/air-and-oil/sums/sum';
 import type { InputText, Writing } from '@/lib/bench/read-texts';
 import { shown, shownValue } from '@/lib/bench/show';
-import { searchOfTexts, textsOfSearch } from '@/lib/bench/texts-in-url';
+import { textsOfSearch } from '@/lib/bench/texts-in-url';
 import { siOf, workOut } from '@/lib/bench/work-out';
 import { CoverageNote } from './CoverageNote';
 import { Foot } from './Foot';
@@ -16,8 +16,9 @@ import { SumFields } from './SumFields';
 import { SumPlot } from './SumPlot';
 import { SumAtFoot, SumResult } from './SumResult';
 import { SumTimer } from './SumTimer';
-import { useKeypad } from './use-keypad';
 import { IntoCase, type CaseTarget } from './IntoCase';
+import { useKeypad } from './use-keypad';
+import { useTexts } from './use-texts';
 
 interface Props {
   sumId: string;
@@ -29,9 +30,6 @@ interface Props {
   target: CaseTarget | null;
 }
 
-/** How long after the last key the address follows. */
-const ADDRESS_AFTER_MS = 300;
-
 /** A sum of the bench: what goes in, and at once what comes out, with its doubt. */
 export function SumDesk({ sumId, search, known, writing, target }: Props) {
   const sum = sumOf(sumId);
@@ -42,33 +40,8 @@ type DeskProps = Omit<Props, 'sumId'> & { sum: Sum };
 
 function Desk({ sum, search, known, writing, target }: DeskProps) {
   const begin = useCallback((from: Readonly<Record<string, string>>) => ({ ...usualTexts(sum, known, writing, target === null), ...textsOfSearch(sum, from, writing) }), [sum, known, writing, target]);
-  const [texts, setTexts] = useState<Record<string, InputText>>(() => begin(search));
-  const [touched, setTouched] = useState(false);
+  const [texts, onText] = useTexts({ fields: sum, search, writing, begin });
   const keypad = useKeypad();
-
-  useEffect(() => {
-    // A page kept on the device was served for another query, or none.
-    const here = Object.fromEntries(new URLSearchParams(location.search));
-    if (sameSearch(here, search)) return;
-    const frame = requestAnimationFrame(() => setTexts(begin(here)));
-    return () => cancelAnimationFrame(frame);
-  }, [begin, search]);
-
-  useEffect(() => {
-    if (!touched) return;
-    const timer = setTimeout(() => {
-      const query = new URLSearchParams(location.search);
-      for (const { id } of sum.inputs) for (const key of [id, `${id}.error`]) query.delete(key);
-      for (const [key, text] of Object.entries(searchOfTexts(sum, texts, writing))) query.set(key, text);
-      history.replaceState(history.state, '', `${location.pathname}?${query}`);
-    }, ADDRESS_AFTER_MS);
-    return () => clearTimeout(timer);
-  }, [touched, texts, sum, writing]);
-
-  const onText = (id: string, text: InputText) => {
-    setTouched(true);
-    setTexts((held) => ({ ...held, [id]: text }));
-  };
 
   const worked = useMemo(() => workOut(sum, texts, writing), [sum, texts, writing]);
   // Typing comes first: the plot follows when there is time.
@@ -139,8 +112,3 @@ function fromWhere(known: Props['known'], texts: Readonly<Record<string, InputTe
     }),
   );
 }
-
-const sameSearch = (a: Readonly<Record<string, string>>, b: Readonly<Record<string, string>>) => {
-  const keys = new Set([...Object.keys(a), ...Object.keys(b)]);
-  return [...keys].every((key) => a[key] === b[key]);
-};

@@ -88,6 +88,18 @@ describe('the bench', () => {
     await expectNoAxeViolations(page);
   });
 
+  it('finds the sudden fall in a survey of the line, and keeps the survey in its address', async () => {
+    await page.goto(`${url}/bench/line-survey?${new URLSearchParams({ distance1: '0 ft', temperature1: '390 °F', distance2: '2 ft', temperature2: '375 °F', distance3: '4 ft', temperature3: '270 °F', distance4: '8 ft' })}`);
+    await hydrated();
+    await page.locator('#temperature4').fill('240');
+    await expect.poll(() => result().textContent()).toBe('A sudden fall');
+    await page.waitForURL(/temperature4=240/);
+    await page.locator('canvas').waitFor();
+    expect(await page.getByTestId('plot-summary').textContent()).toBe('Temperature of the line: from 390 °F at 0 ft to 240 °F at 8 ft, read at 4 points.');
+    await page.getByText('The same as a table').click();
+    await expectNoAxeViolations(page);
+  });
+
   it('keeps the clock’s time through a hidden page, slowed timers and a reload', async () => {
     await page.goto(`${url}/bench/leak-down`);
     await hydrated();
@@ -152,11 +164,14 @@ describe('the bench', () => {
   it('works without a connection, for readings that it was never opened with', async () => {
     await page.goto(`${url}/cases`);
     await untilCached(page, '/bench/carry-over-by-weight');
+    await untilCached(page, '/bench/line-survey');
     wire.cut();
     await page.goto(`${url}/bench/time-loaded?loaded=2+min&unloaded=6+min`);
     await expect.poll(() => result().textContent()).toBe('25 %');
     await page.locator('#unloaded').fill('2:00');
     await expect.poll(() => result().textContent()).toBe('50 %');
+    await page.goto(`${url}/bench/line-survey?distance2=1+ft&temperature2=300+%C2%B0F`);
+    await expect.poll(() => page.locator('#temperature2').inputValue()).toBe('300');
     wire.mend();
   });
 
