@@ -17,6 +17,7 @@ const DRAWS = 50_000;
 export const BAND_COVERAGE: Readonly<Record<string, BandCoverage>> = {
   'measured-build-up': { usual: 0.949, tripled: 0.948, draws: DRAWS },
   'build-up': { usual: 0.950, tripled: 0.949, draws: DRAWS },
+  'build-up-ratio': { usual: 0.950, tripled: 0.950, draws: DRAWS },
   'build-up-limit': { usual: 0.948, tripled: 0.948, draws: DRAWS },
   'leak-down': { usual: 0.948, tripled: 0.948, draws: DRAWS },
   'leak-size': { usual: 0.949, tripled: 0.947, draws: DRAWS },
