@@ -10,8 +10,8 @@ interface Props {
   /** What to press it at: "Start at 85 psi". */
   startLabel: string;
   stopLabel: string;
-  /** Pressures to mark on the way. */
-  marks?: readonly string[];
+  /** Pressures to mark on the way: under what each is kept, and what its key says. */
+  marks?: readonly { id: string; label: string }[];
   /** The time once it is stopped, in seconds. */
   onTime: (seconds: number) => void;
 }
@@ -40,10 +40,10 @@ export function Stopwatch({ name, startLabel, stopLabel, marks = [], onTime }: P
       </Button>
       {marks.length > 0 && (
         <div role="group" aria-label="Pressures on the way" className="grid grid-cols-[repeat(auto-fit,minmax(5.5rem,1fr))] gap-2">
-          {marks.map((label) => {
-            const at = passed.find((split) => split.label === label);
+          {marks.map(({ id, label }) => {
+            const at = passed.find((split) => split.id === id);
             return (
-              <Button key={label} variant="quiet" className="min-h-14!" aria-disabled={!running || at !== undefined || undefined} onClick={() => running && !at && mark(label)}>
+              <Button key={id} variant="quiet" className="min-h-14!" aria-disabled={!running || at !== undefined || undefined} onClick={() => running && !at && mark(id)}>
                 <span className="grid">
                   <span>{label}</span>
                   {at && <span className="figure text-[0.9375rem]">{clockFace(at.ms)}</span>}

@@ -1,20 +1,24 @@
 'use client';
 
-import { useCallback, useDeferredValue, useEffect, useMemo, useState } from 'react';
+import { useCallback, useDeferredValue, useMemo } from 'react';
 import { LiveRegion } from '@/components/ui/LiveRegion';
 import { Notice } from '@/components/ui/Notice';
 import { sumOf } from '@/lib/air-and-oil/sums';
 import type { Sum } from '@/lib/air-and-oil/sums/sum';
 import type { InputText, Writing } from '@/lib/bench/read-texts';
 import { shown, shownValue } from '@/lib/bench/show';
-import { searchOfTexts, textsOfSearch } from '@/lib/bench/texts-in-url';
+import { textsOfSearch } from '@/lib/bench/texts-in-url';
 import { siOf, workOut } from '@/lib/bench/work-out';
+import { CoverageNote } from './CoverageNote';
+import { Foot } from './Foot';
 import { Formula } from './Formula';
 import { SumFields } from './SumFields';
 import { SumPlot } from './SumPlot';
 import { SumAtFoot, SumResult } from './SumResult';
 import { SumTimer } from './SumTimer';
 import { IntoCase, type CaseTarget } from './IntoCase';
+import { useKeypad } from './use-keypad';
+import { useTexts } from './use-texts';
 
 interface Props {
   sumId: string;
@@ -26,9 +30,6 @@ interface Props {
   target: CaseTarget | null;
 }
 
-/** How long after the last key the address follows. */
-const ADDRESS_AFTER_MS = 300;
-
 /** A sum of the bench: what goes in, and at once what comes out, with its doubt. */
 export function SumDesk({ sumId, search, known, writing, target }: Props) {
   const sum = sumOf(sumId);
@@ -39,32 +40,8 @@ type DeskProps = Omit<Props, 'sumId'> & { sum: Sum };
 
 function Desk({ sum, search, known, writing, target }: DeskProps) {
   const begin = useCallback((from: Readonly<Record<string, string>>) => ({ ...usualTexts(sum, known, writing, target === null), ...textsOfSearch(sum, from, writing) }), [sum, known, writing, target]);
-  const [texts, setTexts] = useState<Record<string, InputText>>(() => begin(search));
-  const [touched, setTouched] = useState(false);
-
-  useEffect(() => {
-    // A page kept on the device was served for another query, or none.
-    const here = Object.fromEntries(new URLSearchParams(location.search));
-    if (sameSearch(here, search)) return;
-    const frame = requestAnimationFrame(() => setTexts(begin(here)));
-    return () => cancelAnimationFrame(frame);
-  }, [begin, search]);
-
-  useEffect(() => {
-    if (!touched) return;
-    const timer = setTimeout(() => {
-      const query = new URLSearchParams(location.search);
-      for (const { id } of sum.inputs) for (const key of [id, `${id}.error`]) query.delete(key);
-      for (const [key, text] of Object.entries(searchOfTexts(sum, texts, writing))) query.set(key, text);
-      history.replaceState(history.state, '', `${location.pathname}?${query}`);
-    }, ADDRESS_AFTER_MS);
-    return () => clearTimeout(timer);
-  }, [touched, texts, sum, writing]);
-
-  const onText = (id: string, text: InputText) => {
-    setTouched(true);
-    setTexts((held) => ({ ...held, [id]: text }));
-  };
+  const [texts, onText] = useTexts({ fields: sum, search, writing, begin });
+  const keypad = useKeypad();
 
   const worked = useMemo(() => workOut(sum, texts, writing), [sum, texts, writing]);
   // Typing comes first: the plot follows when there is time.
@@ -84,11 +61,11 @@ function Desk({ sum, search, known, writing, target }: DeskProps) {
             <p className="mt-2 text-[0.9375rem]">The vehicle maker’s information, local rules and a qualified person’s judgement come first.</p>
           </Notice>
         )}
-        <SumTimer sum={sum} name={target ? `${target.caseId}/${sum.id}` : sum.id} onSeconds={(id, seconds) => onText(id, { ...texts[id], value: `${seconds.toFixed(1)} s` })} />
-        <form onSubmit={(event) => event.preventDefault()} aria-label="Readings" className="grid gap-5">
-          <SumFields {...{ sum, texts, writing, onText }} errors={worked.kind === 'refused' ? worked.errors : {}} known={fromWhere(known, texts, sum, writing)} />
+        <SumTimer sum={sum} writing={writing} name={target ? `${target.caseId}/${sum.id}` : sum.id} onSeconds={(id, seconds) => onText(id, { ...texts[id], value: `${seconds.toFixed(1)} s` })} />
+        <form onSubmit={(event) => event.preventDefault()} onFocus={keypad.onFocus} aria-label="Readings" className="grid gap-5">
+          <SumFields {...{ sum, texts, writing, onText }} inputMode={keypad.inputMode} errors={worked.kind === 'refused' ? worked.errors : {}} known={fromWhere(known, texts, sum, writing)} />
         </form>
-        <SumAtFoot {...{ sum, worked, writing }} />
+        <Foot keypad={keypad} decimalMark={writing.decimal ?? '.'}><SumAtFoot {...{ sum, worked, writing }} /></Foot>
       </div>
       <div className="grid min-w-0 content-start gap-8 lg:sticky lg:top-4 lg:self-start">
         <SumResult {...{ sum, worked, writing }} />
@@ -103,6 +80,7 @@ function Desk({ sum, search, known, writing, target }: DeskProps) {
         <section aria-labelledby="assumptions" className="grid content-start gap-3">
           <h2 id="assumptions">What it takes for granted</h2>
           <ul className="ml-5 grid max-w-prose list-disc gap-1">{sum.assumptions.map((line) => <li key={line}>{line}</li>)}</ul>
+          <CoverageNote {...{ sum, writing }} />
         </section>
         <section aria-labelledby="cannot-tell" className="grid content-start gap-3">
           <h2 id="cannot-tell">What it can’t tell</h2>
@@ -134,8 +112,3 @@ function fromWhere(known: Props['known'], texts: Readonly<Record<string, InputTe
     }),
   );
 }
-
-const sameSearch = (a: Readonly<Record<string, string>>, b: Readonly<Record<string, string>>) => {
-  const keys = new Set([...Object.keys(a), ...Object.keys(b)]);
-  return [...keys].every((key) => a[key] === b[key]);
-};

@@ -14,15 +14,17 @@ interface Props {
   /** Where the value of an input comes from, when it wasn't typed: "from the unit's record". */
   known: Readonly<Record<string, string>>;
   writing: Writing;
+  /** What the device's own keyboard is to be; 'none' while the large keys stand for it. */
+  inputMode: 'decimal' | 'none';
   onText: (inputId: string, text: InputText) => void;
 }
 
 /** What a sum takes: each reading with its unit, and beside it how far it can be off. */
-export function SumFields({ sum, texts, errors, known, writing, onText }: Props) {
+export function SumFields({ sum, texts, errors, known, writing, inputMode, onText }: Props) {
   return (
     <div className="grid gap-5">
       {sum.inputs.map((input) => (
-        <Reading key={input.id} {...{ input, errors, writing }} from={known[input.id]} text={texts[input.id] ?? {}} onText={(text) => onText(input.id, text)} />
+        <Reading key={input.id} {...{ input, errors, writing, inputMode }} from={known[input.id]} text={texts[input.id] ?? {}} onText={(text) => onText(input.id, text)} />
       ))}
     </div>
   );
@@ -34,10 +36,11 @@ interface ReadingProps {
   errors: Readonly<Record<string, string>>;
   from?: string;
   writing: Writing;
+  inputMode: Props['inputMode'];
   onText: (text: InputText) => void;
 }
 
-function Reading({ input, text, errors, from, writing, onText }: ReadingProps) {
+function Reading({ input, text, errors, from, writing, inputMode, onText }: ReadingProps) {
   const { id, label, note, optional, byDefault, halfWidth } = input;
   const { unit, difference } = unitsOfInput(input, writing.units);
   const symbol = symbolOf(input, writing);
@@ -55,7 +58,7 @@ function Reading({ input, text, errors, from, writing, onText }: ReadingProps) {
         <span className="flex min-w-0 flex-[1_1_9rem] max-w-64 gap-2">
           <input
             type="text"
-            inputMode="decimal"
+            inputMode={inputMode}
             autoComplete="off"
             className="control figure min-w-0 flex-1 text-right"
             value={text.value ?? ''}
@@ -70,7 +73,7 @@ function Reading({ input, text, errors, from, writing, onText }: ReadingProps) {
           <span className="sr-only">{label}: how far it can be off</span>
           <input
             type="text"
-            inputMode="decimal"
+            inputMode={inputMode}
             autoComplete="off"
             className="control figure w-24! text-right"
             placeholder={usual}

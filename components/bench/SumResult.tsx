@@ -65,14 +65,14 @@ function BandText({ sum, worked, writing }: Props) {
   );
 }
 
-/** The answer at the foot of a phone's screen, in sight while one types; a wide screen has it beside the readings. */
+/** The answer in one line, in sight at the foot of a phone's screen while one types; a wide screen has it beside the readings. */
 export function SumAtFoot({ sum, worked, writing }: Props) {
   const main = sum.outputs.find(({ id }) => id === sum.main);
   if (!main) return null;
   const value = worked.kind === 'values' ? worked.values[main.id] : undefined;
   const band = worked.kind === 'values' ? worked.band : undefined;
   return (
-    <p aria-hidden="true" className="sticky bottom-0 z-10 -mx-4 flex min-h-touch items-center justify-between gap-4 border-t-2 border-ink bg-paper px-4 py-2 sm:-mx-6 sm:px-6 lg:hidden print:hidden">
+    <p aria-hidden="true" className="flex min-h-touch items-center justify-between gap-4 py-2 lg:hidden">
       <span className="leading-tight">{main.label}</span>
       <span className="figure text-right leading-tight whitespace-nowrap">
         <b>{value === undefined ? (worked.kind === 'never' ? 'Never' : NOTHING) : shown(value, main, writing)}</b>

@@ -10,7 +10,7 @@ export interface StopwatchHandle {
   elapsed: number | undefined;
   start: () => void;
   stop: () => number | undefined;
-  mark: (label: string) => void;
+  mark: (id: string) => void;
   clear: () => void;
 }
 
@@ -39,7 +39,7 @@ export function useStopwatch(name: string): StopwatchHandle {
       keepStopwatch(name, stopped(stopwatch(name), at));
       return elapsedMs(stopwatch(name), at);
     },
-    mark: (label) => keepStopwatch(name, marked(stopwatch(name), label, Date.now())),
+    mark: (id) => keepStopwatch(name, marked(stopwatch(name), id, Date.now())),
     clear: () => keepStopwatch(name, IDLE),
   };
 }

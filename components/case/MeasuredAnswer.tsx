@@ -1,13 +1,14 @@
 'use client';
 
-import { useRef, useState, useSyncExternalStore, type FocusEvent } from 'react';
+import { useRef, useState, type FocusEvent } from 'react';
 import { Button } from '@/components/ui/Button';
+import { Keypad } from '@/components/ui/Keypad';
 import { NumberWithUnitField } from '@/components/ui/NumberWithUnitField';
+import { useMedia } from '@/components/ui/use-media';
 import type { AnswerInput } from '@/lib/schemas/case';
 import type { CheckView } from '@/lib/schemas/case-view';
 import { SurenessChoice } from './ChoiceAnswers';
 import { Dock } from './Dock';
-import { Keypad } from './Keypad';
 
 interface Props {
   check: CheckView;
@@ -22,7 +23,7 @@ interface Props {
 /** A measured value with its unit and the error of the instrument, as people type them or tap them. */
 export function MeasuredAnswer({ check, pending, errors, decimalMark, onAnswer, onUndo }: Props) {
   const [sureness, setSureness] = useState<'sure' | 'think-so'>('sure');
-  const touch = useTouch();
+  const touch = useMedia('(pointer: coarse)');
   // Undefined until somebody asks: then the pointer decides, in the style sheet, before any script has run.
   const [asked, setAsked] = useState<boolean>();
   const keypad = asked ?? touch;
@@ -80,11 +81,3 @@ export function MeasuredAnswer({ check, pending, errors, decimalMark, onAnswer, 
     </form>
   );
 }
-
-const query = '(pointer: coarse)';
-function onTouch(changed: () => void): () => void {
-  const media = matchMedia(query);
-  media.addEventListener('change', changed);
-  return () => media.removeEventListener('change', changed);
-}
-const useTouch = () => useSyncExternalStore(onTouch, () => matchMedia(query).matches, () => false);

@@ -13,8 +13,8 @@ export interface LinePlotProps {
   series: readonly { label: string; points: readonly { x: number; y: number }[] }[];
   /** Straight across. */
   marks: readonly { label: string; y: number }[];
-  /** Where one stands, on the x axis. */
-  here: number;
+  /** Where one stands, on the x axis; none for lines through what was measured, which have dots instead. */
+  here?: number;
 }
 
 /** Lines over one quantity, in the inks of the page. It is for the eye: words and a table beside it say the same. */
@@ -24,7 +24,7 @@ export default function LinePlot({ xLabel, yLabel, series, marks, here }: LinePl
     const [first] = series;
     const xs = first?.points.map(({ x }) => x) ?? [];
     const [from, to] = [Math.min(...xs), Math.max(...xs)];
-    const nearest = first?.points.reduce<{ x: number; y: number } | undefined>((held, point) => (held && Math.abs(held.x - here) <= Math.abs(point.x - here) ? held : point), undefined);
+    const nearest = here === undefined ? undefined : first?.points.reduce<{ x: number; y: number } | undefined>((held, point) => (held && Math.abs(held.x - here) <= Math.abs(point.x - here) ? held : point), undefined);
     return {
       datasets: [
         ...series.map(({ label, points }, index) => ({
@@ -33,7 +33,8 @@ export default function LinePlot({ xLabel, yLabel, series, marks, here }: LinePl
           borderColor: index === 0 ? inks.oil : inks.ink,
           borderWidth: 3,
           borderDash: index === 0 ? [] : [2, 3],
-          pointRadius: 0,
+          pointRadius: here === undefined ? 5 : 0,
+          pointBackgroundColor: inks.ink,
         })),
         ...marks.map(({ label, y }) => ({ label, data: [{ x: from, y }, { x: to, y }], borderColor: inks.ink, borderWidth: 1.5, borderDash: [8, 5], pointRadius: 0 })),
         ...(nearest ? [{ label: 'Your readings', data: [nearest], borderColor: inks.ink, backgroundColor: inks.ink, pointRadius: 7, pointStyle: 'rectRot' as const, showLine: false }] : []),

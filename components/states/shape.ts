@@ -28,6 +28,7 @@ export const PAGES: readonly Page[] = [
   { route: 'models/[id]/edit', shape: 'form', what: 'the form' },
   { route: 'bench', shape: 'list', what: 'the sums' },
   { route: 'bench/[sum]', shape: 'form', what: 'the sum' },
+  { route: 'bench/line-survey', shape: 'form', what: 'the survey' },
   { route: 'not-allowed', shape: 'form', what: 'the page' },
   { route: 'settings', shape: 'form', what: 'your settings' },
   { route: 'settings/profile', shape: 'form', what: 'your settings' },

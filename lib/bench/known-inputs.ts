@@ -31,6 +31,7 @@ const INPUTS: Readonly<Record<string, Readonly<Record<string, FactName>>>> = {
   'measured-build-up': { actualVolume: 'reservoirM3', requiredVolume: 'requiredReservoirM3' },
   'build-up-limit': { actualVolume: 'reservoirM3', requiredVolume: 'requiredReservoirM3' },
   'build-up': { volume: 'reservoirM3' },
+  'build-up-ratio': { volume: 'reservoirM3' },
   'leak-down': { volume: 'reservoirM3' },
   delivery: { bore: 'boreM', stroke: 'strokeM', cylinders: 'cylinders', driveRatio: 'driveRatio' },
   'break-in-bleed': { displacement: 'displacementM3', driveRatio: 'driveRatio' },

@@ -44,7 +44,7 @@ export function unitsOfInput({ quantity, like }: Pick<SumInput, 'quantity' | 'li
  *
  * @example readTexts(sumOf('time-loaded'), { loaded: { value: '1:30' } }, { units: US_UNITS })
  */
-export function readTexts(sum: Sum, texts: SumTexts, writing: Writing): ReadTexts {
+export function readTexts(sum: Pick<Sum, 'inputs'>, texts: SumTexts, writing: Writing): ReadTexts {
   const errors: Record<string, string> = {};
   const inputs = sum.inputs.flatMap((input) => {
     const { value, halfWidth } = readInput(input, texts[input.id] ?? {}, writing);

@@ -3,6 +3,9 @@ import type { Sum } from '@/lib/air-and-oil/sums/sum';
 import { differenceOf, formatQuantity, formatValue, parseQuantity, type Quantity, type UnitId, type UnitOf } from '@/lib/units';
 import { unitsOfInput, type InputText, type SumTexts, type UsedInput, type Writing } from './read-texts';
 
+/** A sum, or whatever else has inputs. */
+type Fields = Pick<Sum, 'inputs'>;
+
 type Search = Readonly<Record<string, string | undefined>>;
 
 /** Figures enough to type a reading again, and few enough that the noise of a conversion is not among them. */
@@ -14,7 +17,7 @@ const FIGURES = 10;
  *
  * @example searchOfTexts(sum, { volume: { value: '3' } }, { units: US_UNITS }) // { volume: '3 ft³' }
  */
-export function searchOfTexts(sum: Sum, texts: SumTexts, writing: Writing): Record<string, string> {
+export function searchOfTexts(sum: Fields, texts: SumTexts, writing: Writing): Record<string, string> {
   return Object.fromEntries(
     fields(sum, writing).flatMap(({ input, key, part, ...measure }) => {
       const text = texts[input.id]?.[part]?.trim() ?? '';
@@ -28,7 +31,7 @@ export function searchOfTexts(sum: Sum, texts: SumTexts, writing: Writing): Reco
  *
  * @param search by name; what the sum has no input for is ignored
  */
-export function textsOfSearch(sum: Sum, search: Search, writing: Writing): Record<string, InputText> {
+export function textsOfSearch(sum: Fields, search: Search, writing: Writing): Record<string, InputText> {
   const texts: Record<string, InputText> = {};
   for (const { input, key, part, ...measure } of fields(sum, writing)) {
     const text = search[key];
@@ -42,7 +45,7 @@ interface Measure {
   unit: UnitId;
 }
 
-const fields = (sum: Sum, { units }: Writing) =>
+const fields = (sum: Fields, { units }: Writing) =>
   sum.inputs.flatMap((input) => {
     const { unit, difference } = unitsOfInput(input, units);
     return [

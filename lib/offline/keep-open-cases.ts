@@ -7,7 +7,7 @@ import { askRanker } from './ranker';
 import { refreshKit } from './refresh-kit';
 
 /** The bench is the same for everybody, and fetched once; a visit fetches it anew. */
-const BENCH = ['/bench', ...GROUPS.flatMap(({ sums }) => sums.map((id) => `/bench/${id}`))];
+const BENCH = ['/bench', ...GROUPS.flatMap(({ sums, others = [] }) => [...sums, ...others.map(({ id }) => id)].map((id) => `/bench/${id}`))];
 
 /** In the device's own store: which cases it could go on with. */
 const KEPT_CASES = 'kept-cases';

@@ -12,7 +12,8 @@ export interface Stopwatch {
 }
 
 export interface Mark {
-  readonly label: string;
+  /** What was passed, as it is kept: never how a person reads it, who may change units meanwhile. */
+  readonly id: string;
   readonly at: number;
 }
 
@@ -27,8 +28,8 @@ export const started = (now: number): Stopwatch => ({ startedAt: now, stoppedAt:
 export const stopped = (watch: Stopwatch, now: number): Stopwatch => (isRunning(watch) ? { ...watch, stoppedAt: now } : watch);
 
 /** Notes when something was passed, in one that runs; any other stays as it is. */
-export const marked = (watch: Stopwatch, label: string, now: number): Stopwatch =>
-  isRunning(watch) ? { ...watch, marks: [...watch.marks, { label, at: now }] } : watch;
+export const marked = (watch: Stopwatch, id: string, now: number): Stopwatch =>
+  isRunning(watch) ? { ...watch, marks: [...watch.marks, { id, at: now }] } : watch;
 
 /**
  * How long it ran, or has run so far.
@@ -45,8 +46,8 @@ export function elapsedMs({ startedAt, stoppedAt }: Stopwatch, now: number): num
 }
 
 /** From the start to each mark, in ms. */
-export const splits = ({ startedAt, marks }: Stopwatch): { label: string; ms: number }[] =>
-  startedAt === null ? [] : marks.map(({ label, at }) => ({ label, ms: at - startedAt }));
+export const splits = ({ startedAt, marks }: Stopwatch): { id: string; ms: number }[] =>
+  startedAt === null ? [] : marks.map(({ id, at }) => ({ id, ms: at - startedAt }));
 
 /**
  * As a stopwatch shows it: tenths below an hour, seconds above.
@@ -67,7 +68,9 @@ export function readStopwatch(text: string | null): Stopwatch {
     const { startedAt, stoppedAt, marks } = JSON.parse(text ?? '') as Record<keyof Stopwatch, unknown>;
     const instant = (value: unknown): value is number | null => value === null || Number.isFinite(value);
     if (!instant(startedAt) || !instant(stoppedAt) || !Array.isArray(marks)) return IDLE;
-    return { startedAt, stoppedAt, marks: (marks as Mark[]).filter(({ label, at }) => typeof label === 'string' && Number.isFinite(at)) };
+    // Marks were once kept by the words on their keys, which are the ids of today.
+    const read = (marks as (Partial<Mark> & { label?: unknown })[]).map(({ id, label, at }) => ({ id: id ?? label, at }));
+    return { startedAt, stoppedAt, marks: read.filter((mark): mark is Mark => typeof mark.id === 'string' && Number.isFinite(mark.at)) };
   } catch {
     return IDLE;
   }

@@ -80,6 +80,8 @@ export const SHOTS: readonly Shot[] = [
   shot(`${IN}/bench/[sum]`, 'bench-head-pressure', 'technician', '/bench/head-pressure?narrowedBore=6+mm'),
   shot(`${IN}/bench/[sum]`, 'bench-never', 'technician', '/bench/build-up?delivery=5+cfm&leak=6+cfm'),
   shot(`${IN}/bench/[sum]`, 'bench-refused', 'technician', '/bench/leak-down?volume=three&time=2+psi'),
+  shot(`${IN}/bench/line-survey`, 'bench-line-survey-empty', 'technician', '/bench/line-survey'),
+  shot(`${IN}/bench/line-survey`, 'bench-line-survey', 'technician', `/bench/line-survey?${new URLSearchParams({ distance1: '0 ft', temperature1: '390 °F', distance2: '2 ft', temperature2: '375 °F', distance3: '4 ft', temperature3: '270 °F', distance4: '8 ft', temperature4: '240 °F' })}`),
   shot(`${IN}/bench/[sum]`, 'bench-sum-not-found', 'technician', '/bench/no-such-sum'),
 
   shot(`${IN}/not-allowed`, 'not-allowed', 'trainer', '/not-allowed'),

@@ -55,12 +55,48 @@ describe('the bench', () => {
     await other.context().close();
   });
 
+  it('takes a reading from the large keys at its foot, which stay where they are from field to field', async () => {
+    const phone = await (await browser.newContext({ ...PHONE, storageState: await context.storageState() })).newPage();
+    await phone.goto(`${url}/bench/time-loaded`);
+    await hydrated(phone);
+    const keypad = phone.getByRole('group', { name: 'Keypad' });
+    expect(await keypad.count()).toBe(0);
+    await phone.locator('#loaded').tap();
+    await phone.locator('#loaded').fill('');
+    for (const key of ['9', '0', '1']) await keypad.getByRole('button', { name: key, exact: true }).tap();
+    await phone.getByRole('button', { name: 'Delete the last character' }).tap();
+    expect(await phone.locator('#loaded').inputValue()).toBe('90');
+    const keys = await phone.locator('.keypad > button').evaluateAll((buttons) => buttons.map((button) => button.getBoundingClientRect()).map(({ width, height }) => Math.min(width, height)));
+    expect(Math.min(...keys)).toBeGreaterThanOrEqual(56);
+    const top = (await keypad.boundingBox())?.y;
+    await phone.locator('#unloaded').tap();
+    await phone.locator('#unloaded').fill('630');
+    expect((await keypad.boundingBox())?.y).toBe(top);
+    await expect.poll(() => result(phone).textContent()).toBe('12.5 %');
+    await phone.getByRole('button', { name: 'Keypad', exact: true }).tap();
+    expect(await keypad.count()).toBe(0);
+    expect(await phone.locator('#unloaded').getAttribute('inputmode')).toBe('decimal');
+    await phone.context().close();
+  });
+
   it('draws what the shape tells, with the same in words and as a table', async () => {
     await page.goto(`${url}/bench/head-pressure?narrowedBore=6+mm`);
     await page.locator('canvas').waitFor();
     expect(await page.getByTestId('plot-summary').textContent()).toMatch(/^Pressure at the head: from .+ to .+/);
     await page.getByText('The same as a table').click();
     expect(await page.getByRole('row').count()).toBeGreaterThan(8);
+    await expectNoAxeViolations(page);
+  });
+
+  it('finds the sudden fall in a survey of the line, and keeps the survey in its address', async () => {
+    await page.goto(`${url}/bench/line-survey?${new URLSearchParams({ distance1: '0 ft', temperature1: '390 °F', distance2: '2 ft', temperature2: '375 °F', distance3: '4 ft', temperature3: '270 °F', distance4: '8 ft' })}`);
+    await hydrated();
+    await page.locator('#temperature4').fill('240');
+    await expect.poll(() => result().textContent()).toBe('A sudden fall');
+    await page.waitForURL(/temperature4=240/);
+    await page.locator('canvas').waitFor();
+    expect(await page.getByTestId('plot-summary').textContent()).toBe('Temperature of the line: from 390 °F at 0 ft to 240 °F at 8 ft, read at 4 points.');
+    await page.getByText('The same as a table').click();
     await expectNoAxeViolations(page);
   });
 
@@ -128,11 +164,14 @@ describe('the bench', () => {
   it('works without a connection, for readings that it was never opened with', async () => {
     await page.goto(`${url}/cases`);
     await untilCached(page, '/bench/carry-over-by-weight');
+    await untilCached(page, '/bench/line-survey');
     wire.cut();
     await page.goto(`${url}/bench/time-loaded?loaded=2+min&unloaded=6+min`);
     await expect.poll(() => result().textContent()).toBe('25 %');
     await page.locator('#unloaded').fill('2:00');
     await expect.poll(() => result().textContent()).toBe('50 %');
+    await page.goto(`${url}/bench/line-survey?distance2=1+ft&temperature2=300+%C2%B0F`);
+    await expect.poll(() => page.locator('#temperature2').inputValue()).toBe('300');
     wire.mend();
   });
 

@@ -14,11 +14,11 @@ export default async function BenchPage() {
     <>
       <PageHeader title="Bench" lead="Sums for what you measured, each with its doubt. They work without a connection once you have opened them." />
       <div className="grid gap-10">
-        {GROUPS.map(({ name, sums }) => (
+        {GROUPS.map(({ name, sums, others = [] }) => (
           <section key={name} aria-labelledby={`group-${sums[0]}`} className="grid gap-3">
             <h2 id={`group-${sums[0]}`}>{name}</h2>
             <ul className="grid gap-x-12 border-t-2 border-ink lg:grid-cols-2">
-              {sums.flatMap((id) => SUMS.find((sum) => sum.id === id) ?? []).map(({ id, name: title, purpose }) => (
+              {[...sums.flatMap((id) => SUMS.find((sum) => sum.id === id) ?? []), ...others].map(({ id, name: title, purpose }) => (
                 <li key={id} className="border-b border-rule">
                   <Link href={`/bench/${id}`} className="grid min-h-touch gap-0.5 py-3 no-underline hover:bg-sunk">
                     <span className="heading text-[1.1875rem] underline underline-offset-4">{title}</span>

@@ -1,6 +1,7 @@
 /** The sums of the bench, each with all that a page, the API or a rulebook needs to drive it without knowing it. */
 import { breakInBleed } from './break-in-bleed';
 import { buildUp, buildUpLimit, requiredReservoir } from './build-up';
+import { buildUpRatio } from './build-up-ratio';
 import { carryOver, carryOverByWeight } from './carry-over';
 import { delivery } from './delivery';
 import { compressionIndex, dischargeTemperature } from './discharge-temperature';
@@ -21,6 +22,7 @@ export type { Outcome, Plot, Sum, SumInput, SumQuantity, Values } from './sum';
 export const SUMS: readonly Sum[] = [
   measuredBuildUp,
   buildUp,
+  buildUpRatio,
   buildUpLimit,
   requiredReservoir,
   leakDown,

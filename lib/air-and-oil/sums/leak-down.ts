@@ -26,7 +26,7 @@ export const leakDown = defineSum({
       least: -60,
       most: 300,
       off: 0.25,
-      note: 'On the skin of a tank, both times at the same spot. A tank of 120 °F that cools by 20 °F loses 4.6 psi without any leak: let it settle first.',
+      note: 'On the skin of a tank, both times at the same spot.',
     }),
     endTemperature: input('Tanks at the end', 'T_e', 'temperature', 'degF', { optional: true, byDefault: 70, least: -60, most: 300, off: 0.25 }),
     delivery: { ...deliveryFlow, optional: true },

@@ -67,6 +67,24 @@ describe('what was typed', () => {
   });
 });
 
+describe('a build-up put beside what is expected', () => {
+  const typed = (more: Record<string, { value: string }> = {}) => ({ time: { value: '30.6 s' }, volume: { value: '3 ft3' }, delivery: { value: '12 cfm' }, ...more });
+  const ratio = (more?: Record<string, { value: string }>) => {
+    const worked = workOut(sum('build-up-ratio'), typed(more), US);
+    return worked.kind === 'values' ? worked.values.ratio : worked;
+  };
+
+  test('is twice where 3 ft³ at 12 cfm take 30.6 s over 15 psi: 15.3 s are expected', () => {
+    // 3 ft3 x 15 psi / (12 cfm x 14.696 psi) = 0.2552 min
+    expect(ratio()).toBeCloseTo(30.6 / (((3 * 15) / (12 * 14.6959)) * 60), 4);
+  });
+
+  test('expects more time where it leaks, and none where all leaks away', () => {
+    expect(ratio({ leak: { value: '6 cfm' } })).toBeCloseTo(Number(ratio()) / 2, 9);
+    expect(ratio({ leak: { value: '12 cfm' } })).toMatchObject({ kind: 'never', because: expect.stringContaining('never fill') as string });
+  });
+});
+
 describe('the address of a sum', () => {
   test('says the same to somebody who set other units', () => {
     for (const one of SUMS) {

@@ -19,7 +19,7 @@ describe('a stopwatch', () => {
 
   test('marks what is passed, while it runs only', () => {
     const watch = marked(marked(started(500), '90 psi', 5_500), '95 psi', 10_700);
-    expect(splits(watch)).toEqual([{ label: '90 psi', ms: 5_000 }, { label: '95 psi', ms: 10_200 }]);
+    expect(splits(watch)).toEqual([{ id: '90 psi', ms: 5_000 }, { id: '95 psi', ms: 10_200 }]);
     const done = stopped(watch, 16_000);
     expect(marked(done, '110 psi', 17_000)).toBe(done);
     expect(marked(IDLE, '85 psi', 1)).toBe(IDLE);
@@ -29,6 +29,12 @@ describe('a stopwatch', () => {
     const watch = marked(started(1), 'a', 2);
     expect(readStopwatch(JSON.stringify(watch))).toEqual(watch);
     expect(isRunning(readStopwatch(JSON.stringify(watch)))).toBe(true);
+  });
+
+  test('reads marks that were kept by their words, and leaves out what is none', () => {
+    const kept = { startedAt: 0, stoppedAt: null, marks: [{ label: '90 psi', at: 5_000 }, { id: '95 psi', at: 9_000 }, { at: 1 }, { id: 'x', at: 'late' }] };
+    expect(splits(readStopwatch(JSON.stringify(kept)))).toEqual([{ id: '90 psi', ms: 5_000 }, { id: '95 psi', ms: 9_000 }]);
+    expect(readStopwatch('{"startedAt":0,"stoppedAt":null,"marks":[null]}')).toEqual(IDLE);
   });
 
   test.each(['', 'null', '{', '[]', '{"startedAt":"soon","stoppedAt":null,"marks":[]}', '{"startedAt":1}'])('reads %j as not started', (text) => {

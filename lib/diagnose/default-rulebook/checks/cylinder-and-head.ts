@@ -1,10 +1,10 @@
 import { commonPractice, judgement } from '../basis';
-import { kelvins, seconds } from '../si';
+import { kelvins, percent, seconds } from '../si';
 import type { Check } from '../../types';
 import { check, yesNo, WITH_THE_HEAD_OFF } from './check';
 
 /** What can't be measured any more once the head is off. */
-const SPOILED_BY_LIFTING_THE_HEAD = ['head-temperature', 'build-up-time', 'blow-back-at-intake', 'coolant-bubbles', 'coolant-rise'];
+const SPOILED_BY_LIFTING_THE_HEAD = ['head-temperature', 'build-up-time', 'build-up-against-expected', 'blow-back-at-intake', 'coolant-bubbles', 'coolant-rise'];
 
 const atWork: Check[] = [
   check({
@@ -56,6 +56,35 @@ const atWork: Check[] = [
     basis: 'regulation',
     source:
       '49 CFR 571.121 S5.1.1 (25 s x actual / required reservoir volume; binds new vehicles, a reference in service); 45 s: model commercial driver manual, section 5.',
+  }),
+  check({
+    id: 'build-up-against-expected',
+    name: 'Measured and expected build-up',
+    station: 'cylinder-and-head',
+    kind: 'measured',
+    quantity: 'ratio',
+    unit: 'percent',
+    usualError: percent(8),
+    range: { min: percent(1), max: percent(10_000) },
+    prompt: 'How long does the build-up take, of what this compressor should take for these tanks?',
+    why: 'A small compressor on large tanks is slow and sound. What counts is the air that should come, less what is known to leak.',
+    steps: [
+      'Let the tanks down below 80 psi.',
+      'Engine at its maximum recommended speed; time the gauge from 85 to 100 psi.',
+      'On the bench, give the tanks, what the model should deliver at this speed, and the leak from the leak-down.',
+    ],
+    tools: ['stop-watch', 'test gauge'],
+    minutes: 6,
+    setUp: { engine: 'governed' },
+    cautions: ['vehicle-rolls', 'pressure-falls-suspension-brakes', 'exhaust-fumes'],
+    states: [
+      { id: 'as-expected', label: 'Under 125 % of the time expected', background: 0.576, high: percent(125) },
+      { id: 'longer', label: '125 to 200 %', background: 0.262, low: percent(125), high: percent(200) },
+      { id: 'much-longer', label: '200 % or more', background: 0.162, low: percent(200) },
+    ],
+    sum: { id: 'build-up-ratio', output: 'ratio' },
+    cannotTell: 0.4,
+    ...judgement,
   }),
   check({
     id: 'blow-back-at-intake',

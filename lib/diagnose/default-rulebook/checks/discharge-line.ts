@@ -134,4 +134,37 @@ export const checks: Check[] = [
     cannotTell: 0.05,
     ...commonPractice,
   }),
+  check({
+    id: 'line-loss-ratio',
+    name: 'Loss in the line against its full bore',
+    station: 'discharge-line',
+    kind: 'measured',
+    quantity: 'ratio',
+    unit: 'one',
+    // Half a millimetre of bore, at 10 of 16 mm over half of the line.
+    usualError: 1,
+    range: { min: 0, max: 1e8 },
+    prompt: 'How many times the pressure of a clean line does this line lose at delivery?',
+    why: 'The loss grows with nearly the fifth power of the bore that is gone: a bore that looks fair can hold back several times as much.',
+    steps: [
+      'Read temperatures and photograph before you open it.',
+      'Find the largest drill shank that passes at the head end, and how far the carbon reaches.',
+      'On the bench, give both with the length and bore of the line and what the compressor delivers.',
+    ],
+    tools: ['plug gauges or drill shanks', 'line wrenches', 'lamp', 'tape measure'],
+    minutes: 6,
+    setUp: { engine: 'off', air: 'empty', access: ['line-open'] },
+    spoils: SPOILED_BY_OPENING_THE_LINE,
+    cautions: ['stored-air', 'hot-parts', 'carbon-fire', 'pressure-falls-suspension-brakes', 'vehicle-rolls'],
+    // The bands of the bore, 13, 10 and 6 of 16 mm, where carbon has narrowed half of the line.
+    states: [
+      { id: 'under-2', label: 'Less than twice', background: 0.742, high: 2 },
+      { id: '2-to-5', label: '2 to 5 times', background: 0.135, low: 2, high: 5 },
+      { id: '5-to-50', label: '5 to 50 times', background: 0.074, low: 5, high: 50 },
+      { id: 'over-50', label: '50 times or more', background: 0.049, low: 50 },
+    ],
+    sum: { id: 'line-loss', output: 'ratio' },
+    cannotTell: 0.2,
+    ...judgement,
+  }),
 ];

@@ -83,7 +83,7 @@ export const checks: Check[] = [
     tools: ['lamp', 'marker', 'socket set'],
     minutes: 5,
     setUp: { engine: 'off', air: 'empty', access: ['compressor-off'] },
-    spoils: ['flange-leak', 'drain-flow', 'noise', 'crank-turns', 'head-temperature', 'build-up-time'],
+    spoils: ['flange-leak', 'drain-flow', 'noise', 'crank-turns', 'head-temperature', 'build-up-time', 'build-up-against-expected'],
     cautions: WITH_THE_COMPRESSOR_OFF,
     states: [
       { id: 'sound', label: 'Sound', background: 0.929 },

@@ -1,5 +1,5 @@
 import { judgement, weighedBuildUp, weighedPractice } from '../basis';
-import { kelvins, seconds } from '../si';
+import { kelvins, percent, seconds } from '../si';
 import type { Rule } from '../../types';
 import { answer, band, others } from './rule';
 
@@ -88,6 +88,38 @@ export const rules: Rule[] = [
     group: 'complaint-of-air',
     note: 'Build-up is far over its limit: air is lost, held back or never drawn in.',
     ...weighedBuildUp,
+  },
+  {
+    name: 'build-up-against-expected: longer',
+    conditions: band('build-up-against-expected', { from: percent(125), below: percent(200) }),
+    weights: {
+      'intake-filter-clogged': 2, 'discharge-line-carboned': 1.5, 'dryer-restricted': 1.5, 'head-gasket-failed': 1.5,
+      'intake-hose-collapsed': 1.5, 'intake-dirt-ingested': 1, 'valve-leaking': 1,
+      'discharge-line-kinked-or-frozen': 0.5, 'purge-or-check-valve-leaking': 0.5, 'rings-worn': 0.5,
+      'coolant-starved': -0.5, 'governor-faulty': -0.5, 'drain-restricted': -1, 'oil-degraded': -1,
+      'oil-feed-restricted': -1, 'rings-not-seated': -1, 'crankcase-pressure-high': -1.5,
+      'drain-choked-by-sealant': -1.5, 'engine-oil-overfull': -1.5, 'oil-in-intake-air': -1.5,
+      'drive-gear-failed': -2, 'dryer-overdue': -2, 'normal-carryover': -2.5,
+    },
+    group: 'complaint-of-air',
+    note: 'It fills more slowly than this compressor should, leaks allowed for.',
+    ...judgement,
+  },
+  {
+    name: 'build-up-against-expected: much-longer',
+    conditions: band('build-up-against-expected', { from: percent(200) }),
+    weights: {
+      'drive-gear-failed': 5.5, 'discharge-line-kinked-or-frozen': 4, 'crank-or-bearing-failed': 3.5,
+      'discharge-line-carboned': 3.5, 'unloader-stuck': 3.5, 'valve-leaking': 3.5, 'dryer-restricted': 3,
+      'head-gasket-failed': 1.5, 'intake-filter-clogged': 1, 'intake-hose-collapsed': 1, 'governor-faulty': -0.5,
+      'intake-dirt-ingested': -1, 'purge-or-check-valve-leaking': -1.5, 'system-leaks': -1.5, 'coolant-starved': -2,
+      'rings-worn': -2, 'demand-too-high': -2.5, 'crankcase-pressure-high': -3, 'drain-choked-by-sealant': -3,
+      'drain-restricted': -3, 'engine-oil-overfull': -3, 'oil-degraded': -3, 'oil-feed-restricted': -3,
+      'oil-in-intake-air': -3, 'rings-not-seated': -3, 'dryer-overdue': -3.5, 'normal-carryover': -3.5,
+    },
+    group: 'complaint-of-air',
+    note: 'It takes twice the time that this compressor should, leaks allowed for.',
+    ...judgement,
   },
   {
     name: 'blow-back-at-intake: yes',

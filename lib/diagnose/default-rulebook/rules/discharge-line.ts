@@ -173,4 +173,39 @@ export const rules: Rule[] = [
     note: 'The line has its bore.',
     ...weighedPractice,
   },
+  {
+    name: 'line-loss-ratio: 2-to-5',
+    conditions: band('line-loss-ratio', { from: 2, below: 5 }),
+    weights: {
+      'coolant-starved': 1, 'dryer-restricted': 1, 'oil-degraded': 1, 'system-leaks': 1, 'valve-leaking': 1,
+      'discharge-line-kinked-or-frozen': -0.5, 'normal-carryover': -0.5, 'rings-not-seated': -0.5, 'rings-worn': -0.5,
+      'discharge-line-carboned': -1,
+    },
+    group: 'restriction',
+    note: 'The line loses a few times what it lost when clean: little beside what a compressor works against.',
+    ...judgement,
+  },
+  {
+    name: 'line-loss-ratio: 5-to-50',
+    conditions: band('line-loss-ratio', { from: 5, below: 50 }),
+    weights: {
+      ...others(-1, { except: ['dryer-restricted', 'system-leaks'] }), 'discharge-line-carboned': 4.5,
+      'coolant-starved': 1, 'discharge-line-kinked-or-frozen': 0.5, 'oil-degraded': 0.5, 'valve-leaking': 0.5,
+      'dryer-overdue': -1.5, 'rings-not-seated': -1.5, 'rings-worn': -1.5, 'normal-carryover': -2,
+    },
+    group: 'restriction',
+    note: 'The line loses many times what it lost when clean.',
+    ...judgement,
+  },
+  {
+    name: 'line-loss-ratio: over-50',
+    conditions: band('line-loss-ratio', { from: 50 }),
+    weights: {
+      ...others(-2), 'discharge-line-carboned': 6.5, 'discharge-line-kinked-or-frozen': 2.5, 'coolant-starved': -1,
+      'dryer-restricted': -1.5, 'oil-degraded': -1.5, 'valve-leaking': -1.5, 'normal-carryover': -2.5,
+    },
+    group: 'restriction',
+    note: 'The line holds the air back at delivery, whatever it passes at idle.',
+    ...judgement,
+  },
 ];

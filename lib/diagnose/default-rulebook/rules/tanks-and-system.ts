@@ -130,6 +130,28 @@ export const rules: Rule[] = [
     ...weighedManual,
   },
   {
+    name: 'leak-share-of-duty: 5-to-10',
+    conditions: band('leak-share-of-duty', { from: percent(5), below: percent(10) }),
+    weights: {
+      ...others(-0.5), 'system-leaks': 5.5, 'purge-or-check-valve-leaking': 3, 'demand-too-high': -1,
+      'dryer-overdue': -1.5, 'rings-worn': -2, 'normal-carryover': -2.5,
+    },
+    group: 'leaks',
+    note: 'The leaks alone load the compressor noticeably.',
+    ...judgement,
+  },
+  {
+    name: 'leak-share-of-duty: over-10',
+    conditions: band('leak-share-of-duty', { from: percent(10) }),
+    weights: {
+      ...others(-1), 'system-leaks': 7.5, 'purge-or-check-valve-leaking': 3, 'rings-worn': -2.5,
+      'demand-too-high': -3, 'dryer-overdue': -3, 'normal-carryover': -3.5,
+    },
+    group: 'leaks',
+    note: 'A tenth of the time or more goes into leaks alone.',
+    ...judgement,
+  },
+  {
     name: 'audible-leak: yes',
     conditions: answer('audible-leak', 'yes'),
     weights: {

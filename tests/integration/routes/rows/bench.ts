@@ -17,6 +17,7 @@ export const bench = feature({
   rows: [
     { page: '(signed-in)/bench', roles: USE },
     { page: '(signed-in)/bench/[sum]', roles: USE, params: () => ({ sum: 'leak-down' }), query: () => ({ volume: '3 ft3', 'volume.error': 'much', time: ['1 min', '2 min'], nonsense: 'x' }) },
+    { page: '(signed-in)/bench/line-survey', roles: USE, query: () => ({ distance1: '0 ft', temperature1: 'hot', distance2: ['1 ft', '2 ft'], nonsense: 'x' }) },
     { route: 'api/v1/bench', method: 'GET', roles: USE },
     { route: 'api/v1/bench/[sum]', method: 'POST', roles: USE, params: () => ({ sum: 'time-loaded' }), body: () => ({ inputs: { loaded: { value: '90 s', error: '1 s' }, unloaded: { value: '10:30' } } }) },
   ],

@@ -11,20 +11,26 @@ interface Props {
 /** The field keeps the focus, and the caret, while keys are tapped. */
 const keepFocus = (event: PointerEvent) => event.preventDefault();
 
+/** As typing would: whoever holds the field's text hears of it. */
+function write(input: HTMLInputElement, text: string, start: number, end: number): void {
+  input.setRangeText(text, start, end, 'end');
+  input.dispatchEvent(new Event('input', { bubbles: true }));
+}
+
 /** Large keys for a gloved finger. What a keyboard can type stays typable in the field. */
 export function Keypad({ field, decimalMark }: Props) {
   const put = (text: string) => {
     const input = field.current;
     if (!input) return;
     const { length } = input.value;
-    input.setRangeText(text, input.selectionStart ?? length, input.selectionEnd ?? length, 'end');
+    write(input, text, input.selectionStart ?? length, input.selectionEnd ?? length);
   };
   const back = () => {
     const input = field.current;
     if (!input) return;
     const end = input.selectionEnd ?? input.value.length;
     const start = input.selectionStart ?? end;
-    input.setRangeText('', start === end ? Math.max(start - 1, 0) : start, end, 'end');
+    write(input, '', start === end ? Math.max(start - 1, 0) : start, end);
   };
   return (
     <div role="group" aria-label="Keypad" className="keypad">
