@@ -29,6 +29,7 @@ export async function selectFindings(db: Executor, of: Of & { receivedBy?: Date 
       valueSi: finding.valueSi,
       errorSi: finding.errorSi,
       sum: finding.sum,
+      baseline: finding.baseline,
       person: person.name,
       correctedAt: finding.correctedAt,
       receivedAt: finding.receivedAt,

@@ -1,4 +1,5 @@
 import { boolean, date, foreignKey, index, jsonb, pgTable, primaryKey, text, uuid } from 'drizzle-orm/pg-core';
+import type { Baseline } from '@/lib/baseline/baseline-for';
 import type { FindingSum } from '@/lib/case/rows';
 import type { Stage, StateShare } from '@/lib/diagnose/types';
 import { cases } from './case';
@@ -35,6 +36,8 @@ export const finding = pgTable(
     errorSi: si(),
     /** What a sum of the bench made it from; null: it was read or chosen. */
     sum: jsonb().$type<FindingSum>(),
+    /** The healthy baseline that it was compared with when it was given; later sets change nothing of it. null: none. */
+    baseline: jsonb().$type<Baseline>(),
     personId: uuid().notNull().references(() => person.id),
     /** The device's clock, and what to add to it to get the server's. */
     deviceAt: instant().notNull(),

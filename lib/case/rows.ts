@@ -1,3 +1,4 @@
+import type { Baseline } from '@/lib/baseline/baseline-for';
 import type { UsedInput } from '@/lib/bench/read-texts';
 import type { Ranking, RecordFacts, Stage, StateShare } from '@/lib/diagnose/types';
 
@@ -28,6 +29,8 @@ export interface FindingRow {
   errorSi: number | null;
   /** null: not worked out on the bench. */
   sum: FindingSum | null;
+  /** What it was compared with; null: no baseline counted, or it is nothing that compares. */
+  baseline: Baseline | null;
   person: string;
   correctedAt: Date;
   receivedAt: Date;

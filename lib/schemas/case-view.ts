@@ -77,6 +77,8 @@ export interface FindingView {
   shares: StateShare[];
   /** The sum of the bench that it came from, with all that went in, as the bench's address takes it. */
   sum: { id: string; search: Record<string, string> } | null;
+  /** How it stands to what was usual when it was given, both in words; null: nothing to compare with. */
+  compared: string | null;
   thinkSo: boolean;
   person: string;
   /** By the device's corrected clock. */
@@ -201,6 +203,8 @@ export interface CaseView {
   rulebook: RulebookView;
   state: CaseState;
   reasons: CaseReasons;
+  /** What is usual for the unit or its model, now, by the checks that compare with it. */
+  usual: Record<string, string>;
   /** Other cases of the unit that hold its release, now. */
   otherHolds: OtherHoldView[];
   assignedTo: string | null;

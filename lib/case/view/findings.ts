@@ -5,6 +5,7 @@ import type { UnitPreferences } from '@/lib/units';
 import { standingFindings } from '../current-findings';
 import type { FindingRow, NoteRow } from '../rows';
 import { answerText } from './answer-text';
+import { comparedText } from './usual';
 
 /** All findings of a case, newest first; those that were replaced, taken back or late say so. */
 export function findingViews(
@@ -24,6 +25,7 @@ export function findingViews(
       answer: answerText(compiled.checks.get(row.checkId)?.check, row, units),
       shares: row.shares,
       sum: row.sum && { id: row.sum.id, search: searchOfInputs(row.sum) },
+      compared: comparedText(compiled.checks.get(row.checkId)?.check, row, units),
       thinkSo: row.reliability < 1,
       person: row.person,
       at: row.correctedAt.toISOString(),

@@ -39,6 +39,7 @@ const finding = z
       .object({ id: z.string(), search: z.record(z.string(), z.string()) })
       .nullable()
       .meta({ description: 'The sum of the bench that it came from, with all that went in.' }),
+    compared: z.string().nullable().meta({ description: 'How it stands to the healthy baseline that counted when it was given, in words.' }),
     thinkSo: z.boolean(),
     person: z.string(),
     at: instant,

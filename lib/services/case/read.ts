@@ -5,8 +5,10 @@ import { buildState } from '@/lib/case/build-state';
 import { headView } from '@/lib/case/view/head';
 import { momentsOf } from '@/lib/case/view/moments';
 import { rulebookView } from '@/lib/case/view/rulebook';
+import { usualViews } from '@/lib/case/view/usual';
 import { readCaseInput } from '@/lib/schemas/case';
 import type { CallView, CaseReasons, CaseState, CaseView } from '@/lib/schemas/case-view';
+import { baselinesOfCase } from '../baseline/of-case';
 import { defineRead } from '../define';
 import { gatherState } from './gather-state';
 import { holdsOfUnit } from './holds-of-unit';
@@ -53,6 +55,8 @@ export const readCase = defineRead({
       rulebook,
       state: at ? { ...state, status: statusAt(events) } : state,
       reasons: buildReasons(parts),
+      // Nobody answers in the past, and what was usual then stands with the answers of then.
+      usual: at ? {} : usualViews(await baselinesOfCase(tx, { ...of, head: caseHead, compiled: parts.compiled, now: ctx.now() }), ctx.person.units),
       otherHolds: at ? [] : (await holdsOfUnit(tx, { ...of, unitId: caseHead.unitId })).filter((other) => other.caseId !== of.caseId),
       assignedTo: caseHead.assignedTo,
       calls: callViews(calls, events),
