@@ -52,9 +52,9 @@ export function comparisonText(value: number, baseline: Baseline, units: UnitPre
   const { differenceSi, outside } = compare(value, baseline);
   const { quantity, unit } = unitOf(baseline.figure, units);
   const size = formatQuantity<Quantity>(Math.abs(differenceSi), { quantity: differenceOf(quantity), unit });
-  const isSame = Number.parseFloat(size) === 0;
-  const where = isSame ? 'the same as' : `${size} ${differenceSi > 0 ? 'above' : 'below'}`;
   const usual = figureText(baseline.figure, usualOf(baseline), units);
+  const isSame = figureText(baseline.figure, value, units) === usual;
+  const where = isSame ? 'the same as' : `${size} ${differenceSi > 0 ? 'above' : 'below'}`;
   if (baseline.from === 'own') return `${where} this unit’s own ${usual} of ${dayText(baseline.measuredOn)}`;
   const spread = outside ? `${outside} the middle half` : 'within the middle half';
   return `${where} its model’s median of ${usual}, ${spread} of ${baseline.units} units`;

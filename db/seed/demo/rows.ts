@@ -1,8 +1,8 @@
 import type { PgTable } from 'drizzle-orm/pg-core';
-import { audit, call, caseEvent, cases, cautionAcknowledgement, compressorModel, finding, findingNote, fit, run, unit, unitReading } from '@/db/schema';
+import { audit, baselineFigure, baselineSet, call, caseEvent, cases, cautionAcknowledgement, compressorModel, finding, findingNote, fit, run, unit, unitReading } from '@/db/schema';
 
 /** The tables that the demo fills by the hundred, in an order in which each finds what it refers to. */
-export const TABLES = { compressorModel, unit, unitReading, fit, cases, caseEvent, finding, findingNote, cautionAcknowledgement, run, call, audit };
+export const TABLES = { compressorModel, unit, unitReading, fit, baselineSet, baselineFigure, cases, caseEvent, finding, findingNote, cautionAcknowledgement, run, call, audit };
 
 export type TableName = keyof typeof TABLES;
 export type Row<Name extends TableName> = (typeof TABLES)[Name] extends PgTable ? (typeof TABLES)[Name]['$inferInsert'] : never;
@@ -13,6 +13,8 @@ export const noRows = (): DemoRows => ({
   unit: [],
   unitReading: [],
   fit: [],
+  baselineSet: [],
+  baselineFigure: [],
   cases: [],
   caseEvent: [],
   finding: [],
