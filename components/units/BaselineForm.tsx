@@ -66,14 +66,16 @@ function Steps({ form, units }: { form: FormHandle; units: UnitPreferences }) {
     setMeasured(new Set(FIGURES.filter(({ field }) => isFilled(typed.get(field))).map(({ field }) => field)));
   };
   return (
-    <div className="grid gap-8" onInput={count}>
+    <div onInput={count}>
       <p role="status" className="heading sticky top-0 z-10 flex min-h-touch items-center justify-between gap-4 border-y border-ink bg-paper py-2 text-lg">
         {measured.size} of {FIGURES.length} measured
         <span aria-hidden="true" className="flex gap-1.5">
           {FIGURES.map(({ field }) => <span key={field} className={`size-4 rounded-full border border-ink ${measured.has(field) ? 'bg-ink' : ''}`} />)}
         </span>
       </p>
-      {FIGURES.map((figure, i) => <BaselineStep key={figure.id} figure={figure} number={i + 1} form={form} units={units} />)}
+      <div className="grid gap-8 pt-6">
+        {FIGURES.map((figure, i) => <BaselineStep key={figure.id} figure={figure} number={i + 1} form={form} units={units} />)}
+      </div>
     </div>
   );
 }

@@ -25,8 +25,9 @@ export function BaselineStep({ figure, number, form, units }: Props) {
   const difference = differenceOf(quantity);
   const off = form.field(`${field}Error`, formatValue<Quantity>(usualError, { quantity: difference, unit }));
   return (
-    <fieldset className="grid min-w-0 gap-4">
-      <legend className="heading float-left mb-1 w-full text-xl">{number}. {keepFigures(name)}</legend>
+    // A field that gets the focus comes to rest below the bar that counts.
+    <fieldset className="grid min-w-0 gap-4 [&_input]:scroll-mt-20">
+      <legend className="float-left mb-1 w-full"><h2 className="text-xl">{number}. {keepFigures(name)}</h2></legend>
       <Notice kind="caution">{caution}</Notice>
       <ol className="ml-5 grid max-w-prose list-decimal gap-1">
         {steps.map((step) => <li key={step}>{keepFigures(step)}</li>)}

@@ -9,6 +9,7 @@ import { randomFrom } from './random';
 import { noRows, type DemoRows } from './rows';
 import { Truth, type TrueCause } from './truth';
 import { UnitStory } from './unit-story';
+import { compareFindings } from './compare-findings';
 import { makeVehicles, type Vehicle } from './vehicles';
 
 export interface Demo {
@@ -36,6 +37,7 @@ export function makeDemo(today: Date, rulebook: Rulebook, vehicles: readonly Veh
   const random = randomFrom('demo');
   modelRows(rows, beganOn(calendar), random.fork('models'));
   for (const vehicle of vehicles) new UnitStory(world, shop, vehicle, random.fork(vehicle.fleetNumber)).tell();
+  compareFindings(rows, compiled);
   numberCases(rows);
   return { rows, truths: world.truths };
 }
