@@ -24,7 +24,7 @@ export function Baseline({ baseline, units, measureHref }: Props) {
       <DefinitionList items={figures.map((row) => ({ term: keepFigures(figureOf(row.figure).name), value: <Counts row={row} units={units} /> }))} />
       {measureHref && <p className="mt-3"><ButtonLink variant="quiet" href={measureHref}>Measure a set</ButtonLink></p>}
       {sets.length > 0 && (
-        <Disclosure summary={sets.length === 1 ? 'The set measured on it' : `All ${sets.length} sets measured on it`}>
+        <Disclosure summary={sets.length === 1 ? 'The set measured on it' : `${sets.length} sets measured on it`}>
           <ul className="border-t border-ink">
             {sets.map((set) => <OneSet key={set.id} set={set} isEarlier={since !== null && set.measuredOn < since} units={units} />)}
           </ul>

@@ -7,6 +7,12 @@ export type FigureId = (typeof FIGURE_IDS)[number];
 /** What the reading depends on, and is asked for with it. */
 export type ConditionId = 'ambient' | 'engineSpeed' | 'loadedFor';
 
+export const CONDITION_WORDS: Readonly<Record<ConditionId, string>> = {
+  ambient: 'the outside temperature',
+  engineSpeed: 'the engine speed',
+  loadedFor: 'how long it ran loaded',
+};
+
 export interface Figure {
   readonly id: FigureId;
   /** In forms and requests; its error's field is `<field>Error`. */

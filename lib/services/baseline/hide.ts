@@ -1,5 +1,6 @@
 import { hideBaselineSet, selectBaselineSet } from '@/db/queries/baseline';
 import { insertRemoval } from '@/db/queries/removal';
+import { lockUnit } from '@/db/queries/unit';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { notFound } from '@/lib/errors';
 import { newId } from '@/lib/ids';
@@ -14,6 +15,7 @@ export const hideBaseline = defineWrite({
   input: hideBaselineInput,
   run: async ({ tx, ctx, input: { unitId, setId, whyHidden: reason }, audit }) => {
     const organisationId = ctx.organisation.id;
+    await lockUnit(tx, { organisationId, unitId });
     const set = await selectBaselineSet(tx, { organisationId, setId });
     if (!set || set.hiddenAt || set.unitId !== unitId) throw notFound('set');
     const at = ctx.now();

@@ -1,4 +1,4 @@
-import { FIGURES, type Figure, type FigureId } from '@/lib/baseline/figures';
+import { CONDITION_WORDS, FIGURES, type Figure, type FigureId } from '@/lib/baseline/figures';
 import { figureText } from '@/lib/baseline/words';
 import { invalid, type FieldErrors } from '@/lib/errors';
 import { measureUnit } from '@/lib/schemas/measures';
@@ -32,7 +32,7 @@ export function readFigures(habits: MeasureHabits, typed: Typed): TypedFigure[] 
   for (const { field, conditions, called } of FIGURES) {
     if (!typed[field]) continue;
     for (const condition of conditions) {
-      if (!typed[condition]) problems[condition] = `Without it, ${called} can’t be compared later. Give it, or leave ${called} out.`;
+      if (!typed[condition]) problems[condition] = `Give ${CONDITION_WORDS[condition]}, or ${called} can’t be compared later.`;
     }
   }
   if (Object.keys(problems).length > 0) throw invalid(problems);

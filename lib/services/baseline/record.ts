@@ -1,6 +1,6 @@
 import { insertBaselineSet, selectBaselineSet } from '@/db/queries/baseline';
 import { selectFitsOfUnit } from '@/db/queries/fit';
-import { selectUnit } from '@/db/queries/unit';
+import { lockUnit, selectUnit } from '@/db/queries/unit';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { siteDay } from '@/lib/case/site-day';
 import { conflict, notFound } from '@/lib/errors';
@@ -20,6 +20,7 @@ export const recordBaseline = defineWrite({
   run: async ({ tx, ctx, input, audit, unchanged }) => {
     const { id, unitId, occasion, measuredOn, note, ...typed } = input;
     const of = { organisationId: ctx.organisation.id, unitId };
+    await lockUnit(tx, of);
     const unit = await selectUnit(tx, of);
     if (!unit) throw notFound('unit');
     const held = await selectBaselineSet(tx, { ...of, setId: id });
