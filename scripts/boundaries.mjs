@@ -68,6 +68,12 @@ const ROWS = [
     because: 'A limit judges a value, handed to it.',
   },
   {
+    folder: 'lib/baseline/**',
+    // Of the schemas only how a day is written.
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES('units', 'schemas'), '@/lib/schemas', 'zod'],
+    because: 'What is usual for a unit is worked out alike on a page, on the server and without a connection.',
+  },
+  {
     folder: 'lib/stopwatch/**',
     never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES(), 'zod'],
     because: 'A stopwatch is times of the clock, handed to it.',

@@ -3,6 +3,7 @@
 import { useState } from 'react';
 import { Button, ButtonLink } from '@/components/ui/Button';
 import { Tag } from '@/components/ui/Tag';
+import { keepFigures } from '@/components/ui/figures';
 import { TextareaField } from '@/components/ui/TextareaField';
 import type { FindingView, RulebookView } from '@/lib/schemas/case-view';
 import { lastAsked } from './answered';
@@ -88,6 +89,7 @@ function Finding({ finding, handle, rulebook, timeZone, readOnly, onPick }: Prop
         {finding.judgement && (
           <p className={finding.judgement.verdict === 'out' ? 'text-[0.9375rem] font-bold' : 'text-[0.9375rem]'}>{finding.judgement.text}.</p>
         )}
+        {finding.compared && <p>{keepFigures(sentence(finding.compared))}</p>}
         <p className="text-[0.9375rem] text-ink-soft">
           {SOURCES[finding.source] ? `${SOURCES[finding.source]}, ` : ''}{finding.person}, {timeText(finding.at, timeZone)}
         </p>
@@ -117,6 +119,8 @@ function Finding({ finding, handle, rulebook, timeZone, readOnly, onPick }: Prop
     </li>
   );
 }
+
+const sentence = (text: string) => `${text.charAt(0).toUpperCase()}${text.slice(1)}.`;
 
 function NoteForm({ finding, handle, about }: { finding: FindingView; handle: CaseHandle; about: string }) {
   const [open, setOpen] = useState(false);

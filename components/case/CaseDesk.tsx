@@ -72,7 +72,7 @@ export function CaseDesk({ view, drawing, hand: kept, decimalMark }: Props) {
         ) : readOnly ? (
           <p className="text-ink-soft">Nothing is asked here. Pick a station to see its checks.</p>
         ) : (
-          <AtHandView {...{ handle, rulebook, picked, decimalMark, limits: view.limits, onPick: setPicked }} />
+          <AtHandView {...{ handle, rulebook, usual: view.usual, limits: view.limits, picked, decimalMark, onPick: setPicked }} />
         )}
         {!readOnly && <HandSwitch hand={hand} onChange={(next) => { setHand(next); keepHand(next); }} />}
       </div>
@@ -101,6 +101,7 @@ function goTo(id: string): void {
 interface AtHandProps {
   handle: CaseHandle;
   rulebook: RulebookView;
+  usual: CaseView['usual'];
   picked: Picked;
   decimalMark: '.' | ',';
   limits: CaseView['limits'];
@@ -133,7 +134,7 @@ function AtHandView(props: AtHandProps) {
   );
 }
 
-function Question({ handle, rulebook, picked, decimalMark, limits, onPick, asked, onPass }: AtHandProps & { asked: AtHand | null; onPass: (panelId: string) => void }) {
+function Question({ handle, rulebook, usual, limits, picked, decimalMark, onPick, asked, onPass }: AtHandProps & { asked: AtHand | null; onPass: (panelId: string) => void }) {
   if (!asked) return <Enough {...{ state: handle.state, rulebook, onPick }} />;
   if (asked.kind === 'panel') {
     const panel = rulebook.panels.find(({ id }) => id === asked.panelId);
@@ -156,6 +157,7 @@ function Question({ handle, rulebook, picked, decimalMark, limits, onPick, asked
       key={check.id}
       check={check}
       rulebook={rulebook}
+      usual={usual[check.id]}
       handle={handle}
       suggestion={asked.suggestion}
       stationName={stationName(check.station)}

@@ -2,6 +2,7 @@
 
 import { PhotoStrip } from '@/components/photos/PhotoStrip';
 import { ButtonLink } from '@/components/ui/Button';
+import { keepFigures } from '@/components/ui/figures';
 import { Notice } from '@/components/ui/Notice';
 import { ApiProblem } from '@/lib/query/problem';
 import type { AnswerInput } from '@/lib/schemas/case';
@@ -18,6 +19,8 @@ import type { CaseHandle } from './use-case';
 interface Props {
   check: CheckView;
   rulebook: RulebookView;
+  /** What is usual for the unit, where the check compares with it. */
+  usual?: string;
   handle: CaseHandle;
   /** The suggestion that put it here; null when somebody picked it. */
   suggestion: SuggestionView | null;
@@ -29,7 +32,7 @@ interface Props {
 }
 
 /** One check, large: its cautions, how to do it, and its answers; "can't tell" and "skip" are always there. */
-export function CheckAtHand({ check, rulebook, handle, suggestion, stationName, decimalMark, limit, onAnswered }: Props) {
+export function CheckAtHand({ check, rulebook, usual, limit, handle, suggestion, stationName, decimalMark, onAnswered }: Props) {
   const { state, answer, acknowledge } = handle;
   const problem = answer.error instanceof ApiProblem && answer.variables?.checkId === check.id ? answer.error : null;
   const toRead = unread(check, rulebook, state);
@@ -71,6 +74,7 @@ export function CheckAtHand({ check, rulebook, handle, suggestion, stationName, 
       {toRead.length === 0 &&
         (check.kind === 'measured' ? (
           <>
+            {usual && <p className="border-l-4 border-ink pl-3">{keepFigures(usual)}.</p>}
             {check.sum && (
               <p>
                 <ButtonLink variant="quiet" href={sumHref(check.sum, { caseId: state.caseId, checkId: check.id })}>Work it out on the bench</ButtonLink>

@@ -19,6 +19,7 @@ export const PAGES: readonly Page[] = [
   { route: 'units/new', shape: 'form', what: 'the form' },
   { route: 'units/[id]', shape: 'record', what: 'the unit' },
   { route: 'units/[id]/edit', shape: 'form', what: 'the form' },
+  { route: 'units/[id]/baseline', shape: 'form', what: 'the form' },
   { route: 'units/[id]/readings/new', shape: 'form', what: 'the form' },
   { route: 'units/[id]/fits/new', shape: 'form', what: 'the form' },
   { route: 'units/[id]/fits/[fitId]', shape: 'record', what: 'the fit' },

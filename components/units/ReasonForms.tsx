@@ -67,3 +67,21 @@ export function StrikeReadingForm<Result>({ action, unitId, readings }: { action
     </Disclosure>
   );
 }
+
+/** Hides one of several healthy baselines. */
+export function HideBaselineForm<Result>({ action, unitId, sets }: { action: Action<Result>; unitId: string; sets: readonly Option[] }) {
+  const form = useForm(action);
+  return (
+    <Disclosure summary="Hide a wrong healthy baseline" open={form.message !== undefined}>
+      <Form form={form} label="Hide a wrong healthy baseline" errorTitle="Not done yet">
+        <input type="hidden" name="unitId" value={unitId} readOnly />
+        <p>Nothing is compared with it any more. Answers that were compared with it stay as they are.</p>
+        <SelectField label="Set" placeholder="Choose the set" required options={sets} {...form.field('setId')} />
+        <TextField label="Why it doesn’t count" autoComplete="off" required {...form.field('whyHidden')} />
+        <div>
+          <SubmitButton pendingLabel="Hiding…">Hide the set</SubmitButton>
+        </div>
+      </Form>
+    </Disclosure>
+  );
+}

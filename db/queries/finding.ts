@@ -30,6 +30,7 @@ export async function selectFindings(db: Executor, of: Of & { receivedBy?: Date 
       errorSi: finding.errorSi,
       sum: finding.sum,
       judgement: finding.judgement,
+      baseline: finding.baseline,
       person: person.name,
       correctedAt: finding.correctedAt,
       receivedAt: finding.receivedAt,

@@ -1,4 +1,5 @@
 import { boolean, date, foreignKey, index, jsonb, pgTable, primaryKey, text, uuid } from 'drizzle-orm/pg-core';
+import type { Baseline } from '@/lib/baseline/baseline-for';
 import type { FindingSum } from '@/lib/case/rows';
 import type { Judgement } from '@/lib/limits';
 import type { Stage, StateShare } from '@/lib/diagnose/types';
@@ -38,6 +39,8 @@ export const finding = pgTable(
     sum: jsonb().$type<FindingSum>(),
     /** By which adopted limit it was judged, and how; null: by none. */
     judgement: jsonb().$type<Judgement>(),
+    /** The healthy baseline that it was compared with when it was given; later sets change nothing of it. null: none. */
+    baseline: jsonb().$type<Baseline>(),
     personId: uuid().notNull().references(() => person.id),
     /** The device's clock, and what to add to it to get the server's. */
     deviceAt: instant().notNull(),

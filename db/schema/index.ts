@@ -3,6 +3,7 @@ export * from './person';
 export * from './compressor-model';
 export * from './unit';
 export * from './fit';
+export * from './baseline';
 export * from './edition';
 export * from './case';
 export * from './finding';

@@ -10,6 +10,7 @@ import { findingsForRanking } from './findings-for-ranking';
 import { readAnswer } from './read-answer';
 import type { FindingRow } from './rows';
 import { siteDay } from './site-day';
+import { comparedWith } from './view/usual';
 import { vehicleAfter } from './vehicle-after';
 
 interface Asked {
@@ -78,6 +79,7 @@ function rowOf({ id, body }: Extract<Waiting, { kind: 'finding' }>, { compiled, 
   return {
     ...answer,
     ...dated,
+    baseline: comparedWith(body.checkId, answer, kit.baselines),
     source: answer.sum ? 'sum' : 'asked',
     askedBecause: body.askedBecause ?? 'choice',
     person: kit.person.name,

@@ -1,3 +1,4 @@
+import type { Baseline } from '@/lib/baseline/baseline-for';
 import type { UsedInput } from '@/lib/bench/read-texts';
 import type { Judgement } from '@/lib/limits';
 import type { Ranking, RecordFacts, Stage, StateShare } from '@/lib/diagnose/types';
@@ -31,6 +32,8 @@ export interface FindingRow {
   sum: FindingSum | null;
   /** By which adopted limit a measured value was judged, and how; null: by none. */
   judgement: Judgement | null;
+  /** What it was compared with; null: no baseline counted, or it is nothing that compares. */
+  baseline: Baseline | null;
   person: string;
   correctedAt: Date;
   receivedAt: Date;

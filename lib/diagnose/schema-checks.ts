@@ -6,7 +6,7 @@ import type { ShapedRulebook } from './schema-shape';
 type ShapedCheck = ShapedRulebook['checks'][number];
 type Add = (path: readonly PropertyKey[], message: string, instead: string) => void;
 
-const MEASURED_ONLY = ['quantity', 'unit', 'usualError', 'range', 'sum'] as const;
+const MEASURED_ONLY = ['quantity', 'unit', 'usualError', 'range', 'sum', 'compares'] as const;
 
 /**
  * What each check must be in itself: answers that exclude each other and leave nothing out, each with its share of

@@ -122,6 +122,7 @@ const checkSchema = z.strictObject({
   reliability: reliabilitySchema.optional(),
   fromRecord: z.strictObject({ fact: factNameSchema, states: z.record(z.string().max(160), idSchema).optional() }).optional(),
   sum: z.strictObject({ id: idSchema, output: factNameSchema }).optional(),
+  compares: idSchema.optional(),
   ...sourced,
 });
 

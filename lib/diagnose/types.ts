@@ -140,6 +140,8 @@ export interface Check {
   fromRecord?: { fact: string; states?: Record<string, string> };
   /** Measured checks only: the sum of the bench that works its value out, and which of its outputs that is. */
   sum?: { id: string; output: string };
+  /** Measured checks only: the figure of a healthy baseline that its value, or difference, is compared with. Carries no weight. */
+  compares?: string;
   basis: Basis;
   source?: string;
 }

@@ -1,3 +1,4 @@
+import type { Baseline } from '@/lib/baseline/baseline-for';
 import type { FindingRow, NoteRow } from '@/lib/case/rows';
 import type { Limit } from '@/lib/limits';
 import type { RecordFacts, SetUp } from '@/lib/diagnose/types';
@@ -22,6 +23,8 @@ export interface CaseKit {
   timeZone: string;
   rows: Dated<FindingRow, 'correctedAt' | 'receivedAt'>[];
   notes: Dated<NoteRow, 'at'>[];
+  /** What answers are compared with, by the checks that do. A device may still hold a kit from before there were any. */
+  baselines?: Record<string, Baseline>;
   run: { id: string; recordFacts: RecordFacts; becauseOf: string | null };
   /** Levels of the run before the shown one. */
   previous: { causeId: string; p: number }[] | null;

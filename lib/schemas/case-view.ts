@@ -79,6 +79,8 @@ export interface FindingView {
   sum: { id: string; search: Record<string, string> } | null;
   /** What the adopted limit says of a measured value, in words; null: judged by none. */
   judgement: { verdict: 'within' | 'out'; text: string } | null;
+  /** How it stands to what was usual when it was given, both in words; null: nothing to compare with. */
+  compared: string | null;
   thinkSo: boolean;
   person: string;
   /** By the device's corrected clock. */
@@ -205,6 +207,8 @@ export interface CaseView {
   rulebook: RulebookView;
   state: CaseState;
   reasons: CaseReasons;
+  /** What is usual for the unit or its model, now, by the checks that compare with it. */
+  usual: Record<string, string>;
   /** Other cases of the unit that hold its release, now. */
   otherHolds: OtherHoldView[];
   /** The limits that the organisation adopted for this unit, by check. */

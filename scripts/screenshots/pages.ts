@@ -63,6 +63,8 @@ export const SHOTS: readonly Shot[] = [
   shot(`${IN}/units/[id]`, 'unit', 'technician', ({ unit }) => unit && `/units/${unit}`),
   shot(`${IN}/units/[id]`, 'unit-not-found', 'technician', `/units/${NOWHERE}`),
   shot(`${IN}/units/[id]/edit`, 'unit-edit', 'technician', ({ unit }) => unit && `/units/${unit}/edit`),
+  shot(`${IN}/units/[id]/baseline`, 'unit-baseline', 'technician', ({ unit }) => unit && `/units/${unit}/baseline`),
+  shot(`${IN}/units/[id]/baseline`, 'unit-baseline-not-found', 'technician', `/units/${NOWHERE}/baseline`),
   shot(`${IN}/units/[id]/readings/new`, 'unit-reading', 'technician', ({ unit }) => unit && `/units/${unit}/readings/new`),
   shot(`${IN}/units/[id]/fits/new`, 'fit-new', 'technician', ({ unit }) => unit && `/units/${unit}/fits/new`),
   shot(`${IN}/units/[id]/fits/[fitId]`, 'fit', 'technician', ({ fit }) => fit),

@@ -6,6 +6,8 @@ import { action } from '@/lib/auth/action';
 import { changeFit as correct, takeOutFit as takeOut } from '@/lib/services/fit/change';
 import { createFit as create } from '@/lib/services/fit/create';
 import { hideFit as strike } from '@/lib/services/fit/hide';
+import { hideBaseline as putAway } from '@/lib/services/baseline/hide';
+import { recordBaseline as measure } from '@/lib/services/baseline/record';
 import { addReading as noteDown } from '@/lib/services/unit/add-reading';
 import { changeUnit as change } from '@/lib/services/unit/change';
 import { createUnit as add } from '@/lib/services/unit/create';
@@ -29,6 +31,8 @@ export const addReading = action(noteDown, { after: toItsUnit });
 export const strikeReading = action(strikeOut, { after: readAnew });
 
 export const liftHold = action(lift, { after: readAnew });
+export const recordBaseline = action(measure, { after: toItsUnit });
+export const hideBaseline = action(putAway, { after: readAnew });
 
 export const addFit = action(create, { after: toItsUnit });
 export const changeFit = editing(action(correct, { after: toItsUnit }), PAGES);

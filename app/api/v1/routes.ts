@@ -38,6 +38,9 @@ import * as sites from './sites/route';
 import * as sitesId from './sites/[id]/route';
 import * as units from './units/route';
 import * as unitsId from './units/[id]/route';
+import * as unitsIdBaseline from './units/[id]/baseline/route';
+import * as unitsIdBaselines from './units/[id]/baselines/route';
+import * as unitsIdBaselinesSetIdHide from './units/[id]/baselines/[setId]/hide/route';
 import * as unitsIdFits from './units/[id]/fits/route';
 import * as unitsIdHide from './units/[id]/hide/route';
 import * as unitsIdHolds from './units/[id]/holds/route';
@@ -88,6 +91,9 @@ export const ROUTES = {
   '/sites/{id}': sitesId,
   '/units': units,
   '/units/{id}': unitsId,
+  '/units/{id}/baseline': unitsIdBaseline,
+  '/units/{id}/baselines': unitsIdBaselines,
+  '/units/{id}/baselines/{setId}/hide': unitsIdBaselinesSetIdHide,
   '/units/{id}/fits': unitsIdFits,
   '/units/{id}/hide': unitsIdHide,
   '/units/{id}/holds': unitsIdHolds,

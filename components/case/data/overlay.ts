@@ -52,6 +52,7 @@ function viewOf({ id, body }: Extract<Kept, { kind: 'finding' }>, rulebook: Rule
     shares: answer.kind === 'state' ? [{ state: answer.state, share: 1 }] : [],
     sum: null,
     judgement: null,
+    compared: null,
     thinkSo: 'sureness' in answer && answer.sureness === 'think-so',
     person: 'you',
     at: deviceAt,

@@ -10,6 +10,7 @@ import { randomFrom } from './random';
 import { noRows, type DemoRows } from './rows';
 import { Truth, type TrueCause } from './truth';
 import { UnitStory } from './unit-story';
+import { compareFindings } from './compare-findings';
 import { makeVehicles, type Vehicle } from './vehicles';
 
 export interface Demo {
@@ -38,6 +39,7 @@ export function makeDemo(today: Date, rulebook: Rulebook, vehicles: readonly Veh
   modelRows(rows, beganOn(calendar), random.fork('models'));
   limitRows(rows, beganOn(calendar));
   for (const vehicle of vehicles) new UnitStory(world, shop, vehicle, random.fork(vehicle.fleetNumber)).tell();
+  compareFindings(rows, compiled);
   numberCases(rows);
   return { rows, truths: world.truths };
 }

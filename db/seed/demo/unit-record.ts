@@ -143,6 +143,11 @@ export class UnitRecord {
     };
   }
 
+  /** Every compressor that was on it, in order. */
+  get compressors(): readonly Fitted[] {
+    return this.fits;
+  }
+
   finish(): void {
     this.world.rows.unit.push(this.row);
     this.world.rows.unitReading.push(...this.readings);

@@ -1,4 +1,5 @@
 import { NORMAL_CARRYOVER, SOMETHING_ELSE } from '@/lib/diagnose';
+import { measureBaselines } from './baseline-sets';
 import { DAYS_OF_RECORD } from './calendar';
 import type { World } from './world';
 import { idOf, tellCase } from './case-story';
@@ -70,6 +71,7 @@ export class UnitStory {
       else if (random.chance(CHANGED_WITHOUT_A_CASE / 365)) this.fitAnother(day, 'precaution');
     }
     record.finish();
+    measureBaselines(this.world, vehicle, record.compressors, random.fork('baselines'));
   }
 
   /** What was on it when the record begins: what it was built with, or another that came on since. */

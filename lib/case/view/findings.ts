@@ -8,6 +8,7 @@ import { standingFindings } from '../current-findings';
 import type { FindingRow, NoteRow } from '../rows';
 import { answerText } from './answer-text';
 import { measureOf } from './measure';
+import { comparedText } from './usual';
 
 /** All findings of a case, newest first; those that were replaced, taken back or late say so. */
 export function findingViews(
@@ -28,6 +29,7 @@ export function findingViews(
       shares: row.shares,
       sum: row.sum && { id: row.sum.id, search: searchOfInputs(row.sum) },
       judgement: judgementView(compiled.checks.get(row.checkId)?.check, row.judgement, units),
+      compared: comparedText(compiled.checks.get(row.checkId)?.check, row, units),
       thinkSo: row.reliability < 1,
       person: row.person,
       at: row.correctedAt.toISOString(),

@@ -40,6 +40,7 @@ const finding = z
       .nullable()
       .meta({ description: 'The sum of the bench that it came from, with all that went in.' }),
     judgement: z.object({ verdict: z.enum(['within', 'out']), text: z.string() }).nullable().meta({ description: 'What the limit that the organisation adopted says of the value, and which limit.' }),
+    compared: z.string().nullable().meta({ description: 'How it stands to the healthy baseline that counted when it was given, in words.' }),
     thinkSo: z.boolean(),
     person: z.string(),
     at: instant,

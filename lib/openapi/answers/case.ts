@@ -63,6 +63,7 @@ export const caseRecord = z
     calls: z.array(call),
     events: z.array(event),
     moments: z.array(z.object({ at: instant, what: z.string() })).meta({ description: 'Instants that `at` of the state can be asked with.' }),
+    usual: z.record(z.string(), z.string()).meta({ description: 'What is usual for the unit or its model, by the checks that compare with it.' }),
     otherHolds: z.array(otherHold).meta({ description: 'Other cases of the unit that forbid its release.' }),
   })
   .meta({ id: 'CaseRecord' });

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { rulebookShape } from '@/lib/diagnose/schema-shape';
+import { baseline } from './baseline';
 import { setUp, stage } from './case-state';
 import { count, day, id, instant, probability } from './common';
 
@@ -32,6 +33,7 @@ const row = z.object({
     })
     .nullable(),
   judgement: z.object({ limit, verdict: z.enum(['within', 'out']), doubtful: z.boolean() }).nullable(),
+  baseline: baseline.nullable().meta({ description: 'What it was compared with when it was given.' }),
   person: z.string(),
   correctedAt: instant,
   receivedAt: instant,
@@ -51,6 +53,7 @@ export const caseKit = z
     timeZone: z.string(),
     rows: z.array(row),
     notes: z.array(z.object({ id, findingId: id, text: z.string(), person: z.string(), at: instant })),
+    baselines: z.record(z.string(), baseline).meta({ description: 'What answers are compared with, by check.' }),
     run: z.object({ id, recordFacts: z.record(z.string(), z.union([z.string(), z.number()])), becauseOf: z.string().nullable() }),
     previous: z.array(z.object({ causeId: z.string(), p: probability })).nullable(),
     acknowledged: z.array(z.object({ cautionId: z.string(), dangers: z.array(z.string()) })),

@@ -6,8 +6,10 @@ import { siteDay } from '@/lib/case/site-day';
 import { notFound } from '@/lib/errors';
 import { readCaseInput } from '@/lib/schemas/case';
 import type { CaseKit } from '@/lib/schemas/case-kit';
+import { baselinesOfCase } from '../baseline/of-case';
 import { defineRead } from '../define';
 import { limitsOfCase } from '../limit/of-case';
+import { compiledEdition } from '../edition/compiled';
 import { writingOf } from './writing';
 
 /** What a device needs to go on with a case without us; the rulebook comes with its edition. */
@@ -24,6 +26,7 @@ export const readCaseKit = defineRead({
     const notes = await selectFindingNotes(tx, of);
     const [run, previous] = await selectLastRuns(tx, of);
     if (!run) throw notFound('state of the case');
+    const compiled = await compiledEdition(tx, { ...of, editionId: head.editionId });
     const acknowledgedOn = siteDay(ctx.now(), head.timeZone);
     return {
       ...of,
@@ -36,6 +39,7 @@ export const readCaseKit = defineRead({
       timeZone: head.timeZone,
       rows: rows.map((row) => ({ ...row, correctedAt: row.correctedAt.toISOString(), receivedAt: row.receivedAt.toISOString() })),
       notes: notes.map((note) => ({ ...note, at: note.at.toISOString() })),
+      baselines: await baselinesOfCase(tx, { ...of, head, compiled, now: ctx.now() }),
       run: { id: run.id, recordFacts: run.inputs.recordFacts, becauseOf: run.becauseOf },
       previous: previous?.result.causes.map(({ causeId, p }) => ({ causeId, p })) ?? null,
       acknowledged: await selectAcknowledgements(tx, { ...of, personId: ctx.person.id, onDay: acknowledgedOn }),

@@ -5,9 +5,11 @@ import { buildState } from '@/lib/case/build-state';
 import { headView } from '@/lib/case/view/head';
 import { momentsOf } from '@/lib/case/view/moments';
 import { rulebookView } from '@/lib/case/view/rulebook';
+import { usualViews } from '@/lib/case/view/usual';
 import { readCaseInput } from '@/lib/schemas/case';
 import type { CallView, CaseReasons, CaseState, CaseView, OtherHoldView } from '@/lib/schemas/case-view';
 import { limitViews } from '@/lib/case/view/limits';
+import { baselinesOfCase } from '../baseline/of-case';
 import { defineRead } from '../define';
 import { limitsOfCase } from '../limit/of-case';
 import { gatherState } from './gather-state';
@@ -55,6 +57,8 @@ export const readCase = defineRead({
       rulebook,
       state: at ? { ...state, status: statusAt(events) } : state,
       reasons: buildReasons(parts),
+      // Nobody answers in the past, and what was usual then stands with the answers of then.
+      usual: at ? {} : usualViews(await baselinesOfCase(tx, { ...of, head: caseHead, compiled: parts.compiled, now: ctx.now() }), ctx.person.units),
       otherHolds: at ? [] : otherHolds(await holdsOfUnit(tx, { ...of, unitId: caseHead.unitId }), of.caseId),
       limits: at ? {} : limitViews(await limitsOfCase(tx, of), parts.compiled, ctx.person.units),
       assignedTo: caseHead.assignedTo,

@@ -11,6 +11,7 @@ import { readAnswer } from '@/lib/case/read-answer';
 import { releaseHolds } from '@/lib/case/release-holds';
 import { siteDay } from '@/lib/case/site-day';
 import { vehicleAfter } from '@/lib/case/vehicle-after';
+import { comparedWith } from '@/lib/case/view/usual';
 import type { CompiledRulebook } from '@/lib/diagnose';
 import { cautionsToRead } from '@/lib/diagnose/cautions';
 import type { Check } from '@/lib/diagnose/types';
@@ -18,6 +19,7 @@ import { conflict, invalid, notFound } from '@/lib/errors';
 import { recordFindingInput } from '@/lib/schemas/case';
 import type { CaseState } from '@/lib/schemas/case-view';
 import type { Ctx } from '../context';
+import { baselinesOfCase } from '../baseline/of-case';
 import { defineWrite } from '../define';
 import { compiledEdition } from '../edition/compiled';
 import { limitsOfCase } from '../limit/of-case';
@@ -63,7 +65,8 @@ export const recordFinding = defineWrite({
 
     const dated = { id: input.id, checkId: input.checkId, stage: input.stage, correctedAt, receivedAt };
     const { standing, late } = arriving(dated, rows);
-    const finding = { ...answer, ...dated, source: answer.sum ? 'sum' : 'asked', askedBecause: input.askedBecause, late };
+    const baselines = check.check.compares && answer.valueSi !== null ? await baselinesOfCase(tx, { ...of, head, compiled, now: receivedAt }) : {};
+    const finding = { ...answer, ...dated, baseline: comparedWith(input.checkId, answer, baselines), source: answer.sum ? 'sum' : 'asked', askedBecause: input.askedBecause, late };
     const written = await insertFinding(tx, {
       ...finding,
       ...of,

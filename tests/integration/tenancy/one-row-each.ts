@@ -9,13 +9,15 @@ const NO_RULEBOOK = {} as Rulebook;
 
 /** One row in every table that belongs to an organisation; organisation, site, person and membership are there. */
 export async function insertOneRowEach(tx: Transaction, { organisationId, siteId, personId }: { organisationId: string; siteId: string; personId: string }) {
-  const [unitId, modelId, fitId, editionId, caseId, findingId] = [newId(), newId(), newId(), newId(), newId(), newId()];
+  const [unitId, modelId, fitId, editionId, caseId, findingId, setId] = [newId(), newId(), newId(), newId(), newId(), newId(), newId()];
   const of = { organisationId };
   await tx.insert(schema.invitation).values({ ...of, id: newId(), roles: ['technician'], expiresAt: AT, invitedBy: personId });
   await tx.insert(schema.compressorModel).values({ ...of, id: modelId, name: 'Model' });
   await tx.insert(schema.unit).values({ ...of, id: unitId, siteId, fleetNumber: '1', country: 'US', vehicleKind: 'truck' });
   await tx.insert(schema.unitReading).values({ ...of, id: newId(), unitId, readOn: '2026-03-02', source: 'unit' });
   await tx.insert(schema.fit).values({ ...of, id: fitId, unitId, modelId, condition: 'new', installedOn: '2026-01-02' });
+  await tx.insert(schema.baselineSet).values({ ...of, id: setId, unitId, fitId, modelId, occasion: 'service', measuredOn: '2026-03-02', conditions: { ambientK: null, engineSpeedPerS: null, loadedS: null } });
+  await tx.insert(schema.baselineFigure).values({ ...of, setId, figure: 'build-up-time', valueSi: 24, errorSi: 1, valueTyped: '24', unit: 's' });
   await tx.insert(schema.edition).values({ ...of, id: editionId, number: 1, rulebook: NO_RULEBOOK, reason: 'Test', publishedAt: AT });
   await tx.insert(schema.cases).values({ ...of, id: caseId, number: 1, unitId, siteId, fitId, editionId, complaints: ['oil'], openedBy: personId, openedAt: AT });
   await tx.insert(schema.caseEvent).values({ ...of, id: newId(), caseId, kind: 'opened', personId, at: AT });

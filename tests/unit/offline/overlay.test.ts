@@ -5,7 +5,7 @@ import type { Kept } from '@/lib/offline/waiting';
 import type { CaseState, FindingView, RulebookView } from '@/lib/schemas/case-view';
 
 const finding = (id: string, checkId: string, more: Partial<FindingView> = {}): FindingView => ({
-  id, checkId, stage: { kind: 'diagnosis' }, source: 'asked', kind: 'state', answer: 'No', shares: [{ state: 'no', share: 1 }], sum: null, judgement: null, thinkSo: false,
+  id, checkId, stage: { kind: 'diagnosis' }, source: 'asked', kind: 'state', answer: 'No', shares: [{ state: 'no', share: 1 }], sum: null, judgement: null, compared: null, thinkSo: false,
   person: 'Ada', at: '2026-03-02T09:00:00.000Z', receivedAt: '2026-03-02T09:00:00.000Z', late: false, current: true, notes: [], ...more,
 });
 

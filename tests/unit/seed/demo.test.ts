@@ -5,6 +5,9 @@ import { PEOPLE, SITES } from '@/db/seed/demo/organisation';
 import type { Row } from '@/db/seed/demo/rows';
 import { idOf } from '@/db/seed/demo/case-story';
 import { makeVehicles } from '@/db/seed/demo/vehicles';
+import { baselineFor } from '@/lib/baseline/baseline-for';
+import { pool } from '@/lib/baseline/pool';
+import type { BaselineSet } from '@/lib/baseline/set';
 import { compileRulebook, rank } from '@/lib/diagnose';
 import { defaultRulebook } from '@/lib/diagnose/default-rulebook';
 
@@ -73,7 +76,7 @@ describe('the demo', () => {
 
   test('gives every row its own id and refers only to rows that are there', () => {
     const { rows } = demo;
-    const ids = Object.fromEntries(Object.entries(rows).map(([name, all]) => [name, new Set(all.map(({ id }) => id))]));
+    const ids = Object.fromEntries(Object.entries(rows).map(([name, all]) => [name, new Set<string>(all.map((row) => ('id' in row ? row.id : `${row.setId} ${row.figure}`)))]));
     for (const [name, all] of Object.entries(rows)) expect(ids[name]?.size, name).toBe(all.length);
     const people = new Set(PEOPLE.map(({ id }) => id));
     const missing = <T>(all: readonly T[], key: (row: T) => string | null | undefined, known?: ReadonlySet<string>) =>
@@ -81,6 +84,8 @@ describe('the demo', () => {
     expect(missing(rows.unitReading, (row) => row.unitId, ids.unit)).toBe(0);
     expect(missing(rows.fit, (row) => row.unitId, ids.unit)).toBe(0);
     expect(missing(rows.fit, (row) => row.modelId, ids.compressorModel)).toBe(0);
+    expect(missing(rows.baselineSet, (row) => row.fitId, ids.fit)).toBe(0);
+    expect(missing(rows.baselineFigure, (row) => row.setId, ids.baselineSet)).toBe(0);
     expect(missing(rows.cases, (row) => row.unitId, ids.unit)).toBe(0);
     expect(missing(rows.cases, (row) => row.fitId, ids.fit)).toBe(0);
     expect(missing(rows.cases, (row) => row.siteId, new Set(Object.values(SITES).map(({ id }) => id)))).toBe(0);
@@ -95,7 +100,7 @@ describe('the demo', () => {
     const audited = new Set(rows.audit.map(({ entityId }) => entityId));
     // What a case is opened with is audited as its opening.
     const answers = rows.finding.filter(({ askedBecause }) => askedBecause !== 'always');
-    const written = [rows.unit, rows.compressorModel, rows.fit, rows.cases, rows.findingNote, rows.call, rows.unitReading, answers];
+    const written = [rows.unit, rows.compressorModel, rows.fit, rows.cases, rows.findingNote, rows.call, rows.unitReading, rows.baselineSet, answers];
     expect(written.map((all) => all.filter(({ id }) => !audited.has(id)).length)).toEqual(written.map(() => 0));
   });
 });
@@ -124,6 +129,29 @@ describe('units of the demo', () => {
         expect(fit.removedOn ?? null).toBe(inOrder[i + 1]?.installedOn ?? null);
         expect(fit.whyOut === null).toBe(i === inOrder.length - 1);
       });
+    }
+  });
+});
+
+describe('healthy baselines of the demo', () => {
+  test('leave units with sets of their own, with their model’s and with none', () => {
+    const setOf = (set: Row<'baselineSet'>) => {
+      const figures = demo.rows.baselineFigure.filter(({ setId }) => setId === set.id).map(({ figure, valueSi, errorSi }) => [figure, { si: valueSi, errorSi }]);
+      return { ...set, figures: Object.fromEntries(figures) as BaselineSet['figures'] };
+    };
+    const sets = demo.rows.baselineSet.map(setOf);
+    const from = demo.rows.fit.filter(({ removedOn }) => !removedOn).map(({ unitId, modelId, installedOn }) => {
+      const own = sets.filter((set) => set.unitId === unitId);
+      const pooled = pool(sets.filter((set) => set.modelId === modelId));
+      return baselineFor({ own, since: installedOn, pooled })['build-up-time']?.from ?? 'none';
+    });
+    for (const kind of ['own', 'model', 'none']) expect(from.filter((one) => one === kind).length, kind).toBeGreaterThanOrEqual(5);
+  });
+
+  test('are measured while no case is open', () => {
+    for (const { unitId, createdAt } of demo.rows.baselineSet) {
+      const open = demo.rows.cases.filter((one) => one.unitId === unitId && createdAt && one.openedAt <= createdAt && (!one.closedAt || one.closedAt > createdAt));
+      expect(open).toEqual([]);
     }
   });
 });

@@ -1,4 +1,5 @@
 import { measureText } from '@/components/units/MeasureField';
+import { FIGURES } from '@/lib/baseline/figures';
 import { defaultRulebook } from '@/lib/diagnose/default-rulebook';
 import { dayText } from '@/lib/schemas/day-text';
 import { PARTS_WITH_IT } from '@/lib/schemas/fit';
@@ -52,10 +53,12 @@ const LABELS: Readonly<Record<string, string>> = {
   assignedTo: 'With',
   personId: 'Person',
   onDay: 'Day',
+  measuredOn: 'Measured on',
+  ...Object.fromEntries(FIGURES.map(({ id, name }) => [id, name])),
 };
 
 /** Of use to whoever looks into a fault of ours, and in the raw record all the same. */
-const RAW_ONLY = new Set(['kind', 'shares', 'asTyped', 'strokes', 'query', 'cautions', 'version']);
+const RAW_ONLY = new Set(['kind', 'shares', 'asTyped', 'conditions', 'strokes', 'query', 'cautions', 'version']);
 
 const NAMES = new Map([...defaultRulebook.checks, ...defaultRulebook.causes].map(({ id, name }) => [id, name]));
 const RULEBOOK_FIELDS = new Set(['checkId', 'mainCause', 'contributingCauses', 'complaints', 'dangers', 'sureness', 'roles', 'scopes', 'status']);

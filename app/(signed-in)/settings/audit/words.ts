@@ -20,6 +20,7 @@ export const ACTION_WORDS: Readonly<Record<string, string>> = {
   'create.fit': 'Recorded a fit',
   'create.unit': 'Added a unit',
   'end.membership': 'Ended a membership',
+  'hide.baseline-set': 'Hid a healthy baseline',
   'hide.compressor-model': 'Hid a compressor model',
   'hide.fit': 'Hid a fit',
   'hide.photo': 'Hid a photo, or showed it again',
@@ -31,6 +32,7 @@ export const ACTION_WORDS: Readonly<Record<string, string>> = {
   'mark.photo': 'Drew on a photo or described it',
   'note.finding': 'Noted something at an answer',
   'open.case': 'Opened a case',
+  'record.baseline-set': 'Measured a healthy baseline',
   'record.finding': 'Answered a check',
   'remove.saved_view': 'Removed a view of a list',
   'rename.person': 'Changed their own name',
@@ -54,6 +56,7 @@ export const ACTION_WORDS: Readonly<Record<string, string>> = {
 /** The kinds of things that are written, as one picks among them. */
 export const ENTITY_WORDS: Readonly<Record<string, string>> = {
   'api-token': 'Tokens',
+  'baseline-set': 'Healthy baselines',
   call: 'Calls',
   case: 'Cases',
   caution_acknowledgement: 'Cautions acknowledged',
@@ -94,7 +97,7 @@ export function subjectOf({ entity, entityId, changed }: Written): { href: strin
   if (typeof changed.caseId === 'string') return { href: `/cases/${changed.caseId}`, label: 'The case' };
   if (entity === 'unit') return { href: `/units/${entityId}`, label: 'The unit' };
   if (entity === 'fit' && typeof changed.unitId === 'string') return { href: `/units/${changed.unitId}/fits/${entityId}`, label: 'The fit' };
-  if (entity === 'unit-reading' && typeof changed.unitId === 'string') return { href: `/units/${changed.unitId}`, label: 'The unit' };
+  if ((entity === 'unit-reading' || entity === 'baseline-set') && typeof changed.unitId === 'string') return { href: `/units/${changed.unitId}`, label: 'The unit' };
   if (entity === 'compressor-model') return { href: `/models/${entityId}`, label: 'The model' };
   if (entity === 'limit' && changed.withdrawn !== true) return { href: `/settings/limits/${entityId}`, label: 'The limit' };
   if (entity === 'site') return { href: `/settings/sites/${entityId}`, label: 'The site' };

@@ -6,19 +6,22 @@ import { DefinitionList } from '@/components/ui/DefinitionList';
 import { Notice } from '@/components/ui/Notice';
 import { PageHeader } from '@/components/ui/PageHeader';
 import { Tag } from '@/components/ui/Tag';
+import { Baseline } from '@/components/units/Baseline';
 import { History } from '@/components/units/History';
 import { LiftedHolds, UnitHolds } from '@/components/units/UnitHolds';
 import { measureText } from '@/components/units/MeasureField';
-import { HideForm, ShowForm, StrikeReadingForm } from '@/components/units/ReasonForms';
+import { HideBaselineForm, HideForm, ShowForm, StrikeReadingForm } from '@/components/units/ReasonForms';
 import { readingLabel, ReadingTable } from '@/components/units/ReadingTable';
 import { orNotFound, pageContext } from '@/lib/auth/page';
 import { may, PERMITTED } from '@/lib/auth/permissions';
 import { dayText } from '@/lib/schemas/day-text';
+import { OCCASION_WORDS } from '@/lib/baseline/words';
 import { UNIT_MEASURES } from '@/lib/schemas/measures';
 import { termLabel } from '@/lib/schemas/terms';
+import { readBaseline } from '@/lib/services/baseline/read';
 import { readUnit, type UnitPage as UnitRecord } from '@/lib/services/unit/read';
 import type { UnitPreferences } from '@/lib/units';
-import { hideUnit, liftHold, showUnit, strikeReading } from '../actions';
+import { hideBaseline, hideUnit, liftHold, showUnit, strikeReading } from '../actions';
 
 export const metadata: Metadata = { title: 'Unit' };
 
@@ -26,9 +29,11 @@ export default async function UnitPage({ params }: { params: Promise<{ id: strin
   const ctx = await pageContext(PERMITTED['unit.see']);
   const { id } = await params;
   const record = await orNotFound(readUnit({ ctx, input: { unitId: id } }));
+  const baseline = await readBaseline({ ctx, input: { unitId: id } });
   const { unit, currentFit, fits, cases, readings, today, hidden } = record;
   const { units } = ctx.person;
   const mayEdit = may(ctx.roles, 'unit.edit');
+  const mayWork = may(ctx.roles, 'case.work');
   const work = termLabel('vocation', unit.vocation)?.toLowerCase();
   const vehicle = `${termLabel('vehicleKind', unit.vehicleKind)}${work ? `, ${work},` : ''}`;
 
@@ -44,7 +49,7 @@ export default async function UnitPage({ params }: { params: Promise<{ id: strin
             {mayEdit && <ButtonLink variant="quiet" href={`/units/${id}/edit`}>Edit</ButtonLink>}
             {mayEdit && <ButtonLink variant="quiet" href={`/units/${id}/readings/new`}>Enter a reading</ButtonLink>}
             {mayEdit && <ButtonLink variant="quiet" href={`/units/${id}/fits/new`}>Record a fit</ButtonLink>}
-            {may(ctx.roles, 'case.work') && !unit.hiddenAt && <ButtonLink href={`/cases/new?unit=${id}`}>Open a case</ButtonLink>}
+            {mayWork && !unit.hiddenAt && <ButtonLink href={`/cases/new?unit=${id}`}>Open a case</ButtonLink>}
           </>
         }
       />
@@ -71,6 +76,10 @@ export default async function UnitPage({ params }: { params: Promise<{ id: strin
             <h2 id="facts" className="mb-4">The unit</h2>
             <DefinitionList items={unitFacts(unit, units)} />
           </section>
+          <section aria-labelledby="baseline">
+            <h2 id="baseline" className="mb-4">Healthy baseline</h2>
+            <Baseline baseline={baseline} units={units} measureHref={mayWork ? `/units/${id}/baseline` : undefined} />
+          </section>
           {currentFit && (
             <section aria-labelledby="on-it">
               <h2 id="on-it" className="mb-4">On it now</h2>
@@ -84,6 +93,9 @@ export default async function UnitPage({ params }: { params: Promise<{ id: strin
         <div className="mt-10 grid gap-2">
           {readings.length > 0 && (
             <StrikeReadingForm action={strikeReading} unitId={id} readings={readings.toReversed().map((row) => ({ value: row.id, label: readingLabel(row, units) }))} />
+          )}
+          {mayWork && baseline.sets.length > 0 && (
+            <HideBaselineForm action={hideBaseline} unitId={id} sets={baseline.sets.map((set) => ({ value: set.id, label: `${dayText(set.measuredOn)}, ${OCCASION_WORDS[set.occasion].toLowerCase()}` }))} />
           )}
           {!unit.hiddenAt && (
             <HideForm action={hideUnit} id={{ name: 'unitId', value: id }} title="Hide this unit" explains="For a unit that was sold or entered twice. It leaves the lists and searches; its cases and its history stay, and it can be shown again." />

@@ -52,6 +52,7 @@ const atWork: Check[] = [
       { id: 'very-slow', label: 'Over 45 s, or it never gets there', background: 0.165, low: seconds(46), holdsRelease: true },
     ],
     sum: { id: 'measured-build-up', output: 'corrected' },
+    compares: 'build-up-time',
     cannotTell: 0.05,
     basis: 'regulation',
     source:
@@ -126,6 +127,7 @@ const atWork: Check[] = [
       { id: 'above', label: '15 to 40 °C (27 to 72 °F) above it', background: 0.24, low: kelvins(15), high: kelvins(40) },
       { id: 'far-above', label: '40 °C (72 °F) or more above it', background: 0.157, low: kelvins(40) },
     ],
+    compares: 'head-temperature',
     cannotTell: 0.3,
     ...judgement,
   }),

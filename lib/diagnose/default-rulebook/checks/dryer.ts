@@ -123,6 +123,7 @@ export const checks: Check[] = [
       { id: 'very-much', label: '5 mL an hour or more', background: 0.118, low: millilitresPerHour(5) },
     ],
     sum: { id: 'carry-over', output: 'perHour' },
+    compares: 'oil-carried',
     cannotTell: 0.5,
     ...judgement,
   }),

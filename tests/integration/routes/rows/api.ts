@@ -1,6 +1,7 @@
 import { PERMITTED } from '@/lib/auth/permissions';
 import { ANYONE } from '@/lib/auth/roles';
 import { newId } from '@/lib/ids';
+import { recordBaseline } from '@/lib/services/baseline/record';
 import { callCause } from '@/lib/services/case/call';
 import { openCase } from '@/lib/services/case/open';
 import { readCaseState } from '@/lib/services/case/read';
@@ -29,8 +30,8 @@ const ANY = () => ({ 'if-match': '*' });
 export const api = feature({
   async prepare({ tenant, as }) {
     const ctx = as('technician');
-    const ids = { caseId: newId(), calledId: newId(), unitId: newId(), hiddenUnitId: newId(), findingId: newId(), modelId: newId(), hiddenModelId: newId(), fitId: newId() };
-    const { caseId, calledId, unitId, hiddenUnitId, findingId, modelId, hiddenModelId, fitId } = ids;
+    const ids = { caseId: newId(), calledId: newId(), unitId: newId(), hiddenUnitId: newId(), findingId: newId(), modelId: newId(), hiddenModelId: newId(), fitId: newId(), setId: newId() };
+    const { caseId, calledId, unitId, hiddenUnitId, findingId, modelId, hiddenModelId, fitId, setId } = ids;
     for (const id of [modelId, hiddenModelId]) await createModel({ ctx: as('engineer'), input: { id, name: id, bore: '3 5/8' } });
     await hideModel({ ctx: as('engineer'), input: { modelId: hiddenModelId, reason: 'Out of use' } });
     const facts = { siteId: tenant.siteId, vehicleKind: 'truck' as const };
@@ -38,6 +39,7 @@ export const api = feature({
     await createUnit({ ctx, input: { id: hiddenUnitId, fleetNumber: hiddenUnitId, ...facts } });
     await hideUnit({ ctx, input: { unitId: hiddenUnitId, reason: 'Sold' } });
     await createFit({ ctx, input: { id: fitId, unitId, modelId, condition: 'new', installedOn: '2024-02-01', installedOdometer: '200' } });
+    await recordBaseline({ ctx, input: { id: setId, unitId, occasion: 'service', measuredOn: '2024-03-01', buildUp: '24' } });
     for (const id of [caseId, calledId]) await openCase({ ctx, input: { id, unit: { kind: 'known', unitId }, complaints: ['complaint-oil'] } });
     await recordFinding({ ctx, input: { id: findingId, caseId, checkId: CHECK, answer: { kind: 'cannot-tell' }, deviceAt: ctx.now().toISOString() } });
     const { causes } = await readCaseState({ ctx, input: { caseId: calledId } });
@@ -107,6 +109,21 @@ export const api = feature({
       roles: EDIT_UNITS,
       params: ({ unitId, readingId }) => ({ id: unitId, readingId }),
       body: () => ({ whyWrong: 'A nought too many' }),
+    },
+    { route: `${V1}/units/[id]/baseline`, method: 'GET', roles: SEE_UNITS, params: ({ unitId }) => ({ id: unitId }) },
+    {
+      route: `${V1}/units/[id]/baselines`,
+      method: 'POST',
+      roles: WORK,
+      params: ({ unitId }) => ({ id: unitId }),
+      body: () => ({ id: newId(), occasion: 'service', measuredOn: '2025-01-01', headTemperature: '150 °C', ambient: '20 °C', engineSpeed: '1,600 rpm', loadedFor: '10 min', oilCarried: '0.2 mL/h' }),
+    },
+    {
+      route: `${V1}/units/[id]/baselines/[setId]/hide`,
+      method: 'POST',
+      roles: WORK,
+      params: ({ unitId, setId }) => ({ id: unitId, setId }),
+      body: () => ({ whyHidden: 'The gauge was wrong' }),
     },
     { route: `${V1}/units/[id]/fits`, method: 'GET', roles: SEE_UNITS, params: ({ unitId }) => ({ id: unitId }) },
     {
