@@ -7,6 +7,7 @@ import type { Check } from '@/lib/diagnose/types';
 import { notFound } from '@/lib/errors';
 import { CHECKS_WITH_FIGURES, limitText, publishedFor } from '@/lib/limits';
 import { pageOf } from '@/lib/schemas/browse';
+import { dayText } from '@/lib/schemas/day-text';
 import { browseLimitsInput, limitFormInput, limitIdInput } from '@/lib/schemas/limit';
 import { formatQuantity, unitFor, type Quantity } from '@/lib/units';
 import { z } from 'zod';
@@ -32,6 +33,8 @@ export const listLimits = defineRead({
     return checks.map(({ id, name }) => ({ checkId: id, name, published: publishedFor(id).length, limits: limits.filter(({ checkId }) => checkId === id) }));
   },
 });
+
+export type CheckLimits = Awaited<ReturnType<typeof listLimits>>[number];
 
 /** The limits that stand, one page after another. */
 export const browseLimits = defineRead({
@@ -85,7 +88,12 @@ export const readLimitForm = defineRead({
     const figures = check ? publishedFor(check.id) : [];
     const chosen = figures.find(({ id }) => id === input.from);
     const { rows: models } = await selectModels(tx, { organisationId, hidden: false, sort: 'name', direction: 'asc', limit: 500, offset: 0 });
-    const written = (si: number | undefined) => (si === undefined || !chosen ? '' : formatQuantity<Quantity>(si, { quantity: chosen.quantity, unit: chosen.like }));
+    // As its source writes it, less a unit that is printed beside the field anyway.
+    const written = (si: number | undefined) => {
+      if (si === undefined || !chosen) return '';
+      const text = formatQuantity<Quantity>(si, { quantity: chosen.quantity, unit: chosen.like });
+      return chosen.like === measure?.unit ? text.replace(/[^\d.]+$/, '') : text;
+    };
     return {
       checks: checks.map(({ id, name }) => ({ id, name })),
       check: check && measure ? { id: check.id, name: check.name, quantity: measure.quantity, unit: measure.unit } : null,
@@ -93,7 +101,7 @@ export const readLimitForm = defineRead({
         id: figure.id,
         what: figure.what,
         text: limitText({ least: figure.least ?? null, most: figure.most ?? null, below: figure.below ?? false }, { quantity: figure.quantity, unit: unitFor(ctx.person.units, figure.quantity, figure.like) }),
-        for: [figure.region ?? figure.country, figure.vehicle === 'any' ? null : figure.vehicle, figure.builtFrom && `built from ${figure.builtFrom}`, figure.when].filter(Boolean).join(', '),
+        for: [figure.region ?? figure.country, figure.vehicle === 'any' ? null : figure.vehicle, figure.builtFrom && `built from ${dayText(figure.builtFrom)}`, figure.when].filter(Boolean).join(', '),
         source: `${figure.source} (${figure.standing})${figure.fromMemory ? '; remembered, look it up' : ''}`,
       })),
       values: {
