@@ -17,10 +17,13 @@ interface Props {
 /** Lifts one check's "do not release", on what is measured or seen now. */
 export function LiftForm({ action, unitId, holdId, check }: Props) {
   const form = useForm(action);
-  const field = (name: string) => ({ ...form.field(name), id: `${name}-${holdId}` });
+  // Several of these stand on one page, so that a field's name is not its id.
+  const idOf = (name: string) => `${name}-${holdId}`;
+  const field = (name: string) => ({ ...form.field(name), id: idOf(name) });
+  const errors = Object.fromEntries(Object.entries(form.errors).map(([name, text]) => [idOf(name), text]));
   return (
     <Disclosure summary={<>Lift it<span className="sr-only">: {check}</span></>} open={form.message !== undefined}>
-      <Form form={form} label={`Lift: ${check}`} errorTitle="Not lifted yet">
+      <Form form={{ ...form, errors }} label={`Lift: ${check}`} errorTitle="Not lifted yet">
         <input type="hidden" name="unitId" value={unitId} readOnly />
         <input type="hidden" name="holdId" value={holdId} readOnly />
         <p>What you enter is kept with your name and the right you have for it. The maker’s information and local rules come first.</p>
