@@ -23,6 +23,7 @@ import { StationChecks } from './StationChecks';
 import { SyncStrip } from './SyncStrip';
 import { useCase, type CaseHandle } from './use-case';
 import { nameOf, useHeld } from './use-held';
+import { usePassedHolds } from './use-passed-holds';
 import { useSteadyHeight } from './use-steady-height';
 import { WhatNext } from './WhatNext';
 import { changeText } from './words';
@@ -47,6 +48,8 @@ export function CaseDesk({ view, drawing, hand: kept, decimalMark }: Props) {
   const [picked, setPicked] = useState<Picked>(null);
   const [station, setStation] = useState<StationId | null>(null);
   const [hand, setHand] = useState(kept);
+  const passedHere = usePassedHolds(state);
+  const checkName = (id: string) => rulebook.checks[id]?.name ?? id;
   const readOnly = state.at !== null || state.status !== 'open';
   const pick = (next: Picked) => {
     setStation(null);
@@ -61,7 +64,7 @@ export function CaseDesk({ view, drawing, hand: kept, decimalMark }: Props) {
   return (
     <div data-hand={hand} className="grid gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,1fr)_minmax(0,27rem)]">
       <div className="grid min-w-0 gap-4 lg:col-span-2">
-        <ReleaseHold unitId={view.head.unit.id} checks={state.releaseHolds.map((id) => rulebook.checks[id]?.name ?? id)} others={view.otherHolds} />
+        <ReleaseHold unitId={view.head.unit.id} checks={state.releaseHolds.map(checkName)} passedHere={passedHere.map(checkName)} others={view.otherHolds} />
         <OilPath drawing={drawing} suspicion={state.suspicion} open={openChecks(state, rulebook)} picked={station} onPick={pickStation} />
         <SyncStrip sync={handle.sync} rulebook={rulebook} />
       </div>

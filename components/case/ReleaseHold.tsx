@@ -6,6 +6,8 @@ interface Props {
   unitId: string;
   /** Names of the checks of this case that hold. */
   checks: readonly string[];
+  /** Names of those that held and have passed while the page was open. */
+  passedHere: readonly string[];
   /** What else holds the unit. */
   others: readonly OtherHoldView[];
 }
@@ -16,9 +18,9 @@ const listed = new Intl.ListFormat('en-GB');
  * "Do not release", with the checks that say so. Danger to people, so it is red, and always in words. Renders nothing
  * when nothing holds.
  */
-export function ReleaseHold({ unitId, checks, others }: Props) {
-  const passed = others.flatMap((other) => other.passed);
-  if (checks.length === 0 && others.length === 0) return null;
+export function ReleaseHold({ unitId, checks, passedHere, others }: Props) {
+  const passed = [...new Set([...others.flatMap((other) => other.passed), ...passedHere])].filter((name) => !checks.includes(name));
+  if (checks.length + passed.length === 0 && others.every((other) => other.checks.length === 0)) return null;
   return (
     <section aria-labelledby="do-not-release" className="mb-6 border-2 border-danger bg-danger-ground px-4 py-3">
       <h2 id="do-not-release" className="text-danger">Do not release</h2>

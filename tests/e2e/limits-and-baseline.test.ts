@@ -73,6 +73,10 @@ describe('what a unit is held to', () => {
     await technician.getByRole('heading', { name: 'Do not release' }).waitFor();
     await technician.getByText(/Out of the limit your organisation adopted, less than 2\s*psi\/min/).first().waitFor();
     await technician.getByText(/above this unit’s own 1\.2\s*psi\/min/).first().waitFor();
+    await technician.locator('section[aria-labelledby=answered], section').getByRole('button', { name: /^Change: Leak-down, brakes released/ }).first().click();
+    await technician.getByLabel(/You measured/).fill('1');
+    await technician.getByRole('button', { name: /^Save/ }).first().click();
+    await technician.getByText(/passed since\. Somebody with the right to release lifts the flag/).waitFor();
     await technician.goto(unitPath);
     await technician.getByText('lifted by somebody with the right to release').waitFor();
 
