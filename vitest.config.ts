@@ -34,6 +34,8 @@ export default defineConfig({
           fileParallelism: false,
           testTimeout: 120_000,
           hookTimeout: 120_000,
+          // What a page comes to is right or wrong, however busy the machine is.
+          expect: { poll: { timeout: 15_000 } },
         },
       },
     ],
