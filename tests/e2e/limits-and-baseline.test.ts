@@ -30,13 +30,13 @@ describe('what a unit is held to', () => {
     await engineer.getByRole('link', { name: 'Adopt a limit for Governor cut-out' }).click();
     await engineer.getByRole('link', { name: /120 psi to 140 psi/ }).click();
     await engineer.waitForURL(/from=us-cut-out/);
-    // As a page of its own: one that is led to gets its title a moment later.
-    await engineer.reload();
+    // A page that is led to gets its title a moment after its content.
+    await engineer.waitForFunction(() => document.title.startsWith('Adopt a limit'));
     await expectNoAxeViolations(engineer);
     await engineer.getByRole('button', { name: 'Adopt the limit' }).click();
     const adopted = engineer.getByRole('link', { name: '120 psi to 140 psi' });
     await adopted.waitFor();
-    await engineer.goto(`${server.url}/settings/limits`);
+    await engineer.waitForFunction(() => document.title.startsWith('Limits'));
     await expectNoAxeViolations(engineer);
     await adopted.click();
     await engineer.getByText('Withdraw this limit').first().click();
