@@ -2,13 +2,13 @@
 
 import { useCallback, useDeferredValue, useMemo } from 'react';
 import { LiveRegion } from '@/components/ui/LiveRegion';
-import { Notice } from '@/components/ui/Notice';
 import { sumOf } from '@/lib/air-and-oil/sums';
 import type { Sum } from '@/lib/air-and-oil/sums/sum';
 import type { InputText, Writing } from '@/lib/bench/read-texts';
 import { shown, shownValue } from '@/lib/bench/show';
 import { textsOfSearch } from '@/lib/bench/texts-in-url';
 import { siOf, workOut } from '@/lib/bench/work-out';
+import { BeforeYouMeasure } from './BeforeYouMeasure';
 import { CoverageNote } from './CoverageNote';
 import { Foot } from './Foot';
 import { Formula } from './Formula';
@@ -55,12 +55,7 @@ function Desk({ sum, search, known, writing, target }: DeskProps) {
     <div className="grid gap-x-14 gap-y-10 lg:grid-cols-[minmax(0,1fr)_minmax(0,26rem)]">
       <div className="grid min-w-0 content-start gap-6">
         <h2 className="sr-only">Readings</h2>
-        {sum.cautions.length > 0 && (
-          <Notice kind="caution" title="Before you measure">
-            <ul className="ml-5 grid list-disc gap-1">{sum.cautions.map((caution) => <li key={caution}>{caution}</li>)}</ul>
-            <p className="mt-2 text-[0.9375rem]">The vehicle maker’s information, local rules and a qualified person’s judgement come first.</p>
-          </Notice>
-        )}
+        <BeforeYouMeasure cautions={sum.cautions} />
         <SumTimer sum={sum} writing={writing} name={target ? `${target.caseId}/${sum.id}` : sum.id} onSeconds={(id, seconds) => onText(id, { ...texts[id], value: `${seconds.toFixed(1)} s` })} />
         <form onSubmit={(event) => event.preventDefault()} onFocus={keypad.onFocus} aria-label="Readings" className="grid gap-5">
           <SumFields {...{ sum, texts, writing, onText }} inputMode={keypad.inputMode} errors={worked.kind === 'refused' ? worked.errors : {}} known={fromWhere(known, texts, sum, writing)} />

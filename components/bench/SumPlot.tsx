@@ -1,16 +1,13 @@
 'use client';
 
-import { lazy, Suspense, useMemo, useSyncExternalStore, type ComponentType } from 'react';
-import type { LinePlotProps } from '@/components/plots/LinePlot';
+import { useMemo } from 'react';
+import { PlotInPlace } from '@/components/plots/PlotInPlace';
 import { DataTable } from '@/components/ui/DataTable';
 import { Disclosure } from '@/components/ui/Disclosure';
 import { completeInputs, plotPoints, type Given } from '@/lib/air-and-oil/sums';
 import type { Sum, SumQuantity } from '@/lib/air-and-oil/sums/sum';
 import type { Writing } from '@/lib/bench/read-texts';
 import { shown, shownNumber, shownValue, symbolOf } from '@/lib/bench/show';
-
-// The chart library comes with the first plot that is shown, and not before. Where it can't be fetched, words and table do.
-const LinePlot = lazy<ComponentType<LinePlotProps>>(() => import('@/components/plots/LinePlot').catch(() => ({ default: () => null })));
 
 interface Props {
   sum: Sum;
@@ -19,25 +16,19 @@ interface Props {
   writing: Writing;
 }
 
-/** A canvas is drawn in the browser alone; its place, its words and its table are there before. */
-const never = () => () => undefined;
-
 /** A row of the table for every so many points of the line. */
 const TABLE_EVERY = 8;
 
 /** Where the shape tells more than the number: a line over one input, where one stands on it, and the same in words and in a table. */
 export function SumPlot({ sum, given, writing }: Props) {
   const data = useMemo(() => dataOf(sum, given, writing), [sum, given, writing]);
-  const inBrowser = useSyncExternalStore(never, () => true, () => false);
   const { plot } = sum;
   if (!plot) return null;
   return (
     <section aria-labelledby="plot" className="grid min-w-0 content-start gap-3 lg:col-span-2">
       <h2 id="plot">{plot.title}</h2>
       <p className="max-w-prose" data-testid="plot-summary">{data?.summary ?? 'The plot comes when every reading can be used.'}</p>
-      <div className="h-80" aria-hidden="true">
-        {data && inBrowser && <Suspense fallback={null}><LinePlot {...data.drawn} /></Suspense>}
-      </div>
+      <PlotInPlace drawn={data?.drawn} />
       {data && (
         <Disclosure summary="The same as a table">
           <DataTable

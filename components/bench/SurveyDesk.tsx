@@ -2,10 +2,10 @@
 
 import { useDeferredValue, useMemo } from 'react';
 import { LiveRegion } from '@/components/ui/LiveRegion';
-import { Notice } from '@/components/ui/Notice';
 import { survey, suddenText, SURVEY_FIELDS, surveyText } from '@/lib/bench/line-survey';
 import type { Writing } from '@/lib/bench/read-texts';
 import { textsOfSearch } from '@/lib/bench/texts-in-url';
+import { BeforeYouMeasure } from './BeforeYouMeasure';
 import { Foot } from './Foot';
 import { SurveyFields } from './SurveyFields';
 import { SurveyPlot } from './SurveyPlot';
@@ -51,10 +51,7 @@ export function SurveyDesk({ search, writing }: Props) {
     <div className="grid gap-x-14 gap-y-10 lg:grid-cols-[minmax(0,1fr)_minmax(0,26rem)]">
       <div className="grid min-w-0 content-start gap-6">
         <h2 className="sr-only">Readings</h2>
-        <Notice kind="caution" title="Before you measure">
-          <List lines={CAUTIONS} />
-          <p className="mt-2 text-[0.9375rem]">The vehicle maker’s information, local rules and a qualified person’s judgement come first.</p>
-        </Notice>
+        <BeforeYouMeasure cautions={CAUTIONS} />
         <List lines={HOW} />
         <form onSubmit={(event) => event.preventDefault()} onFocus={keypad.onFocus} aria-label="Readings" className="grid gap-4">
           <SurveyFields {...{ texts, writing, onText }} errors={surveyed.kind === 'refused' ? surveyed.errors : {}} inputMode={keypad.inputMode} />

@@ -1,25 +1,18 @@
 'use client';
 
-import { lazy, Suspense, useMemo, useSyncExternalStore, type ComponentType } from 'react';
-import type { LinePlotProps } from '@/components/plots/LinePlot';
+import { useMemo } from 'react';
+import { PlotInPlace } from '@/components/plots/PlotInPlace';
 import { DataTable } from '@/components/ui/DataTable';
 import { Disclosure } from '@/components/ui/Disclosure';
 import { axisOf, DISTANCE, fallText, perLength, surveySummary, TEMPERATURE, type Surveyed } from '@/lib/bench/line-survey';
 import type { Writing } from '@/lib/bench/read-texts';
 import { shown, shownNumber } from '@/lib/bench/show';
 
-// The chart library comes with the first plot that is shown, and not before. Where it can't be fetched, words and table do.
-const LinePlot = lazy<ComponentType<LinePlotProps>>(() => import('@/components/plots/LinePlot').catch(() => ({ default: () => null })));
-
-/** A canvas is drawn in the browser alone; its place, its words and its table are there before. */
-const never = () => () => undefined;
-
 /** The line's temperature over its length, and the same in words and in a table of its stretches. */
 export function SurveyPlot({ read, writing }: { read: Extract<Surveyed, { kind: 'read' }> | undefined; writing: Writing }) {
-  const inBrowser = useSyncExternalStore(never, () => true, () => false);
   const drawn = useMemo(
     () =>
-      read && {
+      read && read.stretches.length > 0 && {
         xLabel: axisOf(DISTANCE, writing),
         yLabel: axisOf(TEMPERATURE, writing),
         series: [{ label: TEMPERATURE.label, points: read.points.map(({ distanceM, temperatureK }) => ({ x: shownNumber(distanceM, DISTANCE, writing), y: shownNumber(temperatureK, TEMPERATURE, writing) })) }],
@@ -31,9 +24,7 @@ export function SurveyPlot({ read, writing }: { read: Extract<Surveyed, { kind: 
     <section aria-labelledby="plot" className="grid min-w-0 content-start gap-3 lg:col-span-2">
       <h2 id="plot">Along the line</h2>
       <p className="max-w-prose" data-testid="plot-summary">{read ? surveySummary(read, writing) : 'The plot comes when every reading can be used.'}</p>
-      <div className="h-80" aria-hidden="true">
-        {drawn && inBrowser && (read?.stretches.length ?? 0) > 0 && <Suspense fallback={null}><LinePlot {...drawn} /></Suspense>}
-      </div>
+      <PlotInPlace drawn={drawn} />
       {read && read.stretches.length > 0 && (
         <Disclosure summary="The same as a table">
           <DataTable

@@ -50,38 +50,56 @@ export function ShowForm<Result>({ action, id }: Pick<HideProps<Result>, 'action
   );
 }
 
-/** Strikes one of several readings out. */
-export function StrikeReadingForm<Result>({ action, unitId, readings }: { action: Action<Result>; unitId: string; readings: readonly Option[] }) {
+interface PickProps<Result> {
+  action: Action<Result>;
+  unitId: string;
+  title: string;
+  explains: string;
+  /** What is picked, by its field. */
+  pick: { name: string; label: string; placeholder: string; options: readonly Option[] };
+  /** Its field is not called `reason`: it stands on one page with that of hiding the unit, and a field's name is its id. */
+  why: { name: string; label: string };
+  submit: { label: string; pending: string };
+}
+
+/** Takes one of several things of a unit out of what counts, with why. */
+function PickOneForm<Result>({ action, unitId, title, explains, pick, why, submit }: PickProps<Result>) {
   const form = useForm(action);
   return (
-    <Disclosure summary="Strike out a wrong reading" open={form.message !== undefined}>
-      <Form form={form} label="Strike out a wrong reading" errorTitle="Not done yet">
+    <Disclosure summary={title} open={form.message !== undefined}>
+      <Form form={form} label={title} errorTitle="Not done yet">
         <input type="hidden" name="unitId" value={unitId} readOnly />
-        <p>It stays in the audit, and nothing counts with it any more. Then enter the right one.</p>
-        <SelectField label="Reading" placeholder="Choose the reading" required options={readings} {...form.field('readingId')} />
-        <TextField label="What is wrong with it" autoComplete="off" required {...form.field('whyWrong')} />
+        <p>{explains}</p>
+        <SelectField label={pick.label} placeholder={pick.placeholder} required options={pick.options} {...form.field(pick.name)} />
+        <TextField label={why.label} autoComplete="off" required {...form.field(why.name)} />
         <div>
-          <SubmitButton pendingLabel="Striking out…">Strike it out</SubmitButton>
+          <SubmitButton pendingLabel={submit.pending}>{submit.label}</SubmitButton>
         </div>
       </Form>
     </Disclosure>
   );
 }
 
+/** Strikes one of several readings out. */
+export const StrikeReadingForm = <Result,>({ readings, ...rest }: Pick<PickProps<Result>, 'action' | 'unitId'> & { readings: readonly Option[] }) => (
+  <PickOneForm
+    {...rest}
+    title="Strike out a wrong reading"
+    explains="It stays in the audit, and nothing counts with it any more. Then enter the right one."
+    pick={{ name: 'readingId', label: 'Reading', placeholder: 'Choose the reading', options: readings }}
+    why={{ name: 'whyWrong', label: 'What is wrong with it' }}
+    submit={{ label: 'Strike it out', pending: 'Striking out…' }}
+  />
+);
+
 /** Hides one of several healthy baselines. */
-export function HideBaselineForm<Result>({ action, unitId, sets }: { action: Action<Result>; unitId: string; sets: readonly Option[] }) {
-  const form = useForm(action);
-  return (
-    <Disclosure summary="Hide a wrong healthy baseline" open={form.message !== undefined}>
-      <Form form={form} label="Hide a wrong healthy baseline" errorTitle="Not done yet">
-        <input type="hidden" name="unitId" value={unitId} readOnly />
-        <p>Nothing is compared with it any more. Answers that were compared with it stay as they are.</p>
-        <SelectField label="Set" placeholder="Choose the set" required options={sets} {...form.field('setId')} />
-        <TextField label="Why it doesn’t count" autoComplete="off" required {...form.field('whyHidden')} />
-        <div>
-          <SubmitButton pendingLabel="Hiding…">Hide the set</SubmitButton>
-        </div>
-      </Form>
-    </Disclosure>
-  );
-}
+export const HideBaselineForm = <Result,>({ sets, ...rest }: Pick<PickProps<Result>, 'action' | 'unitId'> & { sets: readonly Option[] }) => (
+  <PickOneForm
+    {...rest}
+    title="Hide a wrong healthy baseline"
+    explains="Nothing is compared with it any more. Answers that were compared with it stay as they are."
+    pick={{ name: 'setId', label: 'Set', placeholder: 'Choose the set', options: sets }}
+    why={{ name: 'whyHidden', label: 'Why it doesn’t count' }}
+    submit={{ label: 'Hide the set', pending: 'Hiding…' }}
+  />
+);

@@ -24,6 +24,11 @@ interface Props {
 
 const day = (at: Date) => dayText(at.toISOString().slice(0, 10));
 
+function CaseName({ caseId, number, linksToCases }: { caseId: string; number: number; linksToCases: boolean }) {
+  if (!linksToCases) return `case ${number}`;
+  return <Link className="inline-flex min-h-8 items-center underline underline-offset-4" href={`/cases/${caseId}`}>case {number}</Link>;
+}
+
 /** "Do not release", check by check, each with what it takes to lift it. Renders nothing when nothing holds. */
 export function UnitHolds({ unitId, holds, linksToCases, lift }: Props) {
   if (holds.length === 0) return null;
@@ -34,7 +39,7 @@ export function UnitHolds({ unitId, holds, linksToCases, lift }: Props) {
         {holds.map(({ id, caseId, number, check, placedAt, passedAt }) => (
           <li key={id} className="mt-2">
             <p>
-              <strong>{keepFigures(check)}</strong>, found in {linksToCases ? <Link className="inline-flex min-h-8 items-center underline underline-offset-4" href={`/cases/${caseId}`}>case {number}</Link> : `case ${number}`} on {day(placedAt)}
+              <strong>{keepFigures(check)}</strong>, found in <CaseName {...{ caseId, number, linksToCases }} /> on {day(placedAt)}
               {passedAt ? `. It passed on ${day(passedAt)} and waits to be lifted.` : ': until this check has passed.'}
             </p>
             {lift && <LiftForm action={lift} unitId={unitId} holdId={id} check={check} />}
@@ -68,7 +73,7 @@ export function LiftedHolds({ lifted, linksToCases }: { lifted: readonly Lifted[
       <ul className="border-t border-ink">
         {lifted.map(({ id, number, caseId, check, liftedAt, by, found, basis, limitSource }) => (
           <li key={id} className="border-b border-rule py-2">
-            <p><strong>{check}</strong> ({linksToCases ? <Link className="inline-flex min-h-8 items-center underline underline-offset-4" href={`/cases/${caseId}`}>case {number}</Link> : `case ${number}`}): {found}</p>
+            <p><strong>{check}</strong> (<CaseName {...{ caseId, number, linksToCases }} />): {found}</p>
             <p className="text-[0.9375rem] text-ink-soft">
               {by}, {dayText(liftedAt.slice(0, 10))}{basis && `; by right of: ${basis}`}{limitSource && `; limit: ${limitSource}`}
             </p>

@@ -4,7 +4,7 @@ import { adoptedLimit, cases, compressorModel, fit, person, unit } from '@/db/sc
 
 const standing = (organisationId: string) => and(eq(adoptedLimit.organisationId, organisationId), isNull(adoptedLimit.withdrawnAt));
 
-/** The limits that stand, of one check or of all, by check. */
+/** The limits that stand, of one check or of all, in the order of adoption. */
 export async function selectLimits(db: Executor, { organisationId, checkId }: { organisationId: string; checkId?: string }) {
   return db
     .select({
@@ -27,7 +27,7 @@ export async function selectLimits(db: Executor, { organisationId, checkId }: { 
     .innerJoin(person, eq(person.id, adoptedLimit.personId))
     .leftJoin(compressorModel, and(eq(compressorModel.organisationId, adoptedLimit.organisationId), eq(compressorModel.id, adoptedLimit.modelId)))
     .where(and(standing(organisationId), ...(checkId ? [eq(adoptedLimit.checkId, checkId)] : [])))
-    .orderBy(asc(adoptedLimit.checkId), asc(adoptedLimit.createdAt), asc(adoptedLimit.id));
+    .orderBy(asc(adoptedLimit.createdAt), asc(adoptedLimit.id));
 }
 
 /** @returns false when there is one with this id already: the same request came twice. */

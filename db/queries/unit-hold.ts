@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, inArray, isNotNull, isNull } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray, isNull } from 'drizzle-orm';
 import type { Executor } from '@/db/connect';
 import { cases, person, unitHold } from '@/db/schema';
 
@@ -45,7 +45,7 @@ export async function selectLiftedHolds(db: Executor, { organisationId, unitId }
     .from(unitHold)
     .innerJoin(cases, and(eq(cases.organisationId, unitHold.organisationId), eq(cases.id, unitHold.caseId)))
     .innerJoin(person, eq(person.id, unitHold.endedBy))
-    .where(and(eq(unitHold.organisationId, organisationId), eq(unitHold.unitId, unitId), eq(unitHold.ended, 'lifted'), isNotNull(unitHold.endedAt)))
+    .where(and(eq(unitHold.organisationId, organisationId), eq(unitHold.unitId, unitId), eq(unitHold.ended, 'lifted')))
     .orderBy(desc(unitHold.endedAt), desc(unitHold.id));
 }
 

@@ -1,5 +1,5 @@
 import type { Sum, SumInput } from '@/lib/air-and-oil/sums/sum';
-import { differenceOf, parseQuantity, unitFor, type DecimalMark, type Quantity, type UnitId, type UnitOf, type UnitPreferences } from '@/lib/units';
+import { differenceOf, parseError, parseQuantity, unitFor, withoutPlusMinus, type DecimalMark, type Quantity, type UnitId, type UnitOf, type UnitPreferences } from '@/lib/units';
 
 /** How the person writes measures. */
 export interface Writing {
@@ -57,9 +57,9 @@ export function readTexts(sum: Pick<Sum, 'inputs'>, texts: SumTexts, writing: Wr
 }
 
 function readInput(input: SumInput, text: InputText, { units, decimal }: Writing) {
-  const { unit, difference } = unitsOfInput(input, units);
+  const { unit } = unitsOfInput(input, units);
   const value = readValue(input, text.value?.trim() ?? '', unit, decimal);
-  return { value, halfWidth: readHalfWidth(input, value.ok ? value.si : input.byDefault, text.error?.trim() ?? '', { difference, unit, decimal }) };
+  return { value, halfWidth: readHalfWidth(input, value.ok ? value.si : input.byDefault, text.error?.trim() ?? '', { unit, decimal }) };
 }
 
 type Read = { ok: true; typed: string | null; unit: UnitId; si: number } | { ok: false; message: string };
@@ -71,17 +71,14 @@ function readValue({ quantity, optional, byDefault, label }: SumInput, typed: st
 }
 
 function readHalfWidth(
-  { halfWidth }: SumInput,
+  { quantity, halfWidth }: SumInput,
   value: number,
   typed: string,
-  { difference, unit, decimal }: { difference: Quantity; unit: UnitId; decimal?: DecimalMark },
+  { unit, decimal }: { unit: UnitId; decimal?: DecimalMark },
 ): { ok: true; typed: string | null; si: number } | { ok: false; message: string } {
-  const text = typed.replace(/^\s*(±|\+\s*\/?\s*[-−])\s*/, '');
-  if (text === '') return { ok: true, typed: null, si: halfWidth(value) };
-  const read = parseQuantity<Quantity>(text, { quantity: difference, defaultUnit: unit as UnitOf<Quantity>, decimal });
-  if (!read.ok) return { ok: false, message: read.message };
-  if (read.si < 0) return { ok: false, message: 'An error is 0 or more.' };
-  return { ok: true, typed, si: read.si };
+  if (withoutPlusMinus(typed) === '') return { ok: true, typed: null, si: halfWidth(value) };
+  const read = parseError(typed, { quantity, defaultUnit: unit, decimal });
+  return read.ok ? { ok: true, typed, si: read.si } : read;
 }
 
 const startLower = (label: string) => label.slice(0, 1).toLowerCase() + label.slice(1);

@@ -9,7 +9,7 @@ import type { StateShare } from '@/lib/diagnose/types';
 import { invalid } from '@/lib/errors';
 import { judge, type Judgement, type Limit } from '@/lib/limits';
 import type { answerInput } from '@/lib/schemas/case';
-import { formatQuantity, parseQuantity, type DecimalMark } from '@/lib/units';
+import { formatQuantity, parseError, parseQuantity, type DecimalMark } from '@/lib/units';
 import type { FindingSum } from './rows';
 import { measureOf, type Measure } from './view/measure';
 
@@ -115,9 +115,8 @@ function refuseOutOfRange({ check }: CompiledCheck, typed: string, si: number, {
   throw invalid({ value: `${typed} can't be right here: between ${shown(min)} and ${shown(max)} is possible.` });
 }
 
-function readError(typed: string, { difference, differenceUnit }: Measure, decimal?: DecimalMark): number {
-  const error = parseQuantity(typed.replace(/^\s*(±|\+\s*\/?\s*[-−])/, ''), { quantity: difference, defaultUnit: differenceUnit, decimal });
+function readError(typed: string, { quantity, differenceUnit }: Measure, decimal?: DecimalMark): number {
+  const error = parseError(typed, { quantity, defaultUnit: differenceUnit, decimal });
   if (!error.ok) throw invalid({ error: error.message });
-  if (error.si < 0) throw invalid({ error: 'An error is 0 or more.' });
   return error.si;
 }

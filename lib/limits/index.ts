@@ -2,5 +2,5 @@
 export { judge, type Judgement } from './judge';
 export type { AdoptedLimit, Limit, LimitFacts } from './limit';
 export { limitsFor } from './limit-for';
-export { CHECKS_WITH_FIGURES, publishedFor } from './suggested';
+export { CHECKS_WITH_FIGURES, limitOf, publishedFor } from './suggested';
 export { judgementText, limitText } from './text';

@@ -1,4 +1,4 @@
-import type { AdoptedLimit, LimitFacts } from './limit';
+import type { AdoptedLimit, Limit, LimitFacts } from './limit';
 
 /** From what says most about a unit to what says least: a model's own limit goes before that of a country. */
 const weightOf = ({ modelId, country, vehicleKind, builtFrom, builtBefore }: AdoptedLimit): number =>
@@ -18,18 +18,19 @@ function fits(limit: AdoptedLimit, unit: LimitFacts): boolean {
  * for a range of build dates fits no unit whose build date isn't known.
  *
  * @param limits those that stand, in any order
- * @returns by the check's id
+ * @returns by the check's id; of each the limit itself, not whom else it is for, since that is what a judgement keeps
  * @example limitsFor([{ ...any, most: 25 }, { ...ofBuses, most: 40 }], bus).get('build-up-time') // ofBuses
  */
-export function limitsFor(limits: readonly AdoptedLimit[], unit: LimitFacts): Map<string, AdoptedLimit> {
+export function limitsFor(limits: readonly AdoptedLimit[], unit: LimitFacts): Map<string, Limit> {
   const held = new Map<string, AdoptedLimit>();
   for (const limit of limits) {
     const other = held.get(limit.checkId);
     if (fits(limit, unit) && (!other || goesBefore(limit, other))) held.set(limit.checkId, limit);
   }
-  return held;
+  return new Map([...held].map(([checkId, { id, least, most, below, source }]) => [checkId, { id, checkId, least, most, below, source }]));
 }
 
 function goesBefore(a: AdoptedLimit, b: AdoptedLimit): boolean {
-  return weightOf(a) - weightOf(b) > 0 || (weightOf(a) === weightOf(b) && (a.adoptedAt === b.adoptedAt ? a.id > b.id : a.adoptedAt > b.adoptedAt));
+  const more = weightOf(a) - weightOf(b) || a.adoptedAt.getTime() - b.adoptedAt.getTime();
+  return more === 0 ? a.id > b.id : more > 0;
 }

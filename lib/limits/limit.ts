@@ -28,6 +28,5 @@ export interface AdoptedLimit extends Limit {
   builtFrom: string | null;
   /** Built before this day. */
   builtBefore: string | null;
-  /** ISO instant. */
-  adoptedAt: string;
+  adoptedAt: Date;
 }

@@ -1,4 +1,5 @@
 import { publishedLimit, type PublishedLimit } from '@/lib/air-and-oil/limits';
+import type { Limit } from './limit';
 
 /** Published figures for what a check measures. They hold nowhere by themselves: an organisation adopts one, or its own. */
 const OF_CHECK: Readonly<Record<string, readonly string[]>> = {
@@ -13,3 +14,11 @@ const OF_CHECK: Readonly<Record<string, readonly string[]>> = {
 export const CHECKS_WITH_FIGURES: readonly string[] = Object.keys(OF_CHECK);
 
 export const publishedFor = (checkId: string): PublishedLimit[] => (OF_CHECK[checkId] ?? []).flatMap((id) => publishedLimit(id) ?? []);
+
+/** A published figure as a limit that could be adopted, with how its source stands: a driver's check is no regulation. */
+export const limitOf = ({ least, most, below = false, source, standing }: PublishedLimit): Pick<Limit, 'least' | 'most' | 'below' | 'source'> => ({
+  least: least ?? null,
+  most: most ?? null,
+  below,
+  source: `${source} (${standing})`,
+});

@@ -6,7 +6,7 @@
 const NAMES = { pages: 'carryover-pages', thumbnails: 'carryover-thumbnails' } as const;
 const LOCK = 'carryover-kept-caches';
 
-export type KeptCache = keyof typeof NAMES;
+type KeptCache = keyof typeof NAMES;
 
 const isPossible = () => typeof caches !== 'undefined' && navigator.locks !== undefined;
 

@@ -21,6 +21,7 @@ export { convert, fromSi, toSi } from './convert';
 export type { QuantityDefinition, UnitDefinition } from './definition';
 export { formatQuantity, formatValue, type FormatOptions } from './format';
 export type { DecimalMark } from './number';
+export { parseError, withoutPlusMinus } from './parse-error';
 export { parseQuantity, type ParsedQuantity, type ParseOptions } from './parse';
 export { METRIC_UNITS, US_UNITS, unitFor, withUnits, type UnitPreferences } from './preferences';
 export {

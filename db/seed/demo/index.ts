@@ -37,7 +37,7 @@ export function makeDemo(today: Date, rulebook: Rulebook, vehicles: readonly Veh
   const shop = { compiled, truth: new Truth(compiled), policy: policyOf(compiled) };
   const random = randomFrom('demo');
   modelRows(rows, beganOn(calendar), random.fork('models'));
-  limitRows(rows, beganOn(calendar));
+  limitRows(rows, beganOn(calendar), random.fork('limits'));
   for (const vehicle of vehicles) new UnitStory(world, shop, vehicle, random.fork(vehicle.fleetNumber)).tell();
   compareFindings(rows, compiled);
   numberCases(rows);

@@ -1,8 +1,7 @@
-import { gaugePressure, toSi } from '@/lib/units';
-import { buildUpTime } from '../build-up';
+import { toSi } from '@/lib/units';
 import { frac, minus, symbol, times } from '../formula/expression';
 import { requireWithin } from '../out-of-range';
-import { standardAtmosphere } from '../standard-atmosphere';
+import { expectedArrival } from './build-up';
 import { altitude, deliveryFlow, reservoirVolume } from './inputs';
 import { defineSum, input, output } from './sum';
 
@@ -35,15 +34,7 @@ export const buildUpRatio = defineSum({
   source: 'Ideal gas at one temperature.',
   compute: (given) => {
     requireWithin('toPressure', 'pressure', given.toPressure, { least: given.fromPressure + LEAST_RISE });
-    const atmosphere = standardAtmosphere(given.altitude);
-    const arrival = buildUpTime({
-      volumeM3: given.volume,
-      fromPressurePa: gaugePressure(given.fromPressure),
-      toPressurePa: gaugePressure(given.toPressure),
-      deliveryM3PerS: given.delivery,
-      leakM3PerS: given.leak,
-      atmospherePa: atmosphere,
-    });
+    const { atmosphere, arrival } = expectedArrival(given);
     if (arrival.kind === 'never') return { kind: 'never', because: 'As much leaks as is delivered: by these figures the tanks never fill.' };
     return { values: { ratio: given.time / arrival.timeS, expected: arrival.timeS, atmosphere } };
   },

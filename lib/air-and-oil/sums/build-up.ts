@@ -9,6 +9,20 @@ import { defineSum, input, output } from './sum';
 
 const RUNNING = 'The engine runs: level ground, chocks in, transmission in neutral, hands and clothes away from belts and fan, exhaust led outdoors.';
 
+/** When the tanks are filled, by what the inputs of the sums that expect it give. */
+export function expectedArrival(given: { readonly [Name in 'volume' | 'fromPressure' | 'toPressure' | 'delivery' | 'leak' | 'altitude']: number }) {
+  const atmosphere = standardAtmosphere(given.altitude);
+  const arrival = buildUpTime({
+    volumeM3: given.volume,
+    fromPressurePa: gaugePressure(given.fromPressure),
+    toPressurePa: gaugePressure(given.toPressure),
+    deliveryM3PerS: given.delivery,
+    leakM3PerS: given.leak,
+    atmospherePa: atmosphere,
+  });
+  return { atmosphere, arrival };
+}
+
 export const buildUp = defineSum({
   id: 'build-up',
   name: 'Expected build-up time',
@@ -31,15 +45,7 @@ export const buildUp = defineSum({
   source: 'Ideal gas at one temperature.',
   compute: (given) => {
     requireWithin('toPressure', 'pressure', given.toPressure, { least: given.fromPressure });
-    const atmosphere = standardAtmosphere(given.altitude);
-    const arrival = buildUpTime({
-      volumeM3: given.volume,
-      fromPressurePa: gaugePressure(given.fromPressure),
-      toPressurePa: gaugePressure(given.toPressure),
-      deliveryM3PerS: given.delivery,
-      leakM3PerS: given.leak,
-      atmospherePa: atmosphere,
-    });
+    const { atmosphere, arrival } = expectedArrival(given);
     if (arrival.kind === 'never') return { kind: 'never', because: 'As much leaks as is delivered: the tanks never fill.' };
     return { values: { time: arrival.timeS, atmosphere } };
   },

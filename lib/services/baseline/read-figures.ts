@@ -2,7 +2,7 @@ import { CONDITION_WORDS, FIGURES, type Figure, type FigureId } from '@/lib/base
 import { figureText } from '@/lib/baseline/words';
 import { invalid, type FieldErrors } from '@/lib/errors';
 import { measureUnit } from '@/lib/schemas/measures';
-import { differenceOf, parseQuantity, type Quantity } from '@/lib/units';
+import { parseError, parseQuantity, type Quantity } from '@/lib/units';
 import { decimalMarkOf, type MeasureHabits } from '../units-of-measure';
 
 /** A figure as it is kept. */
@@ -51,14 +51,13 @@ function readFigure(
   const defaultUnit = measureUnit(person.units, figure);
   const decimal = decimalMarkOf(organisation.country);
   const parsed = parseQuantity<Quantity>(value, { quantity, defaultUnit, decimal });
-  const off = error === null ? null : parseQuantity<Quantity>(error.replace(/^\s*(±|\+\s*\/?\s*[-−])/, ''), { quantity: differenceOf(quantity), defaultUnit, decimal });
+  const off = error === null ? null : parseError(error, { quantity, defaultUnit, decimal });
   if (!parsed.ok) problems[field] = parsed.message;
   else if (parsed.si < range.min || parsed.si > range.max) {
     const shown = (si: number) => figureText(id, si, person.units);
     problems[field] = `${value} can’t be right here: between ${shown(range.min)} and ${shown(range.max)} is possible.`;
   }
   if (off && !off.ok) problems[`${field}Error`] = off.message;
-  else if (off && off.si < 0) problems[`${field}Error`] = 'An error is 0 or more.';
   if (!parsed.ok || (off && !off.ok)) return null;
   return { figure: id, valueSi: parsed.si, errorSi: off ? off.si : figure.usualError, valueTyped: value, errorTyped: error, unit: parsed.unit };
 }

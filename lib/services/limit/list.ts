@@ -5,7 +5,7 @@ import { PERMITTED } from '@/lib/auth/permissions';
 import { measureOf } from '@/lib/case/view/measure';
 import type { Check } from '@/lib/diagnose/types';
 import { notFound } from '@/lib/errors';
-import { CHECKS_WITH_FIGURES, limitText, publishedFor } from '@/lib/limits';
+import { CHECKS_WITH_FIGURES, limitOf, limitText, publishedFor } from '@/lib/limits';
 import { pageOf } from '@/lib/schemas/browse';
 import { dayText } from '@/lib/schemas/day-text';
 import { browseLimitsInput, limitFormInput, limitIdInput } from '@/lib/schemas/limit';
@@ -17,7 +17,7 @@ import { measuredChecks } from './check-in-force';
 
 /** Checks that figures are published for first, then the others by name. */
 const inOrder = (checks: Check[]): Check[] => {
-  const place = ({ id }: Check) => (CHECKS_WITH_FIGURES.indexOf(id) + CHECKS_WITH_FIGURES.length + 1) % (CHECKS_WITH_FIGURES.length + 1);
+  const place = ({ id }: Check) => (CHECKS_WITH_FIGURES.includes(id) ? CHECKS_WITH_FIGURES.indexOf(id) : CHECKS_WITH_FIGURES.length);
   return [...checks].sort((a, b) => place(a) - place(b) || a.name.localeCompare(b.name));
 };
 
@@ -64,15 +64,12 @@ export const viewLimit = defineRead({
 async function shownLimits(tx: Transaction, ctx: Ctx, checks: readonly Check[]) {
   const named = new Map(checks.map((check) => [check.id, check]));
   const rows = await selectLimits(tx, { organisationId: ctx.organisation.id });
-  return rows
-    .map(({ adoptedAt, ...row }) => {
-      const check = named.get(row.checkId);
-      const measure = check && measureOf(check, ctx.person.units);
-      return { ...row, adoptedAt: adoptedAt.toISOString(), checkName: check?.name ?? row.checkId, text: measure ? limitText(row, measure) : '' };
-    })
-    .sort((a, b) => (a.adoptedAt === b.adoptedAt ? (a.id < b.id ? -1 : 1) : a.adoptedAt < b.adoptedAt ? -1 : 1));
+  return rows.map(({ adoptedAt, ...row }) => {
+    const check = named.get(row.checkId);
+    const measure = check && measureOf(check, ctx.person.units);
+    return { ...row, adoptedAt: adoptedAt.toISOString(), checkName: check?.name ?? row.checkId, text: measure ? limitText(row, measure) : '' };
+  });
 }
-export type LimitShown = Awaited<ReturnType<typeof shownLimits>>[number];
 
 /** What the form of a limit is opened with: the check, published figures to begin from, and the one that was chosen. */
 export const readLimitForm = defineRead({
@@ -100,15 +97,15 @@ export const readLimitForm = defineRead({
       figures: figures.map((figure) => ({
         id: figure.id,
         what: figure.what,
-        text: limitText({ least: figure.least ?? null, most: figure.most ?? null, below: figure.below ?? false }, { quantity: figure.quantity, unit: unitFor(ctx.person.units, figure.quantity, figure.like) }),
+        text: limitText(limitOf(figure), { quantity: figure.quantity, unit: unitFor(ctx.person.units, figure.quantity, figure.like) }),
         for: [figure.region ?? figure.country, figure.vehicle === 'any' ? null : figure.vehicle, figure.builtFrom && `built from ${dayText(figure.builtFrom)}`, figure.when].filter(Boolean).join(', '),
-        source: `${figure.source} (${figure.standing})${figure.fromMemory ? '; remembered, look it up' : ''}`,
+        source: `${limitOf(figure).source}${figure.fromMemory ? '; remembered, look it up' : ''}`,
       })),
       values: {
         least: written(chosen?.least),
         most: written(chosen?.most),
         below: chosen?.below ?? false,
-        source: chosen ? `${chosen.source} (${chosen.standing})` : '',
+        source: chosen ? limitOf(chosen).source : '',
         country: chosen?.country === 'United States' ? 'US' : chosen?.country === 'Canada' ? 'CA' : '',
         vehicleKind: chosen?.vehicle === 'bus' || chosen?.vehicle === 'truck' ? chosen.vehicle : '',
         builtFrom: chosen?.builtFrom ?? '',
@@ -117,4 +114,3 @@ export const readLimitForm = defineRead({
     };
   },
 });
-export type LimitFormData = Awaited<ReturnType<typeof readLimitForm>>;

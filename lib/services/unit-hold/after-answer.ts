@@ -2,7 +2,6 @@ import type { Transaction } from '@/db/connect';
 import { insertHolds, lockHoldOfCheck, updateHold } from '@/db/queries/unit-hold';
 import type { CompiledCheck } from '@/lib/diagnose/compiled';
 import { newId } from '@/lib/ids';
-import type { Judgement } from '@/lib/limits';
 
 interface Answered {
   organisationId: string;
@@ -10,7 +9,7 @@ interface Answered {
   caseId: string;
   personId: string;
   check: CompiledCheck;
-  finding: { id: string; kind: string; judgement: Judgement | null; says: boolean; late: boolean };
+  finding: { id: string; kind: string; says: boolean; late: boolean };
   /** Whether the case now holds the release by this check. */
   holds: boolean;
   at: Date;
@@ -21,8 +20,9 @@ interface Answered {
  * somebody with the right to lift it, or goes with the answer that is taken back.
  */
 export async function holdAfterAnswer(tx: Transaction, { organisationId, unitId, caseId, personId, check, finding, holds, at }: Answered): Promise<void> {
-  const mayConcern = holds || finding.judgement !== null || check.check.kind === 'measured' || check.check.states.some(({ holdsRelease }) => holdsRelease);
-  if (!mayConcern) return;
+  // A measured value can be out of an adopted limit; any other answer holds where the rulebook says so.
+  const canHold = check.check.kind === 'measured' || check.check.states.some(({ holdsRelease }) => holdsRelease);
+  if (!canHold) return;
   const standing = await lockHoldOfCheck(tx, { organisationId, unitId, checkId: check.id });
   if (holds && !standing) {
     await insertHolds(tx, [{ organisationId, id: newId(at.getTime()), unitId, caseId, checkId: check.id, findingId: finding.id, placedAt: at }]);

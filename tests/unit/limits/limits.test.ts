@@ -4,7 +4,7 @@ import { CHECKS_WITH_FIGURES, judge, judgementText, limitsFor, limitText, publis
 import { defaultRulebook } from '@/lib/diagnose/default-rulebook';
 
 const any: AdoptedLimit = {
-  id: 'any', checkId: 'c', least: null, most: 10, below: false, source: 's', modelId: null, country: null, vehicleKind: null, builtFrom: null, builtBefore: null, adoptedAt: '2026-01-01T00:00:00.000Z',
+  id: 'any', checkId: 'c', least: null, most: 10, below: false, source: 's', modelId: null, country: null, vehicleKind: null, builtFrom: null, builtBefore: null, adoptedAt: new Date('2026-01-01'),
 };
 const unit = { modelId: 'm', country: 'US', vehicleKind: 'truck', builtOn: '2010-05-05' };
 const held = (...limits: Partial<AdoptedLimit>[]) => limitsFor(limits.map((limit) => ({ ...any, ...limit })), unit).get('c')?.id;
@@ -16,7 +16,7 @@ describe('the limit that holds', () => {
     expect(held(any, ...limits.toReversed())).toBe('model');
   });
 
-  test('is the newest of the same width', () => expect(held({ id: 'old' }, { id: 'new', adoptedAt: '2026-02-01T00:00:00.000Z' })).toBe('new'));
+  test('is the newest of the same width', () => expect(held({ id: 'old' }, { id: 'new', adoptedAt: new Date('2026-02-01') })).toBe('new'));
 
   test.each([
     ['another model', { modelId: 'x' }],

@@ -2,10 +2,10 @@
 export const ACTION_WORDS: Readonly<Record<string, string>> = {
   'accept.invitation': 'Accepted an invitation',
   'acknowledge.caution': 'Acknowledged a caution',
-  'adopt.limit': 'Adopted a limit',
   'add.photo': 'Added a photo',
   'add.site': 'Added a site',
   'add.unit-reading': 'Added a reading of a unit',
+  'adopt.limit': 'Adopted a limit',
   'assign.case': 'Gave a case to somebody',
   'call.case': 'Called a case',
   'change-password.person': 'Changed their own password',
@@ -26,8 +26,8 @@ export const ACTION_WORDS: Readonly<Record<string, string>> = {
   'hide.photo': 'Hid a photo, or showed it again',
   'hide.unit': 'Hid a unit',
   'invite.person': 'Invited somebody',
-  'mail.invitation': 'Mailed an invitation',
   'lift.unit-hold': 'Lifted “do not release”',
+  'mail.invitation': 'Mailed an invitation',
   'make.thumbnail': 'Made the small picture of a photo',
   'mark.photo': 'Drew on a photo or described it',
   'note.finding': 'Noted something at an answer',
@@ -49,8 +49,8 @@ export const ACTION_WORDS: Readonly<Record<string, string>> = {
   'store.photo': 'Sent a photo’s file',
   'strike.unit-reading': 'Struck out a reading of a unit',
   'take-out.fit': 'Took a compressor out',
-  'withdraw.limit': 'Withdrew a limit',
   'withdraw.invitation': 'Withdrew an invitation',
+  'withdraw.limit': 'Withdrew a limit',
 };
 
 /** The kinds of things that are written, as one picks among them. */

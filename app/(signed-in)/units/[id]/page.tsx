@@ -28,12 +28,13 @@ export const metadata: Metadata = { title: 'Unit' };
 export default async function UnitPage({ params }: { params: Promise<{ id: string }> }) {
   const ctx = await pageContext(PERMITTED['unit.see']);
   const { id } = await params;
-  const record = await orNotFound(readUnit({ ctx, input: { unitId: id } }));
-  const baseline = await readBaseline({ ctx, input: { unitId: id } });
+  const input = { unitId: id };
+  const [record, baseline] = await orNotFound(Promise.all([readUnit({ ctx, input }), readBaseline({ ctx, input })]));
   const { unit, currentFit, fits, cases, readings, today, hidden } = record;
   const { units } = ctx.person;
   const mayEdit = may(ctx.roles, 'unit.edit');
   const mayWork = may(ctx.roles, 'case.work');
+  const linksToCases = may(ctx.roles, 'case.see');
   const work = termLabel('vocation', unit.vocation)?.toLowerCase();
   const vehicle = `${termLabel('vehicleKind', unit.vehicleKind)}${work ? `, ${work},` : ''}`;
 
@@ -58,7 +59,7 @@ export default async function UnitPage({ params }: { params: Promise<{ id: strin
           {hidden.reason}. It stands in no list and no search; its history stays.
         </Notice>
       )}
-      <UnitHolds unitId={id} holds={record.holds} linksToCases={may(ctx.roles, 'case.see')} lift={ctx.mayRelease && may(ctx.roles, 'case.work') ? liftHold : null} />
+      <UnitHolds unitId={id} holds={record.holds} linksToCases={linksToCases} lift={ctx.mayRelease && mayWork ? liftHold : null} />
       <div className="grid gap-x-14 gap-y-12 lg:grid-cols-[3fr_2fr]">
         <div className="grid min-w-0 content-start gap-12">
           <section aria-labelledby="history" className="min-w-0">
@@ -69,7 +70,7 @@ export default async function UnitPage({ params }: { params: Promise<{ id: strin
             <h2 id="readings">Odometer and engine hours</h2>
             <ReadingTable readings={readings} units={units} />
           </section>
-          <LiftedHolds lifted={record.lifted} linksToCases={may(ctx.roles, 'case.see')} />
+          <LiftedHolds lifted={record.lifted} linksToCases={linksToCases} />
         </div>
         <div className="grid content-start gap-12">
           <section aria-labelledby="facts">
