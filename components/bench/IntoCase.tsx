@@ -56,7 +56,7 @@ export function IntoCase({ sum, worked, target, writing, texts }: Props) {
     try {
       await keepAndSend(
         client,
-        { ...target.reader, caseId: target.caseId, refusal: null, kind: 'finding', id, body: { id, checkId: target.checkId, answer: { kind: 'sum', inputs, sureness: 'sure' }, askedBecause: 'choice', ...stamp() } },
+        { ...target.reader, caseId: target.caseId, refusal: null, kind: 'finding', id, body: { id, checkId: target.checkId, answer: { kind: 'sum', sum: sum.id, inputs, sureness: 'sure' }, askedBecause: 'choice', ...stamp() } },
         `/api/v1${path}/findings`,
       );
       router.push(path);

@@ -75,7 +75,7 @@ export function CaseDesk({ view, drawing, hand: kept, decimalMark }: Props) {
         ) : readOnly ? (
           <p className="text-ink-soft">Nothing is asked here. Pick a station to see its checks.</p>
         ) : (
-          <AtHandView {...{ handle, rulebook, usual: view.usual, limits: view.limits, picked, decimalMark, onPick: setPicked }} />
+          <AtHandView {...{ handle, rulebook, usual: view.usual, limits: view.limits, catching: view.catching, picked, decimalMark, onPick: setPicked }} />
         )}
         {!readOnly && <HandSwitch hand={hand} onChange={(next) => { setHand(next); keepHand(next); }} />}
       </div>
@@ -108,6 +108,7 @@ interface AtHandProps {
   picked: Picked;
   decimalMark: '.' | ',';
   limits: CaseView['limits'];
+  catching: CaseView['catching'];
   onPick: (picked: Picked) => void;
 }
 
@@ -137,7 +138,7 @@ function AtHandView(props: AtHandProps) {
   );
 }
 
-function Question({ handle, rulebook, usual, limits, picked, decimalMark, onPick, asked, onPass }: AtHandProps & { asked: AtHand | null; onPass: (panelId: string) => void }) {
+function Question({ handle, rulebook, usual, limits, catching, picked, decimalMark, onPick, asked, onPass }: AtHandProps & { asked: AtHand | null; onPass: (panelId: string) => void }) {
   if (!asked) return <Enough {...{ state: handle.state, rulebook, onPick }} />;
   if (asked.kind === 'panel') {
     const panel = rulebook.panels.find(({ id }) => id === asked.panelId);
@@ -166,6 +167,7 @@ function Question({ handle, rulebook, usual, limits, picked, decimalMark, onPick
       stationName={stationName(check.station)}
       decimalMark={decimalMark}
       limit={limits[check.id]}
+      catching={catching}
       onAnswered={() => onPick(null)}
     />
   );

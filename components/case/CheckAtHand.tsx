@@ -28,11 +28,12 @@ interface Props {
   decimalMark: '.' | ',';
   /** That a value is judged by; undefined: none adopted. */
   limit: CaseView['limits'][string] | undefined;
+  catching: CaseView['catching'];
   onAnswered: () => void;
 }
 
 /** One check, large: its cautions, how to do it, and its answers; "can't tell" and "skip" are always there. */
-export function CheckAtHand({ check, rulebook, usual, limit, handle, suggestion, stationName, decimalMark, onAnswered }: Props) {
+export function CheckAtHand({ check, rulebook, usual, limit, handle, suggestion, stationName, decimalMark, catching, onAnswered }: Props) {
   const { state, answer, acknowledge } = handle;
   const problem = answer.error instanceof ApiProblem && answer.variables?.checkId === check.id ? answer.error : null;
   const toRead = unread(check, rulebook, state);
@@ -45,6 +46,7 @@ export function CheckAtHand({ check, rulebook, usual, limit, handle, suggestion,
 
   const last = lastAsked(state);
   const undo = last && (() => answer.mutate({ checkId: last.checkId, answer: { kind: 'undo' }, askedBecause: 'choice' }));
+  const isCaughtNow = catching.some(({ checkId }) => checkId === check.id);
   const common = { check, pending: answer.isPending, onAnswer: give, onUndo: undo };
 
   return (
@@ -62,6 +64,7 @@ export function CheckAtHand({ check, rulebook, usual, limit, handle, suggestion,
           {problem.message} {Object.values(problem.fields).filter((text) => text.includes(' ')).join(' ')}
         </Notice>
       )}
+      <SpoilsCatch {...{ check, catching }} />
       <Cautions
         check={check}
         rulebook={rulebook}
@@ -76,8 +79,9 @@ export function CheckAtHand({ check, rulebook, usual, limit, handle, suggestion,
           <>
             {usual && <p className="border-l-4 border-ink pl-3">{keepFigures(usual)}.</p>}
             {check.sum && (
-              <p>
+              <p className="flex flex-wrap gap-3">
                 <ButtonLink variant="quiet" href={sumHref(check.sum, { caseId: state.caseId, checkId: check.id })}>Work it out on the bench</ButtonLink>
+                {check.overDays && <ButtonLink variant="quiet" href={`/cases/${state.caseId}/catch`}>{isCaughtNow ? 'Weigh what is caught' : 'Catch it over days'}</ButtonLink>}
               </p>
             )}
             <MeasuredAnswer key={check.id} {...common} errors={problem?.fields ?? {}} decimalMark={decimalMark} />
@@ -89,4 +93,11 @@ export function CheckAtHand({ check, rulebook, usual, limit, handle, suggestion,
       <PhotoStrip checkId={check.id} />
     </section>
   );
+}
+
+/** A check that would empty or open what a bottle hangs from: the bottle is weighed first. */
+function SpoilsCatch({ check, catching }: Pick<Props, 'check' | 'catching'>) {
+  const spoiled = check.spoils.filter(({ id }) => catching.some(({ checkId }) => checkId === id));
+  if (spoiled.length === 0) return null;
+  return <Notice title="Weigh the bottle first">This spoils what is being caught for “{spoiled.map(({ name }) => name).join('”, “')}”.</Notice>;
 }

@@ -1,5 +1,5 @@
 import type { z } from 'zod';
-import { sumOf } from '@/lib/air-and-oil/sums';
+import { waysTo } from '@/lib/air-and-oil/sums';
 import type { Writing } from '@/lib/bench/read-texts';
 import { workOut } from '@/lib/bench/work-out';
 import type { CompiledCheck } from '@/lib/diagnose/compiled';
@@ -80,10 +80,12 @@ function readMeasured(check: CompiledCheck, answer: Extract<ParsedAnswer, { kind
 }
 
 /** The value and its band from a sum of the bench, made here from what was typed: what a page showed counts for nothing. */
-function readSum(check: CompiledCheck, { inputs, sureness }: Extract<ParsedAnswer, { kind: 'sum' }>, writing: Writing): AnswerColumns {
+function readSum(check: CompiledCheck, { sum: sumId, inputs, sureness }: Extract<ParsedAnswer, { kind: 'sum' }>, writing: Writing): AnswerColumns {
   const measure = measureOf(check.check, writing.units);
-  const sum = check.check.sum && sumOf(check.check.sum.id);
-  if (!check.check.sum || !sum || !measure) throw invalid({ inputs: 'The bench has no sum for this check: enter the value.' });
+  const ways = check.check.sum ? waysTo(check.check.sum.id) : [];
+  const sum = sumId ? ways.find(({ id }) => id === sumId) : ways[0];
+  if (!check.check.sum || !measure || ways.length === 0) throw invalid({ inputs: 'The bench has no sum for this check: enter the value.' });
+  if (!sum) throw invalid({ sum: 'This check is not answered by that sum.' });
   const { output } = check.check.sum;
   const worked = workOut(sum, inputs, writing, output);
   if (worked.kind === 'refused') throw invalid(worked.errors);

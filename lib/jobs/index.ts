@@ -8,13 +8,15 @@ export interface JobData {
   /** The address as typed: whether anybody has it is looked up where nobody can time the answer. */
   'mail-password-reset': { email: string };
   'make-thumbnail': { organisationId: string; photoId: string };
+  /** Due at the time that the catch has for it, or no more. */
+  'remind-weighing': { organisationId: string; catchId: string; due: string };
   sweep: Record<string, never>;
 }
 export type JobName = keyof JobData;
 
 export interface JobQueue {
   /** Adds a job with the transaction that makes it necessary: both are there, or neither. */
-  send<Name extends JobName>(tx: Executor, name: Name, data: JobData[Name]): Promise<void>;
+  send<Name extends JobName>(tx: Executor, name: Name, data: JobData[Name], when?: { startAfter?: Date }): Promise<void>;
 }
 
 export const JOB_SCHEMA = 'pgboss';
@@ -30,11 +32,11 @@ const placed = (text: string, values: unknown[]) =>
   sql.join(text.split(/\$(\d+)/).map((part, i) => (i % 2 === 0 ? sql.raw(part) : sql`${sql.param(values[Number(part) - 1])}`)));
 
 export const jobs: JobQueue = {
-  async send(tx, name, data) {
+  async send(tx, name, data, when = {}) {
     const db = {
       executeSql: async (text: string, values: unknown[]) => ({ rows: (await tx.execute(placed(text, values))).rows }),
     };
-    const id = await statementsOnly.send(name, data, { db });
+    const id = await statementsOnly.send(name, data, { ...when, db });
     // A queue that doesn't exist swallows its jobs silently.
     if (id === null) throw new Error(`No job queue is called ${name}`);
   },

@@ -30,6 +30,8 @@ export interface CheckView
   usualError: string | null;
   /** The sum of the bench that works its value out. */
   sum: string | null;
+  /** It can be caught over days and weighed more than once. */
+  overDays: boolean;
   /** Checks that this one spoils. */
   spoils: { id: string; name: string }[];
 }
@@ -186,6 +188,13 @@ export interface OtherHoldView {
   passed: string[];
 }
 
+/** A bottle that hangs for a check. */
+export interface CatchingView {
+  checkId: string;
+  since: string;
+  remindAt: string | null;
+}
+
 /**
  * Why the causes stand where they stand, and what would change that. Asked for after the state has come, so that an
  * answer is saved and ranked without waiting for words that are read later, if at all.
@@ -211,6 +220,8 @@ export interface CaseView {
   usual: Record<string, string>;
   /** Other cases of the unit that hold its release, now. */
   otherHolds: OtherHoldView[];
+  /** Oil that is being caught for a check, now: since when, and when somebody is reminded of it. */
+  catching: CatchingView[];
   /** The limits that the organisation adopted for this unit, by check. */
   limits: Record<string, { text: string; source: string }>;
   assignedTo: string | null;

@@ -56,9 +56,11 @@ export const answerInput = z.discriminatedUnion('kind', [
   z.strictObject({ kind: z.literal('state'), state: rulebookId, sureness }),
   /** Value and error as typed, with or without a unit: "8,3 bar". */
   z.strictObject({ kind: z.literal('measured'), value: words(40).min(1, 'Enter what you measured.'), error: words(40).optional(), sureness }),
-  /** Worked out on the bench: what went in, as typed. The check names the sum, and it is worked out anew where it is kept. */
+  /** Worked out on the bench: what went in, as typed. It is worked out anew where it is kept. */
   z.strictObject({
     kind: z.literal('sum'),
+    /** Another way to what the check's own sum gives; without it the check's own. */
+    sum: rulebookId.optional(),
     inputs: sumInputs,
     sureness,
   }),

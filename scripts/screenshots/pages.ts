@@ -51,6 +51,8 @@ export const SHOTS: readonly Shot[] = [
   shot(`${IN}/cases/[id]`, 'case', 'technician', ({ openCase }) => openCase && `/cases/${openCase}`),
   shot(`${IN}/cases/[id]`, 'case-called', 'technician', ({ calledCase }) => calledCase && `/cases/${calledCase}`),
   shot(`${IN}/cases/[id]`, 'case-past', 'technician', ({ pastMoment }) => pastMoment),
+  shot(`${IN}/cases/[id]/catch`, 'case-catch', 'technician', ({ openCase }) => openCase && `/cases/${openCase}/catch`),
+  shot(`${IN}/cases/[id]/catch`, 'case-catch-called', 'technician', ({ calledCase }) => calledCase && `/cases/${calledCase}/catch`),
   shot(`${IN}/cases/[id]/history`, 'case-history', 'technician', ({ openCase }) => openCase && `/cases/${openCase}/history`),
   shot(`${IN}/cases/[id]/history`, 'case-history-compared', 'technician', ({ pastMoment }) => pastMoment && `${pastMoment.replace('?', '/history?')}&with=2000-01-01`),
   shot(`${IN}/cases/[id]`, 'case-not-found', 'technician', `/cases/${NOWHERE}`),

@@ -5,6 +5,11 @@ import * as casesId from './cases/[id]/route';
 import * as casesIdAcknowledgements from './cases/[id]/acknowledgements/route';
 import * as casesIdAssign from './cases/[id]/assign/route';
 import * as casesIdCall from './cases/[id]/call/route';
+import * as casesIdCatches from './cases/[id]/catches/route';
+import * as casesIdCatchesCatchIdEnd from './cases/[id]/catches/[catchId]/end/route';
+import * as casesIdCatchesCatchIdReminder from './cases/[id]/catches/[catchId]/reminder/route';
+import * as casesIdCatchesCatchIdWeighings from './cases/[id]/catches/[catchId]/weighings/route';
+import * as casesIdCatchesCatchIdWeighingsWeighingIdTakeBack from './cases/[id]/catches/[catchId]/weighings/[weighingId]/take-back/route';
 import * as casesIdEvents from './cases/[id]/events/route';
 import * as casesIdFindings from './cases/[id]/findings/route';
 import * as casesIdFindingsFindingIdNotes from './cases/[id]/findings/[findingId]/notes/route';
@@ -58,6 +63,11 @@ export const ROUTES = {
   '/cases/{id}/acknowledgements': casesIdAcknowledgements,
   '/cases/{id}/assign': casesIdAssign,
   '/cases/{id}/call': casesIdCall,
+  '/cases/{id}/catches': casesIdCatches,
+  '/cases/{id}/catches/{catchId}/end': casesIdCatchesCatchIdEnd,
+  '/cases/{id}/catches/{catchId}/reminder': casesIdCatchesCatchIdReminder,
+  '/cases/{id}/catches/{catchId}/weighings': casesIdCatchesCatchIdWeighings,
+  '/cases/{id}/catches/{catchId}/weighings/{weighingId}/take-back': casesIdCatchesCatchIdWeighingsWeighingIdTakeBack,
   '/cases/{id}/events': casesIdEvents,
   '/cases/{id}/findings': casesIdFindings,
   '/cases/{id}/findings/{findingId}/notes': casesIdFindingsFindingIdNotes,

@@ -4,6 +4,7 @@ import { seededId } from '../seeded-id';
 import { calendarTo, type Calendar } from './calendar';
 import type { World } from './world';
 import { limitRows } from './limit-rows';
+import { catchRows } from './catch-rows';
 import { modelRows } from './model-rows';
 import { policyOf } from './policy';
 import { randomFrom } from './random';
@@ -40,6 +41,7 @@ export function makeDemo(today: Date, rulebook: Rulebook, vehicles: readonly Veh
   limitRows(rows, beganOn(calendar), random.fork('limits'));
   for (const vehicle of vehicles) new UnitStory(world, shop, vehicle, random.fork(vehicle.fleetNumber)).tell();
   compareFindings(rows, compiled);
+  catchRows(rows, compiled, random.fork('catches'));
   numberCases(rows);
   return { rows, truths: world.truths };
 }

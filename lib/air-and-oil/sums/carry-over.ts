@@ -66,6 +66,7 @@ export const carryOver = defineSum({
 export const carryOverByWeight = defineSum({
   ...about,
   id: 'carry-over-by-weight',
+  insteadOf: 'carry-over',
   name: 'Oil carry-over, caught and weighed',
   purpose: 'Turn the oil you weighed into a rate that can be compared with the unit’s own past, and see how sure it is.',
   inputs: {

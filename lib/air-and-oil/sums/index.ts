@@ -46,3 +46,14 @@ const byId = new Map(SUMS.map((sum) => [sum.id, sum]));
 export function sumOf(id: string): Sum | undefined {
   return byId.get(id);
 }
+
+/**
+ * The sums that lead to the same outputs as one of them does, itself first: what a check may be answered by that names it.
+ *
+ * @example waysTo('carry-over').map(({ id }) => id) // ['carry-over', 'carry-over-by-weight']
+ */
+export function waysTo(id: string): Sum[] {
+  const meant = byId.get(id);
+  const root = meant?.insteadOf ?? id;
+  return [...(meant ? [meant] : []), ...SUMS.filter((sum) => sum.id !== id && (sum.id === root || sum.insteadOf === root))];
+}

@@ -77,6 +77,8 @@ export interface Sum {
    */
   readonly compute: (inputs: Values) => Outcome;
   readonly plot?: Plot;
+  /** The sum that it can stand in for: the same outputs from other readings. */
+  readonly insteadOf?: string;
 }
 
 type Described = Omit<SumQuantity, 'id'>;

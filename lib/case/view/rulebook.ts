@@ -2,6 +2,7 @@ import type { CompiledRulebook } from '@/lib/diagnose/compiled';
 import type { Check } from '@/lib/diagnose/types';
 import type { CheckView, RulebookView } from '@/lib/schemas/case-view';
 import { formatValue, unitDefinition, type UnitPreferences } from '@/lib/units';
+import { isCaught } from '../weighings';
 import { measureOf } from './measure';
 
 /** An edition as the case page needs it: what is asked and said, without the rules; measures in the person's units. */
@@ -27,6 +28,7 @@ function checkView(check: Check, names: ReadonlyMap<string, string>, units: Unit
       ? formatValue(usualError, { quantity: measure.difference, unit: measure.differenceUnit })
       : null,
     sum: check.sum?.id ?? null,
+    overDays: isCaught(check),
     spoils: check.spoils.map((spoiled) => ({ id: spoiled, name: names.get(spoiled) ?? spoiled })),
   };
 }

@@ -64,6 +64,7 @@ export const caseRecord = z
     events: z.array(event),
     moments: z.array(z.object({ at: instant, what: z.string() })).meta({ description: 'Instants that `at` of the state can be asked with.' }),
     usual: z.record(z.string(), z.string()).meta({ description: 'What is usual for the unit or its model, by the checks that compare with it.' }),
+    catching: z.array(z.object({ checkId: z.string(), since: instant, remindAt: instant.nullable() })).meta({ description: 'Oil that is being caught for a check, now.' }),
     otherHolds: z.array(otherHold).meta({ description: 'Other cases of the unit that forbid its release.' }),
   })
   .meta({ id: 'CaseRecord' });

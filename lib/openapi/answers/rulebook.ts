@@ -27,6 +27,7 @@ const check = z
     errorSymbol: z.string().nullable(),
     usualError: z.string().nullable(),
     sum: z.string().nullable().meta({ description: 'The sum of the bench that works its value out.' }),
+    overDays: z.boolean().meta({ description: 'Its oil can be caught over days and weighed more than once.' }),
     spoils: z.array(z.object({ id: z.string(), name: z.string() })),
   })
   .meta({ id: 'Check' });

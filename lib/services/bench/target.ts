@@ -1,6 +1,7 @@
 import { selectModel } from '@/db/queries/compressor-model';
 import { selectFitsOfUnit } from '@/db/queries/fit';
 import { selectUnit } from '@/db/queries/unit';
+import { waysTo } from '@/lib/air-and-oil/sums';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { knownInputs } from '@/lib/bench/known-inputs';
 import { standingFindings } from '@/lib/case/current-findings';
@@ -18,18 +19,18 @@ export const readSumTarget = defineRead({
   doing: 'see cases',
   roles: PERMITTED['case.see'],
   input: sumTargetInput,
-  run: async ({ tx, ctx, input: { caseId, checkId } }) => {
+  run: async ({ tx, ctx, input: { caseId, checkId, sumId } }) => {
     const { organisation, person } = ctx;
     const { caseHead, compiled, rows } = await gatherState(tx, ctx, { caseId });
     const check = compiled.checks.get(checkId)?.check;
     if (!check?.sum) throw notFound('check');
+    if (!waysTo(check.sum.id).some(({ id }) => id === sumId)) throw notFound('sum of this check');
     const of = { organisationId: organisation.id, unitId: caseHead.unitId };
     const unit = await selectUnit(tx, of);
     const fit = currentFitOn(await selectFitsOfUnit(tx, of), siteDay(caseHead.openedAt, caseHead.timeZone));
     const model = fit && (await selectModel(tx, { organisationId: organisation.id, modelId: fit.modelId }));
     const standing = standingFindings(rows).find((row) => row.checkId === checkId && row.stage.kind === 'diagnosis' && row.shares.length > 0);
     return {
-      sumId: check.sum.id,
       target: {
         caseId,
         caseName: `case ${caseHead.number}, unit ${caseHead.fleetNumber}`,
@@ -40,7 +41,7 @@ export const readSumTarget = defineRead({
         open: caseHead.status === 'open',
         reader: { personId: person.id, organisationId: organisation.id },
       },
-      known: knownInputs(check.sum.id, {
+      known: knownInputs(sumId, {
         reservoirM3: unit?.reservoirM3 ?? null,
         requiredReservoirM3: unit?.requiredReservoirM3 ?? null,
         displacementM3: model?.displacementM3 ?? null,

@@ -1,4 +1,5 @@
 import { selectCalls, selectCaseEvents } from '@/db/queries/case';
+import { selectCatchesUnderWay } from '@/db/queries/oil-catch';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { buildReasons } from '@/lib/case/build-reasons';
 import { buildState } from '@/lib/case/build-state';
@@ -61,6 +62,7 @@ export const readCase = defineRead({
       usual: at ? {} : usualViews(await baselinesOfCase(tx, { ...of, head: caseHead, compiled: parts.compiled, now: ctx.now() }), ctx.person.units),
       otherHolds: at ? [] : otherHolds(await holdsOfUnit(tx, { ...of, unitId: caseHead.unitId }), of.caseId),
       limits: at ? {} : limitViews(await limitsOfCase(tx, of), parts.compiled, ctx.person.units),
+      catching: at ? [] : (await selectCatchesUnderWay(tx, of)).map(({ checkId, startedAt, remindAt }) => ({ checkId, since: startedAt.toISOString(), remindAt: remindAt?.toISOString() ?? null })),
       assignedTo: caseHead.assignedTo,
       calls: callViews(calls, events),
       events: events.map(({ at: when, ...event }) => ({ ...event, at: when.toISOString() })),

@@ -2,6 +2,7 @@ import type { Feature } from './row';
 import { api } from './rows/api';
 import { bench } from './rows/bench';
 import { cases } from './rows/cases';
+import { catches } from './rows/catches';
 import { device } from './rows/device';
 import { limits } from './rows/limits';
 import { models } from './rows/models';
@@ -16,4 +17,4 @@ import { units } from './rows/units';
  * `app` is not here, and tries wrong roles, another organisation, malformed and oversized input on each. A feature adds
  * its file of rows to `rows/` and its name here.
  */
-export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, device, photos, units, limits, models, settings, tokens];
+export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, catches, device, photos, units, limits, models, settings, tokens];

@@ -9,7 +9,7 @@ const NO_RULEBOOK = {} as Rulebook;
 
 /** One row in every table that belongs to an organisation; organisation, site, person and membership are there. */
 export async function insertOneRowEach(tx: Transaction, { organisationId, siteId, personId }: { organisationId: string; siteId: string; personId: string }) {
-  const [unitId, modelId, fitId, editionId, caseId, findingId, setId] = [newId(), newId(), newId(), newId(), newId(), newId(), newId()];
+  const [unitId, modelId, fitId, editionId, caseId, findingId, setId, catchId] = [newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId()];
   const of = { organisationId };
   await tx.insert(schema.invitation).values({ ...of, id: newId(), roles: ['technician'], expiresAt: AT, invitedBy: personId });
   await tx.insert(schema.compressorModel).values({ ...of, id: modelId, name: 'Model' });
@@ -36,6 +36,8 @@ export async function insertOneRowEach(tx: Transaction, { organisationId, siteId
   await tx.insert(schema.idempotentAnswer).values({ ...of, personId, key: 'key', requestHash: 'hash', status: 200, at: AT });
   await tx.insert(schema.adoptedLimit).values({ ...of, id: newId(), checkId: 'c', mostSi: 1, source: 'Ours', personId });
   await tx.insert(schema.unitHold).values({ ...of, id: newId(), unitId, caseId, checkId: 'c', placedAt: AT });
+  await tx.insert(schema.oilCatch).values({ ...of, id: catchId, caseId, checkId: 'c', stage: { kind: 'diagnosis' }, startedAt: AT, startedBy: personId });
+  await tx.insert(schema.oilWeighing).values({ ...of, id: newId(), catchId, caseId, massKg: 0.01, massErrorKg: 0.0005, ranS: 3600, personId, at: AT, findingId });
   await tx.insert(schema.savedView).values({ ...of, id: newId(), personId, list: 'cases', name: 'Mine', query: 'whose=me' });
   await tx.insert(schema.removal).values({ ...of, id: newId(), entity: 'unit', entityId: unitId, kind: 'hide', reason: 'Test', personId, at: AT });
   await tx.insert(schema.audit).values({ ...of, id: newId(), action: 'test', entity: 'unit', entityId: unitId, changed: {} });

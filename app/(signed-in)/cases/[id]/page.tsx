@@ -5,6 +5,7 @@ import { AssignForm } from '@/components/case/AssignForm';
 import { CallForm } from '@/components/case/CallForm';
 import { Calls } from '@/components/case/Calls';
 import { CaseDesk } from '@/components/case/CaseDesk';
+import { Catching } from '@/components/case/Catching';
 import { HAND_COOKIE, handFrom } from '@/components/case/hand';
 import { ReopenForm } from '@/components/case/ReopenForm';
 import { PhotosOfCase } from '@/components/photos/PhotosOfCase';
@@ -60,6 +61,7 @@ export default async function CasePage({ params, searchParams }: Props) {
           </Notice>
         </div>
       )}
+      <Catching view={view} />
       <PhotosOfCase view={view} initial={photos}>
       <CaseDesk
         key={`${state.at}/${state.status}`}

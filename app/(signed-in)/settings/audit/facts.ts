@@ -4,6 +4,7 @@ import { defaultRulebook } from '@/lib/diagnose/default-rulebook';
 import { dayText } from '@/lib/schemas/day-text';
 import { PARTS_WITH_IT } from '@/lib/schemas/fit';
 import { INSTALLED_MEASURES, MODEL_MEASURES, READING_MEASURES, REMOVED_MEASURES, UNIT_MEASURES, type MeasureField } from '@/lib/schemas/measures';
+import { WEIGHING_MEASURES } from '@/lib/schemas/oil-catch';
 import { termLabel, type TermList } from '@/lib/schemas/terms';
 import type { UnitPreferences } from '@/lib/units';
 
@@ -20,7 +21,7 @@ interface Fact {
 
 /** By the column that a row of the audit names: SI, shown in the reader's units. */
 const MEASURES = new Map<string, MeasureField>(
-  [...UNIT_MEASURES, ...MODEL_MEASURES, ...READING_MEASURES, ...INSTALLED_MEASURES, ...REMOVED_MEASURES].map((measure) => [measure.column, measure]),
+  [...UNIT_MEASURES, ...WEIGHING_MEASURES, ...MODEL_MEASURES, ...READING_MEASURES, ...INSTALLED_MEASURES, ...REMOVED_MEASURES].map((measure) => [measure.column, measure]),
 );
 
 const TERMS = new Map<string, TermList>([
@@ -54,11 +55,15 @@ const LABELS: Readonly<Record<string, string>> = {
   personId: 'Person',
   onDay: 'Day',
   measuredOn: 'Measured on',
+  massKg: 'Oil',
+  ranS: 'Engine ran',
+  remindEveryDays: 'Reminded every so many days',
+  place: 'Where it hangs',
   ...Object.fromEntries(FIGURES.map(({ id, name }) => [id, name])),
 };
 
 /** Of use to whoever looks into a fault of ours, and in the raw record all the same. */
-const RAW_ONLY = new Set(['kind', 'shares', 'asTyped', 'conditions', 'strokes', 'query', 'cautions', 'version']);
+const RAW_ONLY = new Set(['kind', 'shares', 'asTyped', 'conditions', 'strokes', 'query', 'cautions', 'version', 'massErrorKg']);
 
 const NAMES = new Map([...defaultRulebook.checks, ...defaultRulebook.causes].map(({ id, name }) => [id, name]));
 const RULEBOOK_FIELDS = new Set(['checkId', 'mainCause', 'contributingCauses', 'complaints', 'dangers', 'sureness', 'roles', 'scopes', 'status']);

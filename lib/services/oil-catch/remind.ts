@@ -1,0 +1,53 @@
+import { asTenant, type Transaction } from '@/db/connect';
+import { insertAudit } from '@/db/queries/audit';
+import { selectCaseHead } from '@/db/queries/case';
+import { findMember } from '@/db/queries/membership';
+import { lockCatch, selectWeighings } from '@/db/queries/oil-catch';
+import { siteDay } from '@/lib/case/site-day';
+import { jobs, type JobData } from '@/lib/jobs';
+import { dayText } from '@/lib/schemas/day-text';
+import type { Post } from '../password/mail-reset';
+import { planReminder } from './reminder';
+
+/**
+ * Mails that a bottle wants weighing, and plans the next mail. Nothing to do when somebody weighed, ended or planned
+ * otherwise meanwhile, or the case was called. The mail goes out before the plan is kept: killed in between, it goes out
+ * again rather than not at all.
+ */
+export async function remindOfWeighing({ db, mailer, now, baseUrl }: Post, { organisationId, catchId, due }: JobData['remind-weighing']): Promise<void> {
+  await asTenant(db, { organisationId }, async (tx) => {
+    const under = await lockCatch(tx, { organisationId, catchId });
+    if (!under || under.endedAt || under.remindAt?.toISOString() !== due) return;
+    const head = await selectCaseHead(tx, { organisationId, caseId: under.caseId });
+    if (!head || head.status !== 'open') return;
+    const member = await firstHere(tx, organisationId, [head.assignedTo, under.startedBy]);
+    const at = now();
+    if (member) {
+      const last = (await selectWeighings(tx, { organisationId, catchIds: [catchId] })).filter(({ takenBackAt }) => takenBackAt === null).at(-1);
+      const said = last ? `It was weighed last on ${dayText(siteDay(last.at, head.timeZone))}.` : `It has hung since ${dayText(siteDay(under.startedAt, head.timeZone))} and was not weighed yet.`;
+      await mailer.send({
+        to: member.email,
+        subject: `Weigh the oil caught: unit ${head.fleetNumber}, case ${head.number}`,
+        text: `Hello ${member.name},
+
+oil is being caught from unit ${head.fleetNumber} at ${head.siteName}${under.place ? `, ${under.place}` : ''}. ${said} Weigh it and read the hour meter here:
+
+${new URL(`/cases/${under.caseId}/catch`, baseUrl).href}
+
+Engine off, wheels chocked, eyes protected; the cautions stand on the page. Take the bottle down there to get no more of these.
+`,
+      });
+    }
+    await planReminder(tx, jobs, { organisationId, catchId, from: at, everyDays: under.remindEveryDays });
+    await insertAudit(tx, [{ organisationId, action: 'mail.oil-catch', entity: 'oil-catch', entityId: catchId, changed: { caseId: under.caseId, mailed: member !== null }, at }]);
+  });
+}
+
+/** Whoever has the case, else who hung the bottle; null: neither is here any more. */
+async function firstHere(tx: Transaction, organisationId: string, people: readonly (string | null)[]) {
+  for (const personId of people) {
+    const found = personId ? await findMember(tx, { organisationId, personId }) : undefined;
+    if (found && !found.endedAt) return found;
+  }
+  return null;
+}
