@@ -8,7 +8,7 @@ import { SelectField } from '@/components/ui/SelectField';
 import { SubmitButton } from '@/components/ui/SubmitButton';
 import { TextField } from '@/components/ui/TextField';
 import { MeasureField } from '@/components/units/MeasureField';
-import { OIL_MEASURE } from '@/lib/schemas/oil-catch';
+import { OIL_MEASURE, USUAL_SCALE_ERROR } from '@/lib/schemas/oil-catch';
 import type { UnitPreferences } from '@/lib/units';
 
 type Action<Result> = (previous: ActionState<Result>, form: FormData) => Promise<ActionState<Result>>;
@@ -65,9 +65,9 @@ export function WeighForm({ action, caseId, catchId, newId, units, metered }: Of
   return (
     <Form form={form} label="Weigh" errorTitle="Not weighed yet">
       <Hidden values={{ id: newId, caseId, catchId }} />
-      <div className="grid gap-x-6 gap-y-4 sm:grid-cols-2">
+      <div className="grid items-end gap-x-6 gap-y-4 sm:grid-cols-2">
         <MeasureField label="Oil in the bottle" hint="Without the water and the bottle. Empty it afterwards." required measure={OIL_MEASURE} units={units} {...form.field('oil')} />
-        <MeasureField label="Give or take" hint="What the scale can be off; 0.5 g unless you say" required={false} measure={OIL_MEASURE} units={units} {...form.field('oilError')} />
+        <MeasureField label="Give or take" hint={`What the scale can be off; ${USUAL_SCALE_ERROR} unless you say`} required={false} measure={OIL_MEASURE} units={units} {...form.field('oilError')} />
         <MeasureField label="Hour meter now" hint={metered ? undefined : 'It was not read before: give the hours run as well.'} required={metered} measure={HOURS} units={units} {...form.field('engineHours')} />
         <MeasureField label="Hours run since" hint={metered ? 'Only if the meter can’t be read' : 'Since the weighing before, or the start'} required={!metered} measure={HOURS} units={units} {...form.field('hoursRun')} />
       </div>

@@ -6,6 +6,7 @@ import { measureText, optionalCount, reason } from './record';
 
 /** How far the scale can be off, where nobody says: as the bench takes it. */
 export const USUAL_SCALE_ERROR_KG = 5e-4;
+export const USUAL_SCALE_ERROR = '0.5 g';
 
 export const OIL_MEASURE = { quantity: 'mass', like: 'g' } as const;
 

@@ -28,7 +28,8 @@ export function readMeasure(
   return parsed.ok ? { ok: true, si: parsed.si, asTyped: withUnit(parsed, measure.quantity) } : parsed;
 }
 
-function withUnit({ asTyped, unit }: ParsedQuantity, quantity: Quantity): string {
+/** What was typed, with its unit behind it where it named none. */
+export function withUnit({ asTyped, unit }: ParsedQuantity, quantity: Quantity): string {
   const namesUnit = /[^\d\s.,:/+-]/u.test(asTyped);
   const { symbol } = unitDefinition(quantity, unit);
   return namesUnit || symbol === '' ? asTyped : `${asTyped} ${symbol}`;

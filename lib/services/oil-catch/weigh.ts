@@ -11,7 +11,7 @@ import { writeFinding } from '../case/write-finding';
 import { writingOf } from '../case/writing';
 import type { Ctx } from '../context';
 import { defineWrite } from '../define';
-import { decimalMarkOf, readMeasures } from '../units-of-measure';
+import { decimalMarkOf, readMeasures, withUnit } from '../units-of-measure';
 import { lockCatchOf, lockOpenCase, refuseEnded } from './open-case';
 import { planReminder } from './reminder';
 
@@ -39,7 +39,8 @@ export const weigh = defineWrite({
     refuseEnded(under);
     const standing = weighings.filter(({ takenBackAt }) => takenBackAt === null);
     const { columns, asTyped } = readMeasures(ctx, WEIGHING_MEASURES, typed);
-    const weighed = { ...columns, ...readWeighing(ctx, { columns, oilError, before: lastMeter(under, standing) }) };
+    const error = oilError ? readScaleError(ctx, oilError) : { si: USUAL_SCALE_ERROR_KG };
+    const weighed = { ...columns, ...readWeighing({ columns, before: lastMeter(under, standing) }), massErrorKg: error.si };
 
     const at = ctx.now();
     const findingId = newId(at.getTime());
@@ -54,7 +55,7 @@ export const weigh = defineWrite({
         writing: { ...writingOf(ctx), decimal: WRITTEN_HERE.decimal },
       },
     );
-    const isNew = await insertWeighing(tx, { ...of, id, ...weighed, asTyped: oilError ? { ...asTyped, massErrorKg: oilError } : asTyped, note, personId: ctx.person.id, at, findingId });
+    const isNew = await insertWeighing(tx, { ...of, id, ...weighed, asTyped: error.asTyped ? { ...asTyped, massErrorKg: error.asTyped } : asTyped, note, personId: ctx.person.id, at, findingId });
     if (!isNew) throw conflict('This id belongs to another weighing.');
     await planReminder(tx, ctx.jobs, { ...of, from: at, everyDays: under.remindEveryDays });
     audit({ entity: 'oil-weighing', entityId: id, changed: { caseId, checkId: under.checkId, ...weighed, note } });
@@ -69,23 +70,26 @@ export const written = ({ checkId, stage }: Pick<OilCatch, 'checkId' | 'stage'>,
 /** The hour meter as it stood last; null: nobody read it, or an hour meter came in between that can't be told. */
 const lastMeter = (under: OilCatch, standing: readonly WeighingRow[]): number | null => (standing.at(-1) ?? under).engineS;
 
-interface Typed {
+interface Read {
   columns: { engineS: number | null; massKg: number | null; ranS: number | null };
-  oilError: string | null;
   /** The hour meter when it was read before. */
   before: number | null;
 }
 
-function readWeighing(ctx: Ctx, { columns: { engineS, massKg, ranS }, oilError, before }: Typed): { massKg: number; massErrorKg: number; ranS: number } {
-  const defaultUnit = measureUnit(ctx.person.units, OIL_MEASURE);
-  const error = oilError ? parseError(oilError, { quantity: 'mass', defaultUnit, decimal: decimalMarkOf(ctx.organisation.country) }) : null;
+function readWeighing({ columns: { engineS, massKg, ranS }, before }: Read): { massKg: number; ranS: number } {
   if (massKg === null) throw invalid({ oil: 'Enter what the oil weighed; 0 when there was none.' });
   if (massKg < 0 || massKg > MOST_OIL_KG) throw invalid({ oil: 'This is no weight of oil from a bottle.' });
-  if (error && !error.ok) throw invalid({ oilError: error.message });
   const ran = engineS !== null && before !== null ? engineS - before : ranS;
   if (ran === null) throw invalid(before === null ? { hoursRun: 'The hour meter was not read before: enter the hours run since.' } : { engineHours: 'Read the hour meter, or enter the hours run since.' });
   if (ran <= 0) {
     throw invalid(ran === ranS ? { hoursRun: 'The engine has to have run.' } : { engineHours: `The meter stood at ${formatQuantity(before ?? 0, { quantity: 'engineHours', unit: 'h' })} before.` });
   }
-  return { massKg, massErrorKg: error?.si ?? USUAL_SCALE_ERROR_KG, ranS: ran };
+  return { massKg, ranS: ran };
+}
+
+/** How far the scale can be off. A figure alone is in the unit that stands beside its field. */
+function readScaleError({ person, organisation }: Ctx, text: string): { si: number; asTyped?: string } {
+  const error = parseError(text, { quantity: OIL_MEASURE.quantity, defaultUnit: measureUnit(person.units, OIL_MEASURE), decimal: decimalMarkOf(organisation.country) });
+  if (!error.ok) throw invalid({ oilError: error.message });
+  return { si: error.si, asTyped: withUnit(error, OIL_MEASURE.quantity) };
 }

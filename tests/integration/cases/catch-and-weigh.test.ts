@@ -76,7 +76,7 @@ describe('oil that is caught and weighed over days', () => {
     await expect(weighs('1 oz', { engineHours: '4,120' })).rejects.toMatchObject({ fields: { hoursRun: expect.stringContaining('not read before') } });
     await weigh({ ctx, input: { id: newId(), caseId, catchId, oil: '1', oilError: '± 0.1', engineHours: '4,120', hoursRun: '10' } });
     // 1 oz = 28.349523125 g by definition (international avoirdupois pound, 1959).
-    expect((await seen())?.weighings[0]).toMatchObject({ massKg: expect.closeTo(0.028349523125, 12), massErrorKg: expect.closeTo(0.0028349523125, 12), ranS: 36_000, engineS: 4120 * 3600 });
+    expect((await seen())?.weighings[0]).toMatchObject({ massKg: expect.closeTo(0.028349523125, 12), massErrorKg: expect.closeTo(0.0028349523125, 12), asTyped: { massKg: '1 oz', massErrorKg: '0.1 oz' }, ranS: 36_000, engineS: 4120 * 3600 });
     // From then on the meter is known.
     await weighs('3 g', { engineHours: '4,125' });
     expect((await seen())?.weighings[1]?.ranS).toBe(18_000);
