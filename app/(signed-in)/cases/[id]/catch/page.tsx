@@ -36,6 +36,7 @@ export default async function CatchPage({ params }: { params: Promise<{ id: stri
         lead={check?.why}
       />
       <div className="grid max-w-4xl gap-8">
+        <h2 className="sr-only">Before you begin</h2>
         {state.status !== 'open' && <Notice title="The case has been called">Nothing can be weighed into it. Reopen it to go on.</Notice>}
         {!check && <Notice title="No check of this rulebook is answered by oil that is caught">Its edition may be older than this page.</Notice>}
         {check && works && (
