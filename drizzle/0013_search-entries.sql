@@ -10,6 +10,6 @@ CREATE TABLE "search_entry" (
 --> statement-breakpoint
 ALTER TABLE "search_entry" ENABLE ROW LEVEL SECURITY;--> statement-breakpoint
 ALTER TABLE "search_entry" ADD CONSTRAINT "search_entry_organisation_id_organisation_id_fk" FOREIGN KEY ("organisation_id") REFERENCES "public"."organisation"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
-CREATE INDEX "search_entry_words" ON "search_entry" USING gin ("organisation_id","words");--> statement-breakpoint
-CREATE INDEX "search_entry_fleet_key" ON "search_entry" USING gin ("organisation_id","fleet_key" gin_trgm_ops);--> statement-breakpoint
+CREATE INDEX "search_entry_words" ON "search_entry" USING gin ("organisation_id","words") WITH (fastupdate=false);--> statement-breakpoint
+CREATE INDEX "search_entry_fleet_key" ON "search_entry" USING gin ("organisation_id","fleet_key" gin_trgm_ops) WITH (fastupdate=false);--> statement-breakpoint
 CREATE POLICY "of_this_organisation" ON "search_entry" AS PERMISSIVE FOR ALL TO public USING (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid) WITH CHECK (organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid);

@@ -101,12 +101,13 @@ AS $$
   ORDER BY f.likeness DESC, f.at DESC, f.id
 $$;
 --> statement-breakpoint
--- Units by number: 0 the very one, 1 it begins so, 2 it holds it, 3 it is nearly that.
+-- Units by number: 0 the very one, 1 it begins so, 2 it holds it, 3 it is like it by its trigrams; which of those are near
+-- enough is for whoever asks. "sure" counts the others, those beyond the most included.
 CREATE FUNCTION search_fleet_numbers(p_organisation uuid, p_key text, p_near boolean, p_most integer)
-RETURNS TABLE (id uuid, manner integer, total integer)
+RETURNS TABLE (id uuid, fleet_key text, manner integer, sure integer)
 LANGUAGE sql STABLE SECURITY DEFINER SET search_path = pg_catalog, pg_temp
 AS $$
-  SELECT e.id, m.manner, (count(*) OVER ())::integer
+  SELECT e.id, e.fleet_key, m.manner, (count(*) FILTER (WHERE m.manner < 3) OVER ())::integer
   FROM public.search_entry e
   CROSS JOIN LATERAL (
     SELECT CASE WHEN e.fleet_key = p_key THEN 0 WHEN starts_with(e.fleet_key, p_key) THEN 1 WHEN strpos(e.fleet_key, p_key) > 0 THEN 2 ELSE 3 END AS manner
@@ -114,7 +115,7 @@ AS $$
   WHERE e.organisation_id = p_organisation
     AND e.organisation_id = nullif(current_setting('app.organisation_id', true), '')::uuid
     AND (e.fleet_key LIKE '%' || p_key || '%' OR (p_near AND e.fleet_key OPERATOR(public.%) p_key))
-  ORDER BY m.manner, public.similarity(e.fleet_key, p_key) DESC, e.fleet_key, e.id
+  ORDER BY m.manner, public.similarity(e.fleet_key, p_key) DESC, length(e.fleet_key), e.fleet_key, e.id
   LIMIT p_most
 $$;
 --> statement-breakpoint

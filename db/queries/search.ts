@@ -31,17 +31,23 @@ export async function searchEntries(
 
 export interface FoundNumber {
   id: string;
-  /** The very number, one that begins so, one that holds it, one that is nearly it. */
+  key: string;
+  /** The very number, one that begins so, one that holds it, one that is like it. */
   manner: 0 | 1 | 2 | 3;
-  total: number;
+  /** How many there are in all of the first three. */
+  sure: number;
 }
 
-/** Units whose fleet number is, holds or nearly is this one, both as `fleetKey` of lib/search has them. */
+/** Of four characters one that is wrong leaves a quarter of the trigrams; PostgreSQL's own threshold, 0.3, would miss those. */
+const LIKENESS = '0.2';
+
+/** Units whose fleet number is, holds or is like this one, both as `fleetKey` of lib/search has them. */
 export async function searchFleetNumbers(
   db: Executor,
   { organisationId, key, near, most }: { organisationId: string; key: string; near: boolean; most: number },
 ): Promise<FoundNumber[]> {
-  const { rows } = await db.execute(sql`select id, manner, total from search_fleet_numbers(${organisationId}, ${key}, ${near}, ${most})`);
+  await db.execute(sql`select set_config('pg_trgm.similarity_threshold', ${LIKENESS}, true)`);
+  const { rows } = await db.execute(sql`select id, fleet_key as key, manner, sure from search_fleet_numbers(${organisationId}, ${key}, ${near}, ${most})`);
   return rows as unknown as FoundNumber[];
 }
 
@@ -59,17 +65,20 @@ export async function selectFoundUnits(db: Executor, { organisationId, ids }: Of
     .where(and(eq(unit.organisationId, organisationId), inArray(unit.id, [...ids]), isNull(unit.hiddenAt)));
 }
 
+/** Cases are counted from 1. */
+const NO_NUMBER = 0;
+
 /** A case that is meant by its number, or because it is of a unit that is; those that stand first, the latest of them first. */
 export async function selectMeantCases(
   db: Executor,
   { organisationId, number, unitIds, most }: { organisationId: string; number: number | null; unitIds: readonly string[]; most: number },
 ): Promise<{ id: string }[]> {
   if (number === null && unitIds.length === 0) return [];
-  const byNumber = number === null ? sql`false` : eq(cases.number, number);
+  const byNumber = eq(cases.number, number ?? NO_NUMBER);
   return db
     .select({ id: cases.id })
     .from(cases)
-    .where(and(eq(cases.organisationId, organisationId), or(byNumber, unitIds.length > 0 ? inArray(cases.unitId, [...unitIds]) : sql`false`)))
+    .where(and(eq(cases.organisationId, organisationId), or(byNumber, inArray(cases.unitId, [...unitIds]))))
     .orderBy(desc(byNumber), sql`${cases.status} = 'closed'`, desc(cases.number))
     .limit(most);
 }
