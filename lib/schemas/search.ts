@@ -9,7 +9,7 @@ const LONGEST = 200;
 const query = z
   .string()
   .max(LONGEST, `Keep it under ${LONGEST} characters.`)
-  .transform((text) => text.replaceAll(/\p{Cc}/gu, ' ').trim());
+  .transform((text) => text.replaceAll(/[\p{Cc}\p{Surrogate}]/gu, ' ').trim());
 
 export const searchInput = z.strictObject({
   q: query.default('').meta({ description: 'Words, of which each may be the beginning of one; a fleet number, also one that is nearly right; or a case number.' }),
