@@ -34,7 +34,7 @@ export function AppHeader({ person, organisation, items, theme, signOut }: AppHe
   );
   return (
     <header className="border-b-2 border-ink">
-      <div className="relative mx-auto flex max-w-page items-center gap-4 px-4 sm:px-6">
+      <div className="relative mx-auto flex max-w-page items-center gap-1 px-4 sm:gap-4 sm:px-6">
         <Wordmark href={items[0]?.href ?? '/'} />
         <nav aria-label="Main" className="mr-auto -mb-0.5 ml-4 max-lg:hidden">
           <NavLinks items={items} look="row" />
