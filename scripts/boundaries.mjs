@@ -74,6 +74,11 @@ const ROWS = [
     because: 'What is usual for a unit is worked out alike on a page, on the server and without a connection.',
   },
   {
+    folder: 'lib/search/**',
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES(), 'zod'],
+    because: 'What was typed is read, and what was found is marked, the same wherever it is shown.',
+  },
+  {
     folder: 'lib/stopwatch/**',
     never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES(), 'zod'],
     because: 'A stopwatch is times of the clock, handed to it.',

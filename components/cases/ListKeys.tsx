@@ -1,28 +1,10 @@
 'use client';
 
-import { useEffect, useSyncExternalStore } from 'react';
+import { useEffect } from 'react';
 import { Disclosure } from '@/components/ui/Disclosure';
-
-/** Kept on this device: who dictates, or types with one finger, turns single keys off. */
-const OFF = 'list-keys-off';
-
-const watchers = new Set<() => void>();
-const isOff = () => localStorage.getItem(OFF) === 'yes';
-
-function watch(changed: () => void): () => void {
-  watchers.add(changed);
-  return () => watchers.delete(changed);
-}
-
-function turn(off: boolean): void {
-  if (off) localStorage.setItem(OFF, 'yes');
-  else localStorage.removeItem(OFF);
-  for (const changed of watchers) changed();
-}
+import { isTyping, singleKeysAreOff, turnSingleKeys, useSingleKeysAreOff } from '@/components/ui/single-keys';
 
 const rows = () => [...document.querySelectorAll<HTMLElement>('[data-row]')];
-
-const isTyping = (target: EventTarget | null) => target instanceof HTMLElement && (target.isContentEditable || /^(INPUT|SELECT|TEXTAREA)$/.test(target.tagName));
 
 /** Moves the focus to the next row, or to the first when none has it. */
 function step(by: 1 | -1): void {
@@ -39,10 +21,10 @@ function act(event: KeyboardEvent, searchId: string): boolean {
   const inRow = event.target instanceof HTMLElement && event.target.matches('[data-row]');
   if (event.key === 'ArrowDown' && inRow) return step(1), true;
   if (event.key === 'ArrowUp' && inRow) return step(-1), true;
-  if (isOff()) return false;
+  if (singleKeysAreOff()) return false;
   if (event.key === 'j') return step(1), true;
   if (event.key === 'k') return step(-1), true;
-  if (event.key !== '/') return false;
+  if (event.key !== 'f') return false;
   const search = document.getElementById(searchId);
   if (search instanceof HTMLInputElement) search.select();
   search?.focus();
@@ -51,7 +33,7 @@ function act(event: KeyboardEvent, searchId: string): boolean {
 
 /** The keys of a list of rows, which are links marked `data-row`, and what they are. Never taken from a field. */
 export function ListKeys({ searchId }: { searchId: string }) {
-  const off = useSyncExternalStore(watch, isOff, () => false);
+  const off = useSingleKeysAreOff();
   useEffect(() => {
     const onKey = (event: KeyboardEvent) => {
       if (act(event, searchId)) event.preventDefault();
@@ -66,11 +48,12 @@ export function ListKeys({ searchId }: { searchId: string }) {
         <Key names={['j', '↓']}>next case; the arrow once a case has the focus</Key>
         <Key names={['k', '↑']}>the one before</Key>
         <Key names={['Enter']}>open it</Key>
-        <Key names={['/']}>look for a unit or case number</Key>
+        <Key names={['f']}>look for a unit or case number in this list</Key>
+        <Key names={['/']}>search everything</Key>
       </dl>
       <label className="mt-3 flex min-h-touch cursor-pointer items-center gap-3">
-        <input type="checkbox" className="size-6" checked={!off} onChange={(event) => turn(!event.target.checked)} />
-        j, k and / work on this device
+        <input type="checkbox" className="size-6" checked={!off} onChange={(event) => turnSingleKeys(!event.target.checked)} />
+        j, k, f and / work on this device
       </label>
     </Disclosure>
   );

@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { SearchBox } from '@/components/search/SearchBox';
 import { Menu } from './Menu';
 import { NavLinks, type NavItem } from './NavLinks';
 import type { Theme } from './theme';
@@ -33,11 +34,12 @@ export function AppHeader({ person, organisation, items, theme, signOut }: AppHe
   );
   return (
     <header className="border-b-2 border-ink">
-      <div className="relative mx-auto flex max-w-page items-center gap-4 px-4 sm:px-6">
+      <div className="relative mx-auto flex max-w-page items-center gap-1 px-4 sm:gap-4 sm:px-6">
         <Wordmark href={items[0]?.href ?? '/'} />
         <nav aria-label="Main" className="mr-auto -mb-0.5 ml-4 max-lg:hidden">
           <NavLinks items={items} look="row" />
         </nav>
+        <SearchBox className="max-lg:ml-auto" />
         <Menu
           className="max-lg:hidden"
           panelClassName="absolute right-6 top-full w-80"
@@ -45,7 +47,7 @@ export function AppHeader({ person, organisation, items, theme, signOut }: AppHe
         >
           {about}
         </Menu>
-        <Menu className="ml-auto lg:hidden" panelClassName="absolute inset-x-0 top-full border-x-0" summary={<>Menu<Chevron /></>}>
+        <Menu className="lg:hidden" panelClassName="absolute inset-x-0 top-full border-x-0" summary={<>Menu<Chevron /></>}>
           <nav aria-label="Main" className="mb-5">
             <NavLinks items={items} look="column" />
           </nav>

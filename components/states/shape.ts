@@ -31,6 +31,7 @@ export const PAGES: readonly Page[] = [
   { route: 'bench', shape: 'list', what: 'the sums' },
   { route: 'bench/[sum]', shape: 'form', what: 'the sum' },
   { route: 'bench/line-survey', shape: 'form', what: 'the survey' },
+  { route: 'search', shape: 'list', what: 'what is found' },
   { route: 'not-allowed', shape: 'form', what: 'the page' },
   { route: 'settings', shape: 'form', what: 'your settings' },
   { route: 'settings/profile', shape: 'form', what: 'your settings' },

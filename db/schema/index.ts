@@ -14,3 +14,4 @@ export * from './saved-view';
 export * from './limit';
 export * from './unit-hold';
 export * from './oil-catch';
+export * from './search-entry';

@@ -8,6 +8,7 @@ import type { Role } from './roles';
 export const SCOPES = {
   'cases:read': { needs: 'case.see', does: 'See cases, their rankings, photos and the rulebook' },
   'cases:write': { needs: 'case.work', does: 'Open cases, answer checks, weigh oil, add photos, name causes' },
+  'search:read': { needs: 'unit.see', does: 'Search units, cases, notes and the rulebook' },
   'bench:read': { needs: 'bench.use', does: 'Work out sums of the bench' },
   'units:read': { needs: 'unit.see', does: 'See units with their readings, fits and healthy baselines' },
   'units:write': { needs: 'unit.edit', does: 'Add and change units, readings, fits and healthy baselines' },

@@ -6,5 +6,6 @@ export const queryKeys = {
   caseProvisional: (caseId: string) => ['case', caseId, 'provisional'] as const,
   casePhotos: (caseId: string) => ['case', caseId, 'photos'] as const,
   casePhotosHere: (caseId: string) => ['case', caseId, 'photos-here'] as const,
+  search: (text: string) => ['search', text] as const,
   unitSearch: (text: string) => ['units', 'search', text] as const,
 };

@@ -99,7 +99,7 @@ describe('the case list by keyboard', () => {
       await page.keyboard.press(key);
       expect([key, await rowFocused(page)]).toEqual([key, row]);
     }
-    await page.keyboard.press('/');
+    await page.keyboard.press('f');
     await page.keyboard.type('jk/1');
     expect(await page.getByLabel('Unit or case number').inputValue()).toBe('jk/1');
     await page.goto(`${server.url}/cases`);

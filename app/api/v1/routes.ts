@@ -39,6 +39,7 @@ import * as photosIdThumbnail from './photos/[id]/thumbnail/route';
 import * as profile from './profile/route';
 import * as profileUnits from './profile/units/route';
 import * as rulebook from './rulebook/route';
+import * as search from './search/route';
 import * as sites from './sites/route';
 import * as sitesId from './sites/[id]/route';
 import * as units from './units/route';
@@ -97,6 +98,7 @@ export const ROUTES = {
   '/profile': profile,
   '/profile/units': profileUnits,
   '/rulebook': rulebook,
+  '/search': search,
   '/sites': sites,
   '/sites/{id}': sitesId,
   '/units': units,

@@ -7,6 +7,7 @@ import { device } from './rows/device';
 import { limits } from './rows/limits';
 import { models } from './rows/models';
 import { photos } from './rows/photos';
+import { search } from './rows/search';
 import { settings } from './rows/settings';
 import { signingIn } from './rows/signing-in';
 import { tokens } from './rows/tokens';
@@ -17,4 +18,4 @@ import { units } from './rows/units';
  * `app` is not here, and tries wrong roles, another organisation, malformed and oversized input on each. A feature adds
  * its file of rows to `rows/` and its name here.
  */
-export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, catches, device, photos, units, limits, models, settings, tokens];
+export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, catches, device, photos, units, limits, models, search, settings, tokens];
