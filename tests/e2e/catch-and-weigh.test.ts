@@ -52,7 +52,7 @@ describe('oil that is caught and weighed over days, on a phone', () => {
     await page.getByText(/Oil caught per hour: 1\s*mL\/h/).first().waitFor();
     await page.getByRole('link', { name: /The sum behind Oil caught per hour/ }).first().click();
     await page.getByRole('heading', { name: 'Oil carry-over, caught and weighed', level: 1 }).waitFor();
-    expect(await page.getByLabel('Oil weighed, all readings together').inputValue()).toMatch(/^26\.1/);
+    expect(await page.getByLabel('Oil weighed, all readings together', { exact: true }).inputValue()).toMatch(/^26\.1/);
     await page.getByRole('link', { name: 'Oil carry-over, caught in a cup' }).waitFor();
   });
 
