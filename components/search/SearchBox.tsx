@@ -16,17 +16,41 @@ function asksForSearch({ key, ctrlKey, metaKey, altKey, shiftKey, target, defaul
   return key === '/' && !isTyping(target) && !singleKeysAreOff();
 }
 
+interface Opened {
+  Dialog: ComponentType<{ begun: string; onClose: () => void }> | null;
+  /** Typed while it was fetched. */
+  begun: string;
+}
+
+const CLOSED: Opened = { Dialog: null, begun: '' };
+
+/** Letters that are typed until the box is there: they are meant for it, and not for keys of the page below. */
+function letters(): { text: () => string; stop: () => void } {
+  let text = '';
+  const onKey = (event: KeyboardEvent) => {
+    if (event.key.length > 1 || event.ctrlKey || event.metaKey || event.altKey) return;
+    event.preventDefault();
+    event.stopPropagation();
+    text += event.key;
+  };
+  document.addEventListener('keydown', onKey, { capture: true });
+  return { text: () => text, stop: () => document.removeEventListener('keydown', onKey, { capture: true }) };
+}
+
 /** The way into the search from every page: a link to its page, which with script opens the box over this one. */
 export function SearchBox({ className }: { className?: string }) {
-  const [Dialog, setDialog] = useState<ComponentType<{ onClose: () => void }> | null>(null);
+  const [{ Dialog, begun }, setDialog] = useState<Opened>(CLOSED);
   const [isMissing, setMissing] = useState(false);
 
   const open = () => {
     setMissing(false);
-    void loadDialog().then(
-      ({ default: Loaded }) => setDialog(() => Loaded),
-      () => setMissing(true),
-    );
+    const typed = letters();
+    void loadDialog()
+      .then(
+        ({ default: Loaded }) => setDialog({ Dialog: Loaded, begun: typed.text() }),
+        () => setMissing(true),
+      )
+      .finally(typed.stop);
   };
   useEffect(() => {
     const timer = setTimeout(() => void loadDialog().catch(() => undefined), LOAD_AFTER_MS);
@@ -63,7 +87,7 @@ export function SearchBox({ className }: { className?: string }) {
         <span className="max-sm:sr-only">Search</span>
       </Link>
       {isMissing && <p role="alert" className="absolute top-full right-4 z-10 max-w-prose border border-ink bg-sheet p-4">The search could not be fetched. Try again when there is a connection.</p>}
-      {Dialog && <Dialog onClose={() => setDialog(null)} />}
+      {Dialog && <Dialog begun={begun} onClose={() => setDialog(CLOSED)} />}
     </>
   );
 }

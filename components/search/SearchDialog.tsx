@@ -12,20 +12,26 @@ import { useOptions } from './use-options';
 import { useSearch } from './use-search';
 import { foundText, SEARCHED } from './words';
 
+interface Props {
+  /** What stands in it from the start. */
+  begun: string;
+  onClose: () => void;
+}
+
 /** The box that searches everything, over the page that one is on. Its height is the same whatever is found. */
-export default function SearchDialog({ onClose }: { onClose: () => void }) {
+export default function SearchDialog(props: Props) {
   return (
     <QueryProvider>
-      <Box onClose={onClose} />
+      <Box {...props} />
     </QueryProvider>
   );
 }
 
-function Box({ onClose }: { onClose: () => void }) {
+function Box({ begun, onClose }: Props) {
   const dialog = useRef<HTMLDialogElement>(null);
   const router = useRouter();
   const id = useId();
-  const [text, setText] = useState('');
+  const [text, setText] = useState(begun);
   const { result, isBehind, problem, again } = useSearch(text);
   const groups = (problem ? undefined : result)?.groups.filter(({ hits }) => hits.length > 0) ?? [];
   const optionId = (name: string) => `${id}-${name}`;

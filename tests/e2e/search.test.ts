@@ -90,6 +90,16 @@ describe('the search by keyboard', () => {
     expect(await field.evaluate((one) => one === document.activeElement)).toBe(true);
   });
 
+  it('keeps letters that are typed before it has come, and none of them works the page below', async () => {
+    await page.goto(`${url}/cases`);
+    await page.keyboard.press('/');
+    await page.keyboard.type('njk');
+    await page.getByRole('combobox').waitFor();
+    expect(await page.getByRole('combobox').inputValue()).toBe('njk');
+    expect(new URL(page.url()).pathname).toBe('/cases');
+    await page.keyboard.press('Escape');
+  });
+
   it('leads to all that is found by Enter, on a page that can be used before its scripts have come', async () => {
     await page.goto(`${url}/units`);
     await openByKey('Control+k');
