@@ -13,3 +13,4 @@ export * from './api';
 export * from './saved-view';
 export * from './limit';
 export * from './unit-hold';
+export * from './mail';
