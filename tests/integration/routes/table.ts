@@ -3,6 +3,7 @@ import { api } from './rows/api';
 import { bench } from './rows/bench';
 import { cases } from './rows/cases';
 import { device } from './rows/device';
+import { jobs } from './rows/jobs';
 import { limits } from './rows/limits';
 import { models } from './rows/models';
 import { photos } from './rows/photos';
@@ -16,4 +17,4 @@ import { units } from './rows/units';
  * `app` is not here, and tries wrong roles, another organisation, malformed and oversized input on each. A feature adds
  * its file of rows to `rows/` and its name here.
  */
-export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, device, photos, units, limits, models, settings, tokens];
+export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, device, photos, units, limits, models, jobs, settings, tokens];
