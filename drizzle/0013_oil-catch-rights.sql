@@ -9,5 +9,5 @@ ALTER TABLE "oil_catch" FORCE ROW LEVEL SECURITY;
 --> statement-breakpoint
 ALTER TABLE "oil_weighing" FORCE ROW LEVEL SECURITY;
 --> statement-breakpoint
--- Its mail is tried again for a day and a half, as others are.
-SELECT pgboss.create_queue('remind-weighing', '{"policy": "standard", "retryLimit": 10, "retryDelay": 60, "retryBackoff": true, "expireInSeconds": 60}');
+-- It only writes: what is wrong for longer than these tries is no matter of waiting.
+SELECT pgboss.create_queue('remind-weighing', '{"policy": "standard", "retryLimit": 10, "retryDelay": 5, "retryBackoff": true, "expireInSeconds": 45}');

@@ -1,17 +1,17 @@
 import type { JobData, JobName } from '@/lib/jobs';
-import { mailInvitation } from '@/lib/services/invitation/mail';
-import { mailPasswordReset, type Post } from '@/lib/services/password/mail-reset';
+import type { Attempt } from '@/lib/jobs/attempt';
+import { sendMail, type Post } from '@/lib/services/mail/send';
 import { remindOfWeighing } from '@/lib/services/oil-catch/remind';
+import { mailPasswordReset } from '@/lib/services/password/mail-reset';
 import { makeThumbnail } from '@/lib/services/photo/make-thumbnail';
 import { sweep } from '@/lib/services/session/sweep';
-import type { Storage } from '@/lib/storage';
 
-export type Handlers = { [Name in JobName]: (data: JobData[Name]) => Promise<void> };
+export type Handlers = { [Name in JobName]: (data: JobData[Name], attempt: Attempt) => Promise<void> };
 
 /** What each job does: a service of its own. */
-export const handlers = (post: Post & { storage: Storage }): Handlers => ({
-  'mail-invitation': (data) => mailInvitation(post, data),
-  'mail-password-reset': (data) => mailPasswordReset(post, data),
+export const handlers = (post: Post): Handlers => ({
+  'send-mail': (data, attempt) => sendMail(post, data, attempt),
+  'mail-password-reset': (data, attempt) => mailPasswordReset(post, data, attempt),
   'make-thumbnail': (data) => makeThumbnail(post, data),
   'remind-weighing': (data) => remindOfWeighing(post, data),
   sweep: () => sweep(post),

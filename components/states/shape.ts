@@ -47,6 +47,7 @@ export const PAGES: readonly Page[] = [
   { route: 'settings/sites/new', shape: 'form', what: 'the form' },
   { route: 'settings/sites/[id]', shape: 'form', what: 'the site' },
   { route: 'settings/organisation', shape: 'form', what: 'the organisation' },
+  { route: 'settings/jobs', shape: 'list', what: 'the jobs' },
   { route: 'settings/audit', shape: 'list', what: 'the audit' },
 ];
 

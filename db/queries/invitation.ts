@@ -1,4 +1,4 @@
-import { and, asc, eq, isNull } from 'drizzle-orm';
+import { and, asc, eq, isNull, sql } from 'drizzle-orm';
 import type { Executor } from '@/db/connect';
 import { invitation, person, site } from '@/db/schema';
 
@@ -54,6 +54,16 @@ export async function updateOpenInvitation(
     .update(invitation)
     .set(set)
     .where(and(eq(invitation.organisationId, organisationId), eq(invitation.id, invitationId), isOpen))
+    .returning({ id: invitation.id });
+  return rows.length > 0;
+}
+
+/** @returns false when it is not open, or has this token already */
+export async function setInvitationToken(db: Executor, { organisationId, invitationId, tokenHash }: Key & { tokenHash: string }): Promise<boolean> {
+  const rows = await db
+    .update(invitation)
+    .set({ tokenHash })
+    .where(and(eq(invitation.organisationId, organisationId), eq(invitation.id, invitationId), isOpen, sql`${invitation.tokenHash} is distinct from ${tokenHash}`))
     .returning({ id: invitation.id });
   return rows.length > 0;
 }

@@ -15,3 +15,4 @@ export * from './limit';
 export * from './unit-hold';
 export * from './oil-catch';
 export * from './search-entry';
+export * from './mail';

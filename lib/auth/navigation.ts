@@ -22,6 +22,7 @@ const SETTINGS: readonly (Place & { needs: Permission })[] = [
   { href: '/settings/people', label: 'People', needs: 'people.manage' },
   { href: '/settings/sites', label: 'Sites', needs: 'site.manage' },
   { href: '/settings/organisation', label: 'Organisation', needs: 'organisation.manage' },
+  { href: '/settings/jobs', label: 'Jobs', needs: 'job.see' },
   { href: '/settings/audit', label: 'Audit', needs: 'audit.see' },
 ];
 

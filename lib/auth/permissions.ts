@@ -21,6 +21,8 @@ export const PERMITTED = {
   'people.manage': ['administrator'],
   'site.manage': ['administrator'],
   'organisation.manage': ['administrator'],
+  'job.see': ['administrator'],
+  'job.retry': ['administrator'],
   'audit.see': ['administrator'],
 } as const satisfies Record<string, readonly Role[]>;
 

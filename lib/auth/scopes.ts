@@ -19,6 +19,8 @@ export const SCOPES = {
   'sites:read': { needs: 'own-settings', does: 'See sites' },
   'sites:write': { needs: 'site.manage', does: 'Add and change sites' },
   'people:read': { needs: 'case.see', does: 'See who can be given a case' },
+  'jobs:read': { needs: 'job.see', does: 'See what Carryover does by itself: mail, pictures, nightly work' },
+  'jobs:write': { needs: 'job.retry', does: 'Try jobs again that failed' },
   'profile:read': { needs: 'own-settings', does: 'See who you are and your units of measure' },
   'profile:write': { needs: 'own-settings', does: 'Change your units of measure' },
 } as const satisfies Record<string, { needs: Permission; does: string }>;

@@ -1,7 +1,13 @@
-import { createHash, randomBytes } from 'node:crypto';
+import { createHash, createHmac, randomBytes } from 'node:crypto';
 
-/** 256 random bits for a mailed link. */
-export const newToken = () => randomBytes(32).toString('base64url');
+/**
+ * The token of a mailed link: 256 bits that only who has the secret can make, out of the mail's own id. Tried again, a
+ * mail holds the same link, so that it doesn't matter which copy is read; and nothing that could be stolen is kept of it.
+ */
+export const mailedToken = (secret: string, purpose: 'invitation' | 'password reset', id: string) => createHmac('sha256', secret).update(`mailed link: ${purpose} ${id}`).digest('base64url');
+
+/** 256 random bits. */
+const newToken = () => randomBytes(32).toString('base64url');
 
 /** Begins every personal token, so that one is known wherever it turns up: in a log, in a repository, in an address. */
 const PERSONAL = 'carryover_';

@@ -4,7 +4,7 @@ import type { Executor } from '@/db/connect';
 
 /** Every kind of job with what it is given: ids, because the rest may have changed by the time it runs. */
 export interface JobData {
-  'mail-invitation': { organisationId: string; invitationId: string };
+  'send-mail': { organisationId: string; mailId: string };
   /** The address as typed: whether anybody has it is looked up where nobody can time the answer. */
   'mail-password-reset': { email: string };
   'make-thumbnail': { organisationId: string; photoId: string };

@@ -112,6 +112,8 @@ export const SHOTS: readonly Shot[] = [
   shot(`${IN}/settings/sites/new`, 'settings-site-new', 'administrator', '/settings/sites/new'),
   shot(`${IN}/settings/organisation`, 'settings-organisation', 'administrator', '/settings/organisation'),
   shot(`${IN}/settings/organisation`, 'settings-organisation-not-allowed', 'technician', '/settings/organisation'),
+  shot(`${IN}/settings/jobs`, 'settings-jobs', 'administrator', '/settings/jobs'),
+  shot(`${IN}/settings/jobs`, 'settings-jobs-no-match', 'administrator', '/settings/jobs?state=failed&kind=sweep'),
   shot(`${IN}/settings/audit`, 'settings-audit', 'administrator', '/settings/audit'),
 ];
 

@@ -24,6 +24,8 @@ import * as editionsId from './editions/[id]/route';
 import * as fitsId from './fits/[id]/route';
 import * as fitsIdStrike from './fits/[id]/strike/route';
 import * as fitsIdTakeOut from './fits/[id]/take-out/route';
+import * as jobs from './jobs/route';
+import * as jobsIdRetry from './jobs/[id]/retry/route';
 import * as limits from './limits/route';
 import * as limitsIdWithdraw from './limits/[id]/withdraw/route';
 import * as models from './models/route';
@@ -83,6 +85,8 @@ export const ROUTES = {
   '/fits/{id}': fitsId,
   '/fits/{id}/strike': fitsIdStrike,
   '/fits/{id}/take-out': fitsIdTakeOut,
+  '/jobs': jobs,
+  '/jobs/{id}/retry': jobsIdRetry,
   '/limits': limits,
   '/limits/{id}/withdraw': limitsIdWithdraw,
   '/models': models,

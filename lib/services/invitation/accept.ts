@@ -1,5 +1,6 @@
 import { asTenant } from '@/db/connect';
 import { insertAudit } from '@/db/queries/audit';
+import { forgetMailAddress } from '@/db/queries/mail';
 import { acceptInvitation as useInvitation, findOpenInvitation, findSignIn } from '@/db/queries/sign-in';
 import { hashPassword, passwordMatches } from '@/lib/auth/password-hash';
 import { hashToken } from '@/lib/auth/token';
@@ -48,11 +49,13 @@ export const acceptInvitation = defineVisit({
       const accepted = await useInvitation(tx, { ...link, newPersonId: newId(), name: first?.name ?? null, passwordHash: first?.passwordHash ?? null });
       if (!accepted) throw noGood();
       const { organisationId, invitationId, personId, roles } = accepted;
-      await asTenant(tx, { organisationId, personId }, (inside) =>
-        insertAudit(inside, [
+      await asTenant(tx, { organisationId, personId }, async (inside) => {
+        // The address is the person's from now on, and is kept there alone.
+        await forgetMailAddress(inside, { organisationId, entity: 'invitation', entityId: invitationId });
+        await insertAudit(inside, [
           { organisationId, personId, action: 'accept.invitation', entity: 'invitation', entityId: invitationId, changed: { personId, roles }, at: link.now },
-        ]),
-      );
+        ]);
+      });
     });
     return { email: open.email };
   },

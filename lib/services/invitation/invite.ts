@@ -7,6 +7,7 @@ import { newId } from '@/lib/ids';
 import { inviteInput } from '@/lib/schemas/person';
 import { defineWrite } from '../define';
 import { invitationExpiry } from './expiry';
+import { postInvitation } from './mail';
 
 /** Invites an address by mail. Whether it has a sign-in elsewhere makes no difference that shows here. */
 export const invite = defineWrite({
@@ -32,7 +33,7 @@ export const invite = defineWrite({
       createdAt: ctx.now(),
     });
     if (!inserted) throw conflict('This address has been invited already.', { email: 'Send the invitation again instead; it is in the list.' });
-    await ctx.jobs.send(tx, 'mail-invitation', { organisationId, invitationId: id });
+    await postInvitation(tx, ctx.jobs, { organisation: ctx.organisation, invitationId: id, email, at: ctx.now() });
     audit({ entity: 'invitation', entityId: id, changed: { roles, siteId } });
     return { invitationId: id };
   },

@@ -1,37 +1,51 @@
-import { asTenant } from '@/db/connect';
+import { asTenant, type Transaction } from '@/db/connect';
 import { insertAudit } from '@/db/queries/audit';
-import { findOpenInvitationById, updateOpenInvitation } from '@/db/queries/invitation';
+import { findOpenInvitationById, setInvitationToken } from '@/db/queries/invitation';
+import { isMailReplaced, type MailAtHand } from '@/db/queries/mail';
 import { findOrganisation } from '@/db/queries/organisation';
-import { hashToken, newToken } from '@/lib/auth/token';
-import type { JobData } from '@/lib/jobs';
-import type { Post } from '../password/mail-reset';
+import { hashToken, mailedToken } from '@/lib/auth/token';
+import type { JobQueue } from '@/lib/jobs';
+import type { Post } from '../mail/send';
+import { postMail } from '../mail/post';
 
-/**
- * Makes the link of an invitation and mails it. Tried again, it makes another link, so that a mail which went out
- * although the server reported an error holds a dead one.
- */
-export async function mailInvitation({ db, mailer, now, baseUrl }: Post, { organisationId, invitationId }: JobData['mail-invitation']): Promise<void> {
-  const token = newToken();
+/** Posts the mail of an invitation. Its text, which holds the link, is made when it is sent. */
+export const postInvitation = (
+  tx: Transaction,
+  jobs: JobQueue,
+  { organisation, invitationId, email, at }: { organisation: { id: string; name: string }; invitationId: string; email: string; at: Date },
+): Promise<string> =>
+  postMail(tx, jobs, {
+    organisationId: organisation.id,
+    kind: 'invitation',
+    to: email,
+    subject: `${organisation.name} invites you to Carryover`,
+    entity: 'invitation',
+    entityId: invitationId,
+    at,
+  });
+
+/** The text of a posted invitation; nothing when it was withdrawn, accepted or sent anew in the meantime, or has run out. */
+export async function invitationText({ db, now, baseUrl, secret }: Post, mail: MailAtHand): Promise<string | undefined> {
+  const { organisationId, entityId: invitationId } = mail;
+  const token = mailedToken(secret, 'invitation', mail.id);
   const open = await asTenant(db, { organisationId }, async (tx) => {
     const invitation = await findOpenInvitationById(tx, { organisationId, invitationId });
     const organisation = await findOrganisation(tx, { organisationId });
-    if (!invitation?.email || !organisation || invitation.expiresAt <= now()) return undefined;
-    await updateOpenInvitation(tx, { organisationId, invitationId }, { tokenHash: hashToken(token) });
-    await insertAudit(tx, [{ organisationId, action: 'mail.invitation', entity: 'invitation', entityId: invitationId, changed: { link: 'made' }, at: now() }]);
-    return { to: invitation.email, invitedBy: invitation.invitedBy, organisation: organisation.name };
+    if (!invitation || !organisation || invitation.expiresAt <= now() || (await isMailReplaced(tx, mail))) return undefined;
+    if (await setInvitationToken(tx, { organisationId, invitationId, tokenHash: hashToken(token) })) {
+      await insertAudit(tx, [{ organisationId, action: 'mail.invitation', entity: 'invitation', entityId: invitationId, changed: { link: 'made' }, at: now() }]);
+    }
+    return { invitedBy: invitation.invitedBy, organisation: organisation.name };
   });
-  // Withdrawn or accepted in the meantime: there is nothing left to send.
-  if (!open) return;
-  await mailer.send({
-    to: open.to,
-    subject: `${open.organisation} invites you to Carryover`,
-    text: `Hello,
+  return (
+    open &&
+    `Hello,
 
 ${open.invitedBy} invites you to work with ${open.organisation} in Carryover, where compressor cases are worked on. Begin here within seven days:
 
 ${new URL(`/invite/${token}`, baseUrl).href}
 
 The link works once. If you did not expect it, do nothing.
-`,
-  });
+`
+  );
 }

@@ -1,9 +1,10 @@
-import { updateOpenInvitation } from '@/db/queries/invitation';
+import { findOpenInvitationById, updateOpenInvitation } from '@/db/queries/invitation';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { notFound } from '@/lib/errors';
 import { invitationInput } from '@/lib/schemas/person';
 import { defineWrite } from '../define';
 import { invitationExpiry } from './expiry';
+import { postInvitation } from './mail';
 
 /** Sends an invitation again with a new link for another seven days; the one sent before stops working at once. */
 export const resendInvitation = defineWrite({
@@ -15,7 +16,9 @@ export const resendInvitation = defineWrite({
     const key = { organisationId: ctx.organisation.id, invitationId };
     const expiresAt = invitationExpiry(ctx.now());
     if (!(await updateOpenInvitation(tx, key, { tokenHash: null, expiresAt }))) throw notFound('invitation');
-    await ctx.jobs.send(tx, 'mail-invitation', key);
+    const email = (await findOpenInvitationById(tx, key))?.email;
+    if (!email) throw notFound('invitation');
+    await postInvitation(tx, ctx.jobs, { organisation: ctx.organisation, invitationId, email, at: ctx.now() });
     audit({ entity: 'invitation', entityId: invitationId, changed: { expiresAt } });
   },
 });

@@ -1,4 +1,5 @@
 import { updateOpenInvitation } from '@/db/queries/invitation';
+import { forgetMailAddress } from '@/db/queries/mail';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { notFound } from '@/lib/errors';
 import { invitationInput } from '@/lib/schemas/person';
@@ -14,6 +15,7 @@ export const withdrawInvitation = defineWrite({
     const key = { organisationId: ctx.organisation.id, invitationId };
     const withdrawnAt = ctx.now();
     if (!(await updateOpenInvitation(tx, key, { withdrawnAt, email: null, tokenHash: null }))) throw notFound('invitation');
+    await forgetMailAddress(tx, { organisationId: key.organisationId, entity: 'invitation', entityId: invitationId });
     audit({ entity: 'invitation', entityId: invitationId, changed: { withdrawnAt } });
   },
 });

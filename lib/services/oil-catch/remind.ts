@@ -6,15 +6,16 @@ import { lockCatch, selectWeighings } from '@/db/queries/oil-catch';
 import { siteDay } from '@/lib/case/site-day';
 import { jobs, type JobData } from '@/lib/jobs';
 import { dayText } from '@/lib/schemas/day-text';
-import type { Post } from '../password/mail-reset';
+import { postMail } from '../mail/post';
+import type { Post } from '../mail/send';
 import { planReminder } from './reminder';
 
 /**
  * Mails that a bottle wants weighing, and plans the next mail. Nothing to do when somebody weighed, ended or planned
- * otherwise meanwhile, or the case was called. The mail goes out before the plan is kept: killed in between, it goes out
- * again rather than not at all.
+ * otherwise meanwhile, or the case was called. Mail and plan are written together, so that a worker that is killed does both
+ * or neither.
  */
-export async function remindOfWeighing({ db, mailer, now, baseUrl }: Post, { organisationId, catchId, due }: JobData['remind-weighing']): Promise<void> {
+export async function remindOfWeighing({ db, now, baseUrl }: Pick<Post, 'db' | 'now' | 'baseUrl'>, { organisationId, catchId, due }: JobData['remind-weighing']): Promise<void> {
   await asTenant(db, { organisationId }, async (tx) => {
     const under = await lockCatch(tx, { organisationId, catchId });
     if (!under || under.endedAt || under.remindAt?.toISOString() !== due) return;
@@ -25,7 +26,12 @@ export async function remindOfWeighing({ db, mailer, now, baseUrl }: Post, { org
     if (member) {
       const last = (await selectWeighings(tx, { organisationId, catchIds: [catchId] })).filter(({ takenBackAt }) => takenBackAt === null).at(-1);
       const said = last ? `It was weighed last on ${dayText(siteDay(last.at, head.timeZone))}.` : `It has hung since ${dayText(siteDay(under.startedAt, head.timeZone))} and was not weighed yet.`;
-      await mailer.send({
+      await postMail(tx, jobs, {
+        organisationId,
+        kind: 'weighing-due',
+        entity: 'oil-catch',
+        entityId: catchId,
+        at,
         to: member.email,
         subject: `Weigh the oil caught: unit ${head.fleetNumber}, case ${head.number}`,
         text: `Hello ${member.name},

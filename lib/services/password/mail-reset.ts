@@ -1,24 +1,18 @@
-import type { Database } from '@/db/connect';
 import { startPasswordReset } from '@/db/queries/sign-in';
-import { hashToken, newToken } from '@/lib/auth/token';
+import { hashToken, mailedToken } from '@/lib/auth/token';
 import { newId } from '@/lib/ids';
 import type { JobData } from '@/lib/jobs';
-import type { Mailer } from '@/lib/mail';
+import type { Attempt } from '@/lib/jobs/attempt';
+import type { Post } from '../mail/send';
 
 const AN_HOUR_MS = 3_600_000;
 
-/** What a job that sends a link needs. */
-export interface Post {
-  db: Database;
-  mailer: Mailer;
-  now: () => Date;
-  /** Where the application is reached. */
-  baseUrl: string;
-}
-
-/** Makes a link and mails it, if the address has a sign-in; otherwise nothing happens, and nobody learns of it. */
-export async function mailPasswordReset({ db, mailer, now, baseUrl }: Post, { email }: JobData['mail-password-reset']): Promise<void> {
-  const token = newToken();
+/**
+ * Makes a link and mails it, if the address has a sign-in; otherwise nothing happens, and nobody learns of it. Tried
+ * again, it is the same mail with the same link, unless that was used or replaced meanwhile.
+ */
+export async function mailPasswordReset({ db, mailer, now, baseUrl, secret }: Omit<Post, 'storage'>, { email }: JobData['mail-password-reset'], { jobId }: Pick<Attempt, 'jobId'>): Promise<void> {
+  const token = mailedToken(secret, 'password reset', jobId);
   const at = now();
   const begun = await startPasswordReset(db, {
     id: newId(),
@@ -29,6 +23,7 @@ export async function mailPasswordReset({ db, mailer, now, baseUrl }: Post, { em
   });
   if (!begun) return;
   await mailer.send({
+    id: jobId,
     to: email,
     subject: 'A new password for Carryover',
     text: `Hello ${begun.name},

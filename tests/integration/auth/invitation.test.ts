@@ -1,13 +1,14 @@
-import { sql } from 'drizzle-orm';
+import { eq, sql } from 'drizzle-orm';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
-import { audit } from '@/db/schema';
+import { audit, mail as mailTable } from '@/db/schema';
 import type { Role } from '@/lib/auth/roles';
+import type { Mail } from '@/lib/mail';
 import { acceptInvitation, viewInvitation } from '@/lib/services/invitation/accept';
 import { invite } from '@/lib/services/invitation/invite';
 import { listInvitations } from '@/lib/services/invitation/list';
-import { mailInvitation } from '@/lib/services/invitation/mail';
 import { resendInvitation } from '@/lib/services/invitation/resend';
 import { withdrawInvitation } from '@/lib/services/invitation/withdraw';
+import { sendMail } from '@/lib/services/mail/send';
 import { endMembership } from '@/lib/services/membership/end';
 import { listPeople } from '@/lib/services/membership/list';
 import { signIn } from '@/lib/services/session/sign-in';
@@ -30,11 +31,11 @@ async function invited({ email = someAddress(), roles = ['technician'] as Role[]
   const clock = makeClock();
   const tenant = await makeTenant(databases, { roles: ['administrator'], now: clock.now });
   const { ctx, organisationId } = tenant;
-  const { post, letters, tokenOf } = makePost(databases, clock.now);
+  const { letters, tokenOf, deliver } = makePost(databases, clock.now);
   const visitor = makeVisitor(databases, { now: clock.now });
   const { invitationId } = await invite({ ctx, input: { email, roles, siteId: tenant.siteId } });
   const mail = async () => {
-    await mailInvitation(post, { organisationId, invitationId });
+    await deliver(organisationId);
     return tokenOf(letters.at(-1));
   };
   return { tenant, ctx, email, clock, visitor, letters, mail, invitationId, token: await mail() };
@@ -83,13 +84,42 @@ describe('an invitation', () => {
 
   test('that is withdrawn stops working, forgets the address and is not mailed', async () => {
     const { ctx, tenant, visitor, token, email, invitationId, letters, mail } = await invited();
+    await resendInvitation({ ctx, input: { invitationId } });
     await withdrawInvitation({ ctx, input: { invitationId } });
     expect((await refusalOf(viewInvitation({ visitor, input: { token } }))).code).toBe('not-found');
-    const kept = await tenant.asOwner((tx) => tx.execute(sql`select i::text from invitation i`));
+    const kept = await tenant.asOwner((tx) => tx.execute(sql`select i::text from invitation i union all select m::text from mail m`));
     expect(JSON.stringify(kept.rows)).not.toContain(email);
     const sent = letters.length;
     await expect(mail()).resolves.toBeTruthy();
     expect(letters).toHaveLength(sent);
+  });
+
+  test('holds the same link when its mail is tried again, so that it does not matter which copy is read', async () => {
+    const { ctx, tenant, visitor, email, invitationId, clock } = await invited();
+    clock.forward(1_000);
+    await resendInvitation({ ctx, input: { invitationId } });
+    const { post, letters, tokenOf, deliver } = makePost(databases, clock.now);
+    const unanswered = { ...post.mailer, send: (letter: Mail) => post.mailer.send(letter).then(() => Promise.reject(new Error('The line went dead.'))) };
+    const waiting = await tenant.asOwner((tx) => tx.select({ id: mailTable.id }).from(mailTable).where(eq(mailTable.state, 'waiting')));
+    const first = { organisationId: tenant.organisationId, mailId: waiting[0]?.id ?? '' };
+    await expect(sendMail({ ...post, mailer: unanswered }, first, { isLast: false })).rejects.toThrow('The mail could not be handed to the mail server.');
+    await deliver(tenant.organisationId);
+    expect(letters).toHaveLength(2);
+    expect(letters[0]).toEqual(letters[1]);
+    await expect(viewInvitation({ visitor, input: { token: tokenOf(letters[0]) } })).resolves.toMatchObject({ email });
+  });
+
+  test('that was sent again meanwhile is not mailed with its older link', async () => {
+    const { ctx, tenant, clock, invitationId } = await invited();
+    for (let i = 0; i < 2; i++) {
+      clock.forward(1_000);
+      await resendInvitation({ ctx, input: { invitationId } });
+    }
+    const { letters, deliver } = makePost(databases, clock.now);
+    await deliver(tenant.organisationId);
+    expect(letters).toHaveLength(1);
+    const states = await tenant.asOwner((tx) => tx.select({ state: mailTable.state }).from(mailTable).orderBy(mailTable.createdAt));
+    expect(states.map(({ state }) => state)).toEqual(['sent', 'given-up', 'sent']);
   });
 
   test('is not used up by a password or name that is refused', async () => {
@@ -122,9 +152,9 @@ describe('an invitation', () => {
     const admin = await makeTenant(databases, { roles: ['administrator'] });
     const leaver = await admin.addPerson({ roles: ['manager'], mayRelease: true, password: PASSWORD });
     await endMembership({ ctx: admin.ctx, input: { personId: leaver.person.id } });
-    const { invitationId } = await invite({ ctx: admin.ctx, input: { email: leaver.person.email, roles: ['technician'] } });
-    const { post, letters, tokenOf } = makePost(databases);
-    await mailInvitation(post, { organisationId: admin.organisationId, invitationId });
+    await invite({ ctx: admin.ctx, input: { email: leaver.person.email, roles: ['technician'] } });
+    const { letters, tokenOf, deliver } = makePost(databases);
+    await deliver(admin.organisationId);
     await acceptInvitation({ visitor: makeVisitor(databases), input: { token: tokenOf(letters[0]), password: PASSWORD } });
     const back = (await listPeople({ ctx: admin.ctx, input: {} })).find(({ personId }) => personId === leaver.person.id);
     expect(back).toMatchObject({ roles: ['technician'], mayRelease: false, releaseBasis: null, endedAt: null });
@@ -138,7 +168,7 @@ describe('an invitation', () => {
 
   test('is kept as a hash alone, in the database and in the queue', async () => {
     const { tenant, token } = await invited();
-    const kept = await tenant.asOwner((tx) => tx.execute(sql`select i::text from invitation i`));
+    const kept = await tenant.asOwner((tx) => tx.execute(sql`select i::text from invitation i union all select m::text from mail m`));
     const queued = await databases.app.execute(sql`select data from pgboss.job`);
     expect(JSON.stringify([kept.rows, queued.rows])).not.toContain(token);
   });

@@ -1,6 +1,7 @@
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { audit } from '@/db/schema';
 import { sql } from 'drizzle-orm';
+import { newId } from '@/lib/ids';
 import { mailPasswordReset } from '@/lib/services/password/mail-reset';
 import { requestPasswordReset } from '@/lib/services/password/request-reset';
 import { resetPassword, viewPasswordReset } from '@/lib/services/password/reset';
@@ -27,7 +28,7 @@ async function askedFor() {
   const { post, letters, tokenOf } = makePost(databases, clock.now);
   const visitor = makeVisitor(databases, { now: clock.now });
   const mail = async () => {
-    await mailPasswordReset(post, { email });
+    await mailPasswordReset(post, { email }, { jobId: newId() });
     return tokenOf(letters.at(-1));
   };
   return { tenant, email, clock, visitor, letters, mail, token: await mail() };
@@ -50,7 +51,7 @@ describe('asking for a new password', () => {
 
   test('mails nothing to an address that nobody has', async () => {
     const { post, letters } = makePost(databases);
-    await mailPasswordReset(post, { email: `${crypto.randomUUID()}@people.test` });
+    await mailPasswordReset(post, { email: `${crypto.randomUUID()}@people.test` }, { jobId: newId() });
     expect(letters).toEqual([]);
   });
 
@@ -67,6 +68,19 @@ describe('asking for a new password', () => {
 });
 
 describe('the link of a password reset', () => {
+  test('is the same when its mail is tried again, and is not sent again once it was used', async () => {
+    const { tenant } = await askedFor();
+    const { post, letters, tokenOf } = makePost(databases, tenant.ctx.now);
+    const again = { jobId: newId() };
+    for (let i = 0; i < 2; i++) await mailPasswordReset(post, { email: tenant.ctx.person.email }, again);
+    expect(letters).toHaveLength(2);
+    expect(letters[0]).toEqual(letters[1]);
+    const visitor = makeVisitor(databases, { now: tenant.ctx.now });
+    await resetPassword({ visitor, input: { token: tokenOf(letters[0]), password: NEW } });
+    await mailPasswordReset(post, { email: tenant.ctx.person.email }, again);
+    expect(letters).toHaveLength(2);
+  });
+
   test('sets the password once, and the old one is of no use any more', async () => {
     const { email, visitor, token } = await askedFor();
     await viewPasswordReset({ visitor, input: { token } });

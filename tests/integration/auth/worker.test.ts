@@ -45,7 +45,7 @@ beforeAll(async () => {
   mailer = createMailer(`smtp://127.0.0.1:${port}`, 'Carryover <carryover@carryover.test>');
   // As the worker runs: under the application's role, which makes no tables.
   boss = new PgBoss({ connectionString: databases.appUrl, schema: JOB_SCHEMA, migrate: false, max: 2 });
-  await startWork(boss, handlers({ db: databases.app, mailer, now: () => new Date(), baseUrl: 'https://carryover.test', storage: noStorage }));
+  await startWork(boss, handlers({ db: databases.app, mailer, now: () => new Date(), baseUrl: 'https://carryover.test', secret: 'a secret for tests alone', storage: noStorage }));
 });
 afterAll(async () => {
   await boss.stop({ graceful: false, wait: true });

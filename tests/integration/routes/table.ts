@@ -4,6 +4,7 @@ import { bench } from './rows/bench';
 import { cases } from './rows/cases';
 import { catches } from './rows/catches';
 import { device } from './rows/device';
+import { jobs } from './rows/jobs';
 import { limits } from './rows/limits';
 import { models } from './rows/models';
 import { photos } from './rows/photos';
@@ -18,4 +19,4 @@ import { units } from './rows/units';
  * `app` is not here, and tries wrong roles, another organisation, malformed and oversized input on each. A feature adds
  * its file of rows to `rows/` and its name here.
  */
-export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, catches, device, photos, units, limits, models, search, settings, tokens];
+export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, catches, device, photos, units, limits, models, search, jobs, settings, tokens];

@@ -38,6 +38,7 @@ export async function insertOneRowEach(tx: Transaction, { organisationId, siteId
   await tx.insert(schema.unitHold).values({ ...of, id: newId(), unitId, caseId, checkId: 'c', placedAt: AT });
   await tx.insert(schema.oilCatch).values({ ...of, id: catchId, caseId, checkId: 'c', stage: { kind: 'diagnosis' }, startedAt: AT, startedBy: personId });
   await tx.insert(schema.oilWeighing).values({ ...of, id: newId(), catchId, caseId, massKg: 0.01, massErrorKg: 0.0005, ranS: 3600, personId, at: AT, findingId });
+  await tx.insert(schema.mail).values({ ...of, id: newId(), kind: 'notice', toAddress: 'somebody@people.test', subject: 'Test', body: 'Words', entity: 'unit', entityId: unitId });
   await tx.insert(schema.savedView).values({ ...of, id: newId(), personId, list: 'cases', name: 'Mine', query: 'whose=me' });
   await tx.insert(schema.removal).values({ ...of, id: newId(), entity: 'unit', entityId: unitId, kind: 'hide', reason: 'Test', personId, at: AT });
   await tx.insert(schema.audit).values({ ...of, id: newId(), action: 'test', entity: 'unit', entityId: unitId, changed: {} });

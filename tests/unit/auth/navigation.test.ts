@@ -17,7 +17,7 @@ describe('the navigation', () => {
   });
 
   test('has the administrator\'s settings for administrators alone', () => {
-    expect(labels(settingsFor(['administrator']))).toEqual(['You', 'Units of measure', 'Tokens', 'People', 'Sites', 'Organisation', 'Audit']);
+    expect(labels(settingsFor(['administrator']))).toEqual(['You', 'Units of measure', 'Tokens', 'People', 'Sites', 'Organisation', 'Jobs', 'Audit']);
     expect(labels(settingsFor(['technician', 'engineer', 'manager', 'trainer']))).toEqual(['You', 'Units of measure', 'Tokens', 'Limits']);
   });
 

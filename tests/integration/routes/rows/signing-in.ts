@@ -1,18 +1,18 @@
 import { ANYONE } from '@/lib/auth/roles';
+import { newId } from '@/lib/ids';
 import { invite } from '@/lib/services/invitation/invite';
-import { mailInvitation } from '@/lib/services/invitation/mail';
 import { mailPasswordReset } from '@/lib/services/password/mail-reset';
 import { makePost } from '@/tests/support/post';
 import { feature } from '../row';
 
 export const signingIn = feature({
   async prepare({ tenant, as, password }) {
-    const { post, letters, tokenOf } = makePost({ app: as('administrator').db } as Parameters<typeof makePost>[0]);
-    const { invitationId } = await invite({ ctx: as('administrator'), input: { email: `${crypto.randomUUID()}@people.test`, roles: ['technician'] } });
-    await mailInvitation(post, { organisationId: tenant.organisationId, invitationId });
+    const { post, letters, tokenOf, deliver } = makePost({ app: as('administrator').db });
+    await invite({ ctx: as('administrator'), input: { email: `${crypto.randomUUID()}@people.test`, roles: ['technician'] } });
+    await deliver(tenant.organisationId);
     const forgetful = await tenant.addPerson({ password });
-    await mailPasswordReset(post, { email: forgetful.person.email });
-    return { invitation: tokenOf(letters[0]), reset: tokenOf(letters[1]), email: forgetful.person.email, password };
+    await mailPasswordReset(post, { email: forgetful.person.email }, { jobId: newId() });
+    return { invitation: tokenOf(letters.at(-2)), reset: tokenOf(letters.at(-1)), email: forgetful.person.email, password };
   },
   rows: [
     { page: '(public)', roles: 'anybody' },
