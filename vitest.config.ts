@@ -26,6 +26,11 @@ export default defineConfig({
       },
       {
         extends: true,
+        // Hundreds of workers begin and die: nothing else should wait for the machine meanwhile.
+        test: { name: 'kills', include: ['tests/kills/**/*.test.ts'], globalSetup: ['tests/support/cluster.global.ts'] },
+      },
+      {
+        extends: true,
         test: {
           name: 'e2e',
           include: ['tests/e2e/**/*.test.ts'],

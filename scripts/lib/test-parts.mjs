@@ -94,6 +94,7 @@ export function testParts({ processes }, env) {
       if (!isBuilt(TEST_DIST_DIR)) await build(processes, TEST_DIST_DIR, env);
     }),
     vitest('integration tests', 'integration'),
+    vitest('workers killed', 'kills'),
     endToEnd,
   ];
 }
