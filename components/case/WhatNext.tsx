@@ -1,5 +1,6 @@
 'use client';
 
+import Link from 'next/link';
 import { Button } from '@/components/ui/Button';
 import { percent } from '@/components/ui/SightGlass';
 import type { CaseState, RulebookView, SettleView } from '@/lib/schemas/case-view';
@@ -80,6 +81,7 @@ export function WhatNext({ state, settle, rulebook, readOnly, onPick }: Props) {
           {state.repairs.length > MOST_REPAIRS && (
             <p className="mt-1 text-[0.9375rem] text-ink-soft">Then {state.repairs.length - MOST_REPAIRS} more, each less likely for its cost. Another check may spare most of them.</p>
           )}
+          <p><Link className="inline-flex min-h-touch items-center underline underline-offset-4 print:hidden" href={`/cases/${state.caseId}/repair`}>What each takes, and its steps</Link></p>
         </section>
       )}
     </div>

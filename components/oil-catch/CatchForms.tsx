@@ -11,8 +11,8 @@ import { MeasureField } from '@/components/units/MeasureField';
 import { OIL_MEASURE, USUAL_SCALE_ERROR } from '@/lib/schemas/oil-catch';
 import type { UnitPreferences } from '@/lib/units';
 
-type Action<Result> = (previous: ActionState<Result>, form: FormData) => Promise<ActionState<Result>>;
-export type CatchAction = Action<{ id: string; caseId: string }>;
+type Written = ActionState<{ id: string; caseId: string }>;
+export type CatchAction = (previous: Written, form: FormData) => Promise<Written>;
 
 interface Of {
   action: CatchAction;
@@ -30,20 +30,6 @@ const REMINDERS = [
 ];
 
 const Hidden = ({ values }: { values: Record<string, string> }) => Object.entries(values).map(([name, value]) => <input key={name} type="hidden" name={name} value={value} readOnly />);
-
-/** Says that the cautions were read, before anybody goes to the vehicle. */
-export function ReadForm<Result>({ action, caseId, checkId, cautionIds }: { action: Action<Result>; caseId: string; checkId: string; cautionIds: readonly string[] }) {
-  const form = useForm(action);
-  return (
-    <Form form={form} label="Cautions" errorTitle="Not noted yet">
-      <Hidden values={{ caseId, checkId }} />
-      {cautionIds.map((id) => <input key={id} type="hidden" name="cautions" value={id} readOnly />)}
-      <div>
-        <SubmitButton className="min-h-14!">I have read this and will keep to it</SubmitButton>
-      </div>
-    </Form>
-  );
-}
 
 export function StartForm({ action, caseId, checkId, newId, units }: Of & { checkId: string; newId: string; units: UnitPreferences }) {
   const form = useForm(action);

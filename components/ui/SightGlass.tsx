@@ -1,4 +1,5 @@
 import type { CSSProperties } from 'react';
+import { percent } from '@/lib/schemas/percent';
 import { classes } from './classes';
 
 interface Props {
@@ -17,13 +18,7 @@ interface Props {
 const glasses = { small: 'h-8 w-5', medium: 'h-14 w-8', large: 'h-24 w-11' } as const;
 const figures = { small: 'text-base', medium: 'text-xl', large: 'text-3xl' } as const;
 
-/** A share as people read it: whole percent, but neither a false 0 nor a false 100. */
-export function percent(value: number): string {
-  const share = Math.min(Math.max(value, 0), 1);
-  if (share > 0 && share < 0.01) return '<1%';
-  if (share < 1 && share > 0.99) return '>99%';
-  return `${Math.round(share * 100)}%`;
-}
+export { percent };
 
 /**
  * A probability as an upright glass filled to its level, with the number printed beside it.

@@ -53,6 +53,8 @@ export const SHOTS: readonly Shot[] = [
   shot(`${IN}/cases/[id]`, 'case-past', 'technician', ({ pastMoment }) => pastMoment),
   shot(`${IN}/cases/[id]/catch`, 'case-catch', 'technician', ({ openCase }) => openCase && `/cases/${openCase}/catch`),
   shot(`${IN}/cases/[id]/catch`, 'case-catch-called', 'technician', ({ calledCase }) => calledCase && `/cases/${calledCase}/catch`),
+  shot(`${IN}/cases/[id]/repair`, 'case-repair', 'technician', ({ openCase }) => openCase && `/cases/${openCase}/repair`),
+  shot(`${IN}/cases/[id]/repair`, 'case-repair-called', 'manager', ({ calledCase }) => calledCase && `/cases/${calledCase}/repair`),
   shot(`${IN}/cases/[id]/history`, 'case-history', 'technician', ({ openCase }) => openCase && `/cases/${openCase}/history`),
   shot(`${IN}/cases/[id]/history`, 'case-history-compared', 'technician', ({ pastMoment }) => pastMoment && `${pastMoment.replace('?', '/history?')}&with=2000-01-01`),
   shot(`${IN}/cases/[id]`, 'case-not-found', 'technician', `/cases/${NOWHERE}`),

@@ -17,6 +17,7 @@ import * as casesIdKit from './cases/[id]/kit/route';
 import * as casesIdPhotos from './cases/[id]/photos/route';
 import * as casesIdReasons from './cases/[id]/reasons/route';
 import * as casesIdRecord from './cases/[id]/record/route';
+import * as casesIdRepairs from './cases/[id]/repairs/route';
 import * as casesIdReopen from './cases/[id]/reopen/route';
 import * as casesIdRulebook from './cases/[id]/rulebook/route';
 import * as deviceCases from './device/cases/route';
@@ -78,6 +79,7 @@ export const ROUTES = {
   '/cases/{id}/photos': casesIdPhotos,
   '/cases/{id}/reasons': casesIdReasons,
   '/cases/{id}/record': casesIdRecord,
+  '/cases/{id}/repairs': casesIdRepairs,
   '/cases/{id}/reopen': casesIdReopen,
   '/cases/{id}/rulebook': casesIdRulebook,
   '/device/cases': deviceCases,

@@ -15,6 +15,7 @@ import { defineRead } from '../define';
 import { limitsOfCase } from '../limit/of-case';
 import { gatherState } from './gather-state';
 import { holdsOfUnit } from './holds-of-unit';
+import { standingCall } from './standing-call';
 
 /** What changes of a case: its ranking, findings and next checks, now or as they were. */
 export const readCaseState = defineRead({
@@ -82,12 +83,7 @@ function statusAt(events: Events): CaseState['status'] {
   return last === 'called' || last === 'closed' ? last : 'open';
 }
 
-/** A call stands when it is the last and the case was not reopened after it. */
 function callViews(calls: Awaited<ReturnType<typeof selectCalls>>, events: Events): CallView[] {
-  const reopenedAt = events.filter(({ kind }) => kind === 'reopened').at(-1)?.at;
-  return calls.map(({ at, runId: _, ...call }, i) => ({
-    ...call,
-    at: at.toISOString(),
-    standing: i === calls.length - 1 && (!reopenedAt || reopenedAt < at),
-  }));
+  const standing = standingCall(calls, events);
+  return calls.map(({ at, runId: _, ...call }) => ({ ...call, at: at.toISOString(), standing: call.id === standing?.id }));
 }

@@ -8,11 +8,14 @@ import { compiledEdition } from '../edition/compiled';
 type Head = NonNullable<Awaited<ReturnType<typeof lockCase>>>;
 
 /** The case that oil is caught for, locked, with its rulebook. */
-export async function lockOpenCase(tx: Transaction, of: { organisationId: string; caseId: string }): Promise<{ head: Head; compiled: CompiledRulebook }> {
+export async function lockCaseOf(tx: Transaction, of: { organisationId: string; caseId: string }): Promise<{ head: Head; compiled: CompiledRulebook }> {
   const head = await lockCase(tx, of);
   if (!head) throw notFound('case');
-  if (head.status !== 'open') throw conflict('This case has been called. Reopen it to go on.');
   return { head, compiled: await compiledEdition(tx, { ...of, editionId: head.editionId }) };
+}
+
+export function refuseCalled({ status }: Pick<Head, 'status'>): void {
+  if (status !== 'open') throw conflict('This case has been called. Reopen it to go on.');
 }
 
 /** A catch of a case, locked. */

@@ -6,7 +6,7 @@ import { CATCH_MEASURES, startCatchInput } from '@/lib/schemas/oil-catch';
 import { refuseUnread } from '../case/write-finding';
 import { defineWrite } from '../define';
 import { readMeasures } from '../units-of-measure';
-import { lockOpenCase } from './open-case';
+import { lockCaseOf, refuseCalled } from './open-case';
 import { queueReminder, remindAfter } from './reminder';
 
 /** Begins to catch oil for a check of a case, from a clean start. The id is the client's: sent twice, it begins once. */
@@ -17,13 +17,14 @@ export const startCatch = defineWrite({
   input: startCatchInput,
   run: async ({ tx, ctx, input: { id, caseId, checkId, stage, place, remindEveryDays, ...typed }, audit, unchanged }) => {
     const of = { organisationId: ctx.organisation.id, caseId };
-    const { head, compiled } = await lockOpenCase(tx, of);
+    const { head, compiled } = await lockCaseOf(tx, of);
     const known = await lockCatch(tx, { ...of, catchId: id });
     if (known && known.caseId !== caseId) throw conflict('This id belongs to another catch.');
     if (known) {
       unchanged();
       return { id, caseId };
     }
+    refuseCalled(head);
     const check = compiled.checks.get(checkId)?.check;
     if (!check || !isCaught(check)) throw invalid({ checkId: 'This check is not answered by oil that is caught.' });
     await refuseUnread(tx, ctx, { head, compiled, check });

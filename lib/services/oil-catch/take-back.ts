@@ -9,7 +9,7 @@ import { takeBackWeighingInput } from '@/lib/schemas/oil-catch';
 import { writeFinding } from '../case/write-finding';
 import { writingOf } from '../case/writing';
 import { defineWrite } from '../define';
-import { lockCatchOf, lockOpenCase } from './open-case';
+import { lockCaseOf, lockCatchOf, refuseCalled } from './open-case';
 import { written } from './weigh';
 
 /**
@@ -23,7 +23,7 @@ export const takeBackWeighing = defineWrite({
   input: takeBackWeighingInput,
   run: async ({ tx, ctx, input: { caseId, catchId, weighingId, whyTakenBack }, audit, unchanged }) => {
     const of = { organisationId: ctx.organisation.id, caseId };
-    const { head, compiled } = await lockOpenCase(tx, of);
+    const { head, compiled } = await lockCaseOf(tx, of);
     const under = await lockCatchOf(tx, { ...of, catchId });
     const all = await selectWeighings(tx, { ...of, catchIds: [catchId] });
     const weighing = all.find(({ id }) => id === weighingId);
@@ -32,6 +32,7 @@ export const takeBackWeighing = defineWrite({
       unchanged();
       return { id: weighingId, caseId };
     }
+    refuseCalled(head);
     const standing = all.filter(({ takenBackAt }) => takenBackAt === null);
     if (standing.at(-1)?.id !== weighingId) throw conflict('Take the later weighings back first: their hours are counted from this one.');
 

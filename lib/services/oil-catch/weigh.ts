@@ -12,7 +12,7 @@ import { writingOf } from '../case/writing';
 import type { Ctx } from '../context';
 import { defineWrite } from '../define';
 import { decimalMarkOf, readMeasures, withUnit } from '../units-of-measure';
-import { lockCatchOf, lockOpenCase, refuseEnded } from './open-case';
+import { lockCaseOf, lockCatchOf, refuseCalled, refuseEnded } from './open-case';
 import { planReminder } from './reminder';
 
 /** What the scale can't show of what one bottle holds. */
@@ -29,13 +29,14 @@ export const weigh = defineWrite({
   input: weighInput,
   run: async ({ tx, ctx, input: { id, caseId, catchId, oilError, note, ...typed }, audit, unchanged }) => {
     const of = { organisationId: ctx.organisation.id, caseId, catchId };
-    const { head, compiled } = await lockOpenCase(tx, of);
+    const { head, compiled } = await lockCaseOf(tx, of);
     const under = await lockCatchOf(tx, of);
     const weighings = await selectWeighings(tx, { ...of, catchIds: [catchId] });
     if (weighings.some((one) => one.id === id)) {
       unchanged();
       return { id, caseId };
     }
+    refuseCalled(head);
     refuseEnded(under);
     const standing = weighings.filter(({ takenBackAt }) => takenBackAt === null);
     const { columns, asTyped } = readMeasures(ctx, WEIGHING_MEASURES, typed);

@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
-import { ReadForm, StartForm } from '@/components/oil-catch/CatchForms';
+import { ReadCautionsForm } from '@/components/case/ReadCautionsForm';
+import { StartForm } from '@/components/oil-catch/CatchForms';
 import { OilCatch } from '@/components/oil-catch/OilCatch';
 import { UnderWay } from '@/components/oil-catch/UnderWay';
 import { Notice } from '@/components/ui/Notice';
@@ -43,7 +44,7 @@ export default async function CatchPage({ params }: { params: Promise<{ id: stri
           <Notice kind="caution" title={toRead.length > 0 ? 'Read this first' : 'Read today'}>
             <ul className="ml-5 grid list-disc gap-1">{check.cautions.map((caution) => <li key={caution}>{rulebook.cautions[caution]?.text ?? caution}</li>)}</ul>
             <p className="mt-2 text-[0.9375rem]">The vehicle maker’s information, local rules and a qualified person’s judgement come first.</p>
-            {toRead.length > 0 && <div className="mt-3"><ReadForm action={readCautions} caseId={head.id} checkId={check.id} cautionIds={toRead} /></div>}
+            {toRead.length > 0 && <div className="mt-3"><ReadCautionsForm action={readCautions} of={{ caseId: head.id, checkId: check.id }} about={check.name} cautionIds={toRead} /></div>}
           </Notice>
         )}
         {underWay && <UnderWay {...of} underWay={underWay} works={works} ready={ready} newId={newId()} actions={{ saveWeighing, changeReminder, takeBack, takeDown }} />}

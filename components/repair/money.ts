@@ -1,0 +1,3 @@
+/** An amount as people say it: whole units of the organisation's currency. */
+export const moneyText = (amount: number, currency: string): string =>
+  new Intl.NumberFormat('en-GB', { style: 'currency', currency, maximumFractionDigits: 0 }).format(amount);
