@@ -26,7 +26,7 @@ export function UnderWay({ underWay, works, ready, newId, actions, ...of }: Prop
           <h2 id="weigh">Weigh it</h2>
           {underWay.remindAt && <p>The next reminder goes out on {timeText(underWay.remindAt, timeZone)}.</p>}
           {ready ? (
-            <WeighForm key={newId} action={actions.saveWeighing} {...ids} newId={newId} units={units} metered={(last ?? underWay).engineS !== null} />
+            <WeighForm key={underWay.weighings.length} action={actions.saveWeighing} {...ids} newId={newId} units={units} metered={(last ?? underWay).engineS !== null} />
           ) : (
             <p className="text-ink-soft">The form opens when the cautions above are read.</p>
           )}

@@ -2,11 +2,11 @@ import type { ReactNode } from 'react';
 import { minutesText } from '@/components/case/words';
 import { DefinitionList } from '@/components/ui/DefinitionList';
 import { Disclosure } from '@/components/ui/Disclosure';
-import { Notice } from '@/components/ui/Notice';
 import { SightGlass } from '@/components/ui/SightGlass';
 import { Tag } from '@/components/ui/Tag';
 import type { PlannedRemedyView } from '@/lib/schemas/repair';
 import { moneyText } from './money';
+import { RepairCautions } from './RepairCautions';
 
 interface Props {
   remedy: PlannedRemedyView;
@@ -16,10 +16,12 @@ interface Props {
   causeName: (id: string) => string;
   /** By which the reader says that the cautions were read; null: he or she doesn't work on cases. */
   read: ReactNode;
+  /** By which it is chosen; null: it can't be. */
+  choose: ReactNode;
 }
 
 /** One remedy: why it stands at this place, what it takes, and its steps behind its cautions. */
-export function PlannedRemedy({ remedy, place, currency, causeName, read }: Props) {
+export function PlannedRemedy({ remedy, place, currency, causeName, read, choose }: Props) {
   const { name, why, called, causeIds, p, lookMinutes, fixMinutes, lookCost, fixCost, comebackCost, parts, steps, basis, source } = remedy;
   const money = (amount: number) => moneyText(amount, currency);
   return (
@@ -45,22 +47,12 @@ export function PlannedRemedy({ remedy, place, currency, causeName, read }: Prop
         <p className="mt-2 text-[0.9375rem] text-ink-soft">{source ?? `Basis: ${basis}.`}</p>
       </Disclosure>
       <Disclosure summary={<>Steps<span className="sr-only">: {name}</span></>}>
-        <Steps {...{ remedy, read }} />
+        <RepairCautions {...{ repair: remedy, read }} />
         {remedy.toRead.length === 0 && (
           <ol className="mt-4 ml-5 grid max-w-prose list-decimal gap-1.5">{steps.map((step) => <li key={step}>{step}</li>)}</ol>
         )}
       </Disclosure>
+      {choose}
     </li>
-  );
-}
-
-function Steps({ remedy: { cautions, toRead }, read }: Pick<Props, 'remedy' | 'read'>) {
-  const shown = toRead.length > 0 ? cautions.filter(({ id }) => toRead.includes(id)) : cautions;
-  return (
-    <Notice kind="caution" title={toRead.length > 0 ? 'Read this first' : 'Read today'}>
-      <ul className="ml-5 grid list-disc gap-1">{shown.map(({ id, text }) => <li key={id}>{text}</li>)}</ul>
-      <p className="mt-2 text-[0.9375rem]">The vehicle maker’s information, local rules and a qualified person’s judgement come first. A torque or another value is the maker’s: none is given here.</p>
-      {toRead.length > 0 && <div className="mt-3">{read ?? <p>Its steps are shown to those who work on cases.</p>}</div>}
-    </Notice>
   );
 }

@@ -16,3 +16,4 @@ export * from './unit-hold';
 export * from './oil-catch';
 export * from './search-entry';
 export * from './mail';
+export * from './repair';

@@ -1,7 +1,8 @@
 import { z } from 'zod';
 import type { StationId } from '@/lib/diagnose/stations';
 import { rulebookId } from './case';
-import { rowId } from './common';
+import { optionalId, optionalLine, rowId } from './common';
+import { optionalDay } from './record';
 
 export const repairPlanInput = z.strictObject({ caseId: rowId });
 
@@ -55,4 +56,61 @@ export interface RepairPlanView {
   costOfLeaving: number;
   /** How the order was found: the best of all, or a good one. */
   exact: boolean;
+}
+
+export const STEP_MARKS = ['done', 'not-done', 'not-applicable'] as const;
+export type StepMark = (typeof STEP_MARKS)[number];
+
+const ofRepair = { caseId: rowId, repairId: rowId };
+
+export const chooseRepairInput = z.strictObject({
+  id: rowId,
+  caseId: rowId,
+  remedyId: rulebookId,
+  /** Asked for when it isn't what the plan has first. */
+  whyBefore: optionalLine(500),
+  plannedOn: optionalDay,
+  assignedTo: optionalId,
+});
+
+export const planRepairInput = z.strictObject({ ...ofRepair, plannedOn: optionalDay, assignedTo: optionalId });
+
+export const markStepInput = z.strictObject({
+  id: rowId,
+  ...ofRepair,
+  step: z.coerce.number<string | number>('Say which step.').int().min(0).max(99),
+  mark: z.enum(STEP_MARKS, 'Say whether it was done.'),
+  value: optionalLine(120),
+  note: optionalLine(500),
+});
+
+export const endRepairInput = z.strictObject({ ...ofRepair, outcome: z.enum(['done', 'dropped'], 'Say what came of it.'), whyDropped: optionalLine(500) });
+
+/** What was last said of a step. */
+export interface StepMarkView {
+  mark: StepMark;
+  value: string | null;
+  note: string | null;
+  by: string;
+  at: string;
+}
+
+/** A remedy that was chosen, with what was done of it. */
+export interface RepairView {
+  id: string;
+  remedyId: string;
+  name: string;
+  chosenAt: string;
+  chosenBy: string;
+  whyBefore: string | null;
+  plannedOn: string | null;
+  assignedTo: string | null;
+  assignedToName: string | null;
+  endedAt: string | null;
+  endedBy: string | null;
+  outcome: string | null;
+  whyDropped: string | null;
+  cautions: { id: string; text: string }[];
+  toRead: string[];
+  steps: { text: string; mark: StepMarkView | null }[];
 }

@@ -17,7 +17,12 @@ import * as casesIdKit from './cases/[id]/kit/route';
 import * as casesIdPhotos from './cases/[id]/photos/route';
 import * as casesIdReasons from './cases/[id]/reasons/route';
 import * as casesIdRecord from './cases/[id]/record/route';
+import * as casesIdRepairPlan from './cases/[id]/repair-plan/route';
+import * as casesIdRepairPlanCautions from './cases/[id]/repair-plan/cautions/route';
 import * as casesIdRepairs from './cases/[id]/repairs/route';
+import * as casesIdRepairsRepairIdEnd from './cases/[id]/repairs/[repairId]/end/route';
+import * as casesIdRepairsRepairIdPlan from './cases/[id]/repairs/[repairId]/plan/route';
+import * as casesIdRepairsRepairIdSteps from './cases/[id]/repairs/[repairId]/steps/route';
 import * as casesIdReopen from './cases/[id]/reopen/route';
 import * as casesIdRulebook from './cases/[id]/rulebook/route';
 import * as deviceCases from './device/cases/route';
@@ -79,7 +84,12 @@ export const ROUTES = {
   '/cases/{id}/photos': casesIdPhotos,
   '/cases/{id}/reasons': casesIdReasons,
   '/cases/{id}/record': casesIdRecord,
+  '/cases/{id}/repair-plan': casesIdRepairPlan,
+  '/cases/{id}/repair-plan/cautions': casesIdRepairPlanCautions,
   '/cases/{id}/repairs': casesIdRepairs,
+  '/cases/{id}/repairs/{repairId}/end': casesIdRepairsRepairIdEnd,
+  '/cases/{id}/repairs/{repairId}/plan': casesIdRepairsRepairIdPlan,
+  '/cases/{id}/repairs/{repairId}/steps': casesIdRepairsRepairIdSteps,
   '/cases/{id}/reopen': casesIdReopen,
   '/cases/{id}/rulebook': casesIdRulebook,
   '/device/cases': deviceCases,

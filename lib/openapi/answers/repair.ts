@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { STATION_IDS } from '@/lib/diagnose/stations';
-import type { RepairPlanView } from '@/lib/schemas/repair';
-import { id, probability } from './common';
+import { STEP_MARKS, type RepairPlanView, type RepairView } from '@/lib/schemas/repair';
+import { day, id, instant, probability } from './common';
 
 const money = z.number().meta({ description: 'In the organisation’s currency.' });
 
@@ -40,3 +40,27 @@ export const repairPlan = z
     exact: z.boolean().meta({ description: 'The best of all orders; else a good one.' }),
   })
   .meta({ id: 'RepairPlan' }) satisfies z.ZodType<RepairPlanView>;
+
+const mark = z.object({ mark: z.enum(STEP_MARKS), value: z.string().nullable(), note: z.string().nullable(), by: z.string(), at: instant });
+
+const chosen = z.object({
+  id,
+  remedyId: z.string(),
+  name: z.string(),
+  chosenAt: instant,
+  chosenBy: z.string(),
+  whyBefore: z.string().nullable().meta({ description: 'Why it went before what the plan had first.' }),
+  plannedOn: day.nullable(),
+  assignedTo: id.nullable(),
+  assignedToName: z.string().nullable(),
+  endedAt: instant.nullable(),
+  endedBy: z.string().nullable(),
+  outcome: z.string().nullable().meta({ description: 'done, dropped' }),
+  whyDropped: z.string().nullable(),
+  cautions: z.array(z.object({ id: z.string(), text: z.string() })),
+  toRead: z.array(z.string()).meta({ description: 'Cautions that you have still to acknowledge today.' }),
+  steps: z.array(z.object({ text: z.string(), mark: mark.nullable() })),
+}) satisfies z.ZodType<RepairView>;
+
+export const repairList = z.object({ caseId: id, repairs: z.array(chosen) }).meta({ id: 'RepairList' });
+export const repairWritten = z.object({ id, caseId: id });

@@ -123,7 +123,7 @@ function acknowledgedOn(tx: Transaction, ctx: Ctx, { id, timeZone }: { id: strin
 interface ToDo {
   head: { id: string; timeZone: string };
   compiled: CompiledRulebook;
-  check: Check;
+  check: Pick<Check, 'cautions' | 'setUp'>;
   at?: Date;
 }
 
@@ -131,5 +131,5 @@ interface ToDo {
 export async function refuseUnread(tx: Transaction, ctx: Ctx, { head, compiled: { rulebook }, check, at = ctx.now() }: ToDo): Promise<void> {
   const worseWhen = (id: string) => rulebook.cautions.find((caution) => caution.id === id)?.worseWhen ?? [];
   const unread = cautionsToRead(check, worseWhen, await acknowledgedOn(tx, ctx, head, at));
-  if (unread.length > 0) throw conflict('Read and acknowledge the cautions of this check first.', { cautions: unread.join(' ') });
+  if (unread.length > 0) throw conflict('Read and acknowledge the cautions first.', { cautions: unread.join(' ') });
 }

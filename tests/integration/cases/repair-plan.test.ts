@@ -30,13 +30,13 @@ describe('the repair plan of a case', () => {
     expect(after.expectedCost).not.toBe(before.expectedCost);
   });
 
-  it('marks what was called, and counts at the rulebook’s labour rate until the organisation sets one', async () => {
+  it('marks what was called, and counts at the labour rate that the organisation set', async () => {
     const { ctx } = workshop;
     const caseId = await openACase(workshop);
     const [first] = (await plan(caseId)).remedies;
     await callCause({ ctx, input: { id: newId(), caseId, mainCause: first?.causeIds[0] ?? '', sureness: 'guess', whyNotLeading: 'Seen' } });
     expect((await plan(caseId)).remedies.find(({ remedyId }) => remedyId === first?.remedyId)?.called).toBe(true);
-    expect((await plan(caseId)).rateFrom).toBe('rulebook');
+    expect((await plan(caseId)).rateFrom).toBe('organisation');
   });
 
   it('opens the steps of a repair to whoever read its cautions today, and to nobody else', async () => {

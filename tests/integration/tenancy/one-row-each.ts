@@ -9,7 +9,7 @@ const NO_RULEBOOK = {} as Rulebook;
 
 /** One row in every table that belongs to an organisation; organisation, site, person and membership are there. */
 export async function insertOneRowEach(tx: Transaction, { organisationId, siteId, personId }: { organisationId: string; siteId: string; personId: string }) {
-  const [unitId, modelId, fitId, editionId, caseId, findingId, setId, catchId] = [newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId()];
+  const [unitId, modelId, fitId, editionId, caseId, findingId, setId, catchId, repairId] = [newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId()];
   const of = { organisationId };
   await tx.insert(schema.invitation).values({ ...of, id: newId(), roles: ['technician'], expiresAt: AT, invitedBy: personId });
   await tx.insert(schema.compressorModel).values({ ...of, id: modelId, name: 'Model' });
@@ -39,6 +39,8 @@ export async function insertOneRowEach(tx: Transaction, { organisationId, siteId
   await tx.insert(schema.oilCatch).values({ ...of, id: catchId, caseId, checkId: 'c', stage: { kind: 'diagnosis' }, startedAt: AT, startedBy: personId });
   await tx.insert(schema.oilWeighing).values({ ...of, id: newId(), catchId, caseId, massKg: 0.01, massErrorKg: 0.0005, ranS: 3600, personId, at: AT, findingId });
   await tx.insert(schema.mail).values({ ...of, id: newId(), kind: 'notice', toAddress: 'somebody@people.test', subject: 'Test', body: 'Words', entity: 'unit', entityId: unitId });
+  await tx.insert(schema.repair).values({ ...of, id: repairId, caseId, remedyId: 'r', chosenAt: AT, chosenBy: personId });
+  await tx.insert(schema.repairStep).values({ ...of, id: newId(), repairId, caseId, step: 0, mark: 'done', personId, at: AT });
   await tx.insert(schema.savedView).values({ ...of, id: newId(), personId, list: 'cases', name: 'Mine', query: 'whose=me' });
   await tx.insert(schema.removal).values({ ...of, id: newId(), entity: 'unit', entityId: unitId, kind: 'hide', reason: 'Test', personId, at: AT });
   await tx.insert(schema.audit).values({ ...of, id: newId(), action: 'test', entity: 'unit', entityId: unitId, changed: {} });

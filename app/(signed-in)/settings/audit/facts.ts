@@ -65,8 +65,8 @@ const LABELS: Readonly<Record<string, string>> = {
 /** Of use to whoever looks into a fault of ours, and in the raw record all the same. */
 const RAW_ONLY = new Set(['kind', 'shares', 'asTyped', 'conditions', 'strokes', 'query', 'cautions', 'version', 'massErrorKg']);
 
-const NAMES = new Map([...defaultRulebook.checks, ...defaultRulebook.causes].map(({ id, name }) => [id, name]));
-const RULEBOOK_FIELDS = new Set(['checkId', 'mainCause', 'contributingCauses', 'complaints', 'dangers', 'sureness', 'roles', 'scopes', 'status']);
+const NAMES = new Map([...defaultRulebook.checks, ...defaultRulebook.causes, ...defaultRulebook.remedies].map(({ id, name }) => [id, name]));
+const RULEBOOK_FIELDS = new Set(['checkId', 'remedyId', 'mark', 'outcome', 'mainCause', 'contributingCauses', 'complaints', 'dangers', 'sureness', 'roles', 'scopes', 'status']);
 
 const UUID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i;
 const instant = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium', timeStyle: 'short', timeZone: 'UTC' });

@@ -31,9 +31,6 @@ export const cases = feature({
     { page: PAGES, roles: SEE, query: ({ siteId }) => ({ q: 'K', site: siteId, status: 'all', whose: 'me', held: 'yes', complaint: 'complaint-oil', sort: 'unit', direction: 'asc', page: '2' }) },
     { page: `${PAGES}/new`, roles: WORK, query: ({ unitId }) => ({ unit: unitId }) },
     { page: `${PAGES}/[id]`, roles: SEE, params: ({ caseId }) => ({ id: caseId }), query: () => ({ at: new Date().toISOString() }) },
-    { page: `${PAGES}/[id]/repair`, roles: SEE, params: ({ calledId }) => ({ id: calledId }) },
-    { action: `${PAGES}/[id]/repair`, name: 'readRepairCautions', roles: WORK, form: ({ caseId }) => ({ caseId, remedyId: 'replace-discharge-line', cautions: ['vehicle-rolls'] }) },
-    { route: 'api/v1/cases/[id]/repairs', method: 'GET', roles: SEE, params: ({ caseId }) => ({ id: caseId }) },
     { page: `${PAGES}/[id]/history`, roles: SEE, params: ({ caseId }) => ({ id: caseId }), query: () => ({ at: new Date().toISOString(), with: 'nonsense' }) },
 
     {

@@ -1,52 +1,73 @@
 import type { Metadata } from 'next';
 import { ReadCautionsForm } from '@/components/case/ReadCautionsForm';
 import { moneyText } from '@/components/repair/money';
+import { ChosenRepair, EndedRepairs } from '@/components/repair/ChosenRepair';
 import { PlannedRemedy } from '@/components/repair/PlannedRemedy';
+import { ChooseForm } from '@/components/repair/RepairForms';
 import { EmptyState } from '@/components/ui/EmptyState';
 import { PageHeader } from '@/components/ui/PageHeader';
-import { percent } from '@/lib/schemas/percent';
 import { orNotFound, pageContext } from '@/lib/auth/page';
 import { may, PERMITTED } from '@/lib/auth/permissions';
+import { newId } from '@/lib/ids';
+import { percent } from '@/lib/schemas/percent';
 import type { RepairPlanView } from '@/lib/schemas/repair';
+import { listAssignable } from '@/lib/services/case/assignable';
 import { readCase } from '@/lib/services/case/read';
+import { listRepairs } from '@/lib/services/repair/list';
 import { readRepairPlan } from '@/lib/services/repair/read-plan';
-import { readRepairCautions } from './actions';
+import { choose, endIt, planIt, readRepairCautions, saySo } from './actions';
 
 export const metadata: Metadata = { title: 'Repair plan' };
 
-/** What to repair, and in which order, as the case stands now. */
+/** What to repair, and in which order, as the case stands now; and what was chosen and done of it. */
 export default async function RepairPage({ params }: { params: Promise<{ id: string }> }) {
   const ctx = await pageContext(PERMITTED['case.see']);
   const { id } = await params;
-  const { head, rulebook } = await orNotFound(readCase({ ctx, input: { caseId: id } }));
+  const { head, rulebook, state } = await orNotFound(readCase({ ctx, input: { caseId: id } }));
   const plan = await readRepairPlan({ ctx, input: { caseId: id } });
-  const works = may(ctx.roles, 'case.work');
-  const causeName = (causeId: string) => rulebook.causes[causeId]?.name ?? causeId;
+  const { repairs } = await listRepairs({ ctx, input: { caseId: id } });
+  const people = (await listAssignable({ ctx, input: {} })).map((person) => ({ value: person.id, label: person.name }));
+  const works = may(ctx.roles, 'case.work') && state.status !== 'closed';
+  const caseId = head.id;
+  const atHand = repairs.filter(({ endedAt }) => endedAt === null);
+  const open = plan.remedies.filter(({ remedyId }) => !atHand.some((repair) => repair.remedyId === remedyId));
+  const read = ({ remedyId, name, toRead }: { remedyId: string; name: string; toRead: string[] }) =>
+    works ? <ReadCautionsForm action={readRepairCautions} of={{ caseId, remedyId }} about={name} cautionIds={toRead} /> : null;
   return (
     <>
       <PageHeader
         title="Repair plan"
-        breadcrumbs={[{ label: 'Cases', href: '/cases' }, { label: `Case ${head.number}: ${head.unit.fleetNumber}`, href: `/cases/${head.id}` }]}
+        breadcrumbs={[{ label: 'Cases', href: '/cases' }, { label: `Case ${head.number}: ${head.unit.fleetNumber}`, href: `/cases/${caseId}` }]}
         lead="In the order of least expected cost, as the ranking stands now. Each answer can change it."
       />
       <div className="grid max-w-4xl gap-8">
+        {atHand.length > 0 && (
+          <section aria-labelledby="at-hand" className="grid gap-6">
+            <h2 id="at-hand">At hand</h2>
+            {atHand.map((repair) => (
+              <ChosenRepair key={repair.id} {...{ repair, caseId, people }} timeZone={head.timeZone} newIds={repair.steps.map(() => newId())} read={read(repair)} actions={{ planIt, saySo, endIt }} />
+            ))}
+          </section>
+        )}
         <section aria-labelledby="order" className="grid gap-4">
-          <h2 id="order">In this order</h2>
-          {plan.remedies.length === 0 && <EmptyState title="No repair is worth its cost yet">Leaving everything as it is costs least by what is known. Check further, or call what you have seen.</EmptyState>}
+          <h2 id="order">{atHand.length > 0 ? 'Then, in this order' : 'In this order'}</h2>
+          {open.length === 0 && <EmptyState title={atHand.length > 0 ? 'Nothing else is worth its cost' : 'No repair is worth its cost yet'}>{atHand.length > 0 ? 'By what is known, the rest is best left as it is.' : 'Leaving everything as it is costs least by what is known. Check further, or call what you have seen.'}</EmptyState>}
           <ol className="grid gap-6">
-            {plan.remedies.map((remedy, i) => (
+            {open.map((remedy, i) => (
               <PlannedRemedy
                 key={remedy.remedyId}
                 remedy={remedy}
                 place={i + 1}
                 currency={plan.currency}
-                causeName={causeName}
-                read={works ? <ReadCautionsForm action={readRepairCautions} of={{ caseId: head.id, remedyId: remedy.remedyId }} about={remedy.name} cautionIds={remedy.toRead} /> : null}
+                causeName={(causeId) => rulebook.causes[causeId]?.name ?? causeId}
+                read={read(remedy)}
+                choose={works ? <ChooseForm action={choose} caseId={caseId} about={remedy.name} people={people} newId={newId()} remedyId={remedy.remedyId} isFirst={i === 0} /> : null}
               />
             ))}
           </ol>
         </section>
         <Reckoning plan={plan} />
+        <EndedRepairs repairs={repairs.filter(({ endedAt }) => endedAt !== null)} timeZone={head.timeZone} />
       </div>
     </>
   );

@@ -1,0 +1,43 @@
+import { selectRepairs, selectSteps } from '@/db/queries/repair';
+import { PERMITTED } from '@/lib/auth/permissions';
+import { REPAIR_SET_UP } from '@/lib/case/view/repair-plan';
+import { cautionsToRead } from '@/lib/diagnose/cautions';
+import { repairPlanInput, type RepairView } from '@/lib/schemas/repair';
+import { gatherState } from '../case/gather-state';
+import { defineRead } from '../define';
+import { lastMarks } from './marks';
+
+/** The repairs that were chosen for a case, with what was done of each. */
+export const listRepairs = defineRead({
+  name: 'list.repair',
+  doing: 'see cases',
+  roles: PERMITTED['case.see'],
+  input: repairPlanInput,
+  run: async ({ tx, ctx, input: { caseId } }): Promise<{ caseId: string; repairs: RepairView[] }> => {
+    const of = { organisationId: ctx.organisation.id, caseId };
+    const { compiled, acknowledged } = await gatherState(tx, ctx, { caseId });
+    const cautions = new Map(compiled.rulebook.cautions.map((caution) => [caution.id, caution]));
+    const said = await selectSteps(tx, of);
+    const repairs = (await selectRepairs(tx, of)).flatMap(({ chosenAt, endedAt, ...row }): RepairView[] => {
+      const remedy = compiled.rulebook.remedies.find(({ id }) => id === row.remedyId);
+      if (!remedy) return [];
+      const marks = lastMarks(said.filter(({ repairId }) => repairId === row.id));
+      return [
+        {
+          ...row,
+          name: remedy.name,
+          chosenAt: chosenAt.toISOString(),
+          endedAt: endedAt?.toISOString() ?? null,
+          cautions: remedy.cautions.map((id) => ({ id, text: cautions.get(id)?.text ?? id })),
+          toRead: cautionsToRead({ cautions: remedy.cautions, setUp: REPAIR_SET_UP }, (id) => cautions.get(id)?.worseWhen ?? [], acknowledged),
+          steps: remedy.steps.map((text, i) => ({ text, mark: markView(marks.get(i)) })),
+        },
+      ];
+    });
+    return { caseId, repairs };
+  },
+});
+
+function markView(said: Awaited<ReturnType<typeof selectSteps>>[number] | undefined): RepairView['steps'][number]['mark'] {
+  return said ? { mark: said.mark, value: said.value, note: said.note, by: said.by, at: said.at.toISOString() } : null;
+}
