@@ -94,8 +94,8 @@ describe('the search by keyboard', () => {
     await page.goto(`${url}/cases`);
     await page.keyboard.press('/');
     await page.keyboard.type('njk');
-    await page.getByRole('combobox').waitFor();
-    expect(await page.getByRole('combobox').inputValue()).toBe('njk');
+    await dialog().getByRole('combobox').waitFor();
+    expect(await dialog().getByRole('combobox').inputValue()).toBe('njk');
     expect(new URL(page.url()).pathname).toBe('/cases');
     await page.keyboard.press('Escape');
   });

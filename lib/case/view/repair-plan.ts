@@ -1,7 +1,7 @@
 import type { CompiledRulebook } from '@/lib/diagnose/compiled';
 import { cautionsToRead } from '@/lib/diagnose/cautions';
 import { repairProblemOf } from '@/lib/diagnose/next-checks';
-import { repairOrder, type RepairStep } from '@/lib/diagnose/repair-order';
+import { repairOrder, type RepairOrder, type RepairStep } from '@/lib/diagnose/repair-order';
 import type { Remedy, SetUp } from '@/lib/diagnose/types';
 import { percent } from '@/lib/schemas/percent';
 import type { PlannedRemedyView, RepairPlanView } from '@/lib/schemas/repair';
@@ -21,12 +21,17 @@ interface Parts {
   acknowledged: readonly { cautionId: string; dangers: readonly string[] }[];
 }
 
+/** The order of least expected cost as a case stands: at the organisation's labour rate, or the rulebook's until it has one. */
+export function orderNow({ compiled, causes, labourRatePerHour }: Pick<Parts, 'compiled' | 'causes' | 'labourRatePerHour'>): RepairOrder {
+  const p = new Map(causes.map((cause) => [cause.causeId, cause.p]));
+  const problem = repairProblemOf(compiled, labourRatePerHour === null ? {} : { labourRatePerHour });
+  return repairOrder(problem, compiled.causeIds.map((id) => p.get(id) ?? 0));
+}
+
 /** The remedies of least expected cost, in their order, each with why it stands there and what it takes. */
 export function repairPlanView({ caseId, compiled, causes, currency, labourRatePerHour, called, acknowledged }: Parts): RepairPlanView {
-  const p = new Map(causes.map((cause) => [cause.causeId, cause.p]));
   const { rulebook } = compiled;
-  const problem = repairProblemOf(compiled, labourRatePerHour === null ? {} : { labourRatePerHour });
-  const order = repairOrder(problem, compiled.causeIds.map((id) => p.get(id) ?? 0));
+  const order = orderNow({ compiled, causes, labourRatePerHour });
   const remedies = new Map(rulebook.remedies.map((remedy) => [remedy.id, remedy]));
   const names = new Map(rulebook.causes.map(({ id, name }) => [id, name]));
   return {

@@ -1,20 +1,10 @@
-import { lockCase } from '@/db/queries/case';
 import { lockCatch, type OilCatch } from '@/db/queries/oil-catch';
-import type { CompiledRulebook } from '@/lib/diagnose';
 import { conflict, notFound } from '@/lib/errors';
 import type { Transaction } from '@/db/connect';
-import { compiledEdition } from '../edition/compiled';
+import type { LockedCase } from '../case/locked';
 
-type Head = NonNullable<Awaited<ReturnType<typeof lockCase>>>;
-
-/** The case that oil is caught for, locked, with its rulebook. */
-export async function lockCaseOf(tx: Transaction, of: { organisationId: string; caseId: string }): Promise<{ head: Head; compiled: CompiledRulebook }> {
-  const head = await lockCase(tx, of);
-  if (!head) throw notFound('case');
-  return { head, compiled: await compiledEdition(tx, { ...of, editionId: head.editionId }) };
-}
-
-export function refuseCalled({ status }: Pick<Head, 'status'>): void {
+/** Nothing is weighed into a case that was called. */
+export function refuseCalled({ status }: Pick<LockedCase, 'status'>): void {
   if (status !== 'open') throw conflict('This case has been called. Reopen it to go on.');
 }
 

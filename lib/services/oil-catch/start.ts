@@ -3,10 +3,11 @@ import { PERMITTED } from '@/lib/auth/permissions';
 import { isCaught } from '@/lib/case/weighings';
 import { conflict, invalid } from '@/lib/errors';
 import { CATCH_MEASURES, startCatchInput } from '@/lib/schemas/oil-catch';
+import { lockCaseOf } from '../case/locked';
 import { refuseUnread } from '../case/write-finding';
 import { defineWrite } from '../define';
 import { readMeasures } from '../units-of-measure';
-import { lockCaseOf, refuseCalled } from './open-case';
+import { refuseCalled } from './open-case';
 import { queueReminder, remindAfter } from './reminder';
 
 /** Begins to catch oil for a check of a case, from a clean start. The id is the client's: sent twice, it begins once. */

@@ -6,10 +6,11 @@ import { SUM_BY_WEIGHT, textsOfWeighings, WRITTEN_HERE } from '@/lib/case/weighi
 import { conflict, notFound } from '@/lib/errors';
 import { newId } from '@/lib/ids';
 import { takeBackWeighingInput } from '@/lib/schemas/oil-catch';
+import { lockCaseOf } from '../case/locked';
 import { writeFinding } from '../case/write-finding';
 import { writingOf } from '../case/writing';
 import { defineWrite } from '../define';
-import { lockCaseOf, lockCatchOf, refuseCalled } from './open-case';
+import { lockCatchOf, refuseCalled } from './open-case';
 import { written } from './weigh';
 
 /**

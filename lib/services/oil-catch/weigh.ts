@@ -7,12 +7,13 @@ import { newId } from '@/lib/ids';
 import { measureUnit } from '@/lib/schemas/measures';
 import { OIL_MEASURE, USUAL_SCALE_ERROR_KG, WEIGHING_MEASURES, weighInput } from '@/lib/schemas/oil-catch';
 import { formatQuantity, parseError } from '@/lib/units';
+import { lockCaseOf } from '../case/locked';
 import { writeFinding } from '../case/write-finding';
 import { writingOf } from '../case/writing';
 import type { Ctx } from '../context';
 import { defineWrite } from '../define';
 import { decimalMarkOf, readMeasures, withUnit } from '../units-of-measure';
-import { lockCaseOf, lockCatchOf, refuseCalled, refuseEnded } from './open-case';
+import { lockCatchOf, refuseCalled, refuseEnded } from './open-case';
 import { planReminder } from './reminder';
 
 /** What the scale can't show of what one bottle holds. */

@@ -4,11 +4,13 @@ import { insertRepair, lockRepair, selectRepairs } from '@/db/queries/repair';
 import { selectLatestRun } from '@/db/queries/run';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { findingsForRanking } from '@/lib/case/findings-for-ranking';
-import { rank, repairOrder, repairProblemOf, type CompiledRulebook } from '@/lib/diagnose';
+import { orderNow } from '@/lib/case/view/repair-plan';
+import { rank, type CompiledRulebook } from '@/lib/diagnose';
 import { conflict, invalid } from '@/lib/errors';
 import { chooseRepairInput } from '@/lib/schemas/repair';
+import { lockCaseOf } from '../case/locked';
 import { defineWrite } from '../define';
-import { lockCaseOf, refuseClosed } from './locked';
+import { refuseClosed } from './locked';
 import { refuseStranger } from './who';
 
 /**
@@ -33,7 +35,7 @@ export const chooseRepair = defineWrite({
     if (!compiled.rulebook.remedies.some((remedy) => remedy.id === remedyId)) throw invalid({ remedyId: "This remedy is not in the case's rulebook." });
     await refuseStranger(tx, { ...of, assignedTo });
     const chosen = new Set((await selectRepairs(tx, of)).filter(({ endedAt }) => endedAt === null).map((row) => row.remedyId));
-    const first = (await orderOf(tx, of, { compiled, labourRatePerHour: head.labourRatePerHour })).find((one) => !chosen.has(one));
+    const first = (await planned(tx, of, { compiled, labourRatePerHour: head.labourRatePerHour })).find((one) => !chosen.has(one));
     const isFirst = remedyId === first;
     if (!isFirst && !whyBefore) throw invalid({ whyBefore: 'The plan has another first. Say what you saw that puts this before it.' });
 
@@ -46,10 +48,8 @@ export const chooseRepair = defineWrite({
 });
 
 /** The plan's remedies in their order, as the case stands. */
-async function orderOf(tx: Transaction, of: { organisationId: string; caseId: string }, { compiled, labourRatePerHour }: { compiled: CompiledRulebook; labourRatePerHour: number | null }): Promise<string[]> {
+async function planned(tx: Transaction, of: { organisationId: string; caseId: string }, { compiled, labourRatePerHour }: { compiled: CompiledRulebook; labourRatePerHour: number | null }): Promise<string[]> {
   const run = await selectLatestRun(tx, of);
   const { causes } = rank(compiled, findingsForRanking(await selectFindings(tx, of)), { facts: run?.recordFacts ?? {} });
-  const p = new Map(causes.map((cause) => [cause.causeId, cause.p]));
-  const problem = repairProblemOf(compiled, labourRatePerHour === null ? {} : { labourRatePerHour });
-  return repairOrder(problem, compiled.causeIds.map((id) => p.get(id) ?? 0)).steps.map(({ remedyId }) => remedyId);
+  return orderNow({ compiled, causes, labourRatePerHour }).steps.map(({ remedyId }) => remedyId);
 }

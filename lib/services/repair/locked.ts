@@ -1,28 +1,19 @@
 import type { Transaction } from '@/db/connect';
-import { lockCase } from '@/db/queries/case';
 import { lockRepair } from '@/db/queries/repair';
 import type { CompiledRulebook } from '@/lib/diagnose';
 import type { Remedy } from '@/lib/diagnose/types';
 import { conflict, notFound } from '@/lib/errors';
-import { compiledEdition } from '../edition/compiled';
+import { lockCaseOf, type LockedCase } from '../case/locked';
 
 interface Of {
   organisationId: string;
   caseId: string;
 }
 
-type Head = NonNullable<Awaited<ReturnType<typeof lockCase>>>;
 type Row = NonNullable<Awaited<ReturnType<typeof lockRepair>>>;
 
-/** A case, locked, with its rulebook. */
-export async function lockCaseOf(tx: Transaction, of: Of): Promise<{ head: Head; compiled: CompiledRulebook }> {
-  const head = await lockCase(tx, of);
-  if (!head) throw notFound('case');
-  return { head, compiled: await compiledEdition(tx, { ...of, editionId: head.editionId }) };
-}
-
 /** A repair of a case that is still at hand, locked, with its remedy. */
-export async function lockRepairOf(tx: Transaction, of: Of & { repairId: string }): Promise<{ head: Head; compiled: CompiledRulebook; row: Row; remedy: Remedy }> {
+export async function lockRepairOf(tx: Transaction, of: Of & { repairId: string }): Promise<{ head: LockedCase; compiled: CompiledRulebook; row: Row; remedy: Remedy }> {
   const { head, compiled } = await lockCaseOf(tx, of);
   const row = await lockRepair(tx, of);
   const remedy = row?.caseId === of.caseId ? compiled.rulebook.remedies.find(({ id }) => id === row.remedyId) : undefined;
@@ -35,6 +26,6 @@ export function refuseEnded({ endedAt }: Pick<Row, 'endedAt'>): void {
 }
 
 /** A case that is closed is over. */
-export function refuseClosed({ status }: Pick<Head, 'status'>): void {
+export function refuseClosed({ status }: Pick<LockedCase, 'status'>): void {
   if (status === 'closed') throw conflict('This case is closed. Reopen it to go on.');
 }
