@@ -20,7 +20,7 @@ import { openChecks } from './open-checks';
 import { PanelAtHand } from './PanelAtHand';
 import { ReleaseHold } from './ReleaseHold';
 import { StationChecks } from './StationChecks';
-import { SyncStrip } from './SyncStrip';
+import { SlowNote, SyncStrip } from './SyncStrip';
 import { useCase, type CaseHandle } from './use-case';
 import { nameOf, useHeld } from './use-held';
 import { usePassedHolds } from './use-passed-holds';
@@ -77,6 +77,7 @@ export function CaseDesk({ view, drawing, hand: kept, decimalMark }: Props) {
         ) : (
           <AtHandView {...{ handle, rulebook, usual: view.usual, limits: view.limits, catching: view.catching, picked, decimalMark, onPick: setPicked }} />
         )}
+        {!readOnly && <SlowNote sync={handle.sync} />}
         {!readOnly && <HandSwitch hand={hand} onChange={(next) => { setHand(next); keepHand(next); }} />}
       </div>
       <div className="grid min-w-0 content-start gap-8 lg:col-start-2 lg:row-span-2 lg:row-start-2">

@@ -10,7 +10,6 @@ import type { Sync } from './use-case';
 /** How page and server stand to each other; nothing at all while everything is saved. */
 export function SyncStrip({ sync, rulebook }: { sync: Sync; rulebook: RulebookView }) {
   const { reachable, signedOut, unsent, refused, provisional, difference } = sync;
-  const waits = unsent.length > 0 && `${unsent.length === 1 ? 'One entry waits' : `${unsent.length} entries wait`} on this device and ${unsent.length === 1 ? 'goes' : 'go'} out when the connection is back.`;
   return (
     <div className="grid gap-3 empty:hidden" data-testid="sync">
       {signedOut && (
@@ -21,10 +20,9 @@ export function SyncStrip({ sync, rulebook }: { sync: Sync; rulebook: RulebookVi
       )}
       {!reachable && (
         <Notice title="No connection">
-          Go on: each answer is kept on this device. {waits} {provisional && 'The ranking is provisional, worked out on this device.'}
+          Go on: each answer is kept on this device. {waitsText(unsent)} {provisional && 'The ranking is provisional, worked out on this device.'}
         </Notice>
       )}
-      {reachable && !signedOut && provisional && <Notice title="Slow connection">{waits} Until then the ranking is provisional, worked out on this device.</Notice>}
       {difference && (
         <Notice title="The server ranks otherwise than this device did">
           {rulebook.causes[difference.causeId]?.name ?? difference.causeId}: <span className="figure">{percent(difference.is)}</span>, shown here as{' '}
@@ -34,6 +32,20 @@ export function SyncStrip({ sync, rulebook }: { sync: Sync; rulebook: RulebookVi
       {refused.map((item) => <Refused key={item.order} item={item} rulebook={rulebook} />)}
     </div>
   );
+}
+
+/**
+ * That the server takes its time. It comes and goes by itself long after a tap, so that it stands below the check at hand,
+ * where it moves nothing that one is about to tap; the ranking itself says that it is provisional.
+ */
+export function SlowNote({ sync: { reachable, signedOut, unsent, provisional } }: { sync: Sync }) {
+  if (!reachable || signedOut || !provisional) return null;
+  return <Notice title="Slow connection">{waitsText(unsent)} Until then the ranking is provisional, worked out on this device.</Notice>;
+}
+
+function waitsText(unsent: Sync['unsent']): string {
+  if (unsent.length === 0) return '';
+  return `${unsent.length === 1 ? 'One entry waits' : `${unsent.length} entries wait`} on this device and ${unsent.length === 1 ? 'goes' : 'go'} out when the connection is back.`;
 }
 
 function Refused({ item, rulebook }: { item: Kept; rulebook: RulebookView }) {
