@@ -16,16 +16,22 @@ function asksForSearch({ key, ctrlKey, metaKey, altKey, shiftKey, target, defaul
   return key === '/' && !isTyping(target) && !singleKeysAreOff();
 }
 
-interface Opened {
-  Dialog: ComponentType<{ begun: string; onClose: () => void }> | null;
-  /** Typed while it was fetched. */
-  begun: string;
+/** Letters that are typed until the box is there. */
+export interface Letters {
+  text: () => string;
+  /** The box is there, and hears them itself. */
+  stop: () => void;
 }
 
-const CLOSED: Opened = { Dialog: null, begun: '' };
+interface Opened {
+  Dialog: ComponentType<{ typed: Letters; onClose: () => void }> | null;
+  typed: Letters;
+}
 
-/** Letters that are typed until the box is there: they are meant for it, and not for keys of the page below. */
-function letters(): { text: () => string; stop: () => void } {
+const CLOSED: Opened = { Dialog: null, typed: { text: () => '', stop: () => undefined } };
+
+/** Hears letters that are meant for the box, and keeps them from the keys of the page below. */
+function letters(): Letters {
   let text = '';
   const onKey = (event: KeyboardEvent) => {
     if (event.key.length > 1 || event.ctrlKey || event.metaKey || event.altKey) return;
@@ -39,18 +45,19 @@ function letters(): { text: () => string; stop: () => void } {
 
 /** The way into the search from every page: a link to its page, which with script opens the box over this one. */
 export function SearchBox({ className }: { className?: string }) {
-  const [{ Dialog, begun }, setDialog] = useState<Opened>(CLOSED);
+  const [{ Dialog, typed }, setDialog] = useState<Opened>(CLOSED);
   const [isMissing, setMissing] = useState(false);
 
   const open = () => {
     setMissing(false);
     const typed = letters();
-    void loadDialog()
-      .then(
-        ({ default: Loaded }) => setDialog({ Dialog: Loaded, begun: typed.text() }),
-        () => setMissing(true),
-      )
-      .finally(typed.stop);
+    void loadDialog().then(
+      ({ default: Loaded }) => setDialog({ Dialog: Loaded, typed }),
+      () => {
+        typed.stop();
+        setMissing(true);
+      },
+    );
   };
   useEffect(() => {
     const timer = setTimeout(() => void loadDialog().catch(() => undefined), LOAD_AFTER_MS);
@@ -87,7 +94,7 @@ export function SearchBox({ className }: { className?: string }) {
         <span className="max-sm:sr-only">Search</span>
       </Link>
       {isMissing && <p role="alert" className="absolute top-full right-4 z-10 max-w-prose border border-ink bg-sheet p-4">The search could not be fetched. Try again when there is a connection.</p>}
-      {Dialog && <Dialog begun={begun} onClose={() => setDialog(CLOSED)} />}
+      {Dialog && <Dialog typed={typed} onClose={() => setDialog(CLOSED)} />}
     </>
   );
 }

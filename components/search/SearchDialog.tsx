@@ -1,20 +1,21 @@
 'use client';
 
 import { useRouter } from 'next/navigation';
-import { useEffect, useId, useRef, useState, type FormEvent } from 'react';
+import { useId, useLayoutEffect, useRef, useState, type FormEvent } from 'react';
 import { Button } from '@/components/ui/Button';
 import { LiveRegion } from '@/components/ui/LiveRegion';
 import { turnSingleKeys, useSingleKeysAreOff } from '@/components/ui/single-keys';
 import { QueryProvider } from '@/lib/query/provider';
 import { searchHref } from '@/lib/schemas/search';
 import { Results } from './Results';
+import type { Letters } from './SearchBox';
 import { useOptions } from './use-options';
 import { useSearch } from './use-search';
 import { foundText, SEARCHED } from './words';
 
 interface Props {
-  /** What stands in it from the start. */
-  begun: string;
+  /** Typed until now: it stands in the box from the start. */
+  typed: Letters;
   onClose: () => void;
 }
 
@@ -27,17 +28,21 @@ export default function SearchDialog(props: Props) {
   );
 }
 
-function Box({ begun, onClose }: Props) {
+function Box({ typed, onClose }: Props) {
   const dialog = useRef<HTMLDialogElement>(null);
   const router = useRouter();
   const id = useId();
-  const [text, setText] = useState(begun);
+  const [text, setText] = useState(typed.text);
   const { result, isBehind, problem, again } = useSearch(text);
   const groups = (problem ? undefined : result)?.groups.filter(({ hits }) => hits.length > 0) ?? [];
   const optionId = (name: string) => `${id}-${name}`;
   const options = groups.length > 0 ? [...groups.flatMap(({ hits }) => hits.map((hit) => optionId(`${hit.kind}-${hit.id}`))), optionId('all')] : [];
   const { active, choose, onKeyDown } = useOptions(options);
-  useEffect(() => dialog.current?.showModal(), []);
+  // In one turn with the first drawing, so that no letter falls between page and box.
+  useLayoutEffect(() => {
+    dialog.current?.showModal();
+    typed.stop();
+  }, [typed]);
 
   const close = () => dialog.current?.close();
   function open(event: FormEvent): void {

@@ -35,17 +35,17 @@ describe('the repair plan, on a phone', () => {
   it('keeps what was said of each step, with the value that was entered, and loses nothing typed at another', async () => {
     await atHand().getByText(/^Value or note/).nth(0).click();
     await atHand().getByText(/^Value or note/).nth(1).click();
-    await atHand().getByLabel('Value', { exact: true }).nth(0).fill('30 lb ft');
-    await atHand().getByLabel('Note', { exact: true }).nth(1).fill('half typed');
+    await atHand().getByRole('textbox', { name: /^Value/ }).nth(0).fill('30 lb ft');
+    await atHand().getByRole('textbox', { name: /^Note/ }).nth(1).fill('half typed');
     await atHand().getByRole('button', { name: /^Done ?: step 1$/ }).click();
     await atHand().getByText('30 lb ft').waitFor();
     await page.getByText(/^1 of \d+ steps settled/).waitFor();
-    expect(await atHand().getByLabel('Note', { exact: true }).nth(1).inputValue()).toBe('half typed');
+    expect(await atHand().getByRole('textbox', { name: /^Note/ }).nth(1).inputValue()).toBe('half typed');
   });
 
   it('says which steps are not done before it can be finished, and asks why something else goes first', async () => {
     await atHand().getByRole('button', { name: 'The repair is done' }).click();
-    await page.getByText(/^Not finished yet: steps 2, 3/).first().waitFor();
+    await page.getByText(/Not finished yet: steps 2, 3/).first().waitFor();
     const second = page.locator('section[aria-labelledby=order] > ol > li').nth(1);
     await second.getByText(/^Choose it/).click();
     await second.getByRole('button', { name: 'Choose this repair' }).click();
