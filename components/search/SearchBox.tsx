@@ -1,7 +1,7 @@
 'use client';
 
 import Link from 'next/link';
-import { useEffect, useState, type ComponentType, type MouseEvent } from 'react';
+import { useEffect, useRef, useState, type ComponentType, type MouseEvent } from 'react';
 import { classes } from '@/components/ui/classes';
 import { isTyping, singleKeysAreOff } from '@/components/ui/single-keys';
 import { loadDialog } from './load-dialog';
@@ -31,7 +31,7 @@ interface Opened {
 const CLOSED: Opened = { Dialog: null, typed: { text: () => '', stop: () => undefined } };
 
 /** Hears letters that are meant for the box, and keeps them from the keys of the page below. */
-function letters(): Letters {
+function letters(onStop: () => void): Letters {
   let text = '';
   const onKey = (event: KeyboardEvent) => {
     if (event.key.length > 1 || event.ctrlKey || event.metaKey || event.altKey) return;
@@ -40,17 +40,27 @@ function letters(): Letters {
     text += event.key;
   };
   document.addEventListener('keydown', onKey, { capture: true });
-  return { text: () => text, stop: () => document.removeEventListener('keydown', onKey, { capture: true }) };
+  return {
+    text: () => text,
+    stop() {
+      document.removeEventListener('keydown', onKey, { capture: true });
+      onStop();
+    },
+  };
 }
 
 /** The way into the search from every page: a link to its page, which with script opens the box over this one. */
 export function SearchBox({ className }: { className?: string }) {
   const [{ Dialog, typed }, setDialog] = useState<Opened>(CLOSED);
   const [isMissing, setMissing] = useState(false);
+  const hearing = useRef<Letters | null>(null);
 
   const open = () => {
+    // It is on its way: a second asking must not leave a second listener behind.
+    if (hearing.current) return;
     setMissing(false);
-    const typed = letters();
+    const typed = letters(() => (hearing.current = null));
+    hearing.current = typed;
     void loadDialog().then(
       ({ default: Loaded }) => setDialog({ Dialog: Loaded, typed }),
       () => {

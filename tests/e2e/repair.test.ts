@@ -33,8 +33,8 @@ describe('the repair plan, on a phone', () => {
   });
 
   it('keeps what was said of each step, with the value that was entered, and loses nothing typed at another', async () => {
-    await atHand().getByText(/^Value or note/).nth(0).click();
-    await atHand().getByText(/^Value or note/).nth(1).click();
+    await atHand().locator('summary', { hasText: 'Value or note' }).nth(0).click();
+    await atHand().locator('summary', { hasText: 'Value or note' }).nth(1).click();
     await atHand().getByRole('textbox', { name: /^Value/ }).nth(0).fill('30 lb ft');
     await atHand().getByRole('textbox', { name: /^Note/ }).nth(1).fill('half typed');
     await atHand().getByRole('button', { name: /^Done ?: step 1$/ }).click();
