@@ -175,6 +175,38 @@ const priorVariantSchema = z.strictObject({
   priors: z.record(idSchema, shareSchema).refine((priors) => Object.keys(priors).length > 0, { error: REFUSALS.empty }),
 });
 
+const metresSchema = z.number().gt(0).max(1e9);
+const secondsSchema = z.number().gt(0).max(1e9);
+const pascalsSchema = z.number().gt(0).max(1e8);
+
+const proofSchema = z.strictObject({
+  breakIn: z.strictObject({
+    engineRpm: z.number().gt(0).max(10_000),
+    pressure: z.strictObject({ aim: pascalsSchema, low: pascalsSchema, high: pascalsSchema }),
+    duration: z.strictObject({ least: secondsSchema, most: secondsSchema }),
+    ...sourced,
+  }),
+  release: z.strictObject({
+    checks: idsSchema.min(1),
+    oilDownstream: z.strictObject({ when: listOf(z.strictObject({ check: idSchema, states: idsSchema.min(1) }), LIMITS.items), checks: idsSchema }),
+  }),
+  watch: z.strictObject({
+    begin: textsSchema,
+    plans: listOf(
+      z.strictObject({
+        id: idSchema,
+        name: nameSchema,
+        causes: idsSchema,
+        readings: listOf(z.strictObject({ check: idSchema, inOrder: idsSchema.min(1), every: secondsSchema, everyDistance: metresSchema.optional() }), LIMITS.items).min(1),
+        duration: secondsSchema,
+        distance: metresSchema.optional(),
+        ...sourced,
+      }),
+      LIMITS.items,
+    ).min(1),
+  }),
+});
+
 /** The shape of a rulebook, conditions left open. `parseRulebook` is what to call. */
 export const rulebookShape = z.strictObject({
   schemaVersion: z.literal(1),
@@ -188,6 +220,7 @@ export const rulebookShape = z.strictObject({
   remedies: listOf(remedySchema, LIMITS.remedies),
   cautions: listOf(cautionSchema, LIMITS.cautions),
   priorVariants: listOf(priorVariantSchema, LIMITS.priorVariants).optional(),
+  proof: proofSchema.optional(),
 });
 
 /** A rulebook whose conditions have not been looked at yet. */

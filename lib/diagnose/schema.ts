@@ -4,6 +4,7 @@ import { coherenceProblems } from './schema-coherence';
 import { readConditions } from './schema-conditions';
 import { limitProblems, pathText } from './schema-limits';
 import { problemsOf } from './schema-messages';
+import { proofProblems } from './schema-proof';
 import { referenceProblems } from './schema-references';
 import { ruleProblems } from './schema-rules';
 import { rulebookShape } from './schema-shape';
@@ -29,7 +30,7 @@ export function parseRulebook(json: unknown): ParsedRulebook {
   const shape = rulebookShape.safeParse(json, { reportInput: true });
   if (!shape.success) return { ok: false, problems: problemsOf(json, shape.error.issues) };
 
-  const problems = [...referenceProblems(shape.data), ...checkProblems(shape.data)];
+  const problems = [...referenceProblems(shape.data), ...checkProblems(shape.data), ...proofProblems(shape.data)];
   const checks = new Map(shape.data.checks.map((check) => [check.id, check]));
   const rules = shape.data.rules.flatMap((rule, index): Rule[] => {
     const conditions = readConditions(rule.conditions, checks, (path, message, instead) => {

@@ -32,6 +32,55 @@ export interface Rulebook {
   cautions: Caution[];
   /** Other priors for a compressor model, vocation or span since the fit; the first that matches is used. */
   priorVariants?: PriorVariant[];
+  /** How a repair is proved; left out by rulebooks that end with the call. */
+  proof?: Proof;
+}
+
+/** How a new compressor is run in, what is measured before a release, and what is watched afterwards. */
+export interface Proof {
+  breakIn: BreakIn;
+  release: ReleasePlan;
+  watch: { begin: string[]; plans: WatchPlan[] };
+}
+
+/** The first run of a newly fitted compressor: held below cut-in by a bleed, so that it never unloads. */
+export interface BreakIn {
+  /** Revolutions a minute. */
+  engineRpm: number;
+  /** Pa; low and high are the band that readings are held against. */
+  pressure: { aim: number; low: number; high: number };
+  /** s under load. */
+  duration: { least: number; most: number };
+  basis: Basis;
+  source?: string;
+}
+
+/** Checks to be measured after the repair, and those that oil which went downstream adds. */
+export interface ReleasePlan {
+  checks: string[];
+  oilDownstream: { when: { check: string; states: string[] }[]; checks: string[] };
+}
+
+/** What is read while a repair is watched, how often and for how long, for causes; the one without causes is for all others. */
+export interface WatchPlan {
+  id: string;
+  name: string;
+  causes: string[];
+  readings: WatchReading[];
+  /** s; and m where miles count as well: it ends when both are over. */
+  duration: number;
+  distance?: number;
+  basis: Basis;
+  source?: string;
+}
+
+export interface WatchReading {
+  check: string;
+  /** Answers that speak for the repair. */
+  inOrder: string[];
+  /** s; and m: due when either is over. */
+  every: number;
+  everyDistance?: number;
 }
 
 export interface RulebookSettings {

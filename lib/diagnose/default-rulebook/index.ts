@@ -9,11 +9,13 @@ import { checks as driveChecks } from './checks/drive';
 import { checks as dryerChecks } from './checks/dryer';
 import { checks as intakeChecks } from './checks/intake';
 import { checks as oilFeedChecks } from './checks/oil-feed';
+import { checks as releaseChecks } from './checks/release';
 import { checks as tanksAndSystemChecks } from './checks/tanks-and-system';
 import { checks as unloaderAndGovernorChecks } from './checks/unloader-and-governor';
 import { checks as vehicleAndHistoryChecks } from './checks/vehicle-and-history';
 import { evidenceGroups } from './evidence-groups';
 import { panels } from './panels';
+import { proof } from './proof';
 import { remedies } from './remedies';
 import { rules as compoundRules } from './rules/compound';
 import { rules as crankcaseAndDrainRules } from './rules/crankcase-and-drain';
@@ -44,6 +46,7 @@ export const defaultRulebook: Rulebook = {
     ...crankcaseAndDrainChecks,
     ...driveChecks,
     ...unloaderAndGovernorChecks,
+    ...releaseChecks,
   ],
   panels,
   evidenceGroups,
@@ -62,4 +65,5 @@ export const defaultRulebook: Rulebook = {
   ],
   remedies,
   cautions,
+  proof,
 };

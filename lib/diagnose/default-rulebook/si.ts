@@ -8,7 +8,8 @@ const INCH_OF_WATER = 1000 * 9.80665 * INCH;
 const MILE = 1609.344;
 const MINUTE = 60;
 const HOUR = 3600;
-const YEAR = 365.25 * 86_400;
+const DAY = 86_400;
+const YEAR = 365.25 * DAY;
 const MILLILITRE = 1e-6;
 const CELSIUS_OFFSET = 273.15;
 
@@ -24,6 +25,10 @@ export const mm = (value: number): number => value / 1000;
 export const miles = (value: number): number => value * MILE;
 /** s */
 export const seconds = (value: number): number => value;
+/** s */
+export const minutes = (value: number): number => value * MINUTE;
+/** s */
+export const days = (value: number): number => value * DAY;
 /** s */
 export const hours = (value: number): number => value * HOUR;
 /** s */

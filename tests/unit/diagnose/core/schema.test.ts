@@ -27,6 +27,17 @@ function sound(): Rulebook {
     ],
     cautions: [{ id: 'hot', text: 'It is hot.', worseWhen: [] }],
     priorVariants: [{ name: 'Young', when: { milesSinceFit: { below: 1000 } }, priors: { worn: 0.1 } }],
+    proof: {
+      breakIn: { engineRpm: 1000, pressure: { aim: 5.5e5, low: 5e5, high: 6e5 }, duration: { least: 1200, most: 1800 }, basis: 'judgement' },
+      release: { checks: ['pressure'], oilDownstream: { when: [{ check: 'oil', states: ['yes'] }], checks: ['noise'] } },
+      watch: {
+        begin: ['The tanks are clean.'],
+        plans: [
+          { id: 'all', name: 'Oil', causes: [], readings: [{ check: 'oil', inOrder: ['no'], every: 604_800 }], duration: 2_419_200, basis: 'judgement' },
+          { id: 'wear', name: 'Noise', causes: ['worn'], readings: [{ check: 'noise', inOrder: ['none'], every: 604_800 }], duration: 2_419_200, basis: 'judgement' },
+        ],
+      },
+    },
   });
 }
 
@@ -258,6 +269,14 @@ describe('checks, causes and the rest', () => {
     ['a variant that never holds', (json) => Object.assign(json.priorVariants?.[0] ?? {}, { when: { miles: { atLeast: 5, below: 5 } } }), 'priorVariants[0].when.miles', /nothing/],
     ['a variant that leaves nothing over', (json) => Object.assign(json.priorVariants?.[0] ?? {}, { priors: { worn: 0.6, choked: 0.4 } }), 'priorVariants[0].priors', /sum to 1/],
     ['a variant with an unknown cause', (json) => Object.assign(json.priorVariants?.[0] ?? {}, { priors: { wear: 0.6 } }), 'priorVariants[0].priors.wear', /no cause/],
+    ['a band that does not hold its aim', (json) => Object.assign(json.proof?.breakIn.pressure ?? {}, { aim: 7e5 }), 'proof.breakIn.pressure', /not within its band/],
+    ['a break-in that ends before it may', (json) => Object.assign(json.proof?.breakIn.duration ?? {}, { least: 3600 }), 'proof.breakIn.duration', /longer than the most/],
+    ['an unknown check of the release', (json) => json.proof?.release.checks.push('pressures'), 'proof.release.checks[1]', /no check/],
+    ['an unknown answer that means oil downstream', (json) => json.proof?.release.oilDownstream.when[0]?.states.push('ja'), 'proof.release.oilDownstream.when[0].states[1]', /no answer "ja"/],
+    ['an unknown cause of a watch', (json) => json.proof?.watch.plans[1]?.causes.push('wear'), 'proof.watch.plans[1].causes[1]', /no cause/],
+    ['a cause that two plans watch', (json) => json.proof?.watch.plans[1]?.causes.push('worn'), 'proof.watch.plans[1].causes[1]', /by "wear" already/],
+    ['a watch of an unknown answer', (json) => Object.assign(json.proof?.watch.plans[0]?.readings[0] ?? {}, { inOrder: ['ja'] }), 'proof.watch.plans[0].readings[0].inOrder[0]', /no answer "ja"/],
+    ['no watch for the causes that none names', (json) => json.proof?.watch.plans.shift(), 'proof.watch.plans', /no plan/],
     ['another version of the shape', (json) => Object.assign(json, { schemaVersion: 2 }), 'schemaVersion', /2 is not known/],
   ])('refuses %s', (_name, spoil, path, message) => {
     const problems = problemsWith(spoil);

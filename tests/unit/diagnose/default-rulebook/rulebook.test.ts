@@ -97,7 +97,9 @@ describe('references between its parts', () => {
     const weighed = new Set(rules.flatMap(({ weights }) => Object.keys(weights)));
     expect([...causeIds].filter((id) => id !== SOMETHING_ELSE && !weighed.has(id))).toEqual([]);
     const tested = new Set(rules.flatMap(({ conditions }) => leaves(conditions).map(({ fact }) => fact)));
-    expect([...checkIds].filter((id) => !tested.has(id))).toEqual([]);
+    // What is measured for a release alone says nothing of the cause.
+    const proving = new Set([...(defaultRulebook.proof?.release.checks ?? []), ...(defaultRulebook.proof?.release.oilDownstream.checks ?? [])]);
+    expect([...checkIds].filter((id) => !tested.has(id) && !proving.has(id))).toEqual([]);
   });
 
   it('cover every station with checks', () => {
