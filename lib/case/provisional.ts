@@ -6,7 +6,7 @@ import type { CaseKit } from '@/lib/schemas/case-kit';
 import type { StateParts } from './build-state';
 import { correctedTime } from './corrected-time';
 import { arriving } from './current-findings';
-import { findingsForRanking } from './findings-for-ranking';
+import { findingsForRanking, stagesOf } from './findings-for-ranking';
 import { readAnswer } from './read-answer';
 import type { FindingRow } from './rows';
 import { siteDay } from './site-day';
@@ -41,7 +41,10 @@ export function provisionalParts({ compiled, kit, waiting, now }: Asked): StateP
   }
 
   const { recordFacts } = kit.run;
-  const ranking = (of: readonly FindingRow[]) => rank(compiled, findingsForRanking(of), { facts: recordFacts });
+  const ranking = (of: readonly FindingRow[]) => {
+    const findings = findingsForRanking(of);
+    return rank(compiled, findings, { facts: recordFacts, stages: stagesOf(findings) });
+  };
   const last = given.at(-1);
   const keptNotes = kit.notes.map((note) => ({ ...note, at: new Date(note.at) }));
   const knownNotes = new Set(keptNotes.map(({ id }) => id));

@@ -11,7 +11,7 @@ type Path = readonly PropertyKey[];
  * @param book a rulebook of the right shape
  * @returns every problem found; none when the rulebook has no proof
  */
-export function proofProblems({ proof, checks, causes }: Pick<ShapedRulebook, 'proof' | 'checks' | 'causes'>): Problem[] {
+export function proofProblems({ proof, checks, causes, cautions }: Pick<ShapedRulebook, 'proof' | 'checks' | 'causes' | 'cautions'>): Problem[] {
   if (!proof) return [];
   const found: Problem[] = [];
   const add = (path: Path, message: string, instead: string) => found.push({ path: pathText(['proof', ...path]), message, instead });
@@ -28,13 +28,25 @@ export function proofProblems({ proof, checks, causes }: Pick<ShapedRulebook, 'p
     });
   };
 
-  const { breakIn, release, watch } = proof;
+  const needAnswers = ({ check, inOrder }: { check: string; inOrder: readonly string[] }, path: Path) => {
+    needCheck(check, [...path, 'check']);
+    needStates(check, inOrder, [...path, 'inOrder']);
+  };
+  const cautionIds = new Set(cautions.map(({ id }) => id));
+  const needCautions = (ids: readonly string[], path: Path) =>
+    ids.forEach((id, i) => {
+      if (!cautionIds.has(id)) add([...path, i], `there is no caution "${id}"`, 'write the id of a caution of this rulebook');
+    });
+
+  const { fitting, breakIn, release, watch } = proof;
+  needCautions(fitting.cautions, ['fitting', 'cautions']);
+  needCautions(breakIn.cautions, ['breakIn', 'cautions']);
   const { aim, low, high } = breakIn.pressure;
   if (!(low < aim && aim < high)) add(['breakIn', 'pressure'], 'the pressure to hold is not within its band', 'write low, aim and high in this order');
   if (breakIn.duration.least > breakIn.duration.most) add(['breakIn', 'duration'], 'the least time is longer than the most', 'write the shorter one as least');
 
-  release.checks.forEach((id, i) => needCheck(id, ['release', 'checks', i]));
-  release.oilDownstream.checks.forEach((id, i) => needCheck(id, ['release', 'oilDownstream', 'checks', i]));
+  release.checks.forEach((one, i) => needAnswers(one, ['release', 'checks', i]));
+  release.oilDownstream.checks.forEach((one, i) => needAnswers(one, ['release', 'oilDownstream', 'checks', i]));
   release.oilDownstream.when.forEach(({ check, states }, i) => {
     needCheck(check, ['release', 'oilDownstream', 'when', i, 'check']);
     needStates(check, states, ['release', 'oilDownstream', 'when', i, 'states']);
@@ -52,10 +64,7 @@ export function proofProblems({ proof, checks, causes }: Pick<ShapedRulebook, 'p
       else if (before !== undefined) add(path, `"${cause}" is watched by "${before}" already`, 'leave it out of one of the two');
       watched.set(cause, id);
     });
-    readings.forEach(({ check, inOrder }, j) => {
-      needCheck(check, ['watch', 'plans', i, 'readings', j, 'check']);
-      needStates(check, inOrder, ['watch', 'plans', i, 'readings', j, 'inOrder']);
-    });
+    readings.forEach((reading, j) => needAnswers(reading, ['watch', 'plans', i, 'readings', j]));
   });
   const forOthers = watch.plans.filter((plan) => plan.causes.length === 0).length;
   if (forOthers !== 1) add(['watch', 'plans'], `${forOthers === 0 ? 'no plan is' : 'several plans are'} for the causes that no other names`, 'leave the causes of exactly one plan empty');

@@ -179,16 +179,20 @@ const metresSchema = z.number().gt(0).max(1e9);
 const secondsSchema = z.number().gt(0).max(1e9);
 const pascalsSchema = z.number().gt(0).max(1e8);
 
+const releaseCheckSchema = z.strictObject({ check: idSchema, inOrder: idsSchema.min(1) });
+
 const proofSchema = z.strictObject({
+  fitting: z.strictObject({ cautions: idsSchema }),
   breakIn: z.strictObject({
     engineRpm: z.number().gt(0).max(10_000),
     pressure: z.strictObject({ aim: pascalsSchema, low: pascalsSchema, high: pascalsSchema }),
     duration: z.strictObject({ least: secondsSchema, most: secondsSchema }),
+    cautions: idsSchema,
     ...sourced,
   }),
   release: z.strictObject({
-    checks: idsSchema.min(1),
-    oilDownstream: z.strictObject({ when: listOf(z.strictObject({ check: idSchema, states: idsSchema.min(1) }), LIMITS.items), checks: idsSchema }),
+    checks: listOf(releaseCheckSchema, LIMITS.items).min(1),
+    oilDownstream: z.strictObject({ when: listOf(z.strictObject({ check: idSchema, states: idsSchema.min(1) }), LIMITS.items), checks: listOf(releaseCheckSchema, LIMITS.items) }),
   }),
   watch: z.strictObject({
     begin: textsSchema,

@@ -38,6 +38,7 @@ export interface Rulebook {
 
 /** How a new compressor is run in, what is measured before a release, and what is watched afterwards. */
 export interface Proof {
+  fitting: { cautions: string[] };
   breakIn: BreakIn;
   release: ReleasePlan;
   watch: { begin: string[]; plans: WatchPlan[] };
@@ -51,14 +52,21 @@ export interface BreakIn {
   pressure: { aim: number; low: number; high: number };
   /** s under load. */
   duration: { least: number; most: number };
+  cautions: string[];
   basis: Basis;
   source?: string;
 }
 
 /** Checks to be measured after the repair, and those that oil which went downstream adds. */
 export interface ReleasePlan {
-  checks: string[];
-  oilDownstream: { when: { check: string; states: string[] }[]; checks: string[] };
+  checks: ReleaseCheck[];
+  oilDownstream: { when: { check: string; states: string[] }[]; checks: ReleaseCheck[] };
+}
+
+export interface ReleaseCheck {
+  check: string;
+  /** Answers that pass where the organisation adopted no limit. */
+  inOrder: string[];
 }
 
 /** What is read while a repair is watched, how often and for how long, for causes; the one without causes is for all others. */

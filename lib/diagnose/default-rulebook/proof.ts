@@ -22,20 +22,31 @@ const plan = (given: Omit<WatchPlan, 'basis' | 'source' | 'duration' | 'distance
 
 /** How a repair is proved. Intervals and spans are judgement; what is measured and why stands in `docs/default-rulebook.md`. */
 export const proof: Proof = {
+  fitting: {
+    cautions: ['vehicle-rolls', 'cab-not-propped', 'pressure-falls-suspension-brakes', 'stored-air', 'hot-parts', 'scalding-coolant', 'heavy-part', 'belts-fan-gears', 'carbon-fire', 'safety-valve', 'oil-in-brake-system'],
+  },
   breakIn: {
     engineRpm: 1000,
     pressure: { aim: psi(80), low: psi(75), high: psi(85) },
     duration: { least: minutes(20), most: minutes(30) },
+    cautions: ['vehicle-rolls', 'exhaust-fumes', 'oil-mist-and-noise', 'belts-fan-gears', 'hot-parts', 'safety-valve'],
     ...commonPractice,
   },
   release: {
-    checks: ['build-up-time', 'cut-out-pressure', 'cut-in-pressure', 'leak-down-released', 'leak-down-applied', 'low-air-warning'],
+    checks: [
+      { check: 'build-up-time', inOrder: ['quick', 'slow'] },
+      { check: 'cut-out-pressure', inOrder: ['in-range'] },
+      { check: 'cut-in-pressure', inOrder: ['in-range'] },
+      { check: 'leak-down-released', inOrder: ['under-2'] },
+      { check: 'leak-down-applied', inOrder: ['under-3'] },
+      { check: 'low-air-warning', inOrder: ['in-time'] },
+    ],
     oilDownstream: {
       when: [
         { check: 'oil-in-service-tanks', states: ['yes'] },
         { check: 'oil-at-valves', states: ['yes'] },
       ],
-      checks: ['brake-function'],
+      checks: [{ check: 'brake-function', inOrder: ['works'] }],
     },
   },
   watch: {

@@ -4,7 +4,7 @@ import { selectAcknowledgements, selectFindingNotes, selectFindings } from '@/db
 import { selectLastRuns } from '@/db/queries/run';
 import type { RunResult } from '@/db/schema';
 import type { StateParts } from '@/lib/case/build-state';
-import { findingsForRanking } from '@/lib/case/findings-for-ranking';
+import { findingsForRanking, stagesOf } from '@/lib/case/findings-for-ranking';
 import { siteDay } from '@/lib/case/site-day';
 import { rank, type Ranking } from '@/lib/diagnose';
 import { notFound } from '@/lib/errors';
@@ -29,7 +29,8 @@ export async function gatherState(tx: Transaction, ctx: Ctx, { caseId, at = null
   const [run, previous] = await selectLastRuns(tx, { ...of, by: until });
   if (!run) throw notFound('state of the case');
   const { recordFacts } = run.inputs;
-  const ranking = rank(compiled, findingsForRanking(rows), { facts: recordFacts });
+  const findings = findingsForRanking(rows);
+  const ranking = rank(compiled, findings, { facts: recordFacts, stages: stagesOf(findings) });
   const acknowledged = await selectAcknowledgements(tx, { ...of, personId: ctx.person.id, onDay: siteDay(ctx.now(), head.timeZone) });
   return {
     caseHead: head,

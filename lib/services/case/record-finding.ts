@@ -2,6 +2,7 @@ import { lockCase } from '@/db/queries/case';
 import { selectFindings } from '@/db/queries/finding';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { buildState } from '@/lib/case/build-state';
+import type { Stage } from '@/lib/diagnose/types';
 import { conflict, notFound } from '@/lib/errors';
 import { recordFindingInput } from '@/lib/schemas/case';
 import type { CaseState } from '@/lib/schemas/case-view';
@@ -32,7 +33,13 @@ export const recordFinding = defineWrite({
       unchanged();
       return buildState(await gatherState(tx, ctx, { caseId: of.caseId }));
     }
-    if (head.status !== 'open') throw conflict('This case has been called. Reopen it to go on.');
+    refuseOver(head, input.stage);
     return writeFinding({ tx, ctx, audit }, { head, compiled, rows, input });
   },
 });
+
+/** A call ends the diagnosis: what is read at a repair, for a release or in a watch goes on until the case is closed. */
+function refuseOver({ status }: { status: string }, { kind }: Stage): void {
+  if (status === 'closed') throw conflict('This case is closed. Reopen it to go on.');
+  if (status !== 'open' && kind === 'diagnosis') throw conflict('This case has been called. Reopen it to go on.');
+}

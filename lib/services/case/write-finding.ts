@@ -14,7 +14,7 @@ import { vehicleAfter } from '@/lib/case/vehicle-after';
 import { comparedWith } from '@/lib/case/view/usual';
 import type { CompiledRulebook } from '@/lib/diagnose';
 import { cautionsToRead } from '@/lib/diagnose/cautions';
-import type { Check } from '@/lib/diagnose/types';
+import type { Check, Stage } from '@/lib/diagnose/types';
 import { conflict, invalid } from '@/lib/errors';
 import type { z } from 'zod';
 import type { recordFindingInput } from '@/lib/schemas/case';
@@ -24,6 +24,7 @@ import { baselinesOfCase } from '../baseline/of-case';
 import type { Work } from '../define';
 import { limitsOfCase } from '../limit/of-case';
 import { holdAfterAnswer } from '../unit-hold/after-answer';
+import { gatherState } from './gather-state';
 import { makeRun } from './run-of-record';
 import { writingOf } from './writing';
 
@@ -56,7 +57,7 @@ export async function writeFinding({ tx, ctx, audit }: Pick<Work<unknown>, 'tx' 
   const dated = { id: input.id, checkId: input.checkId, stage: input.stage, correctedAt, receivedAt };
   const { standing, late } = arriving(dated, rows);
   const baselines = check.check.compares && answer.valueSi !== null ? await baselinesOfCase(tx, { ...of, head, compiled, now: receivedAt }) : {};
-  const finding = { ...answer, ...dated, baseline: comparedWith(input.checkId, answer, baselines), source: answer.sum ? 'sum' : 'asked', askedBecause: input.askedBecause, late };
+  const finding = { ...answer, ...dated, baseline: comparedWith(input.checkId, answer, baselines), source: sourceOf(input.stage, answer.sum !== null), askedBecause: input.askedBecause, late };
   const written = await insertFinding(tx, {
     ...finding,
     ...of,
@@ -80,6 +81,14 @@ export async function writeFinding({ tx, ctx, audit }: Pick<Work<unknown>, 'tx' 
     at: receivedAt,
   });
 
+  audit({
+    entity: 'finding',
+    entityId: input.id,
+    changed: { caseId: of.caseId, checkId: input.checkId, stage: input.stage, kind: answer.kind, shares: answer.shares, valueTyped: answer.valueTyped },
+  });
+  // A reading for a release or a watch ranks nothing.
+  if (input.stage.kind === 'release' || input.stage.kind === 'watch') return buildState(await gatherState(tx, ctx, of));
+
   const previous = await selectLatestRun(tx, of);
   const run = await makeRun(tx, {
     ...of,
@@ -89,11 +98,6 @@ export async function writeFinding({ tx, ctx, audit }: Pick<Work<unknown>, 'tx' 
     recordFacts: previous?.recordFacts ?? {},
     becauseOf: input.id,
     at: receivedAt,
-  });
-  audit({
-    entity: 'finding',
-    entityId: input.id,
-    changed: { caseId: of.caseId, checkId: input.checkId, kind: answer.kind, shares: answer.shares, valueTyped: answer.valueTyped },
   });
   return buildState({
     compiled,
@@ -107,6 +111,9 @@ export async function writeFinding({ tx, ctx, audit }: Pick<Work<unknown>, 'tx' 
     at: null,
   });
 }
+
+/** What is seen when something is opened comes from the repair, whether it was looked at or worked out. */
+const sourceOf = (stage: Stage, isSum: boolean) => (stage.kind === 'after-remedy' ? 'remedy' : isSum ? 'sum' : 'asked');
 
 export const takenId = () => conflict('This id belongs to another finding.');
 

@@ -28,8 +28,9 @@ function sound(): Rulebook {
     cautions: [{ id: 'hot', text: 'It is hot.', worseWhen: [] }],
     priorVariants: [{ name: 'Young', when: { milesSinceFit: { below: 1000 } }, priors: { worn: 0.1 } }],
     proof: {
-      breakIn: { engineRpm: 1000, pressure: { aim: 5.5e5, low: 5e5, high: 6e5 }, duration: { least: 1200, most: 1800 }, basis: 'judgement' },
-      release: { checks: ['pressure'], oilDownstream: { when: [{ check: 'oil', states: ['yes'] }], checks: ['noise'] } },
+      fitting: { cautions: ['hot'] },
+      breakIn: { cautions: ['hot'], engineRpm: 1000, pressure: { aim: 5.5e5, low: 5e5, high: 6e5 }, duration: { least: 1200, most: 1800 }, basis: 'judgement' },
+      release: { checks: [{ check: 'noise', inOrder: ['none'] }], oilDownstream: { when: [{ check: 'oil', states: ['yes'] }], checks: [{ check: 'oil', inOrder: ['no'] }] } },
       watch: {
         begin: ['The tanks are clean.'],
         plans: [
@@ -271,10 +272,11 @@ describe('checks, causes and the rest', () => {
     ['a variant with an unknown cause', (json) => Object.assign(json.priorVariants?.[0] ?? {}, { priors: { wear: 0.6 } }), 'priorVariants[0].priors.wear', /no cause/],
     ['a band that does not hold its aim', (json) => Object.assign(json.proof?.breakIn.pressure ?? {}, { aim: 7e5 }), 'proof.breakIn.pressure', /not within its band/],
     ['a break-in that ends before it may', (json) => Object.assign(json.proof?.breakIn.duration ?? {}, { least: 3600 }), 'proof.breakIn.duration', /longer than the most/],
-    ['an unknown check of the release', (json) => json.proof?.release.checks.push('pressures'), 'proof.release.checks[1]', /no check/],
+    ['an unknown check of the release', (json) => json.proof?.release.checks.push({ check: 'pressures', inOrder: ['none'] }), 'proof.release.checks[1].check', /no check/],
     ['an unknown answer that means oil downstream', (json) => json.proof?.release.oilDownstream.when[0]?.states.push('ja'), 'proof.release.oilDownstream.when[0].states[1]', /no answer "ja"/],
     ['an unknown cause of a watch', (json) => json.proof?.watch.plans[1]?.causes.push('wear'), 'proof.watch.plans[1].causes[1]', /no cause/],
     ['a cause that two plans watch', (json) => json.proof?.watch.plans[1]?.causes.push('worn'), 'proof.watch.plans[1].causes[1]', /by "wear" already/],
+    ['an unknown caution of a fitting', (json) => json.proof?.fitting.cautions.push('cold'), 'proof.fitting.cautions[1]', /no caution/],
     ['a watch of an unknown answer', (json) => Object.assign(json.proof?.watch.plans[0]?.readings[0] ?? {}, { inOrder: ['ja'] }), 'proof.watch.plans[0].readings[0].inOrder[0]', /no answer "ja"/],
     ['no watch for the causes that none names', (json) => json.proof?.watch.plans.shift(), 'proof.watch.plans', /no plan/],
     ['another version of the shape', (json) => Object.assign(json, { schemaVersion: 2 }), 'schemaVersion', /2 is not known/],

@@ -98,7 +98,7 @@ describe('references between its parts', () => {
     expect([...causeIds].filter((id) => id !== SOMETHING_ELSE && !weighed.has(id))).toEqual([]);
     const tested = new Set(rules.flatMap(({ conditions }) => leaves(conditions).map(({ fact }) => fact)));
     // What is measured for a release alone says nothing of the cause.
-    const proving = new Set([...(defaultRulebook.proof?.release.checks ?? []), ...(defaultRulebook.proof?.release.oilDownstream.checks ?? [])]);
+    const proving = new Set([...(defaultRulebook.proof?.release.checks ?? []), ...(defaultRulebook.proof?.release.oilDownstream.checks ?? [])].map(({ check }) => check));
     expect([...checkIds].filter((id) => !tested.has(id) && !proving.has(id))).toEqual([]);
   });
 
