@@ -11,7 +11,7 @@ import { FormSection } from '@/components/units/FormSection';
 import { MeasureField } from '@/components/units/MeasureField';
 import { termOptions } from '@/lib/schemas/terms';
 import type { UnitPreferences } from '@/lib/units';
-import { MODEL_MEASURE_FIELDS } from './model-measures';
+import { BREAK_IN_FIELDS, MODEL_MEASURE_FIELDS } from './model-measures';
 
 interface Props {
   action: (previous: ActionState<{ id: string }>, form: FormData) => Promise<ActionState<{ id: string }>>;
@@ -50,6 +50,13 @@ export function ModelForm({ action, units, stored, model }: Props) {
           <MeasureField key={measure.field} label={label} hint={hint} required={false} units={units} measure={measure} {...field(measure.field)} />
         ))}
         <TextField label="Cylinders" inputMode="numeric" required={false} {...field('cylinders')} />
+      </FormSection>
+      <FormSection title="Break-in run" hint="Only where its maker says otherwise than the rulebook. What is left open stays as the rulebook has it.">
+        <TextField label="Engine speed" hint="Revolutions a minute" inputMode="numeric" required={false} {...field('breakInEngineRpm')} />
+        {BREAK_IN_FIELDS.map(({ measure, label, hint }) => (
+          <MeasureField key={measure.field} label={label} hint={hint} required={false} units={units} measure={measure} {...field(measure.field)} />
+        ))}
+        <TextField label="Where this is from" autoComplete="off" required={false} {...field('breakInSource')} />
       </FormSection>
       <TextareaField label="Note" required={false} {...field('note')} />
       <div>

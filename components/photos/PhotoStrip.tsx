@@ -9,27 +9,34 @@ import { useCasePhotos } from './PhotosOfCase';
 
 const PhotoDialog = lazy(loadDialog);
 
-/** Photos of a check, or all of the case, and the ways to add one. Has to stand within `PhotosOfCase`. */
-export function PhotoStrip({ checkId = null }: { checkId?: string | null }) {
+interface Props {
+  checkId?: string | null;
+  /** The step or point that they show, and its name. */
+  place?: { id: string; name: string } | null;
+}
+
+/** Photos of a check, of a step of a repair, or all of the case, and the ways to add one. Has to stand within `PhotosOfCase`. */
+export function PhotoStrip({ checkId = null, place = null }: Props) {
   const ofCase = useCasePhotos();
   const progress = useSyncExternalStore(onProgress, readProgress, progressAtFirst);
   const [openId, setOpenId] = useState<string | null>(null);
   if (!ofCase) return null;
 
   const { caseId, reader, timeZone, checkName, photos, readOnly } = ofCase;
-  const all = photos.filter((photo) => checkId === null || photo.checkId === checkId);
+  const ofWhole = checkId === null && place === null;
+  const all = photos.filter((photo) => (checkId === null || photo.checkId === checkId) && (place === null || photo.place === place.id));
   const inSight = all.filter(({ hidden }) => hidden === null);
   const outOfSight = all.filter(({ hidden }) => hidden !== null);
   const open = all.find(({ id }) => id === openId);
-  const about = checkId ? checkName(checkId) : 'of the whole case';
-  const label = checkId === null ? 'photos' : `photos-${checkId}`;
+  const about = place?.name ?? (checkId ? checkName(checkId) : 'of the whole case');
+  const label = ofWhole ? 'photos' : `photos-${place?.id ?? checkId}`;
   const tiles = (some: typeof all) => (
     <ul className="flex flex-wrap items-start gap-3">
       {some.map((photo) => (
         <PhotoTile
           key={photo.id}
           photo={photo}
-          checkName={checkId === null && photo.checkId ? checkName(photo.checkId) : null}
+          checkName={ofWhole && photo.checkId ? checkName(photo.checkId) : null}
           timeZone={timeZone}
           share={progress.get(photo.id)}
           onOpen={() => setOpenId(photo.id)}
@@ -41,10 +48,10 @@ export function PhotoStrip({ checkId = null }: { checkId?: string | null }) {
   if (readOnly && all.length === 0) return null;
   return (
     <section aria-labelledby={label} className="grid gap-3">
-      {checkId === null ? <h2 id={label}>Photos</h2> : <h3 id={label} className="sr-only">Photos of this check</h3>}
+      {ofWhole ? <h2 id={label}>Photos</h2> : <h3 id={label} className="sr-only">Photos{place ? `: ${place.name}` : ' of this check'}</h3>}
       {inSight.length > 0 && tiles(inSight)}
-      {!readOnly && <AddPhotos owner={{ ...reader, caseId, checkId }} about={about} />}
-      {checkId === null && outOfSight.length > 0 && (
+      {!readOnly && <AddPhotos owner={{ ...reader, caseId, checkId, place: place?.id ?? null }} about={about} />}
+      {ofWhole && outOfSight.length > 0 && (
         <details className="disclosure">
           <summary className="min-h-touch py-2 font-bold">{outOfSight.length} hidden</summary>
           {tiles(outOfSight)}

@@ -4,7 +4,7 @@ import { keepPhoto } from '@/lib/offline/photos';
 import { askPhotoWorker } from '@/lib/offline/photos-worker';
 import { newId } from '@/lib/ids';
 
-export type PhotoOwner = Pick<DevicePhoto, 'personId' | 'organisationId' | 'caseId' | 'checkId'>;
+export type PhotoOwner = Pick<DevicePhoto, 'personId' | 'organisationId' | 'caseId' | 'checkId' | 'place'>;
 
 /**
  * Keeps photos on the device, one after another; a file that is none is left out, and the others go on.

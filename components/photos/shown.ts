@@ -15,8 +15,8 @@ export function shownPhotos(stored: readonly PhotoView[], here: readonly DeviceP
   const own = here
     .filter(({ id }) => !known.has(id))
     .map((photo): ShownPhoto => {
-      const { id, caseId, checkId, width, height, takenAt, description, strokes } = photo;
-      return { id, caseId, checkId, width, height, takenAt, description, strokes, person: null, hidden: null, here: photo };
+      const { id, caseId, checkId, place = null, width, height, takenAt, description, strokes } = photo;
+      return { id, caseId, checkId, place, width, height, takenAt, description, strokes, person: null, hidden: null, here: photo };
     });
   return [...stored.map((photo): ShownPhoto => ({ ...photo, here: null })), ...own].sort((a, b) => Date.parse(a.takenAt) - Date.parse(b.takenAt));
 }

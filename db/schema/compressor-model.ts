@@ -32,6 +32,13 @@ export const compressorModel = pgTable(
     driveGear: text(),
     portBoreM: si(),
     lineSizeM: si(),
+    /** How it is run in, where its maker says otherwise than the rulebook; null: as the rulebook has it. */
+    breakInEngineRpm: integer(),
+    breakInPressurePa: si(),
+    breakInLeastS: si(),
+    breakInMostS: si(),
+    /** Where they are from; null: there are none. */
+    breakInSource: text(),
     asTyped: jsonb().$type<Record<string, string>>().notNull().default({}),
     note: text(),
     createdAt: createdAt(),

@@ -17,3 +17,6 @@ export * from './oil-catch';
 export * from './search-entry';
 export * from './mail';
 export * from './repair';
+export * from './fitting';
+export * from './break-in';
+export * from './release';

@@ -21,6 +21,8 @@ export const attachment = pgTable(
     /** The case that shows it, if any, and the check that it was taken for. */
     caseId: uuid(),
     checkId: text(),
+    /** What of a repair or an install record it shows: "step/<repair>/<place>", "install/<point>". */
+    place: text(),
     objectKey: text().notNull(),
     mediaType: text().notNull(),
     bytes: integer().notNull(),

@@ -11,6 +11,8 @@ export interface DevicePhoto {
   organisationId: string;
   caseId: string;
   checkId: string | null;
+  /** The step of a repair, or the point of an install record, that it shows; photos from before there were any have none. */
+  place?: string | null;
   /** Already turned upright, made smaller and rid of what the camera wrote into it. */
   picture: Blob;
   thumbnail: Blob;

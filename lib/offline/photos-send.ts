@@ -20,12 +20,12 @@ const isSame = (a: Marks, b: Marks) => a.description === b.description && JSON.s
  * @throws ApiProblem
  */
 export async function sendPhoto(photo: DevicePhoto): Promise<void> {
-  const { id, caseId, checkId, picture, takenAt, clockOffsetMs } = photo;
+  const { id, caseId, checkId, place = null, picture, takenAt, clockOffsetMs } = photo;
   noteProgress(id, 0);
   try {
     const announced = await api<PhotoStanding>(`/api/v1/cases/${caseId}/photos`, {
       method: 'POST',
-      body: { id, checkId, mediaType: picture.type, bytes: picture.size, takenAt, clockOffsetMs },
+      body: { id, checkId, place, mediaType: picture.type, bytes: picture.size, takenAt, clockOffsetMs },
     });
     if (announced.upload) await upload(announced.upload, picture, (share) => noteProgress(id, share));
     const { state, refusal } = announced.state === 'awaited' ? await sayArrived(id) : announced;

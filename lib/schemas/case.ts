@@ -101,6 +101,13 @@ export const acknowledgeCautionsInput = z.strictObject({
   clockOffsetMs,
 });
 
+/** Work with cautions of its own, besides checks and remedies. */
+export const acknowledgeWorkInput = z.strictObject({
+  caseId,
+  work: z.enum(['fitting', 'break-in']),
+  cautions: z.array(z.strictObject({ id: rowId, cautionId: rulebookId })).min(1).max(20),
+});
+
 export const SURENESS_OF_CALL = ['sure', 'fairly-sure', 'guess'] as const;
 
 export const callCauseInput = z.strictObject({

@@ -20,6 +20,11 @@ const facts = {
   driveGear: optionalTerm('driveGear'),
   portBore: measureText,
   lineSize: measureText,
+  breakInEngineRpm: optionalCount(5000),
+  breakInPressure: measureText,
+  breakInLeast: measureText,
+  breakInMost: measureText,
+  breakInSource: optionalLine(300),
   note: optionalLine(2000),
 };
 

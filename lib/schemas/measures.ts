@@ -28,6 +28,13 @@ export const MODEL_MEASURES = [
   { field: 'lineSize', column: 'lineSizeM', quantity: 'length', like: 'in' },
 ] as const satisfies readonly MeasureField[];
 
+/** How a compressor is run in, where its maker says otherwise than the rulebook. */
+export const BREAK_IN_MEASURES = [
+  { field: 'breakInPressure', column: 'breakInPressurePa', quantity: 'pressure' },
+  { field: 'breakInLeast', column: 'breakInLeastS', quantity: 'duration', like: 'min' },
+  { field: 'breakInMost', column: 'breakInMostS', quantity: 'duration', like: 'min' },
+] as const satisfies readonly MeasureField[];
+
 export const READING_MEASURES = [
   { field: 'odometer', column: 'odometerM', quantity: 'distance' },
   { field: 'engineHours', column: 'engineS', quantity: 'engineHours' },

@@ -2,6 +2,9 @@ import { z } from 'zod';
 import { clockOffsetMs, instant, rowId, rulebookId } from './case';
 import { MOST_PHOTO_BYTES, MOST_POINTS, MOST_STROKES, PHOTO_TYPES } from './photo-limits';
 
+/** What of a repair or an install record a photo shows. */
+const place = z.string().regex(/^(step\/[0-9a-f-]{36}\/\d{1,2}|install\/[a-z0-9-]{1,40})$/, 'This is no place of a repair.');
+
 const description = z.string().trim().max(1000, 'Keep it under 1,000 characters.');
 
 const fraction = z.number().min(0).max(1);
@@ -21,6 +24,8 @@ export const addPhotoInput = z.strictObject({
   caseId: rowId,
   /** The check that it was taken for, if any. */
   checkId: rulebookId.nullish(),
+  /** The step of a repair, or the point of an install record, that it shows, if any. */
+  place: place.nullish(),
   mediaType: z.enum(PHOTO_TYPES, 'A photo is a JPEG, WebP or PNG.'),
   /** Exact length of what will be uploaded. */
   bytes: z.int().min(1).max(MOST_PHOTO_BYTES, `A photo may hold ${MOST_PHOTO_BYTES / 1024 / 1024} MB at most. Make it smaller first.`),
@@ -52,6 +57,7 @@ export const photoView = z.object({
   id: rowId,
   caseId: rowId,
   checkId: z.string().nullable(),
+  place: z.string().nullable(),
   /** In pixels. */
   width: z.int(),
   height: z.int(),

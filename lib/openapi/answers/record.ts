@@ -110,11 +110,16 @@ export const modelAnswer = z
     driveGear: text,
     portBoreM: si('m'),
     lineSizeM: si('m'),
+    breakInEngineRpm: count.nullable(),
+    breakInPressurePa: si('Pa'),
+    breakInLeastS: si('s'),
+    breakInMostS: si('s'),
+    breakInSource: text,
     ...kept,
     hiddenAt: instant.nullable(),
     values: texts(
       'name', 'displacement', 'bore', 'stroke', 'cylinders', 'driveRatio', 'cooling', 'unloading', 'intakeType', 'drainOpening', 'oilFeedPlace',
-      'driveGear', 'portBore', 'lineSize', 'note',
+      'driveGear', 'portBore', 'lineSize', 'breakInEngineRpm', 'breakInPressure', 'breakInLeast', 'breakInMost', 'breakInSource', 'note',
     ),
   })
   .meta({ id: 'CompressorModel' });

@@ -1,3 +1,4 @@
+import type { z } from 'zod';
 import { selectModel } from '@/db/queries/compressor-model';
 import { insertFit, selectFit, selectFitsOfUnit, updateFit, type FitRow } from '@/db/queries/fit';
 import { lockUnit, selectUnit } from '@/db/queries/unit';
@@ -20,36 +21,39 @@ export const createFit = defineWrite({
   doing: 'record fits',
   roles: PERMITTED['unit.edit'],
   input: createFitInput,
-  run: async (work) => {
-    const { tx, ctx, audit, unchanged } = work;
-    const { id, unitId, previousWhyOut, ...typed } = work.input;
-    const organisationId = ctx.organisation.id;
-    await lockUnit(tx, { organisationId, unitId });
-    const unit = await selectUnit(tx, { organisationId, unitId });
-    if (!unit) throw notFound('unit');
-    if (await selectFit(tx, { organisationId, fitId: id })) {
-      unchanged();
-      return { id, unitId };
-    }
-    const columns = fitColumns(ctx, typed, siteDay(ctx.now(), unit.timeZone));
-    await refuseUnknownModel(work, columns.modelId);
-
-    const fits = await selectFitsOfUnit(tx, { organisationId, unitId });
-    const standing = fits.find((fit) => fit.removedOn === null && fit.installedOn <= columns.installedOn);
-    if (previousWhyOut && !standing) throw invalid({ previousWhyOut: 'No compressor was on the unit on that day that could come out. Leave this open.' });
-    if (standing && previousWhyOut) await takeOutFor(work, standing, { ...columns, whyOut: previousWhyOut });
-    else if (standing && overlaps(standing, columns)) {
-      throw invalid({ previousWhyOut: `The ${standing.modelName} fitted on ${dayText(standing.installedOn)} is still on the unit. Say why it comes out.` });
-    }
-    refuseOverlap(fits.filter((fit) => fit !== standing), columns);
-
-    await writeFitReading(work, { ...columns, unitId }, 'installed', typed);
-    await writeFitReading(work, { ...columns, unitId }, 'removed', typed);
-    if (!(await insertFit(tx, { ...columns, organisationId, id, unitId, createdBy: ctx.person.id }))) throw conflict('This id belongs to something else.');
-    audit({ entity: 'fit', entityId: id, changed: { unitId, ...columns } });
-    return { id, unitId };
-  },
+  run: (work) => writeFit(work),
 });
+
+/** Writes a fit with all that follows from it on the unit's record, within whatever made it necessary. */
+export async function writeFit(work: Work<z.output<typeof createFitInput>>): Promise<{ id: string; unitId: string }> {
+  const { tx, ctx, audit, unchanged } = work;
+  const { id, unitId, previousWhyOut, ...typed } = work.input;
+  const organisationId = ctx.organisation.id;
+  await lockUnit(tx, { organisationId, unitId });
+  const unit = await selectUnit(tx, { organisationId, unitId });
+  if (!unit) throw notFound('unit');
+  if (await selectFit(tx, { organisationId, fitId: id })) {
+    unchanged();
+    return { id, unitId };
+  }
+  const columns = fitColumns(ctx, typed, siteDay(ctx.now(), unit.timeZone));
+  await refuseUnknownModel(work, columns.modelId);
+
+  const fits = await selectFitsOfUnit(tx, { organisationId, unitId });
+  const standing = fits.find((fit) => fit.removedOn === null && fit.installedOn <= columns.installedOn);
+  if (previousWhyOut && !standing) throw invalid({ previousWhyOut: 'No compressor was on the unit on that day that could come out. Leave this open.' });
+  if (standing && previousWhyOut) await takeOutFor(work, standing, { ...columns, whyOut: previousWhyOut });
+  else if (standing && overlaps(standing, columns)) {
+    throw invalid({ previousWhyOut: `The ${standing.modelName} fitted on ${dayText(standing.installedOn)} is still on the unit. Say why it comes out.` });
+  }
+  refuseOverlap(fits.filter((fit) => fit !== standing), columns);
+
+  await writeFitReading(work, { ...columns, unitId }, 'installed', typed);
+  await writeFitReading(work, { ...columns, unitId }, 'removed', typed);
+  if (!(await insertFit(tx, { ...columns, organisationId, id, unitId, createdBy: ctx.person.id }))) throw conflict('This id belongs to something else.');
+  audit({ entity: 'fit', entityId: id, changed: { unitId, ...columns } });
+  return { id, unitId };
+}
 
 /** The compressor before comes out on the day, and at the readings, at which the new one goes on. */
 async function takeOutFor(

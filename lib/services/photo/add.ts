@@ -33,6 +33,7 @@ export const addPhoto = defineWrite({
       ownerId: input.caseId,
       caseId: input.caseId,
       checkId: input.checkId ?? null,
+      place: input.place ?? null,
       objectKey: objectKey(organisationId, input.id),
       mediaType: input.mediaType,
       bytes: input.bytes,

@@ -4,7 +4,7 @@ import type { DevicePhoto } from '@/lib/offline/database';
 import type { PhotoView } from '@/lib/schemas/photo';
 
 const stored = (id: string, takenAt: string): PhotoView => ({
-  id, takenAt, caseId: 'case', checkId: null, width: 4, height: 3, person: 'Ada', description: '', strokes: [], hidden: null,
+  id, takenAt, caseId: 'case', checkId: null, place: null, width: 4, height: 3, person: 'Ada', description: '', strokes: [], hidden: null,
 });
 const here = (id: string, takenAt: string, more: Partial<DevicePhoto> = {}): DevicePhoto => ({
   id, takenAt, personId: 'person', organisationId: 'organisation', caseId: 'case', checkId: null, width: 4, height: 3,

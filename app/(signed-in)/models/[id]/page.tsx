@@ -1,6 +1,6 @@
 import type { Metadata } from 'next';
 import Link from 'next/link';
-import { MODEL_MEASURE_FIELDS } from '@/components/models/model-measures';
+import { BREAK_IN_FIELDS, MODEL_MEASURE_FIELDS } from '@/components/models/model-measures';
 import { ButtonLink } from '@/components/ui/Button';
 import { DataTable } from '@/components/ui/DataTable';
 import { DefinitionList } from '@/components/ui/DefinitionList';
@@ -61,6 +61,18 @@ export default async function ModelPage({ params }: { params: Promise<{ id: stri
             ]}
           />
         </section>
+        {model.breakInSource && (
+          <section aria-labelledby="break-in">
+            <h2 id="break-in" className="mb-4">Break-in run</h2>
+            <DefinitionList
+              items={[
+                { term: 'Engine speed', value: model.breakInEngineRpm && `${model.breakInEngineRpm} rpm`, figure: true },
+                ...BREAK_IN_FIELDS.map(({ measure, label }) => ({ term: label, value: measureText(model[measure.column], measure, ctx.person.units), figure: true })),
+                { term: 'Where this is from', value: model.breakInSource },
+              ]}
+            />
+          </section>
+        )}
       </div>
       {units.length > 0 && (
         <section aria-labelledby="on-units" className="mt-12 grid gap-4">
