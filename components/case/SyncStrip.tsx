@@ -49,7 +49,7 @@ function waitsText(unsent: Sync['unsent']): string {
 }
 
 function Refused({ item, rulebook }: { item: Kept; rulebook: RulebookView }) {
-  const checkId = item.kind === 'note' ? null : item.body.checkId;
+  const checkId = item.kind === 'finding' || item.kind === 'acknowledgement' ? item.body.checkId : null;
   return (
     <Notice
       kind="danger"

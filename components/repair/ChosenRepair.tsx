@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import { timeText } from '@/components/case/words';
+import { PhotoStrip } from '@/components/photos/PhotoStrip';
 import type { Option } from '@/components/ui/SelectField';
 import { dayText } from '@/lib/schemas/day-text';
 import type { RepairView, StepMark } from '@/lib/schemas/repair';
@@ -15,13 +16,15 @@ interface Props {
   people: readonly Option[];
   /** Ids for what will be said of the steps, one each. */
   newIds: readonly string[];
+  /** What is seen when it is open. */
+  seen: ReactNode;
   /** By which the reader says that the cautions were read; null: he or she doesn't work on cases. */
   read: ReactNode;
   actions: { planIt: RepairAction; saySo: RepairAction; endIt: RepairAction };
 }
 
 /** A repair that was chosen: for when and whom, and its steps behind its cautions. */
-export function ChosenRepair({ repair, caseId, timeZone, people, newIds, read, actions }: Props) {
+export function ChosenRepair({ repair, caseId, timeZone, people, newIds, seen, read, actions }: Props) {
   const { id, name, plannedOn, assignedTo, assignedToName, whyBefore, chosenBy, chosenAt, steps, toRead } = repair;
   const of = { caseId, repairId: id, about: name };
   const settled = steps.filter(({ mark }) => mark !== null && mark.mark !== 'not-done').length;
@@ -46,10 +49,12 @@ export function ChosenRepair({ repair, caseId, timeZone, people, newIds, read, a
                 <strong>{MARKS[mark.mark]}</strong>{mark.value && <>: <span className="figure">{mark.value}</span></>}{mark.note && `, “${mark.note}”`} <span className="text-[0.9375rem] text-ink-soft">{mark.by}, {timeText(mark.at, timeZone)}</span>
               </p>
             )}
+            {ready && <PhotoStrip place={{ id: `step/${id}/${i}`, name: `step ${i + 1} of ${name}` }} />}
             {ready && <StepForm key={mark?.at ?? 'unsaid'} action={actions.saySo} caseId={caseId} repairId={id} step={i} newId={newIds[i] ?? ''} isMarked={mark !== null} />}
           </li>
         ))}
       </ol>
+      {ready && seen}
       {ready && <EndForms {...of} action={actions.endIt} />}
     </section>
   );

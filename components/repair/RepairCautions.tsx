@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react';
-import { Notice } from '@/components/ui/Notice';
+import { WorkCautions } from '@/components/case/WorkCautions';
 
 interface Props {
   repair: { cautions: readonly { id: string; text: string }[]; toRead: readonly string[] };
@@ -7,14 +7,5 @@ interface Props {
   read: ReactNode;
 }
 
-/** The cautions of a repair, before its steps. Those that are still to be read ask for it. */
-export function RepairCautions({ repair: { cautions, toRead }, read }: Props) {
-  const shown = toRead.length > 0 ? cautions.filter(({ id }) => toRead.includes(id)) : cautions;
-  return (
-    <Notice kind="caution" title={toRead.length > 0 ? 'Read this first' : 'Read today'}>
-      <ul className="ml-5 grid list-disc gap-1">{shown.map(({ id, text }) => <li key={id}>{text}</li>)}</ul>
-      <p className="mt-2 text-[0.9375rem]">The vehicle maker’s information, local rules and a qualified person’s judgement come first. A torque or another value is the maker’s: none is given here.</p>
-      {toRead.length > 0 && <div className="mt-3">{read ?? <p>Its steps are shown to those who work on cases.</p>}</div>}
-    </Notice>
-  );
-}
+/** The cautions of a repair, before its steps. */
+export const RepairCautions = ({ repair: { cautions, toRead }, read }: Props) => <WorkCautions {...{ cautions, toRead, read }} behind="What is done" />;

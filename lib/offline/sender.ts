@@ -11,6 +11,7 @@ const pathOf = (item: Kept): string => {
   const path = `/api/v1/cases/${item.caseId}`;
   if (item.kind === 'finding') return `${path}/findings`;
   if (item.kind === 'acknowledgement') return `${path}/acknowledgements`;
+  if (item.kind === 'break-in') return `${path}/break-ins/${item.runId}/events`;
   return `${path}/findings/${item.findingId}/notes`;
 };
 

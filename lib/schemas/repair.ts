@@ -113,4 +113,8 @@ export interface RepairView {
   cautions: { id: string; text: string }[];
   toRead: string[];
   steps: { text: string; mark: StepMarkView | null }[];
+  /** Which of the case's repairs it is, in the order of choosing, from 1: the stage of what is seen at it. */
+  place: number;
+  /** Checks that tell most when something is opened for it. */
+  looks: string[];
 }

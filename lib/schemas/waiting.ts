@@ -1,3 +1,4 @@
+import type { BreakInEventInput } from './break-in';
 import type { RecordFindingInput } from './case';
 
 interface Common {
@@ -17,4 +18,5 @@ interface Common {
 export type Waiting =
   | (Common & { kind: 'finding'; body: Omit<RecordFindingInput, 'caseId'> & { deviceAt: string; clockOffsetMs: number } })
   | (Common & { kind: 'acknowledgement'; body: { checkId: string; cautions: { id: string; cautionId: string }[]; deviceAt: string; clockOffsetMs: number } })
-  | (Common & { kind: 'note'; findingId: string; body: { id: string; text: string } });
+  | (Common & { kind: 'note'; findingId: string; body: { id: string; text: string } })
+  | (Common & { kind: 'break-in'; runId: string; body: Omit<BreakInEventInput, 'caseId' | 'runId'> & { deviceAt: string; clockOffsetMs: number } });

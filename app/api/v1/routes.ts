@@ -23,6 +23,16 @@ import * as casesIdRepairs from './cases/[id]/repairs/route';
 import * as casesIdRepairsRepairIdEnd from './cases/[id]/repairs/[repairId]/end/route';
 import * as casesIdRepairsRepairIdPlan from './cases/[id]/repairs/[repairId]/plan/route';
 import * as casesIdRepairsRepairIdSteps from './cases/[id]/repairs/[repairId]/steps/route';
+import * as casesIdBreakIns from './cases/[id]/break-ins/route';
+import * as casesIdBreakInsRunIdEnd from './cases/[id]/break-ins/[runId]/end/route';
+import * as casesIdBreakInsRunIdEvents from './cases/[id]/break-ins/[runId]/events/route';
+import * as casesIdBreakInsRunIdHotCheck from './cases/[id]/break-ins/[runId]/hot-check/route';
+import * as casesIdFittings from './cases/[id]/fittings/route';
+import * as casesIdFittingsFittingIdFinish from './cases/[id]/fittings/[fittingId]/finish/route';
+import * as casesIdFittingsFittingIdPoints from './cases/[id]/fittings/[fittingId]/points/route';
+import * as casesIdRelease from './cases/[id]/release/route';
+import * as casesIdReleases from './cases/[id]/releases/route';
+import * as casesIdWorkCautions from './cases/[id]/work-cautions/route';
 import * as casesIdReopen from './cases/[id]/reopen/route';
 import * as casesIdRulebook from './cases/[id]/rulebook/route';
 import * as deviceCases from './device/cases/route';
@@ -90,6 +100,16 @@ export const ROUTES = {
   '/cases/{id}/repairs/{repairId}/end': casesIdRepairsRepairIdEnd,
   '/cases/{id}/repairs/{repairId}/plan': casesIdRepairsRepairIdPlan,
   '/cases/{id}/repairs/{repairId}/steps': casesIdRepairsRepairIdSteps,
+  '/cases/{id}/break-ins': casesIdBreakIns,
+  '/cases/{id}/break-ins/{runId}/end': casesIdBreakInsRunIdEnd,
+  '/cases/{id}/break-ins/{runId}/events': casesIdBreakInsRunIdEvents,
+  '/cases/{id}/break-ins/{runId}/hot-check': casesIdBreakInsRunIdHotCheck,
+  '/cases/{id}/fittings': casesIdFittings,
+  '/cases/{id}/fittings/{fittingId}/finish': casesIdFittingsFittingIdFinish,
+  '/cases/{id}/fittings/{fittingId}/points': casesIdFittingsFittingIdPoints,
+  '/cases/{id}/release': casesIdRelease,
+  '/cases/{id}/releases': casesIdReleases,
+  '/cases/{id}/work-cautions': casesIdWorkCautions,
   '/cases/{id}/reopen': casesIdReopen,
   '/cases/{id}/rulebook': casesIdRulebook,
   '/device/cases': deviceCases,

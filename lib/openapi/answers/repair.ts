@@ -60,6 +60,8 @@ const chosen = z.object({
   cautions: z.array(z.object({ id: z.string(), text: z.string() })),
   toRead: z.array(z.string()).meta({ description: 'Cautions that you have still to acknowledge today.' }),
   steps: z.array(z.object({ text: z.string(), mark: mark.nullable() })),
+  place: z.int().meta({ description: 'Of the case’s repairs, from 1. What is seen at it is of the stage “after-remedy” with this number.' }),
+  looks: z.array(z.string()).meta({ description: 'Checks that tell most when something is opened for it.' }),
 }) satisfies z.ZodType<RepairView>;
 
 export const repairList = z.object({ caseId: id, repairs: z.array(chosen) }).meta({ id: 'RepairList' });

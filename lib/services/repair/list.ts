@@ -1,5 +1,6 @@
 import { selectRepairs, selectSteps } from '@/db/queries/repair';
 import { PERMITTED } from '@/lib/auth/permissions';
+import { checksAtRepair } from '@/lib/case/view/checks-at-repair';
 import { REPAIR_SET_UP } from '@/lib/case/view/repair-plan';
 import { cautionsToRead } from '@/lib/diagnose/cautions';
 import { repairPlanInput, type RepairView } from '@/lib/schemas/repair';
@@ -18,7 +19,7 @@ export const listRepairs = defineRead({
     const { compiled, acknowledged } = await gatherState(tx, ctx, { caseId });
     const cautions = new Map(compiled.rulebook.cautions.map((caution) => [caution.id, caution]));
     const said = await selectSteps(tx, of);
-    const repairs = (await selectRepairs(tx, of)).flatMap(({ chosenAt, endedAt, ...row }): RepairView[] => {
+    const repairs = (await selectRepairs(tx, of)).flatMap(({ chosenAt, endedAt, ...row }, i): RepairView[] => {
       const remedy = compiled.rulebook.remedies.find(({ id }) => id === row.remedyId);
       if (!remedy) return [];
       const marks = lastMarks(said.filter(({ repairId }) => repairId === row.id));
@@ -30,7 +31,9 @@ export const listRepairs = defineRead({
           endedAt: endedAt?.toISOString() ?? null,
           cautions: remedy.cautions.map((id) => ({ id, text: cautions.get(id)?.text ?? id })),
           toRead: cautionsToRead({ cautions: remedy.cautions, setUp: REPAIR_SET_UP }, (id) => cautions.get(id)?.worseWhen ?? [], acknowledged),
-          steps: remedy.steps.map((text, i) => ({ text, mark: markView(marks.get(i)) })),
+          steps: remedy.steps.map((text, step) => ({ text, mark: markView(marks.get(step)) })),
+          place: i + 1,
+          looks: checksAtRepair(compiled, remedy),
         },
       ];
     });

@@ -9,7 +9,7 @@ const NO_RULEBOOK = {} as Rulebook;
 
 /** One row in every table that belongs to an organisation; organisation, site, person and membership are there. */
 export async function insertOneRowEach(tx: Transaction, { organisationId, siteId, personId }: { organisationId: string; siteId: string; personId: string }) {
-  const [unitId, modelId, fitId, editionId, caseId, findingId, setId, catchId, repairId] = [newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId()];
+  const [unitId, modelId, fitId, editionId, caseId, findingId, setId, catchId, repairId, fittingId, runId] = [newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId()];
   const of = { organisationId };
   await tx.insert(schema.invitation).values({ ...of, id: newId(), roles: ['technician'], expiresAt: AT, invitedBy: personId });
   await tx.insert(schema.compressorModel).values({ ...of, id: modelId, name: 'Model' });
@@ -41,6 +41,12 @@ export async function insertOneRowEach(tx: Transaction, { organisationId, siteId
   await tx.insert(schema.mail).values({ ...of, id: newId(), kind: 'notice', toAddress: 'somebody@people.test', subject: 'Test', body: 'Words', entity: 'unit', entityId: unitId });
   await tx.insert(schema.repair).values({ ...of, id: repairId, caseId, remedyId: 'r', chosenAt: AT, chosenBy: personId });
   await tx.insert(schema.repairStep).values({ ...of, id: newId(), repairId, caseId, step: 0, mark: 'done', personId, at: AT });
+  await tx.insert(schema.fitting).values({ ...of, id: fittingId, caseId, fitId, startedAt: AT, startedBy: personId });
+  await tx.insert(schema.installAnswer).values({ ...of, id: newId(), fittingId, caseId, pointId: 'sealant', answer: 'none', personId, at: AT });
+  const figures = { engineRpm: 1000, pressure: { aim: 5.5e5, low: 5e5, high: 6e5 }, duration: { least: 1200, most: 1800 }, from: 'edition' as const, source: null };
+  await tx.insert(schema.breakInRun).values({ ...of, id: runId, caseId, fitId, figures, startedAt: AT, startedBy: personId });
+  await tx.insert(schema.breakInEvent).values({ ...of, id: newId(), runId, caseId, kind: 'resume', personId, at: AT, receivedAt: AT });
+  await tx.insert(schema.release).values({ ...of, id: newId(), caseId, unitId, releasedAt: AT, releasedBy: personId, on: [] });
   await tx.insert(schema.savedView).values({ ...of, id: newId(), personId, list: 'cases', name: 'Mine', query: 'whose=me' });
   await tx.insert(schema.removal).values({ ...of, id: newId(), entity: 'unit', entityId: unitId, kind: 'hide', reason: 'Test', personId, at: AT });
   await tx.insert(schema.audit).values({ ...of, id: newId(), action: 'test', entity: 'unit', entityId: unitId, changed: {} });

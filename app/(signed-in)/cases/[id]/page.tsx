@@ -5,6 +5,7 @@ import { AssignForm } from '@/components/case/AssignForm';
 import { CallForm } from '@/components/case/CallForm';
 import { Calls } from '@/components/case/Calls';
 import { CaseDesk } from '@/components/case/CaseDesk';
+import { CaseNav } from '@/components/case/CaseNav';
 import { Catching } from '@/components/case/Catching';
 import { HAND_COOKIE, handFrom } from '@/components/case/hand';
 import { ReopenForm } from '@/components/case/ReopenForm';
@@ -74,7 +75,7 @@ export default async function CasePage({ params, searchParams }: Props) {
       <section aria-labelledby="call" className="mt-12 grid gap-4 border-t-2 border-ink pt-6">
         <h2 id="call">The call</h2>
         {view.calls.length > 0 && <Calls calls={view.calls} rulebook={rulebook} timeZone={head.timeZone} />}
-        {state.status === 'called' && <p className="no-print"><ButtonLink variant="quiet" href={`/cases/${head.id}/repair`}>The repair plan</ButtonLink></p>}
+        {state.at === null && state.status !== 'open' && <CaseNav caseId={head.id} here="" />}
         {works && state.status === 'open' && <div className="no-print"><CallForm action={callFromForm} callId={newId()} initial={state} rulebook={rulebook} /></div>}
         {works && state.status !== 'open' && <div className="no-print"><ReopenForm action={reopenFromForm} eventId={newId()} caseId={head.id} /></div>}
         {view.calls.length === 0 && <p className={works ? 'hidden print:block' : undefined}>Not called.</p>}

@@ -4,12 +4,14 @@ import { openCase } from '@/lib/services/case/open';
 import { acknowledgeRepair } from '@/lib/services/repair/acknowledge';
 import { chooseRepair } from '@/lib/services/repair/choose';
 import { readRepairPlan } from '@/lib/services/repair/read-plan';
+import { readCautions } from '@/tests/integration/cases/support';
 import { feature, type Made } from '../row';
 
 const SEE = PERMITTED['case.see'];
 const WORK = PERMITTED['case.work'];
 const PAGE = '(signed-in)/cases/[id]/repair';
 const CASE = 'api/v1/cases/[id]';
+const CHECK = 'oil-in-wet-tank';
 
 const ofRepair = ({ caseId = '', repairId = '' }: Made) => ({ id: caseId, repairId });
 
@@ -22,12 +24,15 @@ export const repairs = feature({
     const [first, second] = (await readRepairPlan({ ctx, input: { caseId } })).remedies;
     const remedyId = first?.remedyId ?? '';
     await acknowledgeRepair({ ctx, input: { caseId, remedyId, cautions: (first?.toRead ?? []).map((cautionId) => ({ id: newId(), cautionId })) } });
+    await readCautions(ctx, caseId, CHECK);
     await chooseRepair({ ctx, input: { id: repairId, caseId, remedyId } });
     return { caseId, repairId, remedyId, caution: first?.cautions[0]?.id ?? '', otherRemedy: second?.remedyId ?? '', personId: ctx.person.id };
   },
   rows: [
     { page: PAGE, roles: SEE, params: ({ caseId }) => ({ id: caseId }) },
     { action: PAGE, name: 'readRepairCautions', roles: WORK, form: ({ caseId, remedyId, caution }) => ({ caseId, remedyId, cautions: [caution] }) },
+    { action: PAGE, name: 'readCheckCautions', roles: WORK, form: ({ caseId }) => ({ caseId, checkId: CHECK, cautions: ['oil-mist-and-noise'] }) },
+    { action: PAGE, name: 'see', roles: WORK, form: ({ caseId }) => ({ id: newId(), caseId, checkId: CHECK, stage: 'after-remedy', remedy: '1', kind: 'state', state: 'yes', sureness: 'sure' }) },
     { action: PAGE, name: 'choose', roles: WORK, form: ({ caseId, otherRemedy, personId }) => ({ id: newId(), caseId, remedyId: otherRemedy, whyBefore: 'Seen', plannedOn: '2026-03-03', assignedTo: personId }) },
     { action: PAGE, name: 'planIt', roles: WORK, form: ({ caseId, repairId, personId }) => ({ caseId, repairId, plannedOn: '2026-03-04', assignedTo: personId }) },
     { action: PAGE, name: 'saySo', roles: WORK, form: ({ caseId, repairId }) => ({ id: newId(), caseId, repairId, step: '0', mark: 'done', value: '30 lb·ft', note: 'by the maker’s sheet' }) },

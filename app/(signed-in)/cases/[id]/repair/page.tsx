@@ -1,5 +1,9 @@
 import type { Metadata } from 'next';
+import { CaseNav } from '@/components/case/CaseNav';
+import { CheckAtStage } from '@/components/case/CheckAtStage';
 import { ReadCautionsForm } from '@/components/case/ReadCautionsForm';
+import { PhotosOfCase } from '@/components/photos/PhotosOfCase';
+import { SeenAtRepair } from '@/components/repair/SeenAtRepair';
 import { moneyText } from '@/components/repair/money';
 import { ChosenRepair, EndedRepairs } from '@/components/repair/ChosenRepair';
 import { PlannedRemedy } from '@/components/repair/PlannedRemedy';
@@ -10,12 +14,14 @@ import { orNotFound, pageContext } from '@/lib/auth/page';
 import { may, PERMITTED } from '@/lib/auth/permissions';
 import { newId } from '@/lib/ids';
 import { percent } from '@/lib/schemas/percent';
-import type { RepairPlanView } from '@/lib/schemas/repair';
+import type { RepairPlanView, RepairView } from '@/lib/schemas/repair';
 import { listAssignable } from '@/lib/services/case/assignable';
 import { readCase } from '@/lib/services/case/read';
 import { listRepairs } from '@/lib/services/repair/list';
 import { readRepairPlan } from '@/lib/services/repair/read-plan';
-import { choose, endIt, planIt, readRepairCautions, saySo } from './actions';
+import { listPhotos } from '@/lib/services/photo/list';
+import { QueryProvider } from '@/lib/query/provider';
+import { choose, endIt, planIt, readCheckCautions, readRepairCautions, saySo, see } from './actions';
 
 export const metadata: Metadata = { title: 'Repair plan' };
 
@@ -23,7 +29,8 @@ export const metadata: Metadata = { title: 'Repair plan' };
 export default async function RepairPage({ params }: { params: Promise<{ id: string }> }) {
   const ctx = await pageContext(PERMITTED['case.see']);
   const { id } = await params;
-  const { head, rulebook, state } = await orNotFound(readCase({ ctx, input: { caseId: id } }));
+  const view = await orNotFound(readCase({ ctx, input: { caseId: id } }));
+  const { head, rulebook, state } = view;
   const plan = await readRepairPlan({ ctx, input: { caseId: id } });
   const { repairs } = await listRepairs({ ctx, input: { caseId: id } });
   const people = (await listAssignable({ ctx, input: {} })).map((person) => ({ value: person.id, label: person.name }));
@@ -33,19 +40,30 @@ export default async function RepairPage({ params }: { params: Promise<{ id: str
   const open = plan.remedies.filter(({ remedyId }) => !atHand.some((repair) => repair.remedyId === remedyId));
   const read = ({ remedyId, name, toRead }: { remedyId: string; name: string; toRead: string[] }) =>
     works ? <ReadCautionsForm action={readRepairCautions} of={{ caseId, remedyId }} about={name} cautionIds={toRead} /> : null;
+  const seen = ({ name, place, looks }: RepairView) => (
+    <SeenAtRepair
+      about={name}
+      checks={looks.flatMap((checkId) => rulebook.checks[checkId] ?? [])}
+      seen={state.findings.filter(({ stage, current }) => current && stage.kind === 'after-remedy' && stage.remedy === place)}
+      timeZone={head.timeZone}
+      form={(check) => <CheckAtStage {...{ view, check }} stage={{ kind: 'after-remedy', remedy: place }} newId={newId()} actions={{ readCautions: readCheckCautions, answer: see }} />}
+    />
+  );
   return (
-    <>
+    <QueryProvider>
       <PageHeader
         title="Repair plan"
         breadcrumbs={[{ label: 'Cases', href: '/cases' }, { label: `Case ${head.number}: ${head.unit.fleetNumber}`, href: `/cases/${caseId}` }]}
         lead="In the order of least expected cost, as the ranking stands now. Each answer can change it."
       />
+      <CaseNav caseId={caseId} here="/repair" />
+      <PhotosOfCase view={view} initial={await listPhotos({ ctx, input: { caseId } })}>
       <div className="grid max-w-4xl gap-8">
         {atHand.length > 0 && (
           <section aria-labelledby="at-hand" className="grid gap-6">
             <h2 id="at-hand">At hand</h2>
             {atHand.map((repair) => (
-              <ChosenRepair key={repair.id} {...{ repair, caseId, people }} timeZone={head.timeZone} newIds={repair.steps.map(() => newId())} read={read(repair)} actions={{ planIt, saySo, endIt }} />
+              <ChosenRepair key={repair.id} {...{ repair, caseId, people }} timeZone={head.timeZone} newIds={repair.steps.map(() => newId())} seen={seen(repair)} read={read(repair)} actions={{ planIt, saySo, endIt }} />
             ))}
           </section>
         )}
@@ -69,7 +87,8 @@ export default async function RepairPage({ params }: { params: Promise<{ id: str
         <Reckoning plan={plan} />
         <EndedRepairs repairs={repairs.filter(({ endedAt }) => endedAt !== null)} timeZone={head.timeZone} />
       </div>
-    </>
+      </PhotosOfCase>
+    </QueryProvider>
   );
 }
 
