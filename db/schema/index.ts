@@ -17,3 +17,5 @@ export * from './oil-catch';
 export * from './search-entry';
 export * from './mail';
 export * from './repair';
+export * from './dossier';
+export * from './claim';
