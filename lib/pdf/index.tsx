@@ -1,0 +1,56 @@
+import { Document, Page, Text, View, renderToBuffer } from '@react-pdf/renderer';
+import type { DossierContent } from '@/lib/schemas/dossier-content';
+import type { Paper } from '@/lib/schemas/dossier';
+import { Block, Facts, type Pictures } from './blocks';
+import { registerFonts } from './fonts';
+import { printable } from './printable';
+import { MARGIN_PT, style } from './style';
+
+interface Asked {
+  content: DossierContent;
+  contentHash: string;
+  paper: Paper;
+  madeAt: Date;
+  pictures: Pictures;
+}
+
+/** In points. */
+const PAPERS = { a4: { size: 'A4', widthPt: 595.28 }, letter: { size: 'LETTER', widthPt: 612 } } as const satisfies Record<Paper, { size: string; widthPt: number }>;
+
+/** A dossier as a PDF. The same content gives the same bytes: made again, it is the same file. */
+export function dossierPdf({ content, contentHash, paper, madeAt, pictures }: Asked): Promise<Buffer> {
+  registerFonts();
+  const { size, widthPt } = PAPERS[paper];
+  const { reference, organisation, title, head, sections, leftOut, caution } = content;
+  return renderToBuffer(
+    <Document title={printable(`${reference}: ${title}`)} author={printable(organisation)} subject={`SHA-256 ${contentHash}`} creator="Carryover" producer="Carryover" language="en" creationDate={madeAt} modificationDate={madeAt}>
+      <Page size={size} style={style.page}>
+        <View style={style.top}>
+          <Text style={style.reference}>{reference}</Text>
+          <Text style={style.title}>{printable(title)}</Text>
+          <Text>{printable(organisation)}</Text>
+        </View>
+        <Facts block={{ kind: 'facts', facts: [...head, ...(leftOut.length > 0 ? [{ term: 'Left out by its maker', value: leftOut.join('; ') }] : [])] }} />
+        {sections.map((section) => (
+          <View key={section.id} style={style.section}>
+            <Text style={style.h2} minPresenceAhead={60}>{printable(section.title)}</Text>
+            {section.blocks.map((block, i) => (
+              <Block key={i} block={block} pictures={pictures} widthPt={widthPt - 2 * MARGIN_PT} />
+            ))}
+          </View>
+        ))}
+        <View style={style.caution} wrap={false}>
+          <Text>{printable(caution)}</Text>
+        </View>
+        <View style={style.foot} fixed>
+          <View style={style.footLine}>
+            <Text>{printable(`${reference}, ${organisation}`)}</Text>
+            <Text render={({ pageNumber, totalPages }) => `page ${pageNumber} of ${totalPages}`} />
+          </View>
+          <Text>The ranking is advice. The makers’ information and local rules come first.</Text>
+          <Text style={style.hash}>SHA-256 of the content {contentHash}</Text>
+        </View>
+      </Page>
+    </Document>,
+  );
+}
