@@ -25,31 +25,31 @@ export function dossierPdf({ content, contentHash, paper, madeAt, pictures }: As
   return renderToBuffer(
     <Document title={printable(`${reference}: ${title}`)} author={printable(organisation)} subject={`SHA-256 ${contentHash}`} creator="Carryover" producer="Carryover" language="en" creationDate={madeAt} modificationDate={madeAt}>
       <Page size={size} style={style.page}>
-        <View style={style.top}>
-          <Text style={style.reference}>{reference}</Text>
-          <Text style={style.title}>{printable(title)}</Text>
-          <Text>{printable(organisation)}</Text>
-        </View>
-        <Facts block={{ kind: 'facts', facts: [...head, ...(leftOut.length > 0 ? [{ term: 'Left out by its maker', value: leftOut.join('; ') }] : [])] }} />
-        {sections.map((section) => (
-          <View key={section.id} style={style.section}>
-            <Text style={style.h2} minPresenceAhead={60}>{printable(section.title)}</Text>
-            {section.blocks.map((block, i) => (
-              <Block key={i} block={block} pictures={pictures} widthPt={widthPt - 2 * MARGIN_PT} />
-            ))}
+        <View style={style.body}>
+          <View style={style.top}>
+            <Text style={style.reference}>{reference}</Text>
+            <Text style={style.title}>{printable(title)}</Text>
+            <Text>{printable(organisation)}</Text>
           </View>
-        ))}
-        <View style={style.caution} wrap={false}>
-          <Text>{printable(caution)}</Text>
+          <Facts block={{ kind: 'facts', facts: [...head, ...(leftOut.length > 0 ? [{ term: 'Left out by its maker', value: leftOut.join('; ') }] : [])] }} />
+          {sections.map((section) => (
+            <View key={section.id} style={style.section}>
+              <Text style={style.h2} minPresenceAhead={60}>{printable(section.title)}</Text>
+              {section.blocks.map((block, i) => (
+                <Block key={i} block={block} pictures={pictures} widthPt={widthPt - 2 * MARGIN_PT} />
+              ))}
+            </View>
+          ))}
+          <View style={style.caution} wrap={false}>
+            <Text>{printable(caution)}</Text>
+          </View>
         </View>
         <View style={style.foot} fixed>
-          <View style={style.footLine}>
-            <Text>{printable(`${reference}, ${organisation}`)}</Text>
-            <Text render={({ pageNumber, totalPages }) => `page ${pageNumber} of ${totalPages}`} />
-          </View>
+          <Text>{printable(`${reference}, ${organisation}`)}</Text>
           <Text>The ranking is advice. The makers’ information and local rules come first.</Text>
           <Text style={style.hash}>SHA-256 of the content {contentHash}</Text>
         </View>
+        <Text style={style.pageNumber} fixed render={({ pageNumber, totalPages }) => `page ${pageNumber} of ${totalPages}`} />
       </Page>
     </Document>,
   );

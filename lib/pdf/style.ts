@@ -12,7 +12,9 @@ const families = (names: string[]) => names as unknown as string;
 export const MARGIN_PT = 42;
 
 export const style = StyleSheet.create({
-  page: { fontFamily: families(TEXT), fontSize: 9.5, lineHeight: 1.35, color: INK, paddingTop: MARGIN_PT, paddingHorizontal: MARGIN_PT, paddingBottom: 74 },
+  page: { fontFamily: families(TEXT), fontSize: 9.5, color: INK, paddingTop: MARGIN_PT, paddingHorizontal: MARGIN_PT, paddingBottom: 74 },
+  // Not of the page: a number of pages, which is set at the end, would take no room.
+  body: { lineHeight: 1.35 },
   top: { borderBottomWidth: 1.5, borderColor: INK, paddingBottom: 8, marginBottom: 10 },
   title: { fontSize: 19, fontWeight: 700, lineHeight: 1.2 },
   reference: { fontFamily: families(FIGURES), fontSize: 12, fontWeight: 700 },
@@ -37,7 +39,7 @@ export const style = StyleSheet.create({
   photo: { marginBottom: 10 },
   caution: { borderWidth: 1, borderColor: INK, padding: 6, marginTop: 14, fontSize: 9 },
   foot: { position: 'absolute', bottom: 26, left: MARGIN_PT, right: MARGIN_PT, borderTopWidth: 0.75, borderColor: INK, paddingTop: 4, fontSize: 7.5, color: SOFT },
-  footLine: { flexDirection: 'row', justifyContent: 'space-between' },
+  pageNumber: { position: 'absolute', bottom: 48, left: MARGIN_PT, right: MARGIN_PT, textAlign: 'right', fontSize: 7.5, color: SOFT },
   hash: { fontFamily: families(FIGURES), fontSize: 6.8 },
 });
 

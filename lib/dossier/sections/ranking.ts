@@ -16,7 +16,7 @@ export interface RankingPart {
 
 const LEAST_P = 0.01;
 const [FEWEST, MOST] = [3, 8];
-/** Causes whose reasons are told, and how many of each: those that decide. */
+/** Causes whose reasons are told, and how many of each: those that decide. What barely counts is for the case's own page. */
 const [EXPLAINED, REASONS] = [3, 6];
 
 export function rankingSection({ at, isOfCall, editionNumber, causes }: RankingPart, { timeZone }: Writer): DossierBlock[] {
@@ -30,7 +30,7 @@ export function rankingSection({ at, isOfCall, editionNumber, causes }: RankingP
         name,
         p,
         printed: percent(p),
-        reasons: i < EXPLAINED ? reasons.slice(0, REASONS).map(({ finding, direction, strength, note }) => `${finding}: counts ${strengthText(direction, strength)}. ${note}`) : [],
+        reasons: i < EXPLAINED ? reasons.filter(({ strength }) => strength !== 'barely').slice(0, REASONS).map(({ finding, direction, strength, note }) => `${finding}: counts ${strengthText(direction, strength)}. ${note}`) : [],
       })),
     },
     ...(rest > 0 ? text(`All other causes together: ${percent(rest)}.`) : []),
