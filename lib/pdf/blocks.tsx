@@ -1,7 +1,7 @@
 import { Image, Polyline, Rect, Svg, Text, View } from '@react-pdf/renderer';
 import type { DossierBlock, DossierPhoto } from '@/lib/schemas/dossier-content';
 import { printable } from './printable';
-import { INK, style } from './style';
+import { INK, style, WITH_HEADING_PT } from './style';
 
 /** The reduced picture of a photo, as a JPEG. */
 export type Pictures = (photoId: string) => Buffer | undefined;
@@ -14,7 +14,7 @@ export function Block({ block, pictures, widthPt }: { block: DossierBlock; pictu
     case 'text':
       return <Text style={block.quiet ? style.quiet : style.text}>{printable(block.text)}</Text>;
     case 'heading':
-      return <Text style={style.h3} minPresenceAhead={40}>{printable(block.text)}</Text>;
+      return <Text style={style.h3} minPresenceAhead={WITH_HEADING_PT}>{printable(block.text)}</Text>;
     case 'facts':
       return <Facts block={block} />;
     case 'table':

@@ -1,10 +1,11 @@
+import { Fragment } from 'react';
 import { Document, Page, Text, View, renderToBuffer } from '@react-pdf/renderer';
 import type { DossierContent } from '@/lib/schemas/dossier-content';
 import type { Paper } from '@/lib/schemas/dossier';
 import { Block, Facts, type Pictures } from './blocks';
 import { registerFonts } from './fonts';
 import { printable } from './printable';
-import { MARGIN_PT, style } from './style';
+import { MARGIN_PT, style, WITH_HEADING_PT, WITH_PHOTOS_PT } from './style';
 
 interface Asked {
   content: DossierContent;
@@ -32,13 +33,14 @@ export function dossierPdf({ content, contentHash, paper, madeAt, pictures }: As
             <Text>{printable(organisation)}</Text>
           </View>
           <Facts block={{ kind: 'facts', facts: [...head, ...(leftOut.length > 0 ? [{ term: 'Left out by its maker', value: leftOut.join('; ') }] : [])] }} />
+          {/* Side by side and in no frame of their own: what stands first in a frame is never taken on to the next page. */}
           {sections.map((section) => (
-            <View key={section.id} style={style.section}>
-              <Text style={style.h2} minPresenceAhead={60}>{printable(section.title)}</Text>
+            <Fragment key={section.id}>
+              <Text style={style.h2} minPresenceAhead={section.blocks[0]?.kind === 'photos' ? WITH_PHOTOS_PT : WITH_HEADING_PT}>{printable(section.title)}</Text>
               {section.blocks.map((block, i) => (
                 <Block key={i} block={block} pictures={pictures} widthPt={widthPt - 2 * MARGIN_PT} />
               ))}
-            </View>
+            </Fragment>
           ))}
           <View style={style.caution} wrap={false}>
             <Text>{printable(caution)}</Text>
