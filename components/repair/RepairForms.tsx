@@ -2,7 +2,8 @@
 
 import type { ActionState } from '@/lib/auth/form';
 import { Form } from '@/components/forms/Form';
-import { useForm } from '@/components/forms/use-form';
+import { Hidden } from '@/components/forms/Hidden';
+import { useOwnForm } from '@/components/forms/use-own-form';
 import { Disclosure } from '@/components/ui/Disclosure';
 import { SelectField, type Option } from '@/components/ui/SelectField';
 import { SubmitButton } from '@/components/ui/SubmitButton';
@@ -17,18 +18,6 @@ interface Of {
   /** Its name, because a page has several. */
   about: string;
   people: readonly Option[];
-}
-
-const Hidden = ({ values }: { values: Record<string, string> }) => Object.entries(values).map(([name, value]) => <input key={name} type="hidden" name={name} value={value} readOnly />);
-
-/** A form of which a page has several: a field's name is not its id, and its errors lead to its own fields. */
-function useOwnForm(action: RepairAction, key: string) {
-  const form = useForm(action);
-  const idOf = (name: string) => `${name}-${key}`;
-  return {
-    form: { ...form, errors: Object.fromEntries(Object.entries(form.errors).map(([name, text]) => [idOf(name), text])) },
-    field: (name: string, stored?: string | null) => ({ ...form.field(name, stored), id: idOf(name) }),
-  };
 }
 
 export function ChooseForm({ action, caseId, about, people, newId, remedyId, isFirst }: Of & { newId: string; remedyId: string; isFirst: boolean }) {

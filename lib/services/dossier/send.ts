@@ -39,7 +39,7 @@ export const sendDossier = defineWrite({
     });
     const written = await insertSending(tx, { ...of, id, dossierId, toAddress: to, words, mailId, sentBy: ctx.person.id, at });
     if (!written) throw conflict('This id belongs to another sending.');
-    audit({ entity: 'dossier', entityId: dossierId, changed: { reference: row.reference, to } });
+    audit({ entity: 'dossier', entityId: dossierId, changed: { reference: row.reference, sendingId: id } });
     return { id, dossierId };
   },
 });
@@ -59,7 +59,7 @@ export const sendDossierAgain = defineWrite({
     else {
       await reviveMail(tx, { organisationId, mailId: sending.mailId });
       await ctx.jobs.send(tx, 'send-mail', { organisationId, mailId: sending.mailId });
-      audit({ entity: 'dossier', entityId: dossierId, changed: { reference: row.reference, to: sending.to } });
+      audit({ entity: 'dossier', entityId: dossierId, changed: { reference: row.reference, sendingId } });
     }
     return { id: sendingId, dossierId };
   },
