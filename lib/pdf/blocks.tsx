@@ -107,8 +107,7 @@ function Photo({ photo, data, columnPt }: { photo: DossierPhoto; data: Buffer | 
     <View style={[style.photo, { width: columnPt }]} wrap={false}>
       {data && (
         <View style={{ width, height }}>
-          {/* Nothing of the library keeps it after it is set. A picture on paper has its caption and no other text.
-          eslint-disable-next-line jsx-a11y/alt-text */}
+          {/* eslint-disable-next-line jsx-a11y/alt-text -- on paper a picture has its caption; nothing of the library keeps it after it is set */}
           <Image src={{ data, format: 'jpg' }} cache={false} style={{ width, height }} />
           <Svg viewBox={`0 0 ${width} ${height}`} style={{ position: 'absolute', left: 0, top: 0, width, height }}>
             {photo.strokes.flatMap(({ points }, i) => {
