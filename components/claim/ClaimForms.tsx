@@ -70,7 +70,7 @@ export function SendCoreForm({ action, caseId, currency, newId, fits }: Of & { n
   return (
     <Form form={form} label="Keep a core" errorTitle="Not kept yet" saved="Kept.">
       <Hidden values={{ id: newId, caseId }} />
-      <SelectField label="Which compressor went back" placeholder="Not in the record" required={false} options={fits} {...field('fitId')} />
+      <SelectField label="Which compressor went back" placeholder="Not in the record" required={false} options={fits} {...field('whichFit')} />
       <Row>
         <TextField label="To whom it went" autoComplete="off" required {...field('toWhom')} />
         <TextField label="Sent on" type="date" required {...field('sentOn')} />

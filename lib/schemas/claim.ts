@@ -33,7 +33,7 @@ export const sendCoreInput = z.strictObject({
   id: rowId,
   caseId: rowId,
   /** The compressor that went back, where it is in the record. */
-  fitId: optionalId,
+  whichFit: optionalId,
   toWhom: line('to whom it went', 120),
   sentOn: day('the day on which it was sent'),
   expectedAmount: optionalAmount,

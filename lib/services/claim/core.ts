@@ -14,7 +14,7 @@ export const sendCore = defineWrite({
   doing: 'keep core credits',
   roles: PERMITTED['case.work'],
   input: sendCoreInput,
-  run: async ({ tx, ctx, input: { id, caseId, ...sent }, audit, unchanged }) => {
+  run: async ({ tx, ctx, input: { id, caseId, whichFit: fitId, ...about }, audit, unchanged }) => {
     const of = { organisationId: ctx.organisation.id, caseId };
     const { head } = await lockCaseOf(tx, of);
     const known = await lockCore(tx, { ...of, coreId: id });
@@ -23,9 +23,10 @@ export const sendCore = defineWrite({
       unchanged();
       return { id, caseId };
     }
+    const sent = { ...about, fitId };
     refuseFutureDay({ sentOn: sent.sentOn }, siteDay(ctx.now(), head.timeZone));
-    const fit = sent.fitId === null ? undefined : await selectFit(tx, { ...of, fitId: sent.fitId });
-    if (sent.fitId !== null && fit?.unitId !== head.unitId) throw invalid({ fitId: 'Choose a compressor of this unit.' });
+    const fit = fitId === null ? undefined : await selectFit(tx, { ...of, fitId });
+    if (fitId !== null && fit?.unitId !== head.unitId) throw invalid({ whichFit: 'Choose a compressor of this unit.' });
     if (!(await insertCore(tx, { ...of, id, ...sent, createdBy: ctx.person.id }))) throw conflict('This id belongs to another core.');
     audit({ entity: 'core-credit', entityId: id, changed: { caseId, ...sent } });
     return { id, caseId };

@@ -26,7 +26,7 @@ export type Gathered = Omit<DossierParts, 'about'> & { head: NonNullable<Awaited
  *
  * @throws AppError "not-found" for a case that isn't there
  */
-export async function gatherParts(tx: Transaction, ctx: Ctx, caseId: string): Promise<Gathered> {
+export async function gatherParts(tx: Transaction, ctx: Pick<Ctx, 'organisation' | 'person'>, caseId: string): Promise<Gathered> {
   const organisationId = ctx.organisation.id;
   const of = { organisationId, caseId };
   const head = await selectCaseHead(tx, of);

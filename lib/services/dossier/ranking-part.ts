@@ -20,7 +20,7 @@ interface Asked {
 }
 
 /** The ranking that stood when the cause was called, made again from what its run kept, with its reasons; or that of now. */
-export async function rankingPart(tx: Transaction, ctx: Ctx, { caseId, runId, rows, notes, causeName }: Asked): Promise<DossierParts['ranking']> {
+export async function rankingPart(tx: Transaction, ctx: Pick<Ctx, 'organisation' | 'person'>, { caseId, runId, rows, notes, causeName }: Asked): Promise<DossierParts['ranking']> {
   const organisationId = ctx.organisation.id;
   const id = runId ?? (await selectLatestRun(tx, { organisationId, caseId }))?.id;
   const run = id === undefined ? undefined : await selectRun(tx, { organisationId, runId: id });

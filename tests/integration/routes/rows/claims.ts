@@ -18,14 +18,14 @@ export const claims = feature({
     const [caseId, claimId, coreId] = [newId(), newId(), newId()];
     await openCase({ ctx, input: { id: caseId, unit: { kind: 'new', id: newId(), fleetNumber: caseId, siteId: tenant.siteId, vehicleKind: 'truck' }, complaints: ['complaint-oil'] } });
     await fileClaim({ ctx, input: { id: claimId, caseId, toWhom: 'The desk', theirReference: '', sentOn: LONG_AGO, amount: '480' } });
-    await sendCore({ ctx, input: { id: coreId, caseId, fitId: '', toWhom: 'The desk', sentOn: LONG_AGO, expectedAmount: '' } });
+    await sendCore({ ctx, input: { id: coreId, caseId, whichFit: '', toWhom: 'The desk', sentOn: LONG_AGO, expectedAmount: '' } });
     return { caseId, claimId, coreId };
   },
   rows: [
     { page: PAGE, roles: SEE, params: ({ caseId }) => ({ id: caseId }) },
     { action: PAGE, name: 'keepClaim', roles: WORK, form: ({ caseId }) => ({ id: newId(), caseId, toWhom: 'A supplier', theirReference: 'RMA 7', sentOn: LONG_AGO, amount: '98,50' }) },
     { action: PAGE, name: 'endClaim', roles: WORK, form: ({ caseId, claimId }) => ({ caseId, claimId, state: 'part-paid', settledOn: LONG_AGO, settledAmount: '200', why: 'Labour is not covered' }) },
-    { action: PAGE, name: 'keepCore', roles: WORK, form: ({ caseId }) => ({ id: newId(), caseId, fitId: '', toWhom: 'A supplier', sentOn: LONG_AGO, expectedAmount: '120' }) },
+    { action: PAGE, name: 'keepCore', roles: WORK, form: ({ caseId }) => ({ id: newId(), caseId, whichFit: '', toWhom: 'A supplier', sentOn: LONG_AGO, expectedAmount: '120' }) },
     { action: PAGE, name: 'endCore', roles: WORK, form: ({ caseId, coreId }) => ({ caseId, coreId, state: 'refused', settledOn: LONG_AGO, creditedAmount: '', why: 'Cracked' }) },
 
     { route: `${CASE}/claims`, method: 'GET', roles: SEE, params: ({ caseId }) => ({ id: caseId }) },

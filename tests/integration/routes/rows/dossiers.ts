@@ -47,8 +47,8 @@ export const dossiers = feature({
     { route: DOSSIERS, method: 'POST', roles: WORK, params: ({ caseId }) => ({ id: caseId }), body: () => ({ id: newId(), paper: 'a4', leaveOut: ['photos'], withholdFleet: true }) },
     { route: `${DOSSIERS}/[dossierId]`, method: 'GET', roles: SEE, params: ofDossier },
     { route: `${DOSSIERS}/[dossierId]/pdf`, method: 'GET', roles: SEE, params: ofDossier },
-    { route: `${DOSSIERS}/[dossierId]/again`, method: 'POST', roles: WORK, params: ({ caseId, failedId }) => ({ id: caseId, dossierId: failedId }), body: () => ({}) },
+    { route: `${DOSSIERS}/[dossierId]/again`, method: 'POST', roles: WORK, params: ({ caseId, failedId }) => ({ id: caseId, dossierId: failedId }) },
     { route: `${DOSSIERS}/[dossierId]/sendings`, method: 'POST', roles: WORK, params: ofDossier, body: () => ({ id: newId(), to: 'supplier@people.test', words: 'As agreed' }) },
-    { route: `${DOSSIERS}/[dossierId]/sendings/[sendingId]/again`, method: 'POST', roles: WORK, params: (made) => ({ ...ofDossier(made), sendingId: made.sendingId ?? '' }), body: () => ({}) },
+    { route: `${DOSSIERS}/[dossierId]/sendings/[sendingId]/again`, method: 'POST', roles: WORK, params: (made) => ({ ...ofDossier(made), sendingId: made.sendingId ?? '' }) },
   ],
 });
