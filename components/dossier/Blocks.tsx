@@ -1,4 +1,5 @@
 import { Marks } from '@/components/photos/Marks';
+import { classes } from '@/components/ui/classes';
 import { SightGlass } from '@/components/ui/SightGlass';
 import type { DossierBlock, DossierContent, DossierPhoto } from '@/lib/schemas/dossier-content';
 
@@ -10,7 +11,7 @@ export function DossierSections({ content: { sections } }: { content: DossierCon
     <section key={id} aria-labelledby={`section-${id}`} className="grid gap-3">
       <h2 id={`section-${id}`} className="border-b border-ink pb-1">{title}</h2>
       {blocks.map((block, i) => (
-        <Block key={i} block={block} about={title} />
+        <Block key={i} block={block} about={`${title}, part ${i + 1}`} />
       ))}
     </section>
   ));
@@ -53,11 +54,11 @@ export const Facts = ({ facts }: { facts: readonly { term: string; value: string
 /** Wider than a phone, it is moved by itself and not the page. */
 const Table = ({ block: { columns, rows }, about }: { block: Of<'table'>; about: string }) => (
   <div className="overflow-x-auto" role="region" aria-label={about} tabIndex={0}>
-    <table className="w-full min-w-[36rem] text-left align-top print:min-w-0">
+    <table className="w-full min-w-[36rem] text-left print:min-w-0">
       <thead>
         <tr>
           {columns.map(({ title }) => (
-            <th key={title} scope="col">{title}</th>
+            <th key={title} scope="col" className="label border-b border-ink py-1 pr-4 align-bottom">{title}</th>
           ))}
         </tr>
       </thead>
@@ -65,7 +66,7 @@ const Table = ({ block: { columns, rows }, about }: { block: Of<'table'>; about:
         {rows.map(({ cells, note, strong }, i) => (
           <tr key={i} className={strong ? 'font-bold' : undefined}>
             {columns.map(({ title, figure, share }, at) => (
-              <td key={title} className={figure ? 'figure' : undefined} style={{ width: `${share}%` }}>
+              <td key={title} className={classes('border-b border-rule py-2 pr-4 align-top', figure && 'figure')} style={{ width: `${share}%` }}>
                 {cells[at]}
                 {at === 0 && note !== null && <span className="block text-[0.9375rem] font-normal text-ink-soft">{note}</span>}
               </td>

@@ -48,7 +48,7 @@ function FileHash({ onHash }: { onHash: (hash: string) => void }) {
     <div className="grid gap-1">
       <label htmlFor={id} className="font-bold">The PDF that you hold</label>
       <p id={`${id}-hint`} className="text-[0.9375rem] text-ink-soft">It stays on this device: only its hash is sent.</p>
-      <input id={id} type="file" accept="application/pdf" aria-describedby={`${id}-hint`} onChange={(event) => void read(event)} className="min-h-touch py-2" />
+      <input id={id} type="file" accept="application/pdf" aria-describedby={`${id}-hint`} onChange={(event) => void read(event)} className="min-h-touch w-full min-w-0 py-2" />
       {problem && <p role="alert">{problem}</p>}
     </div>
   );
