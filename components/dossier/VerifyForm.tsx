@@ -23,7 +23,7 @@ export function VerifyForm({ action }: { action: (previous: ActionState<Verified
       <Form form={form} label="Verify a dossier" errorTitle="Not looked up yet">
         <TextField label="Reference" hint="At the head of the dossier" autoComplete="off" autoCapitalize="characters" required {...form.field('reference')} />
         <FileHash onHash={setHash} />
-        <TextField label="Hash (SHA-256)" hint="Filled in from the file, or as it is printed" autoComplete="off" autoCapitalize="none" spellCheck={false} className="figure" required {...form.field('hash')} key={hash} defaultValue={hash || form.field('hash').defaultValue} />
+        <TextField label="Hash (SHA-256)" hint="Filled in from the file, or as it is printed" autoComplete="off" autoCapitalize="none" spellCheck={false} required {...form.field('hash')} key={hash} defaultValue={hash || form.field('hash').defaultValue} />
         <div>
           <SubmitButton pendingLabel="Looking…">Verify</SubmitButton>
         </div>
@@ -48,7 +48,7 @@ function FileHash({ onHash }: { onHash: (hash: string) => void }) {
     <div className="grid gap-1">
       <label htmlFor={id} className="font-bold">The PDF that you hold</label>
       <p id={`${id}-hint`} className="text-[0.9375rem] text-ink-soft">It stays on this device: only its hash is sent.</p>
-      <input id={id} type="file" accept="application/pdf" aria-describedby={`${id}-hint`} onChange={(event) => void read(event)} className="min-h-touch w-full min-w-0 py-2" />
+      <input id={id} type="file" accept="application/pdf" aria-describedby={`${id}-hint`} onChange={(event) => void read(event)} className="w-full min-w-0 py-1 file:mr-4 file:min-h-touch file:cursor-pointer file:rounded file:border file:border-edge file:bg-transparent file:px-5" />
       {problem && <p role="alert">{problem}</p>}
     </div>
   );
