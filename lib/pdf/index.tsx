@@ -3,7 +3,7 @@ import { Document, Page, Text, View, renderToBuffer } from '@react-pdf/renderer'
 import type { DossierContent } from '@/lib/schemas/dossier-content';
 import type { Paper } from '@/lib/schemas/dossier';
 import { Block, Facts, type Pictures } from './blocks';
-import { registerFonts } from './fonts';
+import { readyFonts } from './fonts';
 import { printable } from './printable';
 import { MARGIN_PT, style, WITH_HEADING_PT, WITH_PHOTOS_PT } from './style';
 
@@ -20,7 +20,7 @@ const PAPERS = { a4: { size: 'A4', widthPt: 595.28 }, letter: { size: 'LETTER', 
 
 /** A dossier as a PDF. The same content gives the same bytes: made again, it is the same file. */
 export function dossierPdf({ content, contentHash, paper, madeAt, pictures }: Asked): Promise<Buffer> {
-  registerFonts();
+  readyFonts();
   const { size, widthPt } = PAPERS[paper];
   const { reference, organisation, title, head, sections, leftOut, caution } = content;
   return renderToBuffer(

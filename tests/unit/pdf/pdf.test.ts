@@ -33,6 +33,19 @@ describe('the PDF of a dossier', () => {
     }
   });
 
+  it('keeps every letter, whatever was set before it in the same process', async () => {
+    // Signs that are drawn of parts, which are left in memory when a font is embedded: ; of . and ,
+    const signs = 'Äöü: ; “½ ÷ ± %” i! ? : …';
+    const source = "model commercial driver's licence manual, section 5.3, as states print it (driver's check)";
+    const complaint = (words: string) => ({ complaint: { ...parts().complaint, words } });
+    const first = await made('a4', complaint(source));
+    await made('a4', complaint(signs));
+    const again = await made('a4', complaint(source));
+    expect(again.equals(first)).toBe(true);
+    const { text } = await extractText(await opened(again), { mergePages: true });
+    expect(text.replace(/\s+/g, ' ')).toContain(source);
+  });
+
   it('embeds its fonts', async () => {
     const bytes = (await made('a4')).toString('latin1');
     expect(bytes).toContain('/FontFile');
