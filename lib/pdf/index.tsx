@@ -18,8 +18,19 @@ interface Asked {
 /** In points. */
 const PAPERS = { a4: { size: 'A4', widthPt: 595.28 }, letter: { size: 'LETTER', widthPt: 612 } } as const satisfies Record<Paper, { size: string; widthPt: number }>;
 
-/** A dossier as a PDF. The same content gives the same bytes: made again, it is the same file. */
-export function dossierPdf({ content, contentHash, paper, madeAt, pictures }: Asked): Promise<Buffer> {
+let last: Promise<unknown> = Promise.resolve();
+
+/**
+ * A dossier as a PDF. The same content gives the same bytes: made again, it is the same file. One after another, because
+ * the library has one set of fonts for all of a process.
+ */
+export function dossierPdf(asked: Asked): Promise<Buffer> {
+  const made = last.then(() => setOnPaper(asked));
+  last = made.catch(() => undefined);
+  return made;
+}
+
+function setOnPaper({ content, contentHash, paper, madeAt, pictures }: Asked): Promise<Buffer> {
   readyFonts();
   const { size, widthPt } = PAPERS[paper];
   const { reference, organisation, title, head, sections, leftOut, caution } = content;
