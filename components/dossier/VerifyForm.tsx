@@ -15,15 +15,18 @@ const day = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeStyle: 'sh
 /** A file's hash is worked out on the device: the file stays there. */
 export function VerifyForm({ action }: { action: (previous: ActionState<Verified>, form: FormData) => Promise<ActionState<Verified>> }) {
   const form = useForm(action);
-  const [hash, setHash] = useState('');
+  const [reference, hash] = [form.field('reference'), form.field('hash')];
+  // Kept as they stand when the answer has come, to be put right or tried with another file.
+  const [typed, setTyped] = useState({ reference: reference.defaultValue, hash: hash.defaultValue });
+  const type = (name: keyof typeof typed) => ({ target }: ChangeEvent<HTMLInputElement>) => setTyped((before) => ({ ...before, [name]: target.value }));
   return (
     <>
       <h2 className="sr-only">What came of it</h2>
       <div role="status">{form.result && <Outcome verified={form.result} />}</div>
       <Form form={form} label="Verify a dossier" errorTitle="Not looked up yet">
-        <TextField label="Reference" hint="At the head of the dossier" autoComplete="off" autoCapitalize="characters" required {...form.field('reference')} />
-        <FileHash onHash={setHash} />
-        <TextField label="Hash (SHA-256)" hint="Filled in from the file, or as it is printed" autoComplete="off" autoCapitalize="none" spellCheck={false} required {...form.field('hash')} key={hash} defaultValue={hash || form.field('hash').defaultValue} />
+        <TextField label="Reference" hint="At the head of the dossier" autoComplete="off" autoCapitalize="characters" required name="reference" error={reference.error} value={typed.reference} onChange={type('reference')} />
+        <FileHash onHash={(ofFile) => setTyped((before) => ({ ...before, hash: ofFile }))} />
+        <TextField label="Hash (SHA-256)" hint="Filled in from the file, or as it is printed" autoComplete="off" autoCapitalize="none" spellCheck={false} required name="hash" error={hash.error} value={typed.hash} onChange={type('hash')} />
         <div>
           <SubmitButton pendingLabel="Looking…">Verify</SubmitButton>
         </div>
