@@ -79,6 +79,16 @@ const ROWS = [
     because: 'What was typed is read, and what was found is marked, the same wherever it is shown.',
   },
   {
+    folder: 'lib/dossier/**',
+    never: [...FRAMEWORK, ...DATABASE, 'node:fs', 'fs', 'fs/*', 'path', ...APPLICATION, ...OTHER_LIBRARIES('schemas', 'diagnose', 'units'), '@/lib/pdf'],
+    because: 'What a dossier says is written from parts, handed to it: the same parts always give the same words.',
+  },
+  {
+    folder: 'lib/pdf/**',
+    never: [...DATABASE, ...APPLICATION, 'next', 'next/*', 'next-auth', ...OTHER_LIBRARIES('schemas')],
+    because: 'A PDF is set from what a document says.',
+  },
+  {
     folder: 'lib/stopwatch/**',
     never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES(), 'zod'],
     because: 'A stopwatch is times of the clock, handed to it.',

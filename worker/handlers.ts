@@ -1,5 +1,6 @@
 import type { JobData, JobName } from '@/lib/jobs';
 import type { Attempt } from '@/lib/jobs/attempt';
+import { makeDossierPdf } from '@/lib/services/dossier/make-pdf';
 import { sendMail, type Post } from '@/lib/services/mail/send';
 import { remindOfWeighing } from '@/lib/services/oil-catch/remind';
 import { mailPasswordReset } from '@/lib/services/password/mail-reset';
@@ -13,6 +14,7 @@ export const handlers = (post: Post): Handlers => ({
   'send-mail': (data, attempt) => sendMail(post, data, attempt),
   'mail-password-reset': (data, attempt) => mailPasswordReset(post, data, attempt),
   'make-thumbnail': (data) => makeThumbnail(post, data),
+  'make-dossier': (data, attempt) => makeDossierPdf(post, data, attempt),
   'remind-weighing': (data) => remindOfWeighing(post, data),
   sweep: () => sweep(post),
 });

@@ -34,6 +34,7 @@ export async function startWork(boss: PgBoss, handlers: Handlers): Promise<void>
   for (let i = 0; i < 2; i++) await work(boss, 'send-mail', handlers['send-mail']);
   await work(boss, 'mail-password-reset', handlers['mail-password-reset']);
   await work(boss, 'make-thumbnail', handlers['make-thumbnail']);
+  await work(boss, 'make-dossier', handlers['make-dossier']);
   await work(boss, 'remind-weighing', handlers['remind-weighing']);
   await work(boss, 'sweep', handlers.sweep);
   for (const [name, cron] of Object.entries(SCHEDULES)) await boss.schedule(name, cron);

@@ -3,7 +3,8 @@
 import type { ActionState } from '@/lib/auth/form';
 import { Form } from '@/components/forms/Form';
 import { useForm } from '@/components/forms/use-form';
-import { Hidden, useOwnForm } from '@/components/forms/use-own-form';
+import { Hidden } from '@/components/forms/Hidden';
+import { useOwnForm } from '@/components/forms/use-own-form';
 import { Disclosure } from '@/components/ui/Disclosure';
 import { RadioGroup } from '@/components/ui/RadioGroup';
 import { SubmitButton } from '@/components/ui/SubmitButton';

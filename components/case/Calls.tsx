@@ -1,14 +1,7 @@
 import { Tag } from '@/components/ui/Tag';
+import { PROOF_WORDS, SURENESS_WORDS } from '@/lib/schemas/call-words';
 import type { CallView, RulebookView } from '@/lib/schemas/case-view';
 import { timeText } from './words';
-
-const SURENESS: Record<string, string> = { sure: 'sure', 'fairly-sure': 'fairly sure', guess: 'a guess' };
-const PROOF: Record<string, string> = {
-  none: 'not proved yet',
-  seen: 'seen',
-  isolated: 'isolated: one remedy alone, and it held',
-  'held-with-others': 'held with others',
-};
 
 /** Every call of a case, the standing one marked. */
 export function Calls({ calls, rulebook, timeZone }: { calls: CallView[]; rulebook: RulebookView; timeZone: string }) {
@@ -25,7 +18,7 @@ export function Calls({ calls, rulebook, timeZone }: { calls: CallView[]; rulebo
           {call.contributingCauses.length > 0 && <p>With: {call.contributingCauses.map(nameOf).join(', ')}</p>}
           {call.whyNotLeading && <p>Why not the leading cause: {call.whyNotLeading}</p>}
           <p className="text-[0.9375rem] text-ink-soft">
-            {SURENESS[call.sureness] ?? call.sureness}; {PROOF[call.proof] ?? call.proof}. {call.person}, {timeText(call.at, timeZone)}
+            {SURENESS_WORDS[call.sureness] ?? call.sureness}; {PROOF_WORDS[call.proof] ?? call.proof}. {call.person}, {timeText(call.at, timeZone)}
           </p>
         </li>
       ))}

@@ -2,7 +2,8 @@
 
 import type { ActionState } from '@/lib/auth/form';
 import { Form } from '@/components/forms/Form';
-import { Hidden, useOwnForm } from '@/components/forms/use-own-form';
+import { Hidden } from '@/components/forms/Hidden';
+import { useOwnForm } from '@/components/forms/use-own-form';
 import { RadioGroup } from '@/components/ui/RadioGroup';
 import { SubmitButton } from '@/components/ui/SubmitButton';
 import { TextField } from '@/components/ui/TextField';

@@ -3,7 +3,7 @@
 import type { ActionState } from '@/lib/auth/form';
 import { Form } from '@/components/forms/Form';
 import { useForm } from '@/components/forms/use-form';
-import { Hidden } from '@/components/forms/use-own-form';
+import { Hidden } from '@/components/forms/Hidden';
 import { SubmitButton } from '@/components/ui/SubmitButton';
 import { TextField } from '@/components/ui/TextField';
 

@@ -2,7 +2,8 @@
 
 import type { ActionState } from '@/lib/auth/form';
 import { Form } from '@/components/forms/Form';
-import { Hidden, useOwnForm } from '@/components/forms/use-own-form';
+import { Hidden } from '@/components/forms/Hidden';
+import { useOwnForm } from '@/components/forms/use-own-form';
 import { Disclosure } from '@/components/ui/Disclosure';
 import { SelectField, type Option } from '@/components/ui/SelectField';
 import { SubmitButton } from '@/components/ui/SubmitButton';

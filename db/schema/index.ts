@@ -20,3 +20,5 @@ export * from './repair';
 export * from './fitting';
 export * from './break-in';
 export * from './release';
+export * from './dossier';
+export * from './claim';

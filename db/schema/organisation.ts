@@ -18,6 +18,8 @@ export const organisation = pgTable(
     labourRatePerHour: si(),
     /** Next case number; taken under a row lock so that numbers have no gaps a customer would ask about. */
     nextCaseNumber: integer().notNull().default(1),
+    /** The same of its dossiers. */
+    nextDossierNumber: integer().notNull().default(1),
     isDemo: boolean().notNull().default(false),
     createdAt: createdAt(),
   },

@@ -35,7 +35,7 @@ export function compare({ a, b }: { a: () => unknown; b: () => unknown }, turns:
   return compareMeasured({ a: () => timed(a), b: () => timed(b) }, turns);
 }
 
-/** The same where each turn says by itself how long it took, in ms. */
+/** The same where each turn says by itself how long it took, in ms, or how much of something else. */
 export async function compareMeasured(
   { a, b }: { a: () => Promise<number>; b: () => Promise<number> },
   { pairs = 40, warmUp = 5 }: Turns = {},

@@ -5,6 +5,7 @@
 import { answers } from './answers';
 import { casePage } from './case-page';
 import { compare, compareMeasured, type Ratio } from './compare';
+import { dossierMemory } from './dossier';
 import { whatIfs } from './what-ifs';
 
 const shown = ({ median, low, high }: Ratio) => `${median.toFixed(2)} (${low.toFixed(2)} to ${high.toFixed(2)})`;
@@ -31,6 +32,15 @@ function report(name: string, ratio: Ratio, holds: boolean, limit: string) {
   console.log(`\nAn answer: ${about}\n  with its ranking ${ms(measured.a)}\n  insert and audit ${ms(measured.b)}`);
   report('p50', measured.ratio, measured.ratio.low <= 4, 'at most 4');
   report('p95', measured.ratioP95, measured.ratioP95.low <= 4, 'at most 4');
+}
+
+{
+  const { many, few, about, close } = await dossierMemory();
+  const measured = await compareMeasured({ a: many, b: few }, { pairs: 3, warmUp: 0 });
+  await close();
+  const mib = ({ p50 }: { p50: number }) => `${p50.toFixed(0)} MiB at the most`;
+  console.log(`\nThe PDF of a dossier: ${about}\n  many             ${mib(measured.a)}\n  few              ${mib(measured.b)}`);
+  report('peak memory', measured.ratio, measured.ratio.low <= 2, 'at most 2');
 }
 
 {

@@ -6,6 +6,8 @@ export interface Places {
   calledCase?: string;
   /** The address of a case at a past moment. */
   pastMoment?: string;
+  /** The address of a dossier. */
+  dossier?: string;
   unit?: string;
   /** The address of a fit. */
   fit?: string;
@@ -32,7 +34,13 @@ export async function findPlaces(go: Go): Promise<Places> {
   const limit = await firstId(await go('technician', '/settings/limits'), '/settings/limits/');
   const person = await firstId(await go('administrator', '/settings/people'), '/settings/people/');
   const site = await firstId(await go('administrator', '/settings/sites'), '/settings/sites/');
-  return { openCase, calledCase, pastMoment, unit, fit, model, limit, person, site };
+  const dossier = await dossierOf(go, calledCase);
+  return { openCase, calledCase, pastMoment, dossier, unit, fit, model, limit, person, site };
+}
+
+/** The first dossier of a case that was called. */
+async function dossierOf(go: Go, caseId: string | undefined): Promise<string | undefined> {
+  return caseId && (await firstHref(await go('technician', `/cases/${caseId}/dossier`), new RegExp(`/cases/${ID}/dossier/${ID}$`)));
 }
 
 /** The second of the moments that the API tells of: something was asked, and much was still to come. */

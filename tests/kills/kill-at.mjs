@@ -44,7 +44,7 @@ Socket.prototype.push = function (chunk, ...rest) {
   return push.call(this, chunk, ...rest);
 };
 
-await Promise.all(['pg-boss', 'pg', 'drizzle-orm/node-postgres', 'nodemailer', '@aws-sdk/client-s3', '@aws-sdk/s3-presigned-post', '@aws-sdk/s3-request-presigner', 'sharp', 'zod', 'pino'].map((name) => import(name)));
+await Promise.all(['pg-boss', 'pg', 'drizzle-orm/node-postgres', 'nodemailer', '@aws-sdk/client-s3', '@aws-sdk/s3-presigned-post', '@aws-sdk/s3-request-presigner', 'sharp', '@react-pdf/renderer', 'zod', 'pino'].map((name) => import(name)));
 process.send('ready');
 orders = await new Promise((resolve) => process.once('message', resolve));
 Object.assign(process.env, orders.env);

@@ -1,12 +1,16 @@
+import { createHash } from 'node:crypto';
 import { sql } from 'drizzle-orm';
 import sharp from 'sharp';
 import { asTenant } from '@/db/connect';
 import { attachment, attempt } from '@/db/schema';
 import { newId } from '@/lib/ids';
 import { jobs, type JobName } from '@/lib/jobs';
+import { makeDossier } from '@/lib/services/dossier/make';
+import { dossierKey } from '@/lib/services/dossier/object-key';
 import { viewInvitation } from '@/lib/services/invitation/accept';
 import { invite } from '@/lib/services/invitation/invite';
 import { viewPasswordReset } from '@/lib/services/password/reset';
+import { objectKey } from '@/lib/services/photo/object-key';
 import { startCatch } from '@/lib/services/oil-catch/start';
 import { makeWorkshop, openACase, readCautions } from '@/tests/integration/cases/support';
 import type { TestDatabases } from '@/tests/support/context';
@@ -141,6 +145,35 @@ export const KINDS: Readonly<Record<JobName, Tasks>> = {
           return problemsOf({
             'is a picture that can be opened': small !== undefined && (await sharp(small).metadata()).width > 0,
             'was noted in the audit once': (await countOf(ground, sql`select count(*)::int as count from audit where action = 'make.thumbnail' and entity_id = ${photoId}`, organisationId)) === 1,
+          });
+        },
+      };
+    };
+  },
+
+  'make-dossier': async (ground) => {
+    const { databases, storage } = ground;
+    const workshop = await makeWorkshop(databases, { storage: storage.storage });
+    const { ctx, organisationId, personId, asOwner } = workshop;
+    const caseId = await openACase(workshop);
+    const photoId = newId();
+    await storage.storage.put(objectKey(organisationId, photoId), await sharp({ create: { width: 640, height: 480, channels: 3, background: '#c86' } }).jpeg().toBuffer(), 'image/jpeg');
+    await asOwner((tx) => tx.insert(attachment).values({ organisationId, id: photoId, ownerKind: 'case', ownerId: caseId, caseId, objectKey: objectKey(organisationId, photoId), mediaType: 'image/jpeg', bytes: 1, width: 640, height: 480, state: 'stored', personId }));
+    return async () => {
+      const dossierId = newId();
+      await makeDossier({ ctx, input: { id: dossierId, caseId, paper: 'a4' } });
+      const count = (query: ReturnType<typeof sql>) => countOf(ground, query, organisationId);
+      const isNoted = async () => (await count(sql`select count(*)::int as count from dossier where id = ${dossierId} and state = 'made'`)) === 1;
+      return {
+        marker: dossierId,
+        isNoted,
+        problems: async () => {
+          const pdf = await storage.storage.get(dossierKey(organisationId, dossierId));
+          const hash = pdf && createHash('sha256').update(pdf).digest('hex');
+          return problemsOf({
+            'is noted as made': await isNoted(),
+            'is the file whose hash was noted': (await count(sql`select count(*)::int as count from dossier_seal where dossier_id = ${dossierId} and kind = 'pdf' and hash = ${hash ?? ''}`)) === 1,
+            'was noted in the audit once': (await count(sql`select count(*)::int as count from audit where action = 'make.dossier-pdf' and entity_id = ${dossierId}`)) === 1,
           });
         },
       };

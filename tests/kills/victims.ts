@@ -37,6 +37,8 @@ export async function openVictims({ ready }: { ready: number }) {
     root,
     logLevel: 'silent',
     resolve: { alias: { '@': root } },
+    // As in production, whatever the tests call themselves.
+    oxc: { jsx: { runtime: 'automatic', development: false } },
     build: { ssr: 'worker/index.ts', outDir: folder, target: 'node20', rollupOptions: { output: { entryFileNames: 'worker.mjs' } } },
   });
   const alive = new Set<ChildProcess>();

@@ -10,6 +10,16 @@ import * as casesIdCatchesCatchIdEnd from './cases/[id]/catches/[catchId]/end/ro
 import * as casesIdCatchesCatchIdReminder from './cases/[id]/catches/[catchId]/reminder/route';
 import * as casesIdCatchesCatchIdWeighings from './cases/[id]/catches/[catchId]/weighings/route';
 import * as casesIdCatchesCatchIdWeighingsWeighingIdTakeBack from './cases/[id]/catches/[catchId]/weighings/[weighingId]/take-back/route';
+import * as casesIdClaims from './cases/[id]/claims/route';
+import * as casesIdClaimsClaimIdSettle from './cases/[id]/claims/[claimId]/settle/route';
+import * as casesIdCores from './cases/[id]/cores/route';
+import * as casesIdCoresCoreIdSettle from './cases/[id]/cores/[coreId]/settle/route';
+import * as casesIdDossiers from './cases/[id]/dossiers/route';
+import * as casesIdDossiersDossierId from './cases/[id]/dossiers/[dossierId]/route';
+import * as casesIdDossiersDossierIdAgain from './cases/[id]/dossiers/[dossierId]/again/route';
+import * as casesIdDossiersDossierIdPdf from './cases/[id]/dossiers/[dossierId]/pdf/route';
+import * as casesIdDossiersDossierIdSendings from './cases/[id]/dossiers/[dossierId]/sendings/route';
+import * as casesIdDossiersDossierIdSendingsSendingIdAgain from './cases/[id]/dossiers/[dossierId]/sendings/[sendingId]/again/route';
 import * as casesIdEvents from './cases/[id]/events/route';
 import * as casesIdFindings from './cases/[id]/findings/route';
 import * as casesIdFindingsFindingIdNotes from './cases/[id]/findings/[findingId]/notes/route';
@@ -87,6 +97,16 @@ export const ROUTES = {
   '/cases/{id}/catches/{catchId}/reminder': casesIdCatchesCatchIdReminder,
   '/cases/{id}/catches/{catchId}/weighings': casesIdCatchesCatchIdWeighings,
   '/cases/{id}/catches/{catchId}/weighings/{weighingId}/take-back': casesIdCatchesCatchIdWeighingsWeighingIdTakeBack,
+  '/cases/{id}/claims': casesIdClaims,
+  '/cases/{id}/claims/{claimId}/settle': casesIdClaimsClaimIdSettle,
+  '/cases/{id}/cores': casesIdCores,
+  '/cases/{id}/cores/{coreId}/settle': casesIdCoresCoreIdSettle,
+  '/cases/{id}/dossiers': casesIdDossiers,
+  '/cases/{id}/dossiers/{dossierId}': casesIdDossiersDossierId,
+  '/cases/{id}/dossiers/{dossierId}/again': casesIdDossiersDossierIdAgain,
+  '/cases/{id}/dossiers/{dossierId}/pdf': casesIdDossiersDossierIdPdf,
+  '/cases/{id}/dossiers/{dossierId}/sendings': casesIdDossiersDossierIdSendings,
+  '/cases/{id}/dossiers/{dossierId}/sendings/{sendingId}/again': casesIdDossiersDossierIdSendingsSendingIdAgain,
   '/cases/{id}/events': casesIdEvents,
   '/cases/{id}/findings': casesIdFindings,
   '/cases/{id}/findings/{findingId}/notes': casesIdFindingsFindingIdNotes,

@@ -5,6 +5,7 @@ import { publishFirstEdition, publishUpstream } from '../rulebook';
 import { calendarTo } from './calendar';
 import { EDITION_ID, beganOn, makeDemo } from './index';
 import { ORGANISATION } from './organisation';
+import { writePaper } from './paper';
 import { writeOrganisation } from './people';
 import { writeRows } from './write';
 
@@ -23,4 +24,5 @@ export async function seedDemo(tx: Transaction, { today, rulebook }: { today: Da
   const upstreamNumber = await publishUpstream(tx, rulebook);
   await publishFirstEdition(tx, { organisationId: ORGANISATION.id, id: EDITION_ID, rulebook, upstreamNumber, at: createdAt });
   await writeRows(tx, rows);
+  await writePaper(tx, calendar);
 }

@@ -58,3 +58,9 @@ export const THUMBNAIL_TYPE = 'image/webp';
 /** A small copy for lists. */
 export const thumbnailOf = (bytes: Uint8Array): Promise<Uint8Array> =>
   open(bytes).autoOrient().resize(THUMBNAIL_PX, THUMBNAIL_PX, { fit: 'inside', withoutEnlargement: true }).webp({ quality: 78 }).toBuffer();
+
+const PRINT_PX = 1000;
+
+/** A copy to be printed at half the width of a page: a JPEG, because a document takes it as it is. */
+export const printCopyOf = (bytes: Uint8Array): Promise<Buffer> =>
+  open(bytes).autoOrient().resize(PRINT_PX, PRINT_PX, { fit: 'inside', withoutEnlargement: true }).flatten({ background: '#ffffff' }).jpeg({ quality: 72 }).toBuffer();

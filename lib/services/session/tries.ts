@@ -20,6 +20,7 @@ export const LIMITS = {
   'reset by address': { most: 5, windowMs: 60 * MINUTE_MS },
   'reset by network': { most: 40, windowMs: 60 * MINUTE_MS },
   'link by network': { most: 60, windowMs: 15 * MINUTE_MS },
+  'dossier by network': { most: 60, windowMs: 15 * MINUTE_MS },
 } as const satisfies Record<string, Limit>;
 
 export type Tried = keyof typeof LIMITS;

@@ -9,7 +9,7 @@ const NO_RULEBOOK = {} as Rulebook;
 
 /** One row in every table that belongs to an organisation; organisation, site, person and membership are there. */
 export async function insertOneRowEach(tx: Transaction, { organisationId, siteId, personId }: { organisationId: string; siteId: string; personId: string }) {
-  const [unitId, modelId, fitId, editionId, caseId, findingId, setId, catchId, repairId, fittingId, runId] = [newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId()];
+  const [unitId, modelId, fitId, editionId, caseId, findingId, setId, catchId, repairId, fittingId, runId, dossierId, mailId] = [newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId(), newId()];
   const of = { organisationId };
   await tx.insert(schema.invitation).values({ ...of, id: newId(), roles: ['technician'], expiresAt: AT, invitedBy: personId });
   await tx.insert(schema.compressorModel).values({ ...of, id: modelId, name: 'Model' });
@@ -38,7 +38,7 @@ export async function insertOneRowEach(tx: Transaction, { organisationId, siteId
   await tx.insert(schema.unitHold).values({ ...of, id: newId(), unitId, caseId, checkId: 'c', placedAt: AT });
   await tx.insert(schema.oilCatch).values({ ...of, id: catchId, caseId, checkId: 'c', stage: { kind: 'diagnosis' }, startedAt: AT, startedBy: personId });
   await tx.insert(schema.oilWeighing).values({ ...of, id: newId(), catchId, caseId, massKg: 0.01, massErrorKg: 0.0005, ranS: 3600, personId, at: AT, findingId });
-  await tx.insert(schema.mail).values({ ...of, id: newId(), kind: 'notice', toAddress: 'somebody@people.test', subject: 'Test', body: 'Words', entity: 'unit', entityId: unitId });
+  await tx.insert(schema.mail).values({ ...of, id: mailId, kind: 'notice', toAddress: 'somebody@people.test', subject: 'Test', body: 'Words', entity: 'unit', entityId: unitId });
   await tx.insert(schema.repair).values({ ...of, id: repairId, caseId, remedyId: 'r', chosenAt: AT, chosenBy: personId });
   await tx.insert(schema.repairStep).values({ ...of, id: newId(), repairId, caseId, step: 0, mark: 'done', personId, at: AT });
   await tx.insert(schema.fitting).values({ ...of, id: fittingId, caseId, fitId, startedAt: AT, startedBy: personId });
@@ -47,6 +47,11 @@ export async function insertOneRowEach(tx: Transaction, { organisationId, siteId
   await tx.insert(schema.breakInRun).values({ ...of, id: runId, caseId, fitId, figures, startedAt: AT, startedBy: personId });
   await tx.insert(schema.breakInEvent).values({ ...of, id: newId(), runId, caseId, kind: 'resume', personId, at: AT, receivedAt: AT });
   await tx.insert(schema.release).values({ ...of, id: newId(), caseId, unitId, releasedAt: AT, releasedBy: personId, on: [] });
+  await tx.insert(schema.dossier).values({ ...of, id: dossierId, caseId, number: 1, reference: 'D-2026-00001', madeAt: AT, madeBy: personId, paper: 'a4', leftOut: { sections: [], photoIds: [], names: false, fleet: false }, content: {} as never, contentHash: 'hash' });
+  await tx.insert(schema.dossierSeal).values({ ...of, dossierId, kind: 'content', reference: 'D-2026-00001', hash: 'hash', madeAt: AT });
+  await tx.insert(schema.dossierSending).values({ ...of, id: newId(), dossierId, caseId, toAddress: 'somebody@people.test', mailId, sentBy: personId, at: AT });
+  await tx.insert(schema.claim).values({ ...of, id: newId(), caseId, toWhom: 'Desk', sentOn: '2026-03-02', createdBy: personId });
+  await tx.insert(schema.coreCredit).values({ ...of, id: newId(), caseId, fitId, toWhom: 'Desk', sentOn: '2026-03-02', createdBy: personId });
   await tx.insert(schema.savedView).values({ ...of, id: newId(), personId, list: 'cases', name: 'Mine', query: 'whose=me' });
   await tx.insert(schema.removal).values({ ...of, id: newId(), entity: 'unit', entityId: unitId, kind: 'hide', reason: 'Test', personId, at: AT });
   await tx.insert(schema.audit).values({ ...of, id: newId(), action: 'test', entity: 'unit', entityId: unitId, changed: {} });

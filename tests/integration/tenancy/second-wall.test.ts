@@ -45,8 +45,8 @@ describe('row-level security', () => {
     expect(tables.filter(({ secured }) => !secured).map(({ name }) => name)).toEqual(['attempt', 'upstream_edition']);
   });
 
-  test('holds for the owner too, except where its functions look people up before they are signed in, or search', () => {
-    expect(tables.filter(({ secured, forced }) => secured && !forced).map(({ name }) => name)).toEqual(['api_token', 'idempotent_answer', 'invitation', 'membership', 'organisation', 'password_reset', 'person', 'search_entry']);
+  test('holds for the owner too, except where its functions look people up before they are signed in, search, or verify a dossier by its hash', () => {
+    expect(tables.filter(({ secured, forced }) => secured && !forced).map(({ name }) => name)).toEqual(['api_token', 'dossier_seal', 'idempotent_answer', 'invitation', 'membership', 'organisation', 'password_reset', 'person', 'search_entry']);
   });
 
   test('gives the application a role that can neither bypass it nor switch it off', async () => {
@@ -136,7 +136,7 @@ describe('rights of the application', () => {
   });
 
   test('let it change what has a present state, and no record', async () => {
-    expect(await rightsOn('UPDATE')).toEqual(['adopted_limit', 'api_token', 'attachment', 'attempt', 'baseline_set', 'break_in_run', 'case', 'compressor_model', 'fit', 'fitting', 'invitation', 'mail', 'membership', 'oil_catch', 'oil_weighing', 'organisation', 'person', 'repair', 'saved_view', 'site', 'unit', 'unit_hold']);
+    expect(await rightsOn('UPDATE')).toEqual(['adopted_limit', 'api_token', 'attachment', 'attempt', 'baseline_set', 'break_in_run', 'case', 'claim', 'compressor_model', 'core_credit', 'dossier', 'fit', 'fitting', 'invitation', 'mail', 'membership', 'oil_catch', 'oil_weighing', 'organisation', 'person', 'repair', 'saved_view', 'site', 'unit', 'unit_hold']);
   });
 
   test('let it add no organisation, person or membership, and not touch password links', async () => {
