@@ -1,6 +1,7 @@
 import type { JobData, JobName } from '@/lib/jobs';
 import type { Attempt } from '@/lib/jobs/attempt';
 import { sendMail, type Post } from '@/lib/services/mail/send';
+import { mailDailyNotices } from '@/lib/services/notice/mail-daily';
 import { remindOfWeighing } from '@/lib/services/oil-catch/remind';
 import { mailPasswordReset } from '@/lib/services/password/mail-reset';
 import { makeThumbnail } from '@/lib/services/photo/make-thumbnail';
@@ -14,5 +15,6 @@ export const handlers = (post: Post): Handlers => ({
   'mail-password-reset': (data, attempt) => mailPasswordReset(post, data, attempt),
   'make-thumbnail': (data) => makeThumbnail(post, data),
   'remind-weighing': (data) => remindOfWeighing(post, data),
+  'mail-daily-notices': (data) => mailDailyNotices(post, data),
   sweep: () => sweep(post),
 });

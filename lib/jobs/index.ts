@@ -10,6 +10,8 @@ export interface JobData {
   'make-thumbnail': { organisationId: string; photoId: string };
   /** Due at the time that the catch has for it, or no more. */
   'remind-weighing': { organisationId: string; catchId: string; due: string };
+  /** Those that wait when it comes up, which may be none any more. */
+  'mail-daily-notices': { organisationId: string; personId: string };
   sweep: Record<string, never>;
 }
 export type JobName = keyof JobData;

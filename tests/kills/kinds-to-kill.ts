@@ -6,6 +6,7 @@ import { newId } from '@/lib/ids';
 import { jobs, type JobName } from '@/lib/jobs';
 import { viewInvitation } from '@/lib/services/invitation/accept';
 import { invite } from '@/lib/services/invitation/invite';
+import { notify } from '@/lib/services/notice/notify';
 import { viewPasswordReset } from '@/lib/services/password/reset';
 import { startCatch } from '@/lib/services/oil-catch/start';
 import { makeWorkshop, openACase, readCautions } from '@/tests/integration/cases/support';
@@ -143,6 +144,31 @@ export const KINDS: Readonly<Record<JobName, Tasks>> = {
             'was noted in the audit once': (await countOf(ground, sql`select count(*)::int as count from audit where action = 'make.thumbnail' and entity_id = ${photoId}`, organisationId)) === 1,
           });
         },
+      };
+    };
+  },
+
+  'mail-daily-notices': async (ground) => {
+    const { databases } = ground;
+    const { ctx, organisationId, addPerson } = await makeTenant(databases);
+    return async () => {
+      const personId = (await addPerson()).person.id;
+      for (const key of ['one', 'two']) await asTenant(databases.app, { organisationId }, (tx) => notify(tx, ctx, { organisationId, personId, kind: 'watch-due', caseId: null, key, about: {} }));
+      // As if the night had gone by; each notice has asked for the mail.
+      await databases.app.execute(sql`delete from pgboss.job where id = (select id from pgboss.job where data->>'personId' = ${personId} limit 1)`);
+      await databases.app.execute(sql`update pgboss.job set start_after = now() where data->>'personId' = ${personId}`);
+      const count = (query: ReturnType<typeof sql>) => countOf(ground, query, organisationId);
+      const posted = () => count(sql`select count(*)::int as count from mail where entity_id = ${personId}`);
+      return {
+        marker: personId,
+        isNoted: async () => (await posted()) > 0,
+        problems: async () =>
+          problemsOf({
+            'posted one mail': (await posted()) === 1,
+            'queued that mail once': (await countOf(ground, sql`select count(*)::int as count from pgboss.job j join mail m on m.id::text = j.data->>'mailId' where m.entity_id = ${personId}`, organisationId)) === 1,
+            'told all in it': (await count(sql`select count(*)::int as count from notice where person_id = ${personId} and mail_id is null`)) === 0,
+            'was noted in the audit once': (await count(sql`select count(*)::int as count from audit where action = 'mail.notice' and entity_id = ${personId}`)) === 1,
+          }),
       };
     };
   },
