@@ -55,8 +55,8 @@ const refusing = office(() => Promise.reject(Object.assign(new Error('550 Nobody
 const bounce = (mailId: string) => sendMail(refusing, { organisationId: workshop.organisationId, mailId }, { isLast: true }).catch((error: unknown) => expect(error).toBeInstanceOf(Error));
 
 const give = async (ctx: Ctx, caseId: string, to: Ctx | null) => {
-  const { case: head } = await readCase({ ctx, input: { caseId } });
-  await assignCase({ ctx, input: { caseId, personId: to?.person.id ?? null, version: head.version } });
+  const { version } = await readCase({ ctx, input: { caseId } });
+  await assignCase({ ctx, input: { caseId, personId: to?.person.id ?? null, version } });
 };
 
 describe('a case that is given to somebody', () => {

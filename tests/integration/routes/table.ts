@@ -7,6 +7,7 @@ import { device } from './rows/device';
 import { jobs } from './rows/jobs';
 import { limits } from './rows/limits';
 import { models } from './rows/models';
+import { notices } from './rows/notices';
 import { photos } from './rows/photos';
 import { repairs } from './rows/repairs';
 import { search } from './rows/search';
@@ -20,4 +21,4 @@ import { units } from './rows/units';
  * `app` is not here, and tries wrong roles, another organisation, malformed and oversized input on each. A feature adds
  * its file of rows to `rows/` and its name here.
  */
-export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, catches, device, photos, units, limits, models, search, jobs, repairs, settings, tokens];
+export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, catches, device, photos, units, limits, models, search, jobs, notices, repairs, settings, tokens];
