@@ -27,7 +27,7 @@ export const readAllNotices = defineWrite({
   name: 'read-all.notice',
   doing: 'see your notices',
   roles: PERMITTED['own-settings'],
-  input: z.object({}),
+  input: z.strictObject({}),
   run: async ({ tx, ctx, audit, unchanged }) => {
     const notices = await markNoticesRead(tx, { organisationId: ctx.organisation.id, personId: ctx.person.id, at: ctx.now() });
     if (notices > 0) audit({ entity: 'person', entityId: ctx.person.id, changed: { notices } });

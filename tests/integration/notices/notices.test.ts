@@ -2,9 +2,8 @@ import { sql } from 'drizzle-orm';
 import { afterAll, beforeAll, describe, expect, test, vi } from 'vitest';
 import { asTenant } from '@/db/connect';
 import { newId } from '@/lib/ids';
-import type { Mail } from '@/lib/mail';
+import { createMailer, type Mailer } from '@/lib/mail';
 import { assignCase } from '@/lib/services/case/assign';
-import { readCase } from '@/lib/services/case/read';
 import type { Ctx } from '@/lib/services/context';
 import { invite } from '@/lib/services/invitation/invite';
 import { sendMail, type Post } from '@/lib/services/mail/send';
@@ -17,9 +16,10 @@ import { notify } from '@/lib/services/notice/notify';
 import { chooseRepair } from '@/lib/services/repair/choose';
 import { readRepairPlan } from '@/lib/services/repair/read-plan';
 import { planRepair } from '@/lib/services/repair/work';
-import { makeWorkshop, openACase } from '@/tests/integration/cases/support';
-import { openTestDatabases, type TestDatabases } from '@/tests/support/context';
 import { noStorage } from '@/lib/storage/none';
+import { makeWorkshop, openACase } from '@/tests/integration/cases/support';
+import { PostOffice } from '@/tests/integration/mail/post-office';
+import { openTestDatabases, type TestDatabases } from '@/tests/support/context';
 import type { Tenant } from '@/tests/support/tenant';
 
 vi.hoisted(() => {
@@ -30,14 +30,22 @@ let databases: TestDatabases;
 let workshop: Tenant;
 let chief: Ctx;
 let clerk: Ctx;
+let office: PostOffice;
+let mailer: Mailer;
+let post: Post;
 
 beforeAll(async () => {
-  databases = await openTestDatabases();
+  [databases, office] = await Promise.all([openTestDatabases(), new PostOffice().open()]);
+  mailer = createMailer(office.url, 'Carryover <carryover@carryover.test>');
+  post = { db: databases.app, mailer, now: () => new Date(), baseUrl: 'https://carryover.test', secret: 'a secret for tests alone', storage: noStorage };
   workshop = await makeWorkshop(databases, { roles: ['manager'] });
   chief = workshop.ctx;
   clerk = await workshop.addPerson({ roles: ['administrator'] });
 }, 60_000);
-afterAll(() => databases.close());
+afterAll(async () => {
+  mailer.close();
+  await Promise.all([office.close(), databases.close()]);
+});
 
 const toldTo = async (ctx: Ctx) => (await browseNotices({ ctx, input: {} })).notices;
 const rowsOf = async <Row>(query: ReturnType<typeof sql>) => (await workshop.asOwner((tx) => tx.execute(query))).rows as Row[];
@@ -47,17 +55,15 @@ const tell = (ctx: Ctx, more: Partial<Parameters<typeof notify>[2]> = {}) =>
     notify(tx, chief, { organisationId: workshop.organisationId, personId: ctx.person.id, kind: 'assigned', caseId: null, key: newId(), about: {}, ...more }),
   );
 
-/** A worker's post office that takes every mail, or none. */
-function office(send: (mail: Mail) => Promise<void>): Post {
-  return { db: databases.app, mailer: { send, close: () => undefined }, now: () => new Date(), baseUrl: 'https://carryover.test', secret: 'a secret for tests alone', storage: noStorage };
+const send = (mailId: string, isLast = false) => sendMail(post, { organisationId: workshop.organisationId, mailId }, { isLast });
+/** The server refuses its address. */
+async function bounce(mailId: string): Promise<void> {
+  office.manner = 'refuses the address';
+  await expect(send(mailId, true)).rejects.toThrow();
+  office.manner = 'takes';
 }
-const refusing = office(() => Promise.reject(Object.assign(new Error('550 Nobody of this name'), { responseCode: 550 })));
-const bounce = (mailId: string) => sendMail(refusing, { organisationId: workshop.organisationId, mailId }, { isLast: true }).catch((error: unknown) => expect(error).toBeInstanceOf(Error));
 
-const give = async (ctx: Ctx, caseId: string, to: Ctx | null) => {
-  const { version } = await readCase({ ctx, input: { caseId } });
-  await assignCase({ ctx, input: { caseId, personId: to?.person.id ?? null, version } });
-};
+const give = (ctx: Ctx, caseId: string, to: Ctx | null) => assignCase({ ctx, input: { caseId, personId: to?.person.id ?? null } });
 
 describe('a case that is given to somebody', () => {
   test('is told to that person and to nobody else, in the app and at once by mail', async () => {
@@ -69,10 +75,11 @@ describe('a case that is given to somebody', () => {
     expect(await toldTo(chief)).toEqual([]);
     const [mail] = await mailsTo(mechanic);
     expect(mail?.subject).toMatch(/^A case for you: case \d+, unit U-/);
-    const sent: Mail[] = [];
-    await sendMail(office(async (letter) => void sent.push(letter)), { organisationId: workshop.organisationId, mailId: mail?.id ?? '' }, { isLast: false });
-    expect(sent).toMatchObject([{ to: mechanic.person.email, text: expect.stringContaining(`https://carryover.test/cases/${caseId}`) }]);
-    expect(sent[0]?.text).toContain(`${chief.person.name} gave you case`);
+    await send(mail?.id ?? '');
+    const letters = office.takenBy(mechanic.person.email);
+    expect(letters).toHaveLength(1);
+    expect(letters[0]?.text).toContain(`https://carryover.test/cases/${caseId}`);
+    expect(letters[0]?.text).toContain(`${chief.person.name} gave you case`);
   });
 
   test('is no news to whoever takes it, nor when he or she has it already', async () => {
@@ -140,14 +147,14 @@ test('the day’s mail tells all that waits in one, once, although it is asked f
   const [first] = await toldTo(mechanic);
   await readNotice({ ctx: mechanic, input: { noticeId: first?.id ?? '' } });
   const owner = { organisationId: workshop.organisationId, personId: mechanic.person.id };
-  await Promise.all([1, 2, 3].map(() => mailDailyNotices(refusing, owner)));
-  await mailDailyNotices(refusing, owner);
+  await Promise.all([1, 2, 3].map(() => mailDailyNotices(post, owner)));
+  await mailDailyNotices(post, owner);
   const mails = await mailsTo(mechanic);
   expect(mails).toMatchObject([{ kind: 'daily-notices', subject: '2 notices since yesterday' }]);
-  const sent: Mail[] = [];
-  await sendMail(office(async (letter) => void sent.push(letter)), { organisationId: workshop.organisationId, mailId: mails[0]?.id ?? '' }, { isLast: false });
-  expect(sent[0]?.text).toMatch(/reading 0[^]*reading 1/);
-  expect(sent[0]?.text).not.toContain('reading 2');
+  await send(mails[0]?.id ?? '');
+  const [letter] = office.takenBy(mechanic.person.email);
+  expect(letter?.text).toMatch(/reading 0[^]*reading 1/);
+  expect(letter?.text).not.toContain('reading 2');
 });
 
 describe('a mail that was given up', () => {
