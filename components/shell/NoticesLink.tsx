@@ -14,8 +14,9 @@ export function NoticesLink({ unread, className }: { unread: number; className?:
 export function Unread({ count, of = '' }: { count: number; of?: string }) {
   if (count === 0) return null;
   return (
-    <span className="rounded bg-ink px-1.5 text-[0.8125rem] text-paper">
-      <span className="sr-only">, </span><span className="figure">{count}</span><span className="sr-only"> unread{of}</span>
-    </span>
+    <>
+      <span aria-hidden="true" className="figure rounded bg-ink px-1.5 text-[0.8125rem] text-paper">{count}</span>
+      <span className="sr-only">{`, ${count} unread${of}`}</span>
+    </>
   );
 }
