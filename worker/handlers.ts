@@ -2,6 +2,7 @@ import type { JobData, JobName } from '@/lib/jobs';
 import type { Attempt } from '@/lib/jobs/attempt';
 import { makeDossierPdf } from '@/lib/services/dossier/make-pdf';
 import { sendMail, type Post } from '@/lib/services/mail/send';
+import { mailDailyNotices } from '@/lib/services/notice/mail-daily';
 import { remindOfWeighing } from '@/lib/services/oil-catch/remind';
 import { mailPasswordReset } from '@/lib/services/password/mail-reset';
 import { makeThumbnail } from '@/lib/services/photo/make-thumbnail';
@@ -16,5 +17,6 @@ export const handlers = (post: Post): Handlers => ({
   'make-thumbnail': (data) => makeThumbnail(post, data),
   'make-dossier': (data, attempt) => makeDossierPdf(post, data, attempt),
   'remind-weighing': (data) => remindOfWeighing(post, data),
+  'mail-daily-notices': (data) => mailDailyNotices(post, data),
   sweep: () => sweep(post),
 });

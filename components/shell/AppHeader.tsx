@@ -2,6 +2,7 @@ import type { ReactNode } from 'react';
 import { SearchBox } from '@/components/search/SearchBox';
 import { Menu } from './Menu';
 import { NavLinks, type NavItem } from './NavLinks';
+import { NoticesLink, Unread } from './NoticesLink';
 import type { Theme } from './theme';
 import { ThemeSwitch } from './ThemeSwitch';
 import { Wordmark } from './Wordmark';
@@ -11,6 +12,8 @@ export interface AppHeaderProps {
   organisation: { name: string };
   /** Only what this person can use. */
   items: readonly NavItem[];
+  /** Notices that were not read. */
+  unread: number;
   theme: Theme;
   /** The form or button that signs out. */
   signOut: ReactNode;
@@ -20,7 +23,7 @@ export interface AppHeaderProps {
  * Head of every signed-in page. From a small laptop's width on the navigation is a row and the person has a
  * menu; on a phone or an upright tablet one menu holds both.
  */
-export function AppHeader({ person, organisation, items, theme, signOut }: AppHeaderProps) {
+export function AppHeader({ person, organisation, items, unread, theme, signOut }: AppHeaderProps) {
   const about = (
     <div className="grid gap-4">
       <p>
@@ -39,6 +42,7 @@ export function AppHeader({ person, organisation, items, theme, signOut }: AppHe
         <nav aria-label="Main" className="mr-auto -mb-0.5 ml-4 max-lg:hidden">
           <NavLinks items={items} look="row" />
         </nav>
+        <NoticesLink unread={unread} className="max-lg:hidden" />
         <SearchBox className="max-lg:ml-auto" />
         <Menu
           className="max-lg:hidden"
@@ -47,9 +51,10 @@ export function AppHeader({ person, organisation, items, theme, signOut }: AppHe
         >
           {about}
         </Menu>
-        <Menu className="lg:hidden" panelClassName="absolute inset-x-0 top-full border-x-0" summary={<>Menu<Chevron /></>}>
+        <Menu className="lg:hidden" panelClassName="absolute inset-x-0 top-full border-x-0" summary={<>Menu<Unread count={unread} of=" notices" /><Chevron /></>}>
           <nav aria-label="Main" className="mb-5">
             <NavLinks items={items} look="column" />
+            <NoticesLink unread={unread} className="border-b border-rule text-lg" />
           </nav>
           {about}
         </Menu>

@@ -35,6 +35,7 @@ export async function lockCase(db: Executor, of: Of) {
       siteId: cases.siteId,
       editionId: cases.editionId,
       status: cases.status,
+      assignedTo: cases.assignedTo,
       vehicleState: cases.vehicleState,
       version: cases.version,
       openedAt: cases.openedAt,

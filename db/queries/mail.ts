@@ -36,6 +36,7 @@ export async function beginMailAttempt(db: Executor, key: Key & { at: Date }) {
       body: mail.body,
       entity: mail.entity,
       entityId: mail.entityId,
+      postedBy: mail.postedBy,
       attachmentKey: mail.attachmentKey,
       attachmentName: mail.attachmentName,
       createdAt: mail.createdAt,

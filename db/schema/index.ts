@@ -22,3 +22,4 @@ export * from './break-in';
 export * from './release';
 export * from './dossier';
 export * from './claim';
+export * from './notice';

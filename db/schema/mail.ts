@@ -1,6 +1,7 @@
-import { index, integer, pgTable, primaryKey, text } from 'drizzle-orm/pg-core';
+import { index, integer, pgTable, primaryKey, text, uuid } from 'drizzle-orm/pg-core';
 import { createdAt, id, instant, organisationId, organisationPolicy } from './columns';
 import { organisation } from './organisation';
+import { person } from './person';
 
 /**
  * A mail that goes out for the organisation, written in the transaction that makes it necessary and sent by the worker.
@@ -21,6 +22,8 @@ export const mail = pgTable(
     /** What it is about. */
     entity: text().notNull(),
     entityId: text().notNull(),
+    /** Who hears when it can't be delivered; null: the administrators. */
+    postedBy: uuid().references(() => person.id),
     /** Of an object in the storage, with the name that the reader sees. */
     attachmentKey: text(),
     attachmentName: text(),

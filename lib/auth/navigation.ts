@@ -17,6 +17,7 @@ const PLACES: readonly (Place & { needs: Permission })[] = [
 const SETTINGS: readonly (Place & { needs: Permission })[] = [
   { href: '/settings/profile', label: 'You', needs: 'own-settings' },
   { href: '/settings/units', label: 'Units of measure', needs: 'own-settings' },
+  { href: '/settings/notices', label: 'Notices', needs: 'own-settings' },
   { href: '/settings/tokens', label: 'Tokens', needs: 'own-settings' },
   { href: '/settings/limits', label: 'Limits', needs: 'limit.see' },
   { href: '/settings/people', label: 'People', needs: 'people.manage' },

@@ -21,8 +21,8 @@ export const SCOPES = {
   'people:read': { needs: 'case.see', does: 'See who can be given a case' },
   'jobs:read': { needs: 'job.see', does: 'See what Carryover does by itself: mail, pictures, nightly work' },
   'jobs:write': { needs: 'job.retry', does: 'Try jobs again that failed' },
-  'profile:read': { needs: 'own-settings', does: 'See who you are and your units of measure' },
-  'profile:write': { needs: 'own-settings', does: 'Change your units of measure' },
+  'profile:read': { needs: 'own-settings', does: 'See who you are, your units of measure and your notices' },
+  'profile:write': { needs: 'own-settings', does: 'Change your units of measure, read your notices and set how you are told' },
 } as const satisfies Record<string, { needs: Permission; does: string }>;
 
 export type Scope = keyof typeof SCOPES;

@@ -12,6 +12,8 @@ export interface JobData {
   'remind-weighing': { organisationId: string; catchId: string; due: string };
   /** The PDF of what the dossier says. */
   'make-dossier': { organisationId: string; dossierId: string };
+  /** Those that wait when it comes up, which may be none any more. */
+  'mail-daily-notices': { organisationId: string; personId: string };
   sweep: Record<string, never>;
 }
 export type JobName = keyof JobData;

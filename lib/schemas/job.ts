@@ -8,6 +8,7 @@ export const SEEN_JOBS = {
   'send-mail': { name: 'Mail', whose: 'organisation' },
   'remind-weighing': { name: 'Reminder to weigh oil', whose: 'organisation' },
   'make-dossier': { name: 'PDF of a dossier', whose: 'organisation' },
+  'mail-daily-notices': { name: 'Mail of the day’s notices', whose: 'organisation' },
   'make-thumbnail': { name: 'Small picture of a photo', whose: 'organisation' },
   sweep: { name: 'Nightly clearing up', whose: 'everybody' },
 } as const satisfies Record<string, { name: string; whose: 'organisation' | 'everybody' }>;

@@ -99,6 +99,8 @@ export const SHOTS: readonly Shot[] = [
   shot(`${IN}/bench/line-survey`, 'bench-line-survey', 'technician', `/bench/line-survey?${new URLSearchParams({ distance1: '0 ft', temperature1: '390 °F', distance2: '2 ft', temperature2: '375 °F', distance3: '4 ft', temperature3: '270 °F', distance4: '8 ft', temperature4: '240 °F' })}`),
   shot(`${IN}/bench/[sum]`, 'bench-sum-not-found', 'technician', '/bench/no-such-sum'),
 
+  shot(`${IN}/notices`, 'notices', 'manager', '/notices'),
+  shot(`${IN}/notices`, 'notices-empty', 'technician', '/notices', 'emptied'),
   shot(`${IN}/search`, 'search-empty', 'technician', '/search'),
   shot(`${IN}/search`, 'search', 'technician', '/search?q=oil'),
   shot(`${IN}/search`, 'search-no-match', 'technician', '/search?q=zzzz'),
@@ -108,6 +110,7 @@ export const SHOTS: readonly Shot[] = [
 
   shot(`${IN}/settings/profile`, 'settings-profile', 'technician', '/settings/profile'),
   shot(`${IN}/settings/units`, 'settings-units', 'technician', '/settings/units'),
+  shot(`${IN}/settings/notices`, 'settings-notices', 'technician', '/settings/notices'),
   shot(`${IN}/settings/tokens`, 'settings-tokens', 'technician', '/settings/tokens'),
   shot(`${IN}/settings/limits`, 'settings-limits', 'engineer', '/settings/limits'),
   shot(`${IN}/settings/limits/new`, 'settings-limit-new', 'engineer', '/settings/limits/new?check=cut-in-pressure&from=us-cut-in-truck'),

@@ -17,6 +17,7 @@ import type { TestDatabases } from '@/tests/support/context';
 import type { TestStorage } from '@/tests/support/storage';
 import { makeTenant, makeVisitor } from '@/tests/support/tenant';
 import type { Letter, PostOffice } from '@/tests/integration/mail/post-office';
+import { notify } from '@/lib/services/notice/notify';
 
 export interface Ground {
   databases: TestDatabases;
@@ -176,6 +177,31 @@ export const KINDS: Readonly<Record<JobName, Tasks>> = {
             'was noted in the audit once': (await count(sql`select count(*)::int as count from audit where action = 'make.dossier-pdf' and entity_id = ${dossierId}`)) === 1,
           });
         },
+      };
+    };
+  },
+
+  'mail-daily-notices': async (ground) => {
+    const { databases } = ground;
+    const { ctx, organisationId, addPerson } = await makeTenant(databases);
+    return async () => {
+      const personId = (await addPerson()).person.id;
+      for (const key of ['one', 'two']) await asTenant(databases.app, { organisationId }, (tx) => notify(tx, ctx, { organisationId, personId, kind: 'watch-due', caseId: null, key, about: {} }));
+      // As if the night had gone by; each notice has asked for the mail.
+      await databases.app.execute(sql`delete from pgboss.job where id = (select id from pgboss.job where data->>'personId' = ${personId} limit 1)`);
+      await databases.app.execute(sql`update pgboss.job set start_after = now() where data->>'personId' = ${personId}`);
+      const count = (query: ReturnType<typeof sql>) => countOf(ground, query, organisationId);
+      const posted = () => count(sql`select count(*)::int as count from mail where entity_id = ${personId}`);
+      return {
+        marker: personId,
+        isNoted: async () => (await posted()) > 0,
+        problems: async () =>
+          problemsOf({
+            'posted one mail': (await posted()) === 1,
+            'queued that mail once': (await countOf(ground, sql`select count(*)::int as count from pgboss.job j join mail m on m.id::text = j.data->>'mailId' where m.entity_id = ${personId}`, organisationId)) === 1,
+            'told all in it': (await count(sql`select count(*)::int as count from notice where person_id = ${personId} and mail_id is null`)) === 0,
+            'was noted in the audit once': (await count(sql`select count(*)::int as count from audit where action = 'mail.notice' and entity_id = ${personId}`)) === 1,
+          }),
       };
     };
   },

@@ -58,6 +58,9 @@ import * as models from './models/route';
 import * as modelsId from './models/[id]/route';
 import * as modelsIdHide from './models/[id]/hide/route';
 import * as modelsIdShow from './models/[id]/show/route';
+import * as notices from './notices/route';
+import * as noticesIdRead from './notices/[id]/read/route';
+import * as noticesReadAll from './notices/read-all/route';
 import * as people from './people/route';
 import * as photosIdArrived from './photos/[id]/arrived/route';
 import * as photosIdHidden from './photos/[id]/hidden/route';
@@ -65,6 +68,7 @@ import * as photosIdMarks from './photos/[id]/marks/route';
 import * as photosIdPicture from './photos/[id]/picture/route';
 import * as photosIdThumbnail from './photos/[id]/thumbnail/route';
 import * as profile from './profile/route';
+import * as profileNotices from './profile/notices/route';
 import * as profileUnits from './profile/units/route';
 import * as rulebook from './rulebook/route';
 import * as search from './search/route';
@@ -145,6 +149,9 @@ export const ROUTES = {
   '/models/{id}': modelsId,
   '/models/{id}/hide': modelsIdHide,
   '/models/{id}/show': modelsIdShow,
+  '/notices': notices,
+  '/notices/{id}/read': noticesIdRead,
+  '/notices/read-all': noticesReadAll,
   '/people': people,
   '/photos/{id}/arrived': photosIdArrived,
   '/photos/{id}/hidden': photosIdHidden,
@@ -152,6 +159,7 @@ export const ROUTES = {
   '/photos/{id}/picture': photosIdPicture,
   '/photos/{id}/thumbnail': photosIdThumbnail,
   '/profile': profile,
+  '/profile/notices': profileNotices,
   '/profile/units': profileUnits,
   '/rulebook': rulebook,
   '/search': search,

@@ -5,6 +5,7 @@ import { calendarTo, type Calendar } from './calendar';
 import type { World } from './world';
 import { limitRows } from './limit-rows';
 import { catchRows } from './catch-rows';
+import { noticeRows } from './notice-rows';
 import { modelRows } from './model-rows';
 import { policyOf } from './policy';
 import { randomFrom } from './random';
@@ -42,6 +43,7 @@ export function makeDemo(today: Date, rulebook: Rulebook, vehicles: readonly Veh
   for (const vehicle of vehicles) new UnitStory(world, shop, vehicle, random.fork(vehicle.fleetNumber)).tell();
   compareFindings(rows, compiled);
   catchRows(rows, compiled, random.fork('catches'));
+  noticeRows(rows);
   numberCases(rows);
   return { rows, truths: world.truths };
 }

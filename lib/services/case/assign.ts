@@ -7,6 +7,7 @@ import { newId } from '@/lib/ids';
 import { assignCaseInput } from '@/lib/schemas/case';
 import { defineWrite } from '../define';
 import { refuseOldVersion } from '../editing';
+import { notify } from '../notice/notify';
 
 /** Gives a case to somebody of the organisation, or to nobody. */
 export const assignCase = defineWrite({
@@ -26,7 +27,9 @@ export const assignCase = defineWrite({
     }
     const at = ctx.now();
     await updateCase(tx, of, { assignedTo: input.personId });
-    await insertCaseEvent(tx, { ...of, id: newId(at.getTime()), kind: 'assigned', personId: ctx.person.id, at });
+    const eventId = newId(at.getTime());
+    await insertCaseEvent(tx, { ...of, id: eventId, kind: 'assigned', personId: ctx.person.id, at });
+    if (input.personId !== row.assignedTo) await notify(tx, ctx, { ...of, personId: input.personId, kind: 'assigned', key: eventId, about: { by: ctx.person.id } });
     audit({ entity: 'case', entityId: of.caseId, changed: { assignedTo: input.personId } });
     return { id: of.caseId };
   },

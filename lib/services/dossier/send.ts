@@ -28,6 +28,7 @@ export const sendDossier = defineWrite({
     if (row.objectKey === null) throw conflict('The PDF is not made yet. Send it when it is.');
     const at = ctx.now();
     const mailId = await postMail(tx, ctx.jobs, {
+      by: ctx.person.id,
       organisationId: of.organisationId,
       kind: 'dossier',
       to,

@@ -33,7 +33,7 @@ export const invite = defineWrite({
       createdAt: ctx.now(),
     });
     if (!inserted) throw conflict('This address has been invited already.', { email: 'Send the invitation again instead; it is in the list.' });
-    await postInvitation(tx, ctx.jobs, { organisation: ctx.organisation, invitationId: id, email, at: ctx.now() });
+    await postInvitation(tx, ctx.jobs, { organisation: ctx.organisation, invitationId: id, email, by: ctx.person.id, at: ctx.now() });
     audit({ entity: 'invitation', entityId: id, changed: { roles, siteId } });
     return { invitationId: id };
   },

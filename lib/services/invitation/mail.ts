@@ -12,7 +12,7 @@ import { postMail } from '../mail/post';
 export const postInvitation = (
   tx: Transaction,
   jobs: JobQueue,
-  { organisation, invitationId, email, at }: { organisation: { id: string; name: string }; invitationId: string; email: string; at: Date },
+  { organisation, invitationId, email, by, at }: { organisation: { id: string; name: string }; invitationId: string; email: string; by: string; at: Date },
 ): Promise<string> =>
   postMail(tx, jobs, {
     organisationId: organisation.id,
@@ -21,6 +21,7 @@ export const postInvitation = (
     subject: `${organisation.name} invites you to Carryover`,
     entity: 'invitation',
     entityId: invitationId,
+    by,
     at,
   });
 

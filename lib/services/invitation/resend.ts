@@ -18,7 +18,7 @@ export const resendInvitation = defineWrite({
     if (!(await updateOpenInvitation(tx, key, { tokenHash: null, expiresAt }))) throw notFound('invitation');
     const email = (await findOpenInvitationById(tx, key))?.email;
     if (!email) throw notFound('invitation');
-    await postInvitation(tx, ctx.jobs, { organisation: ctx.organisation, invitationId, email, at: ctx.now() });
+    await postInvitation(tx, ctx.jobs, { organisation: ctx.organisation, invitationId, email, by: ctx.person.id, at: ctx.now() });
     audit({ entity: 'invitation', entityId: invitationId, changed: { expiresAt } });
   },
 });

@@ -14,6 +14,8 @@ interface Posted {
   /** What it is about. */
   entity: string;
   entityId: string;
+  /** Who brought it about, and hears when it can't be delivered. */
+  by?: string;
   /** An object of the storage. */
   attachment?: { key: string; name: string };
   at: Date;
@@ -25,7 +27,7 @@ interface Posted {
  * @param tx with the organisation set
  * @returns the id of the mail
  */
-export async function postMail(tx: Executor, jobs: JobQueue, { organisationId, kind, to, subject, text, entity, entityId, attachment, at }: Posted): Promise<string> {
+export async function postMail(tx: Executor, jobs: JobQueue, { organisationId, kind, to, subject, text, entity, entityId, by, attachment, at }: Posted): Promise<string> {
   const id = newId(at.getTime());
   await insertMail(tx, {
     organisationId,
@@ -36,6 +38,7 @@ export async function postMail(tx: Executor, jobs: JobQueue, { organisationId, k
     body: text ?? null,
     entity,
     entityId,
+    postedBy: by ?? null,
     attachmentKey: attachment?.key ?? null,
     attachmentName: attachment?.name ?? null,
     createdAt: at,

@@ -6,6 +6,7 @@ import { NoUseTrying, type Attempt } from '@/lib/jobs/attempt';
 import type { Mail, Mailer } from '@/lib/mail';
 import { mailFailure } from '@/lib/mail/failure';
 import type { Storage } from '@/lib/storage';
+import { tellOfBounced } from '../notice/bounced';
 import { textAtSending } from './text-at-sending';
 
 /** What a job that mails needs. */
@@ -32,12 +33,16 @@ export async function sendMail(post: Post, { organisationId, mailId }: JobData['
     const mail = await asTenant(own, key, (tx) => beginMailAttempt(tx, { ...key, at: post.now() }));
     // Sent already, or given up.
     if (!mail) return;
-    const fail = (lastError: string, isOver: boolean) => asTenant(own, key, (tx) => noteMailFailure(tx, { ...key, lastError, isOver }));
+    const fail = (lastError: string, isOver: boolean) =>
+      asTenant(own, key, async (tx) => {
+        await noteMailFailure(tx, { ...key, lastError, isOver });
+        if (isOver) await tellOfBounced(tx, post.now, mail);
+      });
     const letter = await letterOf(post, mail).catch(async (error: unknown) => {
       await fail('The mail could not be put together.', isLast);
       throw error;
     });
-    if (!letter) return fail('It was not needed any more when it was to be sent.', true);
+    if (!letter) return asTenant(own, key, (tx) => noteMailFailure(tx, { ...key, lastError: 'It was not needed any more when it was to be sent.', isOver: true }));
     try {
       await post.mailer.send(letter);
     } catch (error) {

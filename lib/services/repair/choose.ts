@@ -11,7 +11,7 @@ import { chooseRepairInput } from '@/lib/schemas/repair';
 import { lockCaseOf } from '../case/locked';
 import { defineWrite } from '../define';
 import { refuseClosed } from './locked';
-import { refuseStranger } from './who';
+import { refuseStranger, tellOfRepair } from './who';
 
 /**
  * Chooses a remedy of the plan. One that isn't first says why it goes before the others: what somebody saw weighs more than
@@ -32,7 +32,8 @@ export const chooseRepair = defineWrite({
       return { id, caseId };
     }
     refuseClosed(head);
-    if (!compiled.rulebook.remedies.some((remedy) => remedy.id === remedyId)) throw invalid({ remedyId: "This remedy is not in the case's rulebook." });
+    const remedy = compiled.rulebook.remedies.find((one) => one.id === remedyId);
+    if (!remedy) throw invalid({ remedyId: "This remedy is not in the case's rulebook." });
     await refuseStranger(tx, { ...of, assignedTo });
     const chosen = new Set((await selectRepairs(tx, of)).filter(({ endedAt }) => endedAt === null).map((row) => row.remedyId));
     const first = (await planned(tx, of, { compiled, labourRatePerHour: head.labourRatePerHour })).find((one) => !chosen.has(one));
@@ -42,6 +43,7 @@ export const chooseRepair = defineWrite({
     const row = { ...of, id, remedyId, whyBefore: isFirst ? null : whyBefore, plannedOn, assignedTo };
     const written = await insertRepair(tx, { ...row, chosenAt: ctx.now(), chosenBy: ctx.person.id });
     if (!written) throw conflict('This repair is chosen already: go on with it.');
+    await tellOfRepair(tx, ctx, { caseId, repairId: id, assignedTo, remedy: remedy.name });
     audit({ entity: 'repair', entityId: id, changed: { caseId, remedyId, whyBefore: row.whyBefore, plannedOn, assignedTo } });
     return { id, caseId };
   },

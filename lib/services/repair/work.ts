@@ -7,7 +7,7 @@ import { refuseUnread } from '../case/write-finding';
 import { defineWrite } from '../define';
 import { lastMarks } from './marks';
 import { lockRepairOf, refuseClosed, refuseEnded } from './locked';
-import { refuseStranger } from './who';
+import { refuseStranger, tellOfRepair } from './who';
 
 /** Says for when a repair is planned, and who does it. */
 export const planRepair = defineWrite({
@@ -17,9 +17,11 @@ export const planRepair = defineWrite({
   input: planRepairInput,
   run: async ({ tx, ctx, input: { caseId, repairId, plannedOn, assignedTo }, audit }) => {
     const of = { organisationId: ctx.organisation.id, caseId, repairId };
-    refuseEnded((await lockRepairOf(tx, of)).row);
+    const { row, remedy } = await lockRepairOf(tx, of);
+    refuseEnded(row);
     await refuseStranger(tx, { ...of, assignedTo });
     await updateRepair(tx, of, { plannedOn, assignedTo });
+    if (assignedTo !== row.assignedTo) await tellOfRepair(tx, ctx, { caseId, repairId, assignedTo, remedy: remedy.name });
     audit({ entity: 'repair', entityId: repairId, changed: { caseId, plannedOn, assignedTo } });
     return { id: repairId, caseId };
   },

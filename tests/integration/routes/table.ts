@@ -9,6 +9,7 @@ import { dossiers } from './rows/dossiers';
 import { jobs } from './rows/jobs';
 import { limits } from './rows/limits';
 import { models } from './rows/models';
+import { notices } from './rows/notices';
 import { photos } from './rows/photos';
 import { fittings } from './rows/fittings';
 import { repairs } from './rows/repairs';
@@ -23,4 +24,4 @@ import { units } from './rows/units';
  * `app` is not here, and tries wrong roles, another organisation, malformed and oversized input on each. A feature adds
  * its file of rows to `rows/` and its name here.
  */
-export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, catches, device, photos, units, limits, models, search, jobs, repairs, fittings, settings, tokens, claims, dossiers];
+export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, catches, device, photos, units, limits, models, search, jobs, repairs, fittings, settings, tokens, claims, dossiers, notices];

@@ -39,6 +39,9 @@ export async function insertOneRowEach(tx: Transaction, { organisationId, siteId
   await tx.insert(schema.oilCatch).values({ ...of, id: catchId, caseId, checkId: 'c', stage: { kind: 'diagnosis' }, startedAt: AT, startedBy: personId });
   await tx.insert(schema.oilWeighing).values({ ...of, id: newId(), catchId, caseId, massKg: 0.01, massErrorKg: 0.0005, ranS: 3600, personId, at: AT, findingId });
   await tx.insert(schema.mail).values({ ...of, id: mailId, kind: 'notice', toAddress: 'somebody@people.test', subject: 'Test', body: 'Words', entity: 'unit', entityId: unitId });
+  await tx.insert(schema.mail).values({ ...of, id: newId(), kind: 'notice', toAddress: 'somebody@people.test', subject: 'Test', body: 'Words', entity: 'unit', entityId: unitId });
+  await tx.insert(schema.notice).values({ ...of, id: newId(), personId, kind: 'assigned', key: 'k', caseId, about: {}, byMail: 'never' });
+  await tx.insert(schema.noticePreference).values({ ...of, personId, byMail: {} });
   await tx.insert(schema.repair).values({ ...of, id: repairId, caseId, remedyId: 'r', chosenAt: AT, chosenBy: personId });
   await tx.insert(schema.repairStep).values({ ...of, id: newId(), repairId, caseId, step: 0, mark: 'done', personId, at: AT });
   await tx.insert(schema.fitting).values({ ...of, id: fittingId, caseId, fitId, startedAt: AT, startedBy: personId });

@@ -17,8 +17,8 @@ describe('the navigation', () => {
   });
 
   test('has the administrator\'s settings for administrators alone', () => {
-    expect(labels(settingsFor(['administrator']))).toEqual(['You', 'Units of measure', 'Tokens', 'People', 'Sites', 'Organisation', 'Jobs', 'Audit']);
-    expect(labels(settingsFor(['technician', 'engineer', 'manager', 'trainer']))).toEqual(['You', 'Units of measure', 'Tokens', 'Limits']);
+    expect(labels(settingsFor(['administrator']))).toEqual(['You', 'Units of measure', 'Notices', 'Tokens', 'People', 'Sites', 'Organisation', 'Jobs', 'Audit']);
+    expect(labels(settingsFor(['technician', 'engineer', 'manager', 'trainer']))).toEqual(['You', 'Units of measure', 'Notices', 'Tokens', 'Limits']);
   });
 
   test('begins where the work is', () => {

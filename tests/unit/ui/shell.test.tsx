@@ -11,12 +11,13 @@ afterEach(() => {
   delete document.documentElement.dataset.theme;
 });
 
-const shellAt = (pathname: string) => (
+const shellAt = (pathname: string, unread = 0) => (
   <PathnameContext.Provider value={pathname}>
     <SignedInShell
       person={{ name: 'Ines Okafor', email: 'ines@demo.example' }}
       organisation={{ name: 'Northmoor Haulage' }}
       items={[{ href: '/cases', label: 'Cases' }, { href: '/units', label: 'Units' }]}
+      unread={unread}
       theme="device"
       signOut={<button type="button">Sign out</button>}
     >
@@ -35,6 +36,14 @@ test.each([
   render(shellAt(pathname));
   expect(row().getByRole('link', { name: 'Units' }).getAttribute('aria-current')).toBe(current);
   expect(row().getByRole('link', { name: 'Cases' }).hasAttribute('aria-current')).toBe(false);
+});
+
+test('the way to the notices says how many are unread, and nothing when none are', () => {
+  const { rerender } = render(shellAt('/units', 3));
+  expect(screen.getAllByRole('link', { name: 'Notices, 3 unread' })).toHaveLength(2);
+  expect(screen.getByText(', 3 unread notices').closest('summary')?.textContent).toContain('Menu');
+  rerender(shellAt('/units'));
+  expect(screen.getAllByRole('link', { name: 'Notices' })).toHaveLength(2);
 });
 
 test('the skip link leads to the main part', () => {
