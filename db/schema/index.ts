@@ -17,3 +17,4 @@ export * from './oil-catch';
 export * from './search-entry';
 export * from './mail';
 export * from './repair';
+export * from './watch';

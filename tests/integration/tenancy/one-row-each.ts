@@ -41,6 +41,10 @@ export async function insertOneRowEach(tx: Transaction, { organisationId, siteId
   await tx.insert(schema.mail).values({ ...of, id: newId(), kind: 'notice', toAddress: 'somebody@people.test', subject: 'Test', body: 'Words', entity: 'unit', entityId: unitId });
   await tx.insert(schema.repair).values({ ...of, id: repairId, caseId, remedyId: 'r', chosenAt: AT, chosenBy: personId });
   await tx.insert(schema.repairStep).values({ ...of, id: newId(), repairId, caseId, step: 0, mark: 'done', personId, at: AT });
+  const watchId = newId();
+  await tx.insert(schema.watch).values({ ...of, id: watchId, caseId, unitId, causeId: 'cause', plan: {} as never, begin: [], startedAt: AT, startedBy: personId });
+  await tx.insert(schema.watchLink).values({ ...of, id: newId(), watchId, caseId, checkId: 'c', forWhom: 'Driver', expiresAt: AT, createdBy: personId });
+  await tx.insert(schema.watchReading).values({ ...of, id: newId(), watchId, caseId, checkId: 'c', kind: 'state', shares: [], verdict: 'in-order', personId, at: AT });
   await tx.insert(schema.savedView).values({ ...of, id: newId(), personId, list: 'cases', name: 'Mine', query: 'whose=me' });
   await tx.insert(schema.removal).values({ ...of, id: newId(), entity: 'unit', entityId: unitId, kind: 'hide', reason: 'Test', personId, at: AT });
   await tx.insert(schema.audit).values({ ...of, id: newId(), action: 'test', entity: 'unit', entityId: unitId, changed: {} });
