@@ -1,9 +1,10 @@
 import type { MailAtHand } from '@/db/queries/mail';
 import { invitationText } from '../invitation/mail';
+import { watchLinkText } from '../watch/link-mail';
 import type { Post } from './send';
 
 /** Who makes the text of a kind of mail when it is sent, because it holds a secret. */
-const MAKERS: Readonly<Record<string, (post: Post, mail: MailAtHand) => Promise<string | undefined>>> = { invitation: invitationText };
+const MAKERS: Readonly<Record<string, (post: Post, mail: MailAtHand) => Promise<string | undefined>>> = { invitation: invitationText, 'watch-link': watchLinkText };
 
 /** @returns undefined when there is nothing to say any more */
 export async function textAtSending(post: Post, mail: MailAtHand): Promise<string | undefined> {
