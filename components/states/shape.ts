@@ -16,6 +16,7 @@ export const PAGES: readonly Page[] = [
   { route: 'cases/[id]', shape: 'case', what: 'the case' },
   { route: 'cases/[id]/catch', shape: 'form', what: 'the oil caught' },
   { route: 'cases/[id]/repair', shape: 'record', what: 'the repair plan' },
+  { route: 'cases/[id]/watch', shape: 'record', what: 'the watch' },
   { route: 'cases/[id]/history', shape: 'history', what: 'the history of the case' },
   { route: 'units', shape: 'list', what: 'the units' },
   { route: 'units/new', shape: 'form', what: 'the form' },

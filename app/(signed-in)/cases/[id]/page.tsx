@@ -75,6 +75,7 @@ export default async function CasePage({ params, searchParams }: Props) {
         <h2 id="call">The call</h2>
         {view.calls.length > 0 && <Calls calls={view.calls} rulebook={rulebook} timeZone={head.timeZone} />}
         {state.status === 'called' && <p className="no-print"><ButtonLink variant="quiet" href={`/cases/${head.id}/repair`}>The repair plan</ButtonLink></p>}
+        {state.status !== 'open' && <p className="no-print"><ButtonLink variant="quiet" href={`/cases/${head.id}/watch`}>Watch the repair</ButtonLink></p>}
         {works && state.status === 'open' && <div className="no-print"><CallForm action={callFromForm} callId={newId()} initial={state} rulebook={rulebook} /></div>}
         {works && state.status !== 'open' && <div className="no-print"><ReopenForm action={reopenFromForm} eventId={newId()} caseId={head.id} /></div>}
         {view.calls.length === 0 && <p className={works ? 'hidden print:block' : undefined}>Not called.</p>}
