@@ -81,7 +81,9 @@ const OUTCOMES = [
   { value: 'lost', label: 'Lost sight of', hint: 'Nobody can look any more. It proves nothing either way.' },
 ];
 
-export function EndForm({ action, ids }: { action: WatchAction; ids: Record<string, string> }) {
+type Ended = ActionState<{ id: string; caseId: string; comebackCaseId: string | null }>;
+
+export function EndForm({ action, ids }: { action: (previous: Ended, form: FormData) => Promise<Ended>; ids: Record<string, string> }) {
   const form = useForm(action);
   return (
     <Disclosure summary="End the watch" open={form.message !== undefined}>

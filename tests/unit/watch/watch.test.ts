@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
-import { compileRulebook, rank } from '@/lib/diagnose';
+import { natsOf } from '@/lib/diagnose';
 import { defaultRulebook } from '@/lib/diagnose/default-rulebook';
-import type { Finding } from '@/lib/diagnose/types';
+import type { EvidenceTerm, Finding } from '@/lib/diagnose/types';
 import { addDays, daysOf, dueReadings, endOf, isSeen, OUTCOMES, planFor, proofOf, whyNotHeld, type Read, type Watched } from '@/lib/watch';
 import { seededRandom } from '@/tests/support/random';
 
@@ -98,18 +98,13 @@ describe('what it proves', () => {
   });
 
   it('counts a cause as seen by one sure answer that speaks for it almost by itself', () => {
-    const compiled = compileRulebook(defaultRulebook);
-    const seen = (reliability: number, checkId: string, state: string, causeId: string) => {
-      const findings: Finding[] = [{ id: 'f', checkId, stage: { kind: 'diagnosis' }, shares: [{ state, share: 1 }], reliability }];
-      return isSeen(rank(compiled, findings).causes.find((cause) => cause.causeId === causeId)?.terms ?? [], findings);
-    };
-    const strong = [...compiled.rules.values()].filter(({ kind }) => kind === 'table').map(({ rule }) => ({ rule, best: Object.entries(rule.weights).sort((a, b) => b[1] - a[1])[0] }));
-    const weak = strong.find(({ best }) => best && best[1] < 5 && best[1] > 0)?.rule;
-    expect(weak).toBeDefined();
-    const found = [...compiled.checks.values()].flatMap(({ id, stateIds }) => stateIds.flatMap((state) => compiled.causeIds.map((cause) => [id, state, cause] as const)));
-    const settled = found.filter(([id, state, cause]) => seen(1, id, state, cause));
-    expect(settled.length).toBeGreaterThan(0);
-    expect(settled.length).toBeLessThan(found.length / 20);
-    for (const [id, state, cause] of settled) expect(seen(0.7, id, state, cause)).toBe(false);
+    const term = (decibans: number, more: Partial<EvidenceTerm> = {}): EvidenceTerm => ({ kind: 'table', findingIds: ['f'], checkIds: ['c'], rules: ['rule'], group: 'check:c', weightNats: natsOf(decibans), countedNats: natsOf(decibans), ...more });
+    const finding = (more: Partial<Finding> = {}): Finding => ({ id: 'f', checkId: 'c', stage: { kind: 'diagnosis' }, shares: [{ state: 'yes', share: 1 }], reliability: 1, ...more });
+    expect(isSeen([term(3), term(20)], [finding()])).toBe(true);
+    expect(isSeen([term(19.9), term(-30)], [finding()])).toBe(false);
+    expect(isSeen([term(25)], [finding({ reliability: 0.7 })])).toBe(false);
+    expect(isSeen([term(25)], [finding({ shares: [{ state: 'yes', share: 0.9 }, { state: 'no', share: 0.1 }] })])).toBe(false);
+    expect(isSeen([term(25, { kind: 'compound' })], [finding()])).toBe(false);
+    expect(isSeen([term(25, { rules: [] })], [finding()])).toBe(false);
   });
 });

@@ -59,7 +59,7 @@ export default async function WatchPage({ params }: { params: Promise<{ id: stri
                   {toRead.length > 0 && <div className="mt-3"><ReadCautionsForm action={readCautions} of={{ caseId, checkId }} about={name} cautionIds={toRead} /></div>}
                 </Notice>
               )}
-              {toRead.length === 0 ? <ReadForm key={current.readings.length} action={saveReading} ids={{ ...ids, id: newId() }} checkId={checkId} prompt={check.prompt} states={check.kind === 'measured' ? [] : check.states} unit={null} units={units} /> : <p className="text-ink-soft">The form opens when the cautions above are read.</p>}
+              {toRead.length === 0 ? <ReadForm key={current.readings.length} action={saveReading} ids={{ ...ids, id: newId() }} checkId={checkId} prompt={check.prompt} states={check.kind === 'measured' ? [] : check.answers} unit={check.unitSymbol} units={units} /> : <p className="text-ink-soft">The form opens when the cautions above are read.</p>}
             </section>
           );
         })}
