@@ -93,7 +93,7 @@ export async function makeTenant(databases: TestDatabases, options: TenantOption
 }
 
 /** Signs links in tests. */
-const TEST_SECRET = 'a secret for tests alone';
+export const TEST_SECRET = 'a secret for tests alone, of no use anywhere';
 
 /** Somebody who isn't signed in, from a network address of his own unless one is given. */
 export const makeVisitor = (databases: TestDatabases, { network = randomUUID(), now = () => new Date() }: Partial<Visitor> = {}): Visitor => ({

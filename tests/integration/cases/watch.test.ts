@@ -17,7 +17,7 @@ import { endRepair, markStep } from '@/lib/services/repair/work';
 import { acknowledgeRepair } from '@/lib/services/repair/acknowledge';
 import { DAY_MS, makeClock } from '@/tests/support/clock';
 import { openTestDatabases, type TestDatabases } from '@/tests/support/context';
-import { makeVisitor, type Tenant } from '@/tests/support/tenant';
+import { makeVisitor, TEST_SECRET, type Tenant } from '@/tests/support/tenant';
 import { makeWorkshop, openACase, readCautions } from './support';
 
 const CAUSE = 'rings-worn';
@@ -183,7 +183,7 @@ describe('a link', () => {
   });
 
   type Linked = Awaited<ReturnType<typeof linked>>;
-  const SECRET = 'a secret for tests alone';
+  const SECRET = TEST_SECRET;
   const resigned = async ({ token }: Linked, change: Partial<ReturnType<typeof contentsOf>>) => signWatchToken(SECRET, { ...contentsOf(token), ...change });
   const contentsOf = (token: string) => {
     const contents = readWatchToken(SECRET, token);
