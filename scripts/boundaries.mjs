@@ -94,6 +94,13 @@ const ROWS = [
     because: 'A stopwatch is times of the clock, handed to it.',
   },
   {
+    folder: 'lib/watch/**',
+    // Of the schemas only how a day is written.
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES('diagnose', 'schemas'), '@/lib/schemas', '@/lib/diagnose', 'zod'],
+    because: 'What a watch asks for and proves is worked out of what is handed to it.',
+    typesAllowed: true,
+  },
+  {
     folder: 'lib/schemas/**',
     never: [...FRAMEWORK, ...DATABASE, ...APPLICATION, '@/lib/services', '@/lib/services/**', '@/lib/auth/session'],
     because: 'Schemas are shared by form, action, route and service.',

@@ -8,6 +8,8 @@ const PAGES = [
   { path: '/fitting', label: 'Fitting' },
   { path: '/break-in', label: 'Break-in run' },
   { path: '/release', label: 'Release' },
+  { path: '/watch', label: 'Watch' },
+  { path: '/dossier', label: 'Dossier' },
 ] as const;
 
 type Path = (typeof PAGES)[number]['path'];

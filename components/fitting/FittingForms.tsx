@@ -36,7 +36,7 @@ export function StartFittingForm({ action, caseId, newIds, models, standing, uni
   const condition = form.field('condition');
   return (
     <Form form={form} label="Begin the fitting" errorTitle="Not begun yet">
-      <Hidden values={{ id: newIds.fitting, fitId: newIds.fit, caseId }} />
+      <Hidden values={{ id: newIds.fitting, newFitId: newIds.fit, caseId }} />
       {standing && (
         <SelectField
           label="Why the old one comes off"

@@ -22,6 +22,7 @@ export const PAGES: readonly Page[] = [
   { route: 'cases/[id]/dossier', shape: 'record', what: 'the dossiers' },
   { route: 'cases/[id]/dossier/[dossierId]', shape: 'record', what: 'the dossier' },
   { route: 'cases/[id]/claim', shape: 'record', what: 'claims and cores' },
+  { route: 'cases/[id]/watch', shape: 'record', what: 'the watch' },
   { route: 'cases/[id]/history', shape: 'history', what: 'the history of the case' },
   { route: 'units', shape: 'list', what: 'the units' },
   { route: 'units/new', shape: 'form', what: 'the form' },

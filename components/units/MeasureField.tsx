@@ -4,7 +4,7 @@ import { TextField } from '@/components/ui/TextField';
 import { measureUnit, type MeasureField as Measure } from '@/lib/schemas/measures';
 import { formatQuantity, unitDefinition, type Quantity, type UnitPreferences } from '@/lib/units';
 
-type Props = Pick<ComponentProps<typeof NumberWithUnitField>, 'label' | 'hint' | 'error' | 'required' | 'className'> & {
+type Props = Pick<ComponentProps<typeof NumberWithUnitField>, 'label' | 'hint' | 'id' | 'error' | 'required' | 'className'> & {
   name: string;
   defaultValue: string;
   measure: Pick<Measure, 'quantity' | 'like'>;

@@ -36,6 +36,8 @@ export const cases = pgTable(
     openedBy: uuid().notNull().references(() => person.id),
     openedAt: instant().notNull(),
     closedAt: instant(),
+    /** The case whose repair didn't hold. */
+    comebackOf: uuid(),
     /** Counts every write to the case, so that a page can tell whether it is behind. */
     version: integer().notNull().default(1),
     createdAt: createdAt(),
@@ -47,6 +49,7 @@ export const cases = pgTable(
     foreignKey({ columns: [t.organisationId, t.siteId], foreignColumns: [site.organisationId, site.id] }),
     foreignKey({ columns: [t.organisationId, t.fitId], foreignColumns: [fit.organisationId, fit.id] }),
     foreignKey({ columns: [t.organisationId, t.editionId], foreignColumns: [edition.organisationId, edition.id] }),
+    foreignKey({ name: 'case_comeback_of', columns: [t.organisationId, t.comebackOf], foreignColumns: [t.organisationId, t.id] }),
     index('case_unit').on(t.organisationId, t.unitId, t.openedAt),
     index('case_status').on(t.organisationId, t.status, t.openedAt),
     organisationPolicy(),

@@ -23,3 +23,4 @@ export * from './release';
 export * from './dossier';
 export * from './claim';
 export * from './notice';
+export * from './watch';

@@ -10,6 +10,7 @@ import { ANYONE, CASE_WORKERS, hasAnyRole, type Role } from './roles';
 export const PERMITTED = {
   'case.see': CASE_WORKERS,
   'case.work': CASE_WORKERS,
+  'watch.hold-early': ['engineer', 'manager'],
   'unit.see': ANYONE,
   'unit.edit': CASE_WORKERS,
   'model.see': ANYONE,

@@ -4,6 +4,7 @@ import { headers } from 'next/headers';
 import { redirect } from 'next/navigation';
 import { getServerSession } from 'next-auth/next';
 import { database } from '@/db';
+import { env } from '@/lib/env';
 import { jobs } from '@/lib/jobs';
 import type { Ctx } from '@/lib/services/context';
 import type { Standing } from '@/lib/services/session/standing';
@@ -12,7 +13,7 @@ import { authOptions } from './options';
 import { returnPath } from './return-path';
 
 /** What services take, for somebody of whom it is known what he or she stands on. */
-export const contextOf = (standing: Standing): Ctx => ({ ...standing, db: database(), now: () => new Date(), jobs, storage: storage() });
+export const contextOf = (standing: Standing): Ctx => ({ ...standing, db: database(), now: () => new Date(), jobs, storage: storage(), signingSecret: env().NEXTAUTH_SECRET });
 
 /** Who is signed in, checked against the database once a request; null when nobody is. */
 export const getContext = cache(async (): Promise<Ctx | null> => {

@@ -1,6 +1,7 @@
 import 'server-only';
 import { headers } from 'next/headers';
 import { database } from '@/db';
+import { env } from '@/lib/env';
 import { jobs } from '@/lib/jobs';
 import type { Visitor } from '@/lib/services/context';
 
@@ -16,6 +17,7 @@ export const visitorFrom = (headers: Headers): Visitor => ({
   network: networkOf(headers),
   now: () => new Date(),
   jobs,
+  signingSecret: env().NEXTAUTH_SECRET,
 });
 
 export const getVisitor = async (): Promise<Visitor> => visitorFrom(await headers());

@@ -11,7 +11,7 @@ export const fittingsInput = z.strictObject({ caseId: rowId });
 export const startFittingInput = z.strictObject({
   id: rowId,
   caseId: rowId,
-  fitId: rowId,
+  newFitId: rowId,
   modelId: z.uuid('Choose a model.'),
   condition: term('condition', 'Choose new or rebuilt.'),
   installedOn: day('the day on which it is fitted'),

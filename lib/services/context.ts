@@ -18,6 +18,8 @@ export interface Ctx {
   jobs: JobQueue;
   /** Where photos are kept. */
   storage: Storage;
+  /** What links are signed with. */
+  signingSecret: string;
   /** Given when the request may be a repeat of one that was done already. */
   repeat?: Repeat;
 }
@@ -29,4 +31,6 @@ export interface Visitor {
   network: string;
   now: () => Date;
   jobs: JobQueue;
+  /** What links are signed with. */
+  signingSecret: string;
 }

@@ -129,5 +129,5 @@ async function sessionOf(db: Database, cookie: string): Promise<Ctx> {
   const token = await decode({ secret: SECRET, token: cookie });
   const standing = token?.sub && (await standingOf(db, { personId: token.sub, organisationId: token.organisationId, sessionVersion: token.sessionVersion }));
   if (!standing) throw new Error('not signed in');
-  return { ...standing, db, now: () => new Date(), jobs, storage: noStorage };
+  return { ...standing, db, now: () => new Date(), jobs, storage: noStorage, signingSecret: SECRET };
 }

@@ -39,6 +39,7 @@ export const SHOTS: readonly Shot[] = [
   shot('(auth)/reset-password/[token]', 'reset-password-dead-link', 'nobody', '/reset-password/not-a-link-that-was-sent-by-anybody-here'),
   shot('(auth)/invite/[token]', 'invite-link', 'nobody', ({ invitation }) => invitation),
   shot('(auth)/invite/[token]', 'invite-dead-link', 'nobody', '/invite/not-a-link-that-was-sent-by-anybody-here'),
+  shot('(auth)/watch/[token]', 'watch-dead-link', 'nobody', '/watch/not-a-link-that-was-given-to-anybody-here'),
   shot(null, 'not-found-outside', 'nobody', '/nothing-here'),
   shot(null, 'not-found-inside', 'technician', '/nothing-here'),
 
@@ -64,6 +65,7 @@ export const SHOTS: readonly Shot[] = [
   shot(`${IN}/cases/[id]/dossier/[dossierId]`, 'case-dossier-read', 'manager', ({ dossier }) => dossier),
   shot(`${IN}/cases/[id]/claim`, 'case-claim', 'technician', ({ openCase }) => openCase && `/cases/${openCase}/claim`),
   shot(`${IN}/cases/[id]/claim`, 'case-claim-kept', 'manager', ({ dossier }) => dossier && dossier.replace(/\/dossier\/[^/]+$/, '/claim')),
+  shot(`${IN}/cases/[id]/watch`, 'case-watch', 'technician', ({ calledCase }) => calledCase && `/cases/${calledCase}/watch`),
   shot(`${IN}/cases/[id]/history`, 'case-history', 'technician', ({ openCase }) => openCase && `/cases/${openCase}/history`),
   shot(`${IN}/cases/[id]/history`, 'case-history-compared', 'technician', ({ pastMoment }) => pastMoment && `${pastMoment.replace('?', '/history?')}&with=2000-01-01`),
   shot(`${IN}/cases/[id]`, 'case-not-found', 'technician', `/cases/${NOWHERE}`),

@@ -76,6 +76,7 @@ export async function makeTenant(databases: TestDatabases, options: TenantOption
       now,
       jobs,
       storage,
+      signingSecret: TEST_SECRET,
     };
   };
 
@@ -91,10 +92,14 @@ export async function makeTenant(databases: TestDatabases, options: TenantOption
   return { ctx, organisationId, siteId, editionId, personId: ctx.person.id, addPerson, asOwner };
 }
 
+/** Signs links in tests. */
+export const TEST_SECRET = 'a secret for tests alone, of no use anywhere';
+
 /** Somebody who isn't signed in, from a network address of his own unless one is given. */
 export const makeVisitor = (databases: TestDatabases, { network = randomUUID(), now = () => new Date() }: Partial<Visitor> = {}): Visitor => ({
   db: databases.app,
   network,
   now,
   jobs,
+  signingSecret: TEST_SECRET,
 });

@@ -79,7 +79,7 @@ const otherHolds = (holds: OtherHoldView[], caseId: string): OtherHoldView[] =>
 type Events = Awaited<ReturnType<typeof selectCaseEvents>>;
 
 function statusAt(events: Events): CaseState['status'] {
-  const last = events.filter(({ kind }) => kind !== 'assigned').at(-1)?.kind;
+  const last = events.filter(({ kind }) => kind !== 'assigned' && kind !== 'doubted').at(-1)?.kind;
   return last === 'called' || last === 'closed' ? last : 'open';
 }
 

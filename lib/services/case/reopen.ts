@@ -1,4 +1,5 @@
 import { insertCaseEvent, lockCase, updateCase } from '@/db/queries/case';
+import { selectWatchUnderWay } from '@/db/queries/watch';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { conflict, notFound } from '@/lib/errors';
 import { reopenCaseInput } from '@/lib/schemas/case';
@@ -17,6 +18,7 @@ export const reopenCase = defineWrite({
     if (!row) throw notFound('case');
     refuseOldVersion(row.version, { decidedOn: input.version, what: 'case' });
     if (row.status === 'open') throw conflict('This case is open.');
+    if (await selectWatchUnderWay(tx, of)) throw conflict('This case is being watched. End the watch first, and say why.');
     const at = ctx.now();
     const written = await insertCaseEvent(tx, { ...of, id: input.id, kind: 'reopened', reason: input.reason, personId: ctx.person.id, at });
     if (!written) throw conflict('This id belongs to something else.');

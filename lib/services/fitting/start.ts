@@ -21,7 +21,7 @@ export const startFitting = defineWrite({
   input: startFittingInput,
   run: async (work) => {
     const { tx, ctx, audit, unchanged, input } = work;
-    const { id, caseId, fitId, ...typed } = input;
+    const { id, caseId, newFitId: fitId, ...typed } = input;
     const of = { organisationId: ctx.organisation.id, caseId };
     const { head, compiled } = await lockCaseOf(tx, of);
     const known = (await selectFittings(tx, of)).find((row) => row.id === id);

@@ -4,7 +4,7 @@ import { isRole } from '@/lib/auth/roles';
 import { METRIC_UNITS, US_UNITS, withUnits } from '@/lib/units';
 import type { Ctx } from '../context';
 
-export type Standing = Omit<Ctx, 'db' | 'now' | 'jobs' | 'storage' | 'repeat'>;
+export type Standing = Omit<Ctx, 'db' | 'now' | 'jobs' | 'storage' | 'signingSecret' | 'repeat'>;
 
 /**
  * What a request stands on, read anew at each; undefined when the person is no member, or his sessions were ended since

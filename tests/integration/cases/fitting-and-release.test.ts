@@ -45,13 +45,13 @@ describe('a fitting', () => {
     const { ctx } = workshop;
     const caseId = await openACase(workshop);
     const modelId = await makeModel(engineer);
-    const input = { id: newId(), fitId: newId(), caseId, modelId, condition: 'new' as const, installedOn: today() };
+    const input = { id: newId(), newFitId: newId(), caseId, modelId, condition: 'new' as const, installedOn: today() };
     await expect(startFitting({ ctx, input })).rejects.toMatchObject({ code: 'conflict', fields: { cautions: expect.stringContaining('scalding-coolant') } });
     await readWork(ctx, caseId, 'fitting');
     await startFitting({ ctx, input });
     await startFitting({ ctx, input });
-    expect((await listFittings({ ctx, input: { caseId } })).fittings).toMatchObject([{ id: input.id, fitId: input.fitId, finishedAt: null }]);
-    await expect(startFitting({ ctx, input: { ...input, id: newId(), fitId: newId() } })).rejects.toMatchObject({ fields: { previousWhyOut: expect.stringContaining('still on the unit') } });
+    expect((await listFittings({ ctx, input: { caseId } })).fittings).toMatchObject([{ id: input.id, fitId: input.newFitId, finishedAt: null }]);
+    await expect(startFitting({ ctx, input: { ...input, id: newId(), newFitId: newId() } })).rejects.toMatchObject({ fields: { previousWhyOut: expect.stringContaining('still on the unit') } });
   });
 
   it('keeps each answer, and makes the fit’s practice record of them', async () => {

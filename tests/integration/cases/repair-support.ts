@@ -28,7 +28,7 @@ export async function makeModel(ctx: Ctx, more: Partial<Parameters<typeof create
 export async function beginFitting(ctx: Ctx, { caseId, modelId, installedOn, ...more }: { caseId: string; modelId: string; installedOn: string; previousWhyOut?: 'failed-seen' }) {
   await readWork(ctx, caseId, 'fitting');
   const [id, fitId] = [newId(), newId()];
-  await startFitting({ ctx, input: { id, caseId, fitId, modelId, condition: 'new', installedOn, ...more } });
+  await startFitting({ ctx, input: { id, caseId, newFitId: fitId, modelId, condition: 'new', installedOn, ...more } });
   return { fittingId: id, fitId };
 }
 

@@ -2,6 +2,7 @@ import type { Feature } from './row';
 import { api } from './rows/api';
 import { bench } from './rows/bench';
 import { cases } from './rows/cases';
+import { watches } from './rows/watches';
 import { catches } from './rows/catches';
 import { claims } from './rows/claims';
 import { device } from './rows/device';
@@ -24,4 +25,4 @@ import { units } from './rows/units';
  * `app` is not here, and tries wrong roles, another organisation, malformed and oversized input on each. A feature adds
  * its file of rows to `rows/` and its name here.
  */
-export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, catches, device, photos, units, limits, models, search, jobs, repairs, fittings, settings, tokens, claims, dossiers, notices];
+export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, catches, device, photos, units, limits, models, search, jobs, repairs, fittings, settings, tokens, claims, dossiers, notices, watches];

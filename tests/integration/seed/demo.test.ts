@@ -37,6 +37,7 @@ beforeAll(async () => {
     mayRelease: false,
     now: () => NOW,
     jobs,
+    signingSecret: 'a secret for tests alone',
     storage: noStorage,
   };
 }, 300_000);

@@ -55,6 +55,10 @@ export async function insertOneRowEach(tx: Transaction, { organisationId, siteId
   await tx.insert(schema.dossierSending).values({ ...of, id: newId(), dossierId, caseId, toAddress: 'somebody@people.test', mailId, sentBy: personId, at: AT });
   await tx.insert(schema.claim).values({ ...of, id: newId(), caseId, toWhom: 'Desk', sentOn: '2026-03-02', createdBy: personId });
   await tx.insert(schema.coreCredit).values({ ...of, id: newId(), caseId, fitId, toWhom: 'Desk', sentOn: '2026-03-02', createdBy: personId });
+  const watchId = newId();
+  await tx.insert(schema.watch).values({ ...of, id: watchId, caseId, unitId, causeId: 'cause', plan: {} as never, begin: [], startedAt: AT, startedBy: personId });
+  await tx.insert(schema.watchLink).values({ ...of, id: newId(), watchId, caseId, checkId: 'c', forWhom: 'Driver', expiresAt: AT, createdBy: personId });
+  await tx.insert(schema.watchReading).values({ ...of, id: newId(), watchId, caseId, checkId: 'c', kind: 'state', shares: [], verdict: 'in-order', personId, at: AT });
   await tx.insert(schema.savedView).values({ ...of, id: newId(), personId, list: 'cases', name: 'Mine', query: 'whose=me' });
   await tx.insert(schema.removal).values({ ...of, id: newId(), entity: 'unit', entityId: unitId, kind: 'hide', reason: 'Test', personId, at: AT });
   await tx.insert(schema.audit).values({ ...of, id: newId(), action: 'test', entity: 'unit', entityId: unitId, changed: {} });

@@ -44,7 +44,7 @@ export const fittings = feature({
   rows: [
     { page: FITTING, roles: SEE, params: ({ caseId }) => ({ id: caseId }) },
     { action: FITTING, name: 'readCautions', roles: WORK, form: ({ otherId }) => ({ caseId: otherId, work: 'fitting', cautions: [CAUTION] }) },
-    { action: FITTING, name: 'begin', roles: WORK, form: ({ otherId, modelId, installedOn }) => ({ id: newId(), fitId: newId(), caseId: otherId, modelId, condition: 'new', installedOn }) },
+    { action: FITTING, name: 'begin', roles: WORK, form: ({ otherId, modelId, installedOn }) => ({ id: newId(), newFitId: newId(), caseId: otherId, modelId, condition: 'new', installedOn }) },
     { action: FITTING, name: 'sayOfPoint', roles: WORK, form: ({ caseId, fittingId }) => ({ id: newId(), caseId, fittingId, pointId: 'sealant', answer: 'thin-film' }) },
     { action: FITTING, name: 'finish', roles: WORK, form: ({ caseId, fittingId }) => ({ caseId, fittingId }) },
     { page: BREAK_IN, roles: SEE, params: ({ caseId }) => ({ id: caseId }) },
@@ -59,9 +59,9 @@ export const fittings = feature({
 
     { route: `${CASE}/work-cautions`, method: 'POST', roles: WORK, params: ({ otherId }) => ({ id: otherId }), body: () => ({ work: 'fitting', cautions: [{ id: newId(), cautionId: CAUTION }] }) },
     { route: `${CASE}/fittings`, method: 'GET', roles: SEE, params: ({ caseId }) => ({ id: caseId }) },
-    { route: `${CASE}/fittings`, method: 'POST', roles: WORK, params: ({ otherId }) => ({ id: otherId }), body: ({ modelId, installedOn }) => ({ id: newId(), fitId: newId(), modelId, condition: 'rebuilt', installedOn }) },
+    { route: `${CASE}/fittings`, method: 'POST', roles: WORK, params: ({ otherId }) => ({ id: otherId }), body: ({ modelId, installedOn }) => ({ id: newId(), newFitId: newId(), modelId, condition: 'rebuilt', installedOn }) },
     { route: `${CASE}/fittings/[fittingId]/points`, method: 'POST', roles: WORK, params: ofFitting, body: () => ({ id: newId(), pointId: 'governor', answer: 'changed' }) },
-    { route: `${CASE}/fittings/[fittingId]/finish`, method: 'POST', roles: WORK, params: ofFitting, body: () => ({}) },
+    { route: `${CASE}/fittings/[fittingId]/finish`, method: 'POST', roles: WORK, params: ofFitting },
     { route: `${CASE}/break-ins`, method: 'GET', roles: SEE, params: ({ caseId }) => ({ id: caseId }) },
     { route: `${CASE}/break-ins`, method: 'POST', roles: WORK, params: ({ readyId }) => ({ id: readyId }), body: () => ({ id: newId() }) },
     { route: `${CASE}/break-ins/[runId]/events`, method: 'POST', roles: WORK, params: ofRun, body: () => ({ id: newId(), kind: 'reading', pressure: '80 psi' }) },

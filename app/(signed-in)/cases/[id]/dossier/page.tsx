@@ -5,6 +5,7 @@ import { MakeForm } from '@/components/dossier/MakeForm';
 import { WhileWaiting } from '@/components/dossier/WhileWaiting';
 import { ButtonLink } from '@/components/ui/Button';
 import { EmptyState } from '@/components/ui/EmptyState';
+import { CaseNav } from '@/components/case/CaseNav';
 import { PageHeader } from '@/components/ui/PageHeader';
 import { orNotFound, pageContext } from '@/lib/auth/page';
 import { may, PERMITTED } from '@/lib/auth/permissions';
@@ -37,6 +38,7 @@ export default async function DossierPage({ params }: { params: Promise<{ id: st
         lead="One document of the case as it stands now. What it says is kept as it is, whatever is found afterwards."
         actions={<ButtonLink variant="quiet" href={`/cases/${head.id}/claim`}>Claim and core</ButtonLink>}
       />
+      <CaseNav caseId={id} here="/dossier" />
       {isWaiting && <WhileWaiting />}
       <div className="grid max-w-4xl gap-10">
         {works && (

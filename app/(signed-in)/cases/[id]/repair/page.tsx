@@ -8,7 +8,6 @@ import { moneyText } from '@/components/repair/money';
 import { ChosenRepair, EndedRepairs } from '@/components/repair/ChosenRepair';
 import { PlannedRemedy } from '@/components/repair/PlannedRemedy';
 import { ChooseForm } from '@/components/repair/RepairForms';
-import { ButtonLink } from '@/components/ui/Button';
 import { EmptyState } from '@/components/ui/EmptyState';
 import { PageHeader } from '@/components/ui/PageHeader';
 import { orNotFound, pageContext } from '@/lib/auth/page';
@@ -56,7 +55,6 @@ export default async function RepairPage({ params }: { params: Promise<{ id: str
         title="Repair plan"
         breadcrumbs={[{ label: 'Cases', href: '/cases' }, { label: `Case ${head.number}: ${head.unit.fleetNumber}`, href: `/cases/${caseId}` }]}
         lead="In the order of least expected cost, as the ranking stands now. Each answer can change it."
-        actions={<ButtonLink variant="quiet" href={`/cases/${caseId}/dossier`}>Dossier</ButtonLink>}
       />
       <CaseNav caseId={caseId} here="/repair" />
       <PhotosOfCase view={view} initial={await listPhotos({ ctx, input: { caseId } })}>

@@ -13,5 +13,5 @@ export const POST = route(startFitting, {
   params: { id: 'caseId' },
   scope: 'cases:write',
   status: 201,
-  doc: { summary: 'Begin to fit a compressor', description: 'It is on the unit’s record from now, by the id `fitId`; `previousWhyOut` says why the one before comes off. The cautions of a fitting have to be acknowledged today.', answers: fittingStarted },
+  doc: { summary: 'Begin to fit a compressor', description: 'It is on the unit’s record from now, by the id `newFitId`; `previousWhyOut` says why the one before comes off. The cautions of a fitting have to be acknowledged today.', answers: fittingStarted },
 });

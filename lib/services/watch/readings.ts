@@ -1,0 +1,55 @@
+import { insertWatchReading, selectWatchReadings, updateWatchReading } from '@/db/queries/watch';
+import { PERMITTED } from '@/lib/auth/permissions';
+import { notFound } from '@/lib/errors';
+import { addWatchReadingInput, takeBackWatchReadingInput } from '@/lib/schemas/watch';
+import { lockCaseOf } from '../case/locked';
+import { refuseUnread } from '../case/write-finding';
+import { defineWrite } from '../define';
+import { lockWatchOf, refuseEnded } from './locked';
+import { readReading, takenReading } from './read-reading';
+
+/** Writes down what was read of a repair that is watched. The id is the client's: sent twice, it is read once. */
+export const addWatchReading = defineWrite({
+  name: 'add.watch-reading',
+  doing: 'read what is watched',
+  roles: PERMITTED['case.work'],
+  input: addWatchReadingInput,
+  run: async ({ tx, ctx, input: { id, caseId, watchId, ...typed }, audit, unchanged }) => {
+    const of = { organisationId: ctx.organisation.id, caseId, watchId };
+    const { head, compiled } = await lockCaseOf(tx, of);
+    const watch = await lockWatchOf(tx, of);
+    if ((await selectWatchReadings(tx, of)).some(({ row }) => row.id === id)) {
+      unchanged();
+      return { id, caseId };
+    }
+    refuseEnded(watch);
+    const read = await readReading(tx, { habits: ctx, compiled, watch, typed });
+    const check = compiled.checks.get(typed.checkId)?.check;
+    if (check) await refuseUnread(tx, ctx, { head, compiled, check });
+    if (!(await insertWatchReading(tx, { ...of, ...read, id, personId: ctx.person.id, at: ctx.now() }))) throw takenReading();
+    audit({ entity: 'watch', entityId: watchId, changed: { caseId, checkId: read.checkId, shares: read.shares, valueTyped: read.valueTyped, verdict: read.verdict } });
+    return { id, caseId };
+  },
+});
+
+/** Takes a reading back that was wrong: it stays to be seen, and counts no more. */
+export const takeBackWatchReading = defineWrite({
+  name: 'take-back.watch-reading',
+  doing: 'read what is watched',
+  roles: PERMITTED['case.work'],
+  input: takeBackWatchReadingInput,
+  run: async ({ tx, ctx, input: { caseId, watchId, readingId, whyTakenBack }, audit, unchanged }) => {
+    const of = { organisationId: ctx.organisation.id, caseId, watchId };
+    await lockCaseOf(tx, of);
+    const watch = await lockWatchOf(tx, of);
+    const reading = (await selectWatchReadings(tx, of)).find(({ row }) => row.id === readingId)?.row;
+    if (!reading) throw notFound('reading');
+    if (reading.takenBackAt) unchanged();
+    else {
+      refuseEnded(watch);
+      await updateWatchReading(tx, { ...of, readingId }, { takenBackAt: ctx.now(), takenBackBy: ctx.person.id, takenBackWhy: whyTakenBack });
+      audit({ entity: 'watch', entityId: watchId, changed: { caseId, checkId: reading.checkId, takenBack: true, reason: whyTakenBack } });
+    }
+    return { id: readingId, caseId };
+  },
+});

@@ -1,0 +1,10 @@
+import type { WatchReadingRow, WatchRow } from '@/db/queries/watch';
+import { siteDay } from '@/lib/case/site-day';
+import type { Read, Watched } from '@/lib/watch';
+
+/** A watch as lib/watch takes it. */
+export const watchedOf = ({ plan, startedAt, odometerM }: Pick<WatchRow, 'plan' | 'startedAt' | 'odometerM'>, timeZone: string): Watched => ({ plan, startedOn: siteDay(startedAt, timeZone), startOdometerM: odometerM });
+
+/** The readings that stand, oldest first. */
+export const standingReads = (rows: readonly WatchReadingRow[], timeZone: string): Read[] =>
+  rows.filter(({ row }) => row.takenBackAt === null).map(({ row }) => ({ checkId: row.checkId, onDay: siteDay(row.at, timeZone), inOrder: row.verdict === 'in-order', odometerM: row.odometerM }));
