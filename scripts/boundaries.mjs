@@ -94,6 +94,16 @@ const ROWS = [
     because: 'A stopwatch is times of the clock, handed to it.',
   },
   {
+    folder: 'lib/break-in/**',
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES(), 'zod'],
+    because: 'A break-in run is times of the clock, handed to it.',
+  },
+  {
+    folder: 'lib/fitting/**',
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES(), 'zod'],
+    because: 'What is asked of a fitting is data, and what its answers make of the record follows from them.',
+  },
+  {
     folder: 'lib/watch/**',
     // Of the schemas only how a day is written.
     never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES('diagnose', 'schemas'), '@/lib/schemas', '@/lib/diagnose', 'zod'],
