@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import { SearchBox } from '@/components/search/SearchBox';
+import { classes } from '@/components/ui/classes';
 import { Menu } from './Menu';
 import { NavLinks, type NavItem } from './NavLinks';
 import { NoticesLink, Unread } from './NoticesLink';
@@ -51,7 +52,7 @@ export function AppHeader({ person, organisation, items, unread, theme, signOut 
         >
           {about}
         </Menu>
-        <Menu className="lg:hidden" panelClassName="absolute inset-x-0 top-full border-x-0" summary={<>Menu<Unread count={unread} of=" notices" /><Chevron /></>}>
+        <Menu className="lg:hidden" panelClassName="absolute inset-x-0 top-full border-x-0" summary={<>Menu<Unread count={unread} of=" notices" /><Chevron className={unread > 0 ? 'max-[23rem]:hidden' : undefined} /></>}>
           <nav aria-label="Main" className="mb-5">
             <NavLinks items={items} look="column" />
             <NoticesLink unread={unread} className="border-b border-rule text-lg" />
@@ -63,9 +64,10 @@ export function AppHeader({ person, organisation, items, unread, theme, signOut 
   );
 }
 
-function Chevron() {
+/** @param className for where there is no room for it */
+function Chevron({ className }: { className?: string }) {
   return (
-    <svg aria-hidden="true" viewBox="0 0 12 8" className="h-2 w-3 group-open:rotate-180" fill="none" stroke="currentColor" strokeWidth="2">
+    <svg aria-hidden="true" viewBox="0 0 12 8" className={classes('h-2 w-3 group-open:rotate-180', className)} fill="none" stroke="currentColor" strokeWidth="2">
       <path d="M1 1 6 6.5 11 1" />
     </svg>
   );
