@@ -2,12 +2,16 @@ import { DOSSIER_SECTIONS, type DossierBlock, type DossierContent, type DossierS
 import type { UnitPreferences } from '@/lib/units';
 import { momentText } from './moment';
 import { makeNamer } from './namer';
+import { breakInSection, type BreakInPart } from './sections/break-in';
 import { callSection, type CallPart } from './sections/call';
 import { complaintSection, type ComplaintPart } from './sections/complaint';
 import { findingsSection, measurementsSection, type FindingsPart } from './sections/findings';
 import { fitsSection, type FitPart } from './sections/fits';
+import { installSection, type InstallPart } from './sections/install';
 import { photosSection, type PhotoPart } from './sections/photos';
+import { proofSection, type ProofPart } from './sections/proof';
 import { rankingSection, type RankingPart } from './sections/ranking';
+import { releaseSection, type ReleasePart } from './sections/release';
 import { repairsSection, type RepairPart } from './sections/repairs';
 import { unitSection, type UnitPart } from './sections/unit';
 import type { Writer } from './writer';
@@ -24,6 +28,10 @@ export interface DossierParts {
   ranking: RankingPart;
   call: CallPart | null;
   repairs: readonly RepairPart[];
+  installs: readonly InstallPart[];
+  breakIns: readonly BreakInPart[];
+  releases: readonly ReleasePart[];
+  watches: readonly ProofPart[];
 }
 
 /** What its maker wants kept out of it. */
@@ -45,6 +53,10 @@ const WRITE: Record<DossierSectionId, (parts: DossierParts, writer: Writer, out:
   ranking: ({ ranking }, writer) => rankingSection(ranking, writer),
   call: ({ call }, writer) => callSection(call, writer),
   repairs: ({ repairs }, writer) => repairsSection(repairs, writer),
+  install: ({ installs }, writer) => installSection(installs, writer),
+  'break-in': ({ breakIns }, writer) => breakInSection(breakIns, writer),
+  release: ({ releases }, writer) => releaseSection(releases, writer),
+  proof: ({ watches }, writer) => proofSection(watches, writer),
 };
 
 const CAUTION =

@@ -12,6 +12,10 @@ export const DOSSIER_SECTIONS = [
   { id: 'ranking', title: 'Ranking of causes', about: 'As it stood when the cause was called, with the reasons' },
   { id: 'call', title: 'The call', about: 'Which cause was named, how surely, and how far it is proved' },
   { id: 'repairs', title: 'What was done', about: 'Each repair step by step: done, not done or doesn’t apply, with values' },
+  { id: 'install', title: 'How it was fitted', about: 'Every point of the install record, with values and who said it' },
+  { id: 'break-in', title: 'Break-in run', about: 'How long under load, what was read against the band, and the hot check' },
+  { id: 'release', title: 'Release', about: 'What was measured after the repair, and who released the unit by what right' },
+  { id: 'proof', title: 'Proof', about: 'What was read in the weeks after, how it ended and what that proves' },
 ] as const;
 
 export type DossierSectionId = (typeof DOSSIER_SECTIONS)[number]['id'];

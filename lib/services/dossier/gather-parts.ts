@@ -14,6 +14,7 @@ import type { Ctx } from '../context';
 import { compiledEdition } from '../edition/compiled';
 import { objectKey } from '../photo/object-key';
 import { lastMarks } from '../repair/marks';
+import { gatherProof } from './gather-proof';
 import { rankingPart } from './ranking-part';
 
 /** Far more than anybody looks through; a dossier takes fewer. */
@@ -43,6 +44,7 @@ export async function gatherParts(tx: Transaction, ctx: Pick<Ctx, 'organisation'
   const said = await selectSteps(tx, of);
   return {
     head,
+    ...(await gatherProof(tx, ctx, { ...of, compiled, causeName })),
     units: ctx.person.units,
     unit: {
       unit,

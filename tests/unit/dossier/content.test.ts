@@ -21,6 +21,18 @@ describe('what a dossier says', () => {
     expect(content.leftOut).toEqual([]);
   });
 
+  it('says how it was fitted, run in, released and proved, and makes what is missing or speaks against it stand out', () => {
+    const content = dossierContent(parts(), NOTHING_OUT);
+    expect(tableOf(blocksOf(content, 'install')).rows.map(({ cells, strong }) => [cells[1], strong])).toEqual([['A bead (known to shorten its life)', true], ['Not answered', true]]);
+    // 550 kPa, ten minutes after the start.
+    expect(tableOf(blocksOf(content, 'break-in')).rows).toMatchObject([{ cells: ['10 min 0 s', expect.stringMatching(/^5\.5\d? bar$|^550 kPa$/), 'yes'] }]);
+    expect(JSON.stringify(blocksOf(content, 'break-in'))).toContain('25 min 0 s');
+    expect(JSON.stringify(blocksOf(content, 'release'))).toContain('by this right: Inspector since 2019');
+    expect(JSON.stringify(blocksOf(content, 'proof'))).toContain('several things were changed together, and it held');
+    const nothing = dossierContent(parts({ installs: [], breakIns: [], releases: [], watches: [] }), NOTHING_OUT);
+    for (const id of ['install', 'break-in', 'release', 'proof']) expect(blocksOf(nothing, id)).toMatchObject([{ kind: 'text' }]);
+  });
+
   it('gives a measured value its limit, where that comes from, and the verdict, with who and when and what was noted', () => {
     const [row] = tableOf(blocksOf(dossierContent(parts(), NOTHING_OUT), 'measurements')).rows;
     expect(row?.cells.map((cell) => cell.replaceAll('\u00a0', ' '))).toEqual([expect.any(String), '48 s ± 1 s', 'at most 25 s', 'Our own rule 7', 'Out of limit']);

@@ -34,6 +34,14 @@ export function parts(more: Partial<DossierParts> = {}): DossierParts {
     ranking: { at: AT, isOfCall: true, editionNumber: 1, causes: [{ name: 'Drain choked', p: 0.62, reasons: [{ finding: 'Drain: heavy bead', direction: 'for', strength: 'strongly', note: 'Sealant squeezes in.' }] }, { name: 'Worn rings', p: 0.38, reasons: [] }] },
     call: { mainCause: 'Drain choked', contributingCauses: [], sureness: 'fairly-sure', proof: 'none', whyNotLeading: null, unlistedCause: null, person: 'Bo', at: AT },
     repairs: [{ name: 'Clear the drain', whyBefore: null, chosenAt: AT, chosenBy: 'Bo', endedAt: null, endedBy: null, outcome: null, whyDropped: null, steps: [{ text: 'Open it.', mark: { mark: 'done', value: '30 lb·ft', note: null, by: 'Bo', at: AT } }, { text: 'Look through it.', mark: null }] }],
+    installs: [{ modelName: 'Field 16', installedOn: '2026-03-01', finishedAt: AT, points: [{ name: 'Sealant', said: { label: 'A bead', against: true, value: null, note: 'none other at hand', by: 'Bo', at: AT } }, { name: 'Governor', said: null }] }],
+    breakIns: [{
+      run: { startedAt: AT.getTime(), endedAt: AT.getTime() + 1_500_000, events: [{ id: 'r', kind: 'reading', at: AT.getTime() + 600_000, pressurePa: 550_000 }] },
+      startedBy: 'Bo', outcome: 'done', whyStopped: null, hotCheck: { oil: 'none', coolant: 'none', where: null },
+      figures: { engineRpm: 1000, pressure: { aim: 551_581, low: 517_107, high: 586_054 }, duration: { least: 1200, most: 1800 }, from: 'edition', source: 'Common practice, no source.' },
+    }],
+    releases: [{ releasedAt: AT, releasedBy: 'Cy', basis: 'Inspector since 2019', note: null, on: [{ name: 'Governor cut-out', answer: '8.8 bar' }] }],
+    watches: [{ cause: 'Drain choked', plan: 'Oil at the dryer', startedAt: AT, begin: [{ statement: 'The tanks are clean.', said: 'Yes' }], readings: [{ check: 'Oil at the purge', answer: 'A film', isInOrder: true, by: 'Bo', at: AT }], endedAt: AT, outcome: 'held', why: null, proof: 'held-with-others' }],
     ...more,
   };
 }
