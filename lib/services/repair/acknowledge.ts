@@ -1,13 +1,9 @@
-import { lockCase } from '@/db/queries/case';
-import { insertAcknowledgements } from '@/db/queries/finding';
 import { PERMITTED } from '@/lib/auth/permissions';
-import { siteDay } from '@/lib/case/site-day';
 import { REPAIR_SET_UP } from '@/lib/case/view/repair-plan';
-import { dangersOf } from '@/lib/diagnose/cautions';
-import { invalid, notFound } from '@/lib/errors';
 import { acknowledgeRepairInput } from '@/lib/schemas/repair';
+import { lockCaseOf } from '../case/locked';
+import { noteRead } from '../case/note-read';
 import { defineWrite } from '../define';
-import { compiledEdition } from '../edition/compiled';
 
 /** Notes that a person read the cautions of a repair today, for a system that is opened. */
 export const acknowledgeRepair = defineWrite({
@@ -15,19 +11,10 @@ export const acknowledgeRepair = defineWrite({
   doing: 'acknowledge cautions',
   roles: PERMITTED['case.work'],
   input: acknowledgeRepairInput,
-  run: async ({ tx, ctx, input: { caseId, remedyId, cautions }, audit, unchanged }) => {
-    const of = { organisationId: ctx.organisation.id, caseId };
-    const row = await lockCase(tx, of);
-    if (!row) throw notFound('case');
-    const { rulebook } = await compiledEdition(tx, { ...of, editionId: row.editionId });
-    const remedy = rulebook.remedies.find(({ id }) => id === remedyId);
-    if (!remedy || cautions.some(({ cautionId }) => !remedy.cautions.includes(cautionId))) throw invalid({ cautions: 'These are not the cautions of this repair.' });
-    const at = ctx.now();
-    const dangers = dangersOf(REPAIR_SET_UP);
-    const onDay = siteDay(at, row.timeZone);
-    const written = await insertAcknowledgements(tx, cautions.map(({ id, cautionId }) => ({ ...of, id, cautionId, personId: ctx.person.id, onDay, dangers, at })));
-    if (written === 0) unchanged();
-    else audit({ entity: 'caution_acknowledgement', entityId: caseId, changed: { cautions: cautions.map(({ cautionId }) => cautionId), dangers, onDay } });
-    return cautions.map(({ cautionId }) => ({ cautionId, dangers }));
+  run: async (given) => {
+    const { caseId, remedyId, cautions } = given.input;
+    const { head, compiled } = await lockCaseOf(given.tx, { organisationId: given.ctx.organisation.id, caseId });
+    const known = compiled.rulebook.remedies.find(({ id }) => id === remedyId)?.cautions ?? [];
+    return noteRead(given, { head, work: { cautions: known, setUp: REPAIR_SET_UP }, what: 'repair', cautions });
   },
 });

@@ -1,20 +1,14 @@
 'use server';
 
-import { revalidatePath } from 'next/cache';
 import { action } from '@/lib/auth/action';
-import { newId } from '@/lib/ids';
 import { acknowledgeCautions } from '@/lib/services/case/acknowledge-cautions';
 import { endCatch, remindOfCatch } from '@/lib/services/oil-catch/end';
 import { startCatch } from '@/lib/services/oil-catch/start';
 import { takeBackWeighing } from '@/lib/services/oil-catch/take-back';
 import { weigh } from '@/lib/services/oil-catch/weigh';
+import { cautionsRead, readAnew } from '../case-forms';
 
-const readAnew = (_result: unknown, { caseId }: Record<string, string | string[]>) => revalidatePath(`/cases/${caseId}`, 'layout');
-
-export const readCautions = action(acknowledgeCautions, {
-  input: ({ caseId, checkId, cautions }) => ({ caseId, checkId, cautions: [cautions ?? []].flat().map((cautionId) => ({ id: newId(), cautionId })) }),
-  after: readAnew,
-});
+export const readCautions = action(acknowledgeCautions, { input: cautionsRead, after: readAnew });
 export const begin = action(startCatch, { after: readAnew });
 export const saveWeighing = action(weigh, { after: readAnew });
 export const takeDown = action(endCatch, { after: readAnew });

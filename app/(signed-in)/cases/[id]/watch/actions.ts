@@ -1,20 +1,14 @@
 'use server';
 
-import { revalidatePath } from 'next/cache';
 import { action } from '@/lib/auth/action';
-import { newId } from '@/lib/ids';
 import { acknowledgeCautions } from '@/lib/services/case/acknowledge-cautions';
 import { endWatch } from '@/lib/services/watch/end';
 import { createWatchLink, revokeWatchLink } from '@/lib/services/watch/links';
 import { addWatchReading, takeBackWatchReading } from '@/lib/services/watch/readings';
 import { startWatch } from '@/lib/services/watch/start';
+import { cautionsRead, readAnew } from '../case-forms';
 
-const readAnew = (_result: unknown, { caseId }: Record<string, string | string[]>) => revalidatePath(`/cases/${caseId}`, 'layout');
-
-export const readCautions = action(acknowledgeCautions, {
-  input: ({ caseId, checkId, cautions }) => ({ caseId, checkId, cautions: [cautions ?? []].flat().map((cautionId) => ({ id: newId(), cautionId })) }),
-  after: readAnew,
-});
+export const readCautions = action(acknowledgeCautions, { input: cautionsRead, after: readAnew });
 /** Fields are named as the input is: "begin.0.answer". */
 export const beginWatch = action(startWatch, {
   input: (fields) => {
