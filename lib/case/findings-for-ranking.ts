@@ -1,5 +1,5 @@
 import { byStage, stageKey } from '@/lib/diagnose/stages';
-import type { Finding, Stage } from '@/lib/diagnose/types';
+import type { Finding, RecordFacts, Stage } from '@/lib/diagnose/types';
 import { standingFindings } from './current-findings';
 import type { FindingRow } from './rows';
 
@@ -28,6 +28,12 @@ export function findingsForRanking(rows: readonly Row[]): Finding[] {
     .map(({ id, checkId, stage, shares, reliability }) => ({ id, checkId, stage, shares, reliability }))
     .sort((a, b) => (a.id < b.id ? -1 : 1));
 }
+
+/**
+ * With what these findings are ranked. Whoever ranks a case, or explains or looks ahead in one, goes by this: a call that
+ * forgot the stages would leave out what was seen at a repair.
+ */
+export const rankOptions = (findings: readonly Pick<Finding, 'stage'>[], facts: RecordFacts) => ({ facts, stages: stagesOf(findings) });
 
 /** The stages that a ranking of these findings uses: those that they are of, and the diagnosis in any case. */
 export function stagesOf(findings: readonly Pick<Finding, 'stage'>[]): Stage[] {

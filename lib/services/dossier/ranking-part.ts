@@ -1,6 +1,7 @@
 import type { Transaction } from '@/db/connect';
 import { selectLatestRun, selectRun } from '@/db/queries/run';
 import { selectEdition } from '@/db/queries/edition';
+import { rankOptions } from '@/lib/case/findings-for-ranking';
 import { reasonViews } from '@/lib/case/view/causes';
 import { findingViews } from '@/lib/case/view/findings';
 import type { FindingRow, NoteRow } from '@/lib/case/rows';
@@ -27,7 +28,7 @@ export async function rankingPart(tx: Transaction, ctx: Pick<Ctx, 'organisation'
   const edition = run && (await selectEdition(tx, { organisationId, editionId: run.editionId }));
   if (!run || !edition) throw notFound('ranking of the case');
   const compiled = await compiledEdition(tx, { organisationId, editionId: run.editionId });
-  const explained = explain(compiled, run.inputs.findings, { facts: run.inputs.recordFacts });
+  const explained = explain(compiled, run.inputs.findings, rankOptions(run.inputs.findings, run.inputs.recordFacts));
   const reasons = reasonViews(compiled, explained, findingViews(compiled, rows, notes, ctx.person.units));
   return {
     at: run.at,

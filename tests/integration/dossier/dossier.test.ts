@@ -7,6 +7,7 @@ import { newId } from '@/lib/ids';
 import { createMailer, type Mailer } from '@/lib/mail';
 import { callCause } from '@/lib/services/case/call';
 import { readCaseState } from '@/lib/services/case/read';
+import { recordFinding } from '@/lib/services/case/record-finding';
 import type { Ctx } from '@/lib/services/context';
 import { adoptLimit } from '@/lib/services/limit/adopt';
 import { makeDossierAgain } from '@/lib/services/dossier/again';
@@ -20,7 +21,7 @@ import { acknowledgeRepair } from '@/lib/services/repair/acknowledge';
 import { chooseRepair } from '@/lib/services/repair/choose';
 import { readRepairPlan } from '@/lib/services/repair/read-plan';
 import { markStep } from '@/lib/services/repair/work';
-import { give, makeWorkshop, openACase } from '@/tests/integration/cases/support';
+import { give, makeWorkshop, openACase, readCautions, yes } from '@/tests/integration/cases/support';
 import { PostOffice } from '@/tests/integration/mail/post-office';
 import { send as sendPhoto } from '@/tests/integration/photos/support';
 import { makeClock } from '@/tests/support/clock';
@@ -109,6 +110,18 @@ describe('a dossier that is made', () => {
     const levels = dossier.content.sections.find(({ id }) => id === 'ranking')?.blocks.find((block) => block.kind === 'levels');
     expect(levels?.kind === 'levels' && levels.levels[0]?.p).toBe(cause?.p);
     expect(text).toContain(levels?.kind === 'levels' ? `${levels.levels[0]?.printed} ${levels.levels[0]?.name}` : 'no levels');
+  });
+
+  it('gives what was seen at a repair among the reasons, as the ranking has it', async () => {
+    const { ctx } = workshop;
+    const caseId = await openACase(workshop);
+    clock.forward(1_000);
+    await readCautions(ctx, caseId, 'sealant-in-drain');
+    await recordFinding({ ctx, input: { id: newId(), caseId, checkId: 'sealant-in-drain', stage: { kind: 'after-remedy', remedy: 1 }, answer: yes, deviceAt: ctx.now().toISOString() } });
+    const dossierId = newId();
+    await makeDossier({ ctx, input: { id: dossierId, caseId, paper: 'a4' } });
+    const levels = (await readDossier({ ctx, input: { caseId, dossierId } })).content.sections.find(({ id }) => id === 'ranking')?.blocks.find((block) => block.kind === 'levels');
+    expect(levels?.kind === 'levels' && levels.levels[0]?.reasons).toContainEqual(expect.stringMatching(/^Sealant in the (oil )?drain/));
   });
 
   it('is the same file when it is made again', async () => {
