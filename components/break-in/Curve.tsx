@@ -8,11 +8,17 @@ import { curveOf, secondsUnderLoad, type BreakInFigures, type Run } from '@/lib/
 import { clockText } from './clock-text';
 import type { ShownEvent } from './use-break-in';
 
+/** Of the person: how a pressure is written, and how many Pa one of it is. */
+export interface PressureUnit {
+  symbol: string;
+  pascals: number;
+}
+
 interface Props {
   events: readonly ShownEvent[];
   clock: Run;
   figures: BreakInFigures;
-  unit: { symbol: string; pascals: number };
+  unit: PressureUnit;
   timeZone: string;
 }
 

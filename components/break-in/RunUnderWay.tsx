@@ -9,7 +9,7 @@ import { isPaused, secondsUnderLoad } from '@/lib/break-in';
 import type { BreakInRunView } from '@/lib/schemas/break-in';
 import type { CaseView } from '@/lib/schemas/case-view';
 import { clockText } from './clock-text';
-import { Curve } from './Curve';
+import { Curve, type PressureUnit } from './Curve';
 import { useBreakIn, type Noted } from './use-break-in';
 import { useNow } from './use-now';
 
@@ -17,7 +17,7 @@ interface Props {
   caseId: string;
   reader: CaseView['reader'];
   run: BreakInRunView;
-  unit: { symbol: string; pascals: number };
+  unit: PressureUnit;
   /** ms, the server's time when it drew the page. */
   now: number;
   timeZone: string;

@@ -5,12 +5,12 @@ import { useRouter } from 'next/navigation';
 import { useEffect, useMemo, useState } from 'react';
 import { keepAndSend } from '@/components/case/data/send-answer';
 import { useWaiting } from '@/components/case/data/use-provisional';
-import type { Run } from '@/lib/break-in';
 import { newId } from '@/lib/ids';
 import { listen } from '@/lib/offline/bus';
 import { stamp } from '@/lib/offline/clock';
 import type { BreakInEventInput, BreakInEventView, BreakInRunView } from '@/lib/schemas/break-in';
 import type { CaseView } from '@/lib/schemas/case-view';
+import { clockOf } from './clock-of';
 
 interface Of {
   caseId: string;
@@ -24,7 +24,7 @@ interface Of {
 export type Noted = Pick<BreakInEventInput, 'kind' | 'reason' | 'pressure'>;
 
 /** An event as it is shown; one that still waits on this device says so. */
-export type ShownEvent = BreakInEventView & { waits: boolean };
+export type ShownEvent = BreakInEventView & { waits?: boolean };
 
 /** A break-in run with what was noted on this device and is not on the server yet: nothing that was tapped is lost. */
 export function useBreakIn({ caseId, reader, run, unitSymbol }: Of) {
@@ -43,17 +43,10 @@ export function useBreakIn({ caseId, reader, run, unitSymbol }: Of) {
         ? [{ id: item.id, kind: item.body.kind, at: new Date(Date.parse(item.body.deviceAt) + item.body.clockOffsetMs).toISOString(), reason: item.body.reason ?? null, pressure: item.body.pressure ? typed(item.body.pressure, unitSymbol) : null, pressurePa: null, by: 'you', waits: item.sentAt === undefined }]
         : [],
     );
-    return [...run.events.map((event) => ({ ...event, waits: false })), ...here].sort((a, b) => (a.at < b.at ? -1 : 1));
+    return [...run.events, ...here].sort((a, b) => (a.at < b.at ? -1 : 1));
   }, [run, waiting, unitSymbol]);
 
-  const clock: Run = useMemo(
-    () => ({
-      startedAt: Date.parse(run.startedAt),
-      endedAt: run.endedAt ? Date.parse(run.endedAt) : null,
-      events: events.map(({ id, kind, at, pressurePa }) => ({ id, kind, at: Date.parse(at), pressurePa })),
-    }),
-    [run.startedAt, run.endedAt, events],
-  );
+  const clock = useMemo(() => clockOf(run, events), [run, events]);
 
   async function note(noted: Noted): Promise<boolean> {
     setProblem(null);

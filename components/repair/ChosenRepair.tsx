@@ -3,11 +3,9 @@ import { timeText } from '@/components/case/words';
 import { PhotoStrip } from '@/components/photos/PhotoStrip';
 import type { Option } from '@/components/ui/SelectField';
 import { dayText } from '@/lib/schemas/day-text';
-import type { RepairView, StepMark } from '@/lib/schemas/repair';
+import { STEP_MARK_WORDS, type RepairView } from '@/lib/schemas/repair';
 import { RepairCautions } from './RepairCautions';
 import { EndForms, PlanForm, StepForm, type RepairAction } from './RepairForms';
-
-const MARKS: Record<StepMark, string> = { done: 'Done', 'not-done': 'Not done', 'not-applicable': 'Doesn’t apply' };
 
 interface Props {
   repair: RepairView;
@@ -46,7 +44,7 @@ export function ChosenRepair({ repair, caseId, timeZone, people, newIds, seen, r
             <p><b>{i + 1}.</b> {text}</p>
             {mark && (
               <p className="border-l-4 border-ink pl-3">
-                <strong>{MARKS[mark.mark]}</strong>{mark.value && <>: <span className="figure">{mark.value}</span></>}{mark.note && `, “${mark.note}”`} <span className="text-[0.9375rem] text-ink-soft">{mark.by}, {timeText(mark.at, timeZone)}</span>
+                <strong>{STEP_MARK_WORDS[mark.mark]}</strong>{mark.value && <>: <span className="figure">{mark.value}</span></>}{mark.note && `, “${mark.note}”`} <span className="text-[0.9375rem] text-ink-soft">{mark.by}, {timeText(mark.at, timeZone)}</span>
               </p>
             )}
             {ready && <PhotoStrip place={{ id: `step/${id}/${i}`, name: `step ${i + 1} of ${name}` }} />}

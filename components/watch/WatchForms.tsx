@@ -2,6 +2,7 @@
 
 import type { ActionState } from '@/lib/auth/form';
 import { Form } from '@/components/forms/Form';
+import { Hidden } from '@/components/forms/Hidden';
 import { useForm } from '@/components/forms/use-form';
 import { Disclosure } from '@/components/ui/Disclosure';
 import { RadioGroup } from '@/components/ui/RadioGroup';
@@ -9,16 +10,14 @@ import { SelectField } from '@/components/ui/SelectField';
 import { SubmitButton } from '@/components/ui/SubmitButton';
 import { TextField } from '@/components/ui/TextField';
 import { MeasureField } from '@/components/units/MeasureField';
-import { ODOMETER } from '@/lib/schemas/watch';
+import { BEGIN_ANSWERS, BEGIN_WORDS, ODOMETER } from '@/lib/schemas/watch';
 import type { UnitPreferences } from '@/lib/units';
 import { ReadingFields } from './ReadingFields';
 
 type Written = ActionState<{ id: string; caseId: string }>;
 export type WatchAction = (previous: Written, form: FormData) => Promise<Written>;
 
-const Hidden = ({ values }: { values: Record<string, string> }) => Object.entries(values).map(([name, value]) => <input key={name} type="hidden" name={name} value={value} readOnly />);
-
-const ANSWERS = [{ value: 'yes', label: 'Yes' }, { value: 'no', label: 'No' }, { value: 'not-applicable', label: 'Doesn’t apply' }];
+const ANSWERS = BEGIN_ANSWERS.map((value) => ({ value, label: BEGIN_WORDS[value] }));
 
 export function StartForm({ action, ids, begin, units }: { action: WatchAction; ids: Record<string, string>; begin: readonly string[]; units: UnitPreferences }) {
   const form = useForm(action);

@@ -3,18 +3,17 @@ import { timeText } from '@/components/case/words';
 import { DataTable, type Column } from '@/components/ui/DataTable';
 import { measureText } from '@/components/units/MeasureField';
 import { dayText } from '@/lib/schemas/day-text';
-import { ODOMETER } from '@/lib/schemas/watch';
+import { BEGIN_WORDS, ODOMETER } from '@/lib/schemas/watch';
 import type { WatchView } from '@/lib/services/watch/list';
 import type { UnitPreferences } from '@/lib/units';
 
 const PROOF: Readonly<Record<string, string>> = {
   none: 'The call is not proved by it.',
-  seen: 'The cause was seen: one sure finding settles it almost by itself.',
+  seen: 'The cause was seen: one sure finding points strongly to it.',
   isolated: 'The cause is proved by the repair: one thing was changed, and it held.',
   'held-with-others': 'It held, with several things changed: the repairs are proved together, not the one cause.',
 };
 const OUTCOME: Readonly<Record<string, string>> = { held: 'It held', comeback: 'It came back', lost: 'Lost sight of' };
-const SAID = { yes: 'Yes', no: 'No', 'not-applicable': 'Doesn’t apply' } as const;
 
 interface Props {
   watch: WatchView;
@@ -42,7 +41,7 @@ export function WatchRecord({ watch, units, timeZone }: Props) {
       </p>
       {proof && <p className="max-w-prose">{PROOF[proof]}</p>}
       {comeback && <p><Link className="inline-flex min-h-touch items-center underline underline-offset-4" href={`/cases/${comeback.caseId}`}>Case {comeback.number} goes on with it</Link></p>}
-      <ul className="ml-5 grid max-w-prose list-disc gap-1">{begin.map(({ statement, answer, why: because }) => <li key={statement}>{statement} {SAID[answer]}{because && `: ${because}`}</li>)}</ul>
+      <ul className="ml-5 grid max-w-prose list-disc gap-1">{begin.map(({ statement, answer, why: because }) => <li key={statement}>{statement} {BEGIN_WORDS[answer]}{because && `: ${because}`}</li>)}</ul>
       {begin.some(({ answer }) => answer === 'no') && <p className="max-w-prose">Not all of this was so when it began: the watch proves less.</p>}
       {readings.length > 0 ? <DataTable caption="Readings" columns={columns} rows={readings} rowKey={(one) => one.id} /> : <p className="text-ink-soft">Nothing was read yet.</p>}
     </section>

@@ -31,6 +31,12 @@ export interface HotCheck {
   where: string | null;
 }
 
+/** What leaked and where; null: nothing. @example leaksOf({ oil: 'leak', coolant: 'none', where: 'at the flange' }) // 'oil leaks: at the flange' */
+export function leaksOf({ oil, coolant, where }: HotCheck): string | null {
+  const leaks = [oil === 'leak' && 'oil leaks', coolant === 'leak' && 'coolant leaks'].filter(Boolean).join(' and ');
+  return leaks ? `${leaks}: ${where ?? ''}` : null;
+}
+
 export interface Run {
   /** ms of the clock. */
   startedAt: number;

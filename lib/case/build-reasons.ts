@@ -5,7 +5,7 @@ import { explain } from '@/lib/diagnose/explain';
 import { rankPairs } from '@/lib/diagnose/pairs';
 import type { CaseReasons } from '@/lib/schemas/case-view';
 import type { StateParts } from './build-state';
-import { findingsForRanking, stagesOf } from './findings-for-ranking';
+import { findingsForRanking, rankOptions } from './findings-for-ranking';
 import { reasonViews } from './view/causes';
 import { findingViews } from './view/findings';
 import { whatSettles } from './view/settle';
@@ -13,7 +13,7 @@ import { whatSettles } from './view/settle';
 /** Why the causes of a case stand where they stand: pure, and of the same parts as its state. */
 export function buildReasons({ compiled, head, rows, notes, run, units }: StateParts): CaseReasons {
   const findings = findingsForRanking(rows);
-  const options = { facts: run.recordFacts, stages: stagesOf(findings) };
+  const options = rankOptions(findings, run.recordFacts);
   return {
     version: head.version,
     causes: reasonViews(compiled, explain(compiled, findings, options), findingViews(compiled, rows, notes, units)),

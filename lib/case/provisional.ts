@@ -6,7 +6,7 @@ import type { CaseKit } from '@/lib/schemas/case-kit';
 import type { StateParts } from './build-state';
 import { correctedTime } from './corrected-time';
 import { arriving } from './current-findings';
-import { findingsForRanking, stagesOf } from './findings-for-ranking';
+import { findingsForRanking, rankOptions } from './findings-for-ranking';
 import { readAnswer } from './read-answer';
 import type { FindingRow } from './rows';
 import { siteDay } from './site-day';
@@ -43,7 +43,7 @@ export function provisionalParts({ compiled, kit, waiting, now }: Asked): StateP
   const { recordFacts } = kit.run;
   const ranking = (of: readonly FindingRow[]) => {
     const findings = findingsForRanking(of);
-    return rank(compiled, findings, { facts: recordFacts, stages: stagesOf(findings) });
+    return rank(compiled, findings, rankOptions(findings, recordFacts));
   };
   const last = given.at(-1);
   const keptNotes = kit.notes.map((note) => ({ ...note, at: new Date(note.at) }));

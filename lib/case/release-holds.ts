@@ -2,6 +2,7 @@ import type { CompiledCheck, CompiledRulebook } from '@/lib/diagnose/compiled';
 import type { Judgement } from '@/lib/limits';
 import type { StateShare } from '@/lib/diagnose/types';
 import { isNewer, slotOf, type Dated } from './current-findings';
+import { shareOf } from './share-of';
 
 interface Answer extends Dated {
   kind: string;
@@ -49,7 +50,5 @@ function standing(rows: readonly Answer[]): Answer[] {
   return kept;
 }
 
-function holding({ check }: CompiledCheck, shares: readonly StateShare[]): number {
-  const against = new Set(check.states.filter(({ holdsRelease }) => holdsRelease).map(({ id }) => id));
-  return shares.reduce((sum, { state, share }) => sum + (against.has(state) ? share : 0), 0);
-}
+const holding = ({ check }: CompiledCheck, shares: readonly StateShare[]): number =>
+  shareOf(shares, check.states.filter(({ holdsRelease }) => holdsRelease).map(({ id }) => id));

@@ -25,6 +25,12 @@ interface Said {
 /** What was last said of each point. @param said oldest first */
 export const standingAnswers = <One extends Said>(said: readonly One[]): Map<string, One> => new Map(said.map((one) => [one.pointId, one]));
 
+/** An answer in words, and whether it is known to shorten a compressor's life; one that is no longer asked stands as it was given. */
+export function saidOf<One extends Said>({ answers }: Pick<InstallPoint, 'answers'>, said: One): One & { label: string; against: boolean } {
+  const option = answers.find(({ id }) => id === said.answer);
+  return { ...said, label: option?.label ?? said.answer, against: option?.against ?? false };
+}
+
 /**
  * What the answers make of the fit's practice record.
  *

@@ -61,6 +61,9 @@ export interface RepairPlanView {
 export const STEP_MARKS = ['done', 'not-done', 'not-applicable'] as const;
 export type StepMark = (typeof STEP_MARKS)[number];
 
+/** As pages and documents say it. */
+export const STEP_MARK_WORDS: Readonly<Record<StepMark, string>> = { done: 'Done', 'not-done': 'Not done', 'not-applicable': 'Doesn’t apply' };
+
 const ofRepair = { caseId: rowId, repairId: rowId };
 
 export const chooseRepairInput = z.strictObject({

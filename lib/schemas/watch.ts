@@ -10,6 +10,9 @@ export const watchInput = z.strictObject({ caseId: rowId });
 
 export const BEGIN_ANSWERS = ['yes', 'no', 'not-applicable'] as const;
 
+/** As forms, pages and documents say it. */
+export const BEGIN_WORDS: Readonly<Record<(typeof BEGIN_ANSWERS)[number], string>> = { yes: 'Yes', no: 'No', 'not-applicable': 'Doesn’t apply' };
+
 export const startWatchInput = z.strictObject({
   id: rowId,
   caseId: rowId,

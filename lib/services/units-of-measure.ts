@@ -1,12 +1,15 @@
 import { invalid, type FieldErrors } from '@/lib/errors';
 import { measureUnit, type MeasureField } from '@/lib/schemas/measures';
-import { formatQuantity, parseQuantity, unitDefinition, type DecimalMark, type ParsedQuantity, type Quantity, type UnitPreferences } from '@/lib/units';
+import { formatQuantity, METRIC_UNITS, parseQuantity, unitDefinition, US_UNITS, type DecimalMark, type ParsedQuantity, type Quantity, type UnitPreferences } from '@/lib/units';
 
 /** Countries of the point; elsewhere "4,500" is asked back, because guessing would be wrong by a factor of a thousand. */
 const POINT = new Set(['US', 'CA', 'GB', 'IE', 'AU', 'NZ', 'IN', 'JP', 'MX']);
 
 /** The decimal mark that is meant in a country, where there is no doubt about it. */
 export const decimalMarkOf = (country: string): DecimalMark | undefined => (POINT.has(country) ? '.' : undefined);
+
+/** What somebody reads and writes in a country until he or she sets something else. */
+export const unitsOfCountry = (country: string): UnitPreferences => (country === 'US' ? US_UNITS : METRIC_UNITS);
 
 /** The parts of a context that say how somebody writes and reads measures. */
 export interface MeasureHabits {

@@ -4,7 +4,7 @@ import { openChecks } from '@/lib/diagnose/next-checks-open';
 import type { Finding, RecordFacts, SetUp } from '@/lib/diagnose/types';
 import { createWhatIf } from '@/lib/diagnose/what-if';
 import type { NextView, RepairView } from '@/lib/schemas/case-view';
-import { stagesOf } from '../findings-for-ranking';
+import { rankOptions } from '../findings-for-ranking';
 
 interface Asked {
   compiled: CompiledRulebook;
@@ -22,8 +22,8 @@ export function whatNext({ compiled, findings, recordFacts, vehicleState, labour
   next: NextView;
   repairs: RepairView[];
 } {
-  const stages = stagesOf(findings);
-  const open = openChecks(createWhatIf(compiled, findings, { facts: recordFacts, stages }), findings, stages);
+  const options = rankOptions(findings, recordFacts);
+  const open = openChecks(createWhatIf(compiled, findings, options), findings, options.stages);
   const chosen = nextChecks(open, {
     vehicle: { ...vehicleState, access: vehicleState.access ?? [] },
     money: labourRatePerHour === null ? {} : { labourRatePerHour },

@@ -5,6 +5,7 @@ import type { ReleaseCheckView } from '@/lib/schemas/release';
 import type { UnitPreferences } from '@/lib/units';
 import { standingFindings } from '../current-findings';
 import type { FindingRow } from '../rows';
+import { shareOf } from '../share-of';
 import { findingViews } from './findings';
 
 /** A check of a release with its answer as it stood. */
@@ -59,8 +60,6 @@ export function releaseChecks({ compiled, rows, since, units }: Asked): ReleaseC
 }
 
 const isOut = ({ judgement, shares }: Pick<FindingRow, 'judgement' | 'shares'>, inOrder: readonly string[]): boolean => (judgement ? judgement.verdict === 'out' : 1 - shareOf(shares, inOrder) >= OUT_FROM);
-
-const shareOf = (shares: FindingRow['shares'], states: readonly string[]): number => shares.reduce((sum, { state, share }) => sum + (states.includes(state) ? share : 0), 0);
 
 /** What still forbids a release, in a sentence; null: nothing. */
 export function whyNotReleased(checks: readonly ReleaseCheckView[]): string | null {

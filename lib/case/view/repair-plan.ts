@@ -1,13 +1,16 @@
 import type { CompiledRulebook } from '@/lib/diagnose/compiled';
-import { cautionsToRead } from '@/lib/diagnose/cautions';
 import { repairProblemOf } from '@/lib/diagnose/next-checks';
 import { repairOrder, type RepairOrder, type RepairStep } from '@/lib/diagnose/repair-order';
 import type { Remedy, SetUp } from '@/lib/diagnose/types';
 import { percent } from '@/lib/schemas/percent';
 import type { PlannedRemedyView, RepairPlanView } from '@/lib/schemas/repair';
+import { unreadOf } from './work-cautions';
 
 /** How a vehicle stands while it is repaired: what was closed is open. */
 export const REPAIR_SET_UP: SetUp = { engine: 'off', access: ['line-open'] };
+
+/** A repair as its cautions see it. */
+export const repairWork = ({ cautions }: Pick<Remedy, 'cautions'>) => ({ cautions, setUp: REPAIR_SET_UP });
 
 interface Parts {
   caseId: string;
@@ -55,7 +58,6 @@ interface Around extends Pick<Parts, 'compiled' | 'called' | 'acknowledged'> {
 }
 
 function plannedRemedy(remedy: Remedy, step: RepairStep, { isFirst, compiled, called, acknowledged }: Around): PlannedRemedyView {
-  const cautions = new Map(compiled.rulebook.cautions.map((caution) => [caution.id, caution]));
   const pWhenReached = step.p / step.reached;
   return {
     remedyId: remedy.id,
@@ -72,8 +74,7 @@ function plannedRemedy(remedy: Remedy, step: RepairStep, { isFirst, compiled, ca
     parts: remedy.parts,
     why: whySentence(remedy, pWhenReached, isFirst),
     called: remedy.causes.some((id) => called.includes(id)),
-    cautions: remedy.cautions.map((id) => ({ id, text: cautions.get(id)?.text ?? id })),
-    toRead: cautionsToRead({ cautions: remedy.cautions, setUp: REPAIR_SET_UP }, (id) => cautions.get(id)?.worseWhen ?? [], acknowledged),
+    ...unreadOf(compiled, repairWork(remedy), acknowledged),
     steps: remedy.steps,
     basis: remedy.basis,
     source: remedy.source ?? null,

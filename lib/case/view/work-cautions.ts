@@ -1,5 +1,5 @@
 import { cautionsToRead } from '@/lib/diagnose/cautions';
-import type { CompiledRulebook } from '@/lib/diagnose';
+import type { CompiledRulebook } from '@/lib/diagnose/compiled';
 import type { Check } from '@/lib/diagnose/types';
 
 interface Unread {

@@ -1,4 +1,4 @@
-import { curveOf, secondsUnderLoad, type BreakInFigures, type HotCheck, type Run } from '@/lib/break-in';
+import { curveOf, leaksOf, secondsUnderLoad, type BreakInFigures, type HotCheck, type Run } from '@/lib/break-in';
 import type { DossierBlock } from '@/lib/schemas/dossier-content';
 import { facts, heading, table, text } from '../blocks';
 import { measured } from '../measured';
@@ -28,7 +28,7 @@ export function breakInSection(runs: readonly BreakInPart[], { units, timeZone, 
       ['From', figures.source],
       ['Under load', run.endedAt === null ? 'still running' : minutes(secondsUnderLoad(run, run.endedAt))],
       ['Outcome', outcome === 'done' ? 'Run in' : outcome === 'stopped' ? `Stopped: “${whyStopped ?? ''}”` : null],
-      ['Hot check', hotCheck ? hotText(hotCheck) : 'Not looked'],
+      ['Hot check', hotCheck ? (leaksOf(hotCheck) ?? 'Dry') : 'Not looked'],
     ),
     ...table(
       [
@@ -39,9 +39,4 @@ export function breakInSection(runs: readonly BreakInPart[], { units, timeZone, 
       curveOf(run, figures.pressure).map(({ second, pressurePa, inBand }) => ({ cells: [minutes(second), pressure(pressurePa), inBand ? 'yes' : 'no'], strong: !inBand })),
     ),
   ]);
-}
-
-function hotText({ oil, coolant, where }: HotCheck): string {
-  const leaks = [oil === 'leak' && 'oil leaks', coolant === 'leak' && 'coolant leaks'].filter(Boolean).join(' and ');
-  return leaks ? `${leaks}: ${where ?? ''}` : 'Dry';
 }

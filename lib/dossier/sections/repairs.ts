@@ -1,5 +1,5 @@
 import type { DossierBlock } from '@/lib/schemas/dossier-content';
-import type { StepMark } from '@/lib/schemas/repair';
+import { STEP_MARK_WORDS, type StepMark } from '@/lib/schemas/repair';
 import { heading, table, text } from '../blocks';
 import { momentText } from '../moment';
 import type { Writer } from '../writer';
@@ -16,8 +16,6 @@ export interface RepairPart {
   steps: readonly { text: string; mark: { mark: StepMark; value: string | null; note: string | null; by: string; at: Date } | null }[];
 }
 
-const MARKS: Record<StepMark, string> = { done: 'Done', 'not-done': 'Not done', 'not-applicable': 'Doesn’t apply' };
-
 /** @param repairs in the order in which they were chosen */
 export function repairsSection(repairs: readonly RepairPart[], writer: Writer): DossierBlock[] {
   if (repairs.length === 0) return text('No repair was chosen.');
@@ -32,7 +30,7 @@ export function repairsSection(repairs: readonly RepairPart[], writer: Writer): 
         { title: 'Value', share: 30, figure: true },
       ],
       repair.steps.map(({ text: step, mark }) => ({
-        cells: [step, mark ? MARKS[mark.mark] : 'Nothing said', [mark?.value, mark?.note].filter(Boolean).join('; ')],
+        cells: [step, mark ? STEP_MARK_WORDS[mark.mark] : 'Nothing said', [mark?.value, mark?.note].filter(Boolean).join('; ')],
         note: mark && `${momentText(mark.at, timeZone)}, ${name(mark.by)}`,
         strong: mark?.mark === 'not-done',
       })),

@@ -1,11 +1,11 @@
 import { selectBreakInEvents, selectBreakInRuns, type BreakInEventRow, type BreakInRunRow } from '@/db/queries/break-in';
 import { PERMITTED } from '@/lib/auth/permissions';
+import { unreadOf } from '@/lib/case/view/work-cautions';
 import type { BreakInFigures } from '@/lib/break-in';
 import { breakInInput, type BreakInRunView, type BreakInView } from '@/lib/schemas/break-in';
 import { measureUnit } from '@/lib/schemas/measures';
 import { formatQuantity, type UnitPreferences } from '@/lib/units';
-import { gatherState } from '../case/gather-state';
-import { unreadOf } from '../case/unread';
+import { workOn } from '../case/work-on';
 import { defineRead } from '../define';
 import { breakInWork, compressorOf, figuresFor } from './work';
 
@@ -17,7 +17,7 @@ export const readBreakIn = defineRead({
   input: breakInInput,
   run: async ({ tx, ctx, input: { caseId } }): Promise<BreakInView> => {
     const of = { organisationId: ctx.organisation.id, caseId };
-    const { caseHead, compiled, acknowledged } = await gatherState(tx, ctx, { caseId });
+    const { caseHead, compiled, acknowledged } = await workOn(tx, ctx, caseId);
     const compressor = await compressorOf(tx, { ...of, unitId: caseHead.unitId });
     const figures = figuresFor(compiled, compressor?.model);
     const events = await selectBreakInEvents(tx, of);

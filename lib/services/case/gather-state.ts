@@ -1,15 +1,14 @@
 import type { Transaction } from '@/db/connect';
-import { selectCaseHead } from '@/db/queries/case';
-import { selectAcknowledgements, selectFindingNotes, selectFindings } from '@/db/queries/finding';
+import type { selectCaseHead } from '@/db/queries/case';
+import { selectFindingNotes, selectFindings } from '@/db/queries/finding';
 import { selectLastRuns } from '@/db/queries/run';
 import type { RunResult } from '@/db/schema';
 import type { StateParts } from '@/lib/case/build-state';
-import { findingsForRanking, stagesOf } from '@/lib/case/findings-for-ranking';
-import { siteDay } from '@/lib/case/site-day';
+import { findingsForRanking, rankOptions } from '@/lib/case/findings-for-ranking';
 import { rank, type Ranking } from '@/lib/diagnose';
 import { notFound } from '@/lib/errors';
 import type { Ctx } from '../context';
-import { compiledEdition } from '../edition/compiled';
+import { workOn } from './work-on';
 
 type Head = NonNullable<Awaited<ReturnType<typeof selectCaseHead>>>;
 
@@ -20,18 +19,15 @@ type Head = NonNullable<Awaited<ReturnType<typeof selectCaseHead>>>;
  */
 export async function gatherState(tx: Transaction, ctx: Ctx, { caseId, at = null }: { caseId: string; at?: Date | null }): Promise<StateParts & { caseHead: Head }> {
   const of = { organisationId: ctx.organisation.id, caseId };
-  const head = await selectCaseHead(tx, of);
-  if (!head) throw notFound('case');
+  const { caseHead: head, compiled, acknowledged } = await workOn(tx, ctx, caseId);
   const until = at ?? undefined;
-  const compiled = await compiledEdition(tx, { ...of, editionId: head.editionId });
   const rows = await selectFindings(tx, { ...of, receivedBy: until });
   const notes = await selectFindingNotes(tx, { ...of, by: until });
   const [run, previous] = await selectLastRuns(tx, { ...of, by: until });
   if (!run) throw notFound('state of the case');
   const { recordFacts } = run.inputs;
   const findings = findingsForRanking(rows);
-  const ranking = rank(compiled, findings, { facts: recordFacts, stages: stagesOf(findings) });
-  const acknowledged = await selectAcknowledgements(tx, { ...of, personId: ctx.person.id, onDay: siteDay(ctx.now(), head.timeZone) });
+  const ranking = rank(compiled, findings, rankOptions(findings, recordFacts));
   return {
     caseHead: head,
     compiled,

@@ -1,7 +1,7 @@
 import type { Transaction } from '@/db/connect';
 import { insertRun } from '@/db/queries/run';
 import type { RunInputs, RunResult } from '@/db/schema';
-import { stagesOf } from '@/lib/case/findings-for-ranking';
+import { rankOptions } from '@/lib/case/findings-for-ranking';
 import type { CompiledRulebook, Finding, Ranking, RecordFacts } from '@/lib/diagnose';
 import { runOfRecord } from '@/lib/diagnose/record-run';
 import { newId } from '@/lib/ids';
@@ -30,7 +30,7 @@ export interface MadeRun {
 export async function makeRun(tx: Transaction, asked: Asked): Promise<MadeRun> {
   const { compiled, findings, recordFacts } = asked;
   const started = performance.now();
-  const { ranking, agreed, difference } = await runOfRecord(compiled, findings, { facts: recordFacts, stages: stagesOf(findings) });
+  const { ranking, agreed, difference } = await runOfRecord(compiled, findings, rankOptions(findings, recordFacts));
   const id = newId(asked.at.getTime());
   await insertRun(tx, {
     organisationId: asked.organisationId,

@@ -6,7 +6,8 @@ import { selectWatches, selectWatchReadings } from '@/db/queries/watch';
 import { answerText } from '@/lib/case/view/answer-text';
 import type { CompiledRulebook } from '@/lib/diagnose';
 import type { DossierParts } from '@/lib/dossier/content';
-import { pointsFor, standingAnswers } from '@/lib/fitting';
+import { pointsFor, saidOf, standingAnswers } from '@/lib/fitting';
+import { BEGIN_WORDS } from '@/lib/schemas/watch';
 import { runOf } from '../break-in/work';
 import type { Ctx } from '../context';
 
@@ -16,8 +17,6 @@ interface Of {
   compiled: CompiledRulebook;
   causeName: (id: string) => string;
 }
-
-const BEGIN: Readonly<Record<string, string>> = { yes: 'Yes', no: 'No', 'not-applicable': 'Doesn’t apply' };
 
 /** What of a dossier comes after the call: how it was fitted, run in, released, and what was read since. */
 export async function gatherProof(tx: Transaction, ctx: Pick<Ctx, 'person'>, { compiled, causeName, ...of }: Of): Promise<Pick<DossierParts, 'installs' | 'breakIns' | 'releases' | 'watches'>> {
@@ -31,7 +30,7 @@ export async function gatherProof(tx: Transaction, ctx: Pick<Ctx, 'person'>, { c
       cause: causeName(row.causeId),
       plan: row.plan.name,
       startedAt: row.startedAt,
-      begin: row.begin.map(({ statement, answer, why }) => ({ statement, said: [BEGIN[answer], why].filter(Boolean).join(': ') })),
+      begin: row.begin.map(({ statement, answer, why }) => ({ statement, said: [BEGIN_WORDS[answer], why].filter(Boolean).join(': ') })),
       readings: readings.map(({ row: one, by }) => ({
         check: checkOf(one.checkId)?.name ?? one.checkId,
         answer: answerText(checkOf(one.checkId), { ...one, errorSi: null }, ctx.person.units),
@@ -52,10 +51,9 @@ export async function gatherProof(tx: Transaction, ctx: Pick<Ctx, 'person'>, { c
         modelName: fitting.modelName,
         installedOn: fitting.installedOn,
         finishedAt: fitting.finishedAt,
-        points: pointsFor(fitting).map(({ id, name, answers: options }) => {
-          const answer = said.get(id);
-          const option = options.find((one) => one.id === answer?.answer);
-          return { name, said: answer ? { label: option?.label ?? answer.answer, against: option?.against ?? false, value: answer.value, note: answer.note, by: answer.by, at: answer.at } : null };
+        points: pointsFor(fitting).map((point) => {
+          const answer = said.get(point.id);
+          return { name: point.name, said: answer ? saidOf(point, answer) : null };
         }),
       };
     }),

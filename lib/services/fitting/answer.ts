@@ -1,11 +1,10 @@
 import { selectFit, updateFit } from '@/db/queries/fit';
-import { insertInstallAnswer, selectFittings, selectInstallAnswers } from '@/db/queries/fitting';
+import { finishFittingRow, insertInstallAnswer, selectFittings, selectInstallAnswers } from '@/db/queries/fitting';
 import type { Transaction } from '@/db/connect';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { conflict, invalid, notFound } from '@/lib/errors';
 import { missingWith, pointsFor, practiceOf, standingAnswers } from '@/lib/fitting';
 import { answerPointInput, finishFittingInput } from '@/lib/schemas/fitting';
-import { finishFittingRow } from '@/db/queries/fitting';
 import { lockCaseOf } from '../case/locked';
 import { refuseUnread } from '../case/write-finding';
 import { defineWrite, type Work } from '../define';

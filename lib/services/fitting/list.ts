@@ -1,9 +1,9 @@
 import { selectFittings, selectInstallAnswers, type FittingRow, type InstallAnswerRow } from '@/db/queries/fitting';
 import { PERMITTED } from '@/lib/auth/permissions';
-import { pointsFor, standingAnswers, type InstallPoint } from '@/lib/fitting';
+import { unreadOf } from '@/lib/case/view/work-cautions';
+import { pointsFor, saidOf, standingAnswers, type InstallPoint } from '@/lib/fitting';
 import { fittingsInput, type FittingsView, type FittingView, type InstallPointView } from '@/lib/schemas/fitting';
-import { gatherState } from '../case/gather-state';
-import { unreadOf } from '../case/unread';
+import { workOn } from '../case/work-on';
 import { defineRead } from '../define';
 import { fittingWork } from './work';
 
@@ -15,7 +15,7 @@ export const listFittings = defineRead({
   input: fittingsInput,
   run: async ({ tx, ctx, input: { caseId } }): Promise<FittingsView> => {
     const of = { organisationId: ctx.organisation.id, caseId };
-    const { caseHead, compiled, acknowledged } = await gatherState(tx, ctx, { caseId });
+    const { caseHead, compiled, acknowledged } = await workOn(tx, ctx, caseId);
     const answers = await selectInstallAnswers(tx, of);
     return {
       caseId,
@@ -42,11 +42,11 @@ function fittingView(row: FittingRow, answers: readonly InstallAnswerRow[]): Fit
   };
 }
 
-function pointView({ onlyFor: _, answers, ...point }: InstallPoint, said: InstallAnswerRow | undefined): InstallPointView {
-  const option = answers.find(({ id }) => id === said?.answer);
+function pointView({ onlyFor: _, ...point }: InstallPoint, answer: InstallAnswerRow | undefined): InstallPointView {
+  const said = answer && saidOf(point, answer);
   return {
     ...point,
-    answers: answers.map(({ id, label, asks, against }) => ({ id, label, asks: asks ?? null, against: against ?? false })),
-    said: said ? { answer: said.answer, label: option?.label ?? said.answer, against: option?.against ?? false, value: said.value, note: said.note, by: said.by, at: said.at.toISOString() } : null,
+    answers: point.answers.map(({ id, label, asks, against }) => ({ id, label, asks: asks ?? null, against: against ?? false })),
+    said: said ? { answer: said.answer, label: said.label, against: said.against, value: said.value, note: said.note, by: said.by, at: said.at.toISOString() } : null,
   };
 }

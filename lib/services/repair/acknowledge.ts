@@ -1,5 +1,5 @@
 import { PERMITTED } from '@/lib/auth/permissions';
-import { REPAIR_SET_UP } from '@/lib/case/view/repair-plan';
+import { repairWork } from '@/lib/case/view/repair-plan';
 import { acknowledgeRepairInput } from '@/lib/schemas/repair';
 import { lockCaseOf } from '../case/locked';
 import { noteRead } from '../case/note-read';
@@ -14,7 +14,7 @@ export const acknowledgeRepair = defineWrite({
   run: async (given) => {
     const { caseId, remedyId, cautions } = given.input;
     const { head, compiled } = await lockCaseOf(given.tx, { organisationId: given.ctx.organisation.id, caseId });
-    const known = compiled.rulebook.remedies.find(({ id }) => id === remedyId)?.cautions ?? [];
-    return noteRead(given, { head, work: { cautions: known, setUp: REPAIR_SET_UP }, what: 'repair', cautions });
+    const remedy = compiled.rulebook.remedies.find(({ id }) => id === remedyId);
+    return noteRead(given, { head, work: repairWork(remedy ?? { cautions: [] }), what: 'repair', cautions });
   },
 });

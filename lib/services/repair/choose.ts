@@ -3,7 +3,7 @@ import { selectFindings } from '@/db/queries/finding';
 import { insertRepair, lockRepair, selectRepairs } from '@/db/queries/repair';
 import { selectLatestRun } from '@/db/queries/run';
 import { PERMITTED } from '@/lib/auth/permissions';
-import { findingsForRanking, stagesOf } from '@/lib/case/findings-for-ranking';
+import { findingsForRanking, rankOptions } from '@/lib/case/findings-for-ranking';
 import { orderNow } from '@/lib/case/view/repair-plan';
 import { rank, type CompiledRulebook } from '@/lib/diagnose';
 import { conflict, invalid } from '@/lib/errors';
@@ -53,6 +53,6 @@ export const chooseRepair = defineWrite({
 async function planned(tx: Transaction, of: { organisationId: string; caseId: string }, { compiled, labourRatePerHour }: { compiled: CompiledRulebook; labourRatePerHour: number | null }): Promise<string[]> {
   const run = await selectLatestRun(tx, of);
   const findings = findingsForRanking(await selectFindings(tx, of));
-  const { causes } = rank(compiled, findings, { facts: run?.recordFacts ?? {}, stages: stagesOf(findings) });
+  const { causes } = rank(compiled, findings, rankOptions(findings, run?.recordFacts ?? {}));
   return orderNow({ compiled, causes, labourRatePerHour }).steps.map(({ remedyId }) => remedyId);
 }

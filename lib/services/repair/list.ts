@@ -1,10 +1,10 @@
 import { selectRepairs, selectSteps } from '@/db/queries/repair';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { checksAtRepair } from '@/lib/case/view/checks-at-repair';
-import { REPAIR_SET_UP } from '@/lib/case/view/repair-plan';
-import { cautionsToRead } from '@/lib/diagnose/cautions';
+import { repairWork } from '@/lib/case/view/repair-plan';
+import { unreadOf } from '@/lib/case/view/work-cautions';
 import { repairPlanInput, type RepairView } from '@/lib/schemas/repair';
-import { gatherState } from '../case/gather-state';
+import { workOn } from '../case/work-on';
 import { defineRead } from '../define';
 import { lastMarks } from './marks';
 
@@ -16,8 +16,7 @@ export const listRepairs = defineRead({
   input: repairPlanInput,
   run: async ({ tx, ctx, input: { caseId } }): Promise<{ caseId: string; repairs: RepairView[] }> => {
     const of = { organisationId: ctx.organisation.id, caseId };
-    const { compiled, acknowledged } = await gatherState(tx, ctx, { caseId });
-    const cautions = new Map(compiled.rulebook.cautions.map((caution) => [caution.id, caution]));
+    const { compiled, acknowledged } = await workOn(tx, ctx, caseId);
     const said = await selectSteps(tx, of);
     const repairs = (await selectRepairs(tx, of)).flatMap(({ chosenAt, endedAt, ...row }, i): RepairView[] => {
       const remedy = compiled.rulebook.remedies.find(({ id }) => id === row.remedyId);
@@ -29,8 +28,7 @@ export const listRepairs = defineRead({
           name: remedy.name,
           chosenAt: chosenAt.toISOString(),
           endedAt: endedAt?.toISOString() ?? null,
-          cautions: remedy.cautions.map((id) => ({ id, text: cautions.get(id)?.text ?? id })),
-          toRead: cautionsToRead({ cautions: remedy.cautions, setUp: REPAIR_SET_UP }, (id) => cautions.get(id)?.worseWhen ?? [], acknowledged),
+          ...unreadOf(compiled, repairWork(remedy), acknowledged),
           steps: remedy.steps.map((text, step) => ({ text, mark: markView(marks.get(step)) })),
           place: i + 1,
           looks: checksAtRepair(compiled, remedy),

@@ -1,6 +1,6 @@
 import { insertStep, selectSteps, updateRepair } from '@/db/queries/repair';
 import { PERMITTED } from '@/lib/auth/permissions';
-import { REPAIR_SET_UP } from '@/lib/case/view/repair-plan';
+import { repairWork } from '@/lib/case/view/repair-plan';
 import { conflict, invalid } from '@/lib/errors';
 import { endRepairInput, markStepInput, planRepairInput } from '@/lib/schemas/repair';
 import { refuseUnread } from '../case/write-finding';
@@ -48,7 +48,7 @@ export const markStep = defineWrite({
     refuseClosed(head);
     refuseEnded(row);
     if (step >= remedy.steps.length) throw invalid({ step: 'This repair has no such step.' });
-    await refuseUnread(tx, ctx, { head, compiled, check: { cautions: remedy.cautions, setUp: REPAIR_SET_UP } });
+    await refuseUnread(tx, ctx, { head, compiled, check: repairWork(remedy) });
     const written = await insertStep(tx, { ...of, id, step, mark, value, note, personId: ctx.person.id, at: ctx.now() });
     if (!written) throw conflict('This id belongs to another step.');
     audit({ entity: 'repair', entityId: repairId, changed: { caseId, remedyId: row.remedyId, step: step + 1, mark, value, note } });

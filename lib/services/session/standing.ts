@@ -1,8 +1,9 @@
 import type { Database } from '@/db/connect';
 import { findStanding } from '@/db/queries/sign-in';
 import { isRole } from '@/lib/auth/roles';
-import { METRIC_UNITS, US_UNITS, withUnits } from '@/lib/units';
+import { withUnits } from '@/lib/units';
 import type { Ctx } from '../context';
+import { unitsOfCountry } from '../units-of-measure';
 
 export type Standing = Omit<Ctx, 'db' | 'now' | 'jobs' | 'storage' | 'signingSecret' | 'repeat'>;
 
@@ -22,7 +23,7 @@ export async function standingOf(
       id: personId,
       name: row.name,
       email: row.email,
-      units: withUnits(row.country === 'US' ? US_UNITS : METRIC_UNITS, row.unitPreferences ?? {}),
+      units: withUnits(unitsOfCountry(row.country), row.unitPreferences ?? {}),
       siteId: row.siteId,
     },
     roles: row.roles.filter(isRole),

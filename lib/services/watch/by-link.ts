@@ -6,11 +6,13 @@ import { insertWatchReading, lockWatch, lockWatchLink, updateWatchLink } from '@
 import { readWatchToken, type WatchToken } from '@/lib/auth/watch-token';
 import { AppError, invalid } from '@/lib/errors';
 import { measureOf } from '@/lib/case/view/measure';
+import { unreadOf } from '@/lib/case/view/work-cautions';
 import { readByLinkInput, viewWatchLinkInput } from '@/lib/schemas/watch';
-import { METRIC_UNITS, unitDefinition, US_UNITS, type Quantity, type UnitPreferences } from '@/lib/units';
+import { unitDefinition, type Quantity } from '@/lib/units';
 import type { Visitor } from '../context';
 import { compiledEdition } from '../edition/compiled';
 import { tryOrRefuse } from '../session/tries';
+import { unitsOfCountry } from '../units-of-measure';
 import { defineVisit } from '../visit';
 import { readReading, takenReading } from './read-reading';
 
@@ -24,7 +26,7 @@ export const viewWatchLink = defineVisit({
     throughLink(visitor, token, (_tx, { compiled, link, fleetNumber, organisation }) => {
       const check = compiled.checks.get(link.checkId)?.check;
       if (!check) throw dead(NOT_OURS);
-      const units = unitsIn(organisation.country);
+      const units = unitsOfCountry(organisation.country);
       const measure = measureOf(check, units);
       return Promise.resolve({
         organisationName: organisation.name,
@@ -32,7 +34,7 @@ export const viewWatchLink = defineVisit({
         name: check.name,
         prompt: check.prompt,
         steps: check.steps,
-        cautions: check.cautions.map((id) => compiled.rulebook.cautions.find((caution) => caution.id === id)?.text ?? id),
+        cautions: unreadOf(compiled, check, []).cautions.map(({ text }) => text),
         states: check.kind === 'measured' ? [] : check.states.map(({ id, label }) => ({ id, label })),
         /** Of a figure without one; null: an answer is chosen. */
         unit: measure && unitDefinition<Quantity>(measure.quantity, measure.unit).symbol,
@@ -48,7 +50,7 @@ export const readByLink = defineVisit({
     throughLink(visitor, token, async (tx, { compiled, link, watch, organisation }) => {
       if (!hasReadCautions) throw invalid({ hasReadCautions: 'Read the cautions first.' });
       const at = visitor.now();
-      const habits = { organisation, person: { units: unitsIn(organisation.country) } };
+      const habits = { organisation, person: { units: unitsOfCountry(organisation.country) } };
       const read = await readReading(tx, { habits, compiled, watch, typed: { ...typed, checkId: link.checkId } });
       const { organisationId, caseId, watchId } = link;
       if (!(await insertWatchReading(tx, { ...read, organisationId, caseId, watchId, id, byName: name, linkId: link.id, at }))) throw takenReading();
@@ -57,8 +59,6 @@ export const readByLink = defineVisit({
       return { verdict: read.verdict };
     }),
 });
-
-const unitsIn = (country: string): UnitPreferences => (country === 'US' ? US_UNITS : METRIC_UNITS);
 
 type Opened = Awaited<ReturnType<typeof open>>;
 

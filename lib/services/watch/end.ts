@@ -6,14 +6,12 @@ import { selectRepairs } from '@/db/queries/repair';
 import { selectLatestRun } from '@/db/queries/run';
 import { selectWatchReadings, updateWatch, type WatchRow } from '@/db/queries/watch';
 import { may, PERMITTED } from '@/lib/auth/permissions';
-import { findingsForRanking, stagesOf } from '@/lib/case/findings-for-ranking';
+import { findingsForRanking, rankOptions } from '@/lib/case/findings-for-ranking';
 import { siteDay } from '@/lib/case/site-day';
 import { rank, type CompiledRulebook } from '@/lib/diagnose';
 import { conflict, invalid, notFound } from '@/lib/errors';
 import { newId } from '@/lib/ids';
-import { ODOMETER, endWatchInput } from '@/lib/schemas/watch';
-import { measureUnit } from '@/lib/schemas/measures';
-import { formatQuantity, type Quantity } from '@/lib/units';
+import { endWatchInput } from '@/lib/schemas/watch';
 import { isSeen, proofOf, whyNotHeld, type Outcome } from '@/lib/watch';
 import { notify } from '../notice/notify';
 import { lockCaseOf } from '../case/locked';
@@ -22,7 +20,7 @@ import { standingCall } from '../case/standing-call';
 import type { Ctx } from '../context';
 import { defineWrite } from '../define';
 import { lockWatchOf, refuseEnded } from './locked';
-import { standingReads, watchedOf } from './standing';
+import { distanceTextFor, standingReads, watchedOf } from './standing';
 
 interface Of {
   organisationId: string;
@@ -86,7 +84,7 @@ const SAID: Readonly<Record<Outcome, string>> = { held: 'It held.', comeback: 'I
 async function refuseTooEarly(tx: Transaction, ctx: Ctx, { of, compiled, watch, timeZone, why }: { of: Of; compiled: CompiledRulebook; watch: WatchRow; timeZone: string; why: string | null }): Promise<void> {
   const missing = whyNotHeld(watchedOf(watch, timeZone), standingReads(await selectWatchReadings(tx, of), timeZone), { today: siteDay(ctx.now(), timeZone) }, {
     nameOf: (checkId) => compiled.checks.get(checkId)?.check.name ?? checkId,
-    distanceText: (si) => formatQuantity<Quantity>(si, { quantity: ODOMETER.quantity, unit: measureUnit(ctx.person.units, ODOMETER) }),
+    distanceText: distanceTextFor(ctx.person.units),
   });
   if (missing.length === 0) return;
   const mayAnyway = may(ctx.roles, 'watch.hold-early');
@@ -98,7 +96,7 @@ async function refuseTooEarly(tx: Transaction, ctx: Ctx, { of, compiled, watch, 
 async function wasSeen(tx: Transaction, of: Of, { compiled, causeId }: { compiled: CompiledRulebook; causeId: string }): Promise<boolean> {
   const findings = findingsForRanking(await selectFindings(tx, of));
   const run = await selectLatestRun(tx, of);
-  const { causes } = rank(compiled, findings, { facts: run?.recordFacts ?? {}, stages: stagesOf(findings) });
+  const { causes } = rank(compiled, findings, rankOptions(findings, run?.recordFacts ?? {}));
   // What somebody remembered shows nothing.
   const looked = findings.filter(({ checkId }) => compiled.checks.get(checkId)?.check.station !== 'vehicle-and-history');
   return isSeen(causes.find((cause) => cause.causeId === causeId)?.terms ?? [], looked);

@@ -4,15 +4,13 @@ import { may, PERMITTED } from '@/lib/auth/permissions';
 import { answerText } from '@/lib/case/view/answer-text';
 import { siteDay } from '@/lib/case/site-day';
 import { notFound } from '@/lib/errors';
-import { measureUnit } from '@/lib/schemas/measures';
-import { ODOMETER, watchInput } from '@/lib/schemas/watch';
-import { formatQuantity, type Quantity } from '@/lib/units';
+import { watchInput } from '@/lib/schemas/watch';
 import { dueReadings, endOf, planFor, whyNotHeld } from '@/lib/watch';
 import { standingCall } from '../case/standing-call';
 import { defineRead } from '../define';
 import { compiledEdition } from '../edition/compiled';
 import { linkPath } from './link-token';
-import { standingReads, watchedOf } from './standing';
+import { distanceTextFor, standingReads, watchedOf } from './standing';
 
 /** How a case's repair is or was watched, and by what it would be. Distances are m. */
 export const listWatches = defineRead({
@@ -27,7 +25,7 @@ export const listWatches = defineRead({
     const { rulebook, checks } = await compiledEdition(tx, { ...of, editionId: head.editionId });
     const nameOf = (checkId: string) => checks.get(checkId)?.check.name ?? checkId;
     const causeName = (causeId: string) => rulebook.causes.find(({ id }) => id === causeId)?.name ?? causeId;
-    const distanceText = (si: number) => formatQuantity<Quantity>(si, { quantity: ODOMETER.quantity, unit: measureUnit(ctx.person.units, ODOMETER) });
+    const distanceText = distanceTextFor(ctx.person.units);
     const today = siteDay(ctx.now(), head.timeZone);
     const call = standingCall(await selectCalls(tx, of), await selectCaseEvents(tx, of));
     const plan = call && planFor(rulebook.proof, call.mainCause);

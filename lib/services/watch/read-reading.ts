@@ -1,6 +1,7 @@
 import type { Transaction } from '@/db/connect';
 import type { WatchRow } from '@/db/queries/watch';
 import { readAnswer } from '@/lib/case/read-answer';
+import { shareOf } from '@/lib/case/share-of';
 import type { CompiledRulebook } from '@/lib/diagnose';
 import { conflict, invalid } from '@/lib/errors';
 import { ODOMETER } from '@/lib/schemas/watch';
@@ -30,8 +31,7 @@ export async function readReading(tx: Transaction, { habits, compiled, watch, ty
   const given = typed.value && isMeasured ? { kind: 'measured' as const, value: typed.value, sureness: 'sure' as const } : { kind: 'state' as const, state: typed.state ?? '', sureness: 'sure' as const };
   const { kind, shares, valueTyped, unit, valueSi, judgement } = readAnswer(check, given, writing, limit);
   // A value between two bands counts for the one in which more of it lies.
-  const share = shares.reduce((sum, { state, share: part }) => sum + (planned.inOrder.includes(state) ? part : 0), 0);
-  const isInOrder = judgement ? judgement.verdict === 'within' : share >= 0.5;
+  const isInOrder = judgement ? judgement.verdict === 'within' : shareOf(shares, planned.inOrder) >= 0.5;
   return { checkId: check.id, kind, shares, valueTyped, unit, valueSi, judgement, verdict: isInOrder ? 'in-order' : 'not-in-order', note: typed.note, ...columns, asTyped };
 }
 

@@ -1,9 +1,15 @@
 import type { WatchReadingRow, WatchRow } from '@/db/queries/watch';
 import { siteDay } from '@/lib/case/site-day';
+import { measureUnit } from '@/lib/schemas/measures';
+import { ODOMETER } from '@/lib/schemas/watch';
+import { formatQuantity, type Quantity, type UnitPreferences } from '@/lib/units';
 import type { Read, Watched } from '@/lib/watch';
 
 /** A watch as lib/watch takes it. */
 export const watchedOf = ({ plan, startedAt, odometerM }: Pick<WatchRow, 'plan' | 'startedAt' | 'odometerM'>, timeZone: string): Watched => ({ plan, startedOn: siteDay(startedAt, timeZone), startOdometerM: odometerM });
+
+/** A distance of a watch, as somebody reads it. @param metres m */
+export const distanceTextFor = (units: UnitPreferences) => (metres: number): string => formatQuantity<Quantity>(metres, { quantity: ODOMETER.quantity, unit: measureUnit(units, ODOMETER) });
 
 /** The readings that stand, oldest first. */
 export const standingReads = (rows: readonly WatchReadingRow[], timeZone: string): Read[] =>

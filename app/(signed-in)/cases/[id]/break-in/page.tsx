@@ -1,7 +1,8 @@
 import type { Metadata } from 'next';
 import Link from 'next/link';
 import { EndRunForms, HotCheckForm, StartForm } from '@/components/break-in/BreakInForms';
-import { EndedRun, HowToRun } from '@/components/break-in/EndedRun';
+import { EndedRun } from '@/components/break-in/EndedRun';
+import { HowToRun } from '@/components/break-in/HowToRun';
 import { RunUnderWay } from '@/components/break-in/RunUnderWay';
 import { CaseNav } from '@/components/case/CaseNav';
 import { ReadCautionsForm } from '@/components/case/ReadCautionsForm';

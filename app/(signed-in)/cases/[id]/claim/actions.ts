@@ -1,11 +1,9 @@
 'use server';
 
-import { revalidatePath } from 'next/cache';
 import { action } from '@/lib/auth/action';
 import { fileClaim, settleClaim } from '@/lib/services/claim/claim';
 import { sendCore, settleCore } from '@/lib/services/claim/core';
-
-const readAnew = (_result: unknown, { caseId }: Record<string, string | string[]>) => revalidatePath(`/cases/${caseId}/claim`);
+import { readAnew } from '../case-forms';
 
 export const keepClaim = action(fileClaim, { after: readAnew });
 export const endClaim = action(settleClaim, { after: readAnew });
