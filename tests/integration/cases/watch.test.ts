@@ -209,8 +209,8 @@ describe('a link', () => {
     const given = await linked();
     const token = (await spoil(given)) ?? given.token;
     const before = (await given.seen()).readings.length;
-    for (const attempt of [given.view(token), given.use({ token })]) {
-      await expect(attempt).rejects.toMatchObject({ code: 'not-found', fields: {}, message: expect.stringMatching(/^[A-Z][^.]*\.$/) });
+    for (const attempt of [() => given.view(token), () => given.use({ token })]) {
+      await expect(attempt()).rejects.toMatchObject({ code: 'not-found', fields: {}, message: expect.stringMatching(/^[A-Z][^.]*\.$/) });
     }
     expect((await given.seen()).readings).toHaveLength(before);
   });
