@@ -11,6 +11,8 @@ import { openVictims, type Victims } from './victims';
 
 /** How often a worker is killed over each kind of job. */
 const POINTS = 50;
+/** How often it is left to do its work, to count its steps. */
+const UNHURT = 3;
 /** More than it ever counts. */
 const NEVER = Number.MAX_SAFE_INTEGER;
 const MINUTES = 60_000;
@@ -60,14 +62,18 @@ describe.concurrent.each(Object.keys(KINDS) as JobName[])('a worker that is kill
     const ask = await KINDS[kind](ground);
     const random = seededRandom(50);
 
-    // One that nobody kills says how many steps there are.
-    const whole = await ask();
-    const unhurt = await victims.take();
-    unhurt.go({ env: environment(ground), marker: whole.marker, point: NEVER });
-    await vi.waitUntil(async () => (await stateOf(ground, whole)) === 'completed', { timeout: MINUTES, interval: 10 });
-    const total = await unhurt.steps();
-    unhurt.child.kill('SIGKILL');
-    await unhurt.ended;
+    // Those that nobody kills say how many steps there are: what else a worker says on its wires meanwhile only adds to them.
+    const counted: number[] = [];
+    for (let i = 0; i < UNHURT; i += 1) {
+      const whole = await ask();
+      const unhurt = await victims.take();
+      unhurt.go({ env: environment(ground), marker: whole.marker, point: NEVER });
+      await vi.waitUntil(async () => (await stateOf(ground, whole)) === 'completed', { timeout: MINUTES, interval: 10 });
+      counted.push(await unhurt.steps());
+      unhurt.child.kill('SIGKILL');
+      await unhurt.ended;
+    }
+    const total = Math.min(...counted);
 
     const killed: { task: Task; point: number; wasActive: boolean; mayBeTwice: boolean }[] = [];
     for (const slot of random.shuffle(Array.from({ length: POINTS }, (_, i) => i))) {
