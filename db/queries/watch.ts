@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, isNull } from 'drizzle-orm';
+import { and, asc, desc, eq, gte, isNull } from 'drizzle-orm';
 import { alias } from 'drizzle-orm/pg-core';
 import type { Executor } from '@/db/connect';
 import { cases, person, watch, watchLink, watchReading } from '@/db/schema';
@@ -93,3 +93,32 @@ export async function insertWatchLink(db: Executor, row: typeof watchLink.$infer
 export async function updateWatchLink(db: Executor, { organisationId, linkId }: { organisationId: string; linkId: string }, set: Partial<typeof watchLink.$inferInsert>): Promise<void> {
   await db.update(watchLink).set(set).where(and(eq(watchLink.organisationId, organisationId), eq(watchLink.id, linkId)));
 }
+
+/** Those under way on a unit, for whichever of its cases, the oldest first. */
+export const selectWatchesUnderWayOfUnit = (db: Executor, { organisationId, unitId }: { organisationId: string; unitId: string }) =>
+  db
+    .select({ row: watch, caseNumber: cases.number })
+    .from(watch)
+    .innerJoin(cases, and(eq(cases.organisationId, watch.organisationId), eq(cases.id, watch.caseId)))
+    .where(and(eq(watch.organisationId, organisationId), eq(watch.unitId, unitId), isNull(watch.endedAt)))
+    .orderBy(asc(watch.startedAt), asc(watch.id));
+
+const ofComeback = alias(cases, 'of_comeback');
+
+/** The case that a case came back from; none for most. */
+export async function selectCameBackFrom(db: Executor, { organisationId, caseId }: OfCase): Promise<{ caseId: string; number: number } | null> {
+  const [row] = await db
+    .select({ caseId: cases.id, number: cases.number })
+    .from(ofComeback)
+    .innerJoin(cases, and(eq(cases.organisationId, ofComeback.organisationId), eq(cases.id, ofComeback.comebackOf)))
+    .where(and(eq(ofComeback.organisationId, organisationId), eq(ofComeback.id, caseId)));
+  return row ?? null;
+}
+
+/** Cases that may be what came back: open ones of the unit that no other goes before, opened while it was watched. */
+export const selectMayHaveComeBack = (db: Executor, { organisationId, unitId, since }: { organisationId: string; unitId: string; since: Date }) =>
+  db
+    .select({ caseId: cases.id, number: cases.number, openedAt: cases.openedAt })
+    .from(cases)
+    .where(and(eq(cases.organisationId, organisationId), eq(cases.unitId, unitId), eq(cases.status, 'open'), isNull(cases.comebackOf), gte(cases.openedAt, since)))
+    .orderBy(desc(cases.openedAt), desc(cases.id));

@@ -195,6 +195,16 @@ export interface CatchingView {
   remindAt: string | null;
 }
 
+/** What a case has to do with repairs that are watched, now. */
+export interface WatchingView {
+  /** The watch of this case; null: none is under way. */
+  own: { until: string; next: { check: string; dueOn: string; state: 'waits' | 'due' | 'overdue' } | null } | null;
+  /** Of the unit, for other cases, since before this one was opened: this may be their end. */
+  others: { caseId: string; number: number; since: string }[];
+  /** The case whose repair didn't hold, which this one goes on with. */
+  cameBackFrom: { caseId: string; number: number } | null;
+}
+
 /**
  * Why the causes stand where they stand, and what would change that. Asked for after the state has come, so that an
  * answer is saved and ranked without waiting for words that are read later, if at all.
@@ -222,6 +232,7 @@ export interface CaseView {
   otherHolds: OtherHoldView[];
   /** Oil that is being caught for a check, now: since when, and when somebody is reminded of it. */
   catching: CatchingView[];
+  watching: WatchingView;
   /** The limits that the organisation adopted for this unit, by check. */
   limits: Record<string, { text: string; source: string }>;
   assignedTo: string | null;

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import type { CallView, CaseEventView, CaseHead, OtherHoldView } from '@/lib/schemas/case-view';
+import type { CallView, CaseEventView, CaseHead, OtherHoldView, WatchingView } from '@/lib/schemas/case-view';
 import { count, day, id, instant, list, probability } from './common';
 
 const status = z.enum(['open', 'called', 'closed']);
@@ -56,6 +56,15 @@ const event = z.object({ id, kind: z.string(), reason: z.string().nullable(), pe
 
 const otherHold = z.object({ caseId: id, number: count, checks: z.array(z.string()), passed: z.array(z.string()) }) satisfies z.ZodType<OtherHoldView>;
 
+const anotherCase = z.object({ caseId: id, number: count });
+const watching = z
+  .object({
+    own: z.object({ until: day, next: z.object({ check: z.string(), dueOn: day, state: z.enum(['waits', 'due', 'overdue']) }).nullable() }).nullable(),
+    others: z.array(anotherCase.extend({ since: instant })),
+    cameBackFrom: anotherCase.nullable(),
+  })
+  .meta({ description: 'The watch of this case under way, those of other cases of its unit, and the case whose repair didn’t hold that this one goes on with.' }) satisfies z.ZodType<WatchingView>;
+
 export const caseRecord = z
   .object({
     head,
@@ -65,6 +74,7 @@ export const caseRecord = z
     moments: z.array(z.object({ at: instant, what: z.string() })).meta({ description: 'Instants that `at` of the state can be asked with.' }),
     usual: z.record(z.string(), z.string()).meta({ description: 'What is usual for the unit or its model, by the checks that compare with it.' }),
     catching: z.array(z.object({ checkId: z.string(), since: instant, remindAt: instant.nullable() })).meta({ description: 'Oil that is being caught for a check, now.' }),
+    watching,
     otherHolds: z.array(otherHold).meta({ description: 'Other cases of the unit that forbid its release.' }),
   })
   .meta({ id: 'CaseRecord' });

@@ -8,11 +8,12 @@ import { momentsOf } from '@/lib/case/view/moments';
 import { rulebookView } from '@/lib/case/view/rulebook';
 import { usualViews } from '@/lib/case/view/usual';
 import { readCaseInput } from '@/lib/schemas/case';
-import type { CallView, CaseReasons, CaseState, CaseView, OtherHoldView } from '@/lib/schemas/case-view';
+import type { CallView, CaseReasons, CaseState, CaseView, OtherHoldView, WatchingView } from '@/lib/schemas/case-view';
 import { limitViews } from '@/lib/case/view/limits';
 import { baselinesOfCase } from '../baseline/of-case';
 import { defineRead } from '../define';
 import { limitsOfCase } from '../limit/of-case';
+import { watchingOf } from '../watch/of-case';
 import { gatherState } from './gather-state';
 import { holdsOfUnit } from './holds-of-unit';
 import { standingCall } from './standing-call';
@@ -64,6 +65,7 @@ export const readCase = defineRead({
       otherHolds: at ? [] : otherHolds(await holdsOfUnit(tx, { ...of, unitId: caseHead.unitId }), of.caseId),
       limits: at ? {} : limitViews(await limitsOfCase(tx, of), parts.compiled, ctx.person.units),
       catching: at ? [] : (await selectCatchesUnderWay(tx, of)).map(({ checkId, startedAt, remindAt }) => ({ checkId, since: startedAt.toISOString(), remindAt: remindAt?.toISOString() ?? null })),
+      watching: at ? NOTHING_WATCHED : await watchingOf(tx, { ...of, head: caseHead, compiled: parts.compiled, now: ctx.now() }),
       assignedTo: caseHead.assignedTo,
       calls: callViews(calls, events),
       events: events.map(({ at: when, ...event }) => ({ ...event, at: when.toISOString() })),
@@ -71,6 +73,8 @@ export const readCase = defineRead({
     };
   },
 });
+
+const NOTHING_WATCHED: WatchingView = { own: null, others: [], cameBackFrom: null };
 
 /** What this case itself holds stands in its state; of what it found there is still what has passed and waits. */
 const otherHolds = (holds: OtherHoldView[], caseId: string): OtherHoldView[] =>

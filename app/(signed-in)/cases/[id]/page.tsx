@@ -7,6 +7,7 @@ import { Calls } from '@/components/case/Calls';
 import { CaseDesk } from '@/components/case/CaseDesk';
 import { CaseNav } from '@/components/case/CaseNav';
 import { Catching } from '@/components/case/Catching';
+import { Watching } from '@/components/case/Watching';
 import { HAND_COOKIE, handFrom } from '@/components/case/hand';
 import { ReopenForm } from '@/components/case/ReopenForm';
 import { PhotosOfCase } from '@/components/photos/PhotosOfCase';
@@ -63,6 +64,7 @@ export default async function CasePage({ params, searchParams }: Props) {
         </div>
       )}
       <Catching view={view} />
+      <Watching view={view} />
       <PhotosOfCase view={view} initial={photos}>
       <CaseDesk
         key={`${state.at}/${state.status}`}

@@ -5,7 +5,7 @@ import { readCase } from '@/lib/services/case/read';
 export const GET = route(readCase, {
   params: { id: 'caseId' },
   scope: 'cases:read',
-  shape: ({ head, assignedTo, calls, events, moments, usual, catching, otherHolds }) => ({
+  shape: ({ head, assignedTo, calls, events, moments, usual, catching, watching, otherHolds }) => ({
     head,
     assignedTo,
     calls,
@@ -13,6 +13,7 @@ export const GET = route(readCase, {
     moments,
     usual,
     catching,
+    watching,
     otherHolds,
   }),
   doc: { summary: 'Read the record of a case', description: 'Unit and complaint, whose it is, calls and what happened when.', answers: caseRecord },

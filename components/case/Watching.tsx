@@ -1,0 +1,38 @@
+import Link from 'next/link';
+import type { ReactNode } from 'react';
+import type { CaseView } from '@/lib/schemas/case-view';
+import { dayText } from '@/lib/schemas/day-text';
+import { timeText } from './words';
+
+const DUE = { waits: 'is to be read on', due: 'is due today,', overdue: 'is overdue since' } as const;
+
+/** What a case has to do with repairs that are watched. Renders nothing where it has not. */
+export function Watching({ view: { head, watching } }: { view: CaseView }) {
+  const { own, others, cameBackFrom } = watching;
+  return (
+    <>
+      {cameBackFrom && (
+        <Line href={`/cases/${cameBackFrom.caseId}`} link={`See case ${cameBackFrom.number}`}>
+          <strong>This came back.</strong> The repair of case {cameBackFrom.number} didn’t hold; its call is in doubt.
+        </Line>
+      )}
+      {own && (
+        <Line href={`/cases/${head.id}/watch`} link={own.next && own.next.state !== 'waits' ? 'Read it' : 'See the watch'}>
+          <strong>The repair is being watched</strong> until {dayText(own.until)}.{own.next && <> {own.next.check} {DUE[own.next.state]} {dayText(own.next.dueOn)}.</>}
+        </Line>
+      )}
+      {others.map(({ caseId, number, since }) => (
+        <Line key={caseId} href={`/cases/${caseId}/watch#end`} link={`It came back: end the watch of case ${number}`}>
+          <strong>A repair of this unit is being watched</strong> since {timeText(since, head.timeZone)}, for case {number}. Is this the same trouble?
+        </Line>
+      ))}
+    </>
+  );
+}
+
+const Line = ({ href, link, children }: { href: string; link: string; children: ReactNode }) => (
+  <p className="mb-4 border-l-4 border-ink pl-3">
+    {children}{' '}
+    <Link className="inline-flex min-h-touch items-center underline underline-offset-4" href={href}>{link}</Link>
+  </p>
+);
