@@ -1,35 +1,32 @@
-import { ReadCautionsForm } from '@/components/case/ReadCautionsForm';
+import { CheckCautions, type ReadCautionsAction } from '@/components/case/CheckCautions';
 import { StageAnswerForm, type StageAnswerAction } from '@/components/case/StageAnswerForm';
-import { WorkCautions } from '@/components/case/WorkCautions';
-import type { ActionState } from '@/lib/auth/form';
-import { cautionsToRead, type Danger } from '@/lib/diagnose/cautions';
+import { cautionsHere } from '@/lib/case/cautions-here';
 import type { Stage } from '@/lib/diagnose/types';
 import type { CaseView, CheckView } from '@/lib/schemas/case-view';
-
-type Acknowledged = ActionState<{ cautionId: string; dangers: Danger[] }[]>;
 
 interface Props {
   view: CaseView;
   check: CheckView;
+  /** Checks that stand open above it on the page. */
+  above?: readonly CheckView[];
   stage: Stage;
   newId: string;
-  actions: { readCautions: (previous: Acknowledged, form: FormData) => Promise<Acknowledged>; answer: StageAnswerAction };
+  actions: { readCautions: ReadCautionsAction; answer: StageAnswerAction };
 }
 
-/** A check outside the diagnosis: its cautions while they are unread, then its form. */
-export function CheckAtStage({ view: { head, rulebook, state }, check, stage, newId, actions }: Props) {
-  const toRead = cautionsToRead(check, (caution) => rulebook.cautions[caution]?.worseWhen ?? [], state.acknowledged);
+/** A check outside the diagnosis: its cautions while they are unread, then how it is done and its form. */
+export function CheckAtStage({ view, check, above, stage, newId, actions }: Props) {
+  const { head, rulebook } = view;
+  const cautions = cautionsHere(view, check, above);
   return (
     <div className="grid gap-4">
-      {check.cautions.length > 0 && (
-        <WorkCautions
-          cautions={check.cautions.map((caution) => ({ id: caution, text: rulebook.cautions[caution]?.text ?? caution }))}
-          toRead={toRead}
-          behind="The check"
-          read={<ReadCautionsForm action={actions.readCautions} of={{ caseId: head.id, checkId: check.id }} about={check.name} cautionIds={toRead} />}
-        />
+      <CheckCautions caseId={head.id} {...{ check, rulebook, cautions }} action={actions.readCautions} />
+      {cautions.toRead.length === 0 && (
+        <>
+          <ol className="ml-5 grid max-w-prose list-decimal gap-1">{check.steps.map((step) => <li key={step}>{step}</li>)}</ol>
+          <StageAnswerForm action={actions.answer} caseId={head.id} check={check} stage={stage} newId={newId} />
+        </>
       )}
-      {toRead.length === 0 && <StageAnswerForm action={actions.answer} caseId={head.id} check={check} stage={stage} newId={newId} />}
     </div>
   );
 }

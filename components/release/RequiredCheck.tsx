@@ -2,14 +2,12 @@ import type { ReactNode } from 'react';
 import { timeText } from '@/components/case/words';
 import { Disclosure } from '@/components/ui/Disclosure';
 import { Tag } from '@/components/ui/Tag';
-import type { CheckView } from '@/lib/schemas/case-view';
 import type { ReleaseCheckView } from '@/lib/schemas/release';
 
 const VERDICTS = { 'in-order': 'in order', out: 'out', missing: 'to measure' } as const;
 
 interface Props {
   required: ReleaseCheckView;
-  check: CheckView | undefined;
   /** The limit that the organisation adopted; null: none. */
   limit: { text: string; source: string } | null;
   timeZone: string;
@@ -18,7 +16,7 @@ interface Props {
 }
 
 /** A check of the release: how it stands, and how it is measured. */
-export function RequiredCheck({ required: { checkId, name, verdict, because, measured }, check, limit, timeZone, form }: Props) {
+export function RequiredCheck({ required: { checkId, name, verdict, because, measured }, limit, timeZone, form }: Props) {
   return (
     <section aria-labelledby={`required-${checkId}`} className="grid gap-3 border-t border-ink pt-4">
       <h3 id={`required-${checkId}`} className="flex flex-wrap items-center gap-x-4 gap-y-1 text-xl">{name} <Tag>{VERDICTS[verdict]}</Tag></h3>
@@ -29,9 +27,8 @@ export function RequiredCheck({ required: { checkId, name, verdict, because, mea
           <strong className="figure">{measured.answer}</strong>{measured.judgement && `, ${measured.judgement}`} <span className="text-[0.9375rem] text-ink-soft">{measured.by}, {timeText(measured.at, timeZone)}{measured.stale && ': before the last work on the vehicle, so it counts no more'}</span>
         </p>
       )}
-      {check && form && (
+      {form && (
         <Disclosure summary={<>{measured && !measured.stale ? 'Measure it again' : 'Measure it'}<span className="sr-only">: {name}</span></>} open={verdict === 'missing'}>
-          <ol className="mb-4 ml-5 grid max-w-prose list-decimal gap-1">{check.steps.map((step) => <li key={step}>{step}</li>)}</ol>
           {form}
         </Disclosure>
       )}

@@ -27,8 +27,9 @@ export default async function ReleasePage({ params }: { params: Promise<{ id: st
   const caseId = head.id;
   const asked = await readRelease({ ctx, input: { caseId } });
   const works = may(ctx.roles, 'case.work') && state.status !== 'closed';
-  const measuring = (check: CheckView | undefined, last: string | undefined) =>
-    check && <CheckAtStage key={last} {...{ view, check }} stage={{ kind: 'release' }} newId={newId()} actions={{ readCautions, answer: measure }} />;
+  const checks = asked.checks.map(({ checkId }) => rulebook.checks[checkId]);
+  const measuring = (check: CheckView | undefined, i: number, last: string | undefined) =>
+    check && <CheckAtStage key={last} {...{ view, check }} above={checks.slice(0, i).filter((one) => one !== undefined)} stage={{ kind: 'release' }} newId={newId()} actions={{ readCautions, answer: measure }} />;
   return (
     <>
       <PageHeader
@@ -41,14 +42,13 @@ export default async function ReleasePage({ params }: { params: Promise<{ id: st
         <section aria-labelledby="required" className="grid gap-6">
           <h2 id="required">To be in order</h2>
           {asked.checks.length === 0 && <Notice title="This edition doesn’t say what to measure before a release">Go by the maker’s information and local rules.</Notice>}
-          {asked.checks.map((required) => (
+          {asked.checks.map((required, i) => (
             <RequiredCheck
               key={required.checkId}
               required={required}
-              check={rulebook.checks[required.checkId]}
               limit={limits[required.checkId] ?? null}
               timeZone={head.timeZone}
-              form={works ? measuring(rulebook.checks[required.checkId], required.measured?.findingId) : null}
+              form={works ? measuring(checks[i], i, required.measured?.findingId) : null}
             />
           ))}
         </section>

@@ -1,5 +1,5 @@
 import type { Metadata } from 'next';
-import { ReadCautionsForm } from '@/components/case/ReadCautionsForm';
+import { CheckCautions } from '@/components/case/CheckCautions';
 import { timeText } from '@/components/case/words';
 import { Notice } from '@/components/ui/Notice';
 import { CaseNav } from '@/components/case/CaseNav';
@@ -8,7 +8,7 @@ import { EndForm, LinkForm, ReadForm, RevokeForm, StartForm, TakeBackForm } from
 import { WatchRecord } from '@/components/watch/WatchRecord';
 import { orNotFound, pageContext } from '@/lib/auth/page';
 import { may, PERMITTED } from '@/lib/auth/permissions';
-import { cautionsToRead } from '@/lib/diagnose/cautions';
+import { cautionsHere } from '@/lib/case/cautions-here';
 import { newId } from '@/lib/ids';
 import { dayText } from '@/lib/schemas/day-text';
 import { readCase } from '@/lib/services/case/read';
@@ -23,7 +23,8 @@ const DUE = { waits: 'not due before', due: 'due', overdue: 'overdue since' } as
 export default async function WatchPage({ params }: { params: Promise<{ id: string }> }) {
   const ctx = await pageContext(PERMITTED['case.see']);
   const { id: caseId } = await params;
-  const { head, state, rulebook } = await orNotFound(readCase({ ctx, input: { caseId } }));
+  const view = await orNotFound(readCase({ ctx, input: { caseId } }));
+  const { head, state, rulebook } = view;
   const { planned, watches } = await listWatches({ ctx, input: { caseId } });
   const { units } = ctx.person;
   const works = may(ctx.roles, 'case.work');
@@ -48,20 +49,16 @@ export default async function WatchPage({ params }: { params: Promise<{ id: stri
             {works && <StartForm action={beginWatch} ids={{ id: newId(), caseId }} begin={planned.begin} units={units} />}
           </section>
         )}
-        {current && works && due.map(({ checkId, check: name, dueOn, state: when }) => {
+        {current && works && due.map(({ checkId, check: name, dueOn, state: when }, i) => {
           const check = rulebook.checks[checkId];
           if (!check) return null;
-          const toRead = cautionsToRead(check, (caution) => rulebook.cautions[caution]?.worseWhen ?? [], state.acknowledged);
+          const above = due.slice(0, i).flatMap((one) => rulebook.checks[one.checkId] ?? []);
+          const cautions = cautionsHere(view, check, above);
           return (
             <section key={checkId} aria-labelledby={`due-${checkId}`} className="grid gap-4 print:hidden">
               <h2 id={`due-${checkId}`}>{name}: {DUE[when]} {dayText(dueOn)}</h2>
-              {check.cautions.length > 0 && (
-                <Notice kind="caution" title={toRead.length > 0 ? 'Read this first' : 'Read today'}>
-                  <ul className="ml-5 grid list-disc gap-1">{check.cautions.map((caution) => <li key={caution}>{rulebook.cautions[caution]?.text ?? caution}</li>)}</ul>
-                  {toRead.length > 0 && <div className="mt-3"><ReadCautionsForm action={readCautions} of={{ caseId, checkId }} about={name} cautionIds={toRead} /></div>}
-                </Notice>
-              )}
-              {toRead.length === 0 ? <ReadForm key={current.readings.length} action={saveReading} ids={{ ...ids, id: newId() }} checkId={checkId} prompt={check.prompt} states={check.kind === 'measured' ? [] : check.answers} unit={check.unitSymbol} units={units} /> : <p className="text-ink-soft">The form opens when the cautions above are read.</p>}
+              <CheckCautions {...{ caseId, check, rulebook, cautions }} action={readCautions} />
+              {cautions.toRead.length === 0 && <ReadForm key={current.readings.length} action={saveReading} ids={{ ...ids, id: newId() }} checkId={checkId} prompt={check.prompt} states={check.kind === 'measured' ? [] : check.answers} unit={check.unitSymbol} units={units} />}
             </section>
           );
         })}
