@@ -69,7 +69,7 @@ export function mantelHaenszel(strata: readonly Stratum[], z = Z_95): MantelHaen
     difference,
     differenceLimits: twoSided(Math.max(-1, difference - reach), Math.min(1, difference + reach)),
     oddsRatio,
-    oddsRatioLimits: oddsRatio && onLogScale(oddsRatio, Math.sqrt(pr / (2 * r * r) + both / (2 * r * s) + qs / (2 * s * s)), z),
+    oddsRatioLimits: oddsRatio === undefined ? undefined : onLogScale(oddsRatio, Math.sqrt(pr / (2 * r * r) + both / (2 * r * s) + qs / (2 * s * s)), z),
     chiSquared,
     p: chiSquaredTails(chiSquared, 1).upper,
     strata: compared,

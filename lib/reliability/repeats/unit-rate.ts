@@ -28,8 +28,13 @@ interface Part {
 }
 
 /** Nodes and weights of Gauss and Hermite for a normal variable, five: exact to the ninth power. */
-const NODES = [[0, 8 / 15], [1.3556261799742659, 0.2220759220056126], [2.8569700138728056, 0.011257411327720688]] as const;
-const HERMITE = NODES.flatMap(([at, weight]) => (at === 0 ? [{ at, weight }] : [{ at, weight }, { at: -at, weight }]));
+const HERMITE = [
+  { at: 0, weight: 8 / 15 },
+  ...[1, -1].flatMap((sign) => [
+    { at: sign * 1.3556261799742659, weight: 0.2220759220056126 },
+    { at: sign * 2.8569700138728056, weight: 0.011257411327720688 },
+  ]),
+];
 
 /** The fleet as it is estimated, or as a mixture of what it may be. */
 function parts(fleet: VariedFleet, uncertainFleet: boolean): Part[] {
