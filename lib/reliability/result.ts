@@ -35,6 +35,9 @@ export type Reached = { readonly kind: 'reached'; readonly age: number } | { rea
 /** Standard normal deviate of two-sided 95 % limits. */
 export const Z_95 = 1.959963984540054;
 
-/** Limits of a positive value whose logarithm is taken as normal. */
-export const onLogScale = (value: number, standardErrorOfLog: number, z = Z_95): TwoSided =>
-  twoSided(value * Math.exp(-z * standardErrorOfLog), value * Math.exp(z * standardErrorOfLog));
+/** Limits of a positive value whose logarithm is taken as normal; from below alone where the upper is past all numbers. */
+export function onLogScale(value: number, standardErrorOfLog: number, z = Z_95): TwoSided | OneSided {
+  const factor = Math.exp(z * standardErrorOfLog);
+  const lower = value / factor;
+  return value * factor < Infinity ? twoSided(lower, value * factor) : { kind: 'at-least', lower };
+}

@@ -1,4 +1,4 @@
-import { notEstimable, onLogScale, Z_95, type NotEstimable, type TwoSided } from '../result';
+import { notEstimable, onLogScale, Z_95, type NotEstimable, type OneSided, type TwoSided } from '../result';
 import { rootBeyond } from '../special/root';
 import { rowAt } from '../spells/risk-table';
 import { everAtRisk, type Spell } from '../spells/spell';
@@ -19,7 +19,7 @@ export interface Cox {
   /** Of its logarithm: robust when spells name their unit. */
   readonly standardError: number;
   readonly robust: boolean;
-  readonly limits: TwoSided;
+  readonly limits: TwoSided | OneSided;
   /** Likelihood ratio against no difference, one degree of freedom. */
   readonly chiSquared: number;
 }

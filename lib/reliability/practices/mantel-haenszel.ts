@@ -1,4 +1,4 @@
-import { notEstimable, onLogScale, twoSided, Z_95, type NotEstimable, type TwoSided } from '../result';
+import { notEstimable, onLogScale, twoSided, Z_95, type NotEstimable, type OneSided, type TwoSided } from '../result';
 import { requireCount } from '../require';
 import { chiSquaredTails } from '../special/gamma-quantile';
 import type { CountOf } from './risk-difference';
@@ -15,7 +15,7 @@ export interface MantelHaenszel {
   readonly differenceLimits: TwoSided;
   /** Undefined with its limits where a sum is 0. */
   readonly oddsRatio: number | undefined;
-  readonly oddsRatioLimits: TwoSided | undefined;
+  readonly oddsRatioLimits: TwoSided | OneSided | undefined;
   /** One degree of freedom, without continuity correction. */
   readonly chiSquared: number;
   readonly p: number;

@@ -1,4 +1,4 @@
-import { notEstimable, onLogScale, twoSided, Z_95, type Limits, type NotEstimable, type TwoSided } from '../result';
+import { notEstimable, onLogScale, twoSided, Z_95, type Limits, type NotEstimable, type OneSided, type TwoSided } from '../result';
 import { requirePositive, requireShare } from '../require';
 import { betaQuantile } from '../special/incomplete-beta';
 import { binomialTerm } from '../special/log-gamma';
@@ -11,7 +11,7 @@ export interface RateRatio {
   /** Exact, given how many failed in all. */
   readonly limits: Limits<never>;
   /** On the logarithm; undefined when one had no failures. */
-  readonly wald: TwoSided | undefined;
+  readonly wald: TwoSided | OneSided | undefined;
   /** Exact, two-sided: of every split that is no likelier. */
   readonly p: number;
 }

@@ -61,7 +61,7 @@ export function crowAmsaa({ until: end, events, ending = 'time', confidence = 0.
   if (ages[0] === 0) return notEstimable('failure-at-age-zero');
   const until = ending === 'failure' ? (ages.at(-1) ?? end) : end;
   const telling = ending === 'failure' ? ages.slice(0, -1) : ages;
-  const logs = telling.reduce((sum, age) => sum + Math.log(until / age), 0);
+  const logs = telling.reduce((sum, age) => sum + Math.log(until) - Math.log(age), 0);
   if (logs === 0) return notEstimable('failures-at-the-end');
 
   const shape = n / logs;
@@ -70,6 +70,7 @@ export function crowAmsaa({ until: end, events, ending = 'time', confidence = 0.
   const degrees = 2 * telling.length;
   const rate = n / until ** shape;
   const mtbf = until / (n * shape);
+  if (!(rate > 0 && rate < Infinity)) return notEstimable('failures-at-the-end');
   return {
     kind: 'estimated',
     failures: n,

@@ -1,9 +1,9 @@
-import { noLimits, onLogScale, twoSided, Z_95, type NoLimits, type TwoSided } from '../result';
+import { noLimits, onLogScale, twoSided, Z_95, type Limits } from '../result';
 import { requireAmount } from '../require';
 import { rowAt } from '../spells/risk-table';
 import { requireHistories, type History } from './history';
 
-export type MeanLimits = TwoSided | NoLimits<'no-events-yet' | 'one-unit' | 'no-spread'>;
+export type MeanLimits = Limits<'no-events-yet' | 'one-unit' | 'no-spread'>;
 
 export interface MeanStep {
   readonly age: number;

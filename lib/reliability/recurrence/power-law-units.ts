@@ -30,8 +30,12 @@ function solve(failures: number, sumOfLogs: number, powers: (shape: number) => P
   };
   const logShape = rootBeyond(slope, 0, slope(0) > 0 ? 0.25 : -0.25, 10);
   if (logShape === undefined) return notEstimable('no-likeliest-shape');
-  const shape = Math.exp(logShape);
-  return { kind: 'estimated', failures, shape, rate: failures / powers(shape).total / greatest ** shape };
+  return ratedFit(failures, Math.exp(logShape), powers(Math.exp(logShape)).total, greatest);
+}
+
+function ratedFit(failures: number, shape: number, total: number, greatest: number): PowerLawFit | NotEstimable<PowerLawWhy> {
+  const rate = failures / total / greatest ** shape;
+  return rate > 0 && rate < Infinity ? { kind: 'estimated', failures, shape, rate } : notEstimable('no-likeliest-shape');
 }
 
 const powerAndSlope = (x: number, shape: number): Powers => {
@@ -100,6 +104,5 @@ export function powerLawOfIntervals(intervals: readonly IntervalCount[]): PowerL
   };
   const logShape = rootBeyond(slope, 0, slope(0) > 0 ? 0.25 : -0.25, 8);
   if (logShape === undefined) return notEstimable('no-likeliest-shape');
-  const shape = Math.exp(logShape);
-  return { kind: 'estimated', failures, shape, rate: failures / end ** shape };
+  return ratedFit(failures, Math.exp(logShape), 1, end);
 }

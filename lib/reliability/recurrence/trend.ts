@@ -84,7 +84,7 @@ export function milHandbookTrend(history: WatchedTrend): (TrendTest & { degrees:
   const { from, until, events } = telling(history);
   if (events.length === 0) return notEstimable('too-few-events');
   if (events.some((age) => age === from)) return notEstimable('event-at-beginning');
-  const statistic = 2 * events.reduce((sum, age) => sum + Math.log((until - from) / (age - from)), 0);
+  const statistic = 2 * events.reduce((sum, age) => sum + Math.log(until - from) - Math.log(age - from), 0);
   const degrees = 2 * events.length;
   const { lower, upper } = chiSquaredTails(statistic, degrees);
   return { kind: 'estimated', statistic, degrees, p: Math.min(1, 2 * Math.min(lower, upper)) };

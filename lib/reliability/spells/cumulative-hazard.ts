@@ -1,4 +1,4 @@
-import { noLimits, onLogScale, Z_95, type NoLimits, type TwoSided } from '../result';
+import { noLimits, onLogScale, Z_95, type Limits } from '../result';
 import { requireAmount } from '../require';
 import { riskTable, rowAt, type RiskRow } from './risk-table';
 import type { Spell } from './spell';
@@ -6,7 +6,7 @@ import type { Spell } from './spell';
 export interface HazardStep extends RiskRow {
   readonly hazard: number;
   readonly standardError: number;
-  readonly limits: TwoSided | NoLimits<'no-failures-yet'>;
+  readonly limits: Limits<'no-failures-yet'>;
 }
 
 /** How failures at one age are counted: all at once (Nelson, Aalen), or one after another (Fleming, Harrington). */

@@ -40,10 +40,13 @@ export function fitWeibull(spells: readonly Spell[], { leastFailures = LEAST_FAI
   if (failed.length < leastFailures) return notEstimable('too-few-failures');
 
   const slope = (logShape: number) => likelihood.slope(Math.exp(logShape));
-  const logShape = rootBeyond(slope, 0, slope(0) > 0 ? 0.25 : -0.25, 10);
+  // Shapes below 0.02 are no law of lifetimes: with late entries alone the likelihood can rise towards 0 without end.
+  const rising = slope(0) > 0;
+  const logShape = rootBeyond(slope, 0, rising ? 0.25 : -0.25, rising ? 6 : 4);
   if (logShape === undefined) return notEstimable('no-likeliest-shape');
   const shape = Math.exp(logShape);
   const scale = likelihood.scaleAt(shape);
+  if (!(scale > 0 && scale < Infinity)) return notEstimable('no-likeliest-shape');
   return {
     kind: 'estimated',
     shape,

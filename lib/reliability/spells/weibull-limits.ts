@@ -55,9 +55,12 @@ export const scaleLimits = (fit: WeibullFit, options: { method?: Method; z?: num
 function profile(fit: WeibullFit, at: (logarithm: number) => number, likeliest: number, z: number): WeibullLimits {
   const beyond = (logarithm: number) => fit.logLikelihood - at(logarithm) - (z * z) / 2;
   const step = z / Math.sqrt(fit.failures) / 4;
-  const [below, above] = [rootBeyond(beyond, likeliest, -step, 12), rootBeyond(beyond, likeliest, step, 12)];
-  if (below === undefined) return above === undefined ? noLimits('no-bound') : { kind: 'at-most', upper: Math.exp(above) };
-  return above === undefined ? { kind: 'at-least', lower: Math.exp(below) } : twoSided(Math.exp(below), Math.exp(above));
+  const [below, above] = [-step, step].map((by) => {
+    const value = Math.exp(rootBeyond(beyond, likeliest, by, 12) ?? NaN);
+    return value > 0 && value < Infinity ? value : undefined;
+  });
+  if (below === undefined) return above === undefined ? noLimits('no-bound') : { kind: 'at-most', upper: above };
+  return above === undefined ? { kind: 'at-least', lower: below } : twoSided(below, above);
 }
 
 /** Mean and standard deviation of a law. @example weibullMoments({ shape: 1.72, scale: 606.5 }).mean // 540.7 */
