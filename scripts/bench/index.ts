@@ -6,6 +6,7 @@ import { answers } from './answers';
 import { casePage } from './case-page';
 import { compare, compareMeasured, type Ratio } from './compare';
 import { dossierMemory } from './dossier';
+import { growth } from './reliability';
 import { whatIfs } from './what-ifs';
 
 const shown = ({ median, low, high }: Ratio) => `${median.toFixed(2)} (${low.toFixed(2)} to ${high.toFixed(2)})`;

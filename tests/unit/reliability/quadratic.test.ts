@@ -8,7 +8,7 @@ import { reverseArrangements } from '@/lib/reliability/recurrence/trend';
 import { riskTable } from '@/lib/reliability/spells/risk-table';
 import type { Spell } from '@/lib/reliability/spells/spell';
 import { seededRandom } from '@/tests/support/random';
-import { historyDraws, spellDraws } from './draws';
+import { historyDraws, spellDraws } from '@/tests/support/reliability-draws';
 
 const SIZES = [1, 2, 5, 50, 500, 5000];
 const close = (got: number, expected: number) => expect(Math.abs(got - expected)).toBeLessThanOrEqual(1e-9 * Math.max(1, Math.abs(expected)));

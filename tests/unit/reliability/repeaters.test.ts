@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { FALSE_DISCOVERY_RATE, GREATEST_DISPERSION, repeaters } from '@/lib/reliability/repeats/repeaters';
 import { seededRandom, type Random } from '@/tests/support/random';
-import { gammaDraw, poissonDraw } from './draws';
+import { gammaDraw, poissonDraw } from '@/tests/support/reliability-draws';
 
 const UNITS = 10_000;
 const RATE = 0.05;
