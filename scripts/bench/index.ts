@@ -25,6 +25,13 @@ function report(name: string, ratio: Ratio, holds: boolean, limit: string) {
   report('engine / predicates', measured.ratio, measured.ratio.high >= 50, 'at least 50');
 }
 
+console.log('\nFleet statistics: a million events beside ten thousand');
+for (const { name, a, b } of growth()) {
+  const measured = await compare({ a, b }, { pairs: 8, warmUp: 2 });
+  console.log(`  ${name}\n    a million      ${ms(measured.a)}\n    ten thousand   ${ms(measured.b)}`);
+  report(name, measured.ratio, measured.ratio.low <= 150, 'at most 150');
+}
+
 {
   const turns = { pairs: 60, warmUp: 60 };
   const { a, b, about, close } = await answers(turns.pairs + turns.warmUp);

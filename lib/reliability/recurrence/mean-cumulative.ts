@@ -17,14 +17,38 @@ export interface MeanStep {
   readonly limits: MeanLimits;
 }
 
-interface Happening {
-  readonly age: number;
-  readonly unit: number;
+/** How many values of an ordered list are below, or up to, a value. */
+function countOf(ordered: Float64Array, value: number, upTo: boolean): number {
+  let [low, high] = [0, ordered.length];
+  while (low < high) {
+    const middle = (low + high) >>> 1;
+    const each = ordered[middle] ?? Infinity;
+    if (each < value || (upTo && each === value)) low = middle + 1;
+    else high = middle;
+  }
+  return low;
 }
 
-/** Ages in order, each with the units to which it happened. */
-function inOrder(histories: readonly History[], of: (history: History) => readonly number[]): Happening[] {
-  return histories.flatMap((history, unit) => of(history).map((age) => ({ age, unit }))).sort((a, b) => a.age - b.age);
+/** Ages with events, in order, each with how many there were and how many units were watched. */
+function eventTable(histories: readonly History[]) {
+  const all = new Float64Array(histories.reduce((count, { events }) => count + events.length, 0));
+  let filled = 0;
+  for (const { events } of histories) for (const age of events) all[filled++] = age;
+  all.sort();
+  const ages = all.filter((age, i) => i === 0 || age !== all[i - 1]);
+  // Watched from new means at age 0 as well.
+  const entries = Float64Array.from(histories, ({ from = 0 }) => (from === 0 ? -1 : from)).sort();
+  const ends = Float64Array.from(histories, ({ until }) => until).sort();
+  const atRisk = ages.map((age) => countOf(entries, age, false) - countOf(ends, age, false));
+  const counts = ages.map((age) => countOf(all, age, true) - countOf(all, age, false));
+  return { ages, atRisk, counts };
+}
+
+/** Running totals, in place. */
+function accumulate(values: Float64Array): Float64Array {
+  let total = 0;
+  for (let i = 0; i < values.length; i += 1) values[i] = total += values[i] ?? 0;
+  return values;
 }
 
 /**
@@ -32,9 +56,9 @@ function inOrder(histories: readonly History[], of: (history: History) => readon
  *
  * V(t) = sum over units of { sum over ages <= t, while watched, of (own events - d / n) / n }^2
  *
- * In one pass: with A = sum d / n^2 and C = own events / n summed + A at entry, a unit that is still watched adds
- * (C - A)^2, and one that has left what that was when it left. So three sums over those still watched are enough,
- * O(E log E) for the order.
+ * With A = sum d / n^2 and C = own events / n summed + A at entry, a unit that is still watched adds (C - A)^2, and one that
+ * has left what that was when it left. So each unit notes at its own events what it changes in the sum of C, of C^2 and of
+ * what those who left have kept; running totals of these are enough. O(E log E).
  *
  * @throws RangeError for illegal histories
  * @see J. F. Lawless and C. Nadeau, Technometrics 37, 1995; W. Nelson 1995
@@ -42,55 +66,38 @@ function inOrder(histories: readonly History[], of: (history: History) => readon
  */
 export function meanCumulative(histories: readonly History[], { z = Z_95 }: { z?: number } = {}): MeanStep[] {
   requireHistories(histories);
-  const events = inOrder(histories, (history) => history.events);
-  // Watched from new means at age 0 as well.
-  const entries = inOrder(histories, ({ from = 0 }) => [from === 0 ? -1 : from]);
-  const ends = inOrder(histories, ({ until }) => [until]);
-  const own = new Float64Array(histories.length);
-  let a = 0;
-  let mean = 0;
-  let watched = 0;
-  let [sum, squares, left] = [0, 0, 0];
-  let [entered, ended, happened] = [0, 0, 0];
-  const steps: MeanStep[] = [];
-  while (happened < events.length) {
-    const age = events[happened]?.age ?? 0;
-    // Those who left before this age keep what they came to; A has not moved since.
-    for (let at = ends[ended]; at && at.age < age; at = ends[(ended += 1)]) {
-      const c = own[at.unit] ?? 0;
-      // One that came and left between two events never was among those watched.
-      for (; entered < entries.length && (entries[entered]?.age ?? Infinity) < at.age; entered += 1) enter(entries[entered]?.unit ?? 0);
-      const now = own[at.unit] ?? c;
-      left += (now - a) ** 2;
-      watched -= 1;
-      sum -= now;
-      squares -= now * now;
+  const { ages, atRisk, counts } = eventTable(histories);
+  const a = accumulate(counts.map((count, i) => count / (atRisk[i] ?? 1) ** 2));
+  const means = accumulate(counts.map((count, i) => count / (atRisk[i] ?? 1)));
+  // What changes at each age with events.
+  const [sums, squares, left] = [new Float64Array(ages.length), new Float64Array(ages.length), new Float64Array(ages.length)];
+  const change = (at: number, before: number, after: number) => {
+    sums[at] = (sums[at] ?? 0) + after - before;
+    squares[at] = (squares[at] ?? 0) + after * after - before * before;
+  };
+  for (const { from = 0, until, events } of histories) {
+    const entered = from === 0 ? 0 : countOf(ages, from, true);
+    const gone = countOf(ages, until, true);
+    if (entered >= gone) continue;
+    let c = a[entered - 1] ?? 0;
+    change(entered, 0, c);
+    for (const age of events.toSorted((one, two) => one - two)) {
+      const at = countOf(ages, age, false);
+      const next = c + 1 / (atRisk[at] ?? 1);
+      change(at, c, next);
+      c = next;
     }
-    for (; entered < entries.length && (entries[entered]?.age ?? Infinity) < age; entered += 1) enter(entries[entered]?.unit ?? 0);
-    const atRisk = watched;
-    let count = 0;
-    for (; events[happened]?.age === age; happened += 1) {
-      const unit = events[happened]?.unit ?? 0;
-      const before = own[unit] ?? 0;
-      const after = before + 1 / atRisk;
-      own[unit] = after;
-      sum += after - before;
-      squares += after * after - before * before;
-      count += 1;
+    if (gone < ages.length) {
+      change(gone, c, 0);
+      left[gone] = (left[gone] ?? 0) + (c - (a[gone - 1] ?? 0)) ** 2;
     }
-    mean += count / atRisk;
-    a += count / (atRisk * atRisk);
-    const variance = Math.max(0, left + squares - 2 * a * sum + watched * a * a);
-    steps.push({ age, atRisk, events: count, mean, ...spread(mean, variance, histories.length, z) });
   }
-  return steps;
-
-  function enter(unit: number): void {
-    own[unit] = a;
-    watched += 1;
-    sum += a;
-    squares += a * a;
-  }
+  for (const changes of [sums, squares, left]) accumulate(changes);
+  return Array.from(ages, (age, i): MeanStep => {
+    const [n, mean, now] = [atRisk[i] ?? 0, means[i] ?? 0, a[i] ?? 0];
+    const variance = Math.max(0, (left[i] ?? 0) + (squares[i] ?? 0) - 2 * now * (sums[i] ?? 0) + n * now * now);
+    return { age, atRisk: n, events: counts[i] ?? 0, mean, ...spread(mean, variance, histories.length, z) };
+  });
 }
 
 /** So much of the mean is rounding: units that do exactly alike show no spread. */
