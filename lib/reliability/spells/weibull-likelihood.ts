@@ -33,7 +33,7 @@ export function weibullLikelihood(spells: readonly Spell[]): WeibullLikelihood |
   const exits = watched.map(({ exitAge }) => Math.log(exitAge / unit));
   const entries = watched.flatMap(({ entryAge = 0 }) => (entryAge > 0 ? [Math.log(entryAge / unit)] : []));
   const failedLogs = sum(watched.flatMap(({ failed }, i) => (failed ? [exits[i] ?? 0] : [])));
-  const furthest = Math.max(...minMax(exits));
+  const furthest = exits.reduce((most, x) => Math.max(most, x), -Infinity);
 
   /** ln of sum (x / pivot)^b, and the mean of ln x under those weights; large powers are divided out. */
   const powers = (shape: number, pivot = 0): { log: number; meanLog: number } => {
@@ -74,9 +74,4 @@ export function weibullLikelihood(spells: readonly Spell[]): WeibullLikelihood |
       return failures * (Math.log(hazard) + logShape) + shape * distance - failedLogs - hazard * Math.exp(log) + constant;
     },
   };
-}
-
-/** Without spreading a long list over the arguments of a call. */
-function minMax(values: readonly number[]): [number, number] {
-  return values.reduce<[number, number]>(([least, most], value) => [Math.min(least, value), Math.max(most, value)], [Infinity, -Infinity]);
 }
