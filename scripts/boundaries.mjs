@@ -63,6 +63,11 @@ const ROWS = [
     because: 'A sum is worked out alike on a page, on the server and without a connection.',
   },
   {
+    folder: 'lib/reliability/**',
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES(), 'zod'],
+    because: 'A statistic is worked out of what is handed to it.',
+  },
+  {
     folder: 'lib/limits/**',
     never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES('units'), 'zod'],
     because: 'A limit judges a value, handed to it.',

@@ -9,7 +9,8 @@ export interface PowerLaw {
 }
 
 /**
- * The power-law process through the failures of a repaired system, watched for a fixed time.
+ * The power-law process through the failures of a repaired system, watched for a fixed time: the sum of the bench's checks.
+ * `recurrence/crow-amsaa.ts` gives limits, a test of fit and, of too few failures, a reason in place of a refusal.
  *
  * beta = N / sum ln(T / t_i)
  *

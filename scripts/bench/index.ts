@@ -6,6 +6,7 @@ import { answers } from './answers';
 import { casePage } from './case-page';
 import { compare, compareMeasured, type Ratio } from './compare';
 import { dossierMemory } from './dossier';
+import { growth } from './reliability';
 import { whatIfs } from './what-ifs';
 
 const shown = ({ median, low, high }: Ratio) => `${median.toFixed(2)} (${low.toFixed(2)} to ${high.toFixed(2)})`;
@@ -22,6 +23,13 @@ function report(name: string, ratio: Ratio, holds: boolean, limit: string) {
   const measured = await compare({ a, b }, { pairs: 30, warmUp: 3 });
   console.log(`\nWhat-ifs: ${about}\n  by the engine    ${ms(measured.a)}\n  by predicates    ${ms(measured.b)}`);
   report('engine / predicates', measured.ratio, measured.ratio.high >= 50, 'at least 50');
+}
+
+console.log('\nFleet statistics: a million events beside ten thousand');
+for (const { name, a, b } of growth()) {
+  const measured = await compare({ a, b }, { pairs: 8, warmUp: 2 });
+  console.log(`  ${name}\n    a million      ${ms(measured.a)}\n    ten thousand   ${ms(measured.b)}`);
+  report(name, measured.ratio, measured.ratio.low <= 150, 'at most 150');
 }
 
 {
