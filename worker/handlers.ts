@@ -7,6 +7,7 @@ import { remindOfWeighing } from '@/lib/services/oil-catch/remind';
 import { mailPasswordReset } from '@/lib/services/password/mail-reset';
 import { makeThumbnail } from '@/lib/services/photo/make-thumbnail';
 import { sweep } from '@/lib/services/session/sweep';
+import { remindOfWatch } from '@/lib/services/watch/remind';
 
 export type Handlers = { [Name in JobName]: (data: JobData[Name], attempt: Attempt) => Promise<void> };
 
@@ -17,6 +18,7 @@ export const handlers = (post: Post): Handlers => ({
   'make-thumbnail': (data) => makeThumbnail(post, data),
   'make-dossier': (data, attempt) => makeDossierPdf(post, data, attempt),
   'remind-weighing': (data) => remindOfWeighing(post, data),
+  'remind-watch': (data) => remindOfWatch(post, data),
   'mail-daily-notices': (data) => mailDailyNotices(post, data),
   sweep: () => sweep(post),
 });

@@ -36,6 +36,7 @@ export async function startWork(boss: PgBoss, handlers: Handlers): Promise<void>
   await work(boss, 'make-thumbnail', handlers['make-thumbnail']);
   await work(boss, 'make-dossier', handlers['make-dossier']);
   await work(boss, 'remind-weighing', handlers['remind-weighing']);
+  await work(boss, 'remind-watch', handlers['remind-watch']);
   await work(boss, 'mail-daily-notices', handlers['mail-daily-notices']);
   await work(boss, 'sweep', handlers.sweep);
   for (const [name, cron] of Object.entries(SCHEDULES)) await boss.schedule(name, cron);

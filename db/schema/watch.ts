@@ -32,6 +32,8 @@ export const watch = pgTable(
     startedBy: uuid().notNull().references(() => person.id),
     odometerM: si(),
     asTyped: jsonb().$type<Record<string, string>>().notNull().default({}),
+    /** When somebody is told next of what is due; a job that was queued for another time does nothing. */
+    remindAt: instant(),
     endedAt: instant(),
     endedBy: uuid().references(() => person.id),
     /** held, comeback, lost */

@@ -10,6 +10,8 @@ export interface JobData {
   'make-thumbnail': { organisationId: string; photoId: string };
   /** Due at the time that the catch has for it, or no more. */
   'remind-weighing': { organisationId: string; catchId: string; due: string };
+  /** Due at the time that the watch has for it, or no more. */
+  'remind-watch': { organisationId: string; watchId: string; due: string };
   /** The PDF of what the dossier says. */
   'make-dossier': { organisationId: string; dossierId: string };
   /** Those that wait when it comes up, which may be none any more. */

@@ -7,6 +7,7 @@ import { filterOf } from './list';
 export const SEEN_JOBS = {
   'send-mail': { name: 'Mail', whose: 'organisation' },
   'remind-weighing': { name: 'Reminder to weigh oil', whose: 'organisation' },
+  'remind-watch': { name: 'Reminder of a watch', whose: 'organisation' },
   'make-dossier': { name: 'PDF of a dossier', whose: 'organisation' },
   'mail-daily-notices': { name: 'Mail of the day’s notices', whose: 'organisation' },
   'make-thumbnail': { name: 'Small picture of a photo', whose: 'organisation' },

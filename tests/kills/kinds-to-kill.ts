@@ -17,6 +17,8 @@ import type { TestDatabases } from '@/tests/support/context';
 import type { TestStorage } from '@/tests/support/storage';
 import { makeTenant, makeVisitor } from '@/tests/support/tenant';
 import type { Letter, PostOffice } from '@/tests/integration/mail/post-office';
+import { callCause } from '@/lib/services/case/call';
+import { startWatch } from '@/lib/services/watch/start';
 import { notify } from '@/lib/services/notice/notify';
 
 export interface Ground {
@@ -118,6 +120,32 @@ export const KINDS: Readonly<Record<JobName, Tasks>> = {
             'queued that mail once': (await countOf(ground, sql`select count(*)::int as count from pgboss.job j join mail m on m.id::text = j.data->>'mailId' where m.entity_id = ${catchId}`, organisationId)) === 1,
             'planned the next once': (await countOf(ground, sql`select count(*)::int as count from pgboss.job where data->>'catchId' = ${catchId} and start_after > now() + interval '1 day'`)) === 1,
             'was noted in the audit once': (await count(sql`select count(*)::int as count from audit where action = 'mail.oil-catch' and entity_id = ${catchId}`)) === 1,
+          }),
+      };
+    };
+  },
+
+  'remind-watch': async (ground) => {
+    const { databases } = ground;
+    const workshop = await makeWorkshop(databases);
+    const { ctx, organisationId, asOwner } = workshop;
+    return async () => {
+      const [caseId, watchId] = [await openACase(workshop), newId()];
+      await callCause({ ctx, input: { id: newId(), caseId, mainCause: 'rings-worn', sureness: 'sure', whyNotLeading: 'Seen' } });
+      await startWatch({ ctx, input: { id: watchId, caseId, begin: Array.from({ length: 4 }, () => ({ answer: 'yes' as const })) } });
+      // As if its days had gone by.
+      await asOwner((tx) => tx.execute(sql`update watch set started_at = started_at - interval '60 days' where id = ${watchId}`));
+      await databases.app.execute(sql`update pgboss.job set start_after = now() where data->>'watchId' = ${watchId}`);
+      const count = (query: ReturnType<typeof sql>) => countOf(ground, query, organisationId);
+      const told = () => count(sql`select count(*)::int as count from notice where kind = 'watch-due' and case_id = ${caseId}`);
+      return {
+        marker: watchId,
+        isNoted: async () => (await told()) > 0,
+        problems: async () =>
+          problemsOf({
+            'told it once': (await told()) === 1,
+            'planned the next once': (await countOf(ground, sql`select count(*)::int as count from pgboss.job where data->>'watchId' = ${watchId} and start_after > now() + interval '1 day'`)) === 1,
+            'was noted in the audit once': (await count(sql`select count(*)::int as count from audit where action = 'remind.watch' and entity_id = ${watchId}`)) === 1,
           }),
       };
     };

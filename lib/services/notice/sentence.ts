@@ -24,8 +24,10 @@ const SENTENCES: Readonly<Record<NoticeKind, (told: Told) => string>> = {
 /** @example sentenceOf({ kind: 'assigned', by: 'Maud Tierney', caseNumber: 12, fleetNumber: 'K-104', … }) // "Maud Tierney gave you case 12, unit K-104." */
 export const sentenceOf = (told: Told): string => SENTENCES[told.kind](told);
 
+const PAGES: Readonly<Partial<Record<NoticeKind, string>>> = { 'repair-assigned': '/repair', 'watch-due': '/watch' };
+
 /** The page of what happened; null: there is none but the notice itself. */
-export const placeOf = ({ kind, caseId }: Pick<Told, 'kind' | 'caseId'>): string | null => (caseId === null ? null : kind === 'repair-assigned' ? `/cases/${caseId}/repair` : `/cases/${caseId}`);
+export const placeOf = ({ kind, caseId }: Pick<Told, 'kind' | 'caseId'>): string | null => (caseId === null ? null : `/cases/${caseId}${PAGES[kind] ?? ''}`);
 
 const SUBJECTS: Readonly<Record<NoticeKind, string>> = {
   assigned: 'A case for you',

@@ -1,11 +1,11 @@
-import { asTenant, type Transaction } from '@/db/connect';
+import { asTenant } from '@/db/connect';
 import { insertAudit } from '@/db/queries/audit';
 import { selectCaseHead } from '@/db/queries/case';
-import { findMember } from '@/db/queries/membership';
 import { lockCatch, selectWeighings } from '@/db/queries/oil-catch';
 import { siteDay } from '@/lib/case/site-day';
 import { jobs, type JobData } from '@/lib/jobs';
 import { dayText } from '@/lib/schemas/day-text';
+import { firstHere } from '../case/first-here';
 import { postMail } from '../mail/post';
 import type { Post } from '../mail/send';
 import { planReminder } from './reminder';
@@ -21,6 +21,7 @@ export async function remindOfWeighing({ db, now, baseUrl }: Pick<Post, 'db' | '
     if (!under || under.endedAt || under.remindAt?.toISOString() !== due) return;
     const head = await selectCaseHead(tx, { organisationId, caseId: under.caseId });
     if (!head || head.status !== 'open') return;
+    // Whoever has the case, else who hung the bottle.
     const member = await firstHere(tx, organisationId, [head.assignedTo, under.startedBy]);
     const at = now();
     if (member) {
@@ -47,13 +48,4 @@ Engine off, wheels chocked, eyes protected; the cautions stand on the page. Take
     await planReminder(tx, jobs, { organisationId, catchId, from: at, everyDays: under.remindEveryDays });
     await insertAudit(tx, [{ organisationId, action: 'mail.oil-catch', entity: 'oil-catch', entityId: catchId, changed: { caseId: under.caseId, mailed: member !== null }, at }]);
   });
-}
-
-/** Whoever has the case, else who hung the bottle; null: neither is here any more. */
-async function firstHere(tx: Transaction, organisationId: string, people: readonly (string | null)[]) {
-  for (const personId of people) {
-    const found = personId ? await findMember(tx, { organisationId, personId }) : undefined;
-    if (found && !found.endedAt) return found;
-  }
-  return null;
 }

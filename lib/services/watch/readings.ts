@@ -7,6 +7,7 @@ import { refuseUnread } from '../case/write-finding';
 import { defineWrite } from '../define';
 import { lockWatchOf, refuseEnded } from './locked';
 import { readReading, takenReading } from './read-reading';
+import { planWatchReminder } from './reminder';
 
 /** Writes down what was read of a repair that is watched. The id is the client's: sent twice, it is read once. */
 export const addWatchReading = defineWrite({
@@ -27,6 +28,7 @@ export const addWatchReading = defineWrite({
     const check = compiled.checks.get(typed.checkId)?.check;
     if (check) await refuseUnread(tx, ctx, { head, compiled, check });
     if (!(await insertWatchReading(tx, { ...of, ...read, id, personId: ctx.person.id, at: ctx.now() }))) throw takenReading();
+    await planWatchReminder(tx, ctx, { organisationId: of.organisationId, watchId, timeZone: head.timeZone });
     audit({ entity: 'watch', entityId: watchId, changed: { caseId, checkId: read.checkId, shares: read.shares, valueTyped: read.valueTyped, verdict: read.verdict } });
     return { id, caseId };
   },
@@ -40,7 +42,7 @@ export const takeBackWatchReading = defineWrite({
   input: takeBackWatchReadingInput,
   run: async ({ tx, ctx, input: { caseId, watchId, readingId, whyTakenBack }, audit, unchanged }) => {
     const of = { organisationId: ctx.organisation.id, caseId, watchId };
-    await lockCaseOf(tx, of);
+    const { head } = await lockCaseOf(tx, of);
     const watch = await lockWatchOf(tx, of);
     const reading = (await selectWatchReadings(tx, of)).find(({ row }) => row.id === readingId)?.row;
     if (!reading) throw notFound('reading');
@@ -48,6 +50,7 @@ export const takeBackWatchReading = defineWrite({
     else {
       refuseEnded(watch);
       await updateWatchReading(tx, { ...of, readingId }, { takenBackAt: ctx.now(), takenBackBy: ctx.person.id, takenBackWhy: whyTakenBack });
+      await planWatchReminder(tx, ctx, { organisationId: of.organisationId, watchId, timeZone: head.timeZone });
       audit({ entity: 'watch', entityId: watchId, changed: { caseId, checkId: reading.checkId, takenBack: true, reason: whyTakenBack } });
     }
     return { id: readingId, caseId };

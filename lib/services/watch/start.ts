@@ -8,6 +8,7 @@ import { lockCaseOf } from '../case/locked';
 import { standingCall } from '../case/standing-call';
 import { defineWrite } from '../define';
 import { readMeasures } from '../units-of-measure';
+import { planWatchReminder } from './reminder';
 
 /**
  * Begins to watch what was repaired, by the plan of the cause that was called. Each statement that makes a watch prove something
@@ -35,6 +36,7 @@ export const startWatch = defineWrite({
     const { columns, asTyped } = readMeasures(ctx, [ODOMETER], { odometer });
     const written = await insertWatch(tx, { ...of, ...columns, id, unitId: head.unitId, causeId: call.mainCause, plan, begin: answers, asTyped, startedAt: ctx.now(), startedBy: ctx.person.id });
     if (!written) throw conflict('This case is being watched already.');
+    await planWatchReminder(tx, ctx, { organisationId: of.organisationId, watchId: id, timeZone: head.timeZone });
     audit({ entity: 'watch', entityId: id, changed: { caseId, causeId: call.mainCause, plan: plan.id, begin: answers.map(({ answer }) => answer), ...columns } });
     return { id, caseId };
   },

@@ -10,7 +10,9 @@ import { endWatch } from '@/lib/services/watch/end';
 import { createWatchLink, revokeWatchLink } from '@/lib/services/watch/links';
 import { listWatches } from '@/lib/services/watch/list';
 import { addWatchReading, takeBackWatchReading } from '@/lib/services/watch/readings';
+import { remindOfWatch } from '@/lib/services/watch/remind';
 import { startWatch } from '@/lib/services/watch/start';
+import { listNotices } from '@/lib/services/notice/list';
 import { chooseRepair } from '@/lib/services/repair/choose';
 import { readRepairPlan } from '@/lib/services/repair/read-plan';
 import { endRepair, markStep } from '@/lib/services/repair/work';
@@ -154,6 +156,52 @@ describe('a watch', () => {
     await end('lost', 'Sold');
     expect(await seen()).toMatchObject({ outcome: 'lost', why: 'Sold', proof: 'none' });
     await expect(read('oil-amount', { state: 'film' })).rejects.toMatchObject({ code: 'conflict' });
+  });
+});
+
+describe('reminders', () => {
+  /** What is queued for a watch, the earliest first. */
+  const queued = async (watchId: string) => {
+    const { rows } = await databases.owner.execute(sql`select data from pgboss.job where name = 'remind-watch' and data->>'watchId' = ${watchId} order by start_after`);
+    return rows.map(({ data }) => data as { organisationId: string; watchId: string; due: string });
+  };
+  const work = (data: { organisationId: string; watchId: string; due: string }) => remindOfWatch({ db: databases.app, now: clock.now }, data);
+  const told = async (caseId: string) => (await listNotices({ ctx: workshop.ctx, input: {} })).rows.filter((notice) => notice.place === `/cases/${caseId}/watch`);
+  const forwardTo = (due: string) => clock.forward(Date.parse(due) - clock.now().getTime());
+
+  it('say on the morning of the day what is due, once, and again three days later while it is', async () => {
+    const { caseId, watchId } = await watched();
+    const [first] = await queued(watchId);
+    if (!first) throw new Error('nothing is planned');
+    forwardTo(first.due);
+    await work(first);
+    // The same job again, as after a worker that was killed behind its commit: nothing more.
+    await work(first);
+    expect(await told(caseId)).toEqual([expect.objectContaining({ kind: 'watch-due', sentence: expect.stringContaining('Amount of oil') })]);
+    const again = (await queued(watchId)).slice(1);
+    expect(again.map(({ due }) => Date.parse(due) - Date.parse(first.due))).toEqual([3 * DAY_MS]);
+    for (const job of again) {
+      forwardTo(job.due);
+      await work(job);
+    }
+    expect(await told(caseId)).toHaveLength(2);
+  });
+
+  it('are put off by what is read, and stop with the watch', async () => {
+    const { caseId, watchId, readAll, end } = await watched();
+    const [first] = await queued(watchId);
+    if (!first) throw new Error('nothing is planned');
+    clock.forward(2 * DAY_MS);
+    await readAll();
+    await work(first);
+    expect(await told(caseId)).toEqual([]);
+    const next = (await queued(watchId)).at(-1);
+    if (!next) throw new Error('nothing is planned');
+    expect(Date.parse(next.due)).toBeGreaterThan(Date.parse(first.due));
+    await end('lost', 'Sold');
+    forwardTo(next.due);
+    await work(next);
+    expect(await told(caseId)).toEqual([]);
   });
 });
 

@@ -44,6 +44,7 @@ export const ACTION_WORDS: Readonly<Record<string, string>> = {
   'mail.invitation': 'Mailed an invitation',
   'mail.notice': 'Mailed somebody the notices of a day',
   'mail.oil-catch': 'Reminded somebody to weigh oil',
+  'remind.watch': 'Reminded somebody of a watch',
   'make-again.dossier': 'Asked for the PDF of a dossier again',
   'make.dossier': 'Made a dossier',
   'make.dossier-pdf': 'Made the PDF of a dossier',

@@ -1,0 +1,1 @@
+ALTER TABLE "watch" ADD COLUMN "remind_at" timestamp with time zone;
