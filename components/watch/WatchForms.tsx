@@ -82,14 +82,22 @@ const OUTCOMES = [
 
 type Ended = ActionState<{ id: string; caseId: string; comebackCaseId: string | null }>;
 
-export function EndForm({ action, ids }: { action: (previous: Ended, form: FormData) => Promise<Ended>; ids: Record<string, string> }) {
+interface EndProps {
+  action: (previous: Ended, form: FormData) => Promise<Ended>;
+  ids: Record<string, string>;
+  /** Open cases that may be the comeback. */
+  openCases: readonly { value: string; label: string }[];
+}
+
+export function EndForm({ action, ids, openCases }: EndProps) {
   const form = useForm(action);
   return (
-    <Disclosure summary="End the watch" open={form.message !== undefined}>
+    <Disclosure summary="End the watch" open={form.message !== undefined || openCases.length > 0}>
       <Form form={form} label="End the watch" errorTitle="Not ended yet">
         <Hidden values={ids} />
         <p>The case is closed with it.</p>
         <RadioGroup label="What came of it" choices={OUTCOMES} required {...form.field('outcome')} />
+        {openCases.length > 0 && <SelectField label="If it came back, it goes on in" placeholder="A new case" options={openCases} {...form.field('goesOnIn')} />}
         <TextField label="Why" hint="Asked for unless it held for the whole span" autoComplete="off" required={false} {...form.field('why')} />
         <div><SubmitButton pendingLabel="Saving…">End the watch</SubmitButton></div>
       </Form>

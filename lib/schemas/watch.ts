@@ -43,6 +43,8 @@ export const endWatchInput = z.strictObject({
   why: optionalLine(500),
   /** The id of the case that a comeback opens. */
   newCaseId: optionalId,
+  /** An open case of the unit that is the comeback; left out: one is opened. */
+  goesOnIn: optionalId,
 });
 
 export const createWatchLinkInput = z.strictObject({

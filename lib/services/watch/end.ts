@@ -4,7 +4,7 @@ import { insertCall, insertCaseEvent, selectCalls, selectCaseEvents, selectCaseH
 import { selectFindings } from '@/db/queries/finding';
 import { selectRepairs } from '@/db/queries/repair';
 import { selectLatestRun } from '@/db/queries/run';
-import { selectWatchReadings, updateWatch, type WatchRow } from '@/db/queries/watch';
+import { selectMayHaveComeBack, selectWatchReadings, updateWatch, type WatchRow } from '@/db/queries/watch';
 import { may, PERMITTED } from '@/lib/auth/permissions';
 import { findingsForRanking, rankOptions } from '@/lib/case/findings-for-ranking';
 import { siteDay } from '@/lib/case/site-day';
@@ -62,11 +62,19 @@ export const endWatch = defineWrite({
     if (outcome === 'comeback') await note('doubted', why);
     await note('closed', [SAID[outcome], why].filter(Boolean).join(' '));
     await updateCase(tx, of, { status: 'closed', closedAt: at });
-    const comebackCaseId = outcome === 'comeback' ? await openComeback() : null;
+    const comebackCaseId = outcome === 'comeback' ? await (input.goesOnIn ? goOnIn(input.goesOnIn) : openComeback()) : null;
     if (outcome === 'comeback') await tellOfComeback(tx, ctx, { ...of, personIds: [head.assignedTo, watch.startedBy], why });
     await updateWatch(tx, of, { endedAt: at, endedBy: ctx.person.id, outcome, why, proof, comebackCaseId });
     audit({ entity: 'watch', entityId: watchId, changed: { caseId, outcome, reason: why, proof, comebackCaseId } });
     return { id: watchId, caseId, comebackCaseId };
+
+    /** A case that was opened while it was watched. */
+    async function goOnIn(goesOnIn: string): Promise<string> {
+      const open = await selectMayHaveComeBack(tx, { organisationId: of.organisationId, unitId: head.unitId, since: watch.startedAt });
+      if (!open.some((one) => one.caseId === goesOnIn)) throw invalid({ goesOnIn: 'Choose a case of this unit that is open.' });
+      await updateCase(tx, { ...of, caseId: goesOnIn }, { comebackOf: caseId });
+      return goesOnIn;
+    }
 
     /** The same complaints on the same unit. */
     async function openComeback(): Promise<string> {

@@ -1,5 +1,5 @@
 import { selectCalls, selectCaseEvents, selectCaseHead } from '@/db/queries/case';
-import { selectWatches, selectWatchLinks, selectWatchReadings } from '@/db/queries/watch';
+import { selectMayHaveComeBack, selectWatches, selectWatchLinks, selectWatchReadings } from '@/db/queries/watch';
 import { may, PERMITTED } from '@/lib/auth/permissions';
 import { answerText } from '@/lib/case/view/answer-text';
 import { siteDay } from '@/lib/case/site-day';
@@ -59,6 +59,8 @@ export const listWatches = defineRead({
         })),
         due: row.endedAt ? [] : dueReadings(watched, reads, { today }).map(({ last: _, ...due }) => ({ ...due, check: nameOf(due.checkId) })),
         notHeldYet: row.endedAt ? [] : whyNotHeld(watched, reads, { today }, { nameOf, distanceText }),
+        /** Open cases that may be its comeback. */
+        mayGoOnIn: row.endedAt ? [] : (await selectMayHaveComeBack(tx, { ...of, unitId: row.unitId, since: row.startedAt })).map((one) => ({ caseId: one.caseId, number: one.number, openedOn: siteDay(one.openedAt, head.timeZone) })),
         links: links.map(({ row: link, createdBy }) => ({
           id: link.id,
           check: nameOf(link.checkId),

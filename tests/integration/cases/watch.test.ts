@@ -2,6 +2,7 @@ import { sql } from 'drizzle-orm';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { signWatchToken, readWatchToken } from '@/lib/auth/watch-token';
 import { newId } from '@/lib/ids';
+import { openCase } from '@/lib/services/case/open';
 import { callCause } from '@/lib/services/case/call';
 import { readCase } from '@/lib/services/case/read';
 import { reopenCase } from '@/lib/services/case/reopen';
@@ -156,6 +157,38 @@ describe('a watch', () => {
     await end('lost', 'Sold');
     expect(await seen()).toMatchObject({ outcome: 'lost', why: 'Sold', proof: 'none' });
     await expect(read('oil-amount', { state: 'film' })).rejects.toMatchObject({ code: 'conflict' });
+  });
+});
+
+describe('a case that was opened on the unit meanwhile', () => {
+  const openAnother = async (unitId: string) => {
+    const id = newId();
+    await openCase({ ctx: workshop.ctx, input: { id, unit: { kind: 'known', unitId }, complaints: ['complaint-oil'], complaintWords: '', odometerReplaced: false } });
+    return id;
+  };
+
+  it('says that a repair of its unit is watched, and can be what came back', async () => {
+    const { ctx, caseId, watchId, seen } = await watched();
+    clock.forward(DAY_MS);
+    const { head } = await readCase({ ctx, input: { caseId } });
+    const later = await openAnother(head.unit.id);
+    expect((await readCase({ ctx, input: { caseId: later } })).watching).toMatchObject({ own: null, others: [{ caseId, number: head.number }], cameBackFrom: null });
+    expect((await seen()).mayGoOnIn).toEqual([expect.objectContaining({ caseId: later })]);
+    await expect(endWatch({ ctx, input: { caseId, watchId, outcome: 'comeback', why: 'Oil again', goesOnIn: caseId } })).rejects.toMatchObject({ fields: { goesOnIn: expect.any(String) } });
+    expect(await endWatch({ ctx, input: { caseId, watchId, outcome: 'comeback', why: 'Oil again', goesOnIn: later } })).toMatchObject({ comebackCaseId: later });
+    expect((await readCase({ ctx, input: { caseId: later } })).watching).toEqual({ own: null, others: [], cameBackFrom: { caseId, number: head.number } });
+    expect(await seen()).toMatchObject({ outcome: 'comeback', comeback: { caseId: later } });
+  });
+
+  it('was opened before it was watched: that is not asked', async () => {
+    const { ctx } = workshop;
+    const caseId = await called();
+    const { head } = await readCase({ ctx, input: { caseId } });
+    const earlier = await openAnother(head.unit.id);
+    clock.forward(DAY_MS);
+    await startWatch({ ctx, input: { id: newId(), caseId, begin: [YES, YES, YES, YES] } });
+    expect((await readCase({ ctx, input: { caseId: earlier } })).watching.others).toEqual([]);
+    expect((await readCase({ ctx, input: { caseId } })).watching.own).toMatchObject({ next: { check: 'Amount of oil', state: 'waits' } });
   });
 });
 

@@ -77,7 +77,7 @@ export default async function WatchPage({ params }: { params: Promise<{ id: stri
             <div>
               <LinkForm key={current.links.length} action={makeLink} ids={{ ...ids, id: newId() }} checks={current.due.map(({ checkId, check }) => ({ value: checkId, label: check }))} />
               {last && <TakeBackForm action={takeBack} ids={{ ...ids, readingId: last.id }} />}
-              <EndForm action={endIt} ids={ids} />
+              <div id="end"><EndForm action={endIt} ids={ids} openCases={current.mayGoOnIn.map(({ caseId: value, number, openedOn }) => ({ value, label: `Case ${number}, opened ${dayText(openedOn)}` }))} /></div>
             </div>
           </section>
         )}
