@@ -42,6 +42,12 @@ import * as casesIdFittingsFittingIdFinish from './cases/[id]/fittings/[fittingI
 import * as casesIdFittingsFittingIdPoints from './cases/[id]/fittings/[fittingId]/points/route';
 import * as casesIdRelease from './cases/[id]/release/route';
 import * as casesIdReleases from './cases/[id]/releases/route';
+import * as casesIdWatches from './cases/[id]/watches/route';
+import * as casesIdWatchesWatchIdEnd from './cases/[id]/watches/[watchId]/end/route';
+import * as casesIdWatchesWatchIdLinks from './cases/[id]/watches/[watchId]/links/route';
+import * as casesIdWatchesWatchIdLinksLinkIdRevoke from './cases/[id]/watches/[watchId]/links/[linkId]/revoke/route';
+import * as casesIdWatchesWatchIdReadings from './cases/[id]/watches/[watchId]/readings/route';
+import * as casesIdWatchesWatchIdReadingsReadingIdTakeBack from './cases/[id]/watches/[watchId]/readings/[readingId]/take-back/route';
 import * as casesIdWorkCautions from './cases/[id]/work-cautions/route';
 import * as casesIdReopen from './cases/[id]/reopen/route';
 import * as casesIdRulebook from './cases/[id]/rulebook/route';
@@ -133,6 +139,12 @@ export const ROUTES = {
   '/cases/{id}/fittings/{fittingId}/points': casesIdFittingsFittingIdPoints,
   '/cases/{id}/release': casesIdRelease,
   '/cases/{id}/releases': casesIdReleases,
+  '/cases/{id}/watches': casesIdWatches,
+  '/cases/{id}/watches/{watchId}/end': casesIdWatchesWatchIdEnd,
+  '/cases/{id}/watches/{watchId}/links': casesIdWatchesWatchIdLinks,
+  '/cases/{id}/watches/{watchId}/links/{linkId}/revoke': casesIdWatchesWatchIdLinksLinkIdRevoke,
+  '/cases/{id}/watches/{watchId}/readings': casesIdWatchesWatchIdReadings,
+  '/cases/{id}/watches/{watchId}/readings/{readingId}/take-back': casesIdWatchesWatchIdReadingsReadingIdTakeBack,
   '/cases/{id}/work-cautions': casesIdWorkCautions,
   '/cases/{id}/reopen': casesIdReopen,
   '/cases/{id}/rulebook': casesIdRulebook,

@@ -13,6 +13,8 @@ import { feature } from '../row';
 const SEE = PERMITTED['case.see'];
 const WORK = PERMITTED['case.work'];
 const PAGE = '(signed-in)/cases/[id]/watch';
+const CASE = 'api/v1/cases/[id]/watches';
+const ONE = `${CASE}/[watchId]`;
 const CHECK = 'oil-amount';
 const YES = { answer: 'yes' as const };
 
@@ -44,5 +46,13 @@ export const watches = feature({
     { action: PAGE, name: 'makeLink', roles: WORK, form: ({ caseId, watchId }) => ({ id: newId(), caseId, watchId, checkId: CHECK, forWhom: 'Driver', mailTo: 'driver@people.test', days: '7' }) },
     { action: PAGE, name: 'takeLinkBack', roles: WORK, form: ({ caseId, watchId, linkId }) => ({ caseId, watchId, linkId }) },
     { action: PAGE, name: 'endIt', roles: WORK, form: ({ caseId, watchId }) => ({ caseId, watchId, outcome: 'lost', why: 'Sold' }) },
+
+    { route: CASE, method: 'GET', roles: SEE, params: ({ caseId }) => ({ id: caseId }) },
+    { route: CASE, method: 'POST', roles: WORK, params: ({ calledId }) => ({ id: calledId }), body: () => ({ id: newId(), begin: [YES, YES, YES, YES] }) },
+    { route: `${ONE}/readings`, method: 'POST', roles: WORK, params: ({ caseId, watchId }) => ({ id: caseId, watchId }), body: () => ({ id: newId(), checkId: CHECK, state: 'light' }) },
+    { route: `${ONE}/readings/[readingId]/take-back`, method: 'POST', roles: WORK, params: ({ caseId, watchId, readingId }) => ({ id: caseId, watchId, readingId }), body: () => ({ whyTakenBack: 'The wrong unit' }) },
+    { route: `${ONE}/links`, method: 'POST', roles: WORK, params: ({ caseId, watchId }) => ({ id: caseId, watchId }), body: () => ({ id: newId(), checkId: CHECK, forWhom: 'Driver' }) },
+    { route: `${ONE}/links/[linkId]/revoke`, method: 'POST', roles: WORK, params: ({ caseId, watchId, linkId }) => ({ id: caseId, watchId, linkId }) },
+    { route: `${ONE}/end`, method: 'POST', roles: WORK, params: ({ caseId, watchId }) => ({ id: caseId, watchId }), body: () => ({ outcome: 'lost', why: 'Sold' }) },
   ],
 });
