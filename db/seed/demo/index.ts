@@ -11,6 +11,7 @@ import { policyOf } from './policy';
 import { randomFrom } from './random';
 import { noRows, type DemoRows } from './rows';
 import { Truth, type TrueCause } from './truth';
+import { watchRows } from './watch-rows';
 import { UnitStory } from './unit-story';
 import { compareFindings } from './compare-findings';
 import { makeVehicles, type Vehicle } from './vehicles';
@@ -43,6 +44,7 @@ export function makeDemo(today: Date, rulebook: Rulebook, vehicles: readonly Veh
   for (const vehicle of vehicles) new UnitStory(world, shop, vehicle, random.fork(vehicle.fleetNumber)).tell();
   compareFindings(rows, compiled);
   catchRows(rows, compiled, random.fork('catches'));
+  watchRows(rows, rulebook, today, random.fork('watches'));
   noticeRows(rows);
   numberCases(rows);
   return { rows, truths: world.truths };
