@@ -18,7 +18,7 @@ export function Watching({ view: { head, watching } }: { view: CaseView }) {
       )}
       {own && (
         <Line href={`/cases/${head.id}/watch`} link={own.next && own.next.state !== 'waits' ? 'Read it' : 'See the watch'}>
-          <strong>The repair is being watched</strong> until {dayText(own.until)}.{own.next && <> {own.next.check} {DUE[own.next.state]} {dayText(own.next.dueOn)}.</>}
+          <strong>The repair is being watched</strong>{own.isOver ? <>; its time was over on {dayText(own.until)}: read what is missing, then say what came of it.</> : <> until {dayText(own.until)}.</>}{own.next && <> {own.next.check} {DUE[own.next.state]} {dayText(own.next.dueOn)}.</>}
         </Line>
       )}
       {others.map(({ caseId, number, since }) => (

@@ -198,7 +198,7 @@ export interface CatchingView {
 /** What a case has to do with repairs that are watched, now. */
 export interface WatchingView {
   /** The watch of this case; null: none is under way. */
-  own: { until: string; next: { check: string; dueOn: string; state: 'waits' | 'due' | 'overdue' } | null } | null;
+  own: { until: string; isOver: boolean; next: { check: string; dueOn: string; state: 'waits' | 'due' | 'overdue' } | null } | null;
   /** Of the unit, for other cases, since before this one was opened: this may be their end. */
   others: { caseId: string; number: number; since: string }[];
   /** The case whose repair didn't hold, which this one goes on with. */

@@ -8,6 +8,8 @@ import type { DemoRows, Row } from './rows';
 const DAY_MS = 86_400_000;
 /** How long ago a repair was called for its watch to have a reading behind it and another before it. */
 const OLD_ENOUGH_DAYS = 17;
+/** Longer ago somebody would have ended it. */
+const TOO_OLD_DAYS = 70;
 const WATCHED = 2;
 const CHECK = 'oil-amount';
 const LINES_AS_THEY_WERE = 'It was sound and its bore was measured in spring';
@@ -18,9 +20,9 @@ const LINES_AS_THEY_WERE = 'It was sound and its bore was measured in spring';
  */
 export function watchRows(rows: DemoRows, { proof, checks }: Rulebook, today: Date, random: Random): void {
   const statements = proof?.watch.begin ?? [];
-  const oldEnough = today.getTime() - OLD_ENOUGH_DAYS * DAY_MS;
+  const isOfThen = (at: Date | undefined) => at !== undefined && at.getTime() < today.getTime() - OLD_ENOUGH_DAYS * DAY_MS && at.getTime() > today.getTime() - TOO_OLD_DAYS * DAY_MS;
   const called = new Map(rows.call.map((row) => [row.caseId, row]));
-  const watched = rows.cases.filter(({ id, status }) => status === 'called' && (called.get(id)?.at.getTime() ?? today.getTime()) < oldEnough && called.get(id)?.mainCause !== 'normal-carryover');
+  const watched = rows.cases.filter(({ id, status }) => status === 'called' && isOfThen(called.get(id)?.at) && called.get(id)?.mainCause !== 'normal-carryover');
   for (const [i, { organisationId, id: caseId, unitId, openedBy: startedBy }] of watched.slice(-WATCHED).reverse().entries()) {
     const call = called.get(caseId);
     const plan = call && planFor(proof, call.mainCause);

@@ -59,7 +59,7 @@ const otherHold = z.object({ caseId: id, number: count, checks: z.array(z.string
 const anotherCase = z.object({ caseId: id, number: count });
 const watching = z
   .object({
-    own: z.object({ until: day, next: z.object({ check: z.string(), dueOn: day, state: z.enum(['waits', 'due', 'overdue']) }).nullable() }).nullable(),
+    own: z.object({ until: day, isOver: z.boolean(), next: z.object({ check: z.string(), dueOn: day, state: z.enum(['waits', 'due', 'overdue']) }).nullable() }).nullable(),
     others: z.array(anotherCase.extend({ since: instant })),
     cameBackFrom: anotherCase.nullable(),
   })

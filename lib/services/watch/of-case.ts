@@ -28,7 +28,9 @@ export async function watchingOf(tx: Transaction, { organisationId, head, compil
     if (!own) return null;
     const watched = watchedOf(own, head.timeZone);
     const reads = standingReads(await selectWatchReadings(tx, { organisationId, watchId: own.id }), head.timeZone);
-    const [next] = dueReadings(watched, reads, { today: siteDay(now, head.timeZone) }).sort((a, b) => (a.dueOn < b.dueOn ? -1 : 1));
-    return { until: endOf(watched).on, next: next ? { check: compiled.checks.get(next.checkId)?.check.name ?? next.checkId, dueOn: next.dueOn, state: next.state } : null };
+    const today = siteDay(now, head.timeZone);
+    const until = endOf(watched).on;
+    const [next] = dueReadings(watched, reads, { today }).sort((a, b) => (a.dueOn < b.dueOn ? -1 : 1));
+    return { until, isOver: today > until, next: next ? { check: compiled.checks.get(next.checkId)?.check.name ?? next.checkId, dueOn: next.dueOn, state: next.state } : null };
   }
 }
