@@ -1,10 +1,12 @@
 import { insertWatchReading, selectWatchReadings, updateWatchReading } from '@/db/queries/watch';
 import { PERMITTED } from '@/lib/auth/permissions';
+import { siteDay } from '@/lib/case/site-day';
 import { notFound } from '@/lib/errors';
 import { addWatchReadingInput, takeBackWatchReadingInput } from '@/lib/schemas/watch';
 import { lockCaseOf } from '../case/locked';
 import { refuseUnread } from '../case/write-finding';
 import { defineWrite } from '../define';
+import { noteReading } from '../unit/note-reading';
 import { lockWatchOf, refuseEnded } from './locked';
 import { readReading, takenReading } from './read-reading';
 import { planWatchReminder } from './reminder';
@@ -15,7 +17,8 @@ export const addWatchReading = defineWrite({
   doing: 'read what is watched',
   roles: PERMITTED['case.work'],
   input: addWatchReadingInput,
-  run: async ({ tx, ctx, input: { id, caseId, watchId, ...typed }, audit, unchanged }) => {
+  run: async (work) => {
+    const { tx, ctx, input: { id, caseId, watchId, ...typed }, audit, unchanged } = work;
     const of = { organisationId: ctx.organisation.id, caseId, watchId };
     const { head, compiled } = await lockCaseOf(tx, of);
     const watch = await lockWatchOf(tx, of);
@@ -27,6 +30,7 @@ export const addWatchReading = defineWrite({
     const read = await readReading(tx, { habits: ctx, compiled, watch, typed });
     const check = compiled.checks.get(typed.checkId)?.check;
     if (check) await refuseUnread(tx, ctx, { head, compiled, check });
+    await noteReading(work, { unitId: head.unitId, readOn: siteDay(ctx.now(), head.timeZone), odometer: typed.odometer, source: 'case' });
     if (!(await insertWatchReading(tx, { ...of, ...read, id, personId: ctx.person.id, at: ctx.now() }))) throw takenReading();
     await planWatchReminder(tx, ctx, { organisationId: of.organisationId, watchId, timeZone: head.timeZone });
     audit({ entity: 'watch', entityId: watchId, changed: { caseId, checkId: read.checkId, shares: read.shares, valueTyped: read.valueTyped, verdict: read.verdict } });

@@ -1,13 +1,14 @@
 import { selectCalls, selectCaseEvents } from '@/db/queries/case';
 import { insertWatch, lockWatch, type WatchRow } from '@/db/queries/watch';
 import { PERMITTED } from '@/lib/auth/permissions';
+import { siteDay } from '@/lib/case/site-day';
 import { conflict, invalid, type FieldErrors } from '@/lib/errors';
-import { ODOMETER, startWatchInput } from '@/lib/schemas/watch';
+import { startWatchInput } from '@/lib/schemas/watch';
 import { planFor } from '@/lib/watch';
 import { lockCaseOf } from '../case/locked';
 import { standingCall } from '../case/standing-call';
 import { defineWrite } from '../define';
-import { readMeasures } from '../units-of-measure';
+import { noteReading } from '../unit/note-reading';
 import { planWatchReminder } from './reminder';
 
 /**
@@ -19,7 +20,8 @@ export const startWatch = defineWrite({
   doing: 'watch repairs',
   roles: PERMITTED['case.work'],
   input: startWatchInput,
-  run: async ({ tx, ctx, input: { id, caseId, begin, odometer }, audit, unchanged }) => {
+  run: async (work) => {
+    const { tx, ctx, input: { id, caseId, begin, odometer }, audit, unchanged } = work;
     const of = { organisationId: ctx.organisation.id, caseId };
     const { head, compiled } = await lockCaseOf(tx, of);
     const known = await lockWatch(tx, { ...of, watchId: id });
@@ -33,11 +35,11 @@ export const startWatch = defineWrite({
     const plan = planFor(compiled.rulebook.proof, call.mainCause);
     if (!plan) throw conflict('The rulebook of this case says nothing of watching.');
     const answers = answered(compiled.rulebook.proof?.watch.begin ?? [], begin);
-    const { columns, asTyped } = readMeasures(ctx, [ODOMETER], { odometer });
-    const written = await insertWatch(tx, { ...of, ...columns, id, unitId: head.unitId, causeId: call.mainCause, plan, begin: answers, asTyped, startedAt: ctx.now(), startedBy: ctx.person.id });
+    const { odometerM = null, asTyped = {} } = (await noteReading(work, { unitId: head.unitId, readOn: siteDay(ctx.now(), head.timeZone), odometer, source: 'case' })) ?? {};
+    const written = await insertWatch(tx, { ...of, id, odometerM, unitId: head.unitId, causeId: call.mainCause, plan, begin: answers, asTyped, startedAt: ctx.now(), startedBy: ctx.person.id });
     if (!written) throw conflict('This case is being watched already.');
     await planWatchReminder(tx, ctx, { organisationId: of.organisationId, watchId: id, timeZone: head.timeZone });
-    audit({ entity: 'watch', entityId: id, changed: { caseId, causeId: call.mainCause, plan: plan.id, begin: answers.map(({ answer }) => answer), ...columns } });
+    audit({ entity: 'watch', entityId: id, changed: { caseId, causeId: call.mainCause, plan: plan.id, begin: answers.map(({ answer }) => answer), odometerM } });
     return { id, caseId };
   },
 });

@@ -20,6 +20,7 @@ import { endRepair, markStep } from '@/lib/services/repair/work';
 import { acknowledgeRepair } from '@/lib/services/repair/acknowledge';
 import { DAY_MS, makeClock } from '@/tests/support/clock';
 import { openTestDatabases, type TestDatabases } from '@/tests/support/context';
+import { makePost } from '@/tests/support/post';
 import { makeVisitor, TEST_SECRET, type Tenant } from '@/tests/support/tenant';
 import { makeWorkshop, openACase, readCautions } from './support';
 
@@ -106,6 +107,14 @@ describe('a watch', () => {
     await takeBackWatchReading({ ctx, input: { caseId, watchId, readingId: id, whyTakenBack: 'The wrong unit' } });
     expect((await seen()).readings[0]).toMatchObject({ takenBack: { by: ctx.person.name, why: 'The wrong unit' } });
     expect((await seen()).due[0]).toMatchObject({ checkId: 'oil-amount', state: 'waits' });
+  });
+
+  it('writes the odometer to the unit’s record too', async () => {
+    const { caseId, read } = await watched({ odometer: '100,000 mi' });
+    clock.forward(DAY_MS);
+    await read('oil-amount', { state: 'film', odometer: '100,400 mi' });
+    const { rows } = await workshop.asOwner((tx) => tx.execute(sql`select round(odometer_m / 1609.344)::int as miles from unit_reading where unit_id = (select unit_id from watch where case_id = ${caseId}) order by odometer_m`));
+    expect(rows).toEqual([{ miles: 100_000 }, { miles: 100_400 }]);
   });
 
   it.each([[0, 'none'], [1, 'isolated'], [2, 'held-with-others']])('is held when all was read at its end, and after %s repairs proves: %s', async (repairs, proof) => {
@@ -235,6 +244,23 @@ describe('reminders', () => {
     forwardTo(next.due);
     await work(next);
     expect(await told(caseId)).toEqual([]);
+  });
+});
+
+describe('a mailed link', () => {
+  it('leads from the letter to its one reading', async () => {
+    const { ctx, caseId, watchId, seen } = await watched();
+    await createWatchLink({ ctx, input: { id: newId(), caseId, watchId, checkId: 'oil-amount', forWhom: 'The driver', mailTo: 'driver@people.test' } });
+    const { post, letters, deliver } = makePost(databases, clock.now);
+    await deliver(workshop.organisationId);
+    const letter = letters.find(({ to }) => to === 'driver@people.test');
+    expect(letter?.text).toContain('Hello The driver');
+    const token = /https:\/\/carryover\.test\/watch\/(\S+)/.exec(letter?.text ?? '')?.[1] ?? '';
+    const visitor = { ...makeVisitor(databases, { now: clock.now }), signingSecret: post.secret };
+    expect(await viewWatchLink({ visitor, input: { token } })).toMatchObject({ name: 'Amount of oil' });
+    await readByLink({ visitor, input: { token, id: newId(), name: 'Sam', hasReadCautions: 'on', state: 'film' } });
+    expect((await seen()).readings).toMatchObject([{ by: 'Sam', byLink: true, isInOrder: true }]);
+    await expect(readByLink({ visitor, input: { token, id: newId(), name: 'Sam', hasReadCautions: 'on', state: 'film' } })).rejects.toMatchObject({ code: 'not-found' });
   });
 });
 
