@@ -35,6 +35,11 @@ export async function selectWatchUnderWay(db: Executor, { organisationId, caseId
   return row;
 }
 
+export async function findWatch(db: Executor, { organisationId, watchId }: OfWatch): Promise<WatchRow | undefined> {
+  const [row] = await db.select().from(watch).where(and(eq(watch.organisationId, organisationId), eq(watch.id, watchId)));
+  return row;
+}
+
 export async function lockWatch(db: Executor, { organisationId, watchId }: OfWatch): Promise<WatchRow | undefined> {
   const [row] = await db.select().from(watch).where(and(eq(watch.organisationId, organisationId), eq(watch.id, watchId))).for('update');
   return row;

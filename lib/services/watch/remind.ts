@@ -1,7 +1,7 @@
 import { asTenant } from '@/db/connect';
 import { insertAudit } from '@/db/queries/audit';
-import { selectCaseHead } from '@/db/queries/case';
-import { lockWatch, selectWatchReadings } from '@/db/queries/watch';
+import { lockCase, selectCaseHead } from '@/db/queries/case';
+import { findWatch, lockWatch, selectWatchReadings } from '@/db/queries/watch';
 import { siteDay } from '@/lib/case/site-day';
 import { jobs, type JobData } from '@/lib/jobs';
 import { dueReadings } from '@/lib/watch';
@@ -19,6 +19,9 @@ import { standingReads, watchedOf } from './standing';
  */
 export async function remindOfWatch({ db, now }: Pick<Post, 'db' | 'now'>, { organisationId, watchId, due }: JobData['remind-watch']): Promise<void> {
   await asTenant(db, { organisationId }, async (tx) => {
+    const known = await findWatch(tx, { organisationId, watchId });
+    // As whoever writes to the case does, the case before its watch: a notice of a case waits for it.
+    if (known) await lockCase(tx, { organisationId, caseId: known.caseId });
     const watch = await lockWatch(tx, { organisationId, watchId });
     if (!watch || watch.endedAt || watch.remindAt?.toISOString() !== due) return;
     const { caseId } = watch;

@@ -8,6 +8,7 @@ import { standingReads, watchedOf } from './standing';
 
 /** Days until somebody is told again of what is still not read. */
 const AGAIN_AFTER_DAYS = 3;
+const A_QUARTER_MS = 15 * 60_000;
 const HALF_A_DAY_MS = 12 * 3_600_000;
 
 interface Of {
@@ -20,29 +21,40 @@ interface Of {
 }
 
 /**
- * Plans when somebody is told next of what is due: on the morning of the first due day. What is due already is told of on the
- * morning that is planned for it, or on the next. A job of an earlier plan does nothing; one that finds nothing due plans again.
+ * Plans when somebody is told next: on the morning of the day on which something comes due, or, of what is due already, some days
+ * after it was told, and the next morning when it wasn't. A job of an earlier plan does nothing; one that finds nothing due plans
+ * again.
  *
  * @param with the queue and the clock of whoever works
  */
 export async function planWatchReminder(tx: Transaction, { jobs, now }: { jobs: JobQueue; now: () => Date }, { organisationId, watchId, timeZone, isTold = false }: Of): Promise<void> {
   const watch = await lockWatch(tx, { organisationId, watchId });
   if (!watch || watch.endedAt) return;
-  const today = siteDay(now(), timeZone);
+  const at = now();
+  const today = siteDay(at, timeZone);
   const reads = standingReads(await selectWatchReadings(tx, { organisationId, watchId }), timeZone);
   const dues = dueReadings(watchedOf(watch, timeZone), reads, { today });
-  const isDue = dues.some(({ state }) => state !== 'waits');
-  if (isDue && !isTold && watch.remindAt && watch.remindAt > now()) return;
-  const first = dues.map(({ dueOn }) => dueOn).sort()[0] ?? today;
-  const remindAt = morningOf(isDue ? addDays(today, isTold ? AGAIN_AFTER_DAYS : 1) : first, timeZone);
-  if (remindAt.getTime() === watch.remindAt?.getTime()) return;
+  const comingDue = dues.filter(({ state }) => state === 'waits').map(({ dueOn }) => reminderOn(dueOn, timeZone));
+  const again = dues.length > comingDue.length ? [againAt()] : [];
+  const remindAt = earliest([...comingDue, ...again]);
+  if (!remindAt || remindAt.getTime() === watch.remindAt?.getTime()) return;
   await updateWatch(tx, { organisationId, watchId }, { remindAt });
   await jobs.send(tx, 'remind-watch', { organisationId, watchId, due: remindAt.toISOString() }, { startAfter: remindAt });
+
+  /** Of what is due already. A plan that is further off was made when nothing was: a reading was taken back since. */
+  function againAt(): Date {
+    const afterSome = reminderOn(addDays(today, AGAIN_AFTER_DAYS), timeZone);
+    if (isTold) return afterSome;
+    const planned = watch?.remindAt;
+    return planned && planned > at && planned <= afterSome ? planned : reminderOn(addDays(today, 1), timeZone);
+  }
 }
 
-/** Six o'clock on a day of the site. */
-function morningOf(day: string, timeZone: string): Date {
+const earliest = (times: readonly Date[]): Date | undefined => [...times].sort((a, b) => a.getTime() - b.getTime())[0];
+
+/** A quarter of an hour before six on a day of the site, when the mails of a day's notices go out: so it is in that day's. */
+export function reminderOn(day: string, timeZone: string): Date {
   let at = nextMorning(new Date(Date.parse(`${day}T00:00:00Z`) - HALF_A_DAY_MS), timeZone);
   while (siteDay(at, timeZone) < day) at = nextMorning(at, timeZone);
-  return at;
+  return new Date(at.getTime() - A_QUARTER_MS);
 }
