@@ -1,12 +1,14 @@
-import { insertWatchReading, selectWatchReadings, updateWatchReading } from '@/db/queries/watch';
+import { selectReadings } from '@/db/queries/unit-reading';
+import { insertWatchReading, selectWatchReadings, updateWatchReading, type WatchReadingRow } from '@/db/queries/watch';
 import { PERMITTED } from '@/lib/auth/permissions';
 import { siteDay } from '@/lib/case/site-day';
 import { notFound } from '@/lib/errors';
 import { addWatchReadingInput, takeBackWatchReadingInput } from '@/lib/schemas/watch';
-import { lockCaseOf } from '../case/locked';
+import { lockCaseOf, type LockedCase } from '../case/locked';
 import { refuseUnread } from '../case/write-finding';
-import { defineWrite } from '../define';
+import { defineWrite, type Work } from '../define';
 import { noteReading } from '../unit/note-reading';
+import { strikeOut } from '../unit/strike-reading';
 import { lockWatchOf, refuseEnded } from './locked';
 import { readReading, takenReading } from './read-reading';
 import { planWatchReminder } from './reminder';
@@ -44,7 +46,8 @@ export const takeBackWatchReading = defineWrite({
   doing: 'read what is watched',
   roles: PERMITTED['case.work'],
   input: takeBackWatchReadingInput,
-  run: async ({ tx, ctx, input: { caseId, watchId, readingId, whyTakenBack }, audit, unchanged }) => {
+  run: async (work) => {
+    const { tx, ctx, input: { caseId, watchId, readingId, whyTakenBack }, audit, unchanged } = work;
     const of = { organisationId: ctx.organisation.id, caseId, watchId };
     const { head } = await lockCaseOf(tx, of);
     const watch = await lockWatchOf(tx, of);
@@ -54,9 +57,19 @@ export const takeBackWatchReading = defineWrite({
     else {
       refuseEnded(watch);
       await updateWatchReading(tx, { ...of, readingId }, { takenBackAt: ctx.now(), takenBackBy: ctx.person.id, takenBackWhy: whyTakenBack });
+      await strikeOdometer(work, reading, head);
       await planWatchReminder(tx, ctx, { organisationId: of.organisationId, watchId, timeZone: head.timeZone });
       audit({ entity: 'watch', entityId: watchId, changed: { caseId, checkId: reading.checkId, takenBack: true, reason: whyTakenBack } });
     }
     return { id: readingId, caseId };
   },
 });
+
+/** What a reading wrote to its unit's record is struck out with it; what came by a link wrote nothing there. */
+async function strikeOdometer(work: Work<unknown>, { odometerM, at, linkId }: WatchReadingRow['row'], { unitId, timeZone }: Pick<LockedCase, 'unitId' | 'timeZone'>): Promise<void> {
+  if (odometerM === null || linkId !== null) return;
+  const readOn = siteDay(at, timeZone);
+  const readings = await selectReadings(work.tx, { organisationId: work.ctx.organisation.id, unitId });
+  const written = readings.findLast((row) => row.source === 'case' && row.readOn === readOn && row.odometerM === odometerM && row.engineS === null);
+  if (written) await strikeOut(work, { readingId: written.id, reason: 'Taken back with what was read of a watch' });
+}

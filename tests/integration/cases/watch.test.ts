@@ -117,6 +117,15 @@ describe('a watch', () => {
     expect(rows).toEqual([{ miles: 100_000 }, { miles: 100_400 }]);
   });
 
+  it('strikes the odometer out of the unit’s record with the reading that is taken back', async () => {
+    const { ctx, caseId, watchId, read } = await watched({ odometer: '100,000 mi' });
+    const id = newId();
+    await read('oil-amount', { state: 'film', odometer: '300,000 mi' }, id);
+    await expect(read('oil-amount', { state: 'film', odometer: '100,400 mi' })).rejects.toMatchObject({ fields: { odometer: expect.stringContaining('300,000') } });
+    for (let i = 0; i < 2; i++) await takeBackWatchReading({ ctx, input: { caseId, watchId, readingId: id, whyTakenBack: 'The wrong unit' } });
+    await read('oil-amount', { state: 'film', odometer: '100,400 mi' });
+  });
+
   it.each([[0, 'none'], [1, 'isolated'], [2, 'held-with-others']])('is held when all was read at its end, and after %s repairs proves: %s', async (repairs, proof) => {
     const { ctx, caseId, end, readAll, seen } = await watched({ repairs });
     await expect(end('held')).rejects.toMatchObject({ code: 'conflict', message: expect.stringContaining('was not read') });
