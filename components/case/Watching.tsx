@@ -1,7 +1,6 @@
-import Link from 'next/link';
-import type { ReactNode } from 'react';
 import type { CaseView } from '@/lib/schemas/case-view';
 import { dayText } from '@/lib/schemas/day-text';
+import { GoingOn } from './GoingOn';
 import { timeText } from './words';
 
 const DUE = { waits: 'is to be read on', due: 'is due today,', overdue: 'is overdue since' } as const;
@@ -12,27 +11,20 @@ export function Watching({ view: { head, watching } }: { view: CaseView }) {
   return (
     <>
       {cameBackFrom && (
-        <Line href={`/cases/${cameBackFrom.caseId}`} link={`See case ${cameBackFrom.number}`}>
+        <GoingOn href={`/cases/${cameBackFrom.caseId}`} link={`See case ${cameBackFrom.number}`}>
           <strong>This came back.</strong> The repair of case {cameBackFrom.number} didn’t hold; its call is in doubt.
-        </Line>
+        </GoingOn>
       )}
       {own && (
-        <Line href={`/cases/${head.id}/watch`} link={own.next && own.next.state !== 'waits' ? 'Read it' : 'See the watch'}>
+        <GoingOn href={`/cases/${head.id}/watch`} link={own.next && own.next.state !== 'waits' ? 'Read it' : 'See the watch'}>
           <strong>The repair is being watched</strong>{own.isOver ? <>; its time was over on {dayText(own.until)}: read what is missing, then say what came of it.</> : <> until {dayText(own.until)}.</>}{own.next && <> {own.next.check} {DUE[own.next.state]} {dayText(own.next.dueOn)}.</>}
-        </Line>
+        </GoingOn>
       )}
       {others.map(({ caseId, number, since }) => (
-        <Line key={caseId} href={`/cases/${caseId}/watch#end`} link={`It came back: end the watch of case ${number}`}>
+        <GoingOn key={caseId} href={`/cases/${caseId}/watch#end`} link={`It came back: end the watch of case ${number}`}>
           <strong>A repair of this unit is being watched</strong> since {timeText(since, head.timeZone)}, for case {number}. Is this the same trouble?
-        </Line>
+        </GoingOn>
       ))}
     </>
   );
 }
-
-const Line = ({ href, link, children }: { href: string; link: string; children: ReactNode }) => (
-  <p className="mb-4 border-l-4 border-ink pl-3">
-    {children}{' '}
-    <Link className="inline-flex min-h-touch items-center underline underline-offset-4" href={href}>{link}</Link>
-  </p>
-);

@@ -35,7 +35,7 @@ export function pareto(causes: readonly CauseCount[]): ParetoBar[] {
   });
 }
 
-const byName = (a: CauseCount, b: CauseCount) => (a.cause < b.cause ? -1 : a.cause > b.cause ? 1 : 0);
+const byName = (a: Pick<CauseCount, 'cause'>, b: Pick<CauseCount, 'cause'>) => (a.cause < b.cause ? -1 : a.cause > b.cause ? 1 : 0);
 
 /**
  * The same causes by cost, or by failures per million miles: the order often turns around. Causes of which that is not known
@@ -52,5 +52,5 @@ export function rankedBy(causes: readonly CauseCount[], by: 'cost' | 'rate'): { 
       const value = by === 'cost' ? cost : miles ? (1e6 * count) / miles : undefined;
       return value === undefined ? [] : [{ cause: cause.cause, value }];
     })
-    .sort((a, b) => b.value - a.value || (a.cause < b.cause ? -1 : 1));
+    .sort((a, b) => b.value - a.value || byName(a, b));
 }

@@ -1,10 +1,10 @@
 import type { Transaction } from '@/db/connect';
-import { selectCameBackFrom, selectWatchesUnderWayOfUnit, selectWatchReadings } from '@/db/queries/watch';
+import { selectCameBackFrom, selectWatchesUnderWayOfUnit } from '@/db/queries/watch';
 import { siteDay } from '@/lib/case/site-day';
 import type { CompiledRulebook } from '@/lib/diagnose';
 import type { WatchingView } from '@/lib/schemas/case-view';
-import { dueReadings, endOf } from '@/lib/watch';
-import { standingReads, watchedOf } from './standing';
+import { endOf } from '@/lib/watch';
+import { dueOfWatch, watchedOf } from './standing';
 
 interface Head {
   id: string;
@@ -26,11 +26,9 @@ export async function watchingOf(tx: Transaction, { organisationId, head, compil
 
   async function ownView(): Promise<WatchingView['own']> {
     if (!own) return null;
-    const watched = watchedOf(own, head.timeZone);
-    const reads = standingReads(await selectWatchReadings(tx, { organisationId, watchId: own.id }), head.timeZone);
     const today = siteDay(now, head.timeZone);
-    const until = endOf(watched).on;
-    const [next] = dueReadings(watched, reads, { today }).sort((a, b) => (a.dueOn < b.dueOn ? -1 : 1));
+    const until = endOf(watchedOf(own, head.timeZone)).on;
+    const [next] = (await dueOfWatch(tx, own, { timeZone: head.timeZone, today })).sort((a, b) => (a.dueOn < b.dueOn ? -1 : 1));
     return { until, isOver: today > until, next: next ? { check: compiled.checks.get(next.checkId)?.check.name ?? next.checkId, dueOn: next.dueOn, state: next.state } : null };
   }
 }

@@ -1,16 +1,15 @@
 import { asTenant } from '@/db/connect';
 import { insertAudit } from '@/db/queries/audit';
 import { lockCase, selectCaseHead } from '@/db/queries/case';
-import { findWatch, lockWatch, selectWatchReadings } from '@/db/queries/watch';
+import { findWatch, lockWatch } from '@/db/queries/watch';
 import { siteDay } from '@/lib/case/site-day';
 import { jobs, type JobData } from '@/lib/jobs';
-import { dueReadings } from '@/lib/watch';
 import { firstHere } from '../case/first-here';
 import { compiledEdition } from '../edition/compiled';
 import type { Post } from '../mail/send';
 import { notify } from '../notice/notify';
 import { planWatchReminder } from './reminder';
-import { standingReads, watchedOf } from './standing';
+import { dueOfWatch } from './standing';
 
 /**
  * Tells whoever has the case, else who began the watch, what is due to be read, and plans the next time. Nothing to do when the
@@ -29,8 +28,7 @@ export async function remindOfWatch({ db, now }: Pick<Post, 'db' | 'now'>, { org
     if (!head) return;
     const at = now();
     const today = siteDay(at, head.timeZone);
-    const reads = standingReads(await selectWatchReadings(tx, { organisationId, watchId }), head.timeZone);
-    const open = dueReadings(watchedOf(watch, head.timeZone), reads, { today }).filter(({ state }) => state !== 'waits');
+    const open = (await dueOfWatch(tx, watch, { timeZone: head.timeZone, today })).filter(({ state }) => state !== 'waits');
     if (open.length > 0) {
       const { checks } = await compiledEdition(tx, { organisationId, editionId: head.editionId });
       const what = open.map(({ checkId }) => checks.get(checkId)?.check.name ?? checkId).join(', ');

@@ -1,10 +1,10 @@
 import type { Transaction } from '@/db/connect';
-import { lockWatch, selectWatchReadings, updateWatch } from '@/db/queries/watch';
+import { lockWatch, updateWatch } from '@/db/queries/watch';
 import { siteDay } from '@/lib/case/site-day';
 import type { JobQueue } from '@/lib/jobs';
-import { addDays, dueReadings } from '@/lib/watch';
+import { addDays } from '@/lib/watch';
 import { nextMorning } from '../notice/morning';
-import { standingReads, watchedOf } from './standing';
+import { dueOfWatch } from './standing';
 
 /** Days until somebody is told again of what is still not read. */
 const AGAIN_AFTER_DAYS = 3;
@@ -32,8 +32,7 @@ export async function planWatchReminder(tx: Transaction, { jobs, now }: { jobs: 
   if (!watch || watch.endedAt) return;
   const at = now();
   const today = siteDay(at, timeZone);
-  const reads = standingReads(await selectWatchReadings(tx, { organisationId, watchId }), timeZone);
-  const dues = dueReadings(watchedOf(watch, timeZone), reads, { today });
+  const dues = await dueOfWatch(tx, watch, { timeZone, today });
   const comingDue = dues.filter(({ state }) => state === 'waits').map(({ dueOn }) => reminderOn(dueOn, timeZone));
   const again = dues.length > comingDue.length ? [againAt()] : [];
   const remindAt = earliest([...comingDue, ...again]);
