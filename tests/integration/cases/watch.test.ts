@@ -65,6 +65,8 @@ async function watched({ repairs = 0, odometer }: { repairs?: number; odometer?:
   };
   const read = async (checkId: string, answer: { state?: string; value?: string; odometer?: string }, id = newId()) => {
     await readCautions(ctx, caseId, checkId);
+    // What is written in the same instant has no order on the unit's record.
+    clock.forward(1000);
     return addWatchReading({ ctx, input: { id, caseId, watchId, checkId, ...answer } });
   };
   const end = (outcome: 'held' | 'comeback' | 'lost', why?: string, by = ctx) => endWatch({ ctx: by, input: { caseId, watchId, outcome, why } });
