@@ -68,8 +68,8 @@ describe('the jobs of an organisation', () => {
 
   test('show their error in words, without a stack or a statement', async () => {
     const tenant = await makeTenant(databases, { roles: ['administrator'] });
-    await job({ of: tenant, state: 'failed', output: { name: 'Error', message: 'The object of the photo is gone\n    at secret.ts:1', stack: 'at secret.ts:1' } });
-    await job({ of: tenant, state: 'failed', output: { message: 'Failed query: select "email" from "person"\nparams: a@people.test', cause: { code: '57014' } } });
+    await job({ of: tenant, state: 'failed', at: new Date('2026-03-01T09:00:00Z'), output: { name: 'Error', message: 'The object of the photo is gone\n    at secret.ts:1', stack: 'at secret.ts:1' } });
+    await job({ of: tenant, state: 'failed', at: new Date('2026-03-02T09:00:00Z'), output: { message: 'Failed query: select "email" from "person"\nparams: a@people.test', cause: { code: '57014' } } });
     const { rows } = await listJobs({ ctx: tenant.ctx, input: { kind: 'make-thumbnail' } });
     expect(rows.map(({ error }) => error)).toEqual(['Something went wrong inside Carryover. Its log says what.', 'The object of the photo is gone']);
     expect(JSON.stringify(rows)).not.toMatch(/secret|select|people\.test/);
