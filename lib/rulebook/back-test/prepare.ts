@@ -19,6 +19,8 @@ export interface PreparedCase {
   scores: Float64Array;
   /** p by cause. */
   posterior: Float64Array;
+  /** By check: why it was asked. */
+  asked: NonNullable<ProvedCase['asked']>;
 }
 
 export interface PreparedCases {
@@ -59,7 +61,7 @@ export function prepareCases(compiled: CompiledRulebook, cases: readonly ProvedC
     const items = evidenceItems(compiled, used, firedByPredicates(compiled, used));
     const logPriors = priorsFor(compiled, each.facts ?? {}).map(Math.log);
     const scores = scoresOf(compiled, items, logPriors);
-    return [{ id: each.id, truth, used, items, logPriors, scores, posterior: posteriorOf(scores) }];
+    return [{ id: each.id, truth, used, items, logPriors, scores, posterior: posteriorOf(scores), asked: each.asked ?? {} }];
   });
   return { compiled, cases: prepared, unknownCause, unknownFindings };
 }
