@@ -116,6 +116,12 @@ const ROWS = [
     typesAllowed: true,
   },
   {
+    folder: 'lib/rulebook/**',
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES('diagnose', 'units'), '@/lib/diagnose/record-run', 'zod', 'json-rules-engine'],
+    because: 'What a rulebook says, does and learns is worked out of what is handed to it, in a browser too.',
+    typesAllowed: true,
+  },
+  {
     folder: 'lib/schemas/**',
     never: [...FRAMEWORK, ...DATABASE, ...APPLICATION, '@/lib/services', '@/lib/services/**', '@/lib/auth/session'],
     because: 'Schemas are shared by form, action, route and service.',

@@ -5,6 +5,7 @@ export { RulebookError, FindingError, lineOf, type Problem, type FindingErrorCod
 export { RANKER_VERSION } from './ranker-version';
 export { natsOf, decibansOf } from './decibans';
 export { parseRulebook, type ParsedRulebook } from './schema';
+export { readRule, type ReadRule } from './read-rule';
 export { compileRulebook } from './compile-rulebook';
 export { compileTrusted } from './compile';
 export type { CompiledRulebook, CompiledCheck, CompiledRule, CompiledGroup } from './compiled';

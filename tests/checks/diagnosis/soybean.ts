@@ -2,10 +2,11 @@
  * Soybean (Large) as a rulebook: one json-rules-engine rule for each value of each symptom, weights learned from the
  * first 307 rows, judged over the other 376 by the run of record.
  */
-import { compileRulebook, decibansOf, type Check, type CompiledRulebook, type EvidenceGroup, type Rule } from '@/lib/diagnose';
+import { compileRulebook, decibansOf, type Check, type CompiledRulebook, type EvidenceGroup, type Finding, type Rule } from '@/lib/diagnose';
 import { runOfRecord } from '@/lib/diagnose/record-run';
 import { logLoss, multiClassBrier, topClass, topShare, type Prediction } from '@/lib/diagnose/scores';
 import { expectedCalibrationError, reliabilityBins } from '@/lib/diagnose/scores-reliability';
+import type { ProvedCase } from '@/lib/rulebook/proved-case';
 import { readRows, type Proofs } from '../../support/outside-values';
 import { causesWithElse, checkOf, found, NAIVE } from './small-rulebook';
 
@@ -41,13 +42,19 @@ function smoothed(rows: readonly Row[], symptom: string, values: readonly string
   return values.map((value) => (answered.filter((row) => row[symptom] === value).length + 1) / (answered.length + values.length));
 }
 
-export function soybeanRulebook(rho: number): CompiledRulebook {
+/** P(value | class) of each value of a symptom. */
+type Shares = (name: string, symptom: string, values: readonly string[]) => number[];
+const counted: Shares = (name, symptom, values) => smoothed(learned.filter((row) => classOf(row) === name), symptom, values);
+/** Nobody has counted anything yet. */
+export const uniform: Shares = (_name, _symptom, values) => values.map(() => 1 / values.length);
+
+export function soybeanRulebook(rho: number, shares: Shares = counted): CompiledRulebook {
   const evidenceGroups: EvidenceGroup[] = GROUPS.map(({ id }) => ({ id, name: id, rho }));
   const rules: Rule[] = [];
   const checks = symptoms.map((symptom, column): Check => {
     const values = valuesOf(symptom);
     const background = smoothed(learned, symptom, values);
-    const given = classes.map((name) => smoothed(learned.filter((row) => classOf(row) === name), symptom, values));
+    const given = classes.map((name) => shares(name, symptom, values));
     const group = GROUPS.find(({ from, to }) => column + 1 >= from && column + 1 <= to)?.id;
     values.forEach((value, v) => rules.push({
       name: `${symptom} is ${value}`,
@@ -73,16 +80,21 @@ export interface Judgement {
   agreed: number;
 }
 
-async function judge(rho: number): Promise<Judgement> {
-  const compiled = soybeanRulebook(rho);
+const findingsOf = (row: Row): Finding[] =>
+  symptoms.flatMap((symptom) => {
+    const value = row[symptom] ?? MISSING;
+    return value === MISSING ? [] : [found(symptom, idOf(value))];
+  });
+
+/** The first 307 rows as cases whose cause was proved. */
+export const learnedCases = (): ProvedCase[] =>
+  learned.map((row, index) => ({ id: `row-${index + 1}`, truth: classOf(row), findings: findingsOf(row) }));
+
+export async function judge(compiled: CompiledRulebook): Promise<Judgement> {
   const predictions: Prediction[] = [];
   let agreed = 0;
   for (const row of judged) {
-    const findings = symptoms.flatMap((symptom) => {
-      const value = row[symptom] ?? MISSING;
-      return value === MISSING ? [] : [found(symptom, idOf(value))];
-    });
-    const run = await runOfRecord(compiled, findings);
+    const run = await runOfRecord(compiled, findingsOf(row));
     if (run.agreed) agreed += 1;
     const p = new Map(run.ranking.causes.map((cause) => [cause.causeId, cause.p]));
     predictions.push({ p: classes.map((name) => p.get(name) ?? NaN), truth: classes.indexOf(classOf(row)) });
@@ -93,7 +105,7 @@ async function judge(rho: number): Promise<Judgement> {
 const done = new Map<number, Promise<Judgement>>();
 /** All 376 rows through the run of record, once for each rho. */
 export function judgement(rho: number): Promise<Judgement> {
-  const running = done.get(rho) ?? judge(rho);
+  const running = done.get(rho) ?? judge(soybeanRulebook(rho));
   done.set(rho, running);
   return running;
 }
