@@ -1,4 +1,4 @@
-import { CsvError, parse, type Info } from 'csv-parse';
+import { type CsvError, parse, type Info } from 'csv-parse';
 import { saidDelimiter, type Delimiter } from './delimiter';
 import type { Encoding } from './encoding';
 
@@ -29,12 +29,15 @@ export async function* readTable(bytes: AsyncIterable<Uint8Array>, { encoding, d
   const waiting: TableRow[] = [];
   let broken: CsvError | undefined;
   let lastLine = 0;
+  let doubled = 0;
   // Taken one piece at a time, so that no more than a piece is held.
   parser.on('readable', () => {
     for (let next: unknown = parser.read(); next !== null; next = parser.read()) {
       const { record, info } = next as { record: string[]; info: Info };
-      waiting.push({ line: info.lines, cells: record });
-      lastLine = info.lines;
+      // csv-parse counts a break of two characters between quotes as two lines.
+      doubled += record.reduce((count, cell) => count + cell.split('\r\n').length - 1, 0);
+      lastLine = info.lines - doubled;
+      waiting.push({ line: lastLine, cells: record });
     }
   });
   const failed = new Promise<void>((resolve) => parser.once('error', (error: CsvError) => { broken = error; resolve(); }));
