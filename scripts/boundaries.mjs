@@ -122,6 +122,12 @@ const ROWS = [
     typesAllowed: true,
   },
   {
+    folder: 'lib/import/**',
+    // Of the schemas only the words that are chosen from, and which measures a form asks for.
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES('schemas', 'units'), '@/lib/schemas', 'zod'],
+    because: 'A file is read into records, and judged, by what is handed to it.',
+  },
+  {
     folder: 'lib/schemas/**',
     never: [...FRAMEWORK, ...DATABASE, ...APPLICATION, '@/lib/services', '@/lib/services/**', '@/lib/auth/session'],
     because: 'Schemas are shared by form, action, route and service.',
