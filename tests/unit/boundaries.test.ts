@@ -22,6 +22,7 @@ const BROKEN: [file: string, source: string][] = [
   ['lib/break-in/index.ts', "import { useState } from 'react'; export default useState;"],
   ['lib/fitting/index.ts', "import { termLabel } from '@/lib/schemas/terms'; export default termLabel;"],
   ['lib/watch/index.ts', "import { rank } from '@/lib/diagnose'; export default rank;"],
+  ['lib/gate/next.ts', "import { rank } from '@/lib/diagnose'; export default rank;"],
   ['lib/schemas/case.ts', "import { unit } from '@/db/schema'; export default unit;"],
   ['lib/services/case/open.ts', "import { database } from '@/db'; export default database;"],
   ['lib/services/case/open.ts', "import { cookies } from 'next/headers'; export default cookies;"],
