@@ -25,7 +25,7 @@ export const enterGateInput = z.strictObject({
   id: rowId,
   fleetNumber: line('the unit’s number', 40),
   name: line('your name', 80),
-  complaints: several(rulebookId).refine((chosen) => chosen.length > 0, 'Choose at least one.'),
+  complaints: several(rulebookId),
 });
 
 export const answerGateInput = z.strictObject({
@@ -41,6 +41,8 @@ export const answerGateInput = z.strictObject({
   /** Instead of an answer. */
   cannotTell: checkbox,
 });
+
+export const finishGateInput = z.strictObject({ token, passageId: rowId });
 
 export const gateOutcomeInput = z.strictObject({});
 
