@@ -56,6 +56,7 @@ export const PAGES: readonly Page[] = [
   { route: 'settings/sites', shape: 'list', what: 'the sites' },
   { route: 'settings/sites/new', shape: 'form', what: 'the form' },
   { route: 'settings/sites/[id]', shape: 'form', what: 'the site' },
+  { route: 'settings/sites/[id]/gates/[gateId]', shape: 'record', what: 'the gate' },
   { route: 'settings/organisation', shape: 'form', what: 'the organisation' },
   { route: 'settings/jobs', shape: 'list', what: 'the jobs' },
   { route: 'settings/audit', shape: 'list', what: 'the audit' },

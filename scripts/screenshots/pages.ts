@@ -40,6 +40,7 @@ export const SHOTS: readonly Shot[] = [
   shot('(auth)/invite/[token]', 'invite-link', 'nobody', ({ invitation }) => invitation),
   shot('(auth)/invite/[token]', 'invite-dead-link', 'nobody', '/invite/not-a-link-that-was-sent-by-anybody-here'),
   shot('(auth)/watch/[token]', 'watch-dead-link', 'nobody', '/watch/not-a-link-that-was-given-to-anybody-here'),
+  shot('(auth)/gate/[token]', 'gate-dead-link', 'nobody', '/gate/not-a-link-that-was-given-to-anybody-here'),
   shot(null, 'not-found-outside', 'nobody', '/nothing-here'),
   shot(null, 'not-found-inside', 'technician', '/nothing-here'),
 
@@ -125,6 +126,7 @@ export const SHOTS: readonly Shot[] = [
   shot(`${IN}/settings/sites`, 'settings-sites', 'administrator', '/settings/sites'),
   shot(`${IN}/settings/sites/[id]`, 'settings-site', 'administrator', ({ site }) => site && `/settings/sites/${site}`),
   shot(`${IN}/settings/sites/[id]`, 'settings-site-not-found', 'administrator', `/settings/sites/${NOWHERE}`),
+  shot(`${IN}/settings/sites/[id]/gates/[gateId]`, 'settings-gate-not-found', 'administrator', ({ site }) => site && `/settings/sites/${site}/gates/${NOWHERE}`),
   shot(`${IN}/settings/sites/new`, 'settings-site-new', 'administrator', '/settings/sites/new'),
   shot(`${IN}/settings/organisation`, 'settings-organisation', 'administrator', '/settings/organisation'),
   shot(`${IN}/settings/organisation`, 'settings-organisation-not-allowed', 'technician', '/settings/organisation'),

@@ -80,6 +80,8 @@ import * as rulebook from './rulebook/route';
 import * as search from './search/route';
 import * as sites from './sites/route';
 import * as sitesId from './sites/[id]/route';
+import * as sitesIdGates from './sites/[id]/gates/route';
+import * as sitesIdGatesGateIdRevoke from './sites/[id]/gates/[gateId]/revoke/route';
 import * as units from './units/route';
 import * as unitsId from './units/[id]/route';
 import * as unitsIdBaseline from './units/[id]/baseline/route';
@@ -177,6 +179,8 @@ export const ROUTES = {
   '/search': search,
   '/sites': sites,
   '/sites/{id}': sitesId,
+  '/sites/{id}/gates': sitesIdGates,
+  '/sites/{id}/gates/{gateId}/revoke': sitesIdGatesGateIdRevoke,
   '/units': units,
   '/units/{id}': unitsId,
   '/units/{id}/baseline': unitsIdBaseline,

@@ -26,9 +26,21 @@ afterAll(() => databases.close());
 const visitor = () => makeVisitor(databases, { now: clock.now });
 const cannotTell: Answering = () => null;
 
+/** Worn over many miles, with all about it in order. */
+const WORN: Readonly<Record<string, { state?: string; value?: string }>> = {
+  onset: { state: 'gradually' },
+  'miles-since-fit': { value: '400,000 mi' },
+  'previous-fits': { value: '0' },
+  'intake-filter-state': { state: 'clean' },
+  'intake-hose-state': { state: 'sound' },
+  'oil-amount': { state: 'light' },
+};
+const worn: Answering = ({ id }) => WORN[id] ?? null;
+
 /** Says what would be seen were this the cause: of each check the answer that speaks for it most. */
 const speaksFor = (causeId: string): Answering => ({ id, states }) => {
   const weights = (state: string) => defaultRulebook.rules.filter(({ conditions }) => JSON.stringify(conditions).includes(`"${id}"`) && JSON.stringify(conditions).includes(`"${state}"`)).reduce((sum, rule) => sum + (rule.weights[causeId] ?? 0), 0);
+  if (id === 'miles-since-fit') return { value: '400,000 mi' };
   if (states.length === 0) return null;
   const [best] = [...states].sort((a, b) => weights(b.id) - weights(a.id));
   return best ? { state: best.id } : null;
@@ -119,13 +131,13 @@ describe('a passage', () => {
   it('says “fit” when the answers point to the compressor itself, and opens a case that is nobody’s yet', async () => {
     const { token } = await makeAGate(workshop);
     const { fleetNumber, unitId } = await makeAUnit(workshop);
-    const { page, passageId, asked } = await walk({ visitor: visitor(), token, fleetNumber, answer: speaksFor('rings-worn'), complaints: ['complaint-oil', 'complaint-slow-air'], clock });
+    const { page, passageId, asked } = await walk({ visitor: visitor(), token, fleetNumber, answer: worn, complaints: ['complaint-oil', 'complaint-slow-air'], clock });
     expect(page).toMatchObject({ verdict: 'fit', fleetNumber, isMoreKnown: expect.any(Boolean) });
     expect(page.reasons.map(({ cause }) => cause)).toContain('Rings worn');
     const [opened, ...others] = await casesOf(workshop, unitId);
     expect(others).toEqual([]);
     expect(opened).toMatchObject({ status: 'open', opened_by: null, opened_by_name: 'Kim, at the gate “Parts counter”', assigned_to: null });
-    const { head, findings, causes } = await readCase({ ctx: workshop.ctx, input: { caseId: opened?.id ?? '' } });
+    const { head, state: { findings, causes } } = await readCase({ ctx: workshop.ctx, input: { caseId: opened?.id ?? '' } });
     expect(head.openedBy).toBe('Kim, at the gate “Parts counter”');
     expect(causes[0]?.causeId).toBe('rings-worn');
     for (const { check } of asked) expect(findings.find(({ checkId }) => checkId === check.id)).toMatchObject({ person: 'Kim, at the gate “Parts counter”' });
@@ -150,7 +162,7 @@ describe('a passage', () => {
     clock.forward(60_000);
     const { asked } = await walk({ visitor: visitor(), token, fleetNumber, complaints: ['complaint-noise'], answer: speaksFor('drain-choked-by-sealant'), clock });
     expect(await casesOf(workshop, unitId)).toMatchObject([{ id: caseId }]);
-    const { findings } = await readCase({ ctx: workshop.ctx, input: { caseId } });
+    const { state: { findings } } = await readCase({ ctx: workshop.ctx, input: { caseId } });
     expect(findings.map(({ checkId }) => checkId)).toEqual(expect.arrayContaining(['complaint-noise', ...asked.map(({ check }) => check.id)]));
     expect(findings.filter(({ checkId }) => checkId === 'complaint-oil')).toHaveLength(1);
   });
