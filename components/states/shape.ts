@@ -39,6 +39,7 @@ export const PAGES: readonly Page[] = [
   { route: 'bench', shape: 'list', what: 'the sums' },
   { route: 'bench/[sum]', shape: 'form', what: 'the sum' },
   { route: 'bench/line-survey', shape: 'form', what: 'the survey' },
+  { route: 'fleet/gate', shape: 'list', what: 'how gated fits went' },
   { route: 'search', shape: 'list', what: 'what is found' },
   { route: 'notices', shape: 'list', what: 'your notices' },
   { route: 'not-allowed', shape: 'form', what: 'the page' },

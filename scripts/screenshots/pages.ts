@@ -123,6 +123,7 @@ export const SHOTS: readonly Shot[] = [
   shot(`${IN}/settings/people/[id]`, 'settings-person', 'administrator', ({ person }) => person && `/settings/people/${person}`),
   shot(`${IN}/settings/people/[id]`, 'settings-person-not-found', 'administrator', `/settings/people/${NOWHERE}`),
   shot(`${IN}/settings/people/invite`, 'settings-invite', 'administrator', '/settings/people/invite'),
+  shot(`${IN}/fleet/gate`, 'fleet-gate', 'manager', '/fleet/gate'),
   shot(`${IN}/settings/sites`, 'settings-sites', 'administrator', '/settings/sites'),
   shot(`${IN}/settings/sites/[id]`, 'settings-site', 'administrator', ({ site }) => site && `/settings/sites/${site}`),
   shot(`${IN}/settings/sites/[id]`, 'settings-site-not-found', 'administrator', `/settings/sites/${NOWHERE}`),

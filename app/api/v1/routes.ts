@@ -53,6 +53,7 @@ import * as casesIdReopen from './cases/[id]/reopen/route';
 import * as casesIdRulebook from './cases/[id]/rulebook/route';
 import * as deviceCases from './device/cases/route';
 import * as editionsId from './editions/[id]/route';
+import * as fleetGate from './fleet/gate/route';
 import * as fitsId from './fits/[id]/route';
 import * as fitsIdStrike from './fits/[id]/strike/route';
 import * as fitsIdTakeOut from './fits/[id]/take-out/route';
@@ -152,6 +153,7 @@ export const ROUTES = {
   '/cases/{id}/rulebook': casesIdRulebook,
   '/device/cases': deviceCases,
   '/editions/{id}': editionsId,
+  '/fleet/gate': fleetGate,
   '/fits/{id}': fitsId,
   '/fits/{id}/strike': fitsIdStrike,
   '/fits/{id}/take-out': fitsIdTakeOut,

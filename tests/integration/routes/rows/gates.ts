@@ -8,6 +8,7 @@ import { createUnit } from '@/lib/services/unit/create';
 import { feature } from '../row';
 
 const SITES = PERMITTED['site.manage'];
+const FLEET = PERMITTED['fleet.see'];
 const LINK = '(auth)/gate/[token]';
 const PAGE = '(signed-in)/settings/sites';
 const API = 'api/v1/sites/[id]/gates';
@@ -35,6 +36,8 @@ export const gates = feature({
     { page: `${PAGE}/[id]/gates/[gateId]`, roles: SITES, params: ({ siteId, gateId }) => ({ id: siteId, gateId }) },
     { action: PAGE, name: 'makeGate', roles: SITES, form: ({ siteId }) => ({ id: newId(), siteId, name: 'Counter', askWhom: 'the desk', days: '30' }) },
     { action: PAGE, name: 'revokeGate', roles: SITES, form: ({ siteId, gateId }) => ({ siteId, gateId }) },
+    { page: '(signed-in)/fleet/gate', roles: FLEET },
+    { route: 'api/v1/fleet/gate', method: 'GET', roles: FLEET },
     { route: API, method: 'GET', roles: SITES, params: ({ siteId }) => ({ id: siteId }) },
     { route: API, method: 'POST', roles: SITES, params: ({ siteId }) => ({ id: siteId }), body: () => ({ id: newId(), name: 'Counter', askWhom: 'the desk', days: 30 }) },
     { route: `${API}/[gateId]/revoke`, method: 'POST', roles: SITES, params: ({ siteId, gateId }) => ({ id: siteId, gateId }) },
