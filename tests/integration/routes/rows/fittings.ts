@@ -1,4 +1,5 @@
 import { PERMITTED } from '@/lib/auth/permissions';
+import { siteDay } from '@/lib/case/site-day';
 import { defaultRulebook } from '@/lib/diagnose/default-rulebook';
 import { newId } from '@/lib/ids';
 import { startBreakIn, endBreakIn } from '@/lib/services/break-in/run';
@@ -24,7 +25,7 @@ export const fittings = feature({
   async prepare({ tenant, as }) {
     const ctx = as('technician');
     const [caseId, otherId, readyId, runId, endedId] = [newId(), newId(), newId(), newId(), newId()];
-    const installedOn = ctx.now().toISOString().slice(0, 10);
+    const installedOn = siteDay(ctx.now(), 'America/Chicago');
     const modelId = await makeModel(as('engineer'));
     for (const id of [caseId, otherId, readyId]) {
       await openCase({ ctx, input: { id, unit: { kind: 'new', id: newId(), fleetNumber: id, siteId: tenant.siteId, vehicleKind: 'truck' }, complaints: ['complaint-oil'] } });
