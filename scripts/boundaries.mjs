@@ -128,6 +128,12 @@ const ROWS = [
     because: 'A file is read into records, and judged, by what is handed to it.',
   },
   {
+    folder: 'lib/gate/**',
+    never: [...FRAMEWORK, ...DATABASE, ...NODE, ...APPLICATION, ...OTHER_LIBRARIES('diagnose'), '@/lib/diagnose', '@/lib/diagnose/record-run', 'zod'],
+    because: 'What a gate asks and says follows from the ranking, handed to it.',
+    typesAllowed: true,
+  },
+  {
     folder: 'lib/schemas/**',
     never: [...FRAMEWORK, ...DATABASE, ...APPLICATION, '@/lib/services', '@/lib/services/**', '@/lib/auth/session'],
     because: 'Schemas are shared by form, action, route and service.',

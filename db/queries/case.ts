@@ -65,7 +65,7 @@ export async function selectCaseHead(db: Executor, of: Of) {
       asTyped: cases.asTyped,
       vehicleState: cases.vehicleState,
       openedAt: cases.openedAt,
-      openedBy: person.name,
+      openedBy: sql<string>`coalesce(${person.name}, ${cases.openedByName})`,
       assignedTo: cases.assignedTo,
       editionId: cases.editionId,
       editionNumber: edition.number,
@@ -85,7 +85,7 @@ export async function selectCaseHead(db: Executor, of: Of) {
     .innerJoin(unit, and(eq(unit.organisationId, cases.organisationId), eq(unit.id, cases.unitId)))
     .innerJoin(site, and(eq(site.organisationId, cases.organisationId), eq(site.id, cases.siteId)))
     .innerJoin(edition, and(eq(edition.organisationId, cases.organisationId), eq(edition.id, cases.editionId)))
-    .innerJoin(person, eq(person.id, cases.openedBy))
+    .leftJoin(person, eq(person.id, cases.openedBy))
     .leftJoin(fit, and(eq(fit.organisationId, cases.organisationId), eq(fit.id, cases.fitId)))
     .leftJoin(compressorModel, and(eq(compressorModel.organisationId, fit.organisationId), eq(compressorModel.id, fit.modelId)))
     .where(thisCase(of));
@@ -106,9 +106,9 @@ export async function insertCaseEvent(db: Executor, row: typeof caseEvent.$infer
 
 export async function selectCaseEvents(db: Executor, { organisationId, caseId }: Of) {
   return db
-    .select({ id: caseEvent.id, kind: caseEvent.kind, reason: caseEvent.reason, callId: caseEvent.callId, person: person.name, at: caseEvent.at })
+    .select({ id: caseEvent.id, kind: caseEvent.kind, reason: caseEvent.reason, callId: caseEvent.callId, person: sql<string>`coalesce(${person.name}, ${caseEvent.byName})`, at: caseEvent.at })
     .from(caseEvent)
-    .innerJoin(person, eq(person.id, caseEvent.personId))
+    .leftJoin(person, eq(person.id, caseEvent.personId))
     .where(and(eq(caseEvent.organisationId, organisationId), eq(caseEvent.caseId, caseId)))
     .orderBy(asc(caseEvent.at), asc(caseEvent.id));
 }

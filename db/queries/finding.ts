@@ -1,4 +1,4 @@
-import { and, asc, eq, lte, type SQL } from 'drizzle-orm';
+import { and, asc, eq, lte, sql, type SQL } from 'drizzle-orm';
 import type { Executor } from '@/db/connect';
 import { cautionAcknowledgement, finding, findingNote, person } from '@/db/schema';
 
@@ -31,13 +31,13 @@ export async function selectFindings(db: Executor, of: Of & { receivedBy?: Date 
       sum: finding.sum,
       judgement: finding.judgement,
       baseline: finding.baseline,
-      person: person.name,
+      person: sql<string>`coalesce(${person.name}, ${finding.byName})`,
       correctedAt: finding.correctedAt,
       receivedAt: finding.receivedAt,
       late: finding.late,
     })
     .from(finding)
-    .innerJoin(person, eq(person.id, finding.personId))
+    .leftJoin(person, eq(person.id, finding.personId))
     .where(and(...ofCase(of), ...(of.receivedBy ? [lte(finding.receivedAt, of.receivedBy)] : [])))
     .orderBy(asc(finding.receivedAt), asc(finding.id));
 }

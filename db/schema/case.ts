@@ -33,7 +33,9 @@ export const cases = pgTable(
     /** How the vehicle stands now: what the next check needs not be set up again. */
     vehicleState: jsonb().$type<SetUp>().notNull().default({}),
     assignedTo: uuid().references(() => person.id),
-    openedBy: uuid().notNull().references(() => person.id),
+    /** Null: somebody at a gate, who called himself so. */
+    openedBy: uuid().references(() => person.id),
+    openedByName: text(),
     openedAt: instant().notNull(),
     closedAt: instant(),
     /** The case whose repair didn't hold. */
@@ -67,7 +69,9 @@ export const caseEvent = pgTable(
     reason: text(),
     /** The call that it made or took back. */
     callId: uuid(),
-    personId: uuid().notNull().references(() => person.id),
+    /** Null: somebody at a gate, who called himself so. */
+    personId: uuid().references(() => person.id),
+    byName: text(),
     at: instant().notNull(),
   },
   (t) => [

@@ -41,7 +41,9 @@ export const finding = pgTable(
     judgement: jsonb().$type<Judgement>(),
     /** The healthy baseline that it was compared with when it was given; later sets change nothing of it. null: none. */
     baseline: jsonb().$type<Baseline>(),
-    personId: uuid().notNull().references(() => person.id),
+    /** Null: somebody without a sign-in, who called himself so. */
+    personId: uuid().references(() => person.id),
+    byName: text(),
     /** The device's clock, and what to add to it to get the server's. */
     deviceAt: instant().notNull(),
     clockOffsetMs: si().notNull(),

@@ -18,6 +18,7 @@ export * from './search-entry';
 export * from './mail';
 export * from './repair';
 export * from './fitting';
+export * from './gate';
 export * from './break-in';
 export * from './release';
 export * from './dossier';

@@ -18,6 +18,7 @@ export const PERMITTED = {
   'bench.use': ANYONE,
   'limit.see': CASE_WORKERS,
   'limit.adopt': ['engineer', 'manager'],
+  'fleet.see': ['engineer', 'manager'],
   'own-settings': ANYONE,
   'people.manage': ['administrator'],
   'site.manage': ['administrator'],

@@ -18,6 +18,7 @@ export const SCOPES = {
   'models:write': { needs: 'model.edit', does: 'Add and change compressor models' },
   'sites:read': { needs: 'own-settings', does: 'See sites' },
   'sites:write': { needs: 'site.manage', does: 'Add and change sites' },
+  'fleet:read': { needs: 'fleet.see', does: 'See fleet statistics' },
   'people:read': { needs: 'case.see', does: 'See who can be given a case' },
   'jobs:read': { needs: 'job.see', does: 'See what Carryover does by itself: mail, pictures, nightly work' },
   'jobs:write': { needs: 'job.retry', does: 'Try jobs again that failed' },

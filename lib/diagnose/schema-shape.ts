@@ -153,6 +153,7 @@ const remedySchema = z.strictObject({
   fix: z.strictObject({ minutes: minutesSchema }),
   parts: listOf(z.strictObject({ name: nameSchema, cost: moneySchema }), LIMITS.items),
   seenInBay: z.boolean(),
+  fitsCompressor: z.literal(true).optional(),
   steps: textsSchema,
   cautions: idsSchema,
   ...sourced,

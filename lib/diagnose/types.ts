@@ -256,6 +256,8 @@ export interface Remedy {
   parts: { name: string; cost: number }[];
   /** false: success shows only in the weeks after (oil), so a wrong one costs a comeback. */
   seenInBay: boolean;
+  /** Another compressor is fitted: true, or left out. */
+  fitsCompressor?: true;
   steps: string[];
   cautions: string[];
   basis: Basis;

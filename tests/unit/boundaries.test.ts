@@ -25,6 +25,7 @@ const BROKEN: [file: string, source: string][] = [
   ['lib/rulebook/back-test/prepare.ts', "import { runOfRecord } from '@/lib/diagnose/record-run'; export default runOfRecord;"],
   ['lib/rulebook/back-test/prepare.ts', "import { readFileSync } from 'node:fs'; export default readFileSync;"],
   ['lib/import/read-table.ts', "import { createReadStream } from 'node:fs'; export default createReadStream;"],
+  ['lib/gate/next.ts', "import { rank } from '@/lib/diagnose'; export default rank;"],
   ['lib/schemas/case.ts', "import { unit } from '@/db/schema'; export default unit;"],
   ['lib/services/case/open.ts', "import { database } from '@/db'; export default database;"],
   ['lib/services/case/open.ts', "import { cookies } from 'next/headers'; export default cookies;"],

@@ -53,6 +53,7 @@ import * as casesIdReopen from './cases/[id]/reopen/route';
 import * as casesIdRulebook from './cases/[id]/rulebook/route';
 import * as deviceCases from './device/cases/route';
 import * as editionsId from './editions/[id]/route';
+import * as fleetGate from './fleet/gate/route';
 import * as fitsId from './fits/[id]/route';
 import * as fitsIdStrike from './fits/[id]/strike/route';
 import * as fitsIdTakeOut from './fits/[id]/take-out/route';
@@ -80,6 +81,8 @@ import * as rulebook from './rulebook/route';
 import * as search from './search/route';
 import * as sites from './sites/route';
 import * as sitesId from './sites/[id]/route';
+import * as sitesIdGates from './sites/[id]/gates/route';
+import * as sitesIdGatesGateIdRevoke from './sites/[id]/gates/[gateId]/revoke/route';
 import * as units from './units/route';
 import * as unitsId from './units/[id]/route';
 import * as unitsIdBaseline from './units/[id]/baseline/route';
@@ -150,6 +153,7 @@ export const ROUTES = {
   '/cases/{id}/rulebook': casesIdRulebook,
   '/device/cases': deviceCases,
   '/editions/{id}': editionsId,
+  '/fleet/gate': fleetGate,
   '/fits/{id}': fitsId,
   '/fits/{id}/strike': fitsIdStrike,
   '/fits/{id}/take-out': fitsIdTakeOut,
@@ -177,6 +181,8 @@ export const ROUTES = {
   '/search': search,
   '/sites': sites,
   '/sites/{id}': sitesId,
+  '/sites/{id}/gates': sitesIdGates,
+  '/sites/{id}/gates/{gateId}/revoke': sitesIdGatesGateIdRevoke,
   '/units': units,
   '/units/{id}': unitsId,
   '/units/{id}/baseline': unitsIdBaseline,

@@ -15,7 +15,7 @@ export function catchRows(rows: DemoRows, { checks }: CompiledRulebook, random: 
   const open = rows.cases.filter(({ id, status }) => status === 'open' && !caught.has(id)).slice(-BOTTLES);
   for (const { organisationId, id: caseId, openedBy, engineS, asTyped } of open) {
     const last = rows.finding.filter((finding) => finding.caseId === caseId).at(-1);
-    if (!last) continue;
+    if (!last || !openedBy) continue;
     const id = seededId(`catch ${caseId}`);
     const row: Row<'oilCatch'> = { organisationId, id, caseId, checkId: CHECK, stage: { kind: 'diagnosis' }, startedAt: last.receivedAt, startedBy: openedBy, engineS, asTyped: asTyped?.engineS ? { engineS: asTyped.engineS } : {}, place: 'at the purge outlet', createdAt: last.receivedAt };
     rows.oilCatch.push(row);

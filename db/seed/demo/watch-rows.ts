@@ -26,7 +26,7 @@ export function watchRows(rows: DemoRows, { proof, checks }: Rulebook, today: Da
   for (const [i, { organisationId, id: caseId, unitId, openedBy: startedBy }] of watched.slice(-WATCHED).reverse().entries()) {
     const call = called.get(caseId);
     const plan = call && planFor(proof, call.mainCause);
-    if (!plan || !checks.some(({ id }) => id === CHECK)) continue;
+    if (!plan || !startedBy || !checks.some(({ id }) => id === CHECK)) continue;
     const id = seededId(`watch ${caseId}`);
     const startedAt = new Date(call.at.getTime() + DAY_MS);
     const begin: Row<'watch'>['begin'] = statements.map((statement, place) => (i > 0 && place === 0 ? { statement, answer: 'not-applicable', why: LINES_AS_THEY_WERE } : { statement, answer: 'yes', why: null }));

@@ -1,26 +1,18 @@
 import type { z } from 'zod';
-import { insertCase, insertCaseEvent, selectCaseHead, takeCaseNumber } from '@/db/queries/case';
+import { selectCaseHead } from '@/db/queries/case';
 import { selectPublishedEdition } from '@/db/queries/edition';
-import { insertFindings } from '@/db/queries/finding';
-import { insertHolds } from '@/db/queries/unit-hold';
 import { selectUnit } from '@/db/queries/unit';
 import { PERMITTED } from '@/lib/auth/permissions';
-import { findingsForRanking } from '@/lib/case/findings-for-ranking';
-import { releaseHolds } from '@/lib/case/release-holds';
 import { siteDay } from '@/lib/case/site-day';
-import type { Finding } from '@/lib/diagnose';
-import { findingsFromRecord } from '@/lib/diagnose/findings-from-record';
-import { AS_PARKED } from '@/lib/diagnose/set-up';
 import { conflict, invalid, notFound } from '@/lib/errors';
-import { newId } from '@/lib/ids';
 import { openCaseInput } from '@/lib/schemas/case';
 import { defineWrite, type Work } from '../define';
 import { compiledEdition } from '../edition/compiled';
 import { addUnit } from '../unit/add-unit';
 import { noteReading } from '../unit/note-reading';
 import { unitRecord } from '../unit/unit-record';
-import { complaintFindings, complaintIds } from './complaints';
-import { makeRun } from './run-of-record';
+import { beginCase } from './begin';
+import { complaintIds } from './complaints';
 
 /**
  * Opens a case on a unit, known or made on the spot: complaints and what the record knows become its first findings,
@@ -66,54 +58,21 @@ export async function writeCase(work: Work<z.output<typeof openCaseInput>>, { co
   });
   const record = await unitRecord(tx, { organisationId, unitId, on: onDay });
 
-  const asFinding = (finding: Omit<Finding, 'id'>, source: 'asked' | 'record') => ({
-    ...finding,
-    id: newId(at.getTime()),
+  const number = await beginCase(tx, {
     organisationId,
     caseId: input.id,
-    source,
-    judgement: null,
-    kind: 'state',
-    askedBecause: 'always',
-    personId: ctx.person.id,
-    deviceAt: at,
-    clockOffsetMs: 0,
-    correctedAt: at,
-    receivedAt: at,
-  });
-  const rows = [
-    ...findingsFromRecord(compiled, record.facts).map((finding) => asFinding(finding, 'record')),
-    ...complaintFindings(input.complaints).map((finding) => asFinding(finding, 'asked')),
-  ];
-
-  const held = releaseHolds(compiled, rows);
-  const number = await takeCaseNumber(tx, organisationId);
-  const inserted = await insertCase(tx, {
-    organisationId,
-    id: input.id,
-    number,
-    unitId,
-    siteId: unit.siteId,
-    fitId: record.fitId,
+    unit,
+    record,
     editionId: edition.id,
+    compiled,
     complaints: input.complaints,
     complaintWords: input.complaintWords || null,
-    odometerM: reading?.odometerM ?? null,
-    engineS: reading?.engineS ?? null,
-    asTyped: reading?.asTyped ?? {},
-    vehicleState: { ...AS_PARKED, access: [] },
-    releaseHolds: held,
+    reading,
+    by: { personId: ctx.person.id },
     assignedTo: ctx.person.id,
-    openedBy: ctx.person.id,
     comebackOf,
-    openedAt: at,
+    at,
   });
-  if (!inserted) throw conflict('This case is being opened by another request. Look for it in the list.');
-  await insertCaseEvent(tx, { organisationId, id: newId(at.getTime()), caseId: input.id, kind: 'opened', personId: ctx.person.id, at });
-
-  await insertFindings(tx, rows);
-  await insertHolds(tx, held.map((checkId) => ({ organisationId, id: newId(at.getTime()), unitId, caseId: input.id, checkId, findingId: rows.findLast((row) => row.checkId === checkId)?.id, placedAt: at })));
-  await makeRun(tx, { organisationId, caseId: input.id, editionId: edition.id, compiled, findings: findingsForRanking([...rows]), recordFacts: record.facts, becauseOf: null, at });
   audit({
     entity: 'case',
     entityId: input.id,

@@ -20,6 +20,9 @@ export const LIMITS = {
   'reset by address': { most: 5, windowMs: 60 * MINUTE_MS },
   'reset by network': { most: 40, windowMs: 60 * MINUTE_MS },
   'link by network': { most: 60, windowMs: 15 * MINUTE_MS },
+  // A passage is a dozen requests, and a counter has one network address.
+  'gate by network': { most: 400, windowMs: 15 * MINUTE_MS },
+  'gate unit by network': { most: 40, windowMs: 15 * MINUTE_MS },
   'dossier by network': { most: 60, windowMs: 15 * MINUTE_MS },
 } as const satisfies Record<string, Limit>;
 

@@ -7,7 +7,8 @@ interface Answered {
   organisationId: string;
   unitId: string;
   caseId: string;
-  personId: string;
+  /** null: somebody without a sign-in. */
+  personId: string | null;
   check: CompiledCheck;
   finding: { id: string; kind: string; says: boolean; late: boolean };
   /** Whether the case now holds the release by this check. */

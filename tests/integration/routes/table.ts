@@ -7,6 +7,7 @@ import { catches } from './rows/catches';
 import { claims } from './rows/claims';
 import { device } from './rows/device';
 import { dossiers } from './rows/dossiers';
+import { gates } from './rows/gates';
 import { jobs } from './rows/jobs';
 import { limits } from './rows/limits';
 import { models } from './rows/models';
@@ -25,4 +26,4 @@ import { units } from './rows/units';
  * `app` is not here, and tries wrong roles, another organisation, malformed and oversized input on each. A feature adds
  * its file of rows to `rows/` and its name here.
  */
-export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, catches, device, photos, units, limits, models, search, jobs, repairs, fittings, settings, tokens, claims, dossiers, notices, watches];
+export const FEATURES: readonly Feature[] = [signingIn, api, bench, cases, catches, device, photos, units, limits, models, search, jobs, repairs, fittings, settings, tokens, claims, dossiers, notices, watches, gates];

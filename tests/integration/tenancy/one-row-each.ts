@@ -59,6 +59,10 @@ export async function insertOneRowEach(tx: Transaction, { organisationId, siteId
   await tx.insert(schema.watch).values({ ...of, id: watchId, caseId, unitId, causeId: 'cause', plan: {} as never, begin: [], startedAt: AT, startedBy: personId });
   await tx.insert(schema.watchLink).values({ ...of, id: newId(), watchId, caseId, checkId: 'c', forWhom: 'Driver', expiresAt: AT, createdBy: personId });
   await tx.insert(schema.watchReading).values({ ...of, id: newId(), watchId, caseId, checkId: 'c', kind: 'state', shares: [], verdict: 'in-order', personId, at: AT });
+  const [gateId, passageId] = [newId(), newId()];
+  await tx.insert(schema.gate).values({ ...of, id: gateId, siteId, name: 'Counter', askWhom: 'Desk', expiresAt: AT, createdBy: personId });
+  await tx.insert(schema.gatePassage).values({ ...of, id: passageId, gateId, siteId, unitId, editionId, complaints: [], byName: 'Kim', startedAt: AT });
+  await tx.insert(schema.gateAnswer).values({ ...of, id: newId(), passageId, checkId: 'c', place: 1, answer: { kind: 'cannot-tell' }, cautions: [], minutes: 1, at: AT });
   await tx.insert(schema.savedView).values({ ...of, id: newId(), personId, list: 'cases', name: 'Mine', query: 'whose=me' });
   await tx.insert(schema.removal).values({ ...of, id: newId(), entity: 'unit', entityId: unitId, kind: 'hide', reason: 'Test', personId, at: AT });
   await tx.insert(schema.audit).values({ ...of, id: newId(), action: 'test', entity: 'unit', entityId: unitId, changed: {} });

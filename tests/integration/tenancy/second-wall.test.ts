@@ -136,7 +136,7 @@ describe('rights of the application', () => {
   });
 
   test('let it change what has a present state, and no record', async () => {
-    expect(await rightsOn('UPDATE')).toEqual(['adopted_limit', 'api_token', 'attachment', 'attempt', 'baseline_set', 'break_in_run', 'case', 'claim', 'compressor_model', 'core_credit', 'dossier', 'fit', 'fitting', 'invitation', 'mail', 'membership', 'notice', 'notice_preference', 'oil_catch', 'oil_weighing', 'organisation', 'person', 'repair', 'saved_view', 'site', 'unit', 'unit_hold', 'watch', 'watch_link', 'watch_reading']);
+    expect(await rightsOn('UPDATE')).toEqual(['adopted_limit', 'api_token', 'attachment', 'attempt', 'baseline_set', 'break_in_run', 'case', 'claim', 'compressor_model', 'core_credit', 'dossier', 'fit', 'fitting', 'gate', 'gate_passage', 'invitation', 'mail', 'membership', 'notice', 'notice_preference', 'oil_catch', 'oil_weighing', 'organisation', 'person', 'repair', 'saved_view', 'site', 'unit', 'unit_hold', 'watch', 'watch_link', 'watch_reading']);
   });
 
   test('let it add no organisation, person or membership, and not touch password links', async () => {

@@ -29,6 +29,7 @@ export const remedies: Remedy[] = [
       { name: 'Dryer cartridge', cost: 80 },
     ],
     seenInBay: false,
+    fitsCompressor: true,
     steps: [
       ...makeSafeAndDrain,
       'Let the coolant cool, drain it as far as the head needs, and cap the lines.',

@@ -61,6 +61,7 @@ export const remedies: Remedy[] = [
       { name: 'Dryer cartridge', cost: 80 },
     ],
     seenInBay: true,
+    fitsCompressor: true,
     steps: [
       ...makeSafeAndDrain,
       'Take the feed line off and see whether clean oil comes through it and whether metal lies in its screen or port.',

@@ -78,6 +78,7 @@ export const remedies: Remedy[] = [
       { name: 'Discharge line, governor, oil feed line and mounting gasket', cost: 275 },
     ],
     seenInBay: true,
+    fitsCompressor: true,
     steps: [
       ...makeSafeAndDrain,
       'Wipe inside the intake after the filter with a clean white cloth. Dust there proves the leak: photograph it.',
