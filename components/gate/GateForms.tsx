@@ -1,6 +1,7 @@
 'use client';
 
 import { Form } from '@/components/forms/Form';
+import { Hidden } from '@/components/forms/Hidden';
 import { useForm } from '@/components/forms/use-form';
 import { CheckboxField } from '@/components/ui/CheckboxField';
 import { FieldError } from '@/components/ui/FieldError';
@@ -26,8 +27,7 @@ export function EnterForm({ action, token, newId, complaints }: EnterProps) {
   const form = useForm(action);
   return (
     <Form form={form} label="Unit" errorTitle="Not begun yet">
-      <input type="hidden" name="token" value={token} readOnly />
-      <input type="hidden" name="id" value={newId} readOnly />
+      <Hidden values={{ token, id: newId }} />
       <TextField label="Unit number" autoComplete="off" autoCapitalize="characters" required {...form.field('fleetNumber')} />
       <fieldset className="grid gap-1" aria-describedby={form.errors.complaints ? 'complaints-error' : undefined}>
         <legend className="label mb-2">Why is a compressor wanted?</legend>
@@ -55,10 +55,7 @@ export function AnswerForm({ action, token, passageId, newId, check }: AnswerPro
   const form = useForm(action);
   return (
     <Form form={form} label="Answer" errorTitle="Not saved yet">
-      <input type="hidden" name="token" value={token} readOnly />
-      <input type="hidden" name="id" value={newId} readOnly />
-      <input type="hidden" name="passageId" value={passageId} readOnly />
-      <input type="hidden" name="checkId" value={check.id} readOnly />
+      <Hidden values={{ token, id: newId, passageId, checkId: check.id }} />
       {check.cautions.length > 0 && (
         <CheckboxField label="I have read the cautions" required name="hasReadCautions" error={form.errors.hasReadCautions} defaultChecked={form.isTicked('hasReadCautions', 'on', false)} />
       )}
@@ -86,8 +83,7 @@ export function FinishForm({ action, token, passageId }: { action: Action; token
   const form = useForm(action);
   return (
     <Form form={form} label="Verdict">
-      <input type="hidden" name="token" value={token} readOnly />
-      <input type="hidden" name="passageId" value={passageId} readOnly />
+      <Hidden values={{ token, passageId }} />
       <SubmitButton className={BIG} pendingLabel="Working it out…">See the verdict</SubmitButton>
     </Form>
   );

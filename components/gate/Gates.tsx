@@ -3,6 +3,7 @@
 import Link from 'next/link';
 import { useActionState } from 'react';
 import { Form } from '@/components/forms/Form';
+import { Hidden } from '@/components/forms/Hidden';
 import { useForm } from '@/components/forms/use-form';
 import { SubmitButton } from '@/components/ui/SubmitButton';
 import { TextField } from '@/components/ui/TextField';
@@ -47,8 +48,7 @@ export function Gates({ siteId, newId, gates, make, revoke }: Props) {
         </ul>
       )}
       <Form key={newId} form={form} label="A gate" saved="Its link is in the list above.">
-        <input type="hidden" name="id" value={newId} readOnly />
-        <input type="hidden" name="siteId" value={siteId} readOnly />
+        <Hidden values={{ id: newId, siteId }} />
         <TextField label="Where it hangs" hint="Such as: Parts counter" autoComplete="off" required {...form.field('name')} />
         <TextField label="Whom to ask" hint="Its page says this where it can’t help: the workshop desk, extension 12" autoComplete="off" required {...form.field('askWhom')} />
         <TextField label="Days that it works" inputMode="numeric" autoComplete="off" required {...form.field('days', '365')} />
@@ -62,8 +62,7 @@ function Revoke({ siteId, gate, action }: { siteId: string; gate: Gate; action: 
   const [state, submit] = useActionState(action, null);
   return (
     <form action={submit}>
-      <input type="hidden" name="siteId" value={siteId} />
-      <input type="hidden" name="gateId" value={gate.id} />
+      <Hidden values={{ siteId, gateId: gate.id }} />
       <SubmitButton variant="quiet" pendingLabel="Revoking…">Revoke<span className="sr-only"> the gate {gate.name}</span></SubmitButton>
       <span role="status">{state && !state.ok ? state.message : ''}</span>
     </form>

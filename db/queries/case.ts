@@ -1,6 +1,7 @@
 import { and, asc, eq, sql } from 'drizzle-orm';
 import type { Executor } from '@/db/connect';
 import { call, caseEvent, cases, compressorModel, edition, fit, organisation, person, site, unit } from '@/db/schema';
+import { authorName } from './author';
 
 interface Of {
   organisationId: string;
@@ -65,7 +66,7 @@ export async function selectCaseHead(db: Executor, of: Of) {
       asTyped: cases.asTyped,
       vehicleState: cases.vehicleState,
       openedAt: cases.openedAt,
-      openedBy: sql<string>`coalesce(${person.name}, ${cases.openedByName})`,
+      openedBy: authorName(cases.openedByName),
       assignedTo: cases.assignedTo,
       editionId: cases.editionId,
       editionNumber: edition.number,
@@ -106,7 +107,7 @@ export async function insertCaseEvent(db: Executor, row: typeof caseEvent.$infer
 
 export async function selectCaseEvents(db: Executor, { organisationId, caseId }: Of) {
   return db
-    .select({ id: caseEvent.id, kind: caseEvent.kind, reason: caseEvent.reason, callId: caseEvent.callId, person: sql<string>`coalesce(${person.name}, ${caseEvent.byName})`, at: caseEvent.at })
+    .select({ id: caseEvent.id, kind: caseEvent.kind, reason: caseEvent.reason, callId: caseEvent.callId, person: authorName(caseEvent.byName), at: caseEvent.at })
     .from(caseEvent)
     .leftJoin(person, eq(person.id, caseEvent.personId))
     .where(and(eq(caseEvent.organisationId, organisationId), eq(caseEvent.caseId, caseId)))

@@ -1,6 +1,7 @@
-import { and, asc, eq, lte, sql, type SQL } from 'drizzle-orm';
+import { and, asc, eq, lte, type SQL } from 'drizzle-orm';
 import type { Executor } from '@/db/connect';
 import { cautionAcknowledgement, finding, findingNote, person } from '@/db/schema';
+import { authorName } from './author';
 
 interface Of {
   organisationId: string;
@@ -31,7 +32,7 @@ export async function selectFindings(db: Executor, of: Of & { receivedBy?: Date 
       sum: finding.sum,
       judgement: finding.judgement,
       baseline: finding.baseline,
-      person: sql<string>`coalesce(${person.name}, ${finding.byName})`,
+      person: authorName(finding.byName),
       correctedAt: finding.correctedAt,
       receivedAt: finding.receivedAt,
       late: finding.late,

@@ -41,13 +41,13 @@ export async function selectGateOutcome(db: Executor, { organisationId, today, h
         exists (select 1 from "case" c where c.organisation_id = f.organisation_id and c.unit_id = f.unit_id
           and (c.opened_at at time zone s.time_zone)::date > f.installed_on
           and (c.opened_at at time zone s.time_zone)::date <= f.installed_on + ${horizonDays}::int) as came_back,
-        (select coalesce(sum(cl.settled_amount), 0) from claim cl join "case" c on c.organisation_id = cl.organisation_id and c.id = cl.case_id
-          where c.organisation_id = f.organisation_id and c.fit_id = f.id and cl.state in ('paid', 'part-paid')) as paid,
-        exists (select 1 from claim cl join "case" c on c.organisation_id = cl.organisation_id and c.id = cl.case_id
-          where c.organisation_id = f.organisation_id and c.fit_id = f.id and cl.state in ('paid', 'part-paid')) as claim_paid
+        settled.paid, settled.claims > 0 as claim_paid
       from fit f
       join unit u on u.organisation_id = f.organisation_id and u.id = f.unit_id
       join site s on s.organisation_id = u.organisation_id and s.id = u.site_id
+      cross join lateral (select count(*) as claims, coalesce(sum(cl.settled_amount), 0) as paid
+        from claim cl join "case" c on c.organisation_id = cl.organisation_id and c.id = cl.case_id
+        where c.organisation_id = f.organisation_id and c.fit_id = f.id and cl.state in ('paid', 'part-paid')) settled
       where f.organisation_id = ${organisationId} and f.hidden_at is null
         and f.installed_on >= (select day from begun) and f.installed_on <= ${today}::date)
     select verdict,

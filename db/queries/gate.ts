@@ -1,6 +1,6 @@
 import { and, asc, desc, eq, sql } from 'drizzle-orm';
 import type { Executor } from '@/db/connect';
-import { cases, gate, gateAnswer, gatePassage, person, site, unit } from '@/db/schema';
+import { cases, gate, gateAnswer, gatePassage, person, unit } from '@/db/schema';
 
 interface OfGate {
   organisationId: string;
@@ -46,9 +46,8 @@ export async function updateGate(db: Executor, { organisationId, gateId }: OfGat
 /** The unit of a site that bears a number, however it is capitalised; hidden ones are not there. */
 export async function selectUnitAtSite(db: Executor, { organisationId, siteId, fleetNumber }: { organisationId: string; siteId: string; fleetNumber: string }) {
   const [row] = await db
-    .select({ id: unit.id, fleetNumber: unit.fleetNumber, timeZone: site.timeZone })
+    .select({ id: unit.id })
     .from(unit)
-    .innerJoin(site, and(eq(site.organisationId, unit.organisationId), eq(site.id, unit.siteId)))
     .where(and(eq(unit.organisationId, organisationId), eq(unit.siteId, siteId), sql`lower(${unit.fleetNumber}) = lower(${fleetNumber})`, sql`${unit.hiddenAt} is null`))
     .limit(1);
   return row;
@@ -76,9 +75,10 @@ export async function lockPassage(db: Executor, { organisationId, passageId }: O
   return row;
 }
 
-/** @returns false when one with this id is there already */
-export async function insertPassage(db: Executor, row: typeof gatePassage.$inferInsert): Promise<boolean> {
-  return (await db.insert(gatePassage).values(row).onConflictDoNothing().returning({ id: gatePassage.id })).length > 0;
+/** The new row; undefined when one with this id is there already. */
+export async function insertPassage(db: Executor, row: typeof gatePassage.$inferInsert): Promise<GatePassageRow | undefined> {
+  const [inserted] = await db.insert(gatePassage).values(row).onConflictDoNothing().returning();
+  return inserted;
 }
 
 export async function updatePassage(db: Executor, { organisationId, passageId }: OfPassage, set: Partial<typeof gatePassage.$inferInsert>): Promise<void> {

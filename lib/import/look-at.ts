@@ -41,7 +41,6 @@ export async function lookAt(bytes: Uint8Array, said: Partial<Pick<Looked, 'enco
   return { encoding, delimiter, header: header.map((text) => text.trim()), sample: whole.slice(0, ROWS_SHOWN), rows: whole };
 }
 
- 
 async function* inOnePiece(bytes: Uint8Array): AsyncGenerator<Uint8Array> {
   yield bytes;
 }

@@ -36,17 +36,19 @@ function ofModel(record: ImportRecord): RowProblem[] {
   ];
 }
 
-function ofFit({ installedOn = '', removedOn, whyOut, removedOdometer, removedEngineHours, ...record }: ImportRecord): RowProblem[] {
+function ofFit(record: ImportRecord): RowProblem[] {
+  const { installedOn = '', removedOn, whyOut, removedOdometer, removedEngineHours } = record;
   const isOut = whyOut !== undefined || removedOdometer !== undefined || removedEngineHours !== undefined;
-  const [from, to] = ['installedOdometer', 'installedEngineHours'].map((field) => si(record, field));
-  const [until, past] = [removedOdometer, removedEngineHours].map((value) => si({ value: value ?? '' }, 'value'));
-  const runsBack = (before: number | undefined, after: number | undefined) => before !== undefined && after !== undefined && after < before;
+  const runsBack = (installed: string, removed: string) => {
+    const [before, after] = [si(record, installed), si(record, removed)];
+    return before !== undefined && after !== undefined && after < before;
+  };
   return [
     ...(isOut && !removedOn ? [problem('It says something of its coming out, but not the day.', 'The day on which it came out, or nothing of its coming out.')] : []),
     ...(removedOn && !whyOut ? [problem('It came out, and nothing says why.', 'Why it came out; “Nobody knows” will do.')] : []),
     ...(removedOn && removedOn < installedOn ? [problem('It came out before it was fitted.', 'A day on or after that of the fitting. Check the order of day and month as well.')] : []),
-    ...(runsBack(from, until) ? [problem('Its odometer ran backwards.', 'A figure at coming out that isn’t lower than at the fitting.')] : []),
-    ...(runsBack(to, past) ? [problem('Its hour meter ran backwards.', 'A figure at coming out that isn’t lower than at the fitting.')] : []),
+    ...(runsBack('installedOdometer', 'removedOdometer') ? [problem('Its odometer ran backwards.', 'A figure at coming out that isn’t lower than at the fitting.')] : []),
+    ...(runsBack('installedEngineHours', 'removedEngineHours') ? [problem('Its hour meter ran backwards.', 'A figure at coming out that isn’t lower than at the fitting.')] : []),
   ];
 }
 

@@ -7,7 +7,7 @@ import { listGatesInput, viewGateInput } from '@/lib/schemas/gate';
 import { defineRead } from '../define';
 import { gatePath } from './path';
 
-const stateOf = ({ revokedAt, expiresAt }: GateRow, now: Date) => (revokedAt ? 'revoked' : expiresAt <= now ? 'expired' : 'open');
+const stateOf = ({ revokedAt, expiresAt }: GateRow, now: Date): 'open' | 'revoked' | 'expired' => (revokedAt ? 'revoked' : expiresAt <= now ? 'expired' : 'open');
 
 /** The gates of a site, the latest first, each with where its link leads while it works. */
 export const listGates = defineRead({
@@ -28,7 +28,7 @@ export const listGates = defineRead({
         createdBy,
         createdAt: row.createdAt.toISOString(),
         expiresAt: row.expiresAt.toISOString(),
-        state: state as 'open' | 'revoked' | 'expired',
+        state,
         passages,
         /** null: it leads nowhere any more. */
         path: state === 'open' ? gatePath(ctx.signingSecret, row) : null,

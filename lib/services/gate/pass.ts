@@ -34,8 +34,9 @@ export const enterGate = defineVisit({
       const open = await selectOpenCase(tx, { ...of, unitId: unit.id });
       const row = { ...of, id, gateId: gate.id, unitId: unit.id, editionId: open?.editionId ?? editionId, complaints: [...new Set(complaints)], byName: name, startedAt: at };
       // Another organisation's passage with this id isn't seen from here.
-      if (!(await insertPassage(tx, row))) throw takenPassage();
-      await settleAtItsEnd(tx, opened, id);
+      const passage = await insertPassage(tx, row);
+      if (!passage) throw takenPassage();
+      await settleAtItsEnd(tx, opened, passage);
       return { passageId: id };
     });
   },
@@ -60,7 +61,7 @@ export const answerGate = defineVisit({
       readAnswer(check, answer, opened.writing);
       const written = await insertGateAnswer(tx, { organisationId: passage.organisationId, id, passageId, checkId, place: spent.checks + 1, answer, cautions: answer.kind === 'cannot-tell' ? [] : cautions, minutes: next.minutes, at: opened.at });
       if (!written) throw conflict('This id belongs to another answer.');
-      await settleAtItsEnd(tx, opened, passageId);
+      await settleAtItsEnd(tx, opened, passage);
       return { passageId };
     }),
 });
@@ -70,8 +71,9 @@ export const finishGate = defineVisit({
   input: finishGateInput,
   run: ({ visitor, input: { token, passageId } }) =>
     throughGate(visitor, token, async (tx, opened) => {
-      if (!(await passageOf(tx, opened, passageId))) throw notFound('passage');
-      await settleAtItsEnd(tx, opened, passageId);
+      const found = await passageOf(tx, opened, passageId);
+      if (!found) throw notFound('passage');
+      await settleAtItsEnd(tx, opened, found.passage);
       return { passageId };
     }),
 });
@@ -88,8 +90,7 @@ function answerOf({ check }: CompiledCheck, { state, value, cannotTell }: { stat
   return { kind: 'state', state, sureness: 'sure' };
 }
 
-async function settleAtItsEnd(tx: Transaction, opened: Opened, passageId: string): Promise<void> {
-  const passage: GatePassageRow | undefined = (await passageOf(tx, opened, passageId))?.passage;
-  if (!passage || passage.endedAt) return;
+async function settleAtItsEnd(tx: Transaction, opened: Opened, passage: GatePassageRow): Promise<void> {
+  if (passage.endedAt) return;
   if (!(await standingOf(tx, opened, passage)).next) await settlePassage(tx, opened, passage);
 }

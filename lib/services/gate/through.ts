@@ -1,15 +1,14 @@
-import { asTenant, type Transaction } from '@/db/connect';
+import type { Transaction } from '@/db/connect';
 import { lockGate, lockPassage, type GatePassageRow, type GateRow } from '@/db/queries/gate';
 import { findOrganisation } from '@/db/queries/organisation';
 import { findSite } from '@/db/queries/site';
 import { readGateToken, type GateToken } from '@/lib/auth/gate-token';
 import type { Writing } from '@/lib/bench/read-texts';
-import { AppError, conflict } from '@/lib/errors';
+import { conflict } from '@/lib/errors';
 import type { Visitor } from '../context';
-import { tryOrRefuse } from '../session/tries';
+import { deadLink, throughSignedLink } from '../signed-visit';
 import { decimalMarkOf, unitsOfCountry } from '../units-of-measure';
 
-const dead = (message: string) => new AppError('not-found', message);
 const NOT_OURS = 'This is not one of our links: ask whoever gave it to you for a new one.';
 
 /** A passage is of one visit to the counter: what was asked the day before is asked anew. */
@@ -25,20 +24,16 @@ export interface Opened {
 }
 
 /** Does something with what a gate's link opens; a link that leads nowhere is refused with one sentence. */
-export async function throughGate<Result>(visitor: Visitor, token: string, work: (tx: Transaction, opened: Opened) => Promise<Result>): Promise<Result> {
-  await tryOrRefuse(visitor, 'gate by network', visitor.network);
-  const said = readGateToken(visitor.signingSecret, token);
-  if (!said) throw dead(NOT_OURS);
-  return asTenant(visitor.db, { organisationId: said.organisationId }, async (tx) => work(tx, await open(tx, said, visitor.now())));
-}
+export const throughGate = <Result>(visitor: Visitor, token: string, work: (tx: Transaction, opened: Opened) => Promise<Result>): Promise<Result> =>
+  throughSignedLink(visitor, { token, read: readGateToken, limit: 'gate by network', notOurs: NOT_OURS }, async (tx, said) => work(tx, await open(tx, said, visitor.now())));
 
 async function open(tx: Transaction, { organisationId, gateId, siteId, expiresAt }: GateToken, at: Date): Promise<Opened> {
   const gate = await lockGate(tx, { organisationId, gateId });
-  if (gate?.siteId !== siteId || gate.expiresAt.getTime() !== expiresAt) throw dead(NOT_OURS);
-  if (gate.revokedAt) throw dead('This link was taken back by whoever gave it out.');
-  if (gate.expiresAt <= at) throw dead('This link has run out: ask whoever gave it to you for a new one.');
+  if (gate?.siteId !== siteId || gate.expiresAt.getTime() !== expiresAt) throw deadLink(NOT_OURS);
+  if (gate.revokedAt) throw deadLink('This link was taken back by whoever gave it out.');
+  if (gate.expiresAt <= at) throw deadLink('This link has run out: ask whoever gave it to you for a new one.');
   const [site, organisation] = [await findSite(tx, { organisationId, siteId }), await findOrganisation(tx, { organisationId })];
-  if (!site || !organisation) throw dead(NOT_OURS);
+  if (!site || !organisation) throw deadLink(NOT_OURS);
   return { gate, site, organisation: { id: organisationId, ...organisation }, writing: { units: unitsOfCountry(organisation.country), decimal: decimalMarkOf(organisation.country) }, at };
 }
 

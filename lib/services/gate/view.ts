@@ -1,15 +1,13 @@
 import type { Transaction } from '@/db/connect';
-import type { GatePassageRow } from '@/db/queries/gate';
 import { selectPublishedEdition } from '@/db/queries/edition';
+import { selectGateAnswers, type GatePassageRow } from '@/db/queries/gate';
 import { answerText } from '@/lib/case/view/answer-text';
-import { measureOf } from '@/lib/case/view/measure';
-import { unreadOf } from '@/lib/case/view/work-cautions';
+import { checkForVisitor } from '@/lib/case/view/check-for-visitor';
 import type { CompiledRulebook } from '@/lib/diagnose';
 import { conflict } from '@/lib/errors';
 import { causesOfTheCompressor } from '@/lib/gate/verdict';
 import { MOST_CHECKS } from '@/lib/gate/next';
 import { openGateInput } from '@/lib/schemas/gate';
-import { unitDefinition, type Quantity } from '@/lib/units';
 import { complaintIds } from '../case/complaints';
 import { compiledEdition } from '../edition/compiled';
 import { defineVisit } from '../visit';
@@ -35,30 +33,21 @@ export const viewGatePage = defineVisit({
       if (!found) return { ...place, step: 'enter' as const, complaints: await complaintsOf(tx, organisation.id) };
       const { passage, fleetNumber } = found;
       const of = { ...place, passageId: passage.id, fleetNumber };
-      const { compiled, answers, spent, next } = await standingOf(tx, opened, passage);
       if (passage.endedAt) {
-        const { compiled: then } = { compiled: await compiledEdition(tx, { organisationId: organisation.id, editionId: passage.editionId }) };
+        const then = await compiledEdition(tx, { organisationId: organisation.id, editionId: passage.editionId });
+        const answers = await selectGateAnswers(tx, { organisationId: organisation.id, passageId: passage.id });
         return { ...of, step: 'verdict' as const, ...verdictView(then, opened, passage, readAnswers(then, answers, opened.writing)) };
       }
+      const { compiled, spent, next } = await standingOf(tx, opened, passage);
       const check = next && compiled.checks.get(next.checkId)?.check;
       if (!check) return { ...of, step: 'end' as const, answered: spent.checks };
-      const measure = measureOf(check, opened.writing.units);
       return {
         ...of,
         step: 'check' as const,
         place: spent.checks + 1,
         most: MOST_CHECKS,
         minutes: next.minutes,
-        check: {
-          id: check.id,
-          name: check.name,
-          prompt: check.prompt,
-          steps: check.steps,
-          cautions: unreadOf(compiled, check, []).cautions.map(({ text }) => text),
-          states: check.kind === 'measured' ? [] : check.states.map(({ id, label }) => ({ id, label })),
-          /** Of a figure without one; null: an answer is chosen. */
-          unit: measure && unitDefinition<Quantity>(measure.quantity, measure.unit).symbol,
-        },
+        check: { id: check.id, ...checkForVisitor(compiled, check, opened.writing.units) },
       };
     }),
 });

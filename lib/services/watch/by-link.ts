@@ -1,22 +1,19 @@
-import { asTenant, type Transaction } from '@/db/connect';
+import type { Transaction } from '@/db/connect';
 import { insertAudit } from '@/db/queries/audit';
 import { lockCase, selectCaseHead } from '@/db/queries/case';
 import { findOrganisation } from '@/db/queries/organisation';
 import { insertWatchReading, lockWatch, lockWatchLink, updateWatchLink } from '@/db/queries/watch';
 import { readWatchToken, type WatchToken } from '@/lib/auth/watch-token';
-import { AppError, invalid } from '@/lib/errors';
-import { measureOf } from '@/lib/case/view/measure';
-import { unreadOf } from '@/lib/case/view/work-cautions';
+import { checkForVisitor } from '@/lib/case/view/check-for-visitor';
+import { invalid } from '@/lib/errors';
 import { readByLinkInput, viewWatchLinkInput } from '@/lib/schemas/watch';
-import { unitDefinition, type Quantity } from '@/lib/units';
 import type { Visitor } from '../context';
 import { compiledEdition } from '../edition/compiled';
-import { tryOrRefuse } from '../session/tries';
+import { deadLink, throughSignedLink } from '../signed-visit';
 import { unitsOfCountry } from '../units-of-measure';
 import { defineVisit } from '../visit';
 import { readReading, takenReading } from './read-reading';
 
-const dead = (message: string) => new AppError('not-found', message);
 const NOT_OURS = 'This is not one of our links: ask whoever sent it for a new one.';
 
 /** What the page of a link shows, and nothing else of the case. */
@@ -25,19 +22,12 @@ export const viewWatchLink = defineVisit({
   run: ({ visitor, input: { token } }) =>
     throughLink(visitor, token, (_tx, { compiled, link, fleetNumber, organisation }) => {
       const check = compiled.checks.get(link.checkId)?.check;
-      if (!check) throw dead(NOT_OURS);
+      if (!check) throw deadLink(NOT_OURS);
       const units = unitsOfCountry(organisation.country);
-      const measure = measureOf(check, units);
       return Promise.resolve({
         organisationName: organisation.name,
         fleetNumber,
-        name: check.name,
-        prompt: check.prompt,
-        steps: check.steps,
-        cautions: unreadOf(compiled, check, []).cautions.map(({ text }) => text),
-        states: check.kind === 'measured' ? [] : check.states.map(({ id, label }) => ({ id, label })),
-        /** Of a figure without one; null: an answer is chosen. */
-        unit: measure && unitDefinition<Quantity>(measure.quantity, measure.unit).symbol,
+        ...checkForVisitor(compiled, check, units),
         units,
       });
     }),
@@ -63,25 +53,21 @@ export const readByLink = defineVisit({
 type Opened = Awaited<ReturnType<typeof open>>;
 
 /** Does something with what a link opens; a link that leads nowhere is refused with one sentence. */
-async function throughLink<Result>(visitor: Visitor, token: string, work: (tx: Transaction, opened: Opened) => Promise<Result>): Promise<Result> {
-  await tryOrRefuse(visitor, 'link by network', visitor.network);
-  const said = readWatchToken(visitor.signingSecret, token);
-  if (!said) throw dead(NOT_OURS);
-  return asTenant(visitor.db, { organisationId: said.organisationId }, async (tx) => work(tx, await open(tx, said, visitor.now())));
-}
+const throughLink = <Result>(visitor: Visitor, token: string, work: (tx: Transaction, opened: Opened) => Promise<Result>): Promise<Result> =>
+  throughSignedLink(visitor, { token, read: readWatchToken, limit: 'link by network', notOurs: NOT_OURS }, async (tx, said) => work(tx, await open(tx, said, visitor.now())));
 
 async function open(tx: Transaction, { organisationId, linkId, caseId, expiresAt }: WatchToken, now: Date) {
   const of = { organisationId, caseId };
   const locked = await lockCase(tx, of);
   const seen = locked && (await lockWatchLink(tx, { organisationId, linkId }));
-  if (!locked || seen?.caseId !== caseId || seen.expiresAt.getTime() !== expiresAt) throw dead(NOT_OURS);
-  if (seen.revokedAt) throw dead('This link was taken back by whoever gave it out.');
-  if (seen.usedAt) throw dead('A reading was entered with this link already; it works once.');
-  if (seen.expiresAt <= now) throw dead('This link has run out: ask whoever sent it for a new one.');
+  if (!locked || seen?.caseId !== caseId || seen.expiresAt.getTime() !== expiresAt) throw deadLink(NOT_OURS);
+  if (seen.revokedAt) throw deadLink('This link was taken back by whoever gave it out.');
+  if (seen.usedAt) throw deadLink('A reading was entered with this link already; it works once.');
+  if (seen.expiresAt <= now) throw deadLink('This link has run out: ask whoever sent it for a new one.');
   const watch = await lockWatch(tx, { organisationId, watchId: seen.watchId });
-  if (!watch || watch.endedAt) throw dead('This unit is not watched any more: nothing needs to be read.');
+  if (!watch || watch.endedAt) throw deadLink('This unit is not watched any more: nothing needs to be read.');
   const head = await selectCaseHead(tx, of);
   const organisation = await findOrganisation(tx, { organisationId });
-  if (!head || !organisation) throw dead(NOT_OURS);
+  if (!head || !organisation) throw deadLink(NOT_OURS);
   return { link: seen, watch, organisation, fleetNumber: head.fleetNumber, compiled: await compiledEdition(tx, { organisationId, editionId: locked.editionId }) };
 }
